@@ -1,0 +1,145 @@
+import { lateness } from '../clinical/tolerance.ts'
+import { type Duration, earlier, hours, later, since } from '../time/duration.ts'
+import { type Shift, nextShift, shiftAt } from '../time/shift.ts'
+import { addDays, type LocalDay, startOfDay } from '../time/zone.ts'
+import type { Entry, WardFacts } from './kind.ts'
+
+/** The moments of one due task (UTC): it is due from `opensAt` to `closesAt`, overdue after, seriously overdue after `seriousAt`. */
+export interface DueWindow {
+  readonly dueAt: Date
+  readonly soonAt: Date
+  readonly opensAt: Date
+  readonly closesAt: Date
+  readonly seriousAt: Date
+}
+
+/** What a task's clock says: it does not concern this patient, it is suspended, or it runs towards a window. */
+export type Clock =
+  | { readonly state: 'none' }
+  | { readonly state: 'suspended'; readonly because: string }
+  | {
+      readonly state: 'running'
+      readonly window: DueWindow
+      /** The act that the clock counts from; undefined when it counts from admission or insertion. */
+      readonly last: Entry | undefined
+      /** Why it is due sooner than the plain interval. */
+      readonly because?: string
+      /** By calendar date (dwell), not by the hour. */
+      readonly byDay?: LocalDay
+    }
+
+export const noClock: Clock = { state: 'none' }
+
+/** A clock that stands still, with the reason to show. */
+export function suspended(because: string): Clock {
+  return { state: 'suspended', because }
+}
+
+/** Due `interval` of elapsed time after the last qualifying act, or after `start` when there was none. */
+export function intervalClock(options: {
+  readonly last: Entry | undefined
+  readonly start: Date
+  readonly interval: Duration
+  readonly because?: string
+}): Clock {
+  const from = options.last && options.last.performedAt > options.start ? options.last.performedAt : options.start
+  return {
+    state: 'running',
+    window: windowAround(later(from, options.interval), options.interval),
+    last: options.last,
+    ...(options.because === undefined ? {} : { because: options.because }),
+  }
+}
+
+/** The window around a due time, by the tolerance that belongs to the interval (domain 3.0). */
+export function windowAround(dueAt: Date, interval: Duration): DueWindow {
+  const { tolerance, soonBefore, seriousAfter } = lateness(interval)
+  return {
+    dueAt,
+    soonAt: earlier(dueAt, soonBefore),
+    opensAt: earlier(dueAt, tolerance),
+    closesAt: later(dueAt, tolerance),
+    seriousAt: later(dueAt, seriousAfter),
+  }
+}
+
+/** Due soon after an event: from the event until `within` has passed; seriously overdue an hour later. */
+export function promptClock(options: {
+  readonly event: Date
+  readonly within: Duration
+  readonly last: Entry | undefined
+  readonly because: string
+}): Clock {
+  const closesAt = later(options.event, options.within)
+  return {
+    state: 'running',
+    window: {
+      dueAt: closesAt,
+      soonAt: options.event,
+      opensAt: options.event,
+      closesAt,
+      seriousAt: later(closesAt, hours(1)),
+    },
+    last: options.last,
+    because: options.because,
+  }
+}
+
+/** Once in each of the ward's shifts: the first shift without a qualifying act is the window. */
+export function shiftClock(options: {
+  readonly last: Entry | undefined
+  readonly start: Date
+  readonly ward: WardFacts
+}): Clock {
+  const { last, start, ward } = options
+  const done = last !== undefined && last.performedAt >= start
+  const shift = done
+    ? nextShift(shiftAt(last.performedAt, ward.shiftTimes, ward.zone), ward.shiftTimes, ward.zone)
+    : shiftAt(start, ward.shiftTimes, ward.zone)
+  return { state: 'running', window: shiftWindow(shift, done ? shift.startsAt : start), last }
+}
+
+function shiftWindow(shift: Shift, opensAt: Date): DueWindow {
+  const length = since(shift.startsAt, shift.endsAt)
+  return {
+    dueAt: shift.endsAt,
+    soonAt: opensAt,
+    opensAt,
+    closesAt: shift.endsAt,
+    seriousAt: later(shift.endsAt, length < hours(4) ? length : hours(4)),
+  }
+}
+
+/** By calendar date: due on `dueOn`, overdue from the next local midnight, seriously a day later; `soonDays` before it is due soon. */
+export function dayClock(options: {
+  readonly dueOn: LocalDay
+  readonly soonDays: number
+  readonly ward: WardFacts
+  readonly last: Entry | undefined
+  readonly because?: string
+}): Clock {
+  const { dueOn, ward } = options
+  const opensAt = startOfDay(dueOn, ward.zone)
+  const closesAt = startOfDay(addDays(dueOn, 1), ward.zone)
+  return {
+    state: 'running',
+    window: {
+      dueAt: opensAt,
+      soonAt: startOfDay(addDays(dueOn, -options.soonDays), ward.zone),
+      opensAt,
+      closesAt,
+      seriousAt: startOfDay(addDays(dueOn, 2), ward.zone),
+    },
+    last: options.last,
+    byDay: dueOn,
+    ...(options.because === undefined ? {} : { because: options.because }),
+  }
+}
+
+/** Of two clocks, the one that falls due first; a suspended or absent clock yields to one that runs. */
+export function sooner(a: Clock, b: Clock): Clock {
+  if (a.state !== 'running') return b.state === 'none' ? a : b
+  if (b.state !== 'running') return a
+  return b.window.dueAt < a.window.dueAt ? b : a
+}
+

@@ -1,0 +1,160 @@
+import type { z } from 'zod'
+import type { ShiftTimes } from '../time/shift.ts'
+import type { LocalDay, Zone } from '../time/zone.ts'
+import type { PressureUnit } from '../clinical/units.ts'
+import type { Lane } from './lanes.ts'
+import type { Clock } from './clock.ts'
+import type { AnySetting, Values } from './policy.ts'
+import type { Warning } from './warning.ts'
+
+/** What the act needs beyond charting care in general; `can()` decides. */
+export type ChartingAct = 'chart care' | 'set care plans'
+
+/** One charted act. Never changed: a correction or a retraction is a new entry that supersedes this one. */
+export interface Entry<Data = unknown> {
+  /** UUIDv7, minted when the form was opened: the same id twice is the same act. */
+  readonly id: string
+  readonly stayId: string
+  /** Position in the stay's chart, from 1, without gaps, in the order of recording. */
+  readonly number: number
+  readonly kind: string
+  /** When the care was done (UTC). Clocks use this. */
+  readonly performedAt: Date
+  /** When it was written down (UTC). */
+  readonly recordedAt: Date
+  readonly recordedById: string
+  readonly recordedByName: string
+  readonly recordedRole: string
+  readonly witnessName: string | null
+  readonly supersedesId: string | null
+  /** Why it corrects or retracts another, or why it was written more than a day late. */
+  readonly reason: string | null
+  readonly status: 'final' | 'retracted'
+  readonly data: Data
+}
+
+/** An entry as stored: payload not read yet. */
+export type StoredEntry = Omit<Entry, 'data'> & { readonly version: number; readonly raw: unknown }
+
+/** What rules may know of the person, apart from entries. */
+export interface PatientFacts {
+  readonly bornOn: LocalDay
+  readonly upperAirway: 'open' | 'not open' | 'not known'
+  readonly ventilated: boolean
+  /** Prescribed SpO2 target in %, null when none is recorded. */
+  readonly spo2Low: number | null
+  readonly spo2High: number | null
+}
+
+/** One patient's effective entries, asked by kind object: a kind that is not imported cannot be asked for. */
+export interface PatientRecord {
+  readonly admittedAt: Date
+  readonly patient: PatientFacts
+  /** Effective entries of one kind, latest performed first. */
+  of<K extends AnyCharted>(kind: K): readonly Entry<DataOf<K>>[]
+  /** The latest effective entry of a kind, or the latest that satisfies `where`. */
+  latest<K extends AnyCharted>(kind: K, where?: (data: DataOf<K>, entry: Entry<DataOf<K>>) => boolean): Entry<DataOf<K>> | undefined
+  /** Effective entries performed at or after `from`, latest first. */
+  since<K extends AnyCharted>(kind: K, from: Date): readonly Entry<DataOf<K>>[]
+}
+
+export interface WardFacts {
+  readonly zone: Zone
+  readonly shiftTimes: ShiftTimes
+  readonly pressureUnit: PressureUnit
+}
+
+/** Everything a rule decides from. The same context gives the same answer. */
+export interface CareContext {
+  readonly record: PatientRecord
+  readonly values: Values
+  readonly ward: WardFacts
+  readonly now: Date
+}
+
+/** A kind of due care: one clock, in words and in code. */
+export interface TaskRule {
+  /** `cuff-pressure-check`; deferrals refer to it. The title is these words. */
+  readonly name: string
+  /** Airway care comes first when seriously overdue. */
+  readonly airway: boolean
+  /** The numbers it reads, for "why" and for the policy page. */
+  readonly settings: readonly AnySetting[]
+  /** Answers that the chart form starts with when opened from this task. */
+  readonly opensWith?: Readonly<Record<string, string>>
+  /** The rule in words, with the values in force. */
+  says(context: CareContext): string
+  clock(context: CareContext): Clock
+}
+
+/** The band that a number is shown against while it is typed. */
+export interface Gauge {
+  readonly field: string
+  readonly unitField?: string
+  readonly lower: number
+  readonly upper: number
+  readonly max: number
+  readonly unit: string
+}
+
+/** What is stored of a kind: enough to ask a record for its entries. Kept apart from rules, so that rules of two kinds can ask for each other's entries. */
+export interface Charted<Slug extends string, Schema extends z.ZodObject> {
+  /** Folder, URL segment and stored name; never renamed after release. */
+  readonly slug: Slug
+  /** Validation, storage shape and form fields in one declaration. */
+  readonly schema: Schema
+  /** upgrades[n] turns payload version n+1 into n+2. */
+  readonly upgrades?: readonly ((old: never) => unknown)[]
+}
+
+export interface CareKind<Slug extends string, Schema extends z.ZodObject> extends Charted<Slug, Schema> {
+  readonly title: string
+  /** The words on the button: "Chart pressure". */
+  readonly chartWords: string
+  readonly lane: Lane
+  /** Drive tests and demo data; each must pass the schema. */
+  readonly examples: readonly z.output<Schema>[]
+  /** The sentence on the timeline and before charting. */
+  summary(data: z.output<Schema>): string
+  readonly act?: ChartingAct
+  readonly settings?: readonly AnySetting[]
+  readonly tasks?: readonly TaskRule[]
+  /** What the record already says, filled in as the form opens: facts, never findings. */
+  startsWith?(context: CareContext): Readonly<Record<string, unknown>>
+  /** The usual act as one tap; it leaves out what must be looked at each time. */
+  usual?(context: CareContext): { readonly words: string; readonly answers: Readonly<Record<string, unknown>> } | undefined
+  gauges?(context: CareContext): readonly Gauge[]
+  /** Warnings about this act; `context.record` does not hold it yet, `context.now` is when it was done. */
+  warnings?(data: z.output<Schema>, context: CareContext): readonly Warning[]
+  /** Warnings that stand for as long as the record says so. */
+  standing?(context: CareContext): readonly Warning[]
+  /** Drawn as a triangle instead of a dot. */
+  outOfRange?(data: z.output<Schema>, context: CareContext): boolean
+}
+
+// biome-ignore lint/suspicious/noExplicitAny: the one place where a payload type is erased; records are asked by kind object
+export type AnyCareKind = CareKind<string, any>
+
+export type AnyCharted = Charted<string, z.ZodObject>
+
+export type DataOf<K extends AnyCharted> = z.output<K['schema']>
+
+/** Declares what is stored of a kind. */
+export function charted<const Slug extends string, Schema extends z.ZodObject>(
+  what: Charted<Slug, Schema>,
+): Charted<Slug, Schema> {
+  return what
+}
+
+/** Declares a kind of care. Keeps the literal slug and the payload type. */
+export function careKind<const Slug extends string, Schema extends z.ZodObject>(
+  kind: CareKind<Slug, Schema>,
+): CareKind<Slug, Schema> {
+  return kind
+}
+
+/** `inner-cannula-change` -> `Inner cannula change`: names of tasks and settings are their titles. */
+export function wordsOf(name: string): string {
+  const words = name.replaceAll('-', ' ')
+  return words.charAt(0).toUpperCase() + words.slice(1)
+}

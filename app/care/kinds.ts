@@ -1,0 +1,46 @@
+import { carePlan } from './care-plan/kind.ts'
+import { cuffPressure } from './cuff-pressure/kind.ts'
+import { decannulation } from './decannulation/kind.ts'
+import { deferral } from './deferral/kind.ts'
+import { innerCannula } from './inner-cannula/kind.ts'
+import type { AnyCareKind, TaskRule } from './kind.ts'
+import type { AnySetting } from './policy.ts'
+import { stomaAndSkin } from './stoma-and-skin/kind.ts'
+import { suction } from './suction/kind.ts'
+import { tubeChange } from './tube-change/kind.ts'
+
+/** Every kind of care, in the order of lists and lanes. Adding one is a folder and a line here. */
+export const careKinds = [
+  innerCannula,
+  cuffPressure,
+  stomaAndSkin,
+  suction,
+  tubeChange,
+  decannulation,
+  deferral,
+  carePlan,
+] as const satisfies readonly AnyCareKind[]
+
+export type KindSlug = (typeof careKinds)[number]['slug']
+
+const bySlug: ReadonlyMap<string, AnyCareKind> = new Map(careKinds.map(kind => [kind.slug, kind]))
+
+/** The kind stored or addressed as `slug`, if there is one. */
+export function findKind(slug: string): AnyCareKind | undefined {
+  return bySlug.get(slug)
+}
+
+/** Every setting that some kind reads, once each, in the order of the kinds. */
+export const careSettings: readonly AnySetting[] = [
+  ...new Set(careKinds.flatMap((kind: AnyCareKind) => kind.settings ?? [])),
+]
+
+export interface KindTask {
+  readonly kind: AnyCareKind
+  readonly rule: TaskRule
+}
+
+/** Every kind of due care with the kind that charts it. */
+export const careTasks: readonly KindTask[] = careKinds.flatMap((kind: AnyCareKind) =>
+  (kind.tasks ?? []).map(rule => ({ kind, rule })),
+)

@@ -1,0 +1,110 @@
+import type { LocalDay } from '../time/zone.ts'
+
+export type SettingValue = number | boolean | readonly number[]
+
+/** How far the origin of a number was checked: read at its source, read second-hand, common practice, or our own proposal. */
+export type Standing = 'published' | 'published, read second-hand' | 'common practice' | 'from memory' | 'product proposal'
+
+export interface Source {
+  readonly says: string
+  readonly standing: Standing
+}
+
+/** One number (or switch, or list) that a hospital sets. Rules ask for it by this object, so a misspelt name cannot compile. */
+export interface Setting<Value extends SettingValue = SettingValue> {
+  /** Stored in policies and care plans; never renamed after release. */
+  readonly name: string
+  readonly label: string
+  readonly unit: string
+  readonly default: Value
+  /** Allowed range of numbers; absent for switches and lists. */
+  readonly min?: number
+  readonly max?: number
+  /** A patient's care plan may override it. */
+  readonly personal?: boolean
+  readonly affects: string
+  readonly source: Source
+}
+
+export type AnySetting = Setting<number> | Setting<boolean> | Setting<readonly number[]>
+
+/** Declares a setting whose value is a number. */
+export function numberSetting(setting: Setting<number> & { readonly min: number; readonly max: number }): Setting<number> {
+  return setting
+}
+
+/** Declares a setting that is on or off. */
+export function switchSetting(setting: Setting<boolean>): Setting<boolean> {
+  return setting
+}
+
+/** Declares a setting whose value is a list of numbers, such as stocked sizes. */
+export function listSetting(setting: Setting<readonly number[]>): Setting<readonly number[]> {
+  return setting
+}
+
+/** One reviewed set of values, for one ward or (wardId null) for the whole hospital, in force from `startsAt`. */
+export interface Policy {
+  readonly id: string
+  readonly name: string
+  readonly version: number
+  readonly wardId: string | null
+  readonly reviewedBy: string
+  readonly reviewedOn: LocalDay
+  readonly startsAt: Date
+  readonly values: Readonly<Record<string, SettingValue>>
+}
+
+/** A patient's own value for one setting, with its reason and the day by which it must be looked at again. */
+export interface PersonalValue {
+  readonly setting: string
+  readonly value: number
+  readonly reason: string
+  readonly reviewOn: LocalDay
+  readonly since: Date
+  readonly by: string
+}
+
+/**
+ * The policy of a ward at a moment: the ward's own if it has one, else the hospital's; the latest that has started.
+ * Undefined when there is none, in which case no rule may run.
+ */
+export function policyInForce(policies: readonly Policy[], wardId: string, at: Date): Policy | undefined {
+  const started = policies.filter(policy => policy.startsAt <= at)
+  const own = started.filter(policy => policy.wardId === wardId)
+  return latest(own.length > 0 ? own : started.filter(policy => policy.wardId === null))
+}
+
+function latest(policies: readonly Policy[]): Policy | undefined {
+  return policies.reduce<Policy | undefined>(
+    (best, policy) => (!best || policy.startsAt > best.startsAt || (policy.startsAt.getTime() === best.startsAt.getTime() && policy.version > best.version) ? policy : best),
+    undefined,
+  )
+}
+
+/** Values to decide by: a policy with the patient's own values over it. Built by `valuesFor`. */
+export interface Values {
+  readonly policy: Policy
+  /** The value in force for this patient: own value, else the policy's, else the product's default. */
+  of<Value extends SettingValue>(setting: Setting<Value>): Value
+  /** Where that value came from. */
+  originOf(setting: AnySetting): 'care plan' | 'policy' | 'product default'
+  personal(setting: AnySetting): PersonalValue | undefined
+}
+
+/** The values in force for one patient. Personal values count only for settings that allow it. */
+export function valuesFor(policy: Policy, personal: readonly PersonalValue[] = []): Values {
+  const own = new Map(personal.map(value => [value.setting, value]))
+  const personalOf = (setting: AnySetting) => (setting.personal ? own.get(setting.name) : undefined)
+  return {
+    policy,
+    of: <Value extends SettingValue>(setting: Setting<Value>): Value => {
+      const mine = setting.personal ? own.get(setting.name)?.value : undefined
+      const value = mine ?? policy.values[setting.name] ?? setting.default
+      return (typeof value === typeof setting.default ? value : setting.default) as Value
+    },
+    originOf: setting =>
+      personalOf(setting) ? 'care plan' : policy.values[setting.name] === undefined ? 'product default' : 'policy',
+    personal: personalOf,
+  }
+}

@@ -1,0 +1,22 @@
+import { careKind } from '../kind.ts'
+import { tubeExamples } from './examples.ts'
+import { tubeChanges } from './schema.ts'
+import { tubeChangeSettings } from './settings.ts'
+import { tubeSentence } from './sentence.ts'
+import { tubeTasks } from './tasks.ts'
+import { standingTubeWarnings, tubeStart, tubeWarnings } from './warnings.ts'
+
+/** First insertion and every later change of the whole tube. The latest one is the tube in place. */
+export const tubeChange = careKind({
+  ...tubeChanges,
+  title: 'Tube change',
+  chartWords: 'Chart tube change',
+  lane: 'Tube',
+  examples: tubeExamples,
+  summary: tubeSentence,
+  settings: tubeChangeSettings,
+  tasks: tubeTasks,
+  startsWith: tubeStart,
+  warnings: tubeWarnings,
+  standing: standingTubeWarnings,
+})

@@ -1,0 +1,64 @@
+import type { z } from 'zod'
+import { changeByDay } from '../../clinical/dwell.ts'
+import { type LocalDay, localDay } from '../../time/zone.ts'
+import { decannulations } from '../decannulation/schema.ts'
+import type { CareContext, Entry, PatientRecord } from '../kind.ts'
+import { tubeChanges, type tubeChangeSchema } from './schema.ts'
+import { dwellDual, dwellSingle } from './settings.ts'
+
+export type TubeData = z.output<typeof tubeChangeSchema>
+export type TubeEntry = Entry<TubeData>
+
+/** The tube in place: the latest change that did not fail, unless the tube was taken out for good after it. */
+export function tubeInPlace(record: PatientRecord): TubeEntry | undefined {
+  const change = record.latest(tubeChanges, data => data.difficulty !== 'failed')
+  const removal = record.latest(decannulations)
+  return change && removal && removal.performedAt >= change.performedAt ? undefined : change
+}
+
+/** When the tube was taken out for good, if no tube has gone in since. */
+export function tubeOutSince(record: PatientRecord): Date | undefined {
+  return tubeInPlace(record) ? undefined : record.latest(decannulations)?.performedAt
+}
+
+/** Local day on which the tube in place went in: day 0 of its dwell. */
+export function insertedOn(tube: TubeEntry, context: Pick<CareContext, 'ward'>): LocalDay {
+  return tube.data.insertedOn ?? localDay(tube.performedAt, context.ward.zone)
+}
+
+export interface DwellLimit {
+  readonly days: number
+  /** Which limit is the strictest, in words. */
+  readonly because: string
+  readonly changeBy: LocalDay
+}
+
+/** The strictest of the device's label and the policy for its construction (domain R-303, R-304). */
+export function dwellLimit(tube: TubeEntry, context: CareContext): DwellLimit {
+  const setting = tube.data.construction === 'dual' ? dwellDual : dwellSingle
+  const policy = context.values.of(setting)
+  const device = tube.data.longestUseDays
+  const days = device !== undefined && device < policy ? device : policy
+  const because =
+    days === policy ? `${setting.label.toLowerCase()}: ${policy} days` : `longest use on the label: ${days} days`
+  return { days, because, changeBy: changeByDay(insertedOn(tube, context), days) }
+}
+
+/** `8.0 ISO 5366`, `6 Jackson`: the size as printed, with its system. */
+export function sizeWords(data: TubeData): string {
+  return `${data.size} ${data.sizeSystem}`
+}
+
+const cuffWords = { none: 'uncuffed', air: 'cuffed', water: 'water cuff', foam: 'foam cuff' } as const
+
+/** `8.0 ISO 5366, cuffed, dual`. */
+export function tubeWords(data: TubeData): string {
+  return `${sizeWords(data)}, ${cuffWords[data.cuff]}, ${data.construction}`
+}
+
+/** The inside diameter that a suction catheter meets: with the inner cannula in, where there is one. */
+export function workingIdMm(data: TubeData): number {
+  return data.construction === 'dual' && data.innerCannula !== 'none' && data.idWithInner !== undefined
+    ? data.idWithInner
+    : data.idWithoutInner
+}
