@@ -1,0 +1,55 @@
+import { isRouteErrorResponse } from 'react-router'
+import { LinkButton } from './button.tsx'
+import { PlainPage } from './plain-page.tsx'
+
+interface Words {
+  readonly title: string
+  readonly says: string
+}
+
+const UNREADABLE: Words = {
+  title: 'The program failed on this page',
+  says: 'If you were charting, look at the patient’s timeline before you chart again: it shows what was kept.',
+}
+
+const wordsByStatus: Readonly<Record<number, Words>> = {
+  400: { title: 'This could not be read', says: 'Nothing was charted. Go back, and try again from the form.' },
+  403: { title: 'This is not open to you', says: 'Your role or your ward does not include it. Nothing was changed.' },
+  404: { title: 'There is nothing here', says: 'The address may be mistyped, or what it showed may have been closed.' },
+  503: {
+    title: 'The database cannot be reached. Nothing was charted.',
+    says: 'Chart on paper until this page opens again, then enter the care with the time it was done.',
+  },
+}
+
+/** What a thrown `data(words, …)` carries to be read by people; anything else it carries is not shown. */
+function ownWords(error: unknown): string | undefined {
+  return isRouteErrorResponse(error) && typeof error.data === 'string' && error.data !== '' ? error.data : undefined
+}
+
+export interface ErrorPageProps {
+  readonly error: unknown
+  readonly reference: string | null
+}
+
+/** The last page there is: says what happened and what was kept, with a reference instead of a stack. */
+export function ErrorPage({ error, reference }: ErrorPageProps) {
+  const status = isRouteErrorResponse(error) ? error.status : 500
+  const { title, says } = wordsByStatus[status] ?? UNREADABLE
+  return (
+    <PlainPage>
+      <h1 className="text-2xl">{title}</h1>
+      <p className="mt-3 text-lg">{wordsByStatus[status] ? (ownWords(error) ?? says) : says}</p>
+      {reference !== null && (
+        <p className="mt-3 text-ink2">
+          Reference for the people who run the program: <b className="select-all font-semibold text-ink">{reference}</b>
+        </p>
+      )}
+      <div className="mt-6 flex flex-wrap gap-3">
+        <LinkButton href="/" variant="primary">
+          Go to the start
+        </LinkButton>
+      </div>
+    </PlainPage>
+  )
+}

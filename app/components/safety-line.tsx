@@ -1,0 +1,12 @@
+/** What the program is not, at the foot of every page. */
+export function SafetyLine() {
+  return (
+    <footer className="mx-auto mt-8 max-w-360 px-4 pb-4 text-sm text-ink3">
+      <p>
+        Supports charting. It does not replace clinical judgement, local policy, device instructions or your emergency
+        plan.
+      </p>
+      <p>Not an alarm. Keep monitors and call bell on.</p>
+    </footer>
+  )
+}
