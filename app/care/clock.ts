@@ -1,6 +1,6 @@
 import { lateness } from '../clinical/tolerance.ts'
 import { type Duration, earlier, hours, later, since } from '../time/duration.ts'
-import { type Shift, nextShift, shiftAt } from '../time/shift.ts'
+import { nextShift, type Shift, shiftAt } from '../time/shift.ts'
 import { addDays, type LocalDay, startOfDay } from '../time/zone.ts'
 import type { Entry, WardFacts } from './kind.ts'
 
@@ -106,7 +106,7 @@ function shiftWindow(shift: Shift, opensAt: Date): DueWindow {
     soonAt: opensAt,
     opensAt,
     closesAt: shift.endsAt,
-    seriousAt: later(shift.endsAt, length < hours(4) ? length : hours(4)),
+    seriousAt: later(shift.endsAt, Math.min(length, hours(4)) as Duration),
   }
 }
 
@@ -142,4 +142,3 @@ export function sooner(a: Clock, b: Clock): Clock {
   if (b.state !== 'running') return a
   return b.window.dueAt < a.window.dueAt ? b : a
 }
-

@@ -49,9 +49,7 @@ type Extra = Omit<Shared, 'label'>
 const inSentence = (label: string): string => label.charAt(0).toLowerCase() + label.slice(1)
 
 /** A number with its unit and range. Messages name the field and the range. */
-export function quantity(
-  meta: Omit<QuantityMeta, 'control' | 'step'> & { readonly step?: number },
-): z.ZodNumber {
+export function quantity(meta: Omit<QuantityMeta, 'control' | 'step'> & { readonly step?: number }): z.ZodNumber {
   const unit = meta.unit ? ` ${meta.unit}` : ''
   const range = `${meta.label} must be from ${meta.min} to ${meta.max}${unit}`
   const schema = z

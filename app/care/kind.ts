@@ -1,9 +1,9 @@
 import type { z } from 'zod'
+import type { PressureUnit } from '../clinical/units.ts'
 import type { ShiftTimes } from '../time/shift.ts'
 import type { LocalDay, Zone } from '../time/zone.ts'
-import type { PressureUnit } from '../clinical/units.ts'
-import type { Lane } from './lanes.ts'
 import type { Clock } from './clock.ts'
+import type { Lane } from './lanes.ts'
 import type { AnySetting, Values } from './policy.ts'
 import type { Warning } from './warning.ts'
 
@@ -53,7 +53,10 @@ export interface PatientRecord {
   /** Effective entries of one kind, latest performed first. */
   of<K extends AnyCharted>(kind: K): readonly Entry<DataOf<K>>[]
   /** The latest effective entry of a kind, or the latest that satisfies `where`. */
-  latest<K extends AnyCharted>(kind: K, where?: (data: DataOf<K>, entry: Entry<DataOf<K>>) => boolean): Entry<DataOf<K>> | undefined
+  latest<K extends AnyCharted>(
+    kind: K,
+    where?: (data: DataOf<K>, entry: Entry<DataOf<K>>) => boolean,
+  ): Entry<DataOf<K>> | undefined
   /** Effective entries performed at or after `from`, latest first. */
   since<K extends AnyCharted>(kind: K, from: Date): readonly Entry<DataOf<K>>[]
 }
@@ -122,7 +125,9 @@ export interface CareKind<Slug extends string, Schema extends z.ZodObject> exten
   /** What the record already says, filled in as the form opens: facts, never findings. */
   startsWith?(context: CareContext): Readonly<Record<string, unknown>>
   /** The usual act as one tap; it leaves out what must be looked at each time. */
-  usual?(context: CareContext): { readonly words: string; readonly answers: Readonly<Record<string, unknown>> } | undefined
+  usual?(
+    context: CareContext,
+  ): { readonly words: string; readonly answers: Readonly<Record<string, unknown>> } | undefined
   gauges?(context: CareContext): readonly Gauge[]
   /** Warnings about this act; `context.record` does not hold it yet, `context.now` is when it was done. */
   warnings?(data: z.output<Schema>, context: CareContext): readonly Warning[]

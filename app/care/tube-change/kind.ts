@@ -1,10 +1,10 @@
 import { careKind } from '../kind.ts'
 import { tubeExamples } from './examples.ts'
 import { tubeChanges } from './schema.ts'
-import { tubeChangeSettings } from './settings.ts'
 import { tubeSentence } from './sentence.ts'
+import { tubeChangeSettings } from './settings.ts'
 import { tubeTasks } from './tasks.ts'
-import { standingTubeWarnings, tubeStart, tubeWarnings } from './warnings.ts'
+import { sameTubeAgain, standingTubeWarnings, tubeWarnings } from './warnings.ts'
 
 /** First insertion and every later change of the whole tube. The latest one is the tube in place. */
 export const tubeChange = careKind({
@@ -16,7 +16,7 @@ export const tubeChange = careKind({
   summary: tubeSentence,
   settings: tubeChangeSettings,
   tasks: tubeTasks,
-  startsWith: tubeStart,
+  usual: sameTubeAgain,
   warnings: tubeWarnings,
   standing: standingTubeWarnings,
 })

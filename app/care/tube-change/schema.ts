@@ -1,10 +1,11 @@
-import { charted } from '../kind.ts'
+import type { z } from 'zod'
 import { careFields, choice, date, note, quantity, text, yesNo } from '../field.ts'
+import { charted } from '../kind.ts'
 
 const dual = { field: 'construction', is: ['dual'] }
 
 /** A tube put in: the first insertion or a later change. Five numbers as on label and flange, never derived from one another. */
-export const tubeChangeSchema = careFields({
+const fields = careFields({
   reason: choice({
     label: 'Why',
     section: 'What was done',
@@ -28,10 +29,22 @@ export const tubeChangeSchema = careFields({
     when: { field: 'reason', is: ['on arrival'] },
     neededThen: true,
   }).optional(),
-  line: text({ label: 'Tube line', section: 'The tube, as printed on flange and label', hint: 'As printed on the flange' }),
+  line: text({
+    label: 'Tube line',
+    section: 'The tube, as printed on flange and label',
+    hint: 'As printed on the flange',
+  }),
   sizeSystem: choice({ label: 'Size system', options: { 'ISO 5366': 'ISO 5366 (mm)', Jackson: 'Jackson' } }),
   size: text({ label: 'Size on the label', maxLength: 12 }),
-  idWithInner: quantity({ label: 'Inside diameter, inner cannula in', unit: 'mm', min: 2, max: 13, step: 0.1, when: dual, neededThen: true }).optional(),
+  idWithInner: quantity({
+    label: 'Inside diameter, inner cannula in',
+    unit: 'mm',
+    min: 2,
+    max: 13,
+    step: 0.1,
+    when: dual,
+    neededThen: true,
+  }).optional(),
   idWithoutInner: quantity({ label: 'Inside diameter of the outer tube', unit: 'mm', min: 2, max: 14, step: 0.1 }),
   od: quantity({ label: 'Outside diameter', unit: 'mm', min: 3, max: 18, step: 0.1 }),
   lengthMm: quantity({ label: 'Length', unit: 'mm', min: 25, max: 200, step: 0.5 }),
@@ -58,7 +71,13 @@ export const tubeChangeSchema = careFields({
     when: { field: 'flange', is: ['adjustable'] },
     neededThen: true,
   }).optional(),
-  longestUseDays: quantity({ label: 'Longest use on the label', unit: 'days', min: 1, max: 90, hint: 'Leave empty when the label gives none' }).optional(),
+  longestUseDays: quantity({
+    label: 'Longest use on the label',
+    unit: 'days',
+    min: 1,
+    max: 90,
+    hint: 'Leave empty when the label gives none',
+  }).optional(),
   lot: text({ label: 'Lot', maxLength: 20, more: true }).optional(),
   expiresOn: date({ label: 'Expiry date', more: true }).optional(),
   technique: choice({
@@ -78,16 +97,52 @@ export const tubeChangeSchema = careFields({
   helper: text({ label: 'Helper' }).optional(),
   difficulty: choice({
     label: 'How it went',
-    options: { easy: 'Easy', some: 'Some difficulty', difficult: 'Difficult', failed: 'Failed', 'not known': 'Not known' },
+    options: {
+      easy: 'Easy',
+      some: 'Some difficulty',
+      difficult: 'Difficult',
+      failed: 'Failed',
+      'not known': 'Not known',
+    },
   }),
   position: choice({
     label: 'Position confirmed by',
-    options: { capnography: 'Capnography', airflow: 'Airflow', scope: 'Scope', 'x-ray': 'X-ray', 'not confirmed': 'Not confirmed' },
+    options: {
+      capnography: 'Capnography',
+      airflow: 'Airflow',
+      scope: 'Scope',
+      'x-ray': 'X-ray',
+      'not confirmed': 'Not confirmed',
+    },
   }),
-  bleeding: choice({ label: 'Bleeding', more: true, options: { none: 'None', spotting: 'Spotting', fresh: 'Fresh blood', active: 'Active' } }).optional(),
+  bleeding: choice({
+    label: 'Bleeding',
+    more: true,
+    options: { none: 'None', spotting: 'Spotting', fresh: 'Fresh blood', active: 'Active' },
+  }).optional(),
   spo2Low: quantity({ label: 'Lowest SpO2', unit: '%', min: 40, max: 100, more: true }).optional(),
   note: note({ label: 'Note', more: true }).optional(),
 })
 
+/** The walls nest: inner cannula inside outer tube inside outside diameter. Anything else is a slip of the keys. */
+export const tubeChangeSchema = fields.superRefine((tube, context) => {
+  if (tube.idWithInner !== undefined && tube.idWithInner >= tube.idWithoutInner) {
+    context.addIssue({
+      code: 'custom',
+      path: ['idWithInner'],
+      message: 'Inside diameter with the inner cannula in must be smaller than that of the outer tube',
+    })
+  }
+  if (tube.od <= tube.idWithoutInner) {
+    context.addIssue({
+      code: 'custom',
+      path: ['od'],
+      message: 'Outside diameter must be larger than the inside diameter',
+    })
+  }
+})
+
 /** Tubes put in: ask a record with this. */
 export const tubeChanges = charted({ slug: 'tube-change', schema: tubeChangeSchema })
+
+export type TubeData = z.output<typeof tubeChangeSchema>

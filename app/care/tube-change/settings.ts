@@ -154,7 +154,10 @@ export const blindReinsertionBefore = numberSetting({
   min: 5,
   max: 14,
   affects: 'Tube card: the caution shown for a new stoma.',
-  source: { says: 'Bontempo and Manning: under 7 days only under direct vision; another text says 5', standing: 'published' },
+  source: {
+    says: 'Bontempo and Manning: under 7 days only under direct vision; another text says 5',
+    standing: 'published',
+  },
 })
 
 export const tubeChangeSettings = [

@@ -1,12 +1,10 @@
-import type { z } from 'zod'
 import { changeByDay } from '../../clinical/dwell.ts'
-import { type LocalDay, localDay } from '../../time/zone.ts'
+import { daysBetween, type LocalDay, localDay } from '../../time/zone.ts'
 import { decannulations } from '../decannulation/schema.ts'
 import type { CareContext, Entry, PatientRecord } from '../kind.ts'
-import { tubeChanges, type tubeChangeSchema } from './schema.ts'
+import { type TubeData, tubeChanges } from './schema.ts'
 import { dwellDual, dwellSingle } from './settings.ts'
 
-export type TubeData = z.output<typeof tubeChangeSchema>
 export type TubeEntry = Entry<TubeData>
 
 /** The tube in place: the latest change that did not fail, unless the tube was taken out for good after it. */
@@ -61,4 +59,25 @@ export function workingIdMm(data: TubeData): number {
   return data.construction === 'dual' && data.innerCannula !== 'none' && data.idWithInner !== undefined
     ? data.idWithInner
     : data.idWithoutInner
+}
+
+/** Whether this tube is the one that was put in when the opening was made. */
+export function isFirstTube(tube: TubeEntry): boolean {
+  const { reason, insertedOn: on, stomaMadeOn: made } = tube.data
+  return reason === 'first insertion' || (reason === 'on arrival' && on !== undefined && on === made)
+}
+
+/** Age of the opening in days, when the record knows it. */
+export function stomaAgeDays(context: CareContext): number | undefined {
+  const madeOn = stomaMadeOn(context)
+  return madeOn === undefined ? undefined : daysBetween(madeOn, localDay(context.now, context.ward.zone))
+}
+
+/** The day on which the opening was made: charted on arrival, or that of the first insertion. */
+export function stomaMadeOn(context: CareContext): string | undefined {
+  const opening = context.record.latest(
+    tubeChanges,
+    data => data.stomaMadeOn !== undefined || data.reason === 'first insertion',
+  )
+  return opening && (opening.data.stomaMadeOn ?? localDay(opening.performedAt, context.ward.zone))
 }
