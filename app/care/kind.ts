@@ -110,6 +110,18 @@ export interface Charted<Slug extends string, Schema extends z.ZodObject> {
   readonly upgrades?: readonly ((old: never) => unknown)[]
 }
 
+/** What the names of settings and tasks stand for. Handed in, since a kind cannot import the list that it is on. */
+export interface KnownNames {
+  readonly settings: readonly AnySetting[]
+  readonly tasks: readonly { readonly rule: TaskRule }[]
+}
+
+/** A mistake of the form, said at its field. */
+export interface FormProblem {
+  readonly field: string
+  readonly message: string
+}
+
 export interface CareKind<Slug extends string, Schema extends z.ZodObject> extends Charted<Slug, Schema> {
   readonly title: string
   /** The words on the button: "Chart pressure". */
@@ -133,6 +145,11 @@ export interface CareKind<Slug extends string, Schema extends z.ZodObject> exten
   warnings?(data: z.output<Schema>, context: CareContext): readonly Warning[]
   /** Warnings that stand for as long as the record says so. */
   standing?(context: CareContext): readonly Warning[]
+  /**
+   * Mistakes of this form that only the record or the registry shows, such as a value outside the range of the chosen setting.
+   * For plans and orders; never clinical judgement, and never a refusal to record care that was given.
+   */
+  problems?(data: z.output<Schema>, context: CareContext, known: KnownNames): readonly FormProblem[]
   /** Drawn as a triangle instead of a dot. */
   outOfRange?(data: z.output<Schema>, context: CareContext): boolean
 }
