@@ -1,0 +1,2 @@
+/** Journeys need the built application. */
+export default async function setup() {}
