@@ -150,6 +150,8 @@ export interface CareKind<Slug extends string, Schema extends z.ZodObject> exten
    * For plans and orders; never clinical judgement, and never a refusal to record care that was given.
    */
   problems?(data: z.output<Schema>, context: CareContext, known: KnownNames): readonly FormProblem[]
+  /** A deferral is not care done: the strip shows it with a note instead of a dot. */
+  readonly marksAs?: 'deferral'
   /** Drawn as a triangle instead of a dot. */
   outOfRange?(data: z.output<Schema>, context: CareContext): boolean
 }

@@ -2,6 +2,7 @@ import { carePlan } from './care-plan/kind.ts'
 import { cuffPressure } from './cuff-pressure/kind.ts'
 import { decannulation } from './decannulation/kind.ts'
 import { deferral } from './deferral/kind.ts'
+import { generalSettings } from './general-settings.ts'
 import { innerCannula } from './inner-cannula/kind.ts'
 import type { AnyCareKind, TaskRule } from './kind.ts'
 import type { AnySetting } from './policy.ts'
@@ -32,7 +33,7 @@ export function findKind(slug: string): AnyCareKind | undefined {
 
 /** Every setting that some kind reads, once each, in the order of the kinds. */
 export const careSettings: readonly AnySetting[] = [
-  ...new Set(careKinds.flatMap((kind: AnyCareKind) => kind.settings ?? [])),
+  ...new Set([...careKinds.flatMap((kind: AnyCareKind) => kind.settings ?? []), ...generalSettings]),
 ]
 
 export interface KindTask {

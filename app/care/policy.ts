@@ -3,7 +3,12 @@ import type { LocalDay } from '../time/zone.ts'
 export type SettingValue = number | boolean | readonly number[]
 
 /** How far the origin of a number was checked: read at its source, read second-hand, common practice, or our own proposal. */
-export type Standing = 'published' | 'published, read second-hand' | 'common practice' | 'from memory' | 'product proposal'
+export type Standing =
+  | 'published'
+  | 'published, read second-hand'
+  | 'common practice'
+  | 'from memory'
+  | 'product proposal'
 
 export interface Source {
   readonly says: string
@@ -29,7 +34,9 @@ export interface Setting<Value extends SettingValue = SettingValue> {
 export type AnySetting = Setting<number> | Setting<boolean> | Setting<readonly number[]>
 
 /** Declares a setting whose value is a number. */
-export function numberSetting(setting: Setting<number> & { readonly min: number; readonly max: number }): Setting<number> {
+export function numberSetting(
+  setting: Setting<number> & { readonly min: number; readonly max: number },
+): Setting<number> {
   return setting
 }
 
@@ -67,17 +74,22 @@ export interface PersonalValue {
 
 /**
  * The policy of a ward at a moment: the ward's own if it has one, else the hospital's; the latest that has started.
- * Undefined when there is none, in which case no rule may run.
+ * One that nobody has reviewed is never in force. Undefined when there is none, in which case no rule may run.
  */
 export function policyInForce(policies: readonly Policy[], wardId: string, at: Date): Policy | undefined {
-  const started = policies.filter(policy => policy.startsAt <= at)
+  const started = policies.filter(policy => policy.startsAt <= at && policy.reviewedBy.trim() !== '')
   const own = started.filter(policy => policy.wardId === wardId)
   return latest(own.length > 0 ? own : started.filter(policy => policy.wardId === null))
 }
 
 function latest(policies: readonly Policy[]): Policy | undefined {
   return policies.reduce<Policy | undefined>(
-    (best, policy) => (!best || policy.startsAt > best.startsAt || (policy.startsAt.getTime() === best.startsAt.getTime() && policy.version > best.version) ? policy : best),
+    (best, policy) =>
+      !best ||
+      policy.startsAt > best.startsAt ||
+      (policy.startsAt.getTime() === best.startsAt.getTime() && policy.version > best.version)
+        ? policy
+        : best,
     undefined,
   )
 }
@@ -87,6 +99,8 @@ export interface Values {
   readonly policy: Policy
   /** The value in force for this patient: own value, else the policy's, else the product's default. */
   of<Value extends SettingValue>(setting: Setting<Value>): Value
+  /** The same for a setting of any type, to show it. */
+  shown(setting: AnySetting): SettingValue
   /** Where that value came from. */
   originOf(setting: AnySetting): 'care plan' | 'policy' | 'product default'
   personal(setting: AnySetting): PersonalValue | undefined
@@ -96,15 +110,19 @@ export interface Values {
 export function valuesFor(policy: Policy, personal: readonly PersonalValue[] = []): Values {
   const own = new Map(personal.map(value => [value.setting, value]))
   const personalOf = (setting: AnySetting) => (setting.personal ? own.get(setting.name) : undefined)
+  function of<Value extends SettingValue>(setting: Setting<Value>): Value {
+    const mine = setting.personal ? own.get(setting.name)?.value : undefined
+    const value = mine ?? policy.values[setting.name] ?? setting.default
+    return (typeof value === typeof setting.default ? value : setting.default) as Value
+  }
   return {
     policy,
-    of: <Value extends SettingValue>(setting: Setting<Value>): Value => {
-      const mine = setting.personal ? own.get(setting.name)?.value : undefined
-      const value = mine ?? policy.values[setting.name] ?? setting.default
-      return (typeof value === typeof setting.default ? value : setting.default) as Value
+    of,
+    shown: setting => of(setting as Setting),
+    originOf: setting => {
+      if (personalOf(setting)) return 'care plan'
+      return policy.values[setting.name] === undefined ? 'product default' : 'policy'
     },
-    originOf: setting =>
-      personalOf(setting) ? 'care plan' : policy.values[setting.name] === undefined ? 'product default' : 'policy',
     personal: personalOf,
   }
 }

@@ -5,6 +5,7 @@ import type { CareContext, Entry, PatientRecord } from '../kind.ts'
 import { type TubeData, tubeChanges } from './schema.ts'
 import { dwellDual, dwellSingle } from './settings.ts'
 
+export type { TubeData } from './schema.ts'
 export type TubeEntry = Entry<TubeData>
 
 /** The tube in place: the latest change that did not fail, unless the tube was taken out for good after it. */

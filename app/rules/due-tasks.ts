@@ -1,0 +1,105 @@
+import type { Clock, DueWindow } from '../care/clock.ts'
+import { type DeferralData, deferrals, deferredUntil } from '../care/deferral/schema.ts'
+import { adultAge } from '../care/general-settings.ts'
+import { type AnyCareKind, type CareContext, type Entry, type TaskRule, wordsOf } from '../care/kind.ts'
+import { careTasks, type KindTask } from '../care/kinds.ts'
+import { ageOn } from '../time/display.ts'
+import { type LocalDay, localDay } from '../time/zone.ts'
+import { statusOf, type TaskStatus } from './status.ts'
+
+/** One due care of one patient: what charts it, how it stands, and from which act its clock counts. */
+export interface DueTask {
+  readonly kind: AnyCareKind
+  readonly rule: TaskRule
+  readonly title: string
+  readonly status: TaskStatus
+  /** Absent while suspended. Of a deferred task: the window from the new time on. */
+  readonly window?: DueWindow
+  readonly last?: Entry
+  /** Why it is due sooner than usual, or why it is suspended. */
+  readonly because?: string
+  readonly byDay?: LocalDay
+  readonly deferral?: { readonly entry: Entry; readonly until: Date }
+}
+
+/**
+ * What is due for one patient, most pressing first.
+ * Pure: the same context gives the same tasks. Rules that do not concern the patient are left out, and
+ * nothing is computed for somebody under the age from which the policy's rules apply.
+ */
+export function dueTasks(context: CareContext, tasks: readonly KindTask[] = careTasks): readonly DueTask[] {
+  if (isTooYoung(context)) return []
+  return tasks.flatMap(task => dueTask(task, context)).toSorted(byPress)
+}
+
+/** Whether the person is younger than the age from which adult rules apply. */
+export function isTooYoung({ record, values, ward, now }: CareContext): boolean {
+  return ageOn(record.patient.bornOn, localDay(now, ward.zone)) < values.of(adultAge)
+}
+
+function dueTask({ kind, rule }: KindTask, context: CareContext): readonly DueTask[] {
+  const clock = rule.clock(context)
+  const about = { kind, rule, title: wordsOf(rule.name) }
+  if (clock.state === 'none') return []
+  if (clock.state === 'suspended') return [{ ...about, status: 'suspended', because: clock.because }]
+  return [{ ...about, ...running(rule, clock, context) }]
+}
+
+function running(rule: TaskRule, clock: Clock & { state: 'running' }, context: CareContext) {
+  const known = {
+    ...(clock.last ? { last: clock.last } : {}),
+    ...(clock.because === undefined ? {} : { because: clock.because }),
+    ...(clock.byDay === undefined ? {} : { byDay: clock.byDay }),
+  }
+  const entry = deferralOf(rule.name, clock.last, context)
+  if (!entry) return { ...known, window: clock.window, status: statusOf(clock.window, context.now) }
+  const until = deferredUntil(entry)
+  const window = movedTo(until, clock.window)
+  const status: TaskStatus = context.now < until ? 'deferred' : statusOf(window, context.now)
+  return { ...known, window, status, deferral: { entry, until } }
+}
+
+/** The latest deferral of a task, unless the care was done after it. */
+function deferralOf(
+  name: string,
+  last: Entry | undefined,
+  { record, now }: CareContext,
+): Entry<DeferralData> | undefined {
+  const entry = record.latest(deferrals, (data, { performedAt }) => data.task === name && performedAt <= now)
+  return entry && !(last && last.performedAt > entry.performedAt) ? entry : undefined
+}
+
+/** The same window from the deferral's new time on: no tolerance before it, the same after. */
+function movedTo(until: Date, window: DueWindow): DueWindow {
+  const after = (moment: Date) => new Date(until.getTime() + Math.max(0, moment.getTime() - window.dueAt.getTime()))
+  return {
+    dueAt: until,
+    soonAt: until,
+    opensAt: until,
+    closesAt: after(window.closesAt),
+    seriousAt: after(window.seriousAt),
+  }
+}
+
+const press: Readonly<Record<TaskStatus, number>> = {
+  'seriously overdue': 1,
+  overdue: 2,
+  due: 3,
+  'due soon': 4,
+  upcoming: 5,
+  deferred: 6,
+  suspended: 7,
+}
+
+/** How pressing a status is, 0 first; seriously overdue airway care before all other (domain 3.0). */
+export function pressOf(status: TaskStatus, airway: boolean): number {
+  return status === 'seriously overdue' && airway ? 0 : press[status]
+}
+
+function byPress(a: DueTask, b: DueTask): number {
+  return (
+    pressOf(a.status, a.rule.airway) - pressOf(b.status, b.rule.airway) ||
+    (a.window?.closesAt.getTime() ?? 0) - (b.window?.closesAt.getTime() ?? 0) ||
+    a.title.localeCompare(b.title)
+  )
+}

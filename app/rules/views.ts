@@ -1,0 +1,164 @@
+import { type AnyCareKind, type CareContext, type Entry, type PatientRecord, wordsOf } from '../care/kind.ts'
+import { careKinds } from '../care/kinds.ts'
+import { type Lane, lanes } from '../care/lanes.ts'
+import { dwellNotice, dwellStrongNotice } from '../care/tube-change/settings.ts'
+import { dwellLimit, insertedOn, type TubeEntry, tubeInPlace, tubeWords } from '../care/tube-change/tube.ts'
+import type { WarningLevel } from '../care/warning.ts'
+import { type DwellStage, daysLeft, dwellDay, dwellStage } from '../clinical/dwell.ts'
+import { localDay } from '../time/zone.ts'
+import { type DueTask, dueTasks } from './due-tasks.ts'
+import { statusOf, type TaskStatus } from './status.ts'
+import { standingWarnings } from './warnings.ts'
+
+/*
+ * What boards show, as plain data: moments are milliseconds, so that a page and its data refresh carry the same
+ * shape, and statuses are left to `liveStatus`, so that it stays true as time passes without asking the server.
+ */
+
+export interface TaskView {
+  readonly kind: string
+  readonly name: string
+  readonly title: string
+  readonly lane: Lane
+  readonly airway: boolean
+  readonly chartWords: string
+  readonly opensWith?: Readonly<Record<string, string>>
+  readonly window?: {
+    readonly dueAt: number
+    readonly soonAt: number
+    readonly opensAt: number
+    readonly closesAt: number
+    readonly seriousAt: number
+  }
+  readonly byDay?: string
+  readonly because?: string
+  readonly deferredUntil?: number
+}
+
+export interface MarkView {
+  readonly at: number
+  readonly kind: string
+  readonly lane: Lane
+  readonly shape: 'done' | 'out of range' | 'deferred'
+}
+
+export interface TubeView {
+  readonly words: string
+  readonly day: number
+  readonly limit: number
+  readonly daysLeft: number
+  readonly stage: DwellStage
+}
+
+/** One patient's care on a board or a round. */
+export interface CareView {
+  readonly tasks: readonly TaskView[]
+  readonly marks: readonly MarkView[]
+  readonly warnings: readonly {
+    readonly level: WarningLevel
+    readonly name: string
+    readonly action: string
+    readonly cause: string
+  }[]
+  readonly tube?: TubeView
+}
+
+/** Due care, marks since `marksFrom`, standing warnings and the tube of one patient, as plain data. */
+export function careView(context: CareContext, marksFrom: Date): CareView {
+  const tube = tubeInPlace(context.record)
+  return {
+    tasks: dueTasks(context).map(taskView),
+    marks: marksSince(context, marksFrom),
+    warnings: standingWarnings(context).map(({ level, name, action, cause }) => ({ level, name, action, cause })),
+    ...(tube ? { tube: tubeView(tube, context) } : {}),
+  }
+}
+
+/** A due task as plain data. */
+export function taskView(task: DueTask): TaskView {
+  const { kind, rule, title, window, byDay, because, deferral } = task
+  return {
+    kind: kind.slug,
+    name: rule.name,
+    title,
+    lane: kind.lane,
+    airway: rule.airway,
+    chartWords: kind.chartWords,
+    ...(rule.opensWith ? { opensWith: rule.opensWith } : {}),
+    ...(window ? { window: inMilliseconds(window) } : {}),
+    ...(byDay ? { byDay } : {}),
+    ...(because ? { because } : {}),
+    ...(deferral ? { deferredUntil: deferral.until.getTime() } : {}),
+  }
+}
+
+function inMilliseconds(window: NonNullable<DueTask['window']>) {
+  return {
+    dueAt: window.dueAt.getTime(),
+    soonAt: window.soonAt.getTime(),
+    opensAt: window.opensAt.getTime(),
+    closesAt: window.closesAt.getTime(),
+    seriousAt: window.seriousAt.getTime(),
+  }
+}
+
+/** How a task stands at `now` (ms). Without a window it is suspended. */
+export function liveStatus(task: Pick<TaskView, 'window' | 'deferredUntil'>, now: number): TaskStatus {
+  if (!task.window) return 'suspended'
+  if (task.deferredUntil !== undefined && now < task.deferredUntil) return 'deferred'
+  const { soonAt, opensAt, closesAt, seriousAt } = task.window
+  return statusOf(
+    {
+      soonAt: new Date(soonAt),
+      opensAt: new Date(opensAt),
+      closesAt: new Date(closesAt),
+      seriousAt: new Date(seriousAt),
+    },
+    new Date(now),
+  )
+}
+
+function tubeView(tube: TubeEntry, context: CareContext): TubeView {
+  const { days } = dwellLimit(tube, context)
+  const on = insertedOn(tube, context)
+  const today = localDay(context.now, context.ward.zone)
+  const left = daysLeft(on, days, today)
+  const { values } = context
+  const stage = dwellStage(left, { noticeDays: values.of(dwellNotice), strongDays: values.of(dwellStrongNotice) })
+  return { words: tubeWords(tube.data), day: dwellDay(on, today), limit: days, daysLeft: left, stage }
+}
+
+/** What was charted since `from`, oldest first, as marks on a strip. */
+export function marksSince(
+  context: CareContext,
+  from: Date,
+  kinds: readonly AnyCareKind[] = careKinds,
+): readonly MarkView[] {
+  return kinds
+    .flatMap(kind => entriesSince(context.record, kind, from).map(entry => mark(kind, entry, context)))
+    .toSorted((a, b) => a.at - b.at)
+}
+
+function entriesSince(record: PatientRecord, kind: AnyCareKind, from: Date): readonly Entry[] {
+  return record.since(kind, from)
+}
+
+function mark(kind: AnyCareKind, entry: Entry, context: CareContext): MarkView {
+  const outside = kind.outOfRange?.(entry.data, context) === true
+  const shape = outside ? 'out of range' : kind.marksAs === 'deferral' ? 'deferred' : 'done'
+  return { at: entry.performedAt.getTime(), kind: kind.slug, lane: kind.lane, shape }
+}
+
+/** The lanes of a board, in their fixed order, with their marks and tasks. */
+export function inLanes(care: Pick<CareView, 'marks' | 'tasks'>) {
+  return lanes.map(name => ({
+    name,
+    marks: care.marks.filter(mark => mark.lane === name),
+    tasks: care.tasks.filter(task => task.lane === name),
+  }))
+}
+
+/** `Cuff pressure`: the title of a kind by its stored name, or that name in words. */
+export function kindTitle(slug: string): string {
+  return careKinds.find(kind => kind.slug === slug)?.title ?? wordsOf(slug)
+}

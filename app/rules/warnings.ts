@@ -1,0 +1,34 @@
+import { adultAge } from '../care/general-settings.ts'
+import type { AnyCareKind, CareContext } from '../care/kind.ts'
+import { careKinds } from '../care/kinds.ts'
+import { byUrgency, type Warning } from '../care/warning.ts'
+import { isTooYoung } from './due-tasks.ts'
+
+/** Warnings that stand for one patient now, most urgent first, each rule once. */
+export function standingWarnings(context: CareContext, kinds: readonly AnyCareKind[] = careKinds): readonly Warning[] {
+  const warnings = [...noRules(context), ...kinds.flatMap(kind => kind.standing?.(context) ?? [])]
+  return onceEach(warnings).toSorted(byUrgency)
+}
+
+/** Warnings about one act, as it is or was charted; `context` is that of the moment before it. */
+export function entryWarnings(kind: AnyCareKind, data: unknown, context: CareContext): readonly Warning[] {
+  return onceEach(kind.warnings?.(data, context) ?? []).toSorted(byUrgency)
+}
+
+function noRules(context: CareContext): readonly Warning[] {
+  if (!isTooYoung(context)) return []
+  const from = context.values.of(adultAge)
+  return [
+    {
+      name: 'no-rules-for-children',
+      level: 'amber',
+      action: 'Follow the written plan of the tracheostomy team; nothing is computed here.',
+      cause: `Rules of this ward apply from the age of ${from}.`,
+      source: adultAge.source.says,
+    },
+  ]
+}
+
+function onceEach(warnings: readonly Warning[]): readonly Warning[] {
+  return [...new Map(warnings.toReversed().map(warning => [warning.name, warning])).values()].toReversed()
+}

@@ -1,0 +1,68 @@
+import type { CareContext } from '../care/kind.ts'
+import type { AnySetting, PersonalValue, SettingValue, Standing } from '../care/policy.ts'
+import { showDateTime, showDay } from '../time/display.ts'
+import type { DueTask } from './due-tasks.ts'
+
+/** One number behind a task, with where it came from. */
+export interface WhyValue {
+  readonly label: string
+  readonly value: string
+  readonly origin: string
+  readonly source: string
+  readonly standing: Standing
+}
+
+/** Why a task is due: the act its clock counts from, the rule in words, the policy, and every number with its source. */
+export interface WhyDue {
+  readonly last: string
+  readonly rule: string
+  readonly because?: string
+  readonly deferral?: string
+  readonly policy: string
+  readonly values: readonly WhyValue[]
+}
+
+/** The answer to "Why is this due?", ready to read. */
+export function whyDue(task: DueTask, context: CareContext): WhyDue {
+  const { zone } = context.ward
+  return {
+    last: task.last
+      ? `Last on ${showDateTime(task.last.performedAt, zone)} by ${task.last.recordedByName}.`
+      : 'Not charted yet; counted from when the tube went in or the patient came.',
+    rule: task.rule.says(context),
+    ...(task.because === undefined ? {} : { because: `${capital(task.because)}.` }),
+    ...(task.deferral
+      ? { deferral: `Deferred to ${showDateTime(task.deferral.until, zone)} by ${task.deferral.entry.recordedByName}.` }
+      : {}),
+    policy: policyWords(context),
+    values: task.rule.settings.map(setting => whyValue(setting, context)),
+  }
+}
+
+/** Which policy is in force, who reviewed it and when. */
+export function policyWords({ values: { policy } }: Pick<CareContext, 'values'>): string {
+  return `${policy.name}, version ${policy.version}, reviewed by ${policy.reviewedBy} on ${showDay(policy.reviewedOn)}.`
+}
+
+function whyValue(setting: AnySetting, { values }: CareContext): WhyValue {
+  const personal = values.personal(setting)
+  return {
+    label: setting.label,
+    value: showValue(values.shown(setting), setting.unit),
+    origin: personal ? personalWords(personal) : values.originOf(setting) === 'policy' ? 'Policy' : 'Product default',
+    source: setting.source.says,
+    standing: setting.source.standing,
+  }
+}
+
+function personalWords(personal: PersonalValue): string {
+  return `This patient's plan, ${personal.reason} (${personal.by}, review by ${showDay(personal.reviewOn)})`
+}
+
+/** A setting's value in words with its unit: `8 h`, `on`, `5, 6, 8 Fr`. */
+export function showValue(value: SettingValue, unit: string): string {
+  if (typeof value === 'boolean') return value ? 'on' : 'off'
+  return `${typeof value === 'number' ? value : value.join(', ')} ${unit}`
+}
+
+const capital = (words: string): string => words.charAt(0).toUpperCase() + words.slice(1)
