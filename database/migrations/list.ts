@@ -1,4 +1,21 @@
+import { wards } from './0001-wards.ts'
+import { users } from './0002-users.ts'
+import { patients } from './0010-patients.ts'
+import { stays } from './0011-stays.ts'
+import { bedMoves } from './0012-bed-moves.ts'
+import { entries } from './0013-entries.ts'
+import { policies } from './0014-policies.ts'
+import { recordChanges } from './0015-record-changes.ts'
 import type { Migration } from './migration.ts'
 
 /** Every migration under its name, in the order in which they are applied. */
-export const migrations: Record<string, Migration> = {}
+export const migrations: Record<string, Migration> = {
+  '0001-wards': wards,
+  '0002-users': users,
+  '0010-patients': patients,
+  '0011-stays': stays,
+  '0012-bed-moves': bedMoves,
+  '0013-entries': entries,
+  '0014-policies': policies,
+  '0015-record-changes': recordChanges,
+}
