@@ -1,0 +1,71 @@
+import { showDay } from '../../time/display.ts'
+import { localDay } from '../../time/zone.ts'
+import { type CareContext, careKind, type FormProblem, type KnownNames, wordsOf } from '../kind.ts'
+import type { AnySetting } from '../policy.ts'
+import { sentence } from '../sentence.ts'
+import type { Warning } from '../warning.ts'
+import { personalValues } from './personal-values.ts'
+import { type CarePlanData, carePlans } from './schema.ts'
+
+/** A patient's own number in place of the ward's, with its reason and review date; or the way back. */
+export const carePlan = careKind({
+  ...carePlans,
+  title: 'Care plan',
+  chartWords: 'Change care plan',
+  lane: 'Tube',
+  act: 'set care plans',
+  examples: [
+    {
+      setting: 'cuff-pressure-interval',
+      step: 'set own value',
+      value: 4,
+      reviewOn: '2026-12-08',
+      reason: 'Cuff loses pressure after turning',
+    },
+    { setting: 'cuff-pressure-interval', step: 'back to ward policy', reason: 'Steady for three days.' },
+  ],
+  summary: carePlanSentence,
+  problems: planProblems,
+  standing: reviewsPassed,
+})
+
+function carePlanSentence({ setting, step, value, reviewOn, reason }: CarePlanData): string {
+  const plan =
+    step === 'set own value' && value !== undefined && reviewOn !== undefined
+      ? `own value ${value}, review by ${showDay(reviewOn)}`
+      : 'back to ward policy'
+  return `${wordsOf(setting)}: ${plan}. ${sentence(reason)}`
+}
+
+function planProblems(data: CarePlanData, context: CareContext, known: KnownNames): readonly FormProblem[] {
+  const setting = known.settings.find(({ name, personal }) => personal && name === data.setting)
+  if (!setting) return [{ field: 'setting', message: 'Choose a setting that may be set for one patient' }]
+  if (data.step === 'set own value') return [...rangeProblem(setting, data), ...reviewProblem(data, context)]
+  return personalValues(context.record).some(value => value.setting === setting.name)
+    ? []
+    : [{ field: 'step', message: `This patient has no own value for ${wordsOf(setting.name).toLowerCase()}` }]
+}
+
+function rangeProblem({ label, unit, min, max }: AnySetting, { value }: CarePlanData): readonly FormProblem[] {
+  if (value === undefined || min === undefined || max === undefined || (value >= min && value <= max)) return []
+  return [{ field: 'value', message: `${label}: from ${min} to ${max} ${unit}` }]
+}
+
+function reviewProblem({ reviewOn }: CarePlanData, { now, ward }: CareContext): readonly FormProblem[] {
+  if (reviewOn === undefined || reviewOn >= localDay(now, ward.zone)) return []
+  return [{ field: 'reviewOn', message: 'Review date must not be in the past' }]
+}
+
+/** An own value whose review day has passed stays in force, and says so until someone looks at it again. */
+function reviewsPassed({ record, now, ward }: CareContext): readonly Warning[] {
+  const today = localDay(now, ward.zone)
+  return personalValues(record)
+    .filter(({ reviewOn }) => reviewOn < today)
+    .map(({ setting, value, by, reviewOn }) => ({
+      name: `care-plan-review-${setting}`,
+      level: 'amber',
+      action: 'Review the care plan today: confirm the own value, or go back to ward policy.',
+      cause: `${wordsOf(setting)}: own value ${value}, set by ${by}, was to be reviewed by ${showDay(reviewOn)}.`,
+      source: 'Product proposal: an own value needs a review date',
+    }))
+}
