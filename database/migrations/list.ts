@@ -1,21 +1,33 @@
 import { wards } from './0001-wards.ts'
 import { users } from './0002-users.ts'
+import { wardMembers } from './0003-ward-members.ts'
+import { sessions } from './0004-sessions.ts'
+import { signInAttempts } from './0005-sign-in-attempts.ts'
+import { accessLog } from './0006-access-log.ts'
 import { patients } from './0010-patients.ts'
 import { stays } from './0011-stays.ts'
 import { bedMoves } from './0012-bed-moves.ts'
 import { entries } from './0013-entries.ts'
 import { policies } from './0014-policies.ts'
 import { recordChanges } from './0015-record-changes.ts'
+import { accessGrants } from './0020-access-grants.ts'
+import { drafts } from './0021-drafts.ts'
 import type { Migration } from './migration.ts'
 
 /** Every migration under its name, in the order in which they are applied. */
 export const migrations: Record<string, Migration> = {
   '0001-wards': wards,
   '0002-users': users,
+  '0003-ward-members': wardMembers,
+  '0004-sessions': sessions,
+  '0005-sign-in-attempts': signInAttempts,
+  '0006-access-log': accessLog,
   '0010-patients': patients,
   '0011-stays': stays,
   '0012-bed-moves': bedMoves,
   '0013-entries': entries,
   '0014-policies': policies,
   '0015-record-changes': recordChanges,
+  '0020-access-grants': accessGrants,
+  '0021-drafts': drafts,
 }
