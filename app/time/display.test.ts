@@ -47,7 +47,7 @@ test.each([
   [days(1), '1 d'],
   [hours(51), '2 d 3 h'],
   [hours(51) + minutes(59), '2 d 3 h'],
-  [-minutes(36), '36 min'],
+  [minutes(-36), '36 min'],
 ])('%i ms is shown as %s', (ms, shown) => {
   expect(showDuration(ms)).toBe(shown)
 })

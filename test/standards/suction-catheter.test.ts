@@ -67,8 +67,9 @@ test('C-15 16 Fr takes 66.7 % of 8 mm and is too large', () => {
 
 // Russian et al. 2013: half of the cross-section is about 70 % of the diameter.
 test('C-16 the diameter ratio that takes half of the area is 0.7071', () => {
-  const fr = 3 * 8 * 0.7071
-  expect(catheterRatio(fr, 8) ** 2).toBeCloseTo(0.5, 4)
+  const ratio = catheterRatio(24 * Math.SQRT1_2, 8)
+  expect(ratio).toBeCloseTo(0.7071, 4)
+  expect(ratio ** 2).toBeCloseTo(0.5, 9)
 })
 
 test('C-17 a tube of 8.1 mm outer and 6.4 mm with its inner cannula takes 8 Fr, not 12', () => {
