@@ -19,7 +19,7 @@ export default defineConfig({
       '@conform-to/react',
       '@conform-to/zod/v4',
       'dayjs',
-      'dayjs/plugin/utc',
+      'dayjs/plugin/utc.js',
       'zod',
     ],
   },
