@@ -9,6 +9,8 @@ const schema = z.object({
   HOSPITAL_TIME_ZONE: z.string().refine(isTimeZone, 'is no IANA time zone').default('Europe/London'),
   /** Signs cookies. At least 32 characters. */
   SESSION_SECRET: z.string().min(32),
+  HOST: z.string().min(1).default('127.0.0.1'),
+  PORT: z.coerce.number().int().min(0).max(65_535).default(3000),
   NODE_ENV: z.enum(['production', 'development', 'test']).default('production'),
 })
 
@@ -29,6 +31,8 @@ function settings(from: NodeJS.ProcessEnv) {
     databaseOwnerUrl: data.DATABASE_OWNER_URL ?? data.DATABASE_URL,
     hospitalTimeZone: data.HOSPITAL_TIME_ZONE,
     sessionSecret: data.SESSION_SECRET,
+    host: data.HOST,
+    port: data.PORT,
     isProduction: data.NODE_ENV === 'production',
   }
 }

@@ -1,5 +1,6 @@
 import * as mariadb from 'mariadb'
-import { type Options, Sequelize } from 'sequelize'
+import { type Options, type QueryOptions, Sequelize } from 'sequelize'
+import { translated } from './errors.server.ts'
 
 /** A connection pool to one database: UTC, exact decimals, numbers for BIGINT, no parameter values in any message. */
 export function connection(url: string, options: { maxConnections?: number; queryTimeoutMs?: number } = {}): Sequelize {
@@ -24,5 +25,12 @@ export function connection(url: string, options: { maxConnections?: number; quer
       logParam: false,
     },
   }
-  return new Sequelize(url, connected)
+  const pool = new Sequelize(url, connected)
+  // Every statement, a model's too, goes through here: so each tells in the same words that the database is away.
+  const query = pool.query.bind(pool)
+  pool.query = ((sql: string, values?: QueryOptions) =>
+    query(sql, values).catch(error => {
+      throw translated(error)
+    })) as typeof pool.query
+  return pool
 }

@@ -1,10 +1,16 @@
 import { ConnectionError, DatabaseError, UniqueConstraintError } from 'sequelize'
 
-/** The database does not answer. Its message is for the person at the screen, and may be shown as it is. */
+/**
+ * The database does not answer. React Router takes its three last fields for those of a thrown `data()`, so that
+ * wherever it is thrown it becomes the page of a 503, or of a 504 when the connection was lost during COMMIT, since then
+ * nobody knows whether it took effect. The message is for the person at the screen.
+ */
 export class DatabaseUnavailable extends Error {
   override readonly name = 'DatabaseUnavailable'
+  readonly type = 'DataWithResponseInit'
+  readonly data = ''
+  readonly init: { readonly status: 503 | 504 }
 
-  /** Pass `committing` when the connection was lost during COMMIT: then nobody knows yet whether it took effect. */
   constructor(
     cause: unknown,
     readonly committing = false,
@@ -15,6 +21,7 @@ export class DatabaseUnavailable extends Error {
         : 'The database cannot be reached. Nothing was charted.',
       { cause },
     )
+    this.init = { status: committing ? 504 : 503 }
   }
 }
 

@@ -53,24 +53,12 @@ export async function select<Row extends object>(
   replacements: Replacements = {},
   transaction: Transaction | null = null,
 ): Promise<Row[]> {
-  try {
-    return await sequelize.query<Row>(sql, {
-      type: QueryTypes.SELECT,
-      replacements: inUtc(replacements),
-      transaction,
-    })
-  } catch (error) {
-    throw translated(error)
-  }
+  return sequelize.query<Row>(sql, { type: QueryTypes.SELECT, replacements: inUtc(replacements), transaction })
 }
 
 /** Runs an INSERT, UPDATE or DELETE and returns the number of rows it affected. */
 export async function change(sql: string, replacements: Replacements, transaction: Transaction): Promise<number> {
-  try {
-    return await sequelize.query(sql, { type: QueryTypes.BULKUPDATE, replacements: inUtc(replacements), transaction })
-  } catch (error) {
-    throw translated(error)
-  }
+  return sequelize.query(sql, { type: QueryTypes.BULKUPDATE, replacements: inUtc(replacements), transaction })
 }
 
 /** The instant as MariaDB writes it in a DATETIME(3) column: `2026-12-01 14:06:00.000`, UTC. */

@@ -1,0 +1,166 @@
+import './database/environment.ts'
+import { randomBytes, randomUUID } from 'node:crypto'
+import { createServer } from 'node:http'
+import { fileURLToPath } from 'node:url'
+import { constants } from 'node:zlib'
+import { createRequestHandler } from '@react-router/express'
+import compression from 'compression'
+import express, { type ErrorRequestHandler, type RequestHandler, type Response } from 'express'
+import { RouterContextProvider, type ServerBuild } from 'react-router'
+import type * as entry from './app/entry.server.tsx'
+import { env } from './app/env.server.ts'
+import type { RequestFacts } from './app/request-context.server.ts'
+
+const MOST_BODY_BYTES = 64 * 1024 // the longest form has about 4 kB
+const DRAIN_MS = 2000 // npm start promises an end within three seconds, database included
+
+const build: ServerBuild = await import(new URL('./build/server/index.js', import.meta.url).href)
+// The build holds its own copy of every module: the keys and pools in use are those that its entry exports.
+const { requestContext, beginShutdown, close } = build.entry.module as unknown as typeof entry
+const clientFiles = fileURLToPath(new URL('./build/client/', import.meta.url))
+
+const app = express()
+app.disable('x-powered-by')
+app.set('trust proxy', 'loopback')
+app.use(identified, logged, headersSet)
+app.use(compression({ level: 1, brotli: { params: { [constants.BROTLI_PARAM_QUALITY]: 0 } } }))
+app.use('/assets', express.static(`${clientFiles}assets`, { immutable: true, maxAge: '1y', index: false }), notFound)
+app.use(express.static(clientFiles, { maxAge: '1h', index: false, redirect: false }))
+app.use(bodyLimited)
+app.use(createRequestHandler({ build, getLoadContext: contextOf }))
+app.use(failed)
+
+const server = createServer(
+  // The checker's default of 30 s would let slow senders hold connections far past these limits.
+  { headersTimeout: 8000, requestTimeout: 15_000, connectionsCheckingInterval: 2000, keepAliveTimeout: 10_000 },
+  app,
+)
+server.on('error', refusedToListen)
+server.listen(env.port, env.host, () => {
+  const address = server.address()
+  process.send?.({ listening: typeof address === 'object' ? address?.port : env.port })
+})
+
+let stopping = false
+for (const signal of ['SIGTERM', 'SIGINT', 'disconnect'] as const) process.on(signal, () => void stop())
+
+/** Takes no new request, lets those under way finish, then closes the application and ends the process. */
+async function stop() {
+  if (stopping) return
+  stopping = true
+  beginShutdown()
+  const idle = setInterval(() => server.closeIdleConnections(), 50)
+  const late = setTimeout(() => server.closeAllConnections(), DRAIN_MS)
+  await new Promise(resolve => server.close(resolve))
+  clearInterval(idle)
+  clearTimeout(late)
+  await close()
+  process.exit(0)
+}
+
+function refusedToListen(error: NodeJS.ErrnoException) {
+  const inUse = `Port ${env.port} is in use. Stop what uses it, or choose another: PORT=${env.port + 1} npm start`
+  console.error(error.code === 'EADDRINUSE' ? inUse : `The server cannot listen on ${env.host}: ${error.message}`)
+  process.exit(1)
+}
+
+function factsOf(response: Response): RequestFacts {
+  return response.locals.facts
+}
+
+function identified(...[request, response, next]: Parameters<RequestHandler>) {
+  const facts: RequestFacts = {
+    address: request.ip ?? 'unknown',
+    requestId: randomUUID(),
+    nonce: randomBytes(16).toString('base64'),
+    logged: {},
+  }
+  response.locals.facts = facts
+  // Whatever the client sent under this name is replaced: it could be made to look like another request's.
+  request.headers['x-request-id'] = facts.requestId
+  next()
+}
+
+function contextOf(_request: unknown, response: Response) {
+  const context = new RouterContextProvider()
+  context.set(requestContext, factsOf(response))
+  return context
+}
+
+function logged(...[request, response, next]: Parameters<RequestHandler>) {
+  const startedAt = performance.now()
+  const { method, path } = request
+  response.once('close', () => {
+    if (path.startsWith('/assets/') && response.statusCode < 400) return
+    const { requestId, logged: facts } = factsOf(response)
+    const status = response.writableFinished ? response.statusCode : 499 // the client went away
+    const ms = Math.round(performance.now() - startedAt)
+    console.log(JSON.stringify({ at: new Date().toISOString(), requestId, method, path, status, ms, ...facts }))
+  })
+  next()
+}
+
+/** Sets what the answer itself has not set, at the last moment: files, pages and failures alike. */
+function headersSet(...[request, response, next]: Parameters<RequestHandler>) {
+  const defaults = { ...securityHeaders(factsOf(response)), ...(request.secure ? strictTransport : {}) }
+  const writeHead = response.writeHead.bind(response)
+  response.writeHead = ((...values: Parameters<typeof writeHead>) => {
+    for (const [name, value] of Object.entries(defaults)) if (!response.hasHeader(name)) response.setHeader(name, value)
+    return writeHead(...values)
+  }) as typeof writeHead
+  next()
+}
+
+const strictTransport = { 'Strict-Transport-Security': 'max-age=31536000; includeSubDomains' }
+
+function securityHeaders({ nonce, requestId }: RequestFacts) {
+  const policy = [
+    `default-src 'none'`,
+    `script-src 'nonce-${nonce}' 'strict-dynamic' 'wasm-unsafe-eval'`,
+    `style-src 'self' 'nonce-${nonce}'`,
+    `font-src 'self'; img-src 'self' blob:; connect-src 'self'; worker-src 'self'; manifest-src 'self'`,
+    `form-action 'self'; base-uri 'none'; frame-ancestors 'none'; object-src 'none'`,
+  ]
+  return {
+    'Content-Security-Policy': policy.join('; '),
+    'Cache-Control': 'no-store',
+    'Cross-Origin-Opener-Policy': 'same-origin',
+    'Cross-Origin-Resource-Policy': 'same-origin',
+    'Permissions-Policy': 'camera=(self), geolocation=(), microphone=()',
+    'Referrer-Policy': 'no-referrer',
+    'X-Content-Type-Options': 'nosniff',
+    'X-Request-Id': requestId,
+  }
+}
+
+/** Refuses a body past the limit, by what it says of itself and, where it says nothing, by counting as it arrives. */
+function bodyLimited(...[request, response, next]: Parameters<RequestHandler>) {
+  const refuse = () => {
+    if (response.headersSent) return
+    // The rest of the body is still on its way: a connection kept open would take it for the next request.
+    response.set('Connection', 'close').status(413).type('text').send('The form is too long. Nothing was charted.')
+    response.once('finish', () => request.destroy())
+  }
+  if (Number(request.headers['content-length'] ?? 0) > MOST_BODY_BYTES) return refuse()
+  let bytes = 0
+  request.on('data', (chunk: Buffer) => {
+    bytes += chunk.length
+    if (bytes > MOST_BODY_BYTES) refuse()
+  })
+  request.pause() // counting must not start the flow before a route reads
+  next()
+}
+
+function notFound(...[, response]: Parameters<RequestHandler>) {
+  response.status(404).type('text').send('Not found')
+}
+
+function failed(...[error, , response, _next]: Parameters<ErrorRequestHandler>) {
+  const { requestId } = factsOf(response)
+  if (response.headersSent) return void response.destroy()
+  const status = Number.isInteger(error?.status) && error.status >= 400 ? error.status : 500
+  if (status >= 500) {
+    console.error(JSON.stringify({ at: new Date().toISOString(), failed: error?.name, code: error?.code, requestId }))
+  }
+  response.status(status).type('text').send(`This request failed. Reference: ${requestId}`)
+}
