@@ -11,6 +11,7 @@ const table = `CREATE TABLE IF NOT EXISTS stays (
   discharge_reason VARCHAR(32) CHARACTER SET ascii COLLATE ascii_bin NULL,
   discharge_note VARCHAR(500) NULL,
   entry_count INT UNSIGNED NOT NULL DEFAULT 0 COMMENT 'the number of its last entry; set by a trigger of entries',
+  last_entry_hash CHAR(64) CHARACTER SET ascii COLLATE ascii_bin NOT NULL DEFAULT '' COMMENT 'likewise',
   occupied_bed_id UUID AS (IF(discharged_at IS NULL, bed_id, NULL)) VIRTUAL,
   open_patient_id UUID AS (IF(discharged_at IS NULL, patient_id, NULL)) VIRTUAL,
   PRIMARY KEY (id),

@@ -16,6 +16,7 @@ const table = `CREATE TABLE IF NOT EXISTS entries (
   reason VARCHAR(500) NULL,
   status VARCHAR(16) CHARACTER SET ascii COLLATE ascii_bin NOT NULL DEFAULT 'final',
   data JSON NOT NULL,
+  hash CHAR(64) CHARACTER SET ascii COLLATE ascii_bin NOT NULL COMMENT 'SHA-256 of the hash before it and this row; set by trigger',
   PRIMARY KEY (id),
   UNIQUE KEY entries_number (stay_id, number),
   UNIQUE KEY entries_supersedes (supersedes_id),
@@ -31,10 +32,16 @@ const table = `CREATE TABLE IF NOT EXISTS entries (
   CONSTRAINT entries_are_counted CHECK (number > 0 AND version > 0),
   CONSTRAINT entries_status_is_known CHECK (status IN ('final', 'retracted')),
   CONSTRAINT entries_retract_another CHECK (status = 'final' OR supersedes_id IS NOT NULL),
-  CONSTRAINT entries_correct_with_a_reason CHECK (supersedes_id IS NULL OR (reason IS NOT NULL AND CHAR_LENGTH(TRIM(reason)) > 0)),
+  CONSTRAINT entries_correct_with_a_reason CHECK (supersedes_id IS NULL
+    OR (reason IS NOT NULL AND CHAR_LENGTH(TRIM(reason)) > 0)),
   CONSTRAINT entries_have_happened CHECK (performed_at <= recorded_at + INTERVAL 2 MINUTE),
   CONSTRAINT entries_are_witnessed_by_another CHECK (witness_id IS NULL OR witness_id <> recorded_by)
 )`
+
+// Free text comes last but for the payload and is quoted, so that no two rows read the same. database/verify-entries repeats this.
+const hashed = `SHA2(CONCAT_WS('\\n', head, NEW.id, NEW.stay_id, counted, NEW.kind, NEW.version, NEW.performed_at,
+    NEW.recorded_at, NEW.recorded_by, NEW.recorded_role, COALESCE(CAST(NEW.witness_id AS CHAR), '-'),
+    COALESCE(CAST(NEW.supersedes_id AS CHAR), '-'), NEW.status, COALESCE(JSON_QUOTE(NEW.reason), '-'), NEW.data), 256)`
 
 // The number is given under the lock of the stay's row, which is held until the commit: whoever sees number n sees all
 // before it. All reads lock, because a plain read would open a snapshot, and the ward's counter may have moved since.
@@ -42,9 +49,12 @@ const numbering = `CREATE TRIGGER IF NOT EXISTS entries_are_numbered BEFORE INSE
 BEGIN
   DECLARE counted INT UNSIGNED;
   DECLARE ended DATETIME(3);
-  UPDATE stays SET entry_count = entry_count + 1 WHERE id = NEW.stay_id;
-  SELECT entry_count, discharged_at INTO counted, ended FROM stays WHERE id = NEW.stay_id FOR UPDATE;
-  SET NEW.number = counted;
+  DECLARE head CHAR(64) CHARACTER SET ascii;
+  SELECT entry_count + 1, discharged_at, last_entry_hash INTO counted, ended, head
+    FROM stays WHERE id = NEW.stay_id FOR UPDATE;
+  IF counted IS NULL THEN
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'entries belong to a stay';
+  END IF;
   IF NEW.performed_at > ended THEN
     SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'entries are performed within their stay';
   END IF;
@@ -52,6 +62,8 @@ BEGIN
     WHERE id = NEW.supersedes_id AND stay_id = NEW.stay_id AND kind = NEW.kind LOCK IN SHARE MODE) THEN
     SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'entries supersede one of the same stay and kind';
   END IF;
+  SET NEW.number = counted, NEW.hash = ${hashed};
+  UPDATE stays SET entry_count = counted, last_entry_hash = NEW.hash WHERE id = NEW.stay_id;
 END`
 
 // The ward's row is the hottest one: it is locked last.

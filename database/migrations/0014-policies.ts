@@ -12,7 +12,7 @@ const table = `CREATE TABLE IF NOT EXISTS policies (
   created_by UUID NULL COMMENT 'null: came with the program',
   created_at DATETIME(3) NOT NULL DEFAULT UTC_TIMESTAMP(3),
   setting_values JSON NOT NULL,
-  scope CHAR(36) CHARACTER SET ascii COLLATE ascii_bin AS (COALESCE(ward_id, 'hospital')) VIRTUAL,
+  scope CHAR(36) CHARACTER SET ascii COLLATE ascii_bin AS (COALESCE(CAST(ward_id AS CHAR), 'hospital')) VIRTUAL,
   PRIMARY KEY (id),
   UNIQUE KEY policies_version (scope, version),
   CONSTRAINT policies_ward FOREIGN KEY (ward_id) REFERENCES wards (id),
