@@ -60,7 +60,7 @@ export function StripShapes({ shapes, height }: StripShapesProps) {
         {outlineNames.map(name => (
           <Line key={name} d={shapes.outlines[name]} look={outlines[name]} />
         ))}
-        <Line d={shapes.done} look="fill-none stroke-done stroke-8" />
+        <Line d={shapes.done} look="fill-none stroke-done stroke-8 [stroke-linecap:round]" />
       </Stretched>
       {shapes.late.map(box => (
         <rect
@@ -96,5 +96,5 @@ interface LineProps {
 /** Nothing when there is nothing to draw: a page of strips stays small. */
 function Line({ d, look }: LineProps) {
   if (d === '') return null
-  return <path d={d} className={look} strokeLinecap="round" strokeLinejoin="round" vectorEffect="non-scaling-stroke" />
+  return <path d={d} className={look} strokeLinejoin="round" vectorEffect="non-scaling-stroke" />
 }

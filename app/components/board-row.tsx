@@ -1,0 +1,123 @@
+import type { ReactNode } from 'react'
+import { Link } from 'react-router'
+import type { TaskStatus } from '#app/rules/status.ts'
+import { DwellBar } from './dwell-bar.tsx'
+import { edgeOf, toneOf } from './status-look.ts'
+import { Tag } from './tag.tsx'
+
+export interface NextCare {
+  readonly name: string
+  readonly title: string
+  readonly status: TaskStatus
+  /** `1 h 52 min late`, `due by 14:36`, `due 16:06` */
+  readonly says: string
+}
+
+export interface BoardPatient {
+  readonly href: string
+  readonly bed: string
+  readonly family: string
+  readonly given: string
+  readonly age: number
+  readonly recordNo: string
+  /** `8.0 ISO, cuffed, dual`; null when no tube is charted. */
+  readonly tube: {
+    readonly says: string
+    readonly day: number
+    readonly limit: number | null
+    readonly status: TaskStatus
+  } | null
+  /** Most pressing first. */
+  readonly next: readonly NextCare[]
+  /** The most pressing status of all. */
+  readonly worst: TaskStatus
+  /** Warnings that nobody has answered. */
+  readonly warnings?: number
+}
+
+const SHOWN = 3
+
+/** Beds, people, tubes, strips and next care, in these columns on a desk and one below the other on a phone. */
+const COLUMNS =
+  'md:grid-cols-[4rem_minmax(0,1fr)_minmax(0,1fr)] lg:grid-cols-[3.5rem_10.5rem_10.5rem_minmax(0,1fr)_17rem] xl:grid-cols-[4rem_12rem_11.5rem_minmax(0,1fr)_20rem]'
+
+interface BoardHeadProps {
+  /** The axis of the strips. */
+  readonly children: ReactNode
+}
+
+/** Column names and the axis; a screen reader hears them in each row instead. */
+export function BoardHead({ children }: BoardHeadProps) {
+  return (
+    <div
+      aria-hidden="true"
+      className={`hidden items-end gap-x-5 border-b border-line px-5 py-2 text-sm font-semibold text-ink3 lg:grid ${COLUMNS}`}
+    >
+      <span>Bed</span>
+      <span>Patient</span>
+      <span>Tube</span>
+      <div>{children}</div>
+      <span>Next care</span>
+    </div>
+  )
+}
+
+export interface BoardRowProps {
+  readonly patient: BoardPatient
+  /** It has changed since the board was last drawn. */
+  readonly changed?: boolean
+  /** The hour strip. */
+  readonly children: ReactNode
+}
+
+/** One patient on the board, as an item of a list. */
+export function BoardRow({ patient, changed = false, children }: BoardRowProps) {
+  const { href, bed, family, given, age, recordNo, tube, next, worst, warnings = 0 } = patient
+  return (
+    <li
+      className={`relative grid grid-cols-[3.5rem_minmax(0,1fr)] items-center gap-x-4 gap-y-3 border-t border-hair px-4 py-3 pl-5 first:border-0 lg:gap-x-5 lg:px-5 lg:py-2 ${COLUMNS} ${edgeOf[worst]} ${changed ? 'row-fade' : ''}`}
+    >
+      <span className="text-2xl font-bold tracking-tight">
+        <span className="sr-only">Bed </span>
+        {bed}
+      </span>
+      <div className="min-w-0">
+        <Link to={href} className="inline-block min-h-6 text-lg leading-tight font-semibold hover:underline">
+          {`${family.toUpperCase()}, ${given}`}
+        </Link>
+        <p className="text-sm text-ink2">
+          {age} y · {recordNo}
+        </p>
+        {warnings > 0 && <Tag tone="late">{warnings === 1 ? '1 warning' : `${warnings} warnings`}</Tag>}
+      </div>
+      <div className="min-w-0 max-md:col-start-2">
+        <p className="text-sm font-semibold">{tube ? tube.says : 'No tube charted'}</p>
+        {tube && <DwellBar day={tube.day} limit={tube.limit} status={tube.status} />}
+      </div>
+      <div className="min-w-0 max-lg:col-span-full">{children}</div>
+      <NextCareList next={next} />
+    </li>
+  )
+}
+
+interface NextCareListProps {
+  readonly next: readonly NextCare[]
+}
+
+function NextCareList({ next }: NextCareListProps) {
+  const more = next.length - SHOWN
+  return (
+    <ul aria-label="Next care" className="grid gap-1 max-lg:col-span-full">
+      {next.slice(0, SHOWN).map(care => (
+        <li key={care.name} className="flex items-baseline justify-between gap-3">
+          <span className="min-w-0 font-semibold">{care.title}</span>
+          <span className="flex-none">
+            <Tag tone={toneOf[care.status]}>{care.says}</Tag>
+          </span>
+        </li>
+      ))}
+      {more > 0 && <li className="text-sm text-ink2">{`${more} more`}</li>}
+      {next.length === 0 && <li className="text-ink2">Nothing due</li>}
+    </ul>
+  )
+}
