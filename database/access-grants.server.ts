@@ -1,7 +1,7 @@
 import { v7 as uuidv7 } from 'uuid'
 import { logAccess, type Trace } from './access-log.server.ts'
 import { databaseNow } from './clock.server.ts'
-import { AccessGrantRow } from './models/access-grant-row.server.ts'
+import { AccessGrantRow } from './models/access-grant.server.ts'
 import { select, transact } from './sequelize.server.ts'
 
 /** Where a patient is, or was last, and until when this person has a reason to open them. `stayId` null: never admitted. */

@@ -1,7 +1,7 @@
 import type { Role } from '#app/auth/permissions.ts'
 import { type AccessEntry, logAccess, type Trace } from './access-log.server.ts'
 import { databaseNow } from './clock.server.ts'
-import { UserRow } from './models/user-row.server.ts'
+import { UserRow } from './models/user.server.ts'
 import { select, transact } from './sequelize.server.ts'
 import { endSessionsOf } from './sessions.server.ts'
 
