@@ -1,0 +1,159 @@
+import { spawn } from 'node:child_process'
+import { mkdirSync } from 'node:fs'
+import { dependencies } from './dependencies.mjs'
+import { runningMariadb, startMariadb, stopMariadb } from './mariadb.mjs'
+import { freePort } from './processes.mjs'
+import { sessionSecret, settings as settingsFrom } from './settings.mjs'
+import { endAsked, step } from './steps.mjs'
+import { ROOT, resolved, tool } from './tool.mjs'
+
+const LONGEST_END_MS = 2500
+
+/**
+ * How one of the two ways of running differs from the other.
+ * @typedef {object} Way
+ * @property {'production' | 'development'} mode
+ * @property {string[]} server the program that serves, as for `tool`
+ * @property {(end: AbortSignal) => Promise<void>} [before] what has to be done before serving
+ * @property {boolean} [tellsReady] true when the server sends a message once it listens
+ */
+
+/**
+ * Brings up everything the application needs, serves it until the operator ends it, and takes down what it brought up.
+ * @param {Way} way
+ */
+export async function launch(way) {
+  const end = endAsked()
+  /** @type {string | null} */
+  let held = null
+  try {
+    const settings = settingsFrom(process.env)
+    await addressIsFree(settings)
+    mkdirSync(settings.folder, { recursive: true, mode: 0o711 })
+    await step('Packages', async () => [await dependencies(end), null])
+    const database = await databaseOf(settings, end)
+    if (database.held) held = settings.folder
+    const env = {
+      ...settings.env,
+      ...database.env,
+      SESSION_SECRET: sessionSecret(process.env, settings),
+      NODE_ENV: way.mode,
+    }
+    await schemaAndDemo(settings, env, end)
+    await way.before?.(end)
+    process.exitCode = await served(way, settings, env, end, held)
+  } catch (error) {
+    if (!end.aborted) {
+      console.error(`\n${error instanceof Error ? error.message : error}`)
+      process.exitCode = 1
+    }
+  }
+  if (held) await stopMariadb(held)
+  process.exit()
+}
+
+/** @param {import('./settings.mjs').Settings} settings */
+async function addressIsFree({ port, host }) {
+  if (port === 0 || (await freePort(port, host))) return
+  throw new Error(`Port ${port} is in use. Stop what uses it, or choose another: PORT=${port + 1} npm start`)
+}
+
+/**
+ * @param {import('./settings.mjs').Settings} settings
+ * @param {AbortSignal} end
+ */
+async function databaseOf({ folder, databaseUrl }, end) {
+  if (databaseUrl) {
+    const ownerUrl = process.env.DATABASE_OWNER_URL || databaseUrl
+    return { held: false, env: { DATABASE_URL: databaseUrl, DATABASE_OWNER_URL: ownerUrl } }
+  }
+  const server = await step('MariaDB', async () => {
+    const started = await startMariadb({ folder, hold: true })
+    const says = `${started.held ? 'runs' : 'was running'} on 127.0.0.1:${started.port}, data in ${folder}`
+    return [started.note ? `${says}, ${started.note}` : says, started]
+  })
+  if (end.aborted && server.held) await stopMariadb(folder)
+  end.throwIfAborted()
+  return { held: server.held, env: { DATABASE_URL: server.url('app'), DATABASE_OWNER_URL: server.url('owner') } }
+}
+
+/**
+ * @param {import('./settings.mjs').Settings} settings
+ * @param {NodeJS.ProcessEnv} env
+ * @param {AbortSignal} signal
+ */
+async function schemaAndDemo({ demo, databaseUrl }, env, signal) {
+  const advice = databaseUrl ? 'Is DATABASE_URL right, and may its user create tables there?' : ''
+  await step('Schema', async () => [
+    await tool(['tsx', 'database/commands/migrate.ts', 'up'], { env, signal, advice }),
+    null,
+  ])
+  if (!demo) return
+  await step('Demo hospital', async () => [
+    await tool(['tsx', 'database/commands/seed.ts', '--if-empty'], {
+      env,
+      signal,
+      advice: 'To start without the demo hospital: DEMO=off npm start',
+    }),
+    null,
+  ])
+}
+
+/**
+ * @param {Way} way
+ * @param {import('./settings.mjs').Settings} settings
+ * @param {NodeJS.ProcessEnv} env
+ * @param {AbortSignal} end
+ * @param {string | null} held the data folder whose MariaDB is this process's own
+ * @returns {Promise<number>} the exit code
+ */
+async function served(way, settings, env, end, held) {
+  const [program, ...args] = resolved(way.server)
+  const server = spawn(program, args, {
+    cwd: ROOT,
+    env: { ...process.env, ...env },
+    stdio: way.tellsReady ? ['ignore', 'inherit', 'inherit', 'ipc'] : ['ignore', 'inherit', 'inherit'],
+  })
+  const { promise: over, settle } = settled()
+  server.once('error', error => settle(error))
+  server.once('exit', code => settle(end.aborted ? 0 : (code ?? 1)))
+  server.once('message', () => console.log(`\nCannulary is at ${settings.address}   End it with Ctrl-C.\n`))
+  const watch = held ? setInterval(() => revive(held).catch(settle), 1000) : undefined
+  const stop = () => {
+    clearInterval(watch)
+    server.kill('SIGTERM')
+    setTimeout(() => server.kill('SIGKILL'), LONGEST_END_MS).unref()
+  }
+  if (end.aborted) stop()
+  end.addEventListener('abort', stop)
+  const outcome = await over
+  clearInterval(watch)
+  if (typeof outcome === 'number') return outcome
+  server.kill('SIGTERM')
+  throw outcome
+}
+
+/** A promise with the function that settles it. */
+function settled() {
+  /** @type {(outcome: number | Error) => void} */
+  let settle = () => {}
+  /** @type {Promise<number | Error>} */
+  const promise = new Promise(resolve => {
+    settle = resolve
+  })
+  return { promise, settle }
+}
+
+let reviving = false
+
+/**
+ * Starts the database again after it was killed, on its old port, where the application looks for it.
+ * @param {string} folder
+ */
+async function revive(folder) {
+  if (reviving || runningMariadb(folder)) return
+  reviving = true
+  console.error('MariaDB ended unexpectedly. Starting it again.')
+  await startMariadb({ folder, hold: true })
+  reviving = false
+}
