@@ -3,7 +3,7 @@ import type { AnyCharted, CareContext, DataOf, PatientFacts, StoredEntry, WardFa
 import { versionOf } from './payload.ts'
 import { type PersonalValue, type Policy, type SettingValue, valuesFor } from './policy.ts'
 import { patientRecord } from './record.ts'
-import type { TubeData } from './tube-change/tube.ts'
+import type { TubeData } from './tube-change/schema.ts'
 
 /** Builders for tests: the smallest valid thing, with what the test is about laid over it. Zone Europe/London. */
 
@@ -33,7 +33,7 @@ export function at(when: string): Date {
 
 let made = 0
 
-/** A stored entry of a kind, performed and recorded at `when`; `more` sets the rest of its spine. */
+/** A stored entry of a kind, performed and recorded at `when`; `more` sets the rest of its spine. Throws when the kind would refuse `data`. */
 export function anEntry<K extends AnyCharted>(
   kind: K,
   when: string | Date,
@@ -57,7 +57,7 @@ export function anEntry<K extends AnyCharted>(
     reason: null,
     status: 'final',
     version: versionOf(kind),
-    raw: data,
+    raw: kind.schema.parse(data),
     ...more,
   }
 }

@@ -1,0 +1,26 @@
+import { careKind } from '../kind.ts'
+import { isNarrowed } from './acts.ts'
+import { innerCannulaExamples } from './examples.ts'
+import { innerCannulaActs } from './schema.ts'
+import { innerCannulaSentence } from './sentence.ts'
+import { innerCannulaSettings } from './settings.ts'
+import { innerCannulaStart, usualInnerCannula } from './start.ts'
+import { innerCannulaTasks } from './tasks.ts'
+import { innerCannulaWarnings, standingInnerCannulaWarnings } from './warnings.ts'
+
+/** The removable lining of a dual-cannula tube: looked at, cleaned, replaced or swapped. */
+export const innerCannula = careKind({
+  ...innerCannulaActs,
+  title: 'Inner cannula',
+  chartWords: 'Chart inner cannula',
+  lane: 'Inner cannula',
+  examples: innerCannulaExamples,
+  summary: innerCannulaSentence,
+  settings: innerCannulaSettings,
+  tasks: innerCannulaTasks,
+  startsWith: innerCannulaStart,
+  usual: usualInnerCannula,
+  warnings: innerCannulaWarnings,
+  standing: standingInnerCannulaWarnings,
+  outOfRange: data => isNarrowed(data) || data.act === 'unable',
+})

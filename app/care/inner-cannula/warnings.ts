@@ -1,0 +1,54 @@
+import { BREATHING_SOURCE, breathingAction } from '../emergency.ts'
+import type { CareContext } from '../kind.ts'
+import { standsSince } from '../standing.ts'
+import { bleedWarnings } from '../suction/bleeding.ts'
+import { tubeInPlace } from '../tube-change/tube.ts'
+import type { Warning } from '../warning.ts'
+import { actsOnTube } from './acts.ts'
+import { absence, absentWarning, fitRules } from './fit.ts'
+import { narrowed, repeatedBlock, shorterInterval, standingBlocks, stillNarrowed } from './narrowing.ts'
+import type { InnerCannulaData } from './schema.ts'
+
+/** What an act on the inner cannula asks people to notice as it is charted. */
+export function innerCannulaWarnings(data: InnerCannulaData, context: CareContext): readonly Warning[] {
+  return [
+    ...distress(data, context),
+    ...bleedWarnings('inner-cannula-blood', data.blood, context),
+    ...fitRules.flatMap(rule => rule.warns(data, context)),
+    ...narrowed(data, context),
+    ...repeatedBlock(data, context),
+  ]
+}
+
+function distress(data: InnerCannulaData, { record }: CareContext): readonly Warning[] {
+  if (data.tolerance !== 'distress') return []
+  return [
+    {
+      name: 'inner-cannula-distress',
+      level: 'red',
+      action: breathingAction(record.patient),
+      cause: 'Distress at the inner cannula check.',
+      source: BREATHING_SOURCE,
+    },
+  ]
+}
+
+/** What stands by the last acts on the inner cannula of the tube in place, each until an act that settles it. */
+export function standingInnerCannulaWarnings(context: CareContext): readonly Warning[] {
+  if (!tubeInPlace(context.record)) return []
+  const acts = actsOnTube(context.record)
+  return [
+    ...neverFitted(context),
+    ...fitRules.flatMap(rule => standsSince(acts, rule, context)),
+    ...stillNarrowed(context),
+    ...standingBlocks(context),
+    ...shorterInterval(context),
+  ]
+}
+
+/** A dual tube that went in without an inner cannula, where no act says that one was fitted or tried. */
+function neverFitted({ record }: CareContext): readonly Warning[] {
+  const tube = tubeInPlace(record)?.data
+  if (tube?.construction !== 'dual' || tube.innerCannula !== 'none') return []
+  return actsOnTube(record).some(({ data }) => absence.isSettledBy(data)) ? [] : [absentWarning(tube.connector)]
+}

@@ -1,0 +1,21 @@
+import { showDateTime } from '../time/display.ts'
+import type { CareContext, Entry } from './kind.ts'
+import type { Warning } from './warning.ts'
+
+/**
+ * Warnings of one rule about the latest act that settles it one way or the other, with when that was.
+ * `acts` come latest first; when none settles it, nothing stands.
+ */
+export function standsSince<Data>(
+  acts: readonly Entry<Data>[],
+  rule: {
+    readonly isSettledBy: (data: Data) => boolean
+    readonly warns: (data: Data, context: CareContext) => readonly Warning[]
+  },
+  context: CareContext,
+): readonly Warning[] {
+  const last = acts.find(({ data }) => rule.isSettledBy(data))
+  if (!last) return []
+  const when = showDateTime(last.performedAt, context.ward.zone)
+  return rule.warns(last.data, context).map(warning => ({ ...warning, cause: `${warning.cause} Charted ${when}.` }))
+}

@@ -1,0 +1,37 @@
+import { numberSetting, switchSetting } from '../policy.ts'
+
+export const bleedWindowFrom = numberSetting({
+  name: 'suction-bleed-window-from',
+  label: 'Bleeding may warn of a larger bleed from day',
+  unit: 'days',
+  default: 3,
+  min: 0,
+  max: 7,
+  affects: 'Suction and inner cannula: words and level of the warning of blood.',
+  source: { says: 'Journal abstract on fistula of the innominate artery: 3 days to 6 weeks', standing: 'published' },
+})
+
+export const bleedWindowTo = numberSetting({
+  name: 'suction-bleed-window-to',
+  label: 'Bleeding may warn of a larger bleed until day',
+  unit: 'days',
+  default: 42,
+  min: 21,
+  max: 90,
+  affects: 'Suction and inner cannula: words and level of the warning of blood.',
+  source: {
+    says: 'Massive bleeding from 3 days to 6 weeks is an artery fistula until proven otherwise; Bontempo and Manning: every bleed counts as a warning bleed',
+    standing: 'published',
+  },
+})
+
+export const streaksAreRed = switchSetting({
+  name: 'suction-streaks-red',
+  label: 'Streaks of blood within those days are an emergency',
+  unit: 'on or off',
+  default: false,
+  affects: 'Suction and inner cannula: streaks are amber, or red when on.',
+  source: { says: 'Streaks only: doctor this shift; a hospital may raise it', standing: 'product proposal' },
+})
+
+export const bleedingSettings = [bleedWindowFrom, bleedWindowTo, streaksAreRed]

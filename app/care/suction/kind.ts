@@ -1,0 +1,23 @@
+import { careKind } from '../kind.ts'
+import { suctionExamples } from './examples.ts'
+import { suctions } from './schema.ts'
+import { suctionSentence } from './sentence.ts'
+import { suctionSettings } from './settings.ts'
+import { suctionTasks } from './tasks.ts'
+import { standingSuctionWarnings, suctionWarnings } from './warnings.ts'
+
+/** The need for suction looked at, and episodes of suction. There is no usual answer: everything in it is a finding. */
+export const suction = careKind({
+  ...suctions,
+  title: 'Suction',
+  chartWords: 'Chart suction',
+  lane: 'Suction',
+  examples: suctionExamples,
+  summary: suctionSentence,
+  settings: suctionSettings,
+  tasks: suctionTasks,
+  warnings: suctionWarnings,
+  standing: standingSuctionWarnings,
+  outOfRange: ({ passed, blood, tolerance }) =>
+    passed === 'no' || blood === 'fresh' || blood === 'heavy' || tolerance === 'distress',
+})

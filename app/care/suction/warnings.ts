@@ -1,0 +1,32 @@
+import type { CareContext } from '../kind.ts'
+import { standsSince } from '../standing.ts'
+import type { Warning } from '../warning.ts'
+import { actsOnTube } from './acts.ts'
+import { bleedWarnings } from './bleeding.ts'
+import { changedSecretions, notWell, willNotPass } from './findings.ts'
+import { isThroughTube, type SuctionData } from './schema.ts'
+import { techniqueWarnings } from './technique.ts'
+
+/** What an episode of suction asks people to notice as it is charted. */
+export function suctionWarnings(data: SuctionData, context: CareContext): readonly Warning[] {
+  return [
+    ...willNotPass(data, context),
+    ...notWell(data, context),
+    ...blood(data, context),
+    ...techniqueWarnings(data, context),
+    ...changedSecretions(data, context),
+  ]
+}
+
+/** What stands until the next episode shows otherwise: a catheter that would not pass, and blood. */
+export function standingSuctionWarnings(context: CareContext): readonly Warning[] {
+  const acts = actsOnTube(context.record)
+  return [
+    ...standsSince(acts, { isSettledBy: isThroughTube, warns: willNotPass }, context),
+    ...standsSince(acts, { isSettledBy: data => data.blood !== undefined, warns: blood }, context),
+  ]
+}
+
+function blood(data: SuctionData, context: CareContext): readonly Warning[] {
+  return bleedWarnings('suction-blood', data.blood, context)
+}
