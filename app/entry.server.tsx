@@ -1,7 +1,13 @@
 import { PassThrough } from 'node:stream'
 import { createReadableStreamFromReadable } from '@react-router/node'
 import { renderToPipeableStream } from 'react-dom/server'
-import { type EntryContext, type HandleErrorFunction, type RouterContextProvider, ServerRouter } from 'react-router'
+import {
+  type EntryContext,
+  type HandleErrorFunction,
+  isRouteErrorResponse,
+  type RouterContextProvider,
+  ServerRouter,
+} from 'react-router'
 import { closePasswords } from '#app/auth/password.server.ts'
 import { sequelize } from '#database/sequelize.server.ts'
 import { requestContext } from './request-context.server.ts'
@@ -51,7 +57,8 @@ export default function respond(
 }
 
 export const handleError: HandleErrorFunction = (error, { request, context }) => {
-  if (!request.signal.aborted) logFailure(error, requestIdOf(context))
+  // What routes answer with on purpose, such as a 404, is in the request's own line.
+  if (!request.signal.aborted && !isRouteErrorResponse(error)) logFailure(error, requestIdOf(context))
 }
 
 function requestIdOf(context: Readonly<RouterContextProvider>) {

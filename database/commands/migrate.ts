@@ -21,13 +21,13 @@ async function answer([command, ...options]: string[]): Promise<string> {
     case 'up': {
       const applied = await migrateUp(owner)
       await grantAppRights(owner, env.databaseUrl)
-      return applied.length > 0 ? `Applied ${applied.join(', ')}.` : 'The schema is up to date.'
+      return applied.length > 0 ? `applied ${count(applied)}` : 'up to date'
     }
     case 'down': {
       const [option, to] = options
       if (option !== '--to' || !to) throw new Error(USAGE)
       const reverted = await migrateDown(owner, to)
-      return reverted.length > 0 ? `Took back ${reverted.join(', ')}.` : 'There was nothing to take back.'
+      return reverted.length > 0 ? `took back ${count(reverted)}` : 'nothing to take back'
     }
     case 'status': {
       const { all, pending } = await migrationStatus(owner)
@@ -36,4 +36,8 @@ async function answer([command, ...options]: string[]): Promise<string> {
     default:
       throw new Error(USAGE)
   }
+}
+
+function count(names: string[]) {
+  return `${names.length === 1 ? 'one migration' : `${names.length} migrations, the last is`} ${names.at(-1)}`
 }
