@@ -11,6 +11,8 @@ export interface NextCare {
   readonly status: TaskStatus
   /** `1 h 52 min late`, `due by 14:36`, `due 16:06` */
   readonly says: string
+  /** Its form, for those who may chart it. */
+  readonly href?: string
 }
 
 export interface BoardPatient {
@@ -46,18 +48,18 @@ interface BoardHeadProps {
   readonly children: ReactNode
 }
 
-/** Column names and the axis; a screen reader hears them in each row instead. */
+/** Column names and the axis, which is all that a narrow board keeps; a screen reader hears them in each row instead. */
 export function BoardHead({ children }: BoardHeadProps) {
   return (
     <div
       aria-hidden="true"
-      className={`hidden items-end gap-x-5 border-b border-line px-5 py-2 text-sm font-semibold text-ink3 lg:grid ${COLUMNS}`}
+      className={`items-end gap-x-5 border-b border-line px-4 py-2 pl-5 text-sm font-semibold text-ink3 lg:grid lg:px-5 ${COLUMNS}`}
     >
-      <span>Bed</span>
-      <span>Patient</span>
-      <span>Tube</span>
+      <span className="max-lg:hidden">Bed</span>
+      <span className="max-lg:hidden">Patient</span>
+      <span className="max-lg:hidden">Tube</span>
       <div>{children}</div>
-      <span>Next care</span>
+      <span className="max-lg:hidden">Next care</span>
     </div>
   )
 }
@@ -110,7 +112,16 @@ function NextCareList({ next }: NextCareListProps) {
     <ul aria-label="Next care" className="grid gap-1 max-lg:col-span-full">
       {next.slice(0, SHOWN).map(care => (
         <li key={care.name} className="flex items-baseline justify-between gap-3">
-          <span className="min-w-0 font-semibold">{care.title}</span>
+          {care.href ? (
+            <Link
+              to={care.href}
+              className="inline-flex min-h-11 min-w-0 items-center font-semibold hover:underline md:min-h-8"
+            >
+              {care.title}
+            </Link>
+          ) : (
+            <span className="min-w-0 font-semibold">{care.title}</span>
+          )}
           <span className="flex-none">
             <Tag tone={toneOf[care.status]}>{care.says}</Tag>
           </span>

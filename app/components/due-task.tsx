@@ -51,7 +51,7 @@ export function DueTask({ task, why }: DueTaskProps) {
           href={chart.href}
           size={48}
           variant={pressing.includes(status) ? 'primary' : 'plain'}
-          className="min-w-24"
+          className="min-w-24 max-w-34 md:max-w-none"
           label={`${chart.words}, ${title}`}
         >
           {chart.words}

@@ -22,12 +22,17 @@ const mm = (value: number): string => value.toFixed(1)
 
 /** The neck plate as it looks at the bedside, drawn from the tube's own numbers and with what is printed on it. */
 export function Flange(props: FlangeProps) {
-  const { idMm, odMm, lengthMm, label, cuff, className = '' } = props
+  const { idMm, odMm, lengthMm, label, cuff, className = 'max-w-90' } = props
   const left = [`ID ${mm(idMm)}`, `OD ${mm(odMm)}`, ...(lengthMm === undefined ? [] : [`${lengthMm} mm long`])]
   const right = [...linesOf(label), ...linesOf(cuff)]
   const bold = linesOf(label).length
   return (
-    <svg role="img" aria-label={flangeWords(props)} viewBox="0 0 340 150" className={`block w-full ${className}`}>
+    <svg
+      role="img"
+      aria-label={flangeWords(props)}
+      viewBox="0 0 340 150"
+      className={`mx-auto block w-full ${className}`}
+    >
       <path
         d="M126 34C98 26 66 20 42 23 15 27 8 52 8 75s7 48 34 52c24 3 56-3 84-11 26 12 62 12 88 0 28 8 60 14 84 11 27-4 34-29 34-52s-7-48-34-52c-24-3-56 3-84 11-26-12-62-12-88 0z"
         className="fill-sunk stroke-ink2 stroke-2"
@@ -87,7 +92,7 @@ function Lines({ lines, x, bold, anchor }: LinesProps) {
       x={x}
       y={first + index * 18}
       textAnchor={anchor}
-      className={index < bold ? 'fill-ink text-[15px] font-semibold' : 'fill-ink2 text-[13px]'}
+      className={index < bold ? 'fill-ink text-[14px] font-semibold' : 'fill-ink2 text-[13px]'}
     >
       {line}
     </text>

@@ -32,13 +32,13 @@ const TAB =
   'flex min-h-14 flex-1 flex-col items-center justify-center border-t-3 border-transparent px-1 text-center text-xs leading-tight font-semibold text-ink2'
 const SHOWN = 4
 
-/** The sections at the foot of a phone: up to four in reach of the thumb, the rest are in the menu of the top bar. */
+/** The sections at the foot of a phone: up to four in reach of the thumb, all are in the menu. A form's final bar takes their place. */
 export function BottomSections({ sections }: SectionsProps) {
   if (sections.length === 0) return null
   return (
     <nav
       aria-label="Sections, at the foot"
-      className="fixed inset-x-0 bottom-0 z-20 flex border-t border-line bg-surface pb-[env(safe-area-inset-bottom)] md:hidden print:hidden"
+      className="fixed inset-x-0 bottom-0 z-20 flex border-t border-line bg-surface pb-[env(safe-area-inset-bottom)] md:hidden group-has-[[data-final-bar]]/page:hidden print:hidden"
     >
       {sections.slice(0, SHOWN).map(section => (
         <Link

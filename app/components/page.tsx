@@ -22,7 +22,7 @@ export interface AppPageProps {
 /** A page inside the application: bar, content, safety line. The content brings its own `h1`. */
 export function AppPage({ person, ward, now, zone, sections, theme, children }: AppPageProps) {
   return (
-    <div className="flex min-h-dvh flex-col pb-18 md:pb-0 print:block print:pb-0">
+    <div className="group/page flex min-h-dvh flex-col pb-18 has-[[data-final-bar]]:pb-0 md:pb-0 print:block print:pb-0">
       <header className="border-b border-line bg-surface print:hidden">
         <div className="mx-auto flex min-h-15 max-w-360 items-center gap-3 px-4 md:px-6 lg:gap-5">
           <Link

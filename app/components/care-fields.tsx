@@ -1,0 +1,107 @@
+import { type ReactNode, useRef } from 'react'
+import { arises, type FieldMeta } from '#app/care/field.ts'
+import type { Gauge } from '#app/care/kind.ts'
+import { type Answers, useAnswers } from './answers.ts'
+import { CareControl } from './care-controls.tsx'
+import type { DrawnField } from './conform-fields.ts'
+import { useHydrated } from './hydrated.ts'
+
+export interface CareFieldsProps {
+  readonly fields: readonly DrawnField[]
+  readonly gauges?: readonly Gauge[]
+  /** Names that the record offers for the controls `task` and `setting`. */
+  readonly lists?: Readonly<Partial<Record<'task' | 'setting', Readonly<Record<string, string>>>>>
+  /** Units by the answer that decides them, where the answer is not the unit itself. */
+  readonly units?: Readonly<Record<string, string>>
+}
+
+/**
+ * The form of any kind of care, from its fields alone. Without scripts every question is there; with them, a question that does
+ * not arise is hidden and not submitted.
+ */
+export function CareFields({ fields, gauges = [], lists = {}, units = {} }: CareFieldsProps) {
+  const root = useRef<HTMLDivElement>(null)
+  const answers = useAnswers(fields, root)
+  const context = { all: fields, answers, gauges, lists, units }
+  const shown = fields.filter(field => !field.meta.more)
+  const more = fields.filter(field => field.meta.more)
+  const isNeeded = more.some(field => field.errors?.length || field.answers.length > 0)
+  return (
+    <div ref={root} className="grid gap-5">
+      {shown.map(field => (
+        <Question key={field.formKey ?? field.name} field={field} {...context} />
+      ))}
+      {more.length > 0 && (
+        <details open={isNeeded} className="border-t border-line pt-2">
+          <summary className="inline-flex min-h-11 items-center font-semibold text-brand underline underline-offset-3">
+            More details
+          </summary>
+          <div className="mt-3 grid gap-5">
+            {more.map(field => (
+              <Question key={field.formKey ?? field.name} field={field} {...context} />
+            ))}
+          </div>
+        </details>
+      )}
+    </div>
+  )
+}
+
+interface QuestionProps extends Required<Omit<CareFieldsProps, 'fields'>> {
+  readonly field: DrawnField
+  readonly all: readonly DrawnField[]
+  readonly answers: Answers
+}
+
+function Question({ field, all, answers, gauges, lists, units }: QuestionProps) {
+  const { name, meta, required, id, fullName, errors } = field
+  const hydrated = useHydrated()
+  const isAsked = arises(meta, answers)
+  const unit = unitOf(meta, answers, units)
+  const drawing = {
+    field: {
+      id,
+      name: fullName,
+      label: meta.label,
+      hint: meta.hint,
+      errors,
+      required: required || (meta.neededThen ?? false),
+      disabled: hydrated && !isAsked,
+    },
+    answers: field.answers,
+    unit,
+    band: gauges.find(gauge => gauge.field === name),
+    list: (meta.control === 'task' || meta.control === 'setting' ? lists[meta.control] : undefined) ?? {},
+  }
+  return (
+    <div
+      className={`grid gap-3 not-first:border-t not-first:border-hair not-first:pt-5 ${isAsked ? '' : 'scripted:hidden'}`}
+    >
+      {meta.section && <h2 className="text-lg">{meta.section}</h2>}
+      {meta.when && <OnlyIf when={meta.when} all={all} />}
+      <CareControl meta={meta} drawing={drawing} />
+    </div>
+  )
+}
+
+interface OnlyIfProps {
+  readonly when: NonNullable<FieldMeta['when']>
+  readonly all: readonly DrawnField[]
+}
+
+/** Where nothing hides the question, its condition is said in words. */
+function OnlyIf({ when, all }: OnlyIfProps): ReactNode {
+  const other = all.find(field => field.name === when.field)?.meta
+  if (!other) return null
+  const names = when.is.map(value => ('options' in other ? (other.options[value] ?? value) : value))
+  return (
+    <p className="hidden text-sm text-ink2 unscripted:block">{`Only if "${other.label}" is: ${names.join(', ')}.`}</p>
+  )
+}
+
+/** The unit beside a number: its own, or what another field says. */
+function unitOf(meta: FieldMeta, answers: Answers, units: Readonly<Record<string, string>>): string {
+  if (meta.control !== 'quantity') return ''
+  const answer = meta.unitField === undefined ? undefined : answers[meta.unitField]?.[0]
+  return meta.unit ?? (answer === undefined ? '' : (units[answer] ?? answer))
+}
