@@ -1,5 +1,6 @@
 import type { ReactNode } from 'react'
 import { Links, Meta, Outlet, Scripts, ScrollRestoration, useRouteLoaderData } from 'react-router'
+import { loadUser, sameOriginOnly } from '#app/auth/signed-in.server.ts'
 import { ErrorPage } from '#app/components/error-page.tsx'
 import { type Theme, themeOf } from '#app/components/theme.ts'
 import type { Route } from './+types/root.ts'
@@ -7,6 +8,8 @@ import '#app/zod.ts'
 import '../tailwind.css'
 
 const colorScheme: Readonly<Record<Theme, string>> = { system: 'light dark', day: 'light', night: 'dark' }
+
+export const middleware: Route.MiddlewareFunction[] = [sameOriginOnly, loadUser]
 
 export const links: Route.LinksFunction = () => [{ rel: 'icon', href: '/favicon.svg', type: 'image/svg+xml' }]
 
@@ -24,7 +27,7 @@ export function Layout({ children }: { readonly children: ReactNode }) {
     <html lang="en" data-theme={theme}>
       <head>
         <meta charSet="utf-8" />
-        <meta name="viewport" content="width=device-width, initial-scale=1" />
+        <meta name="viewport" content="width=device-width, initial-scale=1, interactive-widget=resizes-content" />
         <meta name="color-scheme" content={colorScheme[theme]} />
         <meta name="robots" content="noindex, nofollow" />
         <Meta />

@@ -2,6 +2,7 @@ import { type AnyCareKind, type CareContext, type Entry, type PatientRecord, wor
 import { careKinds } from '../care/kinds.ts'
 import { type Lane, lanes } from '../care/lanes.ts'
 import { dwellNotice, dwellStrongNotice } from '../care/tube-change/settings.ts'
+import { byDate } from '../care/tube-change/tasks.ts'
 import { dwellLimit, insertedOn, type TubeEntry, tubeInPlace, tubeWords } from '../care/tube-change/tube.ts'
 import type { WarningLevel } from '../care/warning.ts'
 import { type DwellStage, daysLeft, dwellDay, dwellStage } from '../clinical/dwell.ts'
@@ -48,6 +49,8 @@ export interface TubeView {
   readonly limit: number
   readonly daysLeft: number
   readonly stage: DwellStage
+  /** The task that its limit makes due. */
+  readonly task: string
 }
 
 /** One patient's care on a board or a round. */
@@ -125,7 +128,14 @@ function tubeView(tube: TubeEntry, context: CareContext): TubeView {
   const left = daysLeft(on, days, today)
   const { values } = context
   const stage = dwellStage(left, { noticeDays: values.of(dwellNotice), strongDays: values.of(dwellStrongNotice) })
-  return { words: tubeWords(tube.data), day: dwellDay(on, today), limit: days, daysLeft: left, stage }
+  return {
+    words: tubeWords(tube.data),
+    day: dwellDay(on, today),
+    limit: days,
+    daysLeft: left,
+    stage,
+    task: byDate.name,
+  }
 }
 
 /** What was charted since `from`, oldest first, as marks on a strip. */

@@ -1,5 +1,5 @@
 import type { CareContext } from '../care/kind.ts'
-import type { AnySetting, PersonalValue, SettingValue, Standing } from '../care/policy.ts'
+import type { AnySetting, PersonalValue, Policy, SettingValue, Standing } from '../care/policy.ts'
 import { showDateTime, showDay } from '../time/display.ts'
 import type { DueTask } from './due-tasks.ts'
 
@@ -34,13 +34,13 @@ export function whyDue(task: DueTask, context: CareContext): WhyDue {
     ...(task.deferral
       ? { deferral: `Deferred to ${showDateTime(task.deferral.until, zone)} by ${task.deferral.entry.recordedByName}.` }
       : {}),
-    policy: policyWords(context),
+    policy: policyWords(context.values.policy),
     values: task.rule.settings.map(setting => whyValue(setting, context)),
   }
 }
 
 /** Which policy is in force, who reviewed it and when. */
-export function policyWords({ values: { policy } }: Pick<CareContext, 'values'>): string {
+export function policyWords(policy: Policy): string {
   return `${policy.name}, version ${policy.version}, reviewed by ${policy.reviewedBy} on ${showDay(policy.reviewedOn)}.`
 }
 

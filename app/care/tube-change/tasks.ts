@@ -22,7 +22,8 @@ export function withoutTube(context: CareContext): Clock {
   return since ? suspended(`tube out for good since ${showDate(since, context.ward.zone)}`) : noClock
 }
 
-const byDate: TaskRule = {
+/** The next change of the tube, by the date that its limit sets. */
+export const byDate: TaskRule = {
   name: 'tube-change',
   airway: true,
   settings: [dwellDual, dwellSingle, dwellNotice],

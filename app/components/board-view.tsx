@@ -1,0 +1,147 @@
+import { lanes } from '#app/care/lanes.ts'
+import { type Board, type BoardOrder, boardCounts, type LivePatient, livePatients } from '#app/rules/board.ts'
+import { inLanes } from '#app/rules/views.ts'
+import { standingWords } from '#app/rules/words.ts'
+import { showTime } from '#app/time/display.ts'
+import type { Zone } from '#app/time/zone.ts'
+import { BoardHead, type BoardPatient, BoardRow } from './board-row.tsx'
+import { chartHref } from './chart-href.ts'
+import { Empty } from './empty.tsx'
+import { HourStrip } from './hour-strip.tsx'
+import type { StripLane } from './strip-lanes.ts'
+import { StripPatterns } from './strip-patterns.tsx'
+import { SummaryCounts } from './summary-counts.tsx'
+
+const HOUR_MS = 3_600_000
+const BACK_MS = 8 * HOUR_MS
+const AHEAD_MS = 6 * HOUR_MS
+/** Of the strip on a desk 1440 px wide. */
+const STRIP_PX = 530
+
+interface BoardViewProps {
+  readonly board: Board
+  /** The server's clock (ms). */
+  readonly now: number
+  readonly order: BoardOrder
+  /** The person may chart on this ward, so that due care leads to its form. */
+  readonly charts: boolean
+}
+
+/** The ward's patients with their strips and what is due next; drawn anew as `now` moves on. */
+export function BoardView({ board, now, order, charts }: BoardViewProps) {
+  const patients = livePatients(board, now, order)
+  const zone = board.zone
+  const span = {
+    from: new Date(now - BACK_MS),
+    to: new Date(now + AHEAD_MS),
+    now: new Date(now),
+    zone,
+    width: STRIP_PX,
+  }
+  return (
+    <>
+      <BoardSummary patients={patients} shiftEndsAt={board.shiftEndsAt} zone={zone} />
+      <StripPatterns />
+      <div className="rounded-card border border-line bg-surface">
+        <BoardHead>
+          <HourStrip {...span} lanes={[]} axis title="Hours" />
+        </BoardHead>
+        {patients.length === 0 && <Empty title="No patients on this ward" />}
+        <ul aria-label="Patients">
+          {patients.map(patient => (
+            <BoardRow key={patient.patientId} patient={rowOf(patient, { now, zone, charts })}>
+              <HourStrip {...span} lanes={stripLanes(patient, now, zone)} axis={false} title={`Bed ${patient.bed}`} />
+            </BoardRow>
+          ))}
+        </ul>
+      </div>
+      <Legend />
+    </>
+  )
+}
+
+interface BoardSummaryProps {
+  readonly patients: readonly LivePatient[]
+  readonly shiftEndsAt: number
+  readonly zone: Zone
+}
+
+function BoardSummary({ patients, shiftEndsAt, zone }: BoardSummaryProps) {
+  const counts = boardCounts(patients, shiftEndsAt)
+  return (
+    <SummaryCounts
+      counts={[
+        { count: counts.overdue, words: 'overdue', tone: 'late' },
+        { count: counts.due, words: 'due now', tone: 'due' },
+        { count: counts.thisShift, words: `due by ${showTime(new Date(shiftEndsAt), zone)}` },
+        {
+          count: counts.tubesNearLimit,
+          words: counts.tubesNearLimit === 1 ? 'tube near its limit' : 'tubes near their limit',
+        },
+        { count: counts.warned, words: counts.warned === 1 ? 'patient with a warning' : 'patients with a warning' },
+      ]}
+    />
+  )
+}
+
+interface Seen {
+  readonly now: number
+  readonly zone: Zone
+  readonly charts: boolean
+}
+
+function rowOf(patient: LivePatient, { now, zone, charts }: Seen): BoardPatient {
+  const { patientId, bed, familyName, givenName, age, recordNumber, care, tasks, worst } = patient
+  const tubeTask = tasks.find(task => task.byDay !== undefined && task.name === care.tube?.task)
+  return {
+    href: `/patients/${patientId}`,
+    bed,
+    family: familyName,
+    given: givenName,
+    age,
+    recordNo: recordNumber,
+    tube: care.tube
+      ? { says: care.tube.words, day: care.tube.day, limit: care.tube.limit, status: tubeTask?.status ?? 'upcoming' }
+      : null,
+    next: tasks
+      .filter(({ status }) => status !== 'suspended')
+      .map(task => ({
+        name: task.name,
+        title: task.title,
+        status: task.status,
+        says: standingWords(task, now, zone),
+        ...(charts ? { href: chartHref(patientId, task) } : {}),
+      })),
+    worst: worst ?? 'upcoming',
+    warnings: care.warnings.filter(({ level }) => level !== 'blue').length,
+  }
+}
+
+/** The five lanes of a patient with what was done and what is due, in words for those who hear it. */
+function stripLanes(patient: LivePatient, now: number, zone: Zone): readonly StripLane[] {
+  const byName = new Map(patient.tasks.map(task => [task.name, task]))
+  return inLanes(patient.care).map(({ name, marks, tasks }) => ({
+    name,
+    marks: marks.map(({ at, shape }) => ({
+      at: new Date(at),
+      shape,
+      says: `${shape} ${showTime(new Date(at), zone)}`,
+    })),
+    windows: tasks.flatMap(task => {
+      const live = byName.get(task.name)
+      if (!live?.window || live.byDay) return []
+      const { opensAt, closesAt } = live.window
+      const says = `${live.title} ${standingWords(live, now, zone)}`
+      return [{ opensAt: new Date(opensAt), closesAt: new Date(closesAt), status: live.status, says }]
+    }),
+  }))
+}
+
+function Legend() {
+  return (
+    <p className="px-1 py-3 text-sm text-ink2 print:hidden">
+      Lanes, top to bottom: {lanes.map(lane => lane.toLowerCase()).join(', ')}. Dot: done. Outline: next window. Filled:
+      due now. Hatched: overdue, and it grows until it is charted. Triangle: out of range. Note: deferred.
+    </p>
+  )
+}

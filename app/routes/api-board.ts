@@ -1,0 +1,25 @@
+import { data } from 'react-router'
+import { can } from '#app/auth/permissions.ts'
+import { ownSession, signedIn } from '#app/auth/signed-in.server.ts'
+import { boardTag, wardBoard } from '#app/views/ward-board.server.ts'
+import type { Route } from './+types/api-board.ts'
+
+/**
+ * The board as data, for a page that keeps itself up to date. Whether anything changed is answered from the session's
+ * own query, which brings the ward's counter: an unchanged board costs no second one.
+ */
+export async function loader({ params: { wardId }, context, request }: Route.LoaderArgs) {
+  const user = signedIn(context)
+  if (!can(user, 'see ward', wardId)) throw data('There is no such ward.', 404)
+  const now = new Date()
+  const rev = ownSession(context).wards.find(ward => ward.id === wardId)?.rev
+  if (rev !== undefined && request.headers.get('if-none-match') === boardTag(wardId, rev, now)) {
+    return new Response(null, { status: 304, headers: { ETag: boardTag(wardId, rev, now) } })
+  }
+  const served = await wardBoard(wardId, now, rev)
+  if (!served) throw data('There is no such ward.', 404)
+  return Response.json(
+    { data: served.data, at: served.at },
+    { headers: { ETag: served.etag, 'Cache-Control': 'no-store' } },
+  )
+}

@@ -1,0 +1,57 @@
+import { Outlet, useLocation } from 'react-router'
+import { type Act, can } from '#app/auth/permissions.ts'
+import { ownSession, signedIn, signedInOnly } from '#app/auth/signed-in.server.ts'
+import { AppPage } from '#app/components/page.tsx'
+import { themeOf } from '#app/components/theme.ts'
+import { env } from '#app/env.server.ts'
+import type { Route } from './+types/signed-in.ts'
+
+export const middleware: Route.MiddlewareFunction[] = [signedInOnly]
+
+interface Section {
+  readonly label: string
+  readonly href: string
+  /** Addresses that belong to the section. */
+  readonly under: string
+}
+
+export function loader({ context, request }: Route.LoaderArgs) {
+  const user = signedIn(context)
+  const ward = ownSession(context).wards[0] ?? null
+  const sectionsOf = (act: Act, sections: readonly Section[]) => (can(user, act) ? sections : [])
+  return {
+    person: { name: user.name, role: user.role },
+    ward: ward && { name: ward.name },
+    now: Date.now(),
+    zone: env.hospitalTimeZone,
+    theme: themeOf(request.headers.get('cookie')),
+    sections: [
+      ...sectionsOf('see ward', [
+        { label: 'My round', href: '/round', under: '/round' },
+        ...(ward ? [{ label: 'Ward board', href: `/wards/${ward.id}/board`, under: '/wards/' }] : []),
+        { label: 'Patients', href: '/patients', under: '/patients' },
+      ]),
+      ...sectionsOf('see policy', [{ label: 'Policy', href: '/policy', under: '/policy' }]),
+      ...sectionsOf('manage people', [{ label: 'People', href: '/admin/people', under: '/admin/people' }]),
+      ...sectionsOf('manage wards', [{ label: 'Wards', href: '/admin/wards', under: '/admin/wards' }]),
+    ],
+  }
+}
+
+/** Everything behind the sign-in: bar, sections, safety line. */
+export default function SignedIn({ loaderData }: Route.ComponentProps) {
+  const { pathname } = useLocation()
+  const { sections, now, person, zone, theme, ward } = loaderData
+  return (
+    <AppPage
+      person={person}
+      {...(ward ? { ward } : {})}
+      now={new Date(now)}
+      zone={zone}
+      theme={theme}
+      sections={sections.map(({ label, href, under }) => ({ label, href, current: pathname.startsWith(under) }))}
+    >
+      <Outlet />
+    </AppPage>
+  )
+}

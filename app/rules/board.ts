@@ -1,0 +1,112 @@
+import { pressOf } from './due-tasks.ts'
+import type { TaskStatus } from './status.ts'
+import { type CareView, liveStatus, type TaskView } from './views.ts'
+
+/** A patient on a board: bed and person beside the care. */
+export interface BoardPatient {
+  readonly patientId: string
+  readonly bed: string
+  readonly familyName: string
+  readonly givenName: string
+  readonly age: number
+  readonly recordNumber: string
+  readonly laryngectomy: boolean
+  readonly care: CareView
+}
+
+/** A whole board as plain data; moments are milliseconds. */
+export interface Board {
+  readonly wardId: string
+  readonly wardName: string
+  readonly zone: string
+  readonly shiftEndsAt: number
+  /** Which policy is in force, in words; null when the ward has none that was reviewed. */
+  readonly policy: string | null
+  readonly patients: readonly BoardPatient[]
+}
+
+export interface LiveTask extends TaskView {
+  readonly status: TaskStatus
+  /** How long it has been overdue (ms), 0 when it is not. */
+  readonly lateBy: number
+}
+
+/** The tasks of one patient as they stand at `now` (ms), most pressing first. */
+export function liveTasks(tasks: readonly TaskView[], now: number): readonly LiveTask[] {
+  return tasks
+    .map(task => ({
+      ...task,
+      status: liveStatus(task, now),
+      lateBy: Math.max(0, now - (task.window?.closesAt ?? now)),
+    }))
+    .toSorted(
+      (a, b) =>
+        pressOf(a.status, a.airway) - pressOf(b.status, b.airway) ||
+        (a.window?.closesAt ?? 0) - (b.window?.closesAt ?? 0) ||
+        a.title.localeCompare(b.title),
+    )
+}
+
+export interface LivePatient extends Omit<BoardPatient, 'care'> {
+  readonly care: CareView
+  readonly tasks: readonly LiveTask[]
+  /** The status of the most pressing task; undefined when nothing is due at all. */
+  readonly worst: TaskStatus | undefined
+}
+
+export type BoardOrder = 'pressing' | 'bed'
+
+/**
+ * Patients in the order of a board: a red warning first, then by the most pressing task, then the longest late;
+ * or by bed.
+ */
+export function livePatients(board: Board, now: number, order: BoardOrder): readonly LivePatient[] {
+  const patients = board.patients.map(patient => {
+    const tasks = liveTasks(patient.care.tasks, now)
+    return { ...patient, tasks, worst: tasks[0]?.status }
+  })
+  return patients.toSorted((a, b) => (order === 'bed' ? 0 : byRisk(a, b)) || byBed(a, b))
+}
+
+function byRisk(a: LivePatient, b: LivePatient): number {
+  return risk(a) - risk(b) || (b.tasks[0]?.lateBy ?? 0) - (a.tasks[0]?.lateBy ?? 0) || firstDue(a) - firstDue(b)
+}
+
+function risk({ care, tasks }: LivePatient): number {
+  if (care.warnings.some(warning => warning.level === 'red')) return -1
+  const first = tasks[0]
+  return first ? pressOf(first.status, first.airway) : 9
+}
+
+const firstDue = ({ tasks }: LivePatient): number => tasks[0]?.window?.closesAt ?? Number.MAX_SAFE_INTEGER
+
+const byBed = (a: LivePatient, b: LivePatient): number => a.bed.localeCompare(b.bed, 'en', { numeric: true })
+
+export interface BoardCounts {
+  readonly overdue: number
+  readonly due: number
+  /** Not due yet, but before the shift ends. */
+  readonly thisShift: number
+  /** Tubes at or past their change-by date, or within the strong notice. */
+  readonly tubesNearLimit: number
+  /** Patients with a red or amber warning. */
+  readonly warned: number
+}
+
+/** The numbers above a board. */
+export function boardCounts(patients: readonly LivePatient[], shiftEndsAt: number): BoardCounts {
+  const tasks = patients.flatMap(patient => patient.tasks)
+  const waiting = tasks.filter(({ status }) => status === 'upcoming' || status === 'due soon' || status === 'deferred')
+  return {
+    overdue: tasks.filter(({ status }) => isLate(status)).length,
+    due: tasks.filter(({ status }) => status === 'due').length,
+    thisShift: waiting.filter(({ window }) => window !== undefined && window.dueAt <= shiftEndsAt).length,
+    tubesNearLimit: patients.filter(({ care }) => care.tube && !['quiet', 'notice'].includes(care.tube.stage)).length,
+    warned: patients.filter(({ care }) => care.warnings.some(({ level }) => level !== 'blue')).length,
+  }
+}
+
+/** Whether a status counts as overdue, seriously or not. */
+export function isLate(status: TaskStatus): boolean {
+  return status === 'overdue' || status === 'seriously overdue'
+}

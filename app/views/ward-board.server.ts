@@ -1,0 +1,83 @@
+import type { WardFacts } from '#app/care/kind.ts'
+import { type Policy, policyInForce } from '#app/care/policy.ts'
+import { env } from '#app/env.server.ts'
+import type { Board, BoardPatient } from '#app/rules/board.ts'
+import { careView } from '#app/rules/views.ts'
+import { policyWords } from '#app/rules/why.ts'
+import { ageOn } from '#app/time/display.ts'
+import { earlier, hours } from '#app/time/duration.ts'
+import { shiftAt } from '#app/time/shift.ts'
+import { localDay } from '#app/time/zone.ts'
+import { policies } from '#database/policies.server.ts'
+import { type StayRecord, wardRecords } from '#database/records.server.ts'
+import { wardRev } from '#database/ward-revs.server.ts'
+import { wardById } from '#database/wards.server.ts'
+import { contextOf } from './care-of.server.ts'
+
+/** A board as it is served: the data, the tag that changes with it, and the server's clock (ms). */
+export interface ServedBoard {
+  readonly data: Board
+  readonly etag: string
+  readonly at: number
+}
+
+/** A strip shows eight hours back; one more, so that it stays full while the page is open. */
+const MARKS_BACK = hours(9)
+/** Shifts, days of a tube and first-day rules move with time alone: after this long a board is computed again. */
+const SLOT_MS = 5 * 60_000
+
+const kept = new Map<string, ServedBoard>()
+const MOST_BOARDS = 200
+
+/** The tag of a ward's board: the ward's counter, and the five minutes that it was computed in. */
+export function boardTag(wardId: string, rev: number, now: Date): string {
+  return `"${wardId.slice(0, 8)}.${rev}.${Math.floor(now.getTime() / SLOT_MS)}"`
+}
+
+/**
+ * The board of a ward, computed once for each state of the ward and five minutes; undefined when there is no such ward.
+ * `rev` is the ward's counter if the caller has just read it. Statuses are the viewer's, from the windows and the clock.
+ */
+export async function wardBoard(wardId: string, now: Date, rev?: number): Promise<ServedBoard | undefined> {
+  const counter = rev ?? (await wardRev(wardId))
+  const etag = boardTag(wardId, counter, now)
+  const known = kept.get(wardId)
+  if (known?.etag === etag) return { ...known, at: now.getTime() }
+  const board = await computedBoard(wardId, now, counter)
+  if (!board) return undefined
+  const served = { data: board, etag, at: now.getTime() }
+  if (kept.size >= MOST_BOARDS) kept.clear()
+  kept.set(wardId, served)
+  return served
+}
+
+async function computedBoard(wardId: string, now: Date, rev: number): Promise<Board | undefined> {
+  const [ward, known, records] = await Promise.all([wardById(wardId), policies(), wardRecords(wardId, rev)])
+  if (!ward) return undefined
+  const facts: WardFacts = { zone: env.hospitalTimeZone, shiftTimes: ward.shiftTimes, pressureUnit: ward.pressureUnit }
+  const policy = policyInForce(known, wardId, now)
+  return {
+    wardId,
+    wardName: ward.name,
+    zone: facts.zone,
+    shiftEndsAt: shiftAt(now, ward.shiftTimes, facts.zone).endsAt.getTime(),
+    policy: policy ? policyWords(policy) : null,
+    patients: records.stays.map(stay => boardPatient(stay, policy, facts, now)),
+  }
+}
+
+const NOTHING = { tasks: [], marks: [], warnings: [] } as const
+
+function boardPatient(record: StayRecord, policy: Policy | undefined, ward: WardFacts, now: Date): BoardPatient {
+  const { patient, stay } = record
+  return {
+    patientId: patient.id,
+    bed: stay.bedLabel,
+    familyName: patient.familyName,
+    givenName: patient.givenName,
+    age: ageOn(patient.bornOn, localDay(now, ward.zone)),
+    recordNumber: patient.recordNumber,
+    laryngectomy: patient.upperAirway === 'not open',
+    care: policy ? careView(contextOf(record, policy, ward, now), earlier(now, MARKS_BACK)) : NOTHING,
+  }
+}
