@@ -44,7 +44,7 @@ export async function launch(way) {
     process.exitCode = await served(way, settings, env, end, held)
   } catch (error) {
     if (!end.aborted) {
-      console.error(`\n${error instanceof Error ? error.message : error}`)
+      console.error(error instanceof Error ? `\n${error.message}` : error)
       process.exitCode = 1
     }
   }
@@ -118,7 +118,7 @@ async function served(way, settings, env, end, held) {
   server.once('error', error => settle(error))
   server.once('exit', code => settle(end.aborted ? 0 : (code ?? 1)))
   server.once('message', () => console.log(`\nCannulary is at ${settings.address}   End it with Ctrl-C.\n`))
-  const watch = held ? setInterval(() => revive(held).catch(settle), 1000) : undefined
+  const watch = held ? setInterval(() => void revive(held).catch(settle), 1000) : undefined
   const stop = () => {
     clearInterval(watch)
     server.kill('SIGTERM')

@@ -27,6 +27,8 @@ function readSecrets(file) {
     return JSON.parse(readFileSync(file, 'utf8'))
   } catch (error) {
     if (error instanceof Error && 'code' in error && error.code === 'ENOENT') return {}
-    throw new Error(`${file} cannot be read (${error instanceof Error ? error.message : error}).`, { cause: error })
+    throw new Error(`${file} cannot be read. It holds the database's passwords: restore it from a backup.`, {
+      cause: error,
+    })
   }
 }
