@@ -3,7 +3,7 @@ import type { FieldMeta } from '#app/care/field.ts'
 import { ChoiceField } from './choice-field.tsx'
 import type { FieldProps } from './field-parts.tsx'
 import { type Band, QuantityField } from './quantity-field.tsx'
-import { NoteField, SelectField, TextField } from './text-field.tsx'
+import { SelectField, TextArea, TextField } from './text-field.tsx'
 
 type Control = FieldMeta['control']
 type MetaOf<C extends Control, M extends FieldMeta = FieldMeta> = M extends FieldMeta
@@ -43,7 +43,7 @@ const controls: { readonly [C in Control]: (meta: MetaOf<C>, drawing: Drawing) =
   text: ({ maxLength }, { field, answers }) => (
     <TextField {...field} maxLength={maxLength} defaultValue={answers[0]} autoComplete="off" />
   ),
-  note: ({ maxLength }, { field, answers }) => <NoteField {...field} maxLength={maxLength} defaultValue={answers[0]} />,
+  note: ({ maxLength }, { field, answers }) => <TextArea {...field} maxLength={maxLength} defaultValue={answers[0]} />,
   date: (_, { field, answers }) => <TextField {...field} type="date" defaultValue={answers[0]} />,
   task: (_, drawing) => <NameField {...drawing} />,
   setting: (_, drawing) => <NameField {...drawing} />,

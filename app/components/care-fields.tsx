@@ -65,7 +65,7 @@ function Question({ field, all, answers, gauges, lists, units }: QuestionProps) 
       label: meta.label,
       hint: meta.hint,
       errors,
-      required: required || (meta.neededThen ?? false),
+      optional: !required && !meta.neededThen,
       disabled: hydrated && !isAsked,
     },
     answers: field.answers,

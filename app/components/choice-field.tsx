@@ -11,7 +11,7 @@ export interface ChoiceFieldProps extends FieldProps {
 
 /** Answers as chips to tap: radio buttons, or check boxes for several. */
 export function ChoiceField({ options, chosen = [], several = false, disabled, ...field }: ChoiceFieldProps) {
-  const { id, name, required = true } = field
+  const { id, name, optional = false } = field
   return (
     <fieldset disabled={disabled} aria-describedby={describedBy(field)} className="group grid min-w-0 gap-1.5">
       <legend className="mb-1.5">
@@ -32,7 +32,7 @@ export function ChoiceField({ options, chosen = [], several = false, disabled, .
             invalid={isInvalid(field)}
           />
         ))}
-        {!required && !several && (
+        {optional && !several && (
           <button
             type="button"
             onClick={unchoose}

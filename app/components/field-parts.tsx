@@ -1,14 +1,16 @@
+import type { ReactNode } from 'react'
+
 /** What every field of a form takes. Ids of hint and error follow from `id`, as conform makes them. */
 export interface FieldProps {
   readonly id: string
   readonly name: string
   readonly label: string
-  readonly hint?: string | undefined
+  readonly hint?: ReactNode
   readonly errors?: readonly string[] | undefined
-  /** False adds "(optional)" to the label. */
-  readonly required?: boolean
+  /** Adds "(optional)" to the label. */
+  readonly optional?: boolean | undefined
   /** Not submitted: its question does not arise. */
-  readonly disabled?: boolean
+  readonly disabled?: boolean | undefined
 }
 
 export const INPUT =
@@ -27,11 +29,11 @@ interface LabelWordsProps {
 }
 
 /** The label's words, for a `label` or a `legend`. */
-export function LabelWords({ field: { label, required = true } }: LabelWordsProps) {
+export function LabelWords({ field: { label, optional = false } }: LabelWordsProps) {
   return (
     <>
       <span className="font-semibold">{label}</span>
-      {!required && <span className="text-sm text-ink2"> (optional)</span>}
+      {optional && <span className="text-sm text-ink2"> (optional)</span>}
     </>
   )
 }

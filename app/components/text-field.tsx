@@ -1,68 +1,84 @@
-import type { InputHTMLAttributes, ReactNode, TextareaHTMLAttributes } from 'react'
+import type { InputHTMLAttributes, SelectHTMLAttributes, TextareaHTMLAttributes } from 'react'
+import { describedBy, type FieldProps, HintAndErrors, INPUT, isInvalid, LabelWords } from './field-parts.tsx'
 
-interface Labelled {
-  readonly id: string
-  readonly label: string
-  readonly hint?: ReactNode
-  readonly errors?: readonly string[] | undefined
-}
-export interface TextFieldProps extends Labelled, Omit<InputHTMLAttributes<HTMLInputElement>, 'id' | 'className'> {}
-export interface TextAreaProps
-  extends Labelled,
-    Omit<TextareaHTMLAttributes<HTMLTextAreaElement>, 'id' | 'className'> {}
+type Own = keyof FieldProps | 'className'
 
-const BOX = 'w-full rounded-control border bg-surface px-3 text-ink aria-invalid:border-late border-edge'
-
-/** One line of text with its label above and what is wrong with it below. */
-export function TextField({ id, label, hint, errors, ...input }: TextFieldProps) {
-  return (
-    <Field id={id} label={label} hint={hint} errors={errors}>
-      <input {...input} {...described(id, hint, errors)} className={`${BOX} min-h-12`} />
-    </Field>
-  )
+export interface TextFieldProps extends FieldProps, Omit<InputHTMLAttributes<HTMLInputElement>, Own> {
+  /** As wide as what is asked for, not as the page. */
+  readonly short?: boolean
 }
 
-/** Several lines of text. */
-export function TextArea({ id, label, hint, errors, rows = 3, ...input }: TextAreaProps) {
+/** One line of text, or a date. */
+export function TextField({ label, hint, errors, optional, short = false, ...input }: TextFieldProps) {
+  const field = { id: input.id, name: input.name, label, hint, errors, optional }
+  const width = short || input.type === 'date' ? 'max-w-48' : 'max-w-xl'
   return (
-    <Field id={id} label={label} hint={hint} errors={errors}>
-      <textarea rows={rows} {...input} {...described(id, hint, errors)} className={`${BOX} py-2`} />
-    </Field>
-  )
-}
-
-function Field({ id, label, hint, errors, children }: Labelled & { readonly children: ReactNode }) {
-  return (
-    <div className="grid gap-1">
-      <label htmlFor={id} className="font-semibold">
-        {label}
+    <div className="grid gap-1.5">
+      <label htmlFor={input.id}>
+        <LabelWords field={field} />
       </label>
-      {hint && (
-        <p id={`${id}-hint`} className="text-ink2">
-          {hint}
-        </p>
-      )}
-      {children}
-      <FieldErrors id={id} errors={errors} />
+      <input
+        {...input}
+        aria-describedby={describedBy(field)}
+        aria-invalid={isInvalid(field)}
+        className={`${INPUT} ${width}`}
+      />
+      <HintAndErrors field={field} />
     </div>
   )
 }
 
-/** What is wrong with a field, under it. */
-export function FieldErrors({ id, errors }: Pick<Labelled, 'id' | 'errors'>) {
-  if (!errors?.length) return null
+export interface TextAreaProps extends FieldProps, Omit<TextareaHTMLAttributes<HTMLTextAreaElement>, Own> {}
+
+/** Free words over several lines; grows with them where the browser can. */
+export function TextArea({ label, hint, errors, optional, rows = 3, ...area }: TextAreaProps) {
+  const field = { id: area.id, name: area.name, label, hint, errors, optional }
   return (
-    <p id={`${id}-error`} className="font-semibold text-late">
-      {errors.join(' ')}
-    </p>
+    <div className="grid gap-1.5">
+      <label htmlFor={area.id}>
+        <LabelWords field={field} />
+      </label>
+      <textarea
+        rows={rows}
+        {...area}
+        aria-describedby={describedBy(field)}
+        aria-invalid={isInvalid(field)}
+        className={`${INPUT} field-sizing-content max-h-96 min-h-24 max-w-3xl`}
+      />
+      <HintAndErrors field={field} />
+    </div>
   )
 }
 
-function described(id: string, hint: ReactNode, errors: readonly string[] | undefined) {
-  const parts = [hint ? `${id}-hint` : '', errors?.length ? `${id}-error` : ''].filter(part => part !== '')
-  return {
-    id,
-    ...(parts.length > 0 ? { 'aria-describedby': parts.join(' ') } : {}),
-    ...(errors?.length ? { 'aria-invalid': true as const } : {}),
-  }
+export interface SelectFieldProps extends FieldProps, Omit<SelectHTMLAttributes<HTMLSelectElement>, Own> {
+  /** Words by value, in order. */
+  readonly options: Readonly<Record<string, string>>
+  /** First line, which chooses nothing. */
+  readonly nothing?: string
+}
+
+/** A long list of names. Up to a dozen answers are chips instead: see ChoiceField. */
+export function SelectField({ label, hint, errors, optional, options, nothing, ...select }: SelectFieldProps) {
+  const field = { id: select.id, name: select.name, label, hint, errors, optional }
+  return (
+    <div className="grid gap-1.5">
+      <label htmlFor={select.id}>
+        <LabelWords field={field} />
+      </label>
+      <select
+        {...select}
+        aria-describedby={describedBy(field)}
+        aria-invalid={isInvalid(field)}
+        className={`${INPUT} max-w-xl`}
+      >
+        {nothing !== undefined && <option value="">{nothing}</option>}
+        {Object.entries(options).map(([value, words]) => (
+          <option key={value} value={value}>
+            {words}
+          </option>
+        ))}
+      </select>
+      <HintAndErrors field={field} />
+    </div>
+  )
 }
