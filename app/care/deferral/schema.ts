@@ -20,7 +20,7 @@ const schema = careFields({
   minutes: choice({ label: 'Delay', hint: 'Counted from the time given above', options: delays }),
   reason: choice({ label: 'Reason', options: deferralReasons }),
   why: text({ label: 'Other reason', when: { field: 'reason', is: ['other'] }, neededThen: true }).optional(),
-  agreedWith: text({ label: 'Agreed with' }),
+  agreedWith: text({ label: 'Person who agreed' }),
 })
 
 export type DeferralData = z.output<typeof schema>

@@ -2,20 +2,23 @@ import type { StomaData } from './schema.ts'
 
 const everywhere: StomaData['sites'] = ['flange left', 'flange right', 'flange top', 'flange bottom', 'back of neck']
 
+/** The most common check: everything looked at, nothing found, nothing changed. */
+export const usualCheck: StomaData = {
+  appearance: ['clean'],
+  exudate: 'none',
+  bleeding: 'none',
+  pain: 0,
+  sites: everywhere,
+  skin: 'intact',
+  dressing: 'left in place',
+  sutures: 'none',
+  ties: 'two',
+  holderChanged: 'no',
+}
+
 /** Checks as they are charted on a ward, from the usual one to those that need action. */
 export const stomaExamples: readonly StomaData[] = [
-  {
-    appearance: ['clean'],
-    exudate: 'none',
-    bleeding: 'none',
-    pain: 0,
-    sites: everywhere,
-    skin: 'intact',
-    dressing: 'left in place',
-    sutures: 'none',
-    ties: 'two',
-    holderChanged: 'no',
-  },
+  usualCheck,
   {
     appearance: ['redness', 'odour'],
     exudate: 'moderate',
