@@ -1,4 +1,4 @@
-import { type ReactNode, useRef } from 'react'
+import { Fragment, type ReactNode, useRef } from 'react'
 import { arises, type FieldMeta } from '#app/care/field.ts'
 import type { Gauge } from '#app/care/kind.ts'
 import { type Answers, useAnswers } from './answers.ts'
@@ -13,23 +13,29 @@ export interface CareFieldsProps {
   readonly lists?: Readonly<Partial<Record<'task' | 'setting', Readonly<Record<string, string>>>>>
   /** Units by the answer that decides them, where the answer is not the unit itself. */
   readonly units?: Readonly<Record<string, string>>
+  /** What the answers ask people to notice: under the large number, or where there is none after the questions. */
+  readonly notices?: ReactNode
 }
 
 /**
  * The form of any kind of care, from its fields alone. Without scripts every question is there; with them, a question that does
  * not arise is hidden and not submitted.
  */
-export function CareFields({ fields, gauges = [], lists = {}, units = {} }: CareFieldsProps) {
+export function CareFields({ fields, gauges = [], lists = {}, units = {}, notices }: CareFieldsProps) {
   const root = useRef<HTMLDivElement>(null)
   const answers = useAnswers(fields, root)
   const context = { all: fields, answers, gauges, lists, units }
   const shown = fields.filter(field => !field.meta.more)
   const more = fields.filter(field => field.meta.more)
+  const noticed = shown.find(({ meta }) => meta.control === 'quantity' && meta.large) ?? shown.at(-1)
   const isNeeded = more.some(field => field.errors?.length || field.answers.length > 0)
   return (
     <div ref={root} className="grid gap-5">
       {shown.map(field => (
-        <Question key={field.formKey ?? field.name} field={field} {...context} />
+        <Fragment key={field.formKey ?? field.name}>
+          <Question field={field} {...context} />
+          {field === noticed && notices}
+        </Fragment>
       ))}
       {more.length > 0 && (
         <details open={isNeeded} className="border-t border-line pt-2">
@@ -47,7 +53,7 @@ export function CareFields({ fields, gauges = [], lists = {}, units = {} }: Care
   )
 }
 
-interface QuestionProps extends Required<Omit<CareFieldsProps, 'fields'>> {
+interface QuestionProps extends Required<Omit<CareFieldsProps, 'fields' | 'notices'>> {
   readonly field: DrawnField
   readonly all: readonly DrawnField[]
   readonly answers: Answers

@@ -4,6 +4,8 @@ import { Button, LinkButton } from './button.tsx'
 export interface FinalBarProps {
   /** The sentence that will be charted, as far as it can be said yet; null before scripts run, or with nothing to say. */
   readonly sentence: string | null
+  /** What is still needed for a sentence, or wrong with it. */
+  readonly missing?: string | undefined
   /** `Chart pressure` */
   readonly words: string
   readonly cancelHref?: string
@@ -14,7 +16,7 @@ export interface FinalBarProps {
 }
 
 /** The foot of a form: what will be charted, and the act itself. Sticks to the foot of the screen, above a keyboard. */
-export function FinalBar({ sentence, words, cancelHref, busy = false, children }: FinalBarProps) {
+export function FinalBar({ sentence, missing, words, cancelHref, busy = false, children }: FinalBarProps) {
   return (
     <div
       data-final-bar
@@ -28,6 +30,7 @@ export function FinalBar({ sentence, words, cancelHref, busy = false, children }
               <b className="font-semibold">{sentence}</b>
             </>
           )}
+          {sentence === null && missing && <span className="text-ink2">{missing}</span>}
         </p>
         <div className="flex flex-1 justify-end gap-3 md:flex-none">
           {cancelHref && (

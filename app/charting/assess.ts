@@ -1,0 +1,110 @@
+import { lateReasonAfter } from '../care/general-settings.ts'
+import type { AnyCareKind, CareContext, FormProblem, KnownNames } from '../care/kind.ts'
+import { hours, since } from '../time/duration.ts'
+import { type ChartSpine, intentOf, ownFields, readChart, readSpine } from './chart-form.ts'
+import { type Calendar, type PerformedAt, performedAt } from './performed-at.ts'
+
+/** A form that may be charted: what the record needs of it. */
+export interface Chartable {
+  readonly id: string
+  readonly performedAt: Date
+  readonly reason: string | undefined
+  readonly witnessId: string | undefined
+  readonly care: Readonly<Record<string, unknown>>
+}
+
+/** Mistakes by the name of their field; '' is the form as a whole. */
+export type FormErrors = Readonly<Record<string, readonly string[]>>
+
+/** A form held against the record. `asks`: the time given came twice, and the form has to say which it was. */
+export type Assessed =
+  | { readonly ok: true; readonly chart: Chartable; readonly context: CareContext | null }
+  | { readonly ok: false; readonly errors: FormErrors; readonly asks: boolean }
+
+/** What a form is held against. */
+export interface Situation {
+  readonly calendar: Calendar
+  readonly known: KnownNames
+  /** Who may stand as the second person. */
+  readonly witnessIds: ReadonlySet<string>
+  /** A correction always needs a reason; an act does when it is written down late. */
+  readonly reason: 'always' | 'when late'
+  /** The record, policy and ward as rules see them when the act was done; null where no policy was reviewed. */
+  contextAt(at: Date): CareContext | null
+}
+
+/** Holds a form against kind, calendar and record. Clinical judgement is never refused: that is for warnings. */
+export function assessed(kind: AnyCareKind, sent: FormData, situation: Situation): Assessed {
+  const { form, unknown } = ownFields(kind, sent)
+  const submission = readChart(kind, form)
+  const spine = readSpine(form)
+  const when = spine && performedAt(spine, situation.calendar)
+  const problems = [...formProblems(sent, unknown), ...(spine ? spineProblems(spine, when, situation) : [])]
+  const context = when?.ok ? situation.contextAt(when.at) : null
+  const errors = {
+    ...(submission.status === 'success' ? {} : messagesOf(submission.error)),
+    ...byField([
+      ...problems,
+      ...(submission.status === 'success' ? kindProblems(kind, submission.value.care, context, situation) : []),
+    ]),
+  }
+  if (submission.status === 'success' && spine && when?.ok && Object.keys(errors).length === 0) {
+    return { ok: true, chart: chartOf(spine, when.at, submission.value.care), context }
+  }
+  return { ok: false, errors, asks: when !== undefined && !when.ok && when.field === 'occurrence' }
+}
+
+function chartOf({ id, reason, witness }: ChartSpine, at: Date, care: Chartable['care']): Chartable {
+  return { id, performedAt: at, reason: reason || undefined, witnessId: witness, care }
+}
+
+function formProblems(sent: FormData, unknown: readonly string[]): readonly FormProblem[] {
+  const names = intentOf(sent) === undefined ? [...unknown, 'intent'] : unknown
+  if (names.length === 0) return []
+  // Names are shown as far as they can be read: they may be anything.
+  const shown = names.slice(0, 3).map(name => name.replace(/[^\p{L}\p{N}._-]/gu, '?').slice(0, 40) || '?')
+  return [{ field: '', message: `The form has fields that do not belong to it: ${shown.join(', ')}. Open it again.` }]
+}
+
+function spineProblems(spine: ChartSpine, when: PerformedAt | undefined, situation: Situation): readonly FormProblem[] {
+  const witness =
+    spine.witness === undefined || situation.witnessIds.has(spine.witness)
+      ? []
+      : [{ field: 'witness', message: 'Choose the second person from the list' }]
+  const reason = when?.ok ? reasonProblems(spine, when.at, situation) : []
+  return [...(when && !when.ok ? [{ field: when.field, message: when.message }] : []), ...reason, ...witness]
+}
+
+function reasonProblems({ reason }: ChartSpine, at: Date, situation: Situation): readonly FormProblem[] {
+  if (reason) return []
+  if (situation.reason === 'always') return [{ field: 'reason', message: 'Enter why the entry is corrected' }]
+  const { now } = situation.calendar
+  const most = situation.contextAt(now)?.values.of(lateReasonAfter) ?? lateReasonAfter.default
+  if (since(at, now) <= hours(most)) return []
+  return [{ field: 'reason', message: `Enter why this is written more than ${most} h late` }]
+}
+
+function kindProblems(
+  kind: AnyCareKind,
+  care: Chartable['care'],
+  context: CareContext | null,
+  { known, calendar }: Situation,
+): readonly FormProblem[] {
+  if (!kind.problems) return []
+  if (context === null) {
+    return [{ field: '', message: 'This ward has no reviewed policy, so plans cannot be held against it.' }]
+  }
+  return kind
+    .problems(care, { ...context, now: calendar.now }, known)
+    .map(({ field, message }) => ({ field: `care.${field}`, message }))
+}
+
+function messagesOf(errors: Readonly<Record<string, string[] | null>> | null): FormErrors {
+  return Object.fromEntries(Object.entries(errors ?? {}).map(([name, messages]) => [name, messages ?? []]))
+}
+
+function byField(problems: readonly FormProblem[]): FormErrors {
+  const fields: Record<string, string[]> = {}
+  for (const { field, message } of problems) fields[field] = [...(fields[field] ?? []), message]
+  return fields
+}
