@@ -1,12 +1,19 @@
-import { layout, type RouteConfig, route } from '@react-router/dev/routes'
+import { index, layout, type RouteConfig, route } from '@react-router/dev/routes'
 
 /** The whole URL map. A route is added here by hand, in the block it belongs to. */
 export default [
   // open to everybody
   route('health', 'routes/health.ts'),
   route('health/ready', 'routes/health-ready.ts'),
+  route('sign-in', 'routes/sign-in.tsx'),
+  route('sign-out', 'routes/sign-out.ts'),
+  route('theme', 'routes/theme.ts'),
+  route('draft', 'routes/draft.ts'),
+  route('still-here', 'routes/still-here.ts'),
 
   layout('routes/signed-in.tsx', [
+    index('routes/home.ts'),
+
     // wards
     route('round', 'routes/round.tsx'),
     route('wards/:wardId/board', 'routes/board.tsx'),
@@ -14,9 +21,17 @@ export default [
     // patients
 
     // people and rules
+    route('account', 'routes/account.tsx'),
+    route('sign-out-everywhere', 'routes/sign-out-everywhere.ts'),
+    route('admin/people', 'routes/admin-people.tsx'),
+    route('admin/people/new', 'routes/admin-person-new.tsx'),
+    route('admin/people/:userId', 'routes/admin-person.tsx'),
+    route('patients/:patientId/access', 'routes/patient-access.tsx'),
+    route('wards/:wardId/access', 'routes/ward-access.tsx'),
     route('policy', 'routes/policy.tsx'),
   ]),
 
   // data for live pages
+  route('api/patients/:patientId/timeline', 'routes/api-timeline.ts'),
   route('api/wards/:wardId/board', 'routes/api-board.ts'),
 ] satisfies RouteConfig

@@ -53,6 +53,8 @@ export async function grantAccess(grant: Grant, by: Trace): Promise<void> {
 export type Opening = {
   id: string
   patientId: string
+  familyName: string
+  givenName: string
   userName: string
   userRole: string
   reason: string
@@ -64,11 +66,12 @@ export type Opening = {
 /** Who from elsewhere opened patients of a ward within the last days, newest first, at most 200. */
 export function openingsOf(wardId: string, days: number): Promise<Opening[]> {
   return select<Opening>(
-    `SELECT g.id, g.patient_id AS patientId, u.name AS userName, u.role AS userRole, g.reason,
+    `SELECT g.id, g.patient_id AS patientId, p.family_name AS familyName, p.given_name AS givenName,
+       u.name AS userName, u.role AS userRole, g.reason,
        g.granted_at AS grantedAt, g.ends_at AS endsAt,
        (SELECT COUNT(*) FROM access_log l WHERE l.actor_id = g.user_id AND l.at BETWEEN g.granted_at AND g.ends_at
           AND l.patient_id = g.patient_id AND l.action = 'opened patient') AS looks
-     FROM access_grants g JOIN users u ON u.id = g.user_id
+     FROM access_grants g JOIN users u ON u.id = g.user_id JOIN patients p ON p.id = g.patient_id
      WHERE g.ward_id = :wardId AND g.granted_at > UTC_TIMESTAMP(3) - INTERVAL :days DAY
      ORDER BY g.granted_at DESC, g.id DESC LIMIT 200`,
     { wardId, days },

@@ -24,13 +24,6 @@ export class SignInRefused extends Error {
 /** Somebody whose password was right. */
 export type Authenticated = Pick<CurrentUser, 'id' | 'role'>
 
-/** An e-mail address as accounts are stored under it. */
-export const emailField = z
-  .string({ error: 'Enter an e-mail address' })
-  .trim()
-  .toLowerCase()
-  .pipe(z.email({ error: 'Enter an e-mail address such as name@hospital.example' }).max(254, 'This is too long'))
-
 const typed = z.object({
   email: z.string().trim().toLowerCase().max(254),
   // Composed characters can shrink under NFKC but hardly grow; far more than that is no password.

@@ -2,8 +2,15 @@ import { createHash, randomBytes } from 'node:crypto'
 import { type Cookie, createCookie } from 'react-router'
 import { logAccess, type Trace } from '#database/access-log.server.ts'
 import { transact } from '#database/sequelize.server.ts'
-import { beginSession, endSession, type KnownSession, knownSession } from '#database/sessions.server.ts'
-import { IDLE_LIMIT_MINUTES, SESSION_LIMIT_HOURS } from './limits.ts'
+import {
+  beginSession,
+  endIdleSession,
+  endSession,
+  endSessionsOf,
+  type KnownSession,
+  knownSession,
+} from '#database/sessions.server.ts'
+import { IDLE_LIMIT_MINUTES, SESSION_LIMIT_HOURS, WARNING_MINUTES } from './limits.ts'
 import type { CurrentUser } from './permissions.ts'
 
 /** A session with its person as the rest of the application knows them. Past a limit (`isOver`) nobody is signed in. */
@@ -64,8 +71,26 @@ export async function signOut(request: Request, by: Trace): Promise<Headers> {
   return signedOutHeaders(request)
 }
 
+/** Ends every session of this person, this one too. Returns the headers that take the cookie away. */
+export async function signOutEverywhere(request: Request, userId: string, by: Trace): Promise<Headers> {
+  await transact(async transaction => {
+    await endSessionsOf(userId, 'signed out everywhere', transaction)
+    await logAccess({ action: 'signed out everywhere', purpose: 'SIGN-IN', by }, transaction)
+  })
+  return signedOutHeaders(request)
+}
+
+/** Ends a session on the word of a page that nobody used; false when another page of it was used meanwhile. */
+export function signOutIdle(sessionHash: string, by: Trace): Promise<boolean> {
+  return transact(async transaction => {
+    const ended = await endIdleSession(sessionHash, IDLE_LIMIT_MINUTES - WARNING_MINUTES, transaction)
+    if (ended) await logAccess({ action: 'left alone', purpose: 'SIGN-IN', by }, transaction)
+    return ended
+  })
+}
+
 /** Takes the cookie away. Storage is left alone: it may hold entries that are still to be sent. */
-export async function signedOutHeaders(request: Request): Promise<Headers> {
+async function signedOutHeaders(request: Request): Promise<Headers> {
   return new Headers({
     'Set-Cookie': await cookieFor(request).serialize('', { maxAge: 0 }),
     'Clear-Site-Data': '"cache"',
