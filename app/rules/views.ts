@@ -1,4 +1,11 @@
-import { type AnyCareKind, type CareContext, type Entry, type PatientRecord, wordsOf } from '../care/kind.ts'
+import {
+  type AnyCareKind,
+  type CareContext,
+  type ChartingAct,
+  type Entry,
+  type PatientRecord,
+  wordsOf,
+} from '../care/kind.ts'
 import { careKinds } from '../care/kinds.ts'
 import { type Lane, lanes } from '../care/lanes.ts'
 import { dwellNotice, dwellStrongNotice } from '../care/tube-change/settings.ts'
@@ -121,7 +128,8 @@ export function liveStatus(task: Pick<TaskView, 'window' | 'deferredUntil'>, now
   )
 }
 
-function tubeView(tube: TubeEntry, context: CareContext): TubeView {
+/** How long a tube has been in, against its limit. */
+export function tubeView(tube: TubeEntry, context: CareContext): TubeView {
   const { days } = dwellLimit(tube, context)
   const on = insertedOn(tube, context)
   const today = localDay(context.now, context.ward.zone)
@@ -171,4 +179,12 @@ export function inLanes(care: Pick<CareView, 'marks' | 'tasks'>) {
 /** `Cuff pressure`: the title of a kind by its stored name, or that name in words. */
 export function kindTitle(slug: string): string {
   return careKinds.find(kind => kind.slug === slug)?.title ?? wordsOf(slug)
+}
+
+/** The kinds that somebody may chart, for links and filters. */
+export function chartableKinds(
+  may: (act: ChartingAct) => boolean,
+  kinds: readonly AnyCareKind[] = careKinds,
+): readonly { readonly slug: string; readonly title: string }[] {
+  return kinds.filter(kind => may(kind.act ?? 'chart care')).map(({ slug, title }) => ({ slug, title }))
 }

@@ -5,14 +5,13 @@ import type { CareContext } from '../kind.ts'
 import type { Values } from '../policy.ts'
 import { tubeInPlace, workingIdMm } from '../tube-change/tube.ts'
 import type { Warning } from '../warning.ts'
+import { catheterRule } from './catheter.ts'
 import { catheterFr, isThroughTube, type SuctionData } from './schema.ts'
 import {
   catheterShare,
   mostPasses,
   passLimit,
   passWarn,
-  stockedSizes,
-  strictShare,
   vacuumLow,
   vacuumUnitDoubt,
   vacuumVeryHigh,
@@ -50,11 +49,7 @@ function catheterTooLarge(data: SuctionData, { record, values }: CareContext): r
   const tube = tubeInPlace(record)?.data
   if (fr === undefined || !tube) return []
   const idMm = workingIdMm(tube)
-  const rule = {
-    stockedFr: values.of(stockedSizes),
-    ratio: values.of(catheterShare) / 100,
-    strict: values.of(strictShare),
-  }
+  const rule = catheterRule(values)
   if (!isTooLarge(fr, idMm, rule)) return []
   const largest = largestCatheter(idMm, rule)
   return [

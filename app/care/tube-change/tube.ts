@@ -1,4 +1,5 @@
 import { changeByDay } from '../../clinical/dwell.ts'
+import type { Tract } from '../../clinical/tract.ts'
 import { daysBetween, type LocalDay, localDay } from '../../time/zone.ts'
 import { decannulations } from '../decannulation/schema.ts'
 import type { CareContext, Entry, PatientRecord } from '../kind.ts'
@@ -81,4 +82,19 @@ export function stomaMadeOn(context: CareContext): string | undefined {
     data => data.stomaMadeOn !== undefined || data.reason === 'first insertion',
   )
   return opening && (opening.data.stomaMadeOn ?? localDay(opening.performedAt, context.ward.zone))
+}
+
+/** What is known of the tract, for its state; undefined when the record does not know when the opening was made. */
+export function tubeTract(context: CareContext): Tract | undefined {
+  const madeOn = stomaMadeOn(context)
+  if (madeOn === undefined) return undefined
+  const { record, ward, now } = context
+  const changes = record
+    .of(tubeChanges)
+    .filter(({ data }) => data.reason !== 'first insertion' && data.reason !== 'on arrival')
+    .map(({ data, performedAt }) => ({
+      on: localDay(performedAt, ward.zone),
+      uncomplicated: data.difficulty === 'easy' || data.difficulty === 'some',
+    }))
+  return { madeOn, changes, laryngectomy: record.patient.upperAirway === 'not open', today: localDay(now, ward.zone) }
 }

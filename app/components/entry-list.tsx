@@ -1,0 +1,47 @@
+import type { ReactNode } from 'react'
+import { showDay } from '#app/time/display.ts'
+import { Empty } from './empty.tsx'
+import { TimelineEntry, type TimelineEntryView } from './timeline-entry.tsx'
+
+export interface EntryListItem extends Omit<TimelineEntryView, 'href' | 'late' | 'statusSays'> {
+  /** Local day on which it was done. */
+  readonly day: string
+  readonly late: string | null
+  readonly statusSays: string | null
+}
+
+interface EntryListProps {
+  readonly entries: readonly EntryListItem[]
+  /** Local day, to say "today". */
+  readonly today: string
+  /** Shown when there is nothing. */
+  readonly children?: ReactNode
+}
+
+/** What was charted, latest first, under a heading for each day. */
+export function EntryList({ entries, today, children }: EntryListProps) {
+  if (entries.length === 0) return <Empty title="Nothing charted">{children}</Empty>
+  const days = [...new Set(entries.map(({ day }) => day))]
+  return days.map(day => (
+    <section key={day} aria-label={day === today ? 'Today' : showDay(day)}>
+      <h3 className="border-t border-hair bg-sunk px-4 py-1.5 text-sm font-semibold">
+        {day === today ? `Today, ${showDay(day)}` : showDay(day)}
+      </h3>
+      <ul>
+        {entries
+          .filter(entry => entry.day === day)
+          .map(({ late, statusSays, ...entry }) => (
+            <TimelineEntry
+              key={entry.id}
+              entry={{
+                ...entry,
+                href: `/entries/${entry.id}`,
+                late: late ?? undefined,
+                statusSays: statusSays ?? undefined,
+              }}
+            />
+          ))}
+      </ul>
+    </section>
+  ))
+}

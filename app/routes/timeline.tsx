@@ -1,0 +1,116 @@
+import { Link } from 'react-router'
+import { patientContext } from '#app/auth/patient-access.server.ts'
+import { can, canByGrant } from '#app/auth/permissions.ts'
+import { signedIn } from '#app/auth/signed-in.server.ts'
+import { LinkButton } from '#app/components/button.tsx'
+import { Card } from '#app/components/card.tsx'
+import { CareDue } from '#app/components/care-due.tsx'
+import { CareStrip, SpanChoice } from '#app/components/care-strip.tsx'
+import { EntryList } from '#app/components/entry-list.tsx'
+import { KindFilter } from '#app/components/kind-filter.tsx'
+import { useLive } from '#app/components/live.ts'
+import { Pager } from '#app/components/pager.tsx'
+import { Stale } from '#app/components/stale.tsx'
+import { TubeCard } from '#app/components/tube-card.tsx'
+import { Warnings } from '#app/components/warnings.tsx'
+import { liveTasks } from '#app/rules/board.ts'
+import { chartableKinds } from '#app/rules/views.ts'
+import { localDay } from '#app/time/zone.ts'
+import { chartedNow } from '#app/views/charted-now.server.ts'
+import { patientCare } from '#app/views/patient-context.server.ts'
+import { patientTimeline, spans, timelineQuery } from '#app/views/patient-timeline.server.ts'
+import type { Route } from './+types/timeline.ts'
+
+export async function loader({ context, url }: Route.LoaderArgs) {
+  const user = signedIn(context)
+  const opened = context.get(patientContext)
+  const now = new Date()
+  const patient = await patientCare(opened.stayId, now)
+  const may = opened.via === 'ward' ? can(user, 'chart care', opened.wardId) : canByGrant(user, 'chart care')
+  const { span, kind } = timelineQuery(url)
+  return {
+    served: await patientTimeline(patient, url, now),
+    charted: await chartedNow(patient, url.searchParams.get('charted')),
+    span,
+    spanHours: spans[span],
+    spanNames: Object.keys(spans),
+    kind: kind ?? null,
+    charts: may && patient.record.stay.dischargedAt === null,
+    kinds: chartableKinds(act => can(user, act, opened.wardId) || canByGrant(user, act)),
+    search: url.search,
+  }
+}
+
+/** One patient: the tube, what is due, the hours, and everything that was charted. */
+export default function Timeline({ loaderData }: Route.ComponentProps) {
+  const { served, charted, span, spanHours, spanNames, kind, charts, kinds, search } = loaderData
+  const { patientId } = served.data
+  const live = useLive(`/api/patients/${patientId}/timeline${search}`, served)
+  const { data: shown, now } = live
+  const { care, tube, zone } = shown
+  const withParam = (name: string, value: string) => linkWith(search, name, value)
+  const tubeTask = liveTasks(care.tasks, now).find(task => task.name === care.tube?.task)
+  return (
+    <div className="grid grid-cols-[minmax(0,1fr)] gap-5 px-4 py-5 md:px-6 lg:grid-cols-[21rem_minmax(0,1fr)]">
+      <div className="grid content-start gap-4 lg:order-last">
+        <Stale since={live.staleSince === null ? null : new Date(live.staleSince)} zone={zone} />
+        {charted && <Warnings title={charted.says} warnings={charted.warnings} />}
+        <Warnings warnings={care.warnings} />
+        <CareDue
+          {...{ patientId, now, zone, charts }}
+          tasks={care.tasks}
+          why={shown.why}
+          nothingDue={shown.nothingDue}
+        />
+        {charts && <ChartOther patientId={patientId} kinds={kinds} />}
+        <Card
+          title={`Last ${spanHours.back} hours, next ${spanHours.ahead}`}
+          aside={<SpanChoice names={spanNames} current={span} href={name => withParam('span', name)} />}
+        >
+          <CareStrip care={care} now={now} zone={zone} span={spanHours} />
+        </Card>
+        <Card title="Charted" flush id="charted" aside={<KindFilter kinds={kinds} current={kind} href={withParam} />}>
+          <EntryList entries={shown.entries} today={localDay(new Date(now), zone)} />
+          <Pager label="Charted" {...(shown.next ? { older: withParam('before', shown.next) } : {})} />
+        </Card>
+      </div>
+      <aside className="grid content-start gap-4">
+        <TubeCard tube={tube} status={tubeTask?.status ?? 'upcoming'} />
+      </aside>
+    </div>
+  )
+}
+
+/** The address of this page with one thing changed; an empty value takes it out. A new filter starts at the newest entry. */
+function linkWith(search: string, name: string, value: string): string {
+  const params = new URLSearchParams(search)
+  params.delete('charted')
+  if (name === 'kind') params.delete('before')
+  if (value === '') params.delete(name)
+  else params.set(name, value)
+  return `?${params}`
+}
+
+interface ChartOtherProps {
+  readonly patientId: string
+  readonly kinds: readonly { readonly slug: string; readonly title: string }[]
+}
+
+function ChartOther({ patientId, kinds }: ChartOtherProps) {
+  return (
+    <Card title="Chart something else">
+      <ul className="flex flex-wrap gap-2">
+        {kinds.map(({ slug, title }) => (
+          <li key={slug}>
+            <LinkButton href={`/patients/${patientId}/chart/${slug}`}>{title}</LinkButton>
+          </li>
+        ))}
+      </ul>
+      <p className="mt-3">
+        <Link to={`/patients/${patientId}/stay`} className="inline-flex min-h-11 items-center font-semibold underline">
+          Bed, details, discharge
+        </Link>
+      </p>
+    </Card>
+  )
+}

@@ -1,0 +1,152 @@
+import { v7 as uuidv7 } from 'uuid'
+import { takeDraft } from '#app/auth/draft.server.ts'
+import type { CurrentUser } from '#app/auth/permissions.ts'
+import { lateReasonAfter } from '#app/care/general-settings.ts'
+import type { AnyCareKind, CareContext, Gauge } from '#app/care/kind.ts'
+import type { FormSigner, WarningView } from '#app/charting/chart-answer.ts'
+import { type Typed, typedFrom } from '#app/charting/chart-form.ts'
+import { restored } from '#app/charting/drafts.ts'
+import type { Calendar } from '#app/charting/performed-at.ts'
+import { liveTasks } from '#app/rules/board.ts'
+import { dueTasks } from '#app/rules/due-tasks.ts'
+import type { TaskStatus } from '#app/rules/status.ts'
+import { taskView } from '#app/rules/views.ts'
+import { standingWarnings } from '#app/rules/warnings.ts'
+import { standingWords } from '#app/rules/words.ts'
+import { showDuration } from '#app/time/display.ts'
+import { hours, since } from '#app/time/duration.ts'
+import { daysBetween, localDay } from '#app/time/zone.ts'
+import { fieldsWith, personalSettings, witnessesFor } from './chart-lists.server.ts'
+import type { PatientCare } from './patient-context.server.ts'
+
+/** A chart form as it opens. */
+export interface ChartFormView {
+  readonly kind: string
+  /** Minted here: the same form sent twice is one act. */
+  readonly id: string
+  readonly signer: FormSigner
+  readonly calendar: Calendar
+  readonly typed: Typed
+  /** The usual act in words, with its answers. */
+  readonly usual: { readonly words: string; readonly answers: Typed } | null
+  readonly gauges: readonly Gauge[]
+  readonly lists: Readonly<Record<'task' | 'setting', Readonly<Record<string, string>>>>
+  readonly units: Readonly<Record<string, string>>
+  readonly witnesses: Readonly<Record<string, string>>
+  readonly warnings: readonly WarningView[]
+  /** Who charted the same just now. */
+  readonly recently: string | null
+  /** How the care stands: `36 min late`. */
+  readonly due: { readonly says: string; readonly status: TaskStatus } | null
+  readonly isRestored: boolean
+  readonly reasonAfterHours: number
+  readonly daysBack: number
+}
+
+/** For whom a form opens, on which patient, at which address. */
+export interface Opening {
+  readonly care: PatientCare
+  readonly user: CurrentUser
+  readonly url: URL
+  readonly now: Date
+}
+
+const MOST_DAYS_BACK = 60
+
+/** Everything the form of a kind opens with. Hands out the draft that waited for this person on this page. */
+export async function chartForm(kind: AnyCareKind, opening: Opening): Promise<ChartFormView> {
+  const { care, user, url, now } = opening
+  const { context } = care
+  const draft = await takeDraft(user.id, url.pathname)
+  const usual = context && (kind.usual?.(context) ?? null)
+  const usualTyped = usual && { words: usual.words, answers: typedFrom(usual.answers) }
+  const opened = {
+    ...openingAnswers(kind, context, url),
+    ...(url.searchParams.get('usual') ? usualTyped?.answers : {}),
+  }
+  return {
+    ...frameOf(kind, opening),
+    id: uuidv7(),
+    typed: draft ? restored(kind, draft, care.ward.zone) : opened,
+    isRestored: draft !== null,
+    usual: usualTyped,
+    witnesses: await witnessesFor(care.ward.id, user),
+    warnings: context ? warningsFor(kind, context) : [],
+    recently: context && recentlyWords(kind, context, user),
+    due: context && dueWords(kind, context, url, now),
+  }
+}
+
+/** What every form of a kind is drawn with, whatever it opens with. */
+export function frameOf(kind: AnyCareKind, { care, user, now }: Omit<Opening, 'url'>) {
+  const { context, ward } = care
+  const { label, units } = personalSettings(context)
+  const began = localDay(care.record.stay.admittedAt, ward.zone)
+  return {
+    kind: kind.slug,
+    signer: signerOf(user),
+    calendar: calendarOf(care, now),
+    gauges: context ? (kind.gauges?.(context) ?? []) : [],
+    lists: { task: context ? deferrable(context) : {}, setting: label },
+    units,
+    reasonAfterHours: context?.values.of(lateReasonAfter) ?? lateReasonAfter.default,
+    daysBack: Math.min(MOST_DAYS_BACK, Math.max(1, daysBetween(began, localDay(now, ward.zone)))),
+  }
+}
+
+/** Who signs, as a form carries it. */
+export function signerOf({ id, name, role }: CurrentUser): FormSigner {
+  return { id, name, role }
+}
+
+/** What the answer to "when" is held against. */
+export function calendarOf({ record: { stay }, ward }: PatientCare, now: Date): Calendar {
+  return { zone: ward.zone, now, beganAt: stay.admittedAt, endedAt: stay.dischargedAt }
+}
+
+/** Facts of the record, then what the task that was followed here already says. */
+function openingAnswers(kind: AnyCareKind, context: CareContext | null, url: URL): Typed {
+  const name = url.searchParams.get('task') ?? ''
+  const rule = kind.tasks?.find(task => task.name === name)
+  const named = context && Object.hasOwn(deferrable(context), name) ? fieldsWith(kind, 'task') : []
+  return {
+    ...(context ? typedFrom(kind.startsWith?.(context) ?? {}) : {}),
+    ...typedFrom(rule?.opensWith ?? {}),
+    ...Object.fromEntries(named.map(field => [`care.${field}`, [name]])),
+  }
+}
+
+/** Care that is due for this patient, now or later, by name. */
+function deferrable(context: CareContext): Readonly<Record<string, string>> {
+  const running = dueTasks(context).filter(task => task.status !== 'suspended')
+  return Object.fromEntries(running.map(({ rule, title }) => [rule.name, title]))
+}
+
+/** What stands about this kind of care, and whatever is red. */
+function warningsFor(kind: AnyCareKind, context: CareContext): readonly WarningView[] {
+  const own = new Set(kind.standing?.(context).map(({ name }) => name))
+  return standingWarnings(context)
+    .filter(({ level, name }) => level === 'red' || own.has(name))
+    .map(shownWarning)
+}
+
+/** A warning without its source, which the policy page has. */
+export function shownWarning({ name, level, action, cause }: WarningView): WarningView {
+  return { name, level, action, cause }
+}
+
+const RECENT = hours(0.5)
+
+function recentlyWords(kind: AnyCareKind, { record, now }: CareContext, user: CurrentUser): string | null {
+  const last = record.of(kind)[0]
+  if (!last || since(last.performedAt, now) > RECENT) return null
+  const who = last.recordedById === user.id ? 'You' : last.recordedByName
+  return `${who} charted this ${showDuration(since(last.performedAt, now))} ago: ${kind.summary(last.data)}`
+}
+
+function dueWords(kind: AnyCareKind, context: CareContext, url: URL, now: Date) {
+  const asked = url.searchParams.get('task')
+  const tasks = liveTasks(dueTasks(context).map(taskView), now.getTime()).filter(task => task.kind === kind.slug)
+  const task = tasks.find(({ name }) => name === asked) ?? tasks[0]
+  return task ? { says: standingWords(task, now.getTime(), context.ward.zone), status: task.status } : null
+}

@@ -1,0 +1,38 @@
+import { type CurrentUser, can } from '#app/auth/permissions.ts'
+import { type FieldMeta, fieldsOf } from '#app/care/field.ts'
+import type { AnyCareKind, CareContext } from '#app/care/kind.ts'
+import { careSettings } from '#app/care/kinds.ts'
+import { showValue } from '#app/rules/why.ts'
+import { people } from '#database/users.server.ts'
+
+/** Names of the fields of a kind that are drawn with this control. */
+export function fieldsWith(kind: AnyCareKind, control: FieldMeta['control']): readonly string[] {
+  return fieldsOf(kind.schema).flatMap(({ name, meta }) => (meta.control === control ? [name] : []))
+}
+
+/** Settings that a care plan may set for one patient: with unit, range and the value in force; and their units. */
+export function personalSettings(context: CareContext | null) {
+  const personal = careSettings.filter(setting => setting.personal)
+  return {
+    label: Object.fromEntries(
+      personal.map(setting => {
+        const { name, label, unit, min, max } = setting
+        const now = context ? `, now ${showValue(context.values.shown(setting), unit)}` : ''
+        return [name, `${label}: ${min} to ${max} ${unit}${now}`]
+      }),
+    ),
+    units: Object.fromEntries(personal.map(({ name, unit }) => [name, unit])),
+  }
+}
+
+/** Who may stand as the second person of an act: those who chart on this ward, but for the one who signs. */
+export async function witnessesFor(
+  wardId: string,
+  user: Pick<CurrentUser, 'id'>,
+): Promise<Readonly<Record<string, string>>> {
+  const present = (await people()).filter(
+    ({ id, role, wards, disabledAt }) =>
+      id !== user.id && disabledAt === null && can({ role, wardIds: wards.map(ward => ward.id) }, 'chart care', wardId),
+  )
+  return Object.fromEntries(present.map(({ id, name, role }) => [id, `${name}, ${role}`]))
+}

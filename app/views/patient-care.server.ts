@@ -1,0 +1,71 @@
+import type { CareContext, StoredEntry } from '#app/care/kind.ts'
+import { type Policy, policyInForce } from '#app/care/policy.ts'
+import { effectiveEntries, patientRecord } from '#app/care/record.ts'
+import { stomaMadeOn } from '#app/care/tube-change/tube.ts'
+import type { PatientBannerView } from '#app/components/patient-banner.tsx'
+import { careContext } from '#app/rules/context.ts'
+import { ageOn, showDateTime, showDay } from '#app/time/display.ts'
+import { localDay } from '#app/time/zone.ts'
+import type { PatientCare } from './patient-context.server.ts'
+
+/** Whose page this is, for the top of it. */
+export interface PatientHead {
+  readonly banner: PatientBannerView
+  readonly patientId: string
+  /** `Discharged on 01-Dec-2026 14:06.`, or null while the patient is here. */
+  readonly discharged: string | null
+}
+
+/** Bed, person, and what everybody must know, as words. */
+export function patientHead({ record: { patient, stay }, ward, context }: PatientCare, now: Date): PatientHead {
+  const made = context ? stomaMadeOn(context) : undefined
+  const laryngectomy = patient.upperAirway === 'not open'
+  return {
+    patientId: patient.id,
+    discharged: stay.dischargedAt && `Discharged on ${showDateTime(stay.dischargedAt, ward.zone)}.`,
+    banner: {
+      bed: stay.bedLabel,
+      family: patient.familyName,
+      given: patient.givenName,
+      sex: capital(patient.sex),
+      born: showDay(patient.bornOn),
+      age: ageOn(patient.bornOn, localDay(now, ward.zone)),
+      recordNo: patient.recordNumber,
+      allergies: patient.allergies ?? 'Not asked yet',
+      upperAirway: capital(patient.upperAirway),
+      stomaMade: made === undefined ? 'Not recorded' : showDay(made),
+      oxygen: patient.oxygen ?? 'None prescribed',
+      spo2Target:
+        patient.spo2Low === null || patient.spo2High === null
+          ? 'None prescribed'
+          : `${patient.spo2Low} to ${patient.spo2High} %`,
+      laryngectomy,
+    },
+  }
+}
+
+const capital = (words: string): string => words.charAt(0).toUpperCase() + words.slice(1)
+
+/** The policy of a patient's ward at a moment; before the first there was, the first one that applies today. */
+export function policyAt(policies: readonly Policy[], { ward, context }: PatientCare, at: Date): Policy | undefined {
+  return policyInForce(policies, ward.id, at) ?? context?.values.policy
+}
+
+/**
+ * What rules decide about one act from: what had been done by then (`at`), under the policy of that moment. With `before`,
+ * only what had been written down ahead of that entry. Null where no policy was reviewed.
+ */
+export function contextOfAct(
+  care: PatientCare,
+  policies: readonly Policy[],
+  at: Date,
+  before?: StoredEntry,
+): CareContext | null {
+  const policy = policyAt(policies, care, at)
+  if (!policy) return null
+  const { stay, patient, entries } = care.record
+  const known = before ? entries.filter(entry => entry.number < before.number) : entries
+  const done = effectiveEntries(known).filter(entry => entry.performedAt <= at && entry.id !== before?.supersedesId)
+  const record = patientRecord(done, { admittedAt: stay.admittedAt, patient })
+  return careContext({ record, policy, ward: care.ward, now: at })
+}

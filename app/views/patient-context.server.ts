@@ -1,0 +1,32 @@
+import { data } from 'react-router'
+import type { CareContext, WardFacts } from '#app/care/kind.ts'
+import { policyInForce } from '#app/care/policy.ts'
+import { env } from '#app/env.server.ts'
+import { showDateTime } from '#app/time/display.ts'
+import { policies } from '#database/policies.server.ts'
+import { type StayRecord, stayRecord } from '#database/records.server.ts'
+import { wardById } from '#database/wards.server.ts'
+import { contextOf } from './care-of.server.ts'
+
+/** One patient with everything rules decide from. `context` is null when nothing may be computed, and `nothingDue` says why. */
+export interface PatientCare {
+  readonly record: StayRecord
+  readonly ward: WardFacts & { readonly id: string; readonly name: string }
+  readonly context: CareContext | null
+  readonly nothingDue: string | null
+}
+
+/** The care of one stay at `now`. Throws a 404 when there is no such stay. */
+export async function patientCare(stayId: string, now: Date): Promise<PatientCare> {
+  const record = await stayRecord(stayId)
+  const found = record && (await wardById(record.stay.wardId))
+  if (!record || !found) throw data('There is no such patient.', 404)
+  const { id, name, shiftTimes, pressureUnit } = found
+  const ward = { id, name, shiftTimes, pressureUnit, zone: env.hospitalTimeZone }
+  const policy = policyInForce(await policies(), id, now)
+  const discharged = record.stay.dischargedAt
+  if (!policy)
+    return { record, ward, context: null, nothingDue: 'This ward has no reviewed policy: nothing is computed.' }
+  const context = contextOf(record, policy, ward, now)
+  return { record, ward, context, nothingDue: discharged && `Discharged on ${showDateTime(discharged, ward.zone)}.` }
+}
