@@ -1,5 +1,7 @@
 import { instantsOf } from '../time/zone.ts'
-import type { AnyCharted, CareContext, DataOf, PatientFacts, StoredEntry, WardFacts } from './kind.ts'
+import type { Clock, DueWindow } from './clock.ts'
+import { decannulations } from './decannulation/schema.ts'
+import type { AnyCareKind, AnyCharted, CareContext, DataOf, PatientFacts, StoredEntry, WardFacts } from './kind.ts'
 import { versionOf } from './payload.ts'
 import { type PersonalValue, type Policy, type SettingValue, valuesFor } from './policy.ts'
 import { patientRecord } from './record.ts'
@@ -73,7 +75,14 @@ export function aCorrection<K extends AnyCharted>(
   return anEntry(kind, when, data, { supersedesId: of.id, reason: 'Charted in error', ...more })
 }
 
-interface AboutContext {
+/** The tube taken out for good at `when`. */
+export function aRemoval(when: string): StoredEntry {
+  const agreed = { agreed: 'yes', operator: 'M. Osei', helper: 'T. Okafor' } as const
+  return anEntry(decannulations, when, { ...agreed, breathing: 'comfortable', dressing: 'yes' })
+}
+
+/** What a context says apart from its entries and its moment. */
+export interface AboutContext {
   readonly admittedAt?: string
   readonly patient?: Partial<PatientFacts>
   readonly ward?: Partial<WardFacts>
@@ -145,4 +154,18 @@ export function aTube(overrides: { readonly [Name in keyof TubeData]?: TubeData[
   }
   const laid = Object.entries({ ...tube, ...overrides }).filter(([, value]) => value !== undefined)
   return Object.fromEntries(laid) as TubeData
+}
+
+/** What the clock of a kind's task says, by the name of the task. Throws when the kind has no such task. */
+export function clockOf(kind: AnyCareKind, task: string, context: CareContext): Clock {
+  const rule = kind.tasks?.find(({ name }) => name === task)
+  if (!rule) throw new RangeError(`${kind.slug} has no task ${task}`)
+  return rule.clock(context)
+}
+
+/** The window of a task that runs. Throws when it is suspended or does not apply. */
+export function windowOf(kind: AnyCareKind, task: string, context: CareContext): DueWindow {
+  const clock = clockOf(kind, task, context)
+  if (clock.state !== 'running') throw new RangeError(`${task} does not run: ${clock.state}`)
+  return clock.window
 }

@@ -7,7 +7,7 @@ const backIn = { field: 'act', is: ['inspected', 'cleaned', 'replaced', 'swapped
 
 const fields = careFields({
   act: choice({
-    label: 'What was done',
+    label: 'Care given',
     options: {
       inspected: 'Looked at, clean, put back',
       cleaned: 'Cleaned and put back',
@@ -17,7 +17,7 @@ const fields = careFields({
     },
   }),
   whyUnable: choice({
-    label: 'Why not',
+    label: 'Reason it could not be done',
     options: {
       stuck: 'Would not come out',
       'not back': 'Would not go back in',
@@ -47,7 +47,12 @@ const fields = careFields({
     hint: 'As printed on the cannula or its pack',
   }).optional(),
   size: text({ label: 'Size of the inner cannula', maxLength: 12 }).optional(),
-  locked: choice({ label: 'Locked in place', options: yesNo, when: backIn, neededThen: true }).optional(),
+  locked: choice({
+    label: 'Lock',
+    options: { yes: 'Locked in place', no: 'Not locked' },
+    when: backIn,
+    neededThen: true,
+  }).optional(),
   spare: choice({ label: 'Matching spare at the bedside', options: yesNo }),
   tolerance: choice({
     label: 'Tolerance',

@@ -4,7 +4,7 @@ import { standsSince } from '../standing.ts'
 import { bleedWarnings } from '../suction/bleeding.ts'
 import { tubeInPlace } from '../tube-change/tube.ts'
 import type { Warning } from '../warning.ts'
-import { actsOnTube } from './acts.ts'
+import { actsOnTube, wasSeen } from './acts.ts'
 import { absence, absentWarning, fitRules } from './fit.ts'
 import { narrowed, repeatedBlock, shorterInterval, standingBlocks, stillNarrowed } from './narrowing.ts'
 import type { InnerCannulaData } from './schema.ts'
@@ -13,7 +13,7 @@ import type { InnerCannulaData } from './schema.ts'
 export function innerCannulaWarnings(data: InnerCannulaData, context: CareContext): readonly Warning[] {
   return [
     ...distress(data, context),
-    ...bleedWarnings('inner-cannula-blood', data.blood, context),
+    ...blood(data, context),
     ...fitRules.flatMap(rule => rule.warns(data, context)),
     ...narrowed(data, context),
     ...repeatedBlock(data, context),
@@ -33,11 +33,16 @@ function distress(data: InnerCannulaData, { record }: CareContext): readonly War
   ]
 }
 
+function blood(data: InnerCannulaData, context: CareContext): readonly Warning[] {
+  return bleedWarnings('inner-cannula-blood', data.blood, context)
+}
+
 /** What stands by the last acts on the inner cannula of the tube in place, each until an act that settles it. */
 export function standingInnerCannulaWarnings(context: CareContext): readonly Warning[] {
   if (!tubeInPlace(context.record)) return []
   const acts = actsOnTube(context.record)
   return [
+    ...standsSince(acts, { isSettledBy: wasSeen, warns: blood }, context),
     ...neverFitted(context),
     ...fitRules.flatMap(rule => standsSince(acts, rule, context)),
     ...stillNarrowed(context),

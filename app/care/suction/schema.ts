@@ -10,11 +10,11 @@ const withSecretions = { when: { field: 'amount', is: ['scant', 'small', 'modera
 /** A look at the need for suction, or an episode of it: why, how, what came, how it was borne. */
 export const suctionSchema = careFields({
   act: choice({
-    label: 'What was done',
-    options: { 'need only': 'Looked and listened, no suction needed', episode: 'Suction' },
+    label: 'Care given',
+    options: { 'need only': 'Looked and listened, none needed', episode: 'Suction' },
   }),
   indication: choices({
-    label: 'Why',
+    label: 'Reason',
     options: {
       secretions: 'Secretions seen or heard',
       'coarse sounds': 'Coarse sounds',
@@ -70,10 +70,10 @@ export const suctionSchema = careFields({
     ...throughTube,
     neededThen: true,
   }).optional(),
-  passes: quantity({ label: 'Passes', min: 1, max: 20, ...throughTube, neededThen: true }).optional(),
+  passes: quantity({ label: 'Passes', unit: 'times', min: 1, max: 20, ...throughTube, neededThen: true }).optional(),
   passed: choice({
-    label: 'Catheter passed',
-    options: { easily: 'Easily', difficult: 'With difficulty', no: 'Would not pass' },
+    label: 'Catheter passage',
+    options: { easily: 'Easy', difficult: 'With difficulty', no: 'Would not pass' },
     ...throughTube,
     neededThen: true,
   }).optional(),
