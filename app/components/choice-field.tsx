@@ -38,7 +38,7 @@ export function ChoiceField({ options, chosen = [], several = false, disabled, .
             onClick={unchoose}
             className="hidden min-h-12 px-2 text-sm font-semibold text-ink2 underline underline-offset-3 scripted:group-has-checked:inline-block"
           >
-            Clear<span className="sr-only"> {field.label}</span>
+            Clear <span className="sr-only">{field.label}</span>
           </button>
         )}
       </div>

@@ -37,7 +37,7 @@ export function DueTask({ task, why }: DueTaskProps) {
         {why && (
           <details className="text-sm">
             <summary className="inline-flex min-h-6 items-center font-semibold text-ink2 underline underline-offset-3">
-              Why?<span className="sr-only"> {title}</span>
+              Why? <span className="sr-only">{title}</span>
             </summary>
             <div className="mt-1 max-w-prose text-ink2">{why}</div>
           </details>

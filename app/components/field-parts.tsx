@@ -14,7 +14,7 @@ export interface FieldProps {
 }
 
 export const INPUT =
-  'min-h-12 w-full rounded-control border border-edge bg-surface px-3 py-2 text-base text-ink aria-invalid:border-2 aria-invalid:border-late disabled:opacity-60'
+  'min-h-12 w-full rounded-control border border-edge bg-surface px-3 py-2 text-ink aria-invalid:border-2 aria-invalid:border-late disabled:opacity-60'
 
 /** What `aria-describedby` of a field's control names: hint, error, and whatever else stands beside it. */
 export function describedBy({ id, hint, errors }: FieldProps, ...others: readonly string[]): string | undefined {
@@ -50,14 +50,20 @@ export function HintAndErrors({ field: { id, hint, errors } }: HintAndErrorsProp
           {hint}
         </p>
       )}
-      {errors && errors.length > 0 && (
-        <p id={`${id}-error`} className="flex gap-1.5 font-semibold text-late">
-          <svg aria-hidden="true" viewBox="0 0 12 12" className="mt-1.5 size-3 flex-none fill-current">
-            <path d="M6 0l6 11H0z" />
-          </svg>
-          {errors.join('. ')}
-        </p>
-      )}
+      <FieldErrors id={id} errors={errors} />
     </>
+  )
+}
+
+/** What is wrong with a field, under it. */
+export function FieldErrors({ id, errors }: Pick<FieldProps, 'id' | 'errors'>) {
+  if (!errors?.length) return null
+  return (
+    <p id={`${id}-error`} className="flex gap-1.5 font-semibold text-late">
+      <svg aria-hidden="true" viewBox="0 0 12 12" className="mt-1.5 size-3 flex-none fill-current">
+        <path d="M6 0l6 11H0z" />
+      </svg>
+      {errors.join('. ')}
+    </p>
   )
 }

@@ -52,7 +52,7 @@ export function TimelineEntry({ entry, children }: TimelineEntryProps) {
               to={href}
               className="inline-block min-h-6 px-1 font-semibold underline underline-offset-3 print:hidden"
             >
-              Open<span className="sr-only"> {`${title} at ${time}`}</span>
+              Open <span className="sr-only">{`${title} at ${time}`}</span>
             </Link>
           </>
         )}
