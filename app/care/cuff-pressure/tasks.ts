@@ -36,13 +36,19 @@ function cuffClock(tube: TubeEntry, context: CareContext): Clock {
   )
   const regular = intervalClock({
     last: done,
-    start: tube.performedAt,
+    start: upSince(tube, record),
     interval: hours(values.of(cuffInterval)),
   })
   return [afterEvent(tube, done, context), afterBadReading(done, context)].reduce<Clock>(
     (clock, prompt) => (prompt ? sooner(clock, prompt) : clock),
     regular,
   )
+}
+
+/** Since when the cuff has been up: a cuff let down and inflated again starts anew. */
+function upSince(tube: TubeEntry, record: CareContext['record']): Date {
+  const inflation = record.latest(cuffChecks, data => data.cuffNow === 'inflated')
+  return inflation && inflation.performedAt > tube.performedAt ? inflation.performedAt : tube.performedAt
 }
 
 /** Inflation, tube change, turn or transfer with no good reading since. */

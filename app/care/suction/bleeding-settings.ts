@@ -1,7 +1,7 @@
 import { numberSetting, switchSetting } from '../policy.ts'
 
 export const bleedWindowFrom = numberSetting({
-  name: 'suction-bleed-window-from',
+  name: 'bleed-window-from',
   label: 'Bleeding may warn of a larger bleed from day',
   unit: 'days',
   default: 3,
@@ -12,7 +12,7 @@ export const bleedWindowFrom = numberSetting({
 })
 
 export const bleedWindowTo = numberSetting({
-  name: 'suction-bleed-window-to',
+  name: 'bleed-window-to',
   label: 'Bleeding may warn of a larger bleed until day',
   unit: 'days',
   default: 42,
@@ -26,7 +26,7 @@ export const bleedWindowTo = numberSetting({
 })
 
 export const streaksAreRed = switchSetting({
-  name: 'suction-streaks-red',
+  name: 'bleed-streaks-red',
   label: 'Streaks of blood within those days are an emergency',
   unit: 'on or off',
   default: false,
