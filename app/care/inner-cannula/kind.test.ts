@@ -4,6 +4,7 @@ import { type TubeData, tubeChanges } from '../tube-change/schema.ts'
 import { innerCannulaExamples, replacedWithNew } from './examples.ts'
 import { innerCannula } from './kind.ts'
 import { type InnerCannulaData, innerCannulaSchema } from './schema.ts'
+import { innerCannulaSentence } from './sentence.ts'
 
 const withTube = (overrides: Parameters<typeof aTube>[0] = {}) =>
   aContext([anEntry(tubeChanges, '2026-03-02 10:00', aTube(overrides))], '12:00')
@@ -71,7 +72,7 @@ test.each<[Partial<InnerCannulaData>, boolean]>([
 })
 
 test('the sentence says what was done, found and left', () => {
-  expect(innerCannulaExamples.map(innerCannula.summary)).toEqual([
+  expect(innerCannulaExamples.map(innerCannulaSentence)).toEqual([
     'Inner cannula replaced with new. Found with a light coating. Corvane Dual, 8.0. Locked. Spare at the bedside. Tolerated well.',
     'Inner cannula looked at and put back. Found clear. Corvane Dual, 8.0. Locked. Spare at the bedside. Coughed.',
     'Inner cannula swapped for the clean spare. Found half blocked or more. Halden, 6. Locked. Spare at the bedside. SpO2 fell to 90%. Secretions moderate, yellow, thick. Oxygen given before. With T. Okafor. Nebuliser given before.',

@@ -15,7 +15,7 @@ export function narrowed(data: InnerCannulaData, { values }: CareContext): reado
     {
       name: 'inner-cannula-narrowed',
       level: 'amber',
-      action: `Fit a clean inner cannula. Check again in ${values.of(recheckWithin)} hours. Review humidity.`,
+      action: `Fit a clean inner cannula. Check again in ${hourWords(values.of(recheckWithin))}. Review humidity.`,
       cause: `The inner cannula was ${conditionWords(data)}.`,
       source: recheckWithin.source.says,
     },
@@ -59,7 +59,7 @@ function blocksWarning(blocks: number, { values }: CareContext): readonly Warnin
       name: 'inner-cannula-repeat-block',
       level: 'amber',
       action: 'Ask the tracheostomy specialist to review today. Review humidity and suction.',
-      cause: `Blocked ${blocks} times within ${values.of(repeatBlockWindow)} hours.`,
+      cause: `Blocked ${blocks} times within ${hourWords(values.of(repeatBlockWindow))}.`,
       source: repeatBlockWindow.source.says,
     },
   ]
@@ -76,8 +76,8 @@ export function shorterInterval(context: CareContext): readonly Warning[] {
     {
       name: 'inner-cannula-shorter-interval',
       level: 'blue',
-      action: `Think about looking at the inner cannula every ${half} hours, in the care plan.`,
-      cause: `Partly blocked at the last two checks, ${values.of(inspectionInterval)} hours being the interval now.`,
+      action: `Think about looking at the inner cannula every ${hourWords(half)}, in the care plan.`,
+      cause: `Partly blocked at the last two checks; the interval now is ${hourWords(values.of(inspectionInterval))}.`,
       source: SOURCE,
     },
   ]
@@ -94,4 +94,8 @@ function isSetSince(last: InnerCannulaEntry, { values }: CareContext): boolean {
 
 function conditionWords({ condition }: InnerCannulaData): string {
   return condition === 'blocked' ? 'blocked' : 'half blocked or more'
+}
+
+function hourWords(n: number): string {
+  return n === 1 ? '1 hour' : `${n} hours`
 }
