@@ -7,7 +7,7 @@ export const bleedWindowFrom = numberSetting({
   default: 3,
   min: 0,
   max: 7,
-  affects: 'Suction and inner cannula: words and level of the warning of blood.',
+  affects: 'Every warning of blood: at suction, at the stoma and on the inner cannula.',
   source: { says: 'Journal abstract on fistula of the innominate artery: 3 days to 6 weeks', standing: 'published' },
 })
 
@@ -18,7 +18,7 @@ export const bleedWindowTo = numberSetting({
   default: 42,
   min: 21,
   max: 90,
-  affects: 'Suction and inner cannula: words and level of the warning of blood.',
+  affects: 'Every warning of blood: at suction, at the stoma and on the inner cannula.',
   source: {
     says: 'Massive bleeding from 3 days to 6 weeks is an artery fistula until proven otherwise; Bontempo and Manning: every bleed counts as a warning bleed',
     standing: 'published',

@@ -79,14 +79,14 @@ test.each([
   ['2026-01-26', false],
 ])('an opening made on %s is within day 3 to 42 on 10-Mar-2026: %s', (madeOn, within) => {
   const before = [firstTube(madeOn)]
-  const policy = { 'suction-streaks-red': true }
+  const policy = { 'bleed-streaks-red': true }
   expect(warningsOf({ blood: 'streaks' }, { before, policy })[0]?.level).toBe(within ? 'red' : 'amber')
   expect(/after the opening was made/.test(warningsOf({ blood: 'fresh' }, { before })[0]?.cause ?? '')).toBe(within)
 })
 
 test('an opening of unknown age leaves streaks amber and fresh blood red', () => {
   const before = [anEntry(tubeChanges, '2026-03-02 10:00', aTube())]
-  const policy = { 'suction-streaks-red': true }
+  const policy = { 'bleed-streaks-red': true }
   expect(warningsOf({ blood: 'streaks' }, { before, policy })[0]?.level).toBe('amber')
   expect(warningsOf({ blood: 'fresh' }, { before })).toMatchObject([{ level: 'red', cause: 'Fresh blood.' }])
 })
