@@ -9,6 +9,9 @@ import { passwordFault } from './password-rules.ts'
 import type { CurrentUser } from './permissions.ts'
 import { forgiveAttempt, takeAttempt } from './sign-in-throttle.server.ts'
 
+// What was typed in them does not go back to the browser.
+const hideFields: ('currentPassword' | 'newPassword')[] = ['currentPassword', 'newPassword']
+
 /**
  * Replaces somebody's password by the one in the form, or returns what the form is to say. The current password is asked
  * for even in a fresh session (OWASP ASVS 5.0, 6.2.3), and guessed at no faster than at sign-in.
@@ -19,10 +22,10 @@ export async function replacedPassword(
   by: Trace,
 ): Promise<SubmissionResult<string[]> | null> {
   const submission = parseWithZod(form, { schema: newPasswordSchema })
-  if (submission.status !== 'success') return submission.reply()
+  if (submission.status !== 'success') return submission.reply({ hideFields })
   const { currentPassword, newPassword, keepOthers = false } = submission.value
   const says = (field: 'currentPassword' | 'newPassword', words: string) =>
-    submission.reply({ fieldErrors: { [field]: [words] } })
+    submission.reply({ hideFields, fieldErrors: { [field]: [words] } })
   const attempt = await takeAttempt(user.email, by.address)
   if (typeof attempt === 'number') return says('currentPassword', `Too many tries. Wait ${attempt} s, then try again`)
   const hash = await passwordHashOf(user.id)
