@@ -57,7 +57,9 @@ export function tubeWords(data: TubeData): string {
 }
 
 /** The inside diameter that a suction catheter meets: with the inner cannula in, where there is one. */
-export function workingIdMm(data: TubeData): number {
+export function workingIdMm(
+  data: Pick<TubeData, 'construction' | 'innerCannula' | 'idWithInner' | 'idWithoutInner'>,
+): number {
   return data.construction === 'dual' && data.innerCannula !== 'none' && data.idWithInner !== undefined
     ? data.idWithInner
     : data.idWithoutInner

@@ -1,0 +1,80 @@
+import { later, minutes } from '#app/time/duration.ts'
+import type { Zone } from '#app/time/zone.ts'
+import { alderStories } from './alder.ts'
+import { type Bedside, bedsideOf, hoursBefore, type Place } from './bedside.ts'
+import { birchStories } from './birch.ts'
+import { cedarStories } from './cedar.ts'
+import { entriesOf } from './entries.ts'
+import { demoPeople, rotaOf } from './people.ts'
+import { demoPolicies } from './policies.ts'
+import { idAt, type Random, randomFrom } from './random.ts'
+import type { DemoHospital, DemoMove, DemoPatient, DemoPerson, DemoStay } from './rows.ts'
+import type { BedStory } from './story.ts'
+import { bedLabelled, demoWards, type WardWithBeds } from './wards.ts'
+
+const stories: readonly BedStory[] = [...alderStories, ...birchStories, ...cedarStories]
+
+/**
+ * The demo hospital as it stands at a moment: three wards, their people, policies and patients, and some days of charting
+ * that end then. The same moment and zone give the same rows, ids included.
+ */
+export function demoHospital(now: Date, zone: Zone): DemoHospital {
+  const wards = demoWards(now)
+  const people = demoPeople(now, wards)
+  const rota = rotaOf(people, zone)
+  const placeOf = (label: string): Place => placeLabelled(wards, label)
+  const stays = stories.map(story => {
+    const random = randomFrom(`${story.bed} ${story.patient.recordNumber} ${now.getTime()}`)
+    return stayOf(bedsideOf(story, { now, zone, random, rota, placeOf }), random)
+  })
+  return {
+    seededAt: now,
+    zone,
+    wards: wards.map(ward => ward.row),
+    beds: wards.flatMap(ward => ward.beds),
+    people,
+    patients: stays.map(({ patient }) => patient),
+    stays: stays.map(({ stay }) => stay),
+    moves: stays.flatMap(({ moves }) => moves),
+    policies: demoPolicies(now, zone, wards, specialistOf(people)),
+    entries: stays.flatMap(({ entries }) => entries),
+  }
+}
+
+function stayOf(bedside: Bedside, random: Random) {
+  const { story, now, place, earlierPlace, admittedAt } = bedside
+  const patient: DemoPatient = { id: idAt(admittedAt, random), ...story.patient }
+  const stay: DemoStay = {
+    id: idAt(admittedAt, random),
+    patientId: patient.id,
+    wardId: place.ward.row.id,
+    bedId: place.bed.id,
+    admittedAt,
+    dischargedAt: story.discharged ? hoursBefore(now, story.discharged.hoursAgo) : null,
+    dischargeReason: story.discharged?.reason ?? null,
+    dischargeNote: story.discharged?.note ?? null,
+  }
+  const moves = [
+    moveTo(earlierPlace ?? place, admittedAt),
+    ...(earlierPlace ? [moveTo(place, earlierPlace.until)] : []),
+  ]
+  return { patient, stay, moves, entries: entriesOf(bedside, stay.id) }
+
+  function moveTo({ ward, bed }: Place, movedAt: Date): DemoMove {
+    const recordedBy = bedside.rota.nurse(ward, bed, later(movedAt, minutes(1))).id
+    return { id: idAt(movedAt, random), stayId: stay.id, wardId: ward.row.id, bedId: bed.id, movedAt, recordedBy }
+  }
+}
+
+function placeLabelled(wards: readonly WardWithBeds[], label: string): Place {
+  const bed = bedLabelled(wards, label)
+  const ward = wards.find(other => other.row.id === bed.wardId)
+  if (!ward) throw new RangeError(`Bed ${label} belongs to no ward`)
+  return { ward, bed }
+}
+
+function specialistOf(people: readonly DemoPerson[]): DemoPerson {
+  const specialist = people.find(({ role }) => role === 'tracheostomy specialist')
+  if (!specialist) throw new RangeError('The demo hospital has no tracheostomy specialist')
+  return specialist
+}
