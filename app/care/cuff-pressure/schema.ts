@@ -40,7 +40,7 @@ const fields = careFields({
     },
   }),
   whyNot: text({
-    label: 'Why it was not measured',
+    label: 'Reason it was not measured',
     when: { field: 'method', is: ['not measured'] },
     neededThen: true,
   }).optional(),
@@ -60,7 +60,7 @@ const fields = careFields({
     },
   }).optional(),
   reason: choice({
-    label: 'Why now',
+    label: 'Reason for the check',
     options: {
       scheduled: 'Scheduled',
       turned: 'Turned',

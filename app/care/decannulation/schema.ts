@@ -7,11 +7,11 @@ export const breathing = { comfortable: 'Comfortable', laboured: 'Laboured', str
 export const decannulations = charted({
   slug: 'decannulation',
   schema: careFields({
-    agreed: choice({ label: 'Team agreed to the removal', options: yesNo }),
+    agreed: choice({ label: 'Agreement of the team', options: yesNo }),
     operator: text({ label: 'Operator' }),
     helper: text({ label: 'Helper' }),
-    breathing: choice({ label: 'Breathing after', options: breathing }),
-    dressing: choice({ label: 'Airtight dressing on', options: yesNo }),
+    breathing: choice({ label: 'Breathing afterwards', options: breathing }),
+    dressing: choice({ label: 'Airtight dressing', options: yesNo }),
     note: note({ label: 'Note', more: true }).optional(),
   }),
 })

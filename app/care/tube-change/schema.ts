@@ -7,7 +7,7 @@ const dual = { field: 'construction', is: ['dual'] }
 /** A tube put in: the first insertion or a later change. Five numbers as on label and flange, never derived from one another. */
 const fields = careFields({
   reason: choice({
-    label: 'Why',
+    label: 'Reason',
     section: 'What was done',
     options: {
       'first insertion': 'First insertion',
@@ -56,7 +56,7 @@ const fields = careFields({
     when: dual,
     neededThen: true,
   }).optional(),
-  fenestrated: choice({ label: 'Fenestrated', options: yesNo }),
+  fenestrated: choice({ label: 'Fenestration', options: yesNo }),
   connector: choice({
     label: '15 mm connector',
     options: { outer: 'On the outer tube', inner: 'On the inner cannula', none: 'None' },
@@ -96,7 +96,7 @@ const fields = careFields({
   operator: text({ label: 'Operator', section: 'Who and how it went' }),
   helper: text({ label: 'Helper' }).optional(),
   difficulty: choice({
-    label: 'How it went',
+    label: 'Difficulty',
     options: {
       easy: 'Easy',
       some: 'Some difficulty',
@@ -106,7 +106,7 @@ const fields = careFields({
     },
   }),
   position: choice({
-    label: 'Position confirmed by',
+    label: 'Confirmation of position',
     options: {
       capnography: 'Capnography',
       airflow: 'Airflow',
