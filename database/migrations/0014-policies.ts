@@ -5,7 +5,7 @@ const table = `CREATE TABLE IF NOT EXISTS policies (
   name VARCHAR(120) NOT NULL,
   version INT UNSIGNED NOT NULL COMMENT 'from 1, for each ward and for the hospital',
   ward_id UUID NULL COMMENT 'null: the whole hospital',
-  reviewed_by VARCHAR(120) NOT NULL,
+  reviewed_by VARCHAR(120) NOT NULL COMMENT 'empty: by nobody yet, so never in force',
   reviewed_on DATE NOT NULL,
   starts_at DATETIME(3) NOT NULL,
   reason VARCHAR(500) NOT NULL,
@@ -17,7 +17,6 @@ const table = `CREATE TABLE IF NOT EXISTS policies (
   UNIQUE KEY policies_version (scope, version),
   CONSTRAINT policies_ward FOREIGN KEY (ward_id) REFERENCES wards (id),
   CONSTRAINT policies_created_by FOREIGN KEY (created_by) REFERENCES users (id),
-  CONSTRAINT policies_are_reviewed CHECK (CHAR_LENGTH(TRIM(reviewed_by)) > 0),
   CONSTRAINT policies_have_a_reason CHECK (CHAR_LENGTH(TRIM(reason)) > 0),
   CONSTRAINT policies_values_are_an_object CHECK (JSON_TYPE(setting_values) = 'OBJECT')
 )`

@@ -1,0 +1,23 @@
+import { type CreationOptional, DataTypes, type InferAttributes, type InferCreationAttributes, Model } from 'sequelize'
+import type { PressureUnit } from '#app/clinical/units.ts'
+import { sequelize } from '../sequelize.server.ts'
+
+/** A ward with the two things that rules need of it. */
+export class WardRow extends Model<InferAttributes<WardRow>, InferCreationAttributes<WardRow>> {
+  declare id: string
+  declare name: string
+  declare shiftTimes: readonly string[]
+  declare pressureUnit: PressureUnit
+  declare retired: CreationOptional<boolean>
+}
+
+WardRow.init(
+  {
+    id: { type: DataTypes.UUID, primaryKey: true },
+    name: { type: DataTypes.STRING(80), allowNull: false },
+    shiftTimes: { type: DataTypes.JSON, allowNull: false },
+    pressureUnit: { type: DataTypes.STRING(8), allowNull: false },
+    retired: { type: DataTypes.BOOLEAN, allowNull: false, defaultValue: false },
+  },
+  { sequelize, tableName: 'wards', timestamps: false },
+)

@@ -1,0 +1,105 @@
+import type { Transaction } from 'sequelize'
+import type { PatientFacts } from '#app/care/kind.ts'
+import type { LocalDay } from '#app/time/zone.ts'
+import { type Replacements, select } from './sequelize.server.ts'
+
+export type Sex = 'female' | 'male' | 'other' | 'not known'
+
+/** A person, with the facts that hold until somebody changes them. `allergies` null: nobody has asked. */
+export type Patient = PatientFacts & {
+  readonly id: string
+  readonly recordNumber: string
+  readonly familyName: string
+  readonly givenName: string
+  readonly bornOn: LocalDay
+  readonly sex: Sex
+  readonly allergies: string | null
+  readonly oxygen: string | null
+  readonly demo: boolean
+  /** Raised by each edit: an edit that was begun on an older one is told so. */
+  readonly version: number
+}
+
+/** One stay, in the bed where the patient is (or was last). `entryCount` is the number of its last entry. */
+export type Stay = {
+  readonly id: string
+  readonly patientId: string
+  readonly wardId: string
+  readonly wardName: string
+  readonly bedId: string
+  readonly bedLabel: string
+  readonly admittedAt: Date
+  readonly dischargedAt: Date | null
+  readonly dischargeReason: string | null
+  readonly dischargeNote: string | null
+  readonly entryCount: number
+}
+
+export type StayWithPatient = { readonly stay: Stay; readonly patient: Patient }
+
+type Flat = Omit<Patient, 'id' | 'ventilated' | 'demo'> &
+  Omit<Stay, 'id'> & { stayId: string; ventilated: number; demo: number }
+
+/** The columns of a patient under the alias `p`, apart from the id. */
+export const patientColumns = `p.record_number AS recordNumber, p.family_name AS familyName, p.given_name AS givenName,
+  p.born_on AS bornOn, p.sex, p.allergies, p.upper_airway AS upperAirway, p.ventilated, p.oxygen, p.spo2_low AS spo2Low,
+  p.spo2_high AS spo2High, p.demo, p.version`
+
+/** Stays with their patients, by what stands after FROM stays s JOIN patients p, wards w, beds b. */
+export async function stayRows(
+  rest: string,
+  replacements: Replacements,
+  transaction: Transaction | null = null,
+): Promise<readonly StayWithPatient[]> {
+  const rows = await select<Flat>(
+    `SELECT s.id AS stayId, s.patient_id AS patientId, s.ward_id AS wardId, w.name AS wardName, s.bed_id AS bedId,
+       b.label AS bedLabel, s.admitted_at AS admittedAt, s.discharged_at AS dischargedAt,
+       s.discharge_reason AS dischargeReason, s.discharge_note AS dischargeNote, s.entry_count AS entryCount, ${patientColumns}
+     FROM stays s JOIN patients p ON p.id = s.patient_id JOIN wards w ON w.id = s.ward_id JOIN beds b ON b.id = s.bed_id
+     ${rest}`,
+    replacements,
+    transaction,
+  )
+  return rows.map(row => ({ stay: stayOf(row), patient: patientOf({ ...row, id: row.patientId }) }))
+}
+
+function stayOf(row: Flat): Stay {
+  return {
+    id: row.stayId,
+    patientId: row.patientId,
+    wardId: row.wardId,
+    wardName: row.wardName,
+    bedId: row.bedId,
+    bedLabel: row.bedLabel,
+    admittedAt: row.admittedAt,
+    dischargedAt: row.dischargedAt,
+    dischargeReason: row.dischargeReason,
+    dischargeNote: row.dischargeNote,
+    entryCount: row.entryCount,
+  }
+}
+
+export type PatientColumns = Omit<Patient, 'ventilated' | 'demo'> & {
+  readonly ventilated: number
+  readonly demo: number
+}
+
+/** A patient from the columns above and the id. MariaDB's booleans are numbers. */
+export function patientOf(row: PatientColumns): Patient {
+  return {
+    id: row.id,
+    recordNumber: row.recordNumber,
+    familyName: row.familyName,
+    givenName: row.givenName,
+    bornOn: row.bornOn,
+    sex: row.sex,
+    allergies: row.allergies,
+    upperAirway: row.upperAirway,
+    ventilated: Boolean(row.ventilated),
+    oxygen: row.oxygen,
+    spo2Low: row.spo2Low,
+    spo2High: row.spo2High,
+    demo: Boolean(row.demo),
+    version: row.version,
+  }
+}
