@@ -5,7 +5,7 @@ import { grantAppRights } from '#database/grants.server.ts'
 import { migrateUp } from '#database/migrate.server.ts'
 
 /** The worker's database as the user who owns it: for what the application may not do, such as altering an entry. */
-export const owner = connection(env.databaseOwnerUrl, { maxConnections: 3 })
+export const owner = connection(env.databaseOwnerUrl, { maxConnections: 3, queryTimeoutMs: 60_000 })
 
 /** The name of this worker's database. */
 export const databaseName = owner.getDatabaseName()
@@ -39,7 +39,7 @@ export async function cleared(): Promise<void> {
 /** Makes an empty database beside the worker's own, does the work in it, and drops it: for migrations and restores. */
 export async function withScratchDatabase<T>(work: (scratch: Sequelize, url: string) => Promise<T>): Promise<T> {
   const url = `${env.databaseOwnerUrl}_scratch`
-  const scratch = connection(url, { maxConnections: 3 })
+  const scratch = connection(url, { maxConnections: 3, queryTimeoutMs: 60_000 })
   await owner.query(`CREATE OR REPLACE DATABASE \`${scratch.getDatabaseName()}\``)
   try {
     return await work(scratch, url)

@@ -1,0 +1,362 @@
+CREATE TABLE `access_grants` (
+  `id` uuid NOT NULL,
+  `user_id` uuid NOT NULL,
+  `patient_id` uuid NOT NULL,
+  `ward_id` uuid NOT NULL COMMENT 'where the patient was when the reason was given',
+  `reason` varchar(500) NOT NULL,
+  `granted_at` datetime(3) NOT NULL,
+  `ends_at` datetime(3) NOT NULL,
+  PRIMARY KEY (`id`),
+  KEY `access_grants_in_force` (`user_id`,`patient_id`,`ends_at`),
+  KEY `access_grants_of_ward` (`ward_id`,`granted_at`),
+  KEY `access_grants_patient` (`patient_id`),
+  CONSTRAINT `access_grants_patient` FOREIGN KEY (`patient_id`) REFERENCES `patients` (`id`),
+  CONSTRAINT `access_grants_user` FOREIGN KEY (`user_id`) REFERENCES `users` (`id`),
+  CONSTRAINT `access_grants_ward` FOREIGN KEY (`ward_id`) REFERENCES `wards` (`id`),
+  CONSTRAINT `access_grants_have_a_reason` CHECK (char_length(trim(`reason`)) >= 10),
+  CONSTRAINT `access_grants_end` CHECK (`ends_at` > `granted_at`)
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
+CREATE TABLE `access_log` (
+  `chain` varchar(48) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  `seq` int(10) unsigned NOT NULL,
+  `at` datetime(3) NOT NULL,
+  `actor_id` uuid DEFAULT NULL,
+  `actor_role` varchar(32) CHARACTER SET ascii COLLATE ascii_bin DEFAULT NULL COMMENT 'at that moment',
+  `session_hash` char(64) CHARACTER SET ascii COLLATE ascii_bin DEFAULT NULL,
+  `purpose` varchar(16) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  `action` varchar(48) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  `outcome` varchar(16) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  `resource_type` varchar(32) CHARACTER SET ascii COLLATE ascii_bin DEFAULT NULL,
+  `resource_id` varchar(64) CHARACTER SET ascii COLLATE ascii_bin DEFAULT NULL,
+  `patient_id` uuid DEFAULT NULL,
+  `stay_id` uuid DEFAULT NULL,
+  `ward_id` uuid DEFAULT NULL,
+  `path` varchar(200) CHARACTER SET ascii COLLATE ascii_bin DEFAULT NULL,
+  `address` varchar(45) CHARACTER SET ascii COLLATE ascii_bin DEFAULT NULL,
+  `user_agent` varchar(200) CHARACTER SET ascii COLLATE ascii_bin DEFAULT NULL,
+  `request_id` varchar(64) CHARACTER SET ascii COLLATE ascii_bin DEFAULT NULL,
+  `prev_hash` char(64) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  `hash` char(64) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  PRIMARY KEY (`chain`,`seq`),
+  KEY `access_log_of_ward` (`ward_id`,`at`),
+  KEY `access_log_of_actor` (`actor_id`,`at`),
+  CONSTRAINT `access_log_purpose_is_known` CHECK (`purpose` in ('TREAT','BTG','ADMIN','SIGN-IN')),
+  CONSTRAINT `access_log_outcome_is_known` CHECK (`outcome` in ('done','refused','failed'))
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
+CREATE TABLE `access_log_heads` (
+  `chain` varchar(48) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  `seq` int(10) unsigned NOT NULL,
+  `hash` char(64) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  PRIMARY KEY (`chain`)
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
+CREATE TABLE `beds` (
+  `id` uuid NOT NULL,
+  `ward_id` uuid NOT NULL,
+  `label` varchar(16) NOT NULL,
+  `position` smallint(5) unsigned NOT NULL COMMENT 'order on the board, from 1',
+  `retired` tinyint(1) NOT NULL DEFAULT 0,
+  PRIMARY KEY (`id`),
+  UNIQUE KEY `beds_label` (`ward_id`,`label`),
+  UNIQUE KEY `beds_with_ward` (`id`,`ward_id`),
+  CONSTRAINT `beds_ward` FOREIGN KEY (`ward_id`) REFERENCES `wards` (`id`),
+  CONSTRAINT `beds_are_labelled` CHECK (char_length(trim(`label`)) > 0)
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
+CREATE TABLE `bed_moves` (
+  `id` uuid NOT NULL COMMENT 'minted when the form was opened: the same move twice is one',
+  `stay_id` uuid NOT NULL,
+  `ward_id` uuid NOT NULL COMMENT 'where to',
+  `bed_id` uuid NOT NULL,
+  `moved_at` datetime(3) NOT NULL,
+  `recorded_at` datetime(3) NOT NULL DEFAULT utc_timestamp(3),
+  `recorded_by` uuid NOT NULL,
+  PRIMARY KEY (`id`),
+  KEY `bed_moves_of_stay` (`stay_id`,`moved_at`),
+  KEY `bed_moves_bed` (`bed_id`,`ward_id`),
+  KEY `bed_moves_recorded_by` (`recorded_by`),
+  CONSTRAINT `bed_moves_bed` FOREIGN KEY (`bed_id`, `ward_id`) REFERENCES `beds` (`id`, `ward_id`),
+  CONSTRAINT `bed_moves_recorded_by` FOREIGN KEY (`recorded_by`) REFERENCES `users` (`id`),
+  CONSTRAINT `bed_moves_stay` FOREIGN KEY (`stay_id`) REFERENCES `stays` (`id`)
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
+CREATE TABLE `drafts` (
+  `user_id` uuid NOT NULL,
+  `path` varchar(200) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  `fields` longtext CHARACTER SET utf8mb4 COLLATE utf8mb4_bin NOT NULL COMMENT 'each name with its values, as the form sent them' CHECK (json_valid(`fields`)),
+  `saved_at` datetime(3) NOT NULL,
+  PRIMARY KEY (`user_id`,`path`),
+  KEY `drafts_by_age` (`saved_at`),
+  CONSTRAINT `drafts_user` FOREIGN KEY (`user_id`) REFERENCES `users` (`id`)
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
+CREATE TABLE `entries` (
+  `id` uuid NOT NULL COMMENT 'minted when the form was opened: the same id twice is the same act',
+  `stay_id` uuid NOT NULL,
+  `number` int(10) unsigned NOT NULL COMMENT 'from 1 without gaps in each stay; set by trigger',
+  `kind` varchar(32) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  `version` smallint(5) unsigned NOT NULL COMMENT 'of the payload, by the upgrades of its kind',
+  `performed_at` datetime(3) NOT NULL,
+  `recorded_at` datetime(3) NOT NULL DEFAULT utc_timestamp(3),
+  `recorded_by` uuid NOT NULL,
+  `recorded_role` varchar(32) CHARACTER SET ascii COLLATE ascii_bin NOT NULL COMMENT 'at that moment',
+  `witness_id` uuid DEFAULT NULL,
+  `supersedes_id` uuid DEFAULT NULL,
+  `reason` varchar(500) DEFAULT NULL,
+  `status` varchar(16) CHARACTER SET ascii COLLATE ascii_bin NOT NULL DEFAULT 'final',
+  `data` longtext CHARACTER SET utf8mb4 COLLATE utf8mb4_bin NOT NULL CHECK (json_valid(`data`)),
+  `hash` char(64) CHARACTER SET ascii COLLATE ascii_bin NOT NULL COMMENT 'SHA-256 of the hash before it and this row; set by trigger',
+  PRIMARY KEY (`id`),
+  UNIQUE KEY `entries_number` (`stay_id`,`number`),
+  UNIQUE KEY `entries_supersedes` (`supersedes_id`),
+  KEY `entries_timeline` (`stay_id`,`performed_at`,`id`),
+  KEY `entries_by_kind` (`stay_id`,`kind`,`performed_at`,`id`),
+  KEY `entries_recorded_by` (`recorded_by`),
+  KEY `entries_witness` (`witness_id`),
+  CONSTRAINT `entries_recorded_by` FOREIGN KEY (`recorded_by`) REFERENCES `users` (`id`),
+  CONSTRAINT `entries_stay` FOREIGN KEY (`stay_id`) REFERENCES `stays` (`id`),
+  CONSTRAINT `entries_supersede` FOREIGN KEY (`supersedes_id`) REFERENCES `entries` (`id`),
+  CONSTRAINT `entries_witness` FOREIGN KEY (`witness_id`) REFERENCES `users` (`id`),
+  CONSTRAINT `entries_data_is_object` CHECK (json_type(`data`) = 'OBJECT'),
+  CONSTRAINT `entries_data_is_small` CHECK (octet_length(`data`) <= 65535),
+  CONSTRAINT `entries_kind_is_a_slug` CHECK (`kind` regexp '^[a-z]([a-z0-9-]*[a-z0-9])?$'),
+  CONSTRAINT `entries_are_counted` CHECK (`number` > 0 and `version` > 0),
+  CONSTRAINT `entries_status_is_known` CHECK (`status` in ('final','retracted')),
+  CONSTRAINT `entries_retract_another` CHECK (`status` = 'final' or `supersedes_id` is not null),
+  CONSTRAINT `entries_correct_with_a_reason` CHECK (`supersedes_id` is null or `reason` is not null and char_length(trim(`reason`)) > 0),
+  CONSTRAINT `entries_have_happened` CHECK (`performed_at` <= `recorded_at` + interval 2 minute),
+  CONSTRAINT `entries_are_witnessed_by_another` CHECK (`witness_id` is null or `witness_id` <> `recorded_by`)
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
+CREATE TABLE `patients` (
+  `id` uuid NOT NULL,
+  `record_number` varchar(32) CHARACTER SET ascii COLLATE ascii_general_ci NOT NULL,
+  `family_name` varchar(80) NOT NULL,
+  `given_name` varchar(80) NOT NULL,
+  `born_on` date NOT NULL,
+  `sex` varchar(16) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  `allergies` varchar(500) DEFAULT NULL COMMENT 'null: nobody has asked; that there are none is written in words',
+  `upper_airway` varchar(16) CHARACTER SET ascii COLLATE ascii_bin NOT NULL COMMENT 'not open: after laryngectomy',
+  `ventilated` tinyint(1) NOT NULL,
+  `oxygen` varchar(120) DEFAULT NULL COMMENT 'as prescribed, in words',
+  `spo2_low` tinyint(3) unsigned DEFAULT NULL COMMENT 'prescribed target in %',
+  `spo2_high` tinyint(3) unsigned DEFAULT NULL,
+  `demo` tinyint(1) NOT NULL DEFAULT 0 COMMENT 'invented, to learn with',
+  `version` int(10) unsigned NOT NULL DEFAULT 1 COMMENT 'raised by each edit, so that two at once are noticed',
+  `created_at` datetime(3) NOT NULL DEFAULT utc_timestamp(3),
+  PRIMARY KEY (`id`),
+  UNIQUE KEY `patients_record_number` (`record_number`),
+  KEY `patients_by_name` (`family_name`,`given_name`),
+  CONSTRAINT `patients_are_named` CHECK (char_length(trim(`family_name`)) > 0 and char_length(trim(`given_name`)) > 0),
+  CONSTRAINT `patients_have_a_number` CHECK (char_length(trim(`record_number`)) > 0),
+  CONSTRAINT `patients_sex_is_known` CHECK (`sex` in ('female','male','other','not known')),
+  CONSTRAINT `patients_upper_airway_is_known` CHECK (`upper_airway` in ('open','not open','not known')),
+  CONSTRAINT `patients_spo2_target` CHECK (`spo2_low` is null and `spo2_high` is null or `spo2_low` is not null and `spo2_high` is not null and `spo2_low` between 50 and `spo2_high` and `spo2_high` <= 100)
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
+CREATE TABLE `policies` (
+  `id` uuid NOT NULL,
+  `name` varchar(120) NOT NULL,
+  `version` int(10) unsigned NOT NULL COMMENT 'from 1, for each ward and for the hospital',
+  `ward_id` uuid DEFAULT NULL COMMENT 'null: the whole hospital',
+  `reviewed_by` varchar(120) NOT NULL COMMENT 'empty: by nobody yet, so never in force',
+  `reviewed_on` date NOT NULL,
+  `starts_at` datetime(3) NOT NULL,
+  `reason` varchar(500) NOT NULL,
+  `created_by` uuid DEFAULT NULL COMMENT 'null: came with the program',
+  `created_at` datetime(3) NOT NULL DEFAULT utc_timestamp(3),
+  `setting_values` longtext CHARACTER SET utf8mb4 COLLATE utf8mb4_bin NOT NULL CHECK (json_valid(`setting_values`)),
+  `scope` char(36) CHARACTER SET ascii COLLATE ascii_bin GENERATED ALWAYS AS (coalesce(cast(`ward_id` as char charset utf8mb4),'hospital')) VIRTUAL,
+  PRIMARY KEY (`id`),
+  UNIQUE KEY `policies_version` (`scope`,`version`),
+  KEY `policies_ward` (`ward_id`),
+  KEY `policies_created_by` (`created_by`),
+  CONSTRAINT `policies_created_by` FOREIGN KEY (`created_by`) REFERENCES `users` (`id`),
+  CONSTRAINT `policies_ward` FOREIGN KEY (`ward_id`) REFERENCES `wards` (`id`),
+  CONSTRAINT `policies_have_a_reason` CHECK (char_length(trim(`reason`)) > 0),
+  CONSTRAINT `policies_values_are_an_object` CHECK (json_type(`setting_values`) = 'OBJECT')
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
+CREATE TABLE `record_changes` (
+  `id` bigint(20) unsigned NOT NULL AUTO_INCREMENT,
+  `subject` varchar(16) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  `subject_id` uuid NOT NULL,
+  `what` varchar(64) NOT NULL COMMENT 'in words: discharged, bed changed',
+  `changed_by` uuid NOT NULL,
+  `changed_at` datetime(3) NOT NULL DEFAULT utc_timestamp(3),
+  `old_values` longtext CHARACTER SET utf8mb4 COLLATE utf8mb4_bin DEFAULT NULL COMMENT 'only what changed; null: it is new' CHECK (json_valid(`old_values`)),
+  `new_values` longtext CHARACTER SET utf8mb4 COLLATE utf8mb4_bin NOT NULL CHECK (json_valid(`new_values`)),
+  PRIMARY KEY (`id`),
+  KEY `record_changes_of_subject` (`subject_id`,`id`),
+  KEY `record_changes_changed_by` (`changed_by`),
+  CONSTRAINT `record_changes_changed_by` FOREIGN KEY (`changed_by`) REFERENCES `users` (`id`),
+  CONSTRAINT `record_changes_subject_is_known` CHECK (`subject` in ('patient','stay','ward','bed'))
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
+CREATE TABLE `schema_migrations` (
+  `name` varchar(255) NOT NULL,
+  PRIMARY KEY (`name`),
+  UNIQUE KEY `name` (`name`)
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb3 COLLATE=utf8mb3_unicode_ci;
+
+CREATE TABLE `sessions` (
+  `id_hash` char(64) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  `user_id` uuid NOT NULL,
+  `started_at` datetime(3) NOT NULL,
+  `seen_at` datetime(3) NOT NULL COMMENT 'the last thing a person did, to the minute; polls do not count',
+  `ends_at` datetime(3) NOT NULL COMMENT 'the absolute end, whatever is done',
+  `ended_at` datetime(3) DEFAULT NULL COMMENT 'null: not ended by anybody, which says nothing about its limits',
+  `ended_because` varchar(32) CHARACTER SET ascii COLLATE ascii_bin DEFAULT NULL,
+  `address` varchar(45) CHARACTER SET ascii COLLATE ascii_bin DEFAULT NULL,
+  `user_agent` varchar(200) DEFAULT NULL,
+  PRIMARY KEY (`id_hash`),
+  KEY `sessions_of_user` (`user_id`,`ended_at`),
+  KEY `sessions_by_end` (`ends_at`),
+  CONSTRAINT `sessions_user` FOREIGN KEY (`user_id`) REFERENCES `users` (`id`),
+  CONSTRAINT `sessions_end_for_a_reason` CHECK (`ended_at` is null = (`ended_because` is null))
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
+CREATE TABLE `sign_in_attempts` (
+  `subject` char(64) CHARACTER SET ascii COLLATE ascii_bin NOT NULL COMMENT 'SHA-256 of an account, an address, or both',
+  `misses` int(10) unsigned NOT NULL,
+  `last_missed_at` datetime(3) NOT NULL,
+  PRIMARY KEY (`subject`),
+  KEY `sign_in_attempts_by_age` (`last_missed_at`)
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
+CREATE TABLE `stays` (
+  `id` uuid NOT NULL,
+  `patient_id` uuid NOT NULL,
+  `ward_id` uuid NOT NULL,
+  `bed_id` uuid NOT NULL COMMENT 'the last bed, once discharged',
+  `admitted_at` datetime(3) NOT NULL,
+  `discharged_at` datetime(3) DEFAULT NULL,
+  `discharge_reason` varchar(32) CHARACTER SET ascii COLLATE ascii_bin DEFAULT NULL,
+  `discharge_note` varchar(500) DEFAULT NULL,
+  `entry_count` int(10) unsigned NOT NULL DEFAULT 0 COMMENT 'the number of its last entry; set by a trigger of entries',
+  `last_entry_hash` char(64) CHARACTER SET ascii COLLATE ascii_bin NOT NULL DEFAULT '' COMMENT 'likewise',
+  `occupied_bed_id` uuid GENERATED ALWAYS AS (if(`discharged_at` is null,`bed_id`,NULL)) VIRTUAL,
+  `open_patient_id` uuid GENERATED ALWAYS AS (if(`discharged_at` is null,`patient_id`,NULL)) VIRTUAL,
+  PRIMARY KEY (`id`),
+  UNIQUE KEY `stays_one_to_a_bed` (`occupied_bed_id`),
+  UNIQUE KEY `stays_one_to_a_patient` (`open_patient_id`),
+  KEY `stays_of_ward` (`ward_id`,`discharged_at`),
+  KEY `stays_of_patient` (`patient_id`,`admitted_at`),
+  KEY `stays_bed_of_ward` (`bed_id`,`ward_id`),
+  CONSTRAINT `stays_bed_of_ward` FOREIGN KEY (`bed_id`, `ward_id`) REFERENCES `beds` (`id`, `ward_id`),
+  CONSTRAINT `stays_patient` FOREIGN KEY (`patient_id`) REFERENCES `patients` (`id`),
+  CONSTRAINT `stays_ward` FOREIGN KEY (`ward_id`) REFERENCES `wards` (`id`),
+  CONSTRAINT `stays_end_with_a_reason` CHECK (`discharged_at` is null = (`discharge_reason` is null)),
+  CONSTRAINT `stays_end_after_they_start` CHECK (`discharged_at` is null or `discharged_at` >= `admitted_at`)
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
+CREATE TABLE `users` (
+  `id` uuid NOT NULL,
+  `name` varchar(120) NOT NULL,
+  `email` varchar(254) CHARACTER SET utf8mb4 COLLATE utf8mb4_uca1400_as_ci NOT NULL,
+  `role` varchar(32) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  `password_hash` varchar(200) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  `password_set_at` datetime(3) NOT NULL,
+  `one_time_until` datetime(3) DEFAULT NULL COMMENT 'the password works once, until then; null: it is the person''s own',
+  `added_at` datetime(3) NOT NULL,
+  `added_by` uuid DEFAULT NULL,
+  `disabled_at` datetime(3) DEFAULT NULL,
+  PRIMARY KEY (`id`),
+  UNIQUE KEY `users_email` (`email`),
+  KEY `users_added_by` (`added_by`),
+  CONSTRAINT `users_added_by` FOREIGN KEY (`added_by`) REFERENCES `users` (`id`),
+  CONSTRAINT `users_role_is_known` CHECK (`role` in ('nurse','respiratory therapist','charge nurse','tracheostomy specialist','educator','administrator','observer')),
+  CONSTRAINT `users_are_named` CHECK (char_length(trim(`name`)) > 0)
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
+CREATE TABLE `wards` (
+  `id` uuid NOT NULL,
+  `name` varchar(80) NOT NULL,
+  `shift_times` longtext CHARACTER SET utf8mb4 COLLATE utf8mb4_bin NOT NULL COMMENT 'starts in local time, in order: ["07:00","15:00","23:00"]' CHECK (json_valid(`shift_times`)),
+  `pressure_unit` varchar(8) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  `retired` tinyint(1) NOT NULL DEFAULT 0,
+  PRIMARY KEY (`id`),
+  UNIQUE KEY `wards_name` (`name`),
+  CONSTRAINT `wards_are_named` CHECK (char_length(trim(`name`)) > 0),
+  CONSTRAINT `wards_pressure_unit_is_known` CHECK (`pressure_unit` in ('cmH2O','mmHg','kPa')),
+  CONSTRAINT `wards_have_shifts` CHECK (json_type(`shift_times`) = 'ARRAY' and json_length(`shift_times`) > 0)
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
+CREATE TABLE `ward_members` (
+  `user_id` uuid NOT NULL,
+  `ward_id` uuid NOT NULL,
+  `added_at` datetime(3) NOT NULL,
+  `added_by` uuid DEFAULT NULL,
+  PRIMARY KEY (`user_id`,`ward_id`),
+  KEY `ward_members_of_ward` (`ward_id`),
+  KEY `ward_members_added_by` (`added_by`),
+  CONSTRAINT `ward_members_added_by` FOREIGN KEY (`added_by`) REFERENCES `users` (`id`),
+  CONSTRAINT `ward_members_user` FOREIGN KEY (`user_id`) REFERENCES `users` (`id`),
+  CONSTRAINT `ward_members_ward` FOREIGN KEY (`ward_id`) REFERENCES `wards` (`id`)
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
+CREATE TABLE `ward_revs` (
+  `ward_id` uuid NOT NULL,
+  `rev` bigint(20) unsigned NOT NULL DEFAULT 1,
+  PRIMARY KEY (`ward_id`),
+  CONSTRAINT `ward_revs_ward` FOREIGN KEY (`ward_id`) REFERENCES `wards` (`id`)
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
+CREATE TRIGGER IF NOT EXISTS access_grants_refuse_delete BEFORE DELETE ON access_grants FOR EACH ROW
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'access_grants is append-only';
+
+CREATE TRIGGER IF NOT EXISTS access_grants_refuse_update BEFORE UPDATE ON access_grants FOR EACH ROW
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'access_grants is append-only';
+
+CREATE TRIGGER IF NOT EXISTS access_log_refuses_delete BEFORE DELETE ON access_log FOR EACH ROW
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'access_log is append-only';
+
+CREATE TRIGGER IF NOT EXISTS access_log_refuses_update BEFORE UPDATE ON access_log FOR EACH ROW
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'access_log is append-only';
+
+CREATE TRIGGER IF NOT EXISTS entries_are_numbered BEFORE INSERT ON entries FOR EACH ROW
+BEGIN
+  DECLARE counted INT UNSIGNED;
+  DECLARE ended DATETIME(3);
+  DECLARE head CHAR(64) CHARACTER SET ascii;
+  SELECT entry_count + 1, discharged_at, last_entry_hash INTO counted, ended, head
+    FROM stays WHERE id = NEW.stay_id FOR UPDATE;
+  IF counted IS NULL THEN
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'entries belong to a stay';
+  END IF;
+  IF NEW.performed_at > ended THEN
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'entries are performed within their stay';
+  END IF;
+  IF NEW.supersedes_id IS NOT NULL AND NOT EXISTS (SELECT 1 FROM entries
+    WHERE id = NEW.supersedes_id AND stay_id = NEW.stay_id AND kind = NEW.kind LOCK IN SHARE MODE) THEN
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'entries supersede one of the same stay and kind';
+  END IF;
+  SET NEW.number = counted, NEW.hash = SHA2(CONCAT_WS('\n', head, NEW.id, NEW.stay_id, counted, NEW.kind, NEW.version, NEW.performed_at,
+    NEW.recorded_at, NEW.recorded_by, NEW.recorded_role, COALESCE(CAST(NEW.witness_id AS CHAR), '-'),
+    COALESCE(CAST(NEW.supersedes_id AS CHAR), '-'), NEW.status, COALESCE(JSON_QUOTE(NEW.reason), '-'), NEW.data), 256);
+  UPDATE stays SET entry_count = counted, last_entry_hash = NEW.hash WHERE id = NEW.stay_id;
+END;
+
+CREATE TRIGGER IF NOT EXISTS entries_raise_the_ward AFTER INSERT ON entries FOR EACH ROW
+  INSERT INTO ward_revs (ward_id) SELECT ward_id FROM stays WHERE id = NEW.stay_id FOR UPDATE
+    ON DUPLICATE KEY UPDATE rev = rev + 1;
+
+CREATE TRIGGER IF NOT EXISTS entries_refuse_delete BEFORE DELETE ON entries FOR EACH ROW
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'entries is append-only: correct or retract with a new entry';
+
+CREATE TRIGGER IF NOT EXISTS entries_refuse_update BEFORE UPDATE ON entries FOR EACH ROW
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'entries is append-only: correct or retract with a new entry';
+
+CREATE TRIGGER IF NOT EXISTS policies_refuse_delete BEFORE DELETE ON policies FOR EACH ROW
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'policies is append-only: a change is a new version';
+
+CREATE TRIGGER IF NOT EXISTS policies_refuse_update BEFORE UPDATE ON policies FOR EACH ROW
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'policies is append-only: a change is a new version';
+
+CREATE TRIGGER IF NOT EXISTS record_changes_refuse_delete BEFORE DELETE ON record_changes FOR EACH ROW
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'record_changes is append-only';
+
+CREATE TRIGGER IF NOT EXISTS record_changes_refuse_update BEFORE UPDATE ON record_changes FOR EACH ROW
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'record_changes is append-only';
