@@ -12,6 +12,7 @@ import { policies } from './0014-policies.ts'
 import { recordChanges } from './0015-record-changes.ts'
 import { accessGrants } from './0020-access-grants.ts'
 import { drafts } from './0021-drafts.ts'
+import { installation } from './0030-installation.ts'
 import type { Migration } from './migration.ts'
 
 /** Every migration under its name, in the order in which they are applied. */
@@ -30,4 +31,5 @@ export const migrations: Record<string, Migration> = {
   '0015-record-changes': recordChanges,
   '0020-access-grants': accessGrants,
   '0021-drafts': drafts,
+  '0030-installation': installation,
 }

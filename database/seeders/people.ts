@@ -6,9 +6,6 @@ import { idAt, randomFrom } from './random.ts'
 import type { DemoBed, DemoPerson } from './rows.ts'
 import type { WardName, WardWithBeds } from './wards.ts'
 
-/** Opens every demo account. It is printed on the sign-in page for as long as the demo hospital is loaded. */
-export const demoPassphrase = 'kettle lantern orchard rain'
-
 type Plan = readonly [name: string, role: Role, ...wards: WardName[]]
 
 const plans: readonly Plan[] = [

@@ -1,0 +1,92 @@
+import type { DemoEntry, DemoHospital, DemoPatient, DemoPolicy } from './rows.ts'
+
+/** Rows of one table by the names of its columns. */
+export interface TableRows {
+  readonly table: string
+  readonly rows: readonly Readonly<Record<string, string | number | boolean | Date | null>>[]
+}
+
+/** The demo hospital table by table, each after those that it refers to. */
+export function demoTables(hospital: DemoHospital, passwordHash: string): readonly TableRows[] {
+  const { wards, patients, policies, entries } = hospital
+  return [
+    ...peopleTables(hospital, passwordHash),
+    { table: 'ward_revs', rows: wards.map(({ id }) => ({ ward_id: id })) },
+    { table: 'patients', rows: patients.map(patientRow) },
+    ...stayTables(hospital),
+    { table: 'policies', rows: policies.map(policyRow) },
+    { table: 'entries', rows: entries.map(entryRow) },
+  ]
+}
+
+function peopleTables({ people, wards, beds, seededAt }: DemoHospital, passwordHash: string): readonly TableRows[] {
+  const wardRows = wards.map(({ id, name, shiftTimes, pressureUnit }) => {
+    return { id, name, shift_times: JSON.stringify(shiftTimes), pressure_unit: pressureUnit }
+  })
+  const users = people.map(({ id, name, email, role, addedAt }) => {
+    return { id, name, email, role, password_hash: passwordHash, password_set_at: seededAt, added_at: addedAt }
+  })
+  const members = people.flatMap(({ id, wardIds, addedAt }) =>
+    wardIds.map(wardId => ({ user_id: id, ward_id: wardId, added_at: addedAt })),
+  )
+  const bedRows = beds.map(({ id, wardId, label, position }) => ({ id, ward_id: wardId, label, position }))
+  return [
+    { table: 'wards', rows: wardRows },
+    { table: 'beds', rows: bedRows },
+    { table: 'users', rows: users },
+    { table: 'ward_members', rows: members },
+  ]
+}
+
+function patientRow(patient: DemoPatient) {
+  const { id, recordNumber, familyName, givenName, bornOn, sex, allergies, oxygen } = patient
+  const names = { record_number: recordNumber, family_name: familyName, given_name: givenName }
+  const airway = { upper_airway: patient.upperAirway, ventilated: patient.ventilated, oxygen }
+  const target = { spo2_low: patient.spo2Low, spo2_high: patient.spo2High }
+  return { id, ...names, born_on: bornOn, sex, allergies, ...airway, ...target, demo: true }
+}
+
+function stayTables({ stays, moves }: DemoHospital): readonly TableRows[] {
+  return [
+    {
+      table: 'stays',
+      rows: stays.map(stay => ({
+        id: stay.id,
+        patient_id: stay.patientId,
+        ward_id: stay.wardId,
+        bed_id: stay.bedId,
+        admitted_at: stay.admittedAt,
+        discharged_at: stay.dischargedAt,
+        discharge_reason: stay.dischargeReason,
+        discharge_note: stay.dischargeNote,
+      })),
+    },
+    {
+      table: 'bed_moves',
+      rows: moves.map(move => ({
+        id: move.id,
+        stay_id: move.stayId,
+        ward_id: move.wardId,
+        bed_id: move.bedId,
+        moved_at: move.movedAt,
+        recorded_at: move.movedAt,
+        recorded_by: move.recordedBy,
+      })),
+    },
+  ]
+}
+
+function policyRow(policy: DemoPolicy) {
+  const { id, name, version, wardId, reviewedBy, reviewedOn, startsAt, reason, createdBy, values } = policy
+  const review = { reviewed_by: reviewedBy, reviewed_on: reviewedOn, starts_at: startsAt, reason }
+  const made = { created_by: createdBy, created_at: startsAt }
+  return { id, name, version, ward_id: wardId, ...review, ...made, setting_values: JSON.stringify(values) }
+}
+
+function entryRow(entry: DemoEntry) {
+  const { id, kind, version, reason, status } = entry
+  const times = { performed_at: entry.performedAt, recorded_at: entry.recordedAt }
+  const people = { recorded_by: entry.recordedById, recorded_role: entry.recordedRole, witness_id: entry.witnessId }
+  const rest = { supersedes_id: entry.supersedesId, reason, status, data: JSON.stringify(entry.raw) }
+  return { id, stay_id: entry.stayId, kind, version, ...times, ...people, ...rest }
+}
