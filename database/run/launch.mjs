@@ -3,7 +3,8 @@ import { mkdirSync } from 'node:fs'
 import { dependencies } from './dependencies.mjs'
 import { runningMariadb, startMariadb, stopMariadb } from './mariadb.mjs'
 import { freePort } from './processes.mjs'
-import { sessionSecret, settings as settingsFrom } from './settings.mjs'
+import { servedDatabase } from './served-database.mjs'
+import { settings as settingsFrom } from './settings.mjs'
 import { endAsked, step } from './steps.mjs'
 import { ROOT, resolved, tool } from './tool.mjs'
 
@@ -31,14 +32,13 @@ export async function launch(way) {
     await addressIsFree(settings)
     mkdirSync(settings.folder, { recursive: true, mode: 0o711 })
     await step('Packages', async () => [await dependencies(end), null])
-    const database = await databaseOf(settings, end)
+    const database = await step('MariaDB', async () => {
+      const served = await servedDatabase(settings)
+      return [served.says, served]
+    })
     if (database.held) held = settings.folder
-    const env = {
-      ...settings.env,
-      ...database.env,
-      SESSION_SECRET: sessionSecret(process.env, settings),
-      NODE_ENV: way.mode,
-    }
+    end.throwIfAborted()
+    const env = { ...database.env, NODE_ENV: way.mode }
     await schemaAndDemo(settings, env, end)
     await way.before?.(end)
     process.exitCode = await served(way, settings, env, end, held)
@@ -56,25 +56,6 @@ export async function launch(way) {
 async function addressIsFree({ port, host }) {
   if (port === 0 || (await freePort(port, host))) return
   throw new Error(`Port ${port} is in use. Stop what uses it, or choose another: PORT=${port + 1} npm start`)
-}
-
-/**
- * @param {import('./settings.mjs').Settings} settings
- * @param {AbortSignal} end
- */
-async function databaseOf({ folder, databaseUrl }, end) {
-  if (databaseUrl) {
-    const ownerUrl = process.env.DATABASE_OWNER_URL || databaseUrl
-    return { held: false, env: { DATABASE_URL: databaseUrl, DATABASE_OWNER_URL: ownerUrl } }
-  }
-  const server = await step('MariaDB', async () => {
-    const started = await startMariadb({ folder, hold: true })
-    const says = `${started.held ? 'runs' : 'was running'} on 127.0.0.1:${started.port}, data in ${folder}`
-    return [started.note ? `${says}, ${started.note}` : says, started]
-  })
-  if (end.aborted && server.held) await stopMariadb(folder)
-  end.throwIfAborted()
-  return { held: server.held, env: { DATABASE_URL: server.url('app'), DATABASE_OWNER_URL: server.url('owner') } }
 }
 
 /**
