@@ -10,8 +10,8 @@ const REASON_LENGTH = 500 // characters that the record keeps of a reason
 
 const lost = 'This form has lost a part of itself. Open it again, and copy what you typed.'
 
-/** What every chart form carries beside the care itself. */
-const spine = {
+/** What a form carries that is sent once and says when something was done. */
+export const momentFields = {
   /** Minted when the form was opened: the same id twice is the same act. */
   id: z.uuid(lost),
   /** Whose form it is: it is refused when somebody else is signed in by the time it is sent. */
@@ -25,6 +25,11 @@ const spine = {
     .regex(/^([01]\d|2[0-3]):[0-5]\d$/, 'Enter the time as hours and minutes, such as 14:06')
     .optional(),
   occurrence: z.enum(['first', 'second'], 'Choose the first or the second').optional(),
+}
+
+/** What every chart form carries beside the care itself. */
+const spine = {
+  ...momentFields,
   /** Why it is written down so late, or why an entry is corrected. */
   reason: z
     .string('Enter one reason')
