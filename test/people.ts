@@ -67,9 +67,9 @@ export async function aPerson({ name = 'Ngozi Adeyemi', role = 'nurse', wardIds 
 }
 
 /** A request's context in which this person is signed in; without one, nobody is. */
-export function contextOf(user: CurrentUser | null = null): RouterContextProvider {
+export function contextOf(user: CurrentUser | null = null, address = '203.0.113.7'): RouterContextProvider {
   const context = new RouterContextProvider()
-  context.set(requestContext, { address: '203.0.113.7', requestId: 'request-1', nonce: undefined, logged: {} })
+  context.set(requestContext, { address, requestId: 'request-1', nonce: undefined, logged: {} })
   if (user === null) return context
   const wards = user.wardIds.map(id => ({ id, name: 'Ward 7', rev: 1 }))
   const endsAt = new Date('2026-12-01T19:00:00.000Z')
@@ -90,4 +90,25 @@ export function formRequest(path: string, fields: Record<string, string>, cookie
     body: new URLSearchParams(fields),
     headers: { Origin: site, ...(cookie === undefined ? {} : { Cookie: cookie }) },
   })
+}
+
+/** What came of a loader, an action or a gate: what it returned or threw, with the status and the way on beside it. */
+export async function answerOf<T extends object>(
+  work: () => Promise<T> | T,
+): Promise<Partial<T> & { status?: number; location?: string | null; says?: unknown }> {
+  try {
+    return describedAnswer(await work())
+  } catch (thrown) {
+    if (typeof thrown !== 'object' || thrown === null || thrown instanceof Error) throw thrown
+    return describedAnswer(thrown)
+  }
+}
+
+function describedAnswer(answer: object) {
+  if (answer instanceof Response) return { status: answer.status, location: answer.headers.get('Location') }
+  if ('init' in answer && 'data' in answer) {
+    const { init, data } = answer as { init: ResponseInit | null; data: unknown }
+    return { status: init?.status ?? 200, says: data }
+  }
+  return answer
 }
