@@ -19,6 +19,10 @@ export default [
     route('wards/:wardId/board', 'routes/board.tsx'),
 
     // patients
+    route('patients/:patientId', 'routes/patient.tsx', [
+      index('routes/timeline.tsx'),
+      route('chart/:kind', 'routes/chart.tsx'),
+    ]),
 
     // people and rules
     route('account', 'routes/account.tsx'),

@@ -30,16 +30,16 @@ const AHEAD_MINUTES = 2
  * A time that the clocks show twice is asked about; one that they jump past is refused.
  */
 export function performedAt(spine: ChartSpine, calendar: Calendar): PerformedAt {
-  const moment = spine.when === 'other' ? otherTime(spine, calendar.zone) : shownMoment(spine)
+  const moment = spine.when === 'other' ? otherTime(spine, calendar.zone) : stated(statedMoment(spine))
   if (!moment.ok) return moment
   return withinStay(moment.at, calendar, spine.when === 'other' ? 'time' : 'when')
 }
 
 const minutesAgo = { now: 0, '10 min ago': 10, '30 min ago': 30, other: 0 } as const
 
-function shownMoment({ when, at }: ChartSpine): PerformedAt {
-  const shown = wholeMinute(new Date(at))
-  return { ok: true, at: earlier(shown, minutes(minutesAgo[when])) }
+/** The moment (UTC, whole minute) that "now" or "10 min ago" stood for on the form. */
+export function statedMoment({ when, at }: ChartSpine): Date {
+  return earlier(wholeMinute(new Date(at)), minutes(minutesAgo[when]))
 }
 
 function otherTime({ day, time, occurrence }: ChartSpine, zone: Zone): PerformedAt {
@@ -76,6 +76,7 @@ function withinStay(at: Date, { zone, now, beganAt, endedAt }: Calendar, field: 
   return { ok: true, at: at < beganAt ? beganAt : at }
 }
 
+const stated = (at: Date) => ({ ok: true, at }) as const
 const wrong = (field: string, message: string) => ({ ok: false, field, message }) as const
 
 /** An instant with its seconds cut, as a wall clock shows it. */

@@ -61,11 +61,33 @@ export function contextOfAct(
   at: Date,
   before?: StoredEntry,
 ): CareContext | null {
+  const { entries } = care.record
+  if (!before) return contextAfter(entries, care, policies, at)
+  const known = entries.filter(({ number }) => number < before.number)
+  return contextAfter(known, care, policies, at, before.supersedesId)
+}
+
+/** The same for an act that takes the place of an entry: that one no longer counts. */
+export function contextOfCorrection(
+  care: PatientCare,
+  policies: readonly Policy[],
+  at: Date,
+  entryId: string,
+): CareContext | null {
+  return contextAfter(care.record.entries, care, policies, at, entryId)
+}
+
+function contextAfter(
+  known: readonly StoredEntry[],
+  care: PatientCare,
+  policies: readonly Policy[],
+  at: Date,
+  without: string | null = null,
+): CareContext | null {
   const policy = policyAt(policies, care, at)
   if (!policy) return null
-  const { stay, patient, entries } = care.record
-  const known = before ? entries.filter(entry => entry.number < before.number) : entries
-  const done = effectiveEntries(known).filter(entry => entry.performedAt <= at && entry.id !== before?.supersedesId)
+  const { stay, patient } = care.record
+  const done = effectiveEntries(known).filter(({ performedAt, id }) => performedAt <= at && id !== without)
   const record = patientRecord(done, { admittedAt: stay.admittedAt, patient })
   return careContext({ record, policy, ward: care.ward, now: at })
 }

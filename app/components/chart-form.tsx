@@ -1,0 +1,158 @@
+import { type FormEvent, type ReactNode, useEffect, useRef, useState } from 'react'
+import { Form, useNavigation } from 'react-router'
+import { fieldsOf } from '#app/care/field.ts'
+import type { AnyCareKind, Gauge } from '#app/care/kind.ts'
+import type { FormErrors } from '#app/charting/assess.ts'
+import type { ChartAnswer, FormSigner } from '#app/charting/chart-answer.ts'
+import type { Typed } from '#app/charting/chart-form.ts'
+import type { Calendar } from '#app/charting/performed-at.ts'
+import type { LiveSentence } from '#app/charting/sentence.ts'
+import { Button } from './button.tsx'
+import { CareFields } from './care-fields.tsx'
+import { ChartErrors, fieldId } from './chart-errors.tsx'
+import { ChartFoot } from './chart-foot.tsx'
+import { useChartLive } from './chart-live.ts'
+import type { DrawnField } from './conform-fields.ts'
+import { fillForm } from './fill-form.ts'
+import { FinalBar } from './final-bar.tsx'
+import { useHydrated } from './hydrated.ts'
+import { Warnings } from './warnings.tsx'
+
+export interface ChartFormProps {
+  readonly kind: AnyCareKind
+  readonly view: {
+    readonly id: string
+    readonly signer: FormSigner
+    readonly calendar: Calendar
+    readonly typed: Typed
+    readonly gauges: readonly Gauge[]
+    readonly lists: Readonly<Record<'task' | 'setting', Readonly<Record<string, string>>>>
+    readonly units: Readonly<Record<string, string>>
+    readonly witnesses: Readonly<Record<string, string>>
+    readonly daysBack: number
+  }
+  readonly answer: ChartAnswer | undefined
+  readonly words: string
+  readonly cancelHref: string
+  /** When a late entry needs its reason; absent for a correction, which always has one. */
+  readonly reasonAfterHours?: number
+  /** Above the questions; is handed what fills the form with answers. */
+  readonly children?: (fill: (answers: Typed) => void) => ReactNode
+}
+
+/** The form of any kind of care: its questions, when it was done, what it asks people to notice, and the sentence it becomes. */
+export function ChartForm({ kind, view, answer, words, cancelHref, reasonAfterHours, children }: ChartFormProps) {
+  const form = useRef<HTMLFormElement>(null)
+  const kept = answer && 'typed' in answer ? answer : view
+  const { typed, id, signer } = kept
+  const { errors, noteChange } = useErrors(answer)
+  const openedAt = momentOf(typed.at?.[0]) ?? view.calendar.now.getTime()
+  const live = useChartLive({ kind, signer, calendar: view.calendar, openedAt }, form)
+  useKeyboardFocus(form, answer === undefined && kind)
+  const reviewed = answer?.is === 'reviewed' ? answer : undefined
+  return (
+    <Form
+      ref={form}
+      method="post"
+      noValidate
+      onInput={event => {
+        noteChange(event)
+        live.onInput(event)
+      }}
+      onSubmit={live.onSubmit}
+    >
+      <input type="hidden" name="id" value={id} />
+      <input type="hidden" name="openedBy" value={signer.id} />
+      <input type="hidden" name="at" value={new Date(live.shownAt).toISOString()} />
+      <div className="grid gap-5 px-4 md:px-6">
+        <ChartErrors kind={kind} answer={answer} />
+        {children?.(answers => form.current && fillForm(form.current, answers))}
+        <CareFields
+          fields={drawn(kind, typed, errors)}
+          gauges={view.gauges}
+          lists={view.lists}
+          units={view.units}
+          notices={
+            <div aria-live="polite">
+              <Warnings warnings={(live.sentence ? live.warnings : reviewed?.warnings) ?? []} />
+            </div>
+          }
+        />
+        <ChartFoot
+          {...{ typed, errors, reasonAfterHours }}
+          shownAt={live.shownAt}
+          zone={view.calendar.zone}
+          asks={answer?.is === 'refused' && answer.asks}
+          daysBack={view.daysBack}
+          witnesses={view.witnesses}
+        />
+      </div>
+      <Foot {...{ words, cancelHref, signer }} live={live.sentence} reviewed={reviewed?.sentence} />
+    </Form>
+  )
+}
+
+interface FootProps {
+  readonly words: string
+  readonly cancelHref: string
+  readonly signer: FormSigner
+  readonly live: LiveSentence | null
+  readonly reviewed: string | undefined
+}
+
+function Foot({ words, cancelHref, signer, live, reviewed }: FootProps) {
+  const isBusy = useNavigation().formMethod === 'POST'
+  const isHydrated = useHydrated()
+  const sentence = live?.ready ? live.says : live ? null : (reviewed ?? null)
+  const missing = live && !live.ready ? missingWords(live) : `Signed by ${signer.name}, ${signer.role}.`
+  return (
+    <FinalBar {...{ sentence, missing, words, cancelHref }} busy={isBusy}>
+      {/* The first button of a form is the one that Enter presses, so it is gone where it is not needed. */}
+      {!isHydrated && (
+        <Button name="intent" value="review" size={56} className="hidden unscripted:inline-flex">
+          Check first
+        </Button>
+      )}
+    </FinalBar>
+  )
+}
+
+function missingWords({ needed, wrong }: LiveSentence & { ready: false }): string {
+  if (wrong !== undefined) return `${wrong}.`.replace(/\.\.$/, '.')
+  return `Still needed: ${needed.join(', ')}.`
+}
+
+/** Mistakes by field, each until its field is changed. */
+function useErrors(answer: ChartAnswer | undefined) {
+  const [changed, setChanged] = useState<{ readonly since: unknown; readonly names: readonly string[] }>()
+  const names = changed?.since === answer ? (changed?.names ?? []) : []
+  const all: FormErrors = answer?.is === 'refused' ? answer.errors : {}
+  const errors: FormErrors = Object.fromEntries(Object.entries(all).filter(([name]) => !names.includes(name)))
+  const noteChange = ({ target }: FormEvent<HTMLFormElement>) => {
+    const name = target instanceof Element ? target.getAttribute('name') : null
+    if (name !== null && errors[name]) setChanged({ since: answer, names: [...names, name] })
+  }
+  return { errors, noteChange }
+}
+
+/** The large number is ready to be typed where there is a keyboard; a finger chooses for itself, and sees the page first. */
+function useKeyboardFocus(form: { readonly current: HTMLFormElement | null }, kind: AnyCareKind | false): void {
+  useEffect(() => {
+    const [first] = kind ? fieldsOf(kind.schema) : []
+    if (first?.meta.control !== 'quantity' || !first.meta.large) return
+    if (!window.matchMedia('(hover: hover) and (pointer: fine)').matches) return
+    form.current?.querySelector<HTMLInputElement>(`#${fieldId(`care.${first.name}`)}`)?.focus()
+  }, [form, kind])
+}
+
+function drawn(kind: AnyCareKind, typed: Typed, errors: FormErrors): readonly DrawnField[] {
+  return fieldsOf(kind.schema).map(field => {
+    const fullName = `care.${field.name}`
+    return { ...field, id: fieldId(fullName), fullName, answers: typed[fullName] ?? [], errors: errors[fullName] }
+  })
+}
+
+function momentOf(text: string | undefined): number | undefined {
+  const ms = text === undefined ? Number.NaN : Date.parse(text)
+  return Number.isNaN(ms) ? undefined : ms
+}

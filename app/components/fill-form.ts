@@ -1,0 +1,19 @@
+import type { Typed } from '#app/charting/chart-form.ts'
+import { typeInto } from './type-into.ts'
+
+/** Answers a form as if somebody had tapped and typed; what is already answered otherwise is answered anew. */
+export function fillForm(form: HTMLFormElement, answers: Typed): void {
+  for (const element of form.elements) {
+    if (!(element instanceof HTMLInputElement)) continue
+    const values = answers[element.name]
+    if (!values) continue
+    if (element.type === 'radio' || element.type === 'checkbox') tap(element, values.includes(element.value))
+    else typeInto(element, values[0] ?? '')
+  }
+}
+
+function tap(box: HTMLInputElement, isChosen: boolean): void {
+  if (box.checked === isChosen) return
+  box.checked = isChosen
+  box.dispatchEvent(new Event('input', { bubbles: true }))
+}

@@ -1,0 +1,86 @@
+import { data, redirect } from 'react-router'
+import { patientContext, patientGate } from '#app/auth/patient-access.server.ts'
+import { signedIn } from '#app/auth/signed-in.server.ts'
+import { traceOf } from '#app/auth/trace.server.ts'
+import { findKind } from '#app/care/kinds.ts'
+import { ChartForm } from '#app/components/chart-form.tsx'
+import { ChartHead, UsualAct } from '#app/components/chart-head.tsx'
+import { answerOrKept } from '#app/components/kept-form.ts'
+import { chartForm } from '#app/views/chart-form.server.ts'
+import { checked, refusedByRecord, sentForm } from '#app/views/chart-submission.server.ts'
+import { patientCare } from '#app/views/patient-context.server.ts'
+import { addEntry } from '#database/entries.server.ts'
+import type { Route } from './+types/chart.ts'
+
+function kindOr404(slug: string) {
+  const kind = findKind(slug)
+  if (!kind) throw data('There is no such kind of care.', 404)
+  return kind
+}
+
+export const meta: Route.MetaFunction = ({ params }) => [{ title: `${findKind(params.kind)?.title} | Cannulary` }]
+
+export async function loader({ params, context, request, url }: Route.LoaderArgs) {
+  const user = signedIn(context)
+  const kind = kindOr404(params.kind)
+  await patientGate(user, params.patientId, askOf({ kind, context, request, url }))
+  const now = new Date()
+  const care = await patientCare(context.get(patientContext).stayId, now)
+  return chartForm(kind, { care, user, url, now })
+}
+
+export async function action({ params, context, request, url }: Route.ActionArgs) {
+  const user = signedIn(context)
+  const kind = kindOr404(params.kind)
+  const { stayId } = await patientGate(user, params.patientId, askOf({ kind, context, request, url }))
+  const now = new Date()
+  const sent = { kind, user, now, form: await sentForm(request), care: await patientCare(stayId, now) }
+  const check = await checked(sent)
+  if (!check.ok) return data(check.answer, check.status)
+  const { id, performedAt, witnessId, reason, care } = check.chart
+  const charting = await addEntry({ id, kind, stayId, performedAt, recordedBy: user, witnessId, reason, data: care })
+  if (charting.outcome === 'charted' || charting.outcome === 'already charted') {
+    return redirect(`/patients/${params.patientId}?charted=${charting.entry.id}`)
+  }
+  const { answer, status } = refusedByRecord(sent, charting)
+  return data(answer, status)
+}
+
+export const clientAction = ({ serverAction }: Route.ClientActionArgs) => answerOrKept(serverAction)
+
+type Asking = Pick<Route.ActionArgs, 'context' | 'request' | 'url'> & { readonly kind: ReturnType<typeof kindOr404> }
+
+function askOf({ kind, ...arrived }: Asking) {
+  const { pathname, search } = arrived.url
+  return { path: pathname + search, act: kind.act ?? 'chart care', by: traceOf(arrived) } as const
+}
+
+/** The form of every kind of care. */
+export default function Chart({ loaderData: view, actionData, params }: Route.ComponentProps) {
+  const kind = findKind(view.kind)
+  if (!kind) return null
+  return (
+    <div className="mx-auto max-w-5xl pt-5">
+      <ChartHead
+        title={kind.title}
+        due={view.due}
+        recently={view.recently}
+        warnings={view.warnings}
+        isRestored={view.isRestored}
+      />
+      <ChartForm
+        key={view.kind}
+        kind={kind}
+        view={view}
+        answer={actionData}
+        words={kind.chartWords}
+        cancelHref={`/patients/${params.patientId}`}
+        reasonAfterHours={view.reasonAfterHours}
+      >
+        {fill =>
+          view.usual && <UsualAct words={view.usual.words} onFill={() => view.usual && fill(view.usual.answers)} />
+        }
+      </ChartForm>
+    </div>
+  )
+}

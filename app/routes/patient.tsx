@@ -1,0 +1,31 @@
+import { Outlet } from 'react-router'
+import { patientContext, patientOnly } from '#app/auth/patient-access.server.ts'
+import { PatientBanner } from '#app/components/patient-banner.tsx'
+import { patientHead } from '#app/views/patient-care.server.ts'
+import { patientCare } from '#app/views/patient-context.server.ts'
+import type { Route } from './+types/patient.ts'
+
+export const middleware: Route.MiddlewareFunction[] = [patientOnly]
+
+export async function loader({ context }: Route.LoaderArgs) {
+  const { stayId, via } = context.get(patientContext)
+  const now = new Date()
+  return { ...patientHead(await patientCare(stayId, now), now), via }
+}
+
+/** Every page of a patient stands under who they are. */
+export default function Patient({ loaderData: { banner, discharged, via } }: Route.ComponentProps) {
+  return (
+    <>
+      <PatientBanner patient={banner}>
+        {discharged && <p className="mt-2 font-semibold">{discharged} Earlier care stays readable.</p>}
+        {via === 'grant' && (
+          <p className="mt-2 rounded-control border border-late bg-late-tint px-3 py-1.5 font-semibold text-late">
+            Another ward’s patient, open to you for the reason you gave. This is logged and shown to their charge nurse.
+          </p>
+        )}
+      </PatientBanner>
+      <Outlet />
+    </>
+  )
+}
