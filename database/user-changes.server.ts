@@ -56,12 +56,13 @@ export async function changePerson(id: string, details: PersonDetails, by: Trace
   const { wardIds, ...columns } = details
   await withOwnEmail(() =>
     transact(async transaction => {
-      const before = await lockedUser(id, transaction)
+      const user = await lockedUser(id, transaction)
+      const hasNewRole = user.role !== columns.role
       if (columns.role !== 'administrator') await keepAnAdministrator(id, transaction)
-      await before.update(columns, { transaction })
+      await user.update(columns, { transaction })
       await WardMemberRow.destroy({ where: { userId: id }, transaction })
       await addToWards(id, wardIds, by.actor?.id ?? null, await databaseNow(transaction), transaction)
-      if (before.previous('role') !== columns.role) await endSessionsOf(id, 'account changed', transaction)
+      if (hasNewRole) await endSessionsOf(id, 'account changed', transaction)
       await logAccess(aboutPerson('changed person', id, by), transaction)
     }),
   )
