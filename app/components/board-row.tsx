@@ -40,8 +40,7 @@ export interface BoardPatient {
 const SHOWN = 3
 
 /** Beds, people, tubes, strips and next care, in these columns on a desk and one below the other on a phone. */
-const COLUMNS =
-  'md:grid-cols-[4rem_minmax(0,1fr)_minmax(0,1fr)] lg:grid-cols-[3.5rem_10.5rem_10.5rem_minmax(0,1fr)_17rem] xl:grid-cols-[4rem_12rem_11.5rem_minmax(0,1fr)_20rem]'
+const COLUMNS = 'md:grid-cols-[4rem_minmax(0,1fr)_minmax(0,1fr)] xl:grid-cols-[4rem_12rem_11.5rem_minmax(0,1fr)_20rem]'
 
 interface BoardHeadProps {
   /** The axis of the strips. */
@@ -53,13 +52,13 @@ export function BoardHead({ children }: BoardHeadProps) {
   return (
     <div
       aria-hidden="true"
-      className={`items-end gap-x-5 border-b border-line px-4 py-2 pl-5 text-sm font-semibold text-ink3 lg:grid lg:px-5 ${COLUMNS}`}
+      className={`items-end gap-x-5 border-b border-line px-4 py-2 pl-5 text-sm font-semibold text-ink3 xl:grid xl:px-5 ${COLUMNS}`}
     >
-      <span className="max-lg:hidden">Bed</span>
-      <span className="max-lg:hidden">Patient</span>
-      <span className="max-lg:hidden">Tube</span>
+      <span className="max-xl:hidden">Bed</span>
+      <span className="max-xl:hidden">Patient</span>
+      <span className="max-xl:hidden">Tube</span>
       <div>{children}</div>
-      <span className="max-lg:hidden">Next care</span>
+      <span className="max-xl:hidden">Next care</span>
     </div>
   )
 }
@@ -77,14 +76,17 @@ export function BoardRow({ patient, changed = false, children }: BoardRowProps) 
   const { href, bed, family, given, age, recordNo, tube, next, worst, warnings = 0 } = patient
   return (
     <li
-      className={`relative grid grid-cols-[3.5rem_minmax(0,1fr)] items-center gap-x-4 gap-y-3 border-t border-hair px-4 py-3 pl-5 first:border-0 lg:gap-x-5 lg:px-5 lg:py-2 ${COLUMNS} ${edgeOf[worst]} ${changed ? 'row-fade' : ''}`}
+      className={`relative grid grid-cols-[3.5rem_minmax(0,1fr)] items-center gap-x-4 gap-y-3 border-t border-hair px-4 py-3 pl-5 first:border-0 xl:gap-x-5 xl:px-5 xl:py-2 ${COLUMNS} ${edgeOf[worst]} ${changed ? 'row-fade' : ''}`}
     >
       <span className="text-2xl font-bold tracking-tight">
         <span className="sr-only">Bed </span>
         {bed}
       </span>
       <div className="min-w-0">
-        <Link to={href} className="inline-block min-h-6 text-lg leading-tight font-semibold hover:underline">
+        <Link
+          to={href}
+          className="inline-block min-h-6 max-w-full text-lg leading-tight font-semibold [overflow-wrap:anywhere] hover:underline"
+        >
           {`${family.toUpperCase()}, ${given}`}
         </Link>
         <p className="text-sm text-ink2">
@@ -96,7 +98,7 @@ export function BoardRow({ patient, changed = false, children }: BoardRowProps) 
         <p className="text-sm font-semibold">{tube ? tube.says : 'No tube charted'}</p>
         {tube && <DwellBar day={tube.day} limit={tube.limit} status={tube.status} />}
       </div>
-      <div className="min-w-0 max-lg:col-span-full">{children}</div>
+      <div className="min-w-0 max-xl:col-span-full">{children}</div>
       <NextCareList next={next} />
     </li>
   )
@@ -109,9 +111,9 @@ interface NextCareListProps {
 function NextCareList({ next }: NextCareListProps) {
   const more = next.length - SHOWN
   return (
-    <ul aria-label="Next care" className="grid gap-1 max-lg:col-span-full">
+    <ul aria-label="Next care" className="grid gap-1 max-xl:col-span-full">
       {next.slice(0, SHOWN).map(care => (
-        <li key={care.name} className="flex items-baseline justify-between gap-3">
+        <li key={care.name} className="flex flex-wrap items-baseline justify-between gap-x-3 gap-y-0.5">
           {care.href ? (
             <Link
               to={care.href}
@@ -120,7 +122,7 @@ function NextCareList({ next }: NextCareListProps) {
               {care.title}
             </Link>
           ) : (
-            <span className="min-w-0 font-semibold">{care.title}</span>
+            <span className="min-w-0 flex-[1_1_8rem] font-semibold">{care.title}</span>
           )}
           <span className="flex-none">
             <Tag tone={toneOf[care.status]}>{care.says}</Tag>

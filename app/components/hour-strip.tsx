@@ -16,6 +16,8 @@ export interface HourStripProps {
   /** Names the lanes on the left, and makes them taller. */
   readonly labels?: boolean
   readonly title: string
+  /** Px a lane; a wall board has tall ones. */
+  readonly laneHeight?: number
 }
 
 const AXIS_PX = 26
@@ -23,9 +25,9 @@ const BOARD_LANE_PX = 15
 const NAMED_LANE_PX = 30
 
 /** A time axis with lanes of care: what was done left of now, what will be due right of it, and lateness as a length. */
-export function HourStrip({ from, to, now, zone, width, lanes, axis, labels = false, title }: HourStripProps) {
+export function HourStrip({ from, to, now, zone, width, lanes, axis, labels = false, title, ...rest }: HourStripProps) {
   const span = { from, to }
-  const laneHeight = labels ? NAMED_LANE_PX : BOARD_LANE_PX
+  const laneHeight = labels ? NAMED_LANE_PX : (rest.laneHeight ?? BOARD_LANE_PX)
   const top = axis ? AXIS_PX : 0
   const height = top + lanes.length * laneHeight
   const ticks = gridTicks(span, zone, width)

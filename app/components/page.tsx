@@ -35,7 +35,7 @@ export function AppPage({ person, ward, now, zone, sections, theme, children }: 
           <TopSections sections={sections} />
           <div className="ml-auto flex items-center gap-3">
             {ward && (
-              <span className="hidden rounded-tag border border-line px-2 py-0.5 text-sm font-semibold lg:inline">
+              <span className="hidden rounded-tag border border-line px-2 py-0.5 text-sm font-semibold xl:inline">
                 {ward.name}
               </span>
             )}

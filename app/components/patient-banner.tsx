@@ -22,6 +22,8 @@ export interface PatientBannerView {
 
 export interface PatientBannerProps {
   readonly patient: PatientBannerView
+  /** The name is the title of the page; otherwise the content brings its own. */
+  readonly isTitle?: boolean
   /** What was entered to open a patient of another ward, and the like. */
   readonly children?: ReactNode
   /** Emergency steps, bed-head sign. */
@@ -29,23 +31,24 @@ export interface PatientBannerProps {
 }
 
 /** Whose chart this is: bed, name, birth and number first, then what everybody must know. Never shortened. */
-export function PatientBanner({ patient, actions, children }: PatientBannerProps) {
+export function PatientBanner({ patient, isTitle = false, actions, children }: PatientBannerProps) {
+  const Name = isTitle ? 'h1' : 'p'
   const { bed, family, given, sex, born, age, recordNo, allergies, laryngectomy } = patient
   return (
     <section aria-label="Patient" className="border-b border-line bg-surface px-4 py-3 md:px-6">
       {laryngectomy && <LaryngectomyMark />}
       <div className="flex flex-wrap items-center gap-x-6 gap-y-3">
-        <p className="flex items-center gap-4">
+        <div className="flex items-center gap-4">
           <span className="text-3xl font-bold tracking-tight">
             <span className="sr-only">Bed </span>
             {bed}
           </span>
-          <span>
-            <b className="block text-xl leading-tight font-bold">{`${family.toUpperCase()}, ${given}`}</b>
+          <div>
+            <Name className="text-xl leading-tight font-bold">{`${family.toUpperCase()}, ${given}`}</Name>
             <Fact label="Sex" value={sex} /> <Fact label="Born" value={`${born} (${age} y)`} />{' '}
             <Fact label="Record no." value={recordNo} />
-          </span>
-        </p>
+          </div>
+        </div>
         <dl className="flex flex-wrap gap-x-6 gap-y-2">
           <Item label="Allergies" value={allergies} />
           {!laryngectomy && <Item label="Upper airway" value={patient.upperAirway} />}

@@ -12,9 +12,9 @@ export function PlainPage({ children, wide = false }: PlainPageProps) {
   return (
     <div className="flex min-h-dvh flex-col px-4 py-6">
       <div className={`mx-auto flex w-full flex-1 flex-col ${wide ? 'max-w-3xl' : 'max-w-lg'}`}>
-        <div className="mb-6">
+        <header className="mb-6">
           <Wordmark />
-        </div>
+        </header>
         <main id="main" tabIndex={-1} className="rounded-card border border-line bg-surface p-5 outline-none sm:p-8">
           {children}
         </main>
