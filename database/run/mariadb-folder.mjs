@@ -109,18 +109,20 @@ function createDatabaseFiles(at, uid, gid) {
   rmSync(draft, { recursive: true, force: true })
   mkdirSync(draft, { mode: 0o700 })
   if (process.getuid?.() === 0) run('chown', ['-R', `${uid}:${gid}`, join(at.folder, 'mariadb')])
-  const flags = ['--no-defaults', `--datadir=${draft}`, `--tmpdir=${at.tmp}`, '--skip-test-db', '--skip-name-resolve']
-  run('mariadb-install-db', [...flags, '--auth-root-authentication-method=socket', ...at.userFlags], at.as)
+  const flags = ['--no-defaults', `--datadir=${draft}`, '--skip-test-db', '--skip-name-resolve', ...at.userFlags]
+  // The script splits its --tmpdir at a space, but not the variable.
+  const env = { ...process.env, TMPDIR: at.tmp }
+  run('mariadb-install-db', [...flags, '--auth-root-authentication-method=socket'], { ...at.as, env })
   renameSync(draft, at.data)
 }
 
 /**
  * @param {string} program
  * @param {string[]} args
- * @param {Place['as']} [as]
+ * @param {import('node:child_process').SpawnSyncOptions} [options]
  */
-function run(program, args, as = {}) {
-  const done = spawnSync(program, args, { ...as, cwd: '/', encoding: 'utf8' })
+function run(program, args, options = {}) {
+  const done = spawnSync(program, args, { ...options, cwd: '/', encoding: 'utf8' })
   if (done.status === 0) return
   const says = [done.error?.message, done.stdout, done.stderr].filter(Boolean).join('\n').trim()
   throw new Error(`${program} failed:\n${says.split('\n').slice(-12).join('\n')}`)
