@@ -1,5 +1,5 @@
 import { useEffect, useRef } from 'react'
-import { Form, useLocation } from 'react-router'
+import { Form, Link, useLocation } from 'react-router'
 import { Button } from './button.tsx'
 import { MenuSections, type SectionLink } from './page-nav.tsx'
 import { type Theme, themeNames, themes } from './theme.ts'
@@ -37,6 +37,12 @@ export function PersonMenu({ person, theme, sections }: PersonMenuProps) {
           <b className="block font-semibold">{person.name}</b>
           <span className="text-ink2">{person.role}</span>
         </p>
+        <Link
+          to="/account"
+          className="inline-flex min-h-11 items-center font-semibold text-brand underline underline-offset-3"
+        >
+          Your password and sessions
+        </Link>
         <MenuSections sections={sections} />
         <ThemeForm theme={theme} back={pathname + search} />
         <Form method="post" action="/sign-out">

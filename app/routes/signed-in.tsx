@@ -1,6 +1,8 @@
 import { Outlet, useLocation } from 'react-router'
+import { IDLE_LIMIT_MINUTES, WARNING_MINUTES } from '#app/auth/limits.ts'
 import { type Act, can } from '#app/auth/permissions.ts'
 import { ownSession, signedIn, signedInOnly } from '#app/auth/signed-in.server.ts'
+import { IdleWatch } from '#app/components/idle-watch.tsx'
 import { AppPage } from '#app/components/page.tsx'
 import { themeOf } from '#app/components/theme.ts'
 import { env } from '#app/env.server.ts'
@@ -17,12 +19,14 @@ interface Section {
 
 export function loader({ context, request }: Route.LoaderArgs) {
   const user = signedIn(context)
-  const ward = ownSession(context).wards[0] ?? null
+  const { wards, endsAt } = ownSession(context)
+  const ward = wards[0] ?? null
   const sectionsOf = (act: Act, sections: readonly Section[]) => (can(user, act) ? sections : [])
   return {
     person: { name: user.name, role: user.role },
     ward: ward && { name: ward.name },
     now: Date.now(),
+    endsAt,
     zone: env.hospitalTimeZone,
     theme: themeOf(request.headers.get('cookie')),
     sections: [
@@ -41,7 +45,7 @@ export function loader({ context, request }: Route.LoaderArgs) {
 /** Everything behind the sign-in: bar, sections, safety line. */
 export default function SignedIn({ loaderData }: Route.ComponentProps) {
   const { pathname } = useLocation()
-  const { sections, now, person, zone, theme, ward } = loaderData
+  const { sections, now, endsAt, person, zone, theme, ward } = loaderData
   return (
     <AppPage
       person={person}
@@ -52,6 +56,13 @@ export default function SignedIn({ loaderData }: Route.ComponentProps) {
       sections={sections.map(({ label, href, under }) => ({ label, href, current: pathname.startsWith(under) }))}
     >
       <Outlet />
+      <IdleWatch
+        idleMinutes={IDLE_LIMIT_MINUTES}
+        warningMinutes={WARNING_MINUTES}
+        now={new Date(now)}
+        endsAt={endsAt}
+        zone={zone}
+      />
     </AppPage>
   )
 }
