@@ -17,12 +17,20 @@ export default [
     // wards
     route('round', 'routes/round.tsx'),
     route('wards/:wardId/board', 'routes/board.tsx'),
+    route('wards/:wardId/admit', 'routes/admit.tsx'),
 
     // patients
+    route('patients', 'routes/patients.tsx'),
     route('patients/:patientId', 'routes/patient.tsx', [
       index('routes/timeline.tsx'),
       route('chart/:kind', 'routes/chart.tsx'),
+      route('details', 'routes/patient-details.tsx'),
+      route('move', 'routes/move.tsx'),
+      route('discharge', 'routes/discharge.tsx'),
     ]),
+    route('entries/:entryId', 'routes/entry.tsx'),
+    route('entries/:entryId/correct', 'routes/correct.tsx'),
+    route('entries/:entryId/retract', 'routes/retract.tsx'),
 
     // people and rules
     route('account', 'routes/account.tsx'),
@@ -30,6 +38,8 @@ export default [
     route('admin/people', 'routes/admin-people.tsx'),
     route('admin/people/new', 'routes/admin-person-new.tsx'),
     route('admin/people/:userId', 'routes/admin-person.tsx'),
+    route('admin/wards', 'routes/admin-wards.tsx'),
+    route('admin/wards/:wardId', 'routes/admin-ward.tsx'),
     route('patients/:patientId/access', 'routes/patient-access.tsx'),
     route('wards/:wardId/access', 'routes/ward-access.tsx'),
     route('policy', 'routes/policy.tsx'),

@@ -62,7 +62,8 @@ export async function chartForm(kind: AnyCareKind, opening: Opening): Promise<Ch
   const usualTyped = usual && { words: usual.words, answers: typedFrom(usual.answers) }
   const opened = {
     ...openingAnswers(kind, context, url),
-    ...(url.searchParams.get('usual') ? usualTyped?.answers : {}),
+    ...(url.searchParams.has('usual') ? usualTyped?.answers : {}),
+    ...lastMoment(care),
   }
   return {
     ...frameOf(kind, opening),
@@ -102,6 +103,11 @@ export function signerOf({ id, name, role }: CurrentUser): FormSigner {
 /** What the answer to "when" is held against. */
 export function calendarOf({ record: { stay }, ward }: PatientCare, now: Date): Calendar {
   return { zone: ward.zone, now, beganAt: stay.admittedAt, endedAt: stay.dischargedAt }
+}
+
+/** Nothing is done "now" for a patient who has left. */
+function lastMoment({ record: { stay }, ward }: PatientCare): Typed {
+  return stay.dischargedAt === null ? {} : { when: ['other'], day: [localDay(stay.dischargedAt, ward.zone)] }
 }
 
 /** Facts of the record, then what the task that was followed here already says. */

@@ -1,0 +1,75 @@
+import { data, redirect } from 'react-router'
+import { findKind } from '#app/care/kinds.ts'
+import { ChartForm } from '#app/components/chart-form.tsx'
+import { CorrectReason, EntryHead, Replaced } from '#app/components/entry-head.tsx'
+import { answerOrKept } from '#app/components/kept-form.ts'
+import { checked, refusedByRecord, sentForm } from '#app/views/chart-submission.server.ts'
+import { correctForm } from '#app/views/correct-form.server.ts'
+import { entryView } from '#app/views/entry-view.server.ts'
+import { openedEntry } from '#app/views/opened-entry.server.ts'
+import { correctEntry } from '#database/entries.server.ts'
+import type { Route } from './+types/correct.ts'
+
+function kindOr404(slug: string) {
+  const kind = findKind(slug)
+  if (!kind) throw data('This kind of care is not charted any more: its entries can be read and retracted.', 404)
+  return kind
+}
+
+export const meta: Route.MetaFunction = ({ loaderData }) => [
+  { title: `Correct ${loaderData?.entry.title ?? 'an entry'} | Cannulary` },
+]
+
+export async function loader({ params, context, request, url }: Route.LoaderArgs) {
+  const opened = await openedEntry({ params, context, request, url }, 'correct')
+  const kind = kindOr404(opened.entry.kind)
+  return { entry: await entryView(opened), form: await correctForm(kind, opened, url.pathname) }
+}
+
+export async function action({ params, context, request, url }: Route.ActionArgs) {
+  const { entry, care, user, now, patientId } = await openedEntry({ params, context, request, url }, 'correct')
+  const kind = kindOr404(entry.kind)
+  const sent = { kind, user, now, care, form: await sentForm(request), corrects: entry.id }
+  const check = await checked(sent)
+  if (!check.ok) return data(check.answer, check.status)
+  const { id, performedAt, witnessId, reason = '' } = check.chart
+  const charting = await correctEntry({
+    ...{ id, kind, performedAt, witnessId, reason, data: check.chart.care },
+    stayId: entry.stayId,
+    recordedBy: user,
+    supersedes: entry.id,
+  })
+  if (charting.outcome === 'charted' || charting.outcome === 'already charted') {
+    return redirect(`/patients/${patientId}?charted=${charting.entry.id}`)
+  }
+  const { answer, status } = refusedByRecord(sent, charting)
+  return data(answer, status)
+}
+
+export const clientAction = ({ serverAction }: Route.ClientActionArgs) => answerOrKept(serverAction)
+
+/** The form of the entry's kind, filled in with the entry; what it says now stays readable. */
+export default function Correct({ loaderData: { entry, form }, actionData }: Route.ComponentProps) {
+  const kind = findKind(form.kind)
+  if (!kind) return null
+  const typed = actionData && 'typed' in actionData ? actionData.typed : form.typed
+  const errors = actionData?.is === 'refused' ? actionData.errors : {}
+  return (
+    <EntryHead head={entry.head} title={`Correct: ${entry.title}`}>
+      {entry.replacedBy && !actionData ? (
+        <Replaced {...entry.replacedBy} />
+      ) : (
+        <ChartForm
+          key={entry.id}
+          kind={kind}
+          view={form}
+          answer={actionData}
+          words="Chart correction"
+          cancelHref={`/entries/${entry.id}`}
+        >
+          {() => <CorrectReason entry={entry} typed={typed} errors={errors} />}
+        </ChartForm>
+      )}
+    </EntryHead>
+  )
+}
