@@ -127,7 +127,8 @@ function securityHeaders({ nonce, requestId }: RequestFacts) {
     'Cross-Origin-Opener-Policy': 'same-origin',
     'Cross-Origin-Resource-Policy': 'same-origin',
     'Permissions-Policy': 'camera=(self), geolocation=(), microphone=()',
-    'Referrer-Policy': 'no-referrer',
+    // Not 'no-referrer': a form sent without scripts would say 'Origin: null', and React Router refuses that.
+    'Referrer-Policy': 'same-origin',
     'X-Content-Type-Options': 'nosniff',
     'X-Request-Id': requestId,
   }
