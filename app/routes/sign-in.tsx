@@ -11,7 +11,7 @@ import { PlainPage } from '#app/components/plain-page.tsx'
 import { TextField } from '#app/components/text-field.tsx'
 import type { Route } from './+types/sign-in.ts'
 
-export const meta: Route.MetaFunction = () => [{ title: 'Sign in · Cannulary' }]
+export const meta: Route.MetaFunction = () => [{ title: 'Sign in | Cannulary' }]
 
 export function loader({ context, url }: Route.LoaderArgs) {
   if (context.get(userContext) !== null) throw redirect(returnPath(url.searchParams.get('returnTo')))
@@ -34,7 +34,7 @@ export default function SignIn({ loaderData, actionData }: Route.ComponentProps)
   const { isBack, isKept } = loaderData
   return (
     <PlainPage>
-      <h1>Sign in</h1>
+      <h1 className="text-2xl font-bold">Sign in</h1>
       <div className="mt-4 grid gap-4">
         {isBack && !actionData && (
           <Notice tone="blue" action="Sign in to go on.">
