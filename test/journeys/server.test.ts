@@ -23,7 +23,7 @@ test.each([
       /script-src 'nonce-[\w+/=]{24}' 'strict-dynamic'.*frame-ancestors 'none'/,
     ),
     'cross-origin-opener-policy': 'same-origin',
-    'referrer-policy': 'no-referrer',
+    'referrer-policy': 'same-origin',
     'x-content-type-options': 'nosniff',
   })
   expect(headers.has('x-powered-by')).toBe(false)
@@ -62,7 +62,8 @@ test('a form that does not say its length is counted', async () => {
       controller.close()
     },
   })
-  const answer = await fetch(`${app.url}/health`, { method: 'POST', body, duplex: 'half' } as RequestInit)
+  const headers = { Origin: app.url, 'Content-Type': 'application/x-www-form-urlencoded' }
+  const answer = await fetch(`${app.url}/sign-in`, { method: 'POST', headers, body, duplex: 'half' } as RequestInit)
   expect(answer.status).toBe(413)
 })
 
