@@ -78,7 +78,7 @@ function PasswordForm({ email, lastResult }: PasswordFormProps) {
   return (
     <Form method="post" id={form.id} onSubmit={form.onSubmit} noValidate={form.noValidate} className="grid gap-4">
       <ErrorSummary title="Not changed yet. Please check:" errors={errorsOf(fields, form.errors)} />
-      <input type="hidden" autoComplete="username" name="username" value={email} />
+      <input type="text" autoComplete="username" name="username" value={email} readOnly hidden />
       <TextField
         {...textOf(currentPassword)}
         type="password"
