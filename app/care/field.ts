@@ -158,6 +158,19 @@ export function arises(meta: FieldMeta, values: Readonly<Record<string, unknown>
 }
 
 /**
+ * Whether a form shows the question: it arises or, as the number that the act is about, it may still arise. The number comes
+ * first and is typed before the question that decides whether it was measured at all.
+ */
+export function isShown(meta: FieldMeta, values: Readonly<Record<string, unknown>>): boolean {
+  const isLarge = meta.control === 'quantity' && meta.large === true
+  return arises(meta, values) || (isLarge && meta.when !== undefined && isUnanswered(values[meta.when.field]))
+}
+
+function isUnanswered(value: unknown): boolean {
+  return value === undefined || value === '' || (Array.isArray(value) && value.every(isUnanswered))
+}
+
+/**
  * The schema of a kind: unknown fields are refused, and questions that arise from another answer are asked for
  * (`neededThen`) or refused when they do not arise.
  */

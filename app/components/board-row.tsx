@@ -37,7 +37,8 @@ export interface BoardPatient {
   readonly warnings?: number
 }
 
-const SHOWN = 3
+/** Shown at once: more would push the eighth patient off the screen. What else is late or due is counted below. */
+const SHOWN = 2
 
 /** Beds, people, tubes, strips and next care, in these columns on a desk and one below the other on a phone. */
 const COLUMNS = 'md:grid-cols-[4rem_minmax(0,1fr)_minmax(0,1fr)] xl:grid-cols-[4rem_12rem_11.5rem_minmax(0,1fr)_20rem]'
@@ -76,7 +77,7 @@ export function BoardRow({ patient, changed = false, children }: BoardRowProps) 
   const { href, bed, family, given, age, recordNo, tube, next, worst, warnings = 0 } = patient
   return (
     <li
-      className={`relative grid grid-cols-[3.5rem_minmax(0,1fr)] items-center gap-x-4 gap-y-3 border-t border-hair px-4 py-3 pl-5 first:border-0 xl:gap-x-5 xl:px-5 xl:py-2 ${COLUMNS} ${edgeOf[worst]} ${changed ? 'row-fade' : ''}`}
+      className={`relative grid grid-cols-[3.5rem_minmax(0,1fr)] items-center gap-x-4 gap-y-3 border-t border-hair px-4 py-3 pl-5 first:border-0 xl:gap-x-5 xl:px-5 xl:py-0.5 ${COLUMNS} ${edgeOf[worst]} ${changed ? 'row-fade' : ''}`}
     >
       <span className="text-2xl font-bold tracking-tight">
         <span className="sr-only">Bed </span>
@@ -108,29 +109,39 @@ interface NextCareListProps {
   readonly next: readonly NextCare[]
 }
 
+const pressing: readonly TaskStatus[] = ['due', 'overdue', 'seriously overdue']
+
 function NextCareList({ next }: NextCareListProps) {
-  const more = next.length - SHOWN
+  const more = next.slice(SHOWN).filter(({ status }) => pressing.includes(status)).length
   return (
-    <ul aria-label="Next care" className="grid gap-1 max-xl:col-span-full">
+    <ul aria-label="Next care" className="grid max-xl:col-span-full">
       {next.slice(0, SHOWN).map(care => (
-        <li key={care.name} className="flex flex-wrap items-baseline justify-between gap-x-3 gap-y-0.5">
-          {care.href ? (
-            <Link
-              to={care.href}
-              className="inline-flex min-h-11 min-w-0 items-center font-semibold hover:underline md:min-h-8"
-            >
-              {care.title}
-            </Link>
-          ) : (
-            <span className="min-w-0 flex-[1_1_8rem] font-semibold">{care.title}</span>
-          )}
-          <span className="flex-none">
-            <Tag tone={toneOf[care.status]}>{care.says}</Tag>
-          </span>
-        </li>
+        <NextCareItem key={care.name} care={care} />
       ))}
-      {more > 0 && <li className="text-sm text-ink2">{`${more} more`}</li>}
+      {more > 0 && <li className="text-sm font-semibold text-due">{`and ${more} more due`}</li>}
       {next.length === 0 && <li className="text-ink2">Nothing due</li>}
     </ul>
+  )
+}
+
+/** The whole line leads to the form: a thumb need not hit the words. */
+function NextCareItem({ care: { title, status, says, href } }: { readonly care: NextCare }) {
+  const line = 'flex min-h-11 flex-wrap items-center justify-between gap-x-3'
+  const words = (
+    <>
+      <span className="min-w-0 font-semibold">{title}</span>
+      <Tag tone={toneOf[status]}>{says}</Tag>
+    </>
+  )
+  return (
+    <li>
+      {href ? (
+        <Link to={href} className={`${line} rounded-control hover:underline`}>
+          {words}
+        </Link>
+      ) : (
+        <div className={line}>{words}</div>
+      )}
+    </li>
   )
 }

@@ -40,7 +40,6 @@ export function BoardView({ board, now, order, charts }: BoardViewProps) {
   }
   return (
     <>
-      <BoardSummary patients={patients} shiftEndsAt={board.shiftEndsAt} zone={zone} />
       <StripPatterns />
       <div className="rounded-card border border-line bg-surface">
         <BoardHead>
@@ -61,13 +60,15 @@ export function BoardView({ board, now, order, charts }: BoardViewProps) {
 }
 
 interface BoardSummaryProps {
-  readonly patients: readonly LivePatient[]
-  readonly shiftEndsAt: number
-  readonly zone: Zone
+  readonly board: Board
+  /** The server's clock (ms). */
+  readonly now: number
 }
 
-function BoardSummary({ patients, shiftEndsAt, zone }: BoardSummaryProps) {
-  const counts = boardCounts(patients, shiftEndsAt)
+/** The ward in a few numbers. */
+export function BoardSummary({ board, now }: BoardSummaryProps) {
+  const { shiftEndsAt, zone } = board
+  const counts = boardCounts(livePatients(board, now, 'bed'), shiftEndsAt)
   return (
     <SummaryCounts
       counts={[

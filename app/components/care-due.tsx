@@ -54,7 +54,8 @@ interface Seen {
 }
 
 function taskRow(task: LiveTask, { patientId, now, zone, charts, reasons }: Seen): DueTaskView {
-  const since = isLate(task.status) && task.window ? `Due ${momentWords(task.window.dueAt, now, zone)}. ` : ''
+  const since =
+    isLate(task.status) && task.window && !task.byDay ? `Due ${momentWords(task.window.dueAt, now, zone)}. ` : ''
   const because = task.because && task.status !== 'suspended' ? ` Sooner because ${task.because}.` : ''
   return {
     name: task.name,

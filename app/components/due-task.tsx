@@ -29,9 +29,9 @@ export function DueTask({ task, why }: DueTaskProps) {
   const { title, detail, status, says, chart } = task
   return (
     <li
-      className={`grid grid-cols-[1fr_auto] items-center gap-x-4 gap-y-1 border-t border-hair px-4 py-2.5 pl-5 first:border-0 md:grid-cols-[1fr_8.5rem_11rem] ${edgeOf[status]}`}
+      className={`grid grid-cols-[1fr_auto] items-center gap-x-4 gap-y-2 border-t border-hair px-4 py-2.5 pl-5 first:border-0 md:grid-cols-[1fr_8.5rem_11rem] ${edgeOf[status]}`}
     >
-      <div className="min-w-0">
+      <div className="min-w-0 max-md:col-span-2">
         <h3 className="text-base font-semibold">{title}</h3>
         <p className="text-sm text-ink2">{detail}</p>
         {why && (
@@ -43,7 +43,7 @@ export function DueTask({ task, why }: DueTaskProps) {
           </details>
         )}
       </div>
-      <div className="max-md:order-last max-md:col-span-2">
+      <div>
         <Tag tone={toneOf[status]}>{says}</Tag>
       </div>
       {chart && (
@@ -51,7 +51,7 @@ export function DueTask({ task, why }: DueTaskProps) {
           href={chart.href}
           size={48}
           variant={pressing.includes(status) ? 'primary' : 'plain'}
-          className="min-w-24 max-w-34 md:max-w-none"
+          className="min-w-24"
           label={`${chart.words}, ${title}`}
         >
           {chart.words}

@@ -59,7 +59,9 @@ function RoundPatient({ patient, board, now, charts }: RoundViewProps & { readon
               : 'No tube charted'}
           </p>
           {care.warnings[0] && care.warnings[0].level !== 'blue' && (
-            <p className="text-sm font-semibold text-late">{care.warnings[0].action}</p>
+            <p className={`text-sm font-semibold ${care.warnings[0].level === 'red' ? 'text-late' : 'text-due'}`}>
+              {care.warnings[0].action}
+            </p>
           )}
         </div>
       </div>
@@ -93,7 +95,8 @@ const tones: Readonly<Record<string, string>> = {
 }
 
 function RoundTask({ task, patientId, now, zone, charts }: RoundTaskProps) {
-  const since = isLate(task.status) && task.window ? ` · due ${momentWords(task.window.dueAt, now, zone)}` : ''
+  const since =
+    isLate(task.status) && task.window && !task.byDay ? ` · due ${momentWords(task.window.dueAt, now, zone)}` : ''
   return (
     <li className={`flex min-h-15 items-center gap-3 border-t border-hair py-1.5 pr-2 pl-4 ${edgeOf[task.status]}`}>
       <div className="min-w-0 flex-1">

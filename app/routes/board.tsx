@@ -2,7 +2,7 @@ import { data, Link } from 'react-router'
 import { can } from '#app/auth/permissions.ts'
 import { ownSession, signedIn } from '#app/auth/signed-in.server.ts'
 import { traceOf } from '#app/auth/trace.server.ts'
-import { BoardView } from '#app/components/board-view.tsx'
+import { BoardSummary, BoardView } from '#app/components/board-view.tsx'
 import { LinkButton } from '#app/components/button.tsx'
 import { useLive } from '#app/components/live.ts'
 import { Notice } from '#app/components/notice.tsx'
@@ -38,9 +38,10 @@ export default function WardBoard({ loaderData }: Route.ComponentProps) {
   const { data: board, now, staleSince } = useLive(`/api/wards/${served.data.wardId}/board`, served)
   const here = `/wards/${board.wardId}`
   return (
-    <div className="grid grid-cols-[minmax(0,1fr)] gap-4 px-4 py-5 md:px-6">
-      <header className="flex flex-wrap items-center justify-between gap-x-6 gap-y-3">
+    <div className="grid grid-cols-[minmax(0,1fr)] gap-4 px-4 py-3 md:px-6">
+      <header className="flex flex-wrap items-center gap-x-8 gap-y-3">
         <h1 className="text-2xl font-bold">{board.wardName}</h1>
+        <BoardSummary board={board} now={now} />
         <WardLinks wards={wards.filter(ward => ward.id !== board.wardId)} />
         <div className="flex flex-wrap gap-2 print:hidden md:ml-auto">
           <LinkButton href={order === 'bed' ? `${here}/board` : `${here}/board?sort=bed`}>

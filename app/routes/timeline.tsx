@@ -51,8 +51,8 @@ export default function Timeline({ loaderData }: Route.ComponentProps) {
   const withParam = (name: string, value: string) => linkWith(search, name, value)
   const tubeTask = liveTasks(care.tasks, now).find(task => task.name === care.tube?.task)
   return (
-    <div className="grid grid-cols-[minmax(0,1fr)] gap-5 px-4 py-5 md:px-6 lg:grid-cols-[21rem_minmax(0,1fr)]">
-      <div className="grid content-start gap-4 lg:order-last">
+    <div className="grid grid-cols-[minmax(0,1fr)] gap-5 px-4 py-5 md:px-6 lg:grid-cols-[21rem_minmax(0,1fr)] lg:grid-rows-[auto_1fr]">
+      <div className="grid content-start gap-4 lg:col-start-2">
         <Stale since={live.staleSince === null ? null : new Date(live.staleSince)} zone={zone} />
         {charted && <Warnings title={charted.says} warnings={charted.warnings} />}
         <Warnings warnings={care.warnings} />
@@ -63,6 +63,11 @@ export default function Timeline({ loaderData }: Route.ComponentProps) {
           nothingDue={shown.nothingDue}
         />
         {charts && <ChartOther patientId={patientId} kinds={kinds} />}
+      </div>
+      <aside className="grid content-start gap-4 lg:col-start-1 lg:row-span-2 lg:row-start-1">
+        <TubeCard tube={tube} status={tubeTask?.status ?? 'upcoming'} />
+      </aside>
+      <div className="grid grid-cols-[minmax(0,1fr)] content-start gap-4 lg:col-start-2">
         <Card
           title={`Last ${spanHours.back} hours, next ${spanHours.ahead}`}
           aside={<SpanChoice names={spanNames} current={span} href={name => withParam('span', name)} />}
@@ -74,9 +79,6 @@ export default function Timeline({ loaderData }: Route.ComponentProps) {
           <Pager label="Charted" {...(shown.next ? { older: withParam('before', shown.next) } : {})} />
         </Card>
       </div>
-      <aside className="grid content-start gap-4">
-        <TubeCard tube={tube} status={tubeTask?.status ?? 'upcoming'} />
-      </aside>
     </div>
   )
 }

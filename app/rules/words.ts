@@ -5,11 +5,16 @@ import { isLate, type LiveTask } from './board.ts'
 /** How a task stands, in a few words: `52 min late`, `due by 14:36`, `due 16:06`, `by 19-Dec-2026`, `deferred to 17:00`. */
 export function standingWords(task: LiveTask, now: number, zone: Zone): string {
   if (task.status === 'suspended' || !task.window) return 'suspended'
-  if (isLate(task.status)) return `${showDuration(task.lateBy)} late`
+  if (isLate(task.status)) return task.byDay ? daysLate(task.byDay, now, zone) : `${showDuration(task.lateBy)} late`
   if (task.byDay) return dayWords(task.byDay, now, zone)
   if (task.status === 'deferred') return `deferred to ${momentWords(task.window.dueAt, now, zone)}`
   if (task.status === 'due') return `due by ${momentWords(task.window.closesAt, now, zone)}`
   return `due ${momentWords(task.window.dueAt, now, zone)}`
+}
+
+function daysLate(day: LocalDay, now: number, zone: Zone): string {
+  const days = daysBetween(day, localDay(new Date(now), zone))
+  return `${days} ${days === 1 ? 'day' : 'days'} late`
 }
 
 function dayWords(day: LocalDay, now: number, zone: Zone): string {

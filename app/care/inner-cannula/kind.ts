@@ -12,7 +12,7 @@ import { innerCannulaWarnings, standingInnerCannulaWarnings } from './warnings.t
 export const innerCannula = careKind({
   ...innerCannulaActs,
   title: 'Inner cannula',
-  chartWords: 'Chart inner cannula',
+  chartWords: 'Chart cannula',
   lane: 'Inner cannula',
   examples: innerCannulaExamples,
   summary: innerCannulaSentence,

@@ -12,7 +12,7 @@ import { isOutOfRange, standingStomaWarnings, stomaWarnings } from './warnings.t
 export const stomaAndSkin = careKind({
   ...stomaChecks,
   title: 'Stoma and skin',
-  chartWords: 'Chart stoma and skin',
+  chartWords: 'Chart stoma',
   lane: 'Stoma and skin',
   examples: stomaExamples,
   summary: stomaSentence,

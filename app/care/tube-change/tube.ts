@@ -93,10 +93,11 @@ export function tubeTract(context: CareContext): Tract | undefined {
   const { record, ward, now } = context
   const changes = record
     .of(tubeChanges)
-    .filter(({ data }) => data.reason !== 'first insertion' && data.reason !== 'on arrival')
-    .map(({ data, performedAt }) => ({
-      on: localDay(performedAt, ward.zone),
-      uncomplicated: data.difficulty === 'easy' || data.difficulty === 'some',
+    .filter(tube => !isFirstTube(tube))
+    .map(tube => ({
+      on: insertedOn(tube, context),
+      // A tube already in place on arrival is not the first: a change went before, and nothing says that it went badly.
+      uncomplicated: tube.data.difficulty !== 'difficult' && tube.data.difficulty !== 'failed',
     }))
   return { madeOn, changes, laryngectomy: record.patient.upperAirway === 'not open', today: localDay(now, ward.zone) }
 }
