@@ -1,6 +1,19 @@
 import { expect, test } from 'vitest'
 import { z } from 'zod'
-import { arises, careFields, choice, choices, date, fieldsOf, nameOf, note, quantity, text, yesNo } from './field.ts'
+import {
+  arises,
+  careFields,
+  choice,
+  choices,
+  date,
+  fieldsOf,
+  isShown,
+  nameOf,
+  note,
+  quantity,
+  text,
+  yesNo,
+} from './field.ts'
 
 const said = (schema: z.ZodType, value: unknown) => schema.safeParse(value).error?.issues.map(issue => issue.message)
 
@@ -156,4 +169,13 @@ test.each([
 
 test('a question without a condition always arises', () => {
   expect(arises({ control: 'note', label: 'Note', maxLength: 9 }, {})).toBe(true)
+})
+
+test('the large number is shown until an answer speaks against it', () => {
+  const when = { field: 'method', is: ['manometer'] }
+  const large = { control: 'quantity', label: 'Found', min: 0, max: 9, step: 1, large: true, when } as const
+  expect(isShown(large, {})).toBe(true)
+  expect(isShown(large, { method: [''] })).toBe(true)
+  expect(isShown(large, { method: ['not measured'] })).toBe(false)
+  expect(isShown({ ...large, large: false }, {})).toBe(false)
 })

@@ -1,4 +1,4 @@
-import { arises, fieldsOf } from '../care/field.ts'
+import { fieldsOf, isShown } from '../care/field.ts'
 import type { AnyCareKind } from '../care/kind.ts'
 import { sentence } from '../care/sentence.ts'
 import { ownFields, readCare, readSpine } from './chart-form.ts'
@@ -44,7 +44,7 @@ function missing(kind: AnyCareKind, form: FormData): readonly string[] {
   const values = Object.fromEntries(fieldsOf(kind.schema).map(({ name }) => [name, form.getAll(`care.${name}`)]))
   return fieldsOf(kind.schema)
     .filter(({ name, meta, required }) => {
-      const needed = required || (meta.neededThen === true && arises(meta, values))
+      const needed = required || (meta.neededThen === true && isShown(meta, values))
       return needed && form.getAll(`care.${name}`).every(value => value === '')
     })
     .map(({ meta }) => meta.label.charAt(0).toLowerCase() + meta.label.slice(1))

@@ -1,5 +1,5 @@
 import { Fragment, type ReactNode, useRef } from 'react'
-import { arises, type FieldMeta } from '#app/care/field.ts'
+import { type FieldMeta, isShown } from '#app/care/field.ts'
 import type { Gauge } from '#app/care/kind.ts'
 import { type Answers, useAnswers } from './answers.ts'
 import { CareControl } from './care-controls.tsx'
@@ -62,7 +62,7 @@ interface QuestionProps extends Required<Omit<CareFieldsProps, 'fields' | 'notic
 function Question({ field, all, answers, gauges, lists, units }: QuestionProps) {
   const { name, meta, required, id, fullName, errors } = field
   const hydrated = useHydrated()
-  const isAsked = arises(meta, answers)
+  const isAsked = isShown(meta, answers)
   const unit = unitOf(meta, answers, units)
   const drawing = {
     field: {
