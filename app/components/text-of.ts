@@ -1,4 +1,4 @@
-import type { FieldMetadata } from '@conform-to/react'
+import type { FieldMetadata, FormMetadata } from '@conform-to/react'
 import type { FormError } from './error-summary.tsx'
 
 type FormField = Pick<
@@ -20,11 +20,12 @@ export function chosenOf({ id, name, errors, defaultValue, defaultOptions }: For
   return { id, name, errors, chosen: defaultOptions ?? (defaultValue === undefined ? [] : [defaultValue]) }
 }
 
-/** The lines of an error summary: what is wrong with each field, then with the form as a whole. */
-export function errorsOf(
-  fields: Readonly<Record<string, FormField>>,
-  ofForm: readonly string[] = [],
-): readonly FormError[] {
-  const ofFields = Object.values(fields).flatMap(({ id, errors = [] }) => errors.map(says => ({ fieldId: id, says })))
-  return [...ofFields, ...ofForm.map(says => ({ says }))]
+/**
+ * The lines of an error summary: what is wrong with each field, and with the form as a whole. Taken from the form, because
+ * conform's set of fields cannot be listed.
+ */
+export function errorsOf({ id, allErrors }: Pick<FormMetadata, 'id' | 'allErrors'>): readonly FormError[] {
+  return Object.entries(allErrors).flatMap(([name, errors]) =>
+    errors.map(says => (name === '' ? { says } : { fieldId: `${id}-${name}`, says })),
+  )
 }

@@ -54,7 +54,9 @@ export default function Account({ loaderData, actionData }: Route.ComponentProps
           Choose one of your own, that nobody else knows, to go on.
         </Notice>
       )}
-      <div role="status">{isChanged && <p className="font-semibold text-brand">Your password is changed.</p>}</div>
+      <div role="status" className="empty:-mb-4">
+        {isChanged && <p className="font-semibold text-brand">Your password is changed.</p>}
+      </div>
       <Card title={owesPassword ? 'New password' : 'Change your password'}>
         <PasswordForm email={person.email} lastResult={actionData ?? null} />
       </Card>
@@ -77,7 +79,7 @@ function PasswordForm({ email, lastResult }: PasswordFormProps) {
   const { currentPassword, newPassword, keepOthers } = fields
   return (
     <Form method="post" id={form.id} onSubmit={form.onSubmit} noValidate={form.noValidate} className="grid gap-4">
-      <ErrorSummary title="Not changed yet. Please check:" errors={errorsOf(fields, form.errors)} />
+      <ErrorSummary title="Not changed yet. Please check:" errors={errorsOf(form)} />
       <input type="text" autoComplete="username" name="username" value={email} readOnly hidden />
       <TextField
         {...textOf(currentPassword)}

@@ -66,7 +66,7 @@ function NewPersonForm({ wards, reply }: NewPersonFormProps) {
   })
   return (
     <Form method="post" id={form.id} onSubmit={form.onSubmit} noValidate={form.noValidate} className="grid gap-4">
-      <ErrorSummary title="Not added yet. Please check:" errors={errorsOf(fields, form.errors)} />
+      <ErrorSummary title="Not added yet. Please check:" errors={errorsOf(form)} />
       <PersonFields fields={fields} roles={roles} wards={wards} />
       <Button variant="primary" size={56}>
         Add, and show a one-time password

@@ -57,7 +57,9 @@ export default function Person({ loaderData, actionData }: Route.ComponentProps)
         {isDisabled && <Tag tone="late">Disabled</Tag>}
         {owesPassword && <Tag>One-time password</Tag>}
       </header>
-      <div role="status">{says && <p className="font-semibold text-brand">{says}</p>}</div>
+      <div role="status" className="empty:-mb-4">
+        {says && <p className="font-semibold text-brand">{says}</p>}
+      </div>
       {password && <OneTimePassword name={person.name} password={password} hours={ONE_TIME_PASSWORD_HOURS} />}
       <DetailsForm {...loaderData} reply={actionData?.reply} />
       <Card title="Access">
@@ -90,7 +92,7 @@ function DetailsForm({ person, wards, reply }: DetailsFormProps) {
   })
   return (
     <Form method="post" id={form.id} onSubmit={form.onSubmit} noValidate={form.noValidate} className="grid gap-4">
-      <ErrorSummary title="Not saved yet. Please check:" errors={errorsOf(fields, form.errors)} />
+      <ErrorSummary title="Not saved yet. Please check:" errors={errorsOf(form)} />
       <PersonFields fields={fields} roles={roles} wards={wards} />
       <Button name="intent" value="details" variant="primary" size={48}>
         Save

@@ -46,7 +46,7 @@ export default function PatientAccess({ loaderData, actionData }: Route.Componen
         is logged. It stays open for {GRANT_MINUTES} minutes.
       </Notice>
       <Form method="post" id={form.id} onSubmit={form.onSubmit} noValidate={form.noValidate} className="grid gap-4">
-        <ErrorSummary title="Not open yet. Please check:" errors={errorsOf({ reason })} />
+        <ErrorSummary title="Not open yet. Please check:" errors={errorsOf(form)} />
         <TextArea
           {...textOf(reason)}
           label="Reason"
