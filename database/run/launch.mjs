@@ -38,7 +38,7 @@ export async function launch(way) {
     })
     if (database.held) held = settings.folder
     end.throwIfAborted()
-    const env = { ...database.env, NODE_ENV: way.mode }
+    const env = { ...database.env, NODE_ENV: way.mode, TZ: 'UTC' }
     await schemaAndDemo(settings, env, end)
     await way.before?.(end)
     process.exitCode = await served(way, settings, env, end, held)
