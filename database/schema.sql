@@ -130,6 +130,13 @@ CREATE TABLE `entries` (
   CONSTRAINT `entries_are_witnessed_by_another` CHECK (`witness_id` is null or `witness_id` <> `recorded_by`)
 ) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
 
+CREATE TABLE `installation` (
+  `name` varchar(48) CHARACTER SET ascii COLLATE ascii_bin NOT NULL COMMENT 'demo: the hospital that was invented, and when',
+  `value` longtext CHARACTER SET utf8mb4 COLLATE utf8mb4_bin NOT NULL CHECK (json_valid(`value`)),
+  `set_at` datetime(3) NOT NULL DEFAULT utc_timestamp(3),
+  PRIMARY KEY (`name`)
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
 CREATE TABLE `patients` (
   `id` uuid NOT NULL,
   `record_number` varchar(32) CHARACTER SET ascii COLLATE ascii_general_ci NOT NULL,
