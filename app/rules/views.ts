@@ -163,7 +163,7 @@ function entriesSince(record: PatientRecord, kind: AnyCareKind, from: Date): rea
 
 function mark(kind: AnyCareKind, entry: Entry, context: CareContext): MarkView {
   const outside = kind.outOfRange?.(entry.data, context) === true
-  const shape = outside ? 'out of range' : kind.marksAs === 'deferral' ? 'deferred' : 'done'
+  const shape = outside ? 'out of range' : kind.marksAs === 'deferred' ? 'deferred' : 'done'
   return { at: entry.performedAt.getTime(), kind: kind.slug, lane: kind.lane, shape }
 }
 

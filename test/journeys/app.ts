@@ -13,9 +13,9 @@ export interface StartedApp {
   readonly databaseUrl: string
   readonly ownerUrl: string
   /** All that the server has written so far. */
-  log(): string
+  readonly log: () => string
   /** Ends it as an operator would, with SIGTERM, and drops its database. Gives the exit code. */
-  stop(): Promise<number | null>
+  readonly stop: () => Promise<number | null>
 }
 
 let counter = 0

@@ -20,7 +20,7 @@ export const deferral = careKind({
   ],
   summary: data =>
     `${wordsOf(data.task)} deferred by ${delays[data.minutes]}: ${reasonWords(data)} ${sentence(`Agreed with ${data.agreedWith}`)}`,
-  marksAs: 'deferral',
+  marksAs: 'deferred',
   problems: taskProblems,
 })
 
