@@ -1,5 +1,5 @@
 import { showDay, showDuration, showTime, showWeekdayDate } from '../time/display.ts'
-import { addDays, type LocalDay, localDay, type Zone } from '../time/zone.ts'
+import { addDays, daysBetween, type LocalDay, localDay, type Zone } from '../time/zone.ts'
 import { isLate, type LiveTask } from './board.ts'
 
 /** How a task stands, in a few words: `52 min late`, `due by 14:36`, `due 16:06`, `by 19-Dec-2026`, `deferred to 17:00`. */
