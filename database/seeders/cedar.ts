@@ -66,9 +66,9 @@ export const cedarStories: readonly BedStory[] = [
     patient: patient('3044 6092', 'Böðvarsdóttir', 'Þórunn', 'female', '1974-11-11', { allergies: 'Tape (redness)' }),
     admittedHoursAgo: 119,
     tube: { name: 'corvane 8', inserted: { daysAgo: 9, stomaDaysAgo: 9 }, technique: 'surgical' },
-    change: { hoursAgo: 58.6, name: 'corvane 7', reason: 'first change' },
+    change: { hoursAgo: 46.6, name: 'corvane 7', reason: 'first change' },
     secretions: 'moderate',
-    stands: { inner: -4.2, cuff: -3.5, cuffFound: 'high', suction: -1.7, dressing: -10, stoma: 'done' },
+    stands: { inner: -1.3, cuff: -3.5, cuffFound: 'high', suction: -1.7, dressing: -10, stoma: 'done' },
   },
   {
     bed: 'C8',

@@ -14,7 +14,7 @@ import { type Draft, draft } from './draft.ts'
 export function innerCannulaCare(bedside: Bedside): readonly Draft[] {
   const { inner, innerRenewal } = bedside.story.stands
   if (inner === undefined) return []
-  const looks = pacedTimes(bedside, { every: lookEvery(bedside), pastDue: inner })
+  const looks = looksOf(bedside, inner)
   const last = looks[0]
   const every = renewalEvery(bedside)
   const sinceLast = last ? since(last, bedside.until) / hours(1) : every
@@ -27,10 +27,14 @@ export function innerCannulaCare(bedside: Bedside): readonly Draft[] {
   ].filter(({ at }) => tubeAt(bedside, at)?.tube.construction === 'dual')
 }
 
-function lookEvery(bedside: Bedside): number {
+/** Twice as often in the first days of a tube that went in here; before it, the tube it replaced was an older one. */
+function looksOf(bedside: Bedside, pastDue: number): readonly Date[] {
   const tube = tubeAt(bedside, bedside.until)
-  const isEarly = tube?.putInHere && since(tube.from, bedside.until) < hours(earlyPeriod.default)
-  return isEarly ? earlyInterval.default : inspectionInterval.default
+  if (!tube?.putInHere || since(tube.from, bedside.until) >= hours(earlyPeriod.default)) {
+    return pacedTimes(bedside, { every: inspectionInterval.default, pastDue })
+  }
+  const often = pacedTimes(bedside, { every: earlyInterval.default, pastDue })
+  return often.filter((at, index) => at > tube.from || index % 2 === 0)
 }
 
 function renewalEvery(bedside: Bedside): number {

@@ -1,9 +1,9 @@
-import { later, minutes } from '#app/time/duration.ts'
 import type { Zone } from '#app/time/zone.ts'
 import { alderStories } from './alder.ts'
 import { type Bedside, bedsideOf, hoursBefore, type Place } from './bedside.ts'
 import { birchStories } from './birch.ts'
 import { cedarStories } from './cedar.ts'
+import { changesOf, onDuty } from './changes.ts'
 import { entriesOf } from './entries.ts'
 import { demoPeople, rotaOf } from './people.ts'
 import { demoPolicies } from './policies.ts'
@@ -36,6 +36,7 @@ export function demoHospital(now: Date, zone: Zone): DemoHospital {
     patients: stays.map(({ patient }) => patient),
     stays: stays.map(({ stay }) => stay),
     moves: stays.flatMap(({ moves }) => moves),
+    changes: stays.flatMap(({ changes }) => changes).toSorted((a, b) => a.changedAt.getTime() - b.changedAt.getTime()),
     policies: demoPolicies(now, zone, wards, specialistOf(people)),
     entries: stays.flatMap(({ entries }) => entries),
   }
@@ -54,15 +55,18 @@ function stayOf(bedside: Bedside, random: Random) {
     dischargeReason: story.discharged?.reason ?? null,
     dischargeNote: story.discharged?.note ?? null,
   }
+  // The first move is the admission and has its id.
   const moves = [
-    moveTo(earlierPlace ?? place, admittedAt),
-    ...(earlierPlace ? [moveTo(place, earlierPlace.until)] : []),
+    moveTo(earlierPlace ?? place, admittedAt, stay.id),
+    ...(earlierPlace ? [moveTo(place, earlierPlace.until, idAt(earlierPlace.until, random))] : []),
   ]
-  return { patient, stay, moves, entries: entriesOf(bedside, stay.id) }
+  const changes = changesOf(bedside, { patient, stay, moves })
+  return { patient, stay, moves, changes, entries: entriesOf(bedside, stay.id) }
 
-  function moveTo({ ward, bed }: Place, movedAt: Date): DemoMove {
-    const recordedBy = bedside.rota.nurse(ward, bed, later(movedAt, minutes(1))).id
-    return { id: idAt(movedAt, random), stayId: stay.id, wardId: ward.row.id, bedId: bed.id, movedAt, recordedBy }
+  function moveTo(to: Place, movedAt: Date, id: string): DemoMove {
+    const { ward, bed } = to
+    const recordedBy = onDuty(bedside, to, movedAt)
+    return { id, stayId: stay.id, wardId: ward.row.id, bedId: bed.id, movedAt, recordedBy }
   }
 }
 

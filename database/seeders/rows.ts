@@ -14,6 +14,7 @@ export interface DemoHospital {
   readonly patients: readonly DemoPatient[]
   readonly stays: readonly DemoStay[]
   readonly moves: readonly DemoMove[]
+  readonly changes: readonly DemoChange[]
   readonly policies: readonly DemoPolicy[]
   readonly entries: readonly DemoEntry[]
 }
@@ -71,6 +72,17 @@ export interface DemoMove {
   readonly bedId: string
   readonly movedAt: Date
   readonly recordedBy: string
+}
+
+/** Who changed what of a patient or a stay. */
+export interface DemoChange {
+  readonly subject: 'patient' | 'stay'
+  readonly subjectId: string
+  readonly what: string
+  readonly changedBy: string
+  readonly changedAt: Date
+  readonly oldValues: Readonly<Record<string, unknown>> | null
+  readonly newValues: Readonly<Record<string, unknown>>
 }
 
 export interface DemoPolicy extends Policy {

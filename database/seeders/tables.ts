@@ -1,4 +1,4 @@
-import type { DemoEntry, DemoHospital, DemoPatient, DemoPolicy } from './rows.ts'
+import type { DemoChange, DemoEntry, DemoHospital, DemoPatient, DemoPolicy } from './rows.ts'
 
 /** Rows of one table by the names of its columns. */
 export interface TableRows {
@@ -8,12 +8,13 @@ export interface TableRows {
 
 /** The demo hospital table by table, each after those that it refers to. */
 export function demoTables(hospital: DemoHospital, passwordHash: string): readonly TableRows[] {
-  const { wards, patients, policies, entries } = hospital
+  const { wards, patients, changes, policies, entries } = hospital
   return [
     ...peopleTables(hospital, passwordHash),
     { table: 'ward_revs', rows: wards.map(({ id }) => ({ ward_id: id })) },
     { table: 'patients', rows: patients.map(patientRow) },
     ...stayTables(hospital),
+    { table: 'record_changes', rows: changes.map(changeRow) },
     { table: 'policies', rows: policies.map(policyRow) },
     { table: 'entries', rows: entries.map(entryRow) },
   ]
@@ -74,6 +75,11 @@ function stayTables({ stays, moves }: DemoHospital): readonly TableRows[] {
       })),
     },
   ]
+}
+
+function changeRow({ subject, subjectId, what, changedBy, changedAt, oldValues, newValues }: DemoChange) {
+  const values = { old_values: oldValues && JSON.stringify(oldValues), new_values: JSON.stringify(newValues) }
+  return { subject, subject_id: subjectId, what, changed_by: changedBy, changed_at: changedAt, ...values }
 }
 
 function policyRow(policy: DemoPolicy) {
