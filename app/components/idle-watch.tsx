@@ -58,12 +58,10 @@ function useIdleWatch({ idleMinutes, warningMinutes, now, endsAt }: IdleWatchPro
     const ahead = serverNow - Date.now() // of this device's clock
     const end = serverEnd - ahead
     const pages = new BroadcastChannel('cannulary-activity')
-    let leaving = false
     const seen = () => {
       used.current = { at: Date.now(), isUnreported: false }
       setWarning(null)
     }
-    if (used.current.at === 0) seen()
     const tell = async () => {
       if (!(await isHeard())) return
       seen()
@@ -73,27 +71,38 @@ function useIdleWatch({ idleMinutes, warningMinutes, now, endsAt }: IdleWatchPro
       const { at, isUnreported } = used.current
       const last = Math.min(at + idleMs, end)
       if (isUnreported && Date.now() - at >= REPORT_MS) return tell()
-      if (Date.now() >= last - EARLY_MS && !leaving) {
-        leaving = true
-        leaving = await handIn(last < end)
-        if (!leaving) seen()
-      } else if (Date.now() >= last - warningMs) setWarning({ at: new Date(last + ahead), canStay: last < end })
+      if (Date.now() < last - warningMs) return
+      setWarning({ at: new Date(last + ahead), canStay: last < end })
+      if (Date.now() >= last - EARLY_MS && !(await handIn(last < end))) seen()
     }
-    const use = () => {
-      used.current.isUnreported = true
-    }
+    if (used.current.at === 0) seen()
     report.current = () => void tell()
     pages.onmessage = seen
-    for (const sign of signs) window.addEventListener(sign, use, { passive: true })
-    const timer = window.setInterval(() => void check(), CHECK_MS)
+    const stop = watched(check, () => Object.assign(used.current, { isUnreported: true }))
     return () => {
       pages.close()
-      for (const sign of signs) window.removeEventListener(sign, use)
-      window.clearInterval(timer)
+      stop()
     }
   }, [idleMs, warningMs, serverNow, serverEnd])
 
   return { warning, stay: () => report.current() }
+}
+
+/** Calls `check` every few seconds, one at a time, and `use` when somebody does something; returns what ends both. */
+function watched(check: () => Promise<void>, use: () => void): () => void {
+  let isChecking = false
+  const timer = window.setInterval(() => {
+    if (isChecking) return
+    isChecking = true
+    void check().finally(() => {
+      isChecking = false
+    })
+  }, CHECK_MS)
+  for (const sign of signs) window.addEventListener(sign, use, { passive: true })
+  return () => {
+    window.clearInterval(timer)
+    for (const sign of signs) window.removeEventListener(sign, use)
+  }
 }
 
 /** Whether the server has heard that somebody is here. Without a network nothing ends early: the next check asks again. */

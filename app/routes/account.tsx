@@ -1,6 +1,7 @@
 import { useForm } from '@conform-to/react'
 import { parseWithZod } from '@conform-to/zod/v4'
 import { data, Form, redirect } from 'react-router'
+import { deviceWords } from '#app/auth/device.ts'
 import { IDLE_LIMIT_MINUTES } from '#app/auth/limits.ts'
 import { replacedPassword } from '#app/auth/new-password.server.ts'
 import { newPasswordSchema } from '#app/auth/new-password.ts'
@@ -28,10 +29,9 @@ export async function loader({ context, url }: Route.LoaderArgs) {
     owesPassword: ownSession(context).owesPassword,
     isChanged: url.searchParams.has('changed'),
     zone: env.hospitalTimeZone,
-    sessions: sessions.map(({ idHash, ...session }, at) => ({
-      ...session,
-      key: String(at),
-      isThis: idHash === sessionHash,
+    sessions: sessions.map(({ idHash, startedAt, seenAt, address, userAgent }, at) => ({
+      ...{ key: String(at), startedAt, seenAt, isThis: idHash === sessionHash },
+      from: `${deviceWords(userAgent)}${address === null ? '' : `, ${address}`}`,
     })),
   }
 }
@@ -116,7 +116,7 @@ function Sessions({ sessions, zone }: Pick<Route.ComponentProps['loaderData'], '
           cells: [
             showDateTime(session.startedAt, zone),
             session.isThis ? 'This one' : showDateTime(session.seenAt, zone),
-            `${session.address ?? ''} ${session.userAgent ?? ''}`,
+            session.from,
           ],
         }))}
       />
