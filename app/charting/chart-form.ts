@@ -88,7 +88,9 @@ export function ownFields(kind: AnyCareKind, sent: FormData): FormRead {
 /** Everything that was typed into the form's own fields, by name: what a page shows again. */
 export function typedIn(kind: AnyCareKind, sent: FormData): Typed {
   const { form } = ownFields(kind, sent)
-  return Object.fromEntries([...new Set(form.keys())].map(name => [name, form.getAll(name).map(String)]))
+  const names = [...new Set(form.keys())]
+  const typed = names.map(name => [name, form.getAll(name).map(String).filter(Boolean)] as const)
+  return Object.fromEntries(typed.filter(([, values]) => values.length > 0))
 }
 
 /** The whole form, checked by the kind's own schema. */

@@ -1,21 +1,18 @@
 import { type FormEvent, type ReactNode, useEffect, useRef, useState } from 'react'
-import { Form, useNavigation } from 'react-router'
+import { Form } from 'react-router'
 import { fieldsOf } from '#app/care/field.ts'
 import type { AnyCareKind, Gauge } from '#app/care/kind.ts'
 import type { FormErrors } from '#app/charting/assess.ts'
 import type { ChartAnswer, FormSigner } from '#app/charting/chart-answer.ts'
 import type { Typed } from '#app/charting/chart-form.ts'
 import type { Calendar } from '#app/charting/performed-at.ts'
-import type { LiveSentence } from '#app/charting/sentence.ts'
-import { Button } from './button.tsx'
 import { CareFields } from './care-fields.tsx'
+import { ChartBar } from './chart-bar.tsx'
 import { ChartErrors, fieldId } from './chart-errors.tsx'
 import { ChartFoot } from './chart-foot.tsx'
 import { useChartLive } from './chart-live.ts'
 import type { DrawnField } from './conform-fields.ts'
 import { fillForm } from './fill-form.ts'
-import { FinalBar } from './final-bar.tsx'
-import { useHydrated } from './hydrated.ts'
 import { Warnings } from './warnings.tsx'
 
 export interface ChartFormProps {
@@ -50,6 +47,7 @@ export function ChartForm({ kind, view, answer, words, cancelHref, reasonAfterHo
   const live = useChartLive({ kind, signer, calendar: view.calendar, openedAt }, form)
   useKeyboardFocus(form, answer === undefined && kind)
   const reviewed = answer?.is === 'reviewed' ? answer : undefined
+  const warnings = (live.sentence ? live.warnings : reviewed?.warnings) ?? []
   return (
     <Form
       ref={form}
@@ -73,8 +71,8 @@ export function ChartForm({ kind, view, answer, words, cancelHref, reasonAfterHo
           lists={view.lists}
           units={view.units}
           notices={
-            <div aria-live="polite">
-              <Warnings warnings={(live.sentence ? live.warnings : reviewed?.warnings) ?? []} />
+            <div id="notices" aria-live="polite">
+              <Warnings warnings={warnings} />
             </div>
           }
         />
@@ -87,39 +85,9 @@ export function ChartForm({ kind, view, answer, words, cancelHref, reasonAfterHo
           witnesses={view.witnesses}
         />
       </div>
-      <Foot {...{ words, cancelHref, signer }} live={live.sentence} reviewed={reviewed?.sentence} />
+      <ChartBar {...{ words, cancelHref, signer, warnings }} live={live.sentence} reviewed={reviewed?.sentence} />
     </Form>
   )
-}
-
-interface FootProps {
-  readonly words: string
-  readonly cancelHref: string
-  readonly signer: FormSigner
-  readonly live: LiveSentence | null
-  readonly reviewed: string | undefined
-}
-
-function Foot({ words, cancelHref, signer, live, reviewed }: FootProps) {
-  const isBusy = useNavigation().formMethod === 'POST'
-  const isHydrated = useHydrated()
-  const sentence = live?.ready ? live.says : live ? null : (reviewed ?? null)
-  const missing = live && !live.ready ? missingWords(live) : `Signed by ${signer.name}, ${signer.role}.`
-  return (
-    <FinalBar {...{ sentence, missing, words, cancelHref }} busy={isBusy}>
-      {/* The first button of a form is the one that Enter presses, so it is gone where it is not needed. */}
-      {!isHydrated && (
-        <Button name="intent" value="review" size={56} className="hidden unscripted:inline-flex">
-          Check first
-        </Button>
-      )}
-    </FinalBar>
-  )
-}
-
-function missingWords({ needed, wrong }: LiveSentence & { ready: false }): string {
-  if (wrong !== undefined) return `${wrong}.`.replace(/\.\.$/, '.')
-  return `Still needed: ${needed.join(', ')}.`
 }
 
 /** Mistakes by field, each until its field is changed. */

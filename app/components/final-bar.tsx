@@ -6,6 +6,8 @@ export interface FinalBarProps {
   readonly sentence: string | null
   /** What is still needed for a sentence, or wrong with it. */
   readonly missing?: string | undefined
+  /** What to do about it, while the reason for it may be out of sight further up. */
+  readonly notice?: ReactNode
   /** `Chart pressure` */
   readonly words: string
   readonly cancelHref?: string
@@ -16,12 +18,13 @@ export interface FinalBarProps {
 }
 
 /** The foot of a form: what will be charted, and the act itself. Sticks to the foot of the screen, above a keyboard. */
-export function FinalBar({ sentence, missing, words, cancelHref, busy = false, children }: FinalBarProps) {
+export function FinalBar({ sentence, missing, notice, words, cancelHref, busy = false, children }: FinalBarProps) {
   return (
     <div
       data-final-bar
       className="sticky bottom-0 z-10 mt-6 border-t border-line bg-surface px-4 py-3 pb-[max(0.75rem,env(safe-area-inset-bottom))] md:px-6 print:hidden"
     >
+      {notice}
       <div className="flex flex-wrap items-center justify-end gap-x-6 gap-y-2">
         <p id="will-be-charted" className="min-w-0 flex-1 basis-64 max-md:max-h-20 max-md:overflow-y-auto">
           {sentence !== null && (

@@ -1,0 +1,53 @@
+import { useNavigation } from 'react-router'
+import type { FormSigner, WarningView } from '#app/charting/chart-answer.ts'
+import type { LiveSentence } from '#app/charting/sentence.ts'
+import { Button } from './button.tsx'
+import { FinalBar } from './final-bar.tsx'
+import { useHydrated } from './hydrated.ts'
+
+interface ChartBarProps {
+  readonly words: string
+  readonly cancelHref: string
+  readonly signer: FormSigner
+  readonly warnings: readonly WarningView[]
+  readonly live: LiveSentence | null
+  readonly reviewed: string | undefined
+}
+
+/** The foot of a chart form: the sentence it becomes or what is still needed for one, and the most urgent warning. */
+export function ChartBar({ words, cancelHref, signer, warnings, live, reviewed }: ChartBarProps) {
+  const isBusy = useNavigation().formMethod === 'POST'
+  const isHydrated = useHydrated()
+  const sentence = live?.ready ? live.says : live ? null : (reviewed ?? null)
+  const missing = live && !live.ready ? missingWords(live) : `Signed by ${signer.name}, ${signer.role}.`
+  return (
+    <FinalBar {...{ sentence, missing, words, cancelHref }} busy={isBusy} notice={<BarNotice warnings={warnings} />}>
+      {/* The first button of a form is the one that Enter presses, so it is gone where it is not needed. */}
+      {!isHydrated && (
+        <Button name="intent" value="review" size={56} className="hidden unscripted:inline-flex">
+          Check first
+        </Button>
+      )}
+    </FinalBar>
+  )
+}
+
+/** The most urgent act, in sight whatever part of the form is; the whole warning is a tap away. */
+function BarNotice({ warnings }: { readonly warnings: readonly WarningView[] }) {
+  const [first, ...others] = warnings.filter(({ level }) => level !== 'blue')
+  if (!first) return null
+  const more = others.length > 0 ? ` And ${others.length} more.` : ''
+  return (
+    <p className={`mb-2 font-semibold ${first.level === 'red' ? 'text-late' : 'text-due'}`}>
+      <a href="#notices" className="line-clamp-2 underline decoration-1 underline-offset-3">
+        {first.action}
+        {more}
+      </a>
+    </p>
+  )
+}
+
+function missingWords({ needed, wrong }: LiveSentence & { ready: false }): string {
+  if (wrong !== undefined) return `${wrong}.`.replace(/\.\.$/, '.')
+  return `Still needed: ${needed.join(', ')}.`
+}
