@@ -12,17 +12,22 @@ import { raiseWards } from './ward-revs.server.ts'
 /** A person who was never here, with the facts that rules ask for. */
 export type NewPatient = Omit<Patient, 'version' | 'demo'> & { readonly demo?: boolean }
 
+export type Identifiers = Pick<Patient, 'recordNumber' | 'bornOn'>
+
 /** An admission. `stayId` is minted when the form was opened, so that the same form twice is one stay. */
 export interface Admission {
   readonly stayId: string
   readonly wardId: string
   readonly bedId: string
   readonly admittedAt: Date
-  /** Somebody new, or the record number of somebody known. */
-  readonly patient: NewPatient | { readonly recordNumber: string }
+  /** Somebody new, or the two identifiers of somebody known. */
+  readonly patient: NewPatient | Identifiers
 }
 
-/** What became of an admission. `number taken`: a new patient was given the record number of somebody known. */
+/**
+ * What became of an admission. `number taken`: a new patient was given the record number of somebody known. `number
+ * unknown`: nobody has this number and this date of birth.
+ */
 export type Admitted =
   | { readonly outcome: 'admitted' | 'already admitted'; readonly stayId: string; readonly patientId: string }
   | { readonly outcome: 'is admitted'; readonly wardId: string; readonly wardName: string; readonly bedLabel: string }
@@ -69,10 +74,10 @@ async function addPatient(patient: NewPatient, by: string, transaction: Transact
   return patient.id
 }
 
-async function knownPatient({ recordNumber }: { recordNumber: string }, transaction: Transaction) {
+async function knownPatient({ recordNumber, bornOn }: Identifiers, transaction: Transaction) {
   const [row] = await select<{ id: string }>(
-    'SELECT id FROM patients WHERE record_number = :recordNumber LOCK IN SHARE MODE',
-    { recordNumber },
+    'SELECT id FROM patients WHERE record_number = :recordNumber AND born_on = :bornOn LOCK IN SHARE MODE',
+    { recordNumber, bornOn },
     transaction,
   )
   return row?.id

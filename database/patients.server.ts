@@ -1,3 +1,5 @@
+import type { Transaction } from 'sequelize'
+import { isUniqueViolation } from './errors.server.ts'
 import { PatientRow } from './models/patient.server.ts'
 import { noteChange } from './record-changes.server.ts'
 import { select, transact } from './sequelize.server.ts'
@@ -32,7 +34,7 @@ export async function patientSummary(
 export type PatientDetails = Omit<Patient, 'id' | 'demo' | 'version'>
 
 /** What became of an edit. `changed by others`: somebody edited the patient since `version` was read. */
-export type PatientChange = { readonly outcome: 'saved' | 'changed by others' | 'not there' }
+export type PatientChange = { readonly outcome: 'saved' | 'changed by others' | 'number taken' | 'not there' }
 
 /**
  * Changes what is known of a patient and notes who changed what. An edit that was begun on an older version is refused,
@@ -44,20 +46,33 @@ export async function changePatient(
   details: PatientDetails,
   by: string,
 ): Promise<PatientChange> {
-  return transact(async transaction => {
-    const row = await PatientRow.findByPk(id, { transaction, lock: true })
-    if (!row) return { outcome: 'not there' }
-    const old = row.get({ plain: true })
-    row.set({ ...details })
-    if (!row.changed()) return { outcome: 'saved' }
-    if (old.version !== version) return { outcome: 'changed by others' }
-    await row.update({ ...details, version: version + 1 }, { transaction })
-    await noteChange({ subject: 'patient', subjectId: id, what: 'details changed', by, old, new: details }, transaction)
-    const open = await stayRows('WHERE s.open_patient_id = :id', { id }, transaction)
-    await raiseWards(
-      open.map(({ stay }) => stay.wardId),
-      transaction,
-    )
-    return { outcome: 'saved' }
-  })
+  try {
+    return await transact(transaction => changed(id, version, details, by, transaction))
+  } catch (error) {
+    if (isUniqueViolation(error, 'patients_record_number')) return { outcome: 'number taken' }
+    throw error
+  }
+}
+
+async function changed(
+  id: string,
+  version: number,
+  details: PatientDetails,
+  by: string,
+  transaction: Transaction,
+): Promise<PatientChange> {
+  const row = await PatientRow.findByPk(id, { transaction, lock: true })
+  if (!row) return { outcome: 'not there' }
+  const old = row.get({ plain: true })
+  row.set({ ...details })
+  if (!row.changed()) return { outcome: 'saved' }
+  if (old.version !== version) return { outcome: 'changed by others' }
+  await row.update({ version: version + 1 }, { transaction })
+  await noteChange({ subject: 'patient', subjectId: id, what: 'details changed', by, old, new: details }, transaction)
+  const open = await stayRows('WHERE s.open_patient_id = :id', { id }, transaction)
+  await raiseWards(
+    open.map(({ stay }) => stay.wardId),
+    transaction,
+  )
+  return { outcome: 'saved' }
 }

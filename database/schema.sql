@@ -139,7 +139,7 @@ CREATE TABLE `installation` (
 
 CREATE TABLE `patients` (
   `id` uuid NOT NULL,
-  `record_number` varchar(32) CHARACTER SET ascii COLLATE ascii_general_ci NOT NULL,
+  `record_number` varchar(32) NOT NULL,
   `family_name` varchar(80) NOT NULL,
   `given_name` varchar(80) NOT NULL,
   `born_on` date NOT NULL,

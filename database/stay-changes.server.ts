@@ -4,7 +4,7 @@ import { BedMoveRow } from './models/bed-move.server.ts'
 import { StayRow } from './models/stay.server.ts'
 import { noteChange } from './record-changes.server.ts'
 import { select, transact } from './sequelize.server.ts'
-import { type DischargeReason, isBedInUse } from './stays.server.ts'
+import { isBedInUse } from './stays.server.ts'
 import { raiseWards } from './ward-revs.server.ts'
 
 /** A move to another bed. `id` is minted when the form was opened, so that the same form twice is one move. */
@@ -70,7 +70,8 @@ function lastMove(stayId: string, transaction: Transaction) {
 export interface Discharge {
   readonly stayId: string
   readonly dischargedAt: Date
-  readonly reason: DischargeReason
+  /** Where to, in a word or two. */
+  readonly reason: string
   readonly note: string | null
   readonly careAfter: boolean
 }

@@ -4,18 +4,6 @@ import { type Stay, type StayWithPatient, stayRows } from './stay-rows.server.ts
 
 export type { Patient, Sex, Stay, StayWithPatient } from './stay-rows.server.ts'
 
-/** How a stay ends, as the form offers it. */
-export const dischargeReasons = [
-  'home',
-  'another ward',
-  'another hospital',
-  'rehabilitation',
-  'care home',
-  'died',
-  'other',
-] as const
-export type DischargeReason = (typeof dischargeReasons)[number]
-
 /** A stay with its patient, open or not; undefined when there is none of that id. */
 export async function stayById(stayId: string): Promise<StayWithPatient | undefined> {
   const [row] = await stayRows('WHERE s.id = :stayId', { stayId })

@@ -4,7 +4,7 @@ export const patients: Migration = {
   async up({ context: { sequelize } }) {
     await sequelize.query(`CREATE TABLE patients (
       id UUID NOT NULL,
-      record_number VARCHAR(32) CHARACTER SET ascii COLLATE ascii_general_ci NOT NULL,
+      record_number VARCHAR(32) NOT NULL,
       family_name VARCHAR(80) NOT NULL,
       given_name VARCHAR(80) NOT NULL,
       born_on DATE NOT NULL,
