@@ -132,6 +132,8 @@ export interface CareKind<Slug extends string, Schema extends z.ZodObject> exten
   /** The sentence on the timeline and before charting. */
   summary(data: z.output<Schema>): string
   readonly act?: ChartingAct
+  /** What must be read wherever this is charted. Short sentences. */
+  readonly cautions?: readonly string[]
   readonly settings?: readonly AnySetting[]
   readonly tasks?: readonly TaskRule[]
   /** What the record already says, filled in as the form opens: facts, never findings. */

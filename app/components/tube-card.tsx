@@ -1,3 +1,4 @@
+import { tubeCautions } from '#app/care/tube-change/cautions.ts'
 import type { TaskStatus } from '#app/rules/status.ts'
 import type { TubeCardOrNone } from '#app/rules/tube-card.ts'
 import { Card } from './card.tsx'
@@ -30,10 +31,7 @@ export function TubeCard({ tube, status }: TubeCardProps) {
           </Notice>
         </div>
       )}
-      <p className="mt-4 text-sm text-ink2">
-        Sizes from different makers are not equal. Read the flange. Compare outside and inside diameter and length. Use
-        only the inner cannula made for this tube.
-      </p>
+      <p className="mt-4 text-sm text-ink2">{tubeCautions.join(' ')}</p>
     </Card>
   )
 }

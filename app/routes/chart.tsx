@@ -68,6 +68,7 @@ export default function Chart({ loaderData: view, actionData, params }: Route.Co
         warnings={view.warnings}
         isRestored={view.isRestored}
       />
+      {kind.cautions && <p className="px-4 pb-2 text-sm text-ink2 md:px-6">{kind.cautions.join(' ')}</p>}
       <ChartForm
         key={view.kind}
         kind={kind}

@@ -37,13 +37,22 @@ export async function loader({ context, url }: Route.LoaderArgs) {
     kind: kind ?? null,
     charts: may && patient.record.stay.dischargedAt === null,
     kinds: chartableKinds(act => can(user, act, opened.wardId) || canByGrant(user, act)),
+    stayLinks: stayPages.flatMap(({ act, page, words }) =>
+      can(user, act, opened.wardId) ? [{ href: `/patients/${opened.patientId}/${page}`, words }] : [],
+    ),
     search: url.search,
   }
 }
 
+const stayPages = [
+  { act: 'edit patient details', page: 'details', words: 'Edit details' },
+  { act: 'move patients', page: 'move', words: 'Move to another bed' },
+  { act: 'discharge patients', page: 'discharge', words: 'Discharge' },
+] as const
+
 /** One patient: the tube, what is due, the hours, and everything that was charted. */
 export default function Timeline({ loaderData }: Route.ComponentProps) {
-  const { served, charted, span, spanHours, spanNames, kind, charts, kinds, search } = loaderData
+  const { served, charted, span, spanHours, spanNames, kind, charts, kinds, stayLinks, search } = loaderData
   const { patientId } = served.data
   const live = useLive(`/api/patients/${patientId}/timeline${search}`, served)
   const { data: shown, now } = live
@@ -62,7 +71,7 @@ export default function Timeline({ loaderData }: Route.ComponentProps) {
           why={shown.why}
           nothingDue={shown.nothingDue}
         />
-        {charts && <ChartOther patientId={patientId} kinds={kinds} />}
+        {charts && <ChartOther patientId={patientId} kinds={kinds} stayLinks={stayLinks} />}
       </div>
       <aside className="grid content-start gap-4 lg:col-start-1 lg:row-span-2 lg:row-start-1">
         <TubeCard tube={tube} status={tubeTask?.status ?? 'upcoming'} />
@@ -96,9 +105,10 @@ function linkWith(search: string, name: string, value: string): string {
 interface ChartOtherProps {
   readonly patientId: string
   readonly kinds: readonly { readonly slug: string; readonly title: string }[]
+  readonly stayLinks: readonly { readonly href: string; readonly words: string }[]
 }
 
-function ChartOther({ patientId, kinds }: ChartOtherProps) {
+function ChartOther({ patientId, kinds, stayLinks }: ChartOtherProps) {
   return (
     <Card title="Chart something else">
       <ul className="flex flex-wrap gap-2">
@@ -108,11 +118,15 @@ function ChartOther({ patientId, kinds }: ChartOtherProps) {
           </li>
         ))}
       </ul>
-      <p className="mt-3">
-        <Link to={`/patients/${patientId}/stay`} className="inline-flex min-h-11 items-center font-semibold underline">
-          Bed, details, discharge
-        </Link>
-      </p>
+      {stayLinks.length > 0 && (
+        <p className="mt-3 flex flex-wrap gap-x-6">
+          {stayLinks.map(({ href, words }) => (
+            <Link key={href} to={href} className="inline-flex min-h-11 items-center font-semibold underline">
+              {words}
+            </Link>
+          ))}
+        </p>
+      )}
     </Card>
   )
 }

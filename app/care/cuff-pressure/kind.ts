@@ -12,6 +12,11 @@ export const cuffPressure = careKind({
   title: 'Cuff pressure',
   chartWords: 'Chart pressure',
   lane: 'Cuff',
+  cautions: [
+    'Pilot balloon feel is not a pressure.',
+    'Cuff must be fully deflated before any valve or cap. Never use a valve with a foam cuff.',
+    'Water cuffs: sterile water, measure mL, not cmH2O.',
+  ],
   examples: [
     { found: 26, unit: 'cmH2O', method: 'manometer', position: 'head up' },
     { found: 34, unit: 'cmH2O', leftAt: 26, method: 'manometer', position: 'head up', reason: 'turned', airMl: -1 },

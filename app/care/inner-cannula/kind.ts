@@ -14,6 +14,7 @@ export const innerCannula = careKind({
   title: 'Inner cannula',
   chartWords: 'Chart cannula',
   lane: 'Inner cannula',
+  cautions: ['Use only the inner cannula made for this tube. Clean per device instructions.'],
   examples: innerCannulaExamples,
   summary: innerCannulaSentence,
   settings: innerCannulaSettings,

@@ -1,4 +1,5 @@
 import { careKind } from '../kind.ts'
+import { tubeCautions } from './cautions.ts'
 import { tubeExamples } from './examples.ts'
 import { tubeChanges } from './schema.ts'
 import { tubeSentence } from './sentence.ts'
@@ -12,6 +13,7 @@ export const tubeChange = careKind({
   title: 'Tube change',
   chartWords: 'Chart tube change',
   lane: 'Tube',
+  cautions: tubeCautions,
   examples: tubeExamples,
   summary: tubeSentence,
   settings: tubeChangeSettings,

@@ -36,6 +36,13 @@ const fields = careFields({
   }),
   sizeSystem: choice({ label: 'Size system', options: { 'ISO 5366': 'ISO 5366 (mm)', Jackson: 'Jackson' } }),
   size: text({ label: 'Size on the label', maxLength: 12 }),
+  construction: choice({ label: 'Construction', options: { single: 'Single cannula', dual: 'Dual cannula' } }),
+  innerCannula: choice({
+    label: 'Inner cannula',
+    options: { disposable: 'Disposable', reusable: 'Reusable', none: 'None in place' },
+    when: dual,
+    neededThen: true,
+  }).optional(),
   idWithInner: quantity({
     label: 'Inside diameter, inner cannula in',
     unit: 'mm',
@@ -49,13 +56,6 @@ const fields = careFields({
   od: quantity({ label: 'Outside diameter', unit: 'mm', min: 3, max: 18, step: 0.1 }),
   lengthMm: quantity({ label: 'Length', unit: 'mm', min: 25, max: 200, step: 0.5 }),
   cuff: choice({ label: 'Cuff', options: { none: 'None', air: 'Air', water: 'Water', foam: 'Foam' } }),
-  construction: choice({ label: 'Construction', options: { single: 'Single cannula', dual: 'Dual cannula' } }),
-  innerCannula: choice({
-    label: 'Inner cannula',
-    options: { disposable: 'Disposable', reusable: 'Reusable', none: 'None in place' },
-    when: dual,
-    neededThen: true,
-  }).optional(),
   fenestrated: choice({ label: 'Fenestration', options: yesNo }),
   connector: choice({
     label: '15 mm connector',
