@@ -38,11 +38,10 @@ export function useLive<Data>(url: string, served: Served<Data>): Live<Data> {
   }, [served])
 
   useEffect(() => {
-    const ending = new AbortController()
     let answeredAt = Date.now()
-    const refresh = async () => {
-      const answer = await ask<Data>(url, etag.current, ending.signal)
-      if (ending.signal.aborted) return
+    return onEveryLook(async signal => {
+      const answer = await ask<Data>(url, etag.current, signal)
+      if (signal.aborted) return
       if (answer.kind === 'gone') return setStaleSince(since => since ?? answeredAt + offset.current)
       if (answer.kind === 'signed out') return window.location.reload()
       answeredAt = Date.now()
@@ -51,24 +50,26 @@ export function useLive<Data>(url: string, served: Served<Data>): Live<Data> {
         etag.current = answer.served.etag
         setLatest(answer.served)
       }
-    }
-    const look = () => {
-      if (document.visibilityState === 'visible') void refresh()
-    }
-    const timer = window.setInterval(look, REFRESH_MS)
-    document.addEventListener('visibilitychange', look)
-    window.addEventListener('focus', look)
-    window.addEventListener('online', look)
-    return () => {
-      ending.abort()
-      window.clearInterval(timer)
-      document.removeEventListener('visibilitychange', look)
-      window.removeEventListener('focus', look)
-      window.removeEventListener('online', look)
-    }
+    })
   }, [url])
 
   return { data: latest.data, now, staleSince }
+}
+
+/** Refreshes every minute while the page is looked at, and when it is looked at again; returns how to end that. */
+function onEveryLook(refresh: (signal: AbortSignal) => Promise<void>): () => void {
+  const ending = new AbortController()
+  const look = () => {
+    if (document.visibilityState === 'visible') void refresh(ending.signal)
+  }
+  const timer = window.setInterval(look, REFRESH_MS)
+  document.addEventListener('visibilitychange', look, { signal: ending.signal })
+  window.addEventListener('focus', look, { signal: ending.signal })
+  window.addEventListener('online', look, { signal: ending.signal })
+  return () => {
+    window.clearInterval(timer)
+    ending.abort()
+  }
 }
 
 /** The server's clock, carried on by this device's: a wrong device clock does not matter, only its pace. */
