@@ -1,6 +1,6 @@
 import { type ChildProcess, spawn } from 'node:child_process'
 import { once } from 'node:events'
-import { chmodSync, mkdtempSync, rmSync } from 'node:fs'
+import { chmodSync, mkdtempSync, readFileSync, rmSync } from 'node:fs'
 import { tmpdir } from 'node:os'
 import { join } from 'node:path'
 import { afterAll, beforeAll, expect, test } from 'vitest'
@@ -36,17 +36,29 @@ function npmStart(environment: Record<string, string> = {}) {
   return started
 }
 
+async function readiness() {
+  const answer = await fetch(`http://127.0.0.1:${port}/health/ready`)
+  return (await answer.json()).status
+}
+
+function databasePid() {
+  return Number(readFileSync(join(folder, 'mariadb/server.pid'), 'utf8'))
+}
+
 async function serving(started: { child: ChildProcess; output: string }) {
   await until(() => started.output.includes('End it with') || started.child.exitCode !== null, 100_000)
   return started.output
 }
 
-test('npm start leads to a page with its own database, and SIGTERM ends both', { timeout: 120_000 }, async () => {
+test('npm start leads to a page, mends its database, and is ended by SIGTERM', { timeout: 120_000 }, async () => {
   const started = npmStart()
   expect(await serving(started)).toMatch(
     /Packages .*\nMariaDB .*\nSchema .*\nDemo hospital .*\nApplication .*\n\nCannulary is/,
   )
-  expect(await (await fetch(`http://127.0.0.1:${port}/health/ready`)).json()).toEqual({ status: 'ready' })
+  expect(await readiness()).toBe('ready')
+  process.kill(databasePid(), 'SIGKILL')
+  expect(await until(async () => (await readiness()) === 'database away', 10_000)).toBe(true)
+  expect(await until(async () => (await readiness()) === 'ready', 30_000)).toBe(true)
   started.child.kill('SIGTERM')
   await started.ended
   await expect(fetch(`http://127.0.0.1:${port}/health`)).rejects.toThrow()
