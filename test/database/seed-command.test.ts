@@ -1,4 +1,4 @@
-import { afterAll, beforeEach, expect, test } from 'vitest'
+import { afterAll, beforeEach, expect, test, vi } from 'vitest'
 import { closePasswords } from '#app/auth/password.server.ts'
 import { demoSeededAt, population } from '#database/demo.server.ts'
 import { type Seeding, seed } from '#database/seeders/seed.server.ts'
@@ -7,6 +7,8 @@ import { aPerson } from '#test/people.ts'
 
 const seeded = (how: Seeding, now: string) => seed(owner, how, new Date(now), 'Europe/London')
 
+// Each writes a hospital or two: seconds on a quiet machine.
+vi.setConfig({ testTimeout: 120_000, hookTimeout: 60_000 })
 beforeEach(cleared)
 afterAll(closePasswords)
 

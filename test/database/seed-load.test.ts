@@ -17,7 +17,7 @@ const hospital = demoHospital(new Date('2026-12-01T14:06:00Z'), 'Europe/London')
 beforeAll(async () => {
   await cleared()
   await loadDemo(owner, hospital)
-}, 60_000)
+}, 120_000)
 
 afterAll(closePasswords)
 

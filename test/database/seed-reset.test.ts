@@ -1,4 +1,4 @@
-import { afterAll, beforeEach, expect, test } from 'vitest'
+import { afterAll, beforeEach, expect, test, vi } from 'vitest'
 import { closePasswords } from '#app/auth/password.server.ts'
 import { demoAccounts, demoSeededAt, population } from '#database/demo.server.ts'
 import { demoHospital } from '#database/seeders/hospital.ts'
@@ -10,6 +10,8 @@ import { aPerson } from '#test/people.ts'
 
 const hospital = demoHospital(new Date('2026-12-01T14:06:00Z'), 'Europe/London')
 
+// Each writes a hospital or two: seconds on a quiet machine.
+vi.setConfig({ testTimeout: 120_000, hookTimeout: 60_000 })
 beforeEach(cleared)
 afterAll(closePasswords)
 
