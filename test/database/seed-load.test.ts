@@ -25,7 +25,7 @@ test('what is loaded is read back as it was made', async () => {
   for (const { id, name } of hospital.wards) {
     const { stays } = await wardRecords(id)
     const made = present(hospital, name).map(stay => hospital.entries.filter(({ stayId }) => stayId === stay.id))
-    const plain = made.map(entries => entries.map(({ witnessId: _, ...entry }) => entry))
+    const plain = made.map(entries => entries.map(entry => ({ ...entry, witnessId: undefined })))
     expect(stays.map(({ entries }) => entries)).toEqual(plain)
     expect(stays.map(({ patient }) => patient.demo)).not.toContain(false)
   }
