@@ -71,7 +71,7 @@ export async function changeBed(bed: Bed, by: string): Promise<BedChange> {
       if (!row) return { outcome: 'not there' }
       const occupied = await select('SELECT 1 FROM stays WHERE occupied_bed_id = :id', { id: bed.id }, transaction)
       if (bed.retired && occupied.length > 0) return { outcome: 'occupied' }
-      const old = row.get({ plain: true })
+      const old = { ...row.get({ plain: true }) }
       await row.update({ ...bed }, { transaction })
       await noteChange({ subject: 'bed', subjectId: bed.id, what: 'bed changed', by, old, new: bed }, transaction)
       await raiseWards([bed.wardId], transaction)

@@ -57,17 +57,17 @@ export type Charting =
   | { readonly outcome: 'stay not open'; readonly dischargedAt: Date | null }
 
 /** Charts one act. Safe to repeat. Throws `DatabaseUnavailable`; anything else thrown is a mistake of the caller. */
-export function addEntry<K extends AnyCharted>(entry: NewEntry<K>): Promise<Charting> {
+export async function addEntry<K extends AnyCharted>(entry: NewEntry<K>): Promise<Charting> {
   return chart(rowOf(entry, null))
 }
 
 /** Charts an act anew in the place of an earlier entry of the same stay and kind. */
-export function correctEntry<K extends AnyCharted>(correction: Correction<K>): Promise<Charting> {
+export async function correctEntry<K extends AnyCharted>(correction: Correction<K>): Promise<Charting> {
   return chart(rowOf(correction, correction.supersedes))
 }
 
 /** Retracts an entry: a row of its own, with the payload of the one that no longer counts. */
-export function retractEntry(retraction: Retraction, entry: StoredEntry): Promise<Charting> {
+export async function retractEntry(retraction: Retraction, entry: StoredEntry): Promise<Charting> {
   return chart({
     id: retraction.id,
     stayId: entry.stayId,

@@ -6,6 +6,9 @@ import type { StoredEntry } from '#app/care/kind.ts'
  */
 const MOST_ENTRIES = 200_000
 
+/** One for all: where nothing was charted, the array stays the same too. */
+const NOTHING: readonly StoredEntry[] = []
+
 const kept = new Map<string, readonly StoredEntry[]>()
 let count = 0
 
@@ -13,7 +16,7 @@ let count = 0
 export function knownEntries(stayId: string): readonly StoredEntry[] {
   const entries = kept.get(stayId)
   if (entries) keep(stayId, entries)
-  return entries ?? []
+  return entries ?? NOTHING
 }
 
 /**
@@ -26,7 +29,7 @@ export function learn(
   before: readonly StoredEntry[],
   read: readonly StoredEntry[],
 ): readonly StoredEntry[] {
-  const meanwhile = kept.get(stayId) ?? []
+  const meanwhile = kept.get(stayId) ?? NOTHING
   const known = meanwhile.length >= before.length ? meanwhile : before
   const fresh: StoredEntry[] = []
   for (const entry of read) if (entry.number === known.length + fresh.length + 1) fresh.push(entry)

@@ -63,11 +63,11 @@ async function changed(
 ): Promise<PatientChange> {
   const row = await PatientRow.findByPk(id, { transaction, lock: true })
   if (!row) return { outcome: 'not there' }
-  const old = row.get({ plain: true })
+  const old = { ...row.get({ plain: true }) }
   row.set({ ...details })
   if (!row.changed()) return { outcome: 'saved' }
   if (old.version !== version) return { outcome: 'changed by others' }
-  await row.update({ version: version + 1 }, { transaction })
+  await row.set({ version: version + 1 }).save({ transaction })
   await noteChange({ subject: 'patient', subjectId: id, what: 'details changed', by, old, new: details }, transaction)
   const open = await stayRows('WHERE s.open_patient_id = :id', { id }, transaction)
   await raiseWards(

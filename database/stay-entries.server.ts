@@ -26,7 +26,7 @@ export async function entriesOfStays(stays: readonly Counted[]): Promise<Entries
   const others = new Set(short().flatMap(({ id }) => underWay.get(id) ?? []))
   const own = readTogether(short().filter(({ id }) => !underWay.has(id)))
   for (const read of await Promise.all([...others, own])) {
-    for (const { id } of stays) found.set(id, read.get(id) ?? found.get(id) ?? [])
+    for (const { id } of stays) found.set(id, read.get(id) ?? found.get(id) ?? knownEntries(id))
   }
   // A reading of others may have begun before these counts were read, and end short of them.
   const rest = short()

@@ -75,7 +75,7 @@ export async function changeWard(ward: Ward, by: string): Promise<WardChange> {
       const row = await WardRow.findByPk(ward.id, { transaction, lock: true })
       if (!row) return { outcome: 'not there' }
       if (ward.retired && !row.retired && (await hasPatients(ward.id, transaction))) return { outcome: 'has patients' }
-      const old = row.get({ plain: true })
+      const old = { ...row.get({ plain: true }) }
       await row.update({ ...ward }, { transaction })
       await noteChange({ subject: 'ward', subjectId: ward.id, what: 'ward changed', by, old, new: ward }, transaction)
       await raiseWards([ward.id], transaction)
