@@ -5,17 +5,24 @@ import { signIn } from '#app/auth/session.server.ts'
 import { userContext } from '#app/auth/signed-in.server.ts'
 import { traceOf } from '#app/auth/trace.server.ts'
 import { Button } from '#app/components/button.tsx'
+import { DemoAccounts } from '#app/components/demo-accounts.tsx'
 import { ErrorSummary } from '#app/components/error-summary.tsx'
 import { Notice } from '#app/components/notice.tsx'
 import { PlainPage } from '#app/components/plain-page.tsx'
 import { TextField } from '#app/components/text-field.tsx'
+import { demoAccounts, demoPassphrase } from '#database/demo.server.ts'
 import type { Route } from './+types/sign-in.ts'
 
 export const meta: Route.MetaFunction = () => [{ title: 'Sign in | Cannulary' }]
 
-export function loader({ context, url }: Route.LoaderArgs) {
+export async function loader({ context, url }: Route.LoaderArgs) {
   if (context.get(userContext) !== null) throw redirect(returnPath(url.searchParams.get('returnTo')))
-  return { isBack: url.searchParams.has('returnTo'), isKept: url.searchParams.has('kept') }
+  const accounts = await demoAccounts()
+  return {
+    isBack: url.searchParams.has('returnTo'),
+    isKept: url.searchParams.has('kept'),
+    demo: accounts.length > 0 ? { accounts, passphrase: demoPassphrase } : null,
+  }
 }
 
 export async function action({ request, url, context }: Route.ActionArgs) {
@@ -31,7 +38,7 @@ export async function action({ request, url, context }: Route.ActionArgs) {
 }
 
 export default function SignIn({ loaderData, actionData }: Route.ComponentProps) {
-  const { isBack, isKept } = loaderData
+  const { isBack, isKept, demo } = loaderData
   return (
     <PlainPage>
       <h1 className="text-2xl font-bold">Sign in</h1>
@@ -71,6 +78,7 @@ export default function SignIn({ loaderData, actionData }: Route.ComponentProps)
         <p className="text-ink2">
           No account, or the password is lost? An administrator of your hospital gives you a one-time password.
         </p>
+        {demo && <DemoAccounts {...demo} />}
       </div>
     </PlainPage>
   )

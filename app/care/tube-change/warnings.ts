@@ -1,6 +1,6 @@
 import { daysLeft, dwellDay, dwellStage } from '../../clinical/dwell.ts'
 import { hours, since } from '../../time/duration.ts'
-import { localDay } from '../../time/zone.ts'
+import { localDay, startOfDay } from '../../time/zone.ts'
 import type { CareContext } from '../kind.ts'
 import { LOCAL_PLAN, type Warning } from '../warning.ts'
 import type { TubeData } from './schema.ts'
@@ -51,7 +51,8 @@ function earlyChange(data: TubeData, context: CareContext): readonly Warning[] {
   const tube = tubeInPlace(context.record)
   if (!tube || !isFirstTube(tube) || EMERGENCY.includes(data.reason)) return []
   const age = dwellDay(insertedOn(tube, context), localDay(context.now, context.ward.zone))
-  const tooEarly = since(tube.performedAt, context.now) < hours(context.values.of(firstChangeHardLimit))
+  const putInAt = tube.data.insertedOn ? startOfDay(tube.data.insertedOn, context.ward.zone) : tube.performedAt
+  const tooEarly = since(putInAt, context.now) < hours(context.values.of(firstChangeHardLimit))
   if (!tooEarly && age >= firstChangeDays(context).earliest) return []
   return [
     {
