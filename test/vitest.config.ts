@@ -26,7 +26,7 @@ export default defineConfig({
         test: {
           name: 'node',
           include: ['app/**/*.server.test.ts', 'test/**/*.test.ts'],
-          exclude: [...unit.slice(1), 'test/journeys/**'],
+          exclude: [...unit.slice(1), 'test/journeys/**', 'test/faults/**'],
           globalSetup: ['test/run/mariadb-for-tests.ts'],
           setupFiles: ['test/setup.ts', 'test/setup-database.ts'],
           testTimeout: 15_000,
@@ -45,10 +45,10 @@ export default defineConfig({
         extends: true,
         test: {
           name: 'journeys',
-          include: ['test/journeys/**/*.test.ts'],
+          include: ['test/journeys/**/*.test.ts', 'test/faults/**/*.test.ts'],
           globalSetup: ['test/run/mariadb-for-tests.ts', 'test/run/built-app.ts'],
           setupFiles: ['test/setup.ts'],
-          testTimeout: 60_000,
+          testTimeout: 120_000,
           hookTimeout: 120_000,
         },
       },

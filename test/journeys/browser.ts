@@ -2,7 +2,7 @@ import axe from 'axe-core'
 import { type Browser, type BrowserContextOptions, chromium, type Page } from 'playwright-core'
 import { CHROMIUM } from '../../database/run/debian-package.mjs'
 
-export { type StartedApp, startedApp } from './app.ts'
+export { rowsOf, type StartedApp, startedApp } from './app.ts'
 
 const FLAGS = [
   ...['--no-sandbox', '--disable-gpu', '--disable-quic', '--no-first-run', '--disable-background-networking'],
@@ -24,7 +24,7 @@ export interface OpenedPage {
 export async function openedPage(browser: Browser, options: BrowserContextOptions = {}): Promise<OpenedPage> {
   const context = await browser.newContext({ locale: 'en-GB', timezoneId: 'Europe/London', ...options })
   const page = await context.newPage()
-  page.setDefaultTimeout(15_000)
+  page.setDefaultTimeout(30_000)
   const problems: string[] = []
   page.on('pageerror', error => problems.push(error.message))
   page.on('console', message => {
