@@ -1,0 +1,5 @@
+import { one } from './database.server.ts'
+
+export async function loader() {
+  return Response.json({ one: await one() })
+}
