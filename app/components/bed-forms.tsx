@@ -21,7 +21,7 @@ export interface BedFormsProps {
   /** Minted with the page: the same form twice adds one bed. */
   readonly newBedId: string
   /** What came of the form of that name, if it was the one sent. */
-  replyTo(intent: string): Reply
+  readonly replyTo: (intent: string) => Reply
 }
 
 /** A small form for each bed of a ward, and one for a new bed. */

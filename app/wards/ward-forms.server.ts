@@ -69,7 +69,8 @@ async function bedAdded(sent: FormData, wardId: string, userId: string): Promise
 }
 
 async function bedChanged(sent: FormData, wardId: string, userId: string): Promise<WardOutcome> {
-  const intent = `bed ${sent.get('id')}`
+  const id = sent.get('id')
+  const intent = `bed ${typeof id === 'string' ? id : ''}`
   const submission = read(sent, bedChangeSchema)
   if (submission.status !== 'success') return { intent, reply: submission.reply() }
   const { retired, ...bed } = submission.value
