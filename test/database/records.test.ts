@@ -3,13 +3,15 @@ import { v7 as uuidv7 } from 'uuid'
 import { beforeEach, expect, test, vi } from 'vitest'
 import { addEntry, correctEntry } from '#database/entries.server.ts'
 import { changePatient, patientById } from '#database/patients.server.ts'
+import type * as recordsModule from '#database/records.server.ts'
+import type * as recordsModule from '#database/records.server.ts'
 import { select } from '#database/sequelize.server.ts'
 import { discharge, move } from '#database/stay-changes.server.ts'
 import { wardRev } from '#database/ward-revs.server.ts'
 import { cleared, owner } from '#test/database.ts'
 import { aCuffPressure, admitted, aWardOf, on } from '#test/stays.ts'
 
-type Records = typeof import('#database/records.server.ts')
+type Records = typeof recordsModule
 
 let ward: Awaited<ReturnType<typeof aWardOf>>
 let stayIds: string[]
