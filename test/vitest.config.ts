@@ -13,6 +13,9 @@ export default defineConfig({
   test: {
     pool: 'forks',
     maxWorkers: 2,
+    // Generous, because a machine that is busy with something else is no defect.
+    testTimeout: 20_000,
+    hookTimeout: 60_000,
     reporters: process.env.CANNULARY_REPORT
       ? ['default', ['json', { outputFile: process.env.CANNULARY_REPORT }]]
       : ['default'],
@@ -29,7 +32,6 @@ export default defineConfig({
           exclude: [...unit.slice(1), 'test/journeys/**', 'test/faults/**'],
           globalSetup: ['test/run/mariadb-for-tests.ts'],
           setupFiles: ['test/setup.ts', 'test/setup-database.ts'],
-          testTimeout: 15_000,
         },
       },
       {

@@ -27,7 +27,7 @@ function inWords(meta: FieldMeta, value: unknown, data: Answers): string {
         .map(one => meta.options[String(one)] ?? String(one))
         .join(', ')
     case 'quantity':
-      return `${value} ${meta.unit ?? unitWords(meta.unitField, data)}`.trim()
+      return `${String(value)} ${meta.unit ?? unitWords(meta.unitField, data)}`.trim()
     case 'date':
       return showDay(String(value))
     case 'task':
