@@ -14,6 +14,8 @@ interface ChartBarProps {
   readonly reviewed: string | undefined
 }
 
+const NAMED = 4 // a phone has room for so many beside the buttons
+
 /** The foot of a chart form: the sentence it becomes or what is still needed for one, and the most urgent warning. */
 export function ChartBar({ words, cancelHref, signer, warnings, live, reviewed }: ChartBarProps) {
   const isBusy = useNavigation().formMethod === 'POST'
@@ -49,5 +51,6 @@ function BarNotice({ warnings }: { readonly warnings: readonly WarningView[] }) 
 
 function missingWords({ needed, wrong }: LiveSentence & { ready: false }): string {
   if (wrong !== undefined) return `${wrong}.`.replace(/\.\.$/, '.')
-  return `Still needed: ${needed.join(', ')}.`
+  const rest = needed.length - NAMED
+  return `Still needed: ${needed.slice(0, NAMED).join(', ')}${rest > 0 ? ` and ${rest} more` : ''}.`
 }

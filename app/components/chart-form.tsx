@@ -71,7 +71,7 @@ export function ChartForm({ kind, view, answer, words, cancelHref, reasonAfterHo
           lists={view.lists}
           units={view.units}
           notices={
-            <div id="notices" aria-live="polite">
+            <div id="notices" aria-live="polite" className="empty:-mt-5">
               <Warnings warnings={warnings} />
             </div>
           }

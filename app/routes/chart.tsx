@@ -1,5 +1,5 @@
 import { data, redirect } from 'react-router'
-import { patientContext, patientGate } from '#app/auth/patient-access.server.ts'
+import { patientGate } from '#app/auth/patient-access.server.ts'
 import { signedIn } from '#app/auth/signed-in.server.ts'
 import { traceOf } from '#app/auth/trace.server.ts'
 import { findKind } from '#app/care/kinds.ts'
@@ -23,9 +23,9 @@ export const meta: Route.MetaFunction = ({ params }) => [{ title: `${findKind(pa
 export async function loader({ params, context, request, url }: Route.LoaderArgs) {
   const user = signedIn(context)
   const kind = kindOr404(params.kind)
-  await patientGate(user, params.patientId, askOf({ kind, context, request, url }))
+  const { stayId } = await patientGate(user, params.patientId, askOf({ kind, context, request, url }))
   const now = new Date()
-  const care = await patientCare(context.get(patientContext).stayId, now)
+  const care = await patientCare(stayId, now)
   return chartForm(kind, { care, user, url, now })
 }
 
