@@ -43,7 +43,8 @@ export async function openedEntry(asked: EntryRequest, act: EntryAct): Promise<O
   if (!history || !latest) throw data('There is no such entry.', 404)
   const by = traceOf(asked)
   const path = url.pathname + url.search
-  const [first = 'see patients', ...others] = actsFor(act, latest, user)
+  // Of an entry that somebody corrected meanwhile, its own author is told so: nothing can be done to it any more.
+  const [first = 'see patients', ...others] = actsFor(act, history.entry, user)
   const opened = await patientGate(user, history.patientId, { path, act: first, by })
   for (const other of others) await patientGate(user, history.patientId, { path, act: other, by })
   if (!isWrite(request)) await logPatientLook(opened, by)
@@ -52,10 +53,10 @@ export async function openedEntry(asked: EntryRequest, act: EntryAct): Promise<O
 }
 
 /** Every act that somebody must be allowed to, to do this with an entry. */
-function actsFor(act: EntryAct, latest: StoredEntry, user: CurrentUser): readonly Act[] {
+function actsFor(act: EntryAct, entry: StoredEntry, user: CurrentUser): readonly Act[] {
   if (act === 'see') return ['see patients']
-  const isOwn = latest.recordedById === user.id
-  return [isOwn ? `${act} own entries` : `${act} entries`, findKind(latest.kind)?.act ?? 'chart care']
+  const isOwn = entry.recordedById === user.id
+  return [isOwn ? `${act} own entries` : `${act} entries`, findKind(entry.kind)?.act ?? 'chart care']
 }
 
 /** Whether a page may offer this to this person. */
