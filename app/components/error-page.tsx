@@ -12,6 +12,11 @@ const UNREADABLE: Words = {
   says: 'If you were charting, look at the patient’s timeline before you chart again: it shows what was kept.',
 }
 
+const UNREACHED: Words = {
+  title: 'The server cannot be reached. Nothing was charted.',
+  says: 'Look at the network of this device and try again in a minute. Until then chart on paper.',
+}
+
 const wordsByStatus: Readonly<Record<number, Words>> = {
   400: { title: 'This could not be read', says: 'Nothing was charted. Go back, and try again from the form.' },
   403: { title: 'This is not open to you', says: 'Your role or your ward does not include it. Nothing was changed.' },
@@ -20,12 +25,20 @@ const wordsByStatus: Readonly<Record<number, Words>> = {
     title: 'The database cannot be reached. Nothing was charted.',
     says: 'Chart on paper until this page opens again, then enter the care with the time it was done.',
   },
+  504: {
+    title: 'The database went away while this was being saved',
+    says: 'Nobody knows yet whether it was. Go back and send the form again: it is charted once.',
+  },
 }
 
 /** What a thrown `data(words, …)` carries to be read by people; anything else it carries is not shown. */
 function ownWords(error: unknown): string | undefined {
   return isRouteErrorResponse(error) && typeof error.data === 'string' && error.data !== '' ? error.data : undefined
 }
+
+/** A page that was asked for from another page fails as `fetch` does when no answer comes. Each browser has words of its own. */
+const isUnreached = (error: unknown): boolean =>
+  error instanceof TypeError && /failed to fetch|networkerror|load failed/i.test(error.message)
 
 export interface ErrorPageProps {
   readonly error: unknown
@@ -35,7 +48,7 @@ export interface ErrorPageProps {
 /** The last page there is: says what happened and what was kept, with a reference instead of a stack. */
 export function ErrorPage({ error, reference }: ErrorPageProps) {
   const status = isRouteErrorResponse(error) ? error.status : 500
-  const { title, says } = wordsByStatus[status] ?? UNREADABLE
+  const { title, says } = wordsByStatus[status] ?? (isUnreached(error) ? UNREACHED : UNREADABLE)
   return (
     <PlainPage>
       <h1 className="text-2xl">{title}</h1>
