@@ -56,7 +56,7 @@ const LEAST = 9 // thousandths
 export function laneShapes(lanes: readonly StripLane[], frame: LaneFrame): LaneShapes {
   const outlines: Record<Outline, string> = { upcoming: '', 'due soon': '', due: '', deferred: '', suspended: '' }
   let [done, seriousEdges] = ['', '']
-  const late: Box[] = []
+  const late = new Map<number, Box>()
   const outOfRange: Point[] = []
   const notes: Point[] = []
   for (const [index, lane] of lanes.entries()) {
@@ -65,7 +65,8 @@ export function laneShapes(lanes: readonly StripLane[], frame: LaneFrame): LaneS
       const box = windowBox(window, y, frame)
       if (!box) continue
       if (window.status === 'overdue' || window.status === 'seriously overdue') {
-        late.push(box)
+        // Late care of one lane ends at now alike, so the longest bar covers the others.
+        if (box.width > (late.get(box.y)?.width ?? 0)) late.set(box.y, box)
         if (window.status === 'seriously overdue') seriousEdges += `M${box.x} ${box.y}v${box.height}`
       } else {
         outlines[window.status] += boxPath(box)
@@ -79,7 +80,7 @@ export function laneShapes(lanes: readonly StripLane[], frame: LaneFrame): LaneS
       else (mark.shape === 'deferred' ? notes : outOfRange).push({ x, y })
     }
   }
-  return { outlines, done, late, seriousEdges, outOfRange, notes }
+  return { outlines, done, late: [...late.values()], seriousEdges, outOfRange, notes }
 }
 
 /** A window as a box; a late one runs from its end to now, longer with every minute. Nothing when it lies outside the span. */
