@@ -64,7 +64,7 @@ export default function Timeline({ loaderData }: Route.ComponentProps) {
       <div className="grid content-start gap-4 lg:col-start-2">
         <Stale since={live.staleSince === null ? null : new Date(live.staleSince)} zone={zone} />
         {charted && <Warnings title={charted.says} warnings={charted.warnings} />}
-        <Warnings warnings={care.warnings} />
+        <Warnings warnings={care.warnings.filter(({ name }) => !charted?.warnings.some(own => own.name === name))} />
         <CareDue
           {...{ patientId, now, zone, charts }}
           tasks={care.tasks}
