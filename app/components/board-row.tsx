@@ -33,8 +33,10 @@ export interface BoardPatient {
   readonly next: readonly NextCare[]
   /** The most pressing status of all. */
   readonly worst: TaskStatus
-  /** Warnings that nobody has answered. */
+  /** Red and amber warnings that stand. */
   readonly warnings?: number
+  /** One of them asks to act now. */
+  readonly isUrgent?: boolean
 }
 
 /** Shown at once: more would push the eighth patient off the screen. What else is late or due is counted below. */
@@ -74,7 +76,7 @@ export interface BoardRowProps {
 
 /** One patient on the board, as an item of a list. */
 export function BoardRow({ patient, changed = false, children }: BoardRowProps) {
-  const { href, bed, family, given, age, recordNo, tube, next, worst, warnings = 0 } = patient
+  const { href, bed, family, given, age, recordNo, tube, next, worst, warnings = 0, isUrgent = false } = patient
   return (
     <li
       className={`relative grid grid-cols-[3.5rem_minmax(0,1fr)] items-center gap-x-4 gap-y-3 border-t border-hair px-4 py-3 pl-5 first:border-0 xl:gap-x-5 xl:px-5 xl:py-0.5 ${COLUMNS} ${edgeOf[worst]} ${changed ? 'row-fade' : ''}`}
@@ -93,7 +95,9 @@ export function BoardRow({ patient, changed = false, children }: BoardRowProps) 
         <p className="text-sm text-ink2">
           {age} y · {recordNo}
         </p>
-        {warnings > 0 && <Tag tone="late">{warnings === 1 ? '1 warning' : `${warnings} warnings`}</Tag>}
+        {warnings > 0 && (
+          <Tag tone={isUrgent ? 'late' : 'due'}>{warnings === 1 ? '1 warning' : `${warnings} warnings`}</Tag>
+        )}
       </div>
       <div className="min-w-0 max-md:col-start-2">
         <p className="text-sm font-semibold">{tube ? tube.says : 'No tube charted'}</p>

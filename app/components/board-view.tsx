@@ -115,6 +115,7 @@ function rowOf(patient: LivePatient, { now, zone, charts }: Seen): BoardPatient 
       })),
     worst: worst ?? 'upcoming',
     warnings: care.warnings.filter(({ level }) => level !== 'blue').length,
+    isUrgent: care.warnings.some(({ level }) => level === 'red'),
   }
 }
 

@@ -38,7 +38,7 @@ export default function WardBoard({ loaderData }: Route.ComponentProps) {
   const { data: board, now, staleSince } = useLive(`/api/wards/${served.data.wardId}/board`, served)
   const here = `/wards/${board.wardId}`
   return (
-    <div className="grid grid-cols-[minmax(0,1fr)] gap-4 px-4 py-3 md:px-6">
+    <div className="grid grid-cols-[minmax(0,1fr)] gap-2 px-4 py-3 md:px-6">
       <header className="flex flex-wrap items-center gap-x-8 gap-y-3">
         <h1 className="text-2xl font-bold">{board.wardName}</h1>
         <BoardSummary board={board} now={now} />
