@@ -97,7 +97,10 @@ async function served(way, settings, env, end, held) {
   })
   const { promise: over, settle } = settled()
   server.once('error', error => settle(error))
-  server.once('exit', code => settle(end.aborted ? 0 : (code ?? 1)))
+  server.once('exit', code => {
+    if (!end.aborted) console.error('The application ended by itself. What it wrote last is above.')
+    settle(end.aborted ? 0 : code || 1)
+  })
   server.once('message', () => console.log(`\nCannulary is at ${settings.address}   End it with Ctrl-C.\n`))
   const watch = held ? setInterval(() => void revive(held).catch(settle), 1000) : undefined
   const stop = () => {
