@@ -53,9 +53,9 @@ function BedForm({ bed, reply }: BedFormProps) {
     <Form method="post" {...getFormProps(form)} className="grid gap-3 border-b border-hair pb-5">
       <input type="hidden" name="intent" value="bed" />
       <input type="hidden" name="id" value={id} />
-      <BedFormFields fields={fields} bed={label} />
       <FieldErrors id={fields.retired.id} errors={fields.retired.errors} />
-      <div className="flex flex-wrap items-center gap-3">
+      <div className="flex flex-wrap items-end gap-x-4 gap-y-3">
+        <BedFormFields fields={fields} bed={label} />
         <Button name="retired" value={retired ? 'yes' : 'no'}>
           Save
         </Button>
@@ -64,7 +64,7 @@ function BedForm({ bed, reply }: BedFormProps) {
             {retired ? 'Take into use again' : 'Take out of use'}
           </Button>
         )}
-        <span className="text-ink2">{state}</span>
+        <span className="self-center text-ink2">{state}</span>
       </div>
     </Form>
   )

@@ -35,10 +35,10 @@ export interface BedFormFieldsProps {
   readonly bed: string
 }
 
-/** A bed's label and its place on the board, in one row. */
+/** A bed's label and its place on the board. */
 export function BedFormFields({ fields: { label, position }, bed }: BedFormFieldsProps) {
   return (
-    <div className="flex flex-wrap gap-4">
+    <>
       <TextField key={label.key} {...textOf(label)} label={`Label of bed ${bed}`} maxLength={16} short />
       <TextField
         key={position.key}
@@ -48,6 +48,6 @@ export function BedFormFields({ fields: { label, position }, bed }: BedFormField
         maxLength={3}
         short
       />
-    </div>
+    </>
   )
 }

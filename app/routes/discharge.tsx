@@ -78,7 +78,7 @@ function DischargeForm({ shown, reply, back }: DischargeFormProps) {
   return (
     <Form method="post" {...getFormProps(form)} className="grid gap-5">
       <ErrorSummary title="Not discharged yet. Please check:" errors={momentErrorsOf(form)} />
-      <ChoiceField {...chosenOf(reason)} label="Where to" options={dischargeWords} />
+      <ChoiceField {...chosenOf(reason)} label="Destination" options={dischargeWords} />
       <MomentFields fields={fields} zone={shown.zone} label="Left" daysBack={DAYS_BACK} />
       {(careAfter.errors !== undefined || careAfter.initialValue !== undefined) && (
         <ChoiceField

@@ -18,6 +18,7 @@ import type { Route } from './+types/patients.ts'
 
 const PAGE_SIZE = 25
 const LONGEST_SEARCH = 100
+const COLUMNS = ['Patient', 'Born', 'Record no.', 'Where', 'Admitted']
 
 export const meta: Route.MetaFunction = () => [{ title: 'Patients | Cannulary' }]
 
@@ -104,7 +105,7 @@ export default function Patients({ loaderData, actionData }: Route.ComponentProp
           <Table
             caption={`Patients: ${total}`}
             captionShown
-            columns={['Patient', 'Born', 'Record no.', 'Where', 'Admitted', 'Discharged'].map(label => ({ label }))}
+            columns={[...COLUMNS, ...(discharged ? ['Discharged'] : [])].map(label => ({ label }))}
             rows={patients.map(patient => ({ key: patient.id, cells: cellsOf(patient) }))}
           />
         )}
@@ -120,7 +121,8 @@ function cellsOf({ id, name, born, recordNumber, where, since, until }: ReturnTy
       {name}
     </Link>
   )
-  return [link, born, recordNumber, where, since, until ?? '']
+  const whole = (text: string) => <span className="whitespace-nowrap">{text}</span>
+  return [link, whole(born), whole(recordNumber), where, whole(since), whole(until ?? '')]
 }
 
 interface PagesProps {

@@ -18,11 +18,11 @@ const labels: Readonly<Record<string, string>> = {
   sex: 'Sex',
   allergies: 'Allergies',
   upperAirway: 'Upper airway',
-  ventilated: 'Ventilated',
+  ventilated: 'Ventilation through the tube',
   oxygen: 'Oxygen',
   spo2Low: 'SpO2 target from',
   spo2High: 'SpO2 target to',
-  dischargeReason: 'Where to',
+  dischargeReason: 'Destination',
   dischargeNote: 'Note',
 }
 

@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import { careFields, choice, date, fieldsOf, quantity, text, yesNo } from '../care/field.ts'
+import { careFields, choice, date, fieldsOf, quantity, text } from '../care/field.ts'
 
 const identifiers = {
   recordNumber: text({ label: 'Record number', section: 'Who', hint: 'As on the wristband', maxLength: 32 }),
@@ -24,7 +24,7 @@ export const person = careFields({
     hint: 'Not open after a laryngectomy: they breathe only through the neck',
     options: { open: 'Open', 'not open': 'Not open: laryngectomy', 'not known': 'Not known' },
   }),
-  ventilated: choice({ label: 'Ventilated through the tube', options: yesNo }),
+  ventilated: choice({ label: 'Ventilation', options: { yes: 'Through the tube', no: 'None' } }),
   allergies: text({
     label: 'Allergies',
     hint: 'Write None known when you have asked and there are none',

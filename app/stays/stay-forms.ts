@@ -26,7 +26,7 @@ export const dischargeWords = {
 
 export const dischargeSchema = z.object({
   ...momentFields,
-  reason: choice({ label: 'Where to', options: dischargeWords }),
+  reason: choice({ label: 'Destination', options: dischargeWords }),
   note: text({ label: 'Note', maxLength: 500 }).optional(),
   careAfter: z.literal('yes', { error: 'Tick it to discharge all the same' }).optional(),
 })

@@ -123,8 +123,8 @@ test('a discharge of before the last care asks, and takes the answer', async () 
 })
 
 test.each<[string, Fields, string, RegExp]>([
-  ['no answer', { reason: '' }, 'reason', /Choose the where to/],
-  ['an answer that is none', { reason: 'space' }, 'reason', /Choose the where to/],
+  ['no answer', { reason: '' }, 'reason', /Choose the destination/],
+  ['an answer that is none', { reason: 'space' }, 'reason', /Choose the destination/],
   ['a note of 5000 letters', { note: 'x'.repeat(5000) }, 'note', /at most 500/],
 ])('a discharge with %s is put right at its field', async (_, wrong, field, words) => {
   const answer = await send('discharge', home(wrong))
