@@ -1,7 +1,7 @@
 import { fieldsOf, isShown } from '../care/field.ts'
 import type { AnyCareKind } from '../care/kind.ts'
 import { sentence } from '../care/sentence.ts'
-import { ownFields, readCare, readSpine } from './chart-form.ts'
+import { ownFields, readCare, readChart, readSpine } from './chart-form.ts'
 import { type Calendar, performedAt, shortMoment } from './performed-at.ts'
 
 /** Who signs, as a sentence ends with it. */
@@ -23,8 +23,12 @@ export function liveSentence(kind: AnyCareKind, sent: FormData, signer: Signer, 
   const care = readCare(kind, form)
   if (care.status !== 'success') return { ready: false, needed: [], ...firstOf(care.error) }
   const spine = readSpine(form)
-  const when = spine ? performedAt(spine, calendar) : undefined
-  if (!when?.ok) return { ready: false, needed: ['when it was done'], ...(when ? { wrong: when.message } : {}) }
+  if (!spine) {
+    const whole = readChart(kind, form)
+    return { ready: false, needed: [], ...(whole.status === 'success' ? {} : firstOf(whole.error)) }
+  }
+  const when = performedAt(spine, calendar)
+  if (!when.ok) return { ready: false, needed: [], wrong: when.message }
   return { ready: true, says: chartedSentence(kind, care.value.care, when.at, signer, calendar) }
 }
 
@@ -50,7 +54,9 @@ function missing(kind: AnyCareKind, form: FormData): readonly string[] {
     .map(({ meta }) => meta.label.charAt(0).toLowerCase() + meta.label.slice(1))
 }
 
-function firstOf(errors: Readonly<Record<string, readonly string[] | null>> | null): { readonly wrong?: string } {
+function firstOf(errors: Readonly<Record<string, readonly string[] | null>> | null): {
+  readonly wrong?: string
+} {
   const first = Object.values(errors ?? {}).find(messages => messages && messages.length > 0)?.[0]
   return first === undefined ? {} : { wrong: first }
 }
