@@ -23,6 +23,7 @@ export default [
     route('patients', 'routes/patients.tsx'),
     route('patients/:patientId', 'routes/patient.tsx', [
       index('routes/timeline.tsx'),
+      route('emergency', 'routes/emergency.tsx'),
       route('chart/:kind', 'routes/chart.tsx'),
       route('details', 'routes/patient-details.tsx'),
       route('move', 'routes/move.tsx'),

@@ -1,5 +1,6 @@
 import { Outlet } from 'react-router'
 import { patientContext, patientOnly } from '#app/auth/patient-access.server.ts'
+import { LinkButton } from '#app/components/button.tsx'
 import { PatientBanner } from '#app/components/patient-banner.tsx'
 import { patientHead } from '#app/views/patient-care.server.ts'
 import { patientCare } from '#app/views/patient-context.server.ts'
@@ -14,10 +15,17 @@ export async function loader({ context }: Route.LoaderArgs) {
 }
 
 /** Every page of a patient stands under who they are. */
-export default function Patient({ loaderData: { banner, discharged, via } }: Route.ComponentProps) {
+export default function Patient({ loaderData: { banner, patientId, discharged, via } }: Route.ComponentProps) {
   return (
     <>
-      <PatientBanner patient={banner}>
+      <PatientBanner
+        patient={banner}
+        actions={
+          <LinkButton variant="danger" href={`/patients/${patientId}/emergency`}>
+            Airway emergency steps
+          </LinkButton>
+        }
+      >
         {discharged && <p className="mt-2 font-semibold">{discharged} Earlier care stays readable.</p>}
         {via === 'grant' && (
           <p className="mt-2 rounded-control border border-late bg-late-tint px-3 py-1.5 font-semibold text-late">
