@@ -8,6 +8,7 @@ import type { AnyCareKind, TaskRule } from './kind.ts'
 import type { AnySetting } from './policy.ts'
 import { stomaAndSkin } from './stoma-and-skin/kind.ts'
 import { suction } from './suction/kind.ts'
+import { ties } from './ties/kind.ts'
 import { tubeChange } from './tube-change/kind.ts'
 
 /** Every kind of care, in the order of lists and lanes. Adding one is a folder and a line here. */
@@ -15,6 +16,7 @@ export const careKinds = [
   innerCannula,
   cuffPressure,
   stomaAndSkin,
+  ties,
   suction,
   tubeChange,
   decannulation,

@@ -1,43 +1,20 @@
 import { type SkinSite, type StomaData, stomaChecks } from '#app/care/stoma-and-skin/schema.ts'
 import { dressingInterval } from '#app/care/stoma-and-skin/settings.ts'
-import { earlier, later, minutes, since } from '#app/time/duration.ts'
-import { nextShift, type Shift, shiftAt } from '#app/time/shift.ts'
+import { since } from '#app/time/duration.ts'
 import { type Bedside, hoursBefore, pacedTimes, placeAt, tubeAt } from './bedside.ts'
 import { type Draft, draft } from './draft.ts'
+import { leftOut, momentIn, shiftsOf } from './shifts.ts'
 
 /** Checks of stoma and skin: one in each shift, and those at which the dressing was changed. */
 export function stomaCare(bedside: Bedside): readonly Draft[] {
   const { dressing } = bedside.story.stands
   const changes =
     dressing === undefined ? [] : pacedTimes(bedside, { every: dressingInterval.default, pastDue: dressing })
-  const looks = shiftsToLookIn(bedside)
+  const looks = shiftsOf(bedside)
+    .slice(leftOut[bedside.story.stands.stoma])
     .filter(shift => !changes.some(at => at >= shift.startsAt && at < shift.endsAt))
     .flatMap(shift => momentIn(shift, bedside))
   return [...changes.map(at => checkAt(bedside, at, true)), ...looks.map(at => checkAt(bedside, at, false))]
-}
-
-/** The shifts of the stay, latest first, without those in which the story has nobody look. */
-function shiftsToLookIn(bedside: Bedside): readonly Shift[] {
-  const { until, story } = bedside
-  const start = careFrom(bedside)
-  const shifts: Shift[] = []
-  const { shiftTimes } = bedside.place.ward.row
-  let shift = shiftAt(start, shiftTimes, bedside.zone)
-  while (shift.startsAt <= until) {
-    shifts.unshift(shift)
-    shift = nextShift(shift, shiftTimes, bedside.zone)
-  }
-  const leftOut = { done: 0, due: 1, missed: 2 }
-  return shifts.slice(leftOut[story.stands.stoma])
-}
-
-const careFrom = ({ tubes, admittedAt }: Bedside): Date => later(tubes[0]?.from ?? admittedAt, minutes(10))
-
-/** A minute of the part of a shift that lies within the stay; none when that part has hardly begun. */
-function momentIn(shift: Shift, bedside: Bedside): readonly Date[] {
-  const from = Math.max(later(shift.startsAt, minutes(2)).getTime(), careFrom(bedside).getTime())
-  const to = Math.min(earlier(shift.endsAt, minutes(30)).getTime(), bedside.until.getTime() - minutes(1))
-  return to <= from ? [] : [hoursBefore(new Date(bedside.random.between(from, to)), 0)]
 }
 
 /** A check of every place, as it is charted at most beds. */
@@ -80,7 +57,7 @@ function exudate({ story, random }: Bedside): Pick<StomaData, 'exudate' | 'exuda
 }
 
 /** Health care assistants help with dressings and chart nothing themselves. */
-function secondPerson(ward: string, random: Bedside['random']): string {
+export function secondPerson(ward: string, random: Bedside['random']): string {
   return random.pick(
     ward === 'Birch ward' ? ['E. Quillfeather', 'S. Nwachukwu'] : ['M. Tarrantish', 'L. Okumah', 'alone'],
   )

@@ -6,6 +6,7 @@ import { cuffCare } from './chart-cuff.ts'
 import { innerCannulaCare } from './chart-inner-cannula.ts'
 import { stomaCare } from './chart-stoma.ts'
 import { suctionCare } from './chart-suction.ts'
+import { tieCare } from './chart-ties.ts'
 import { tubeCare } from './chart-tube.ts'
 import type { Draft } from './draft.ts'
 import { idAt } from './random.ts'
@@ -51,7 +52,7 @@ export function entriesOf(bedside: Bedside, stayId: string): readonly DemoEntry[
 
 function draftsOf(bedside: Bedside): readonly Draft[] {
   const { story } = bedside
-  return [
+  const usual = [
     ...tubeCare(bedside),
     ...innerCannulaCare(bedside),
     ...cuffCare(bedside),
@@ -59,6 +60,7 @@ function draftsOf(bedside: Bedside): readonly Draft[] {
     ...stomaCare(bedside),
     ...(story.extra ?? []).flatMap(happens => happens(bedside)),
   ]
+  return [...usual, ...tieCare(bedside, usual)]
 }
 
 const USUAL_DELAY = [1, 9] as const // minutes from the act to its being written

@@ -2,6 +2,7 @@ import type { StomaData } from '#app/care/stoma-and-skin/schema.ts'
 import type { Bedside } from './bedside.ts'
 import type { Draft } from './draft.ts'
 import type { DemoPatient } from './rows.ts'
+import type { ShiftStanding } from './shifts.ts'
 import type { TubeName } from './tubes.ts'
 
 /** One bed of the demo hospital: who is in it, with which tube, and how their care stands at the moment of seeding. */
@@ -53,8 +54,7 @@ export interface Standing {
   readonly cuffFound?: 'high' | 'low'
   readonly suction?: number
   readonly dressing?: number
-  /** Checked in this shift; not yet in this shift; not in the last one either. */
-  readonly stoma: 'done' | 'due' | 'missed'
+  readonly stoma: ShiftStanding
 }
 
 export type Happening = (bedside: Bedside) => readonly Draft[]
