@@ -1,6 +1,6 @@
 import { spawn } from 'node:child_process'
 import { once } from 'node:events'
-import { QueryTypes } from 'sequelize'
+import { QueryTypes, type Sequelize } from 'sequelize'
 import { inject } from 'vitest'
 import { connection } from '#database/connection.server.ts'
 import { grantAppRights } from '#database/grants.server.ts'
@@ -91,18 +91,16 @@ export async function startedApp({
   }
 }
 
-/** The rows that a statement gives, as the owner of the application's database sees them, or what it changed. */
-export async function rowsOf<Row extends object>(
-  { ownerUrl }: StartedApp,
-  sql: string,
-  replacements: Readonly<Record<string, unknown>> = {},
-): Promise<Row[]> {
-  const owner = connection(ownerUrl, { maxConnections: 1 })
-  try {
-    return await owner.query<Row>(sql, { replacements, type: QueryTypes.SELECT })
-  } finally {
-    await owner.close()
-  }
+type Values = Readonly<Record<string, unknown>>
+
+/** The rows that a statement gives, as the owner of the application's database sees them. */
+export function rowsOf<Row extends object>({ ownerUrl }: StartedApp, sql: string, values: Values = {}): Promise<Row[]> {
+  return connected(ownerUrl, owner => owner.query<Row>(sql, { replacements: { ...values }, type: QueryTypes.SELECT }))
+}
+
+/** Changes rows behind the application's back. */
+export async function changeRows({ ownerUrl }: StartedApp, sql: string, values: Values = {}): Promise<void> {
+  await connected(ownerUrl, owner => owner.query(sql, { replacements: { ...values }, type: QueryTypes.RAW }))
 }
 
 async function serving(env: Record<string, string>, note: (chunk: Buffer) => void) {
@@ -128,19 +126,20 @@ async function serving(env: Record<string, string>, note: (chunk: Buffer) => voi
 }
 
 async function migrated(databaseUrl: string, ownerUrl: string) {
-  const owner = connection(ownerUrl, { maxConnections: 3 })
-  try {
+  await connected(ownerUrl, async owner => {
     await migrateUp(owner)
     await grantAppRights(owner, databaseUrl)
-  } finally {
-    await owner.close()
-  }
+  })
 }
 
-async function asOwner(server: string, statement: string) {
-  const owner = connection(`${server}/`, { maxConnections: 1 })
+function asOwner(server: string, statement: string) {
+  return connected(`${server}/`, owner => owner.query(statement))
+}
+
+async function connected<T>(url: string, work: (owner: Sequelize) => Promise<T>): Promise<T> {
+  const owner = connection(url, { maxConnections: 3 })
   try {
-    await owner.query(statement)
+    return await work(owner)
   } finally {
     await owner.close()
   }

@@ -2,7 +2,7 @@ import axe from 'axe-core'
 import { type Browser, type BrowserContextOptions, chromium, type Page } from 'playwright-core'
 import { CHROMIUM } from '../../database/run/debian-package.mjs'
 
-export { rowsOf, type StartedApp, startedApp } from './app.ts'
+export { changeRows, rowsOf, type StartedApp, startedApp } from './app.ts'
 
 const FLAGS = [
   ...['--no-sandbox', '--disable-gpu', '--disable-quic', '--no-first-run', '--disable-background-networking'],
