@@ -3,6 +3,7 @@ import { cuffPressure } from './cuff-pressure/kind.ts'
 import { decannulation } from './decannulation/kind.ts'
 import { deferral } from './deferral/kind.ts'
 import { generalSettings } from './general-settings.ts'
+import { humidification } from './humidification/kind.ts'
 import { innerCannula } from './inner-cannula/kind.ts'
 import type { AnyCareKind, TaskRule } from './kind.ts'
 import type { AnySetting } from './policy.ts'
@@ -18,6 +19,7 @@ export const careKinds = [
   stomaAndSkin,
   ties,
   suction,
+  humidification,
   tubeChange,
   decannulation,
   deferral,

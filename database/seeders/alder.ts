@@ -67,7 +67,7 @@ export const alderStories: readonly BedStory[] = [
     admittedHoursAgo: 116,
     tube: { name: 'tarn', inserted: { daysAgo: 9, stomaDaysAgo: 30 }, technique: 'surgical' },
     secretions: 'moderate',
-    stands: { suction: -2.5, dressing: -8, stoma: 'done' },
+    stands: { suction: -2.5, dressing: -8, stoma: 'done', humidification: 'due' },
   },
   {
     bed: 'A8',

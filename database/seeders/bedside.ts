@@ -108,3 +108,8 @@ export function pacedTimes(bedside: Bedside, { every, pastDue }: { every: number
   }
   return times
 }
+
+/** How far past due a clock stands at a bed where nothing is late, in hours: some are just about due. */
+export function inTime({ random }: Bedside, every: number): number {
+  return -every * random.between(0.04, 0.85)
+}

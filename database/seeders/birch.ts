@@ -70,7 +70,7 @@ export const birchStories: readonly BedStory[] = [
     admittedHoursAgo: 90,
     tube: { name: 'marrow', inserted: { daysAgo: 8, stomaDaysAgo: 31 }, technique: 'surgical' },
     secretions: 'moderate',
-    stands: { cuff: -1.9, suction: 0.6, dressing: 2.8, stoma: 'due' },
+    stands: { cuff: -1.9, suction: 0.6, dressing: 2.8, stoma: 'due', humidification: 'due' },
   },
   {
     bed: 'B8',

@@ -3,6 +3,7 @@ import { versionOf } from '#app/care/payload.ts'
 import { later, minutes } from '#app/time/duration.ts'
 import { type Bedside, placeAt } from './bedside.ts'
 import { cuffCare } from './chart-cuff.ts'
+import { humidificationCare } from './chart-humidification.ts'
 import { innerCannulaCare } from './chart-inner-cannula.ts'
 import { stomaCare } from './chart-stoma.ts'
 import { suctionCare } from './chart-suction.ts'
@@ -60,7 +61,7 @@ function draftsOf(bedside: Bedside): readonly Draft[] {
     ...stomaCare(bedside),
     ...(story.extra ?? []).flatMap(happens => happens(bedside)),
   ]
-  return [...usual, ...tieCare(bedside, usual)]
+  return [...usual, ...tieCare(bedside, usual), ...humidificationCare(bedside)]
 }
 
 const USUAL_DELAY = [1, 9] as const // minutes from the act to its being written

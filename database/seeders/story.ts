@@ -55,6 +55,8 @@ export interface Standing {
   readonly suction?: number
   readonly dressing?: number
   readonly stoma: ShiftStanding
+  /** Of care that every bed has in time unless it is said here. */
+  readonly humidification?: ShiftStanding
 }
 
 export type Happening = (bedside: Bedside) => readonly Draft[]
