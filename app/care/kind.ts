@@ -154,7 +154,7 @@ export interface CareKind<Slug extends string, Schema extends z.ZodObject> exten
   problems?(data: z.output<Schema>, context: CareContext, known: KnownNames): readonly FormProblem[]
   /** A deferral is not care done: the strip shows it with a note instead of a dot. */
   readonly marksAs?: 'deferred'
-  /** Drawn as a triangle instead of a dot. */
+  /** Drawn as a triangle instead of a dot; `context` is that of the moment before the act, as for `warnings`. */
   outOfRange?(data: z.output<Schema>, context: CareContext): boolean
 }
 

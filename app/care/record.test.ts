@@ -2,7 +2,7 @@ import { expect, test } from 'vitest'
 import { careFields, quantity } from './field.ts'
 import { charted } from './kind.ts'
 import { aContext, aCorrection, anEntry, at } from './make.ts'
-import { effectiveEntries, knownAt, latestFirst } from './record.ts'
+import { effectiveEntries, knownAt, latestFirst, recordBefore } from './record.ts'
 
 const level = (slug: string) =>
   charted({ slug, schema: careFields({ ml: quantity({ label: 'Level', unit: 'mL', min: 0, max: 500 }) }) })
@@ -112,4 +112,13 @@ test('an unreadable correction does not bring back what it corrects', () => {
 test('an entry of the record carries who and when, and neither version nor raw text', () => {
   expect(recordOf(early).latest(water)).toMatchObject({ recordedByName: 'Ama Mensah', performedAt: at('08:00') })
   expect(recordOf(early).latest(water)).not.toHaveProperty('raw')
+})
+
+test('the record before an act holds what had been done by then, and not the act', () => {
+  const sameMinute = anEntry(tank, '10:00', { ml: 5 })
+  const after = anEntry(water, '10:01', { ml: 400 })
+  const before = recordBefore(recordOf(early, late, sameMinute, after), late)
+  expect(before.of(water).map(entry => entry.data.ml)).toEqual([100])
+  expect(before.latest(water, ({ ml }) => ml > 100)).toBeUndefined()
+  expect(before.since(tank, at('10:00')).map(entry => entry.data.ml)).toEqual([5])
 })

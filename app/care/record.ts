@@ -69,6 +69,22 @@ function groupedByKind(entries: readonly StoredEntry[]): ReadonlyMap<string, rea
   return groups
 }
 
+/**
+ * The record as it was at an act that is on it: what had been done by then, without the act itself. An older act is judged by the
+ * tube and the cuff of its own time.
+ */
+export function recordBefore(record: PatientRecord, act: Pick<Entry, 'id' | 'performedAt'>): PatientRecord {
+  const isBefore = (entry: Entry) => entry.performedAt <= act.performedAt && entry.id !== act.id
+  return {
+    admittedAt: record.admittedAt,
+    patient: record.patient,
+    of: kind => record.of(kind).filter(isBefore),
+    latest: (kind, where) =>
+      record.latest(kind, (data, entry) => isBefore(entry) && (where === undefined || where(data, entry))),
+    since: (kind, from) => record.since(kind, from).filter(isBefore),
+  }
+}
+
 const readings = new WeakMap<StoredEntry, readonly Entry[]>()
 
 /** The entry with its payload read, or nothing. Kept per stored entry: entries never change. */

@@ -8,12 +8,13 @@ import {
 } from '../care/kind.ts'
 import { careKinds } from '../care/kinds.ts'
 import { type Lane, lanes } from '../care/lanes.ts'
-import { dwellNotice, dwellStrongNotice } from '../care/tube-change/settings.ts'
+import { dwellNotice, dwellStrongNotice } from '../care/tube-change/dwell-settings.ts'
 import { byDate } from '../care/tube-change/tasks.ts'
 import { dwellLimit, insertedOn, type TubeEntry, tubeInPlace, tubeWords } from '../care/tube-change/tube.ts'
 import type { WarningLevel } from '../care/warning.ts'
 import { type DwellStage, daysLeft, dwellDay, dwellStage } from '../clinical/dwell.ts'
 import { localDay } from '../time/zone.ts'
+import { contextBefore } from './context.ts'
 import { type DueTask, dueTasks } from './due-tasks.ts'
 import { statusOf, type TaskStatus } from './status.ts'
 import { standingWarnings } from './warnings.ts'
@@ -162,9 +163,14 @@ function entriesSince(record: PatientRecord, kind: AnyCareKind, from: Date): rea
 }
 
 function mark(kind: AnyCareKind, entry: Entry, context: CareContext): MarkView {
-  const outside = kind.outOfRange?.(entry.data, context) === true
+  const outside = isOutOfRange(kind, entry, context)
   const shape = outside ? 'out of range' : kind.marksAs === 'deferred' ? 'deferred' : 'done'
   return { at: entry.performedAt.getTime(), kind: kind.slug, lane: kind.lane, shape }
+}
+
+/** Whether an act on record is drawn as out of range: judged by tube, cuff and own values of its time. */
+export function isOutOfRange(kind: AnyCareKind, entry: Entry, context: CareContext): boolean {
+  return kind.outOfRange?.(entry.data, contextBefore(entry, context)) === true
 }
 
 /** The lanes of a board, in their fixed order, with their marks and tasks. */

@@ -4,7 +4,7 @@ import { readEntry } from '#app/care/record.ts'
 import { dueTasks } from '#app/rules/due-tasks.ts'
 import { entryWords, lateWords } from '#app/rules/entry-words.ts'
 import { type TubeCardOrNone, tubeCard } from '#app/rules/tube-card.ts'
-import { type CareView, careView } from '#app/rules/views.ts'
+import { type CareView, careView, isOutOfRange } from '#app/rules/views.ts'
 import { type WhyDue, whyDue } from '#app/rules/why.ts'
 import { showDateTime, showTime } from '#app/time/display.ts'
 import { type Duration, earlier, hours } from '#app/time/duration.ts'
@@ -118,14 +118,14 @@ function entryLine(entry: StoredEntry, by: Superseding | null, { context, ward }
     late: (context && lateWords(entry, context.values)) ?? null,
     status,
     statusSays: statusWords(entry, by, ward.zone),
-    outOfRange: isOutOfRange(entry, context),
+    outOfRange: isMarked(entry, context),
   }
 }
 
-function isOutOfRange(stored: StoredEntry, context: CareContext | null): boolean {
+function isMarked(stored: StoredEntry, context: CareContext | null): boolean {
   const kind = findKind(stored.kind)
   const entry = kind && readEntry(kind, stored)[0]
-  return entry !== undefined && context !== null && kind?.outOfRange?.(entry.data, context) === true
+  return kind !== undefined && entry !== undefined && context !== null && isOutOfRange(kind, entry, context)
 }
 
 function statusWords(entry: StoredEntry, by: Superseding | null, zone: string): string | null {
