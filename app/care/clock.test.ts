@@ -89,7 +89,7 @@ test('a night shift over the change of clocks is an hour shorter and still ends 
 })
 
 test('by calendar day: due all day, overdue from midnight, serious a day later', () => {
-  const clock = dayClock({ dueOn: '2026-03-30', soonDays: 7, ward, last: undefined })
+  const clock = dayClock({ dueOn: '2026-03-30', soonDays: 7, ward, last: done('2026-03-02 10:00') })
   expect(clock).toMatchObject({ byDay: '2026-03-30' })
   expect(windowOf(clock)).toEqual({
     dueAt: at('2026-03-30 00:00'),
@@ -101,7 +101,7 @@ test('by calendar day: due all day, overdue from midnight, serious a day later',
 })
 
 test('the day of a change of clocks is due from one local midnight to the next', () => {
-  const window = windowOf(dayClock({ dueOn: '2026-03-29', soonDays: 1, ward, last: undefined }))
+  const window = windowOf(dayClock({ dueOn: '2026-03-29', soonDays: 1, ward, last: done('2026-03-02 10:00') }))
   expect(window.closesAt.getTime() - window.opensAt.getTime()).toBe(hours(23))
 })
 
@@ -119,5 +119,10 @@ test.each([
   ['a suspended one rather than none', noClock, still, still],
   ['a suspended one rather than none, in either order', still, noClock, still],
 ])('of two clocks counts %s', (_, a: Clock, b: Clock, expected: Clock) => {
-  expect(sooner(a, b)).toBe(expected)
+  expect(sooner(a, b)).toEqual(expected)
+})
+
+test('the first to fall due counts from the later of two moments, so that an event is not put off before it happened', () => {
+  const turned = promptClock({ event: at('15:00'), within: minutes(15), last: undefined, because: 'turned' })
+  expect(sooner(six, turned)).toMatchObject({ window: windowOf(six), from: at('15:00') })
 })

@@ -22,6 +22,8 @@ export type Clock =
       readonly window: DueWindow
       /** The act that the clock counts from; undefined when it counts from admission or insertion. */
       readonly last: Entry | undefined
+      /** The moment it counts from: act, event or start. What was put off before it was other care. */
+      readonly from: Date
       /** Why it is due sooner than the plain interval. */
       readonly because?: string
       /** By calendar date (dwell), not by the hour. */
@@ -47,6 +49,7 @@ export function intervalClock(options: {
     state: 'running',
     window: windowAround(later(from, options.interval), options.interval),
     last: options.last,
+    from,
     ...(options.because === undefined ? {} : { because: options.because }),
   }
 }
@@ -81,6 +84,7 @@ export function promptClock(options: {
       seriousAt: later(closesAt, hours(1)),
     },
     last: options.last,
+    from: options.event,
     because: options.because,
   }
 }
@@ -96,7 +100,8 @@ export function shiftClock(options: {
   const shift = done
     ? nextShift(shiftAt(last.performedAt, ward.shiftTimes, ward.zone), ward.shiftTimes, ward.zone)
     : shiftAt(start, ward.shiftTimes, ward.zone)
-  return { state: 'running', window: shiftWindow(shift, done ? shift.startsAt : start), last }
+  const window = shiftWindow(shift, done ? shift.startsAt : start)
+  return { state: 'running', window, last, from: done ? last.performedAt : start }
 }
 
 function shiftWindow(shift: Shift, opensAt: Date): DueWindow {
@@ -115,7 +120,8 @@ export function dayClock(options: {
   readonly dueOn: LocalDay
   readonly soonDays: number
   readonly ward: WardFacts
-  readonly last: Entry | undefined
+  /** The act that the days count from, such as the tube going in. */
+  readonly last: Entry
   readonly because?: string
 }): Clock {
   const { dueOn, ward } = options
@@ -131,14 +137,20 @@ export function dayClock(options: {
       seriousAt: startOfDay(addDays(dueOn, 2), ward.zone),
     },
     last: options.last,
+    from: options.last.performedAt,
     byDay: dueOn,
     ...(options.because === undefined ? {} : { because: options.because }),
   }
 }
 
-/** Of two clocks, the one that falls due first; a suspended or absent clock yields to one that runs. */
+/**
+ * Of two clocks, the one that falls due first, counting from the later of their moments: what was put off before an event was not
+ * that event. A suspended or absent clock yields to one that runs.
+ */
 export function sooner(a: Clock, b: Clock): Clock {
   if (a.state !== 'running') return b.state === 'none' ? a : b
   if (b.state !== 'running') return a
-  return b.window.dueAt < a.window.dueAt ? b : a
+  const first = b.window.dueAt < a.window.dueAt ? b : a
+  const from = Math.max(a.from.getTime(), b.from.getTime())
+  return { ...first, from: new Date(from) }
 }

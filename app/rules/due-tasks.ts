@@ -51,27 +51,33 @@ function running(rule: TaskRule, clock: Clock & { state: 'running' }, context: C
     ...(clock.because === undefined ? {} : { because: clock.because }),
     ...(clock.byDay === undefined ? {} : { byDay: clock.byDay }),
   }
-  const entry = deferralOf(rule.name, clock.last, context)
+  const entry = deferralOf(rule.name, clock, context)
   if (!entry) return { ...known, window: clock.window, status: statusOf(clock.window, context.now) }
   const until = deferredUntil(entry)
-  const window = movedTo(until, clock.window)
+  const window = movedTo(until, clock)
   const status: TaskStatus = context.now < until ? 'deferred' : statusOf(window, context.now)
   return { ...known, window, status, deferral: { entry, until } }
 }
 
-/** The latest deferral of a task, unless the care was done after it. */
+/** The latest deferral of a task, unless the care was done after it, or something asked for it anew. */
 function deferralOf(
   name: string,
-  last: Entry | undefined,
+  { last, from }: Clock & { state: 'running' },
   { record, now }: CareContext,
 ): Entry<DeferralData> | undefined {
   const entry = record.latest(deferrals, (data, { performedAt }) => data.task === name && performedAt <= now)
-  return entry && !(last && last.performedAt > entry.performedAt) ? entry : undefined
+  if (!entry || from > entry.performedAt || (last && last.performedAt > entry.performedAt)) return undefined
+  return entry
 }
 
-/** The same window from the deferral's new time on: no tolerance before it, the same after. */
-function movedTo(until: Date, window: DueWindow): DueWindow {
-  const after = (moment: Date) => new Date(until.getTime() + Math.max(0, moment.getTime() - window.dueAt.getTime()))
+/**
+ * The same window from the deferral's new time on: no tolerance before it, the same after. A new time before the due time moves
+ * nothing, and a limit by date has no tolerance to take along.
+ */
+function movedTo(until: Date, { window, byDay }: Clock & { state: 'running' }): DueWindow {
+  if (until <= window.dueAt) return window
+  const by = byDay === undefined ? until.getTime() - window.dueAt.getTime() : 0
+  const after = (moment: Date) => new Date(Math.max(until.getTime(), moment.getTime() + by))
   return {
     dueAt: until,
     soonAt: until,

@@ -7,7 +7,8 @@ export function standingWords(task: LiveTask, now: number, zone: Zone): string {
   if (task.status === 'suspended' || !task.window) return 'suspended'
   if (isLate(task.status)) return task.byDay ? daysLate(task.byDay, now, zone) : `${showDuration(task.lateBy)} late`
   if (task.byDay) return dayWords(task.byDay, now, zone)
-  if (task.status === 'deferred') return `deferred to ${momentWords(task.window.dueAt, now, zone)}`
+  if (task.status === 'deferred')
+    return `deferred to ${momentWords(task.deferredUntil ?? task.window.dueAt, now, zone)}`
   if (task.status === 'due') return `due by ${momentWords(task.window.closesAt, now, zone)}`
   return `due ${momentWords(task.window.dueAt, now, zone)}`
 }
