@@ -17,5 +17,7 @@ export function standsSince<Data>(
   const last = acts.find(({ data }) => rule.isSettledBy(data))
   if (!last) return []
   const when = showDateTime(last.performedAt, context.ward.zone)
-  return rule.warns(last.data, context).map(warning => ({ ...warning, cause: `${warning.cause} Charted ${when}.` }))
+  // As of that act: the day after the opening was made must not move on with the clock.
+  const then = { ...context, now: last.performedAt }
+  return rule.warns(last.data, then).map(warning => ({ ...warning, cause: `${warning.cause} Charted ${when}.` }))
 }

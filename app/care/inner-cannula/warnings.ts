@@ -2,6 +2,7 @@ import { BREATHING_SOURCE, breathingAction } from '../emergency.ts'
 import type { CareContext } from '../kind.ts'
 import { standsSince } from '../standing.ts'
 import { bleedWarnings } from '../suction/bleeding.ts'
+import { lowSaturation } from '../suction/saturation.ts'
 import { tubeInPlace } from '../tube-change/tube.ts'
 import type { Warning } from '../warning.ts'
 import { actsOnTube, wasSeen } from './acts.ts'
@@ -12,7 +13,7 @@ import type { InnerCannulaData } from './schema.ts'
 /** What an act on the inner cannula asks people to notice as it is charted. */
 export function innerCannulaWarnings(data: InnerCannulaData, context: CareContext): readonly Warning[] {
   return [
-    ...distress(data, context),
+    ...notWell(data, context),
     ...blood(data, context),
     ...fitRules.flatMap(rule => rule.warns(data, context)),
     ...narrowed(data, context),
@@ -20,13 +21,13 @@ export function innerCannulaWarnings(data: InnerCannulaData, context: CareContex
   ]
 }
 
-function distress(data: InnerCannulaData, { record }: CareContext): readonly Warning[] {
-  if (data.tolerance !== 'distress') return []
+function notWell(data: InnerCannulaData, context: CareContext): readonly Warning[] {
+  if (data.tolerance !== 'distress') return lowSaturation('inner-cannula-spo2-low', data, context)
   return [
     {
       name: 'inner-cannula-distress',
       level: 'red',
-      action: breathingAction(record.patient),
+      action: breathingAction(context.record.patient),
       cause: 'Distress at the inner cannula check.',
       source: BREATHING_SOURCE,
     },
@@ -42,6 +43,7 @@ export function standingInnerCannulaWarnings(context: CareContext): readonly War
   if (!tubeInPlace(context.record)) return []
   const acts = actsOnTube(context.record)
   return [
+    ...standsSince(acts, { isSettledBy: () => true, warns: notWell }, context),
     ...standsSince(acts, { isSettledBy: wasSeen, warns: blood }, context),
     ...neverFitted(context),
     ...fitRules.flatMap(rule => standsSince(acts, rule, context)),

@@ -34,4 +34,18 @@ export const streaksAreRed = switchSetting({
   source: { says: 'Streaks only: doctor this shift; a hospital may raise it', standing: 'product proposal' },
 })
 
-export const bleedingSettings = [bleedWindowFrom, bleedWindowTo, streaksAreRed]
+export const bleedWatchHours = numberSetting({
+  name: 'bleed-watch',
+  label: 'A bleed is kept in sight after it has stopped for',
+  unit: 'h',
+  default: 48,
+  min: 12,
+  max: 168,
+  affects: 'Every warning of blood: a warning bleed may be the first of two, hours or days apart.',
+  source: {
+    says: 'A warning bleed goes before more than half of massive ones (review of fistula of the innominate artery); the hours are a proposal',
+    standing: 'product proposal',
+  },
+})
+
+export const bleedingSettings = [bleedWindowFrom, bleedWindowTo, streaksAreRed, bleedWatchHours]

@@ -19,13 +19,20 @@ export function bleedWarnings(name: string, blood: Blood | undefined, context: C
       name,
       level: isRed ? 'red' : 'amber',
       action: isRed ? BLEED_ACTION : 'Ask a doctor to see the patient this shift.',
-      cause: `${seen[blood]}${day === undefined ? '.' : ` on day ${day} after the opening was made; until day ${context.values.of(bleedWindowTo)} a bleed may warn of a larger one.`}`,
+      cause: bleedCause(seen[blood], context),
       source: bleedWindowTo.source.says,
     },
   ]
 }
 
 const seen = { streaks: 'Streaks of blood', fresh: 'Fresh blood', heavy: 'Heavy bleeding' } as const
+
+/** What was seen, and within the bleed window the day after the opening was made and what a bleed then may herald. */
+export function bleedCause(seenWords: string, context: CareContext): string {
+  const day = dayInWindow(context)
+  if (day === undefined) return `${seenWords}.`
+  return `${seenWords} on day ${day} after the opening was made; until day ${context.values.of(bleedWindowTo)} a bleed may warn of a larger one.`
+}
 
 /** The day since the opening was made when it lies within the window; an opening of unknown age is taken to be in neither. */
 function dayInWindow(context: CareContext): number | undefined {

@@ -2,8 +2,8 @@ import { BREATHING_SOURCE, breathingAction } from '../emergency.ts'
 import type { CareContext } from '../kind.ts'
 import type { Warning } from '../warning.ts'
 import { actsOnTube } from './acts.ts'
+import { isFarBelow, lowSaturation, targetWords } from './saturation.ts'
 import type { SuctionData } from './schema.ts'
-import { spo2Fall, spo2Floor } from './settings.ts'
 
 /** A catheter that would not pass: the tube may be blocked or out of place. */
 export function willNotPass(data: SuctionData, { record }: CareContext): readonly Warning[] {
@@ -12,7 +12,7 @@ export function willNotPass(data: SuctionData, { record }: CareContext): readonl
     : []
 }
 
-/** Distress, or SpO2 that settled too low: by the prescribed target, else by the floor of the policy. */
+/** Distress, or SpO2 that settled too low; or that fell far, with nothing charted of where it settled. */
 export function notWell(data: SuctionData, context: CareContext): readonly Warning[] {
   const { patient } = context.record
   return [
@@ -20,20 +20,12 @@ export function notWell(data: SuctionData, context: CareContext): readonly Warni
     ...(isUnrecovered(data, context)
       ? [red('suction-spo2-not-recovering', `SpO2 ${data.spo2After}% after suction${targetWords(context)}.`, patient)]
       : []),
+    ...lowSaturation('suction-spo2-low', data, context),
   ]
 }
 
-function isUnrecovered({ spo2After }: SuctionData, { record, values }: CareContext): boolean {
-  if (spo2After === undefined) return false
-  const target = record.patient.spo2Low
-  return spo2After <= (target === null ? values.of(spo2Floor) : target - values.of(spo2Fall))
-}
-
-function targetWords({ record: { patient } }: CareContext): string {
-  if (patient.spo2Low === null) return ''
-  return patient.spo2High === null
-    ? `, target at least ${patient.spo2Low}%`
-    : `, target ${patient.spo2Low} to ${patient.spo2High}%`
+function isUnrecovered({ spo2After }: SuctionData, context: CareContext): boolean {
+  return spo2After !== undefined && isFarBelow(spo2After, context)
 }
 
 function red(name: string, cause: string, patient: CareContext['record']['patient']): Warning {

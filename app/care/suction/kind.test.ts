@@ -59,6 +59,8 @@ test.each<[Partial<SuctionData>, boolean]>([
   [{ blood: 'fresh' }, true],
   [{ passed: 'no' }, true],
   [{ tolerance: 'distress' }, true],
+  [{ tolerance: 'desaturation', spo2Low: 84 }, false],
+  [{ tolerance: 'desaturation', spo2Low: 84, spo2After: 86 }, true],
 ])('%o is drawn out of range: %s', (overrides, out) => {
   expect(suction.outOfRange?.({ ...plainSuction, ...overrides }, aContext([], '12:00'))).toBe(out)
 })

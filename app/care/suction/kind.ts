@@ -4,7 +4,7 @@ import { suctions } from './schema.ts'
 import { suctionSentence } from './sentence.ts'
 import { suctionSettings } from './settings.ts'
 import { suctionTasks } from './tasks.ts'
-import { standingSuctionWarnings, suctionWarnings } from './warnings.ts'
+import { isOutOfRange, standingSuctionWarnings, suctionWarnings } from './warnings.ts'
 
 /** The need for suction looked at, and episodes of suction. There is no usual answer: everything in it is a finding. */
 export const suction = careKind({
@@ -18,6 +18,5 @@ export const suction = careKind({
   tasks: suctionTasks,
   warnings: suctionWarnings,
   standing: standingSuctionWarnings,
-  outOfRange: ({ passed, blood, tolerance }) =>
-    passed === 'no' || blood === 'fresh' || blood === 'heavy' || tolerance === 'distress',
+  outOfRange: isOutOfRange,
 })

@@ -122,9 +122,28 @@ test('a catheter that would not pass stands until one passes or the tube is chan
   expect(standing([stuck, anEntry(tubeChanges, '11:30', aTube())])).toEqual([])
 })
 
-test('blood stands until an episode without it', () => {
+test('blood stands until an episode without it, and is then kept in sight', () => {
   expect(standing([anEpisode('11:00', { blood: 'fresh' })])).toEqual(['suction-blood'])
-  expect(standing([anEpisode('11:00', { blood: 'fresh' }), anEpisode('12:00')])).toEqual([])
+  expect(standing([anEpisode('11:00', { blood: 'fresh' }), anEpisode('12:00')])).toEqual(['warning-bleed'])
+  expect(standing([anEpisode('11:00', { blood: 'streaks' }), anEpisode('12:00')])).toEqual([])
+})
+
+test('a standing bleed keeps the day on which it was seen', () => {
+  const entries = [firstTube('2026-03-02'), anEpisode('2026-03-04 12:00', { blood: 'fresh' })]
+  expect(standingSuctionWarnings(aContext(entries, '2026-03-06 12:00'))[0]?.cause).toBe(
+    'Fresh blood. Charted 04-Mar-2026 12:00.',
+  )
+})
+
+test.each<[string, Partial<SuctionData>]>([
+  ['suction-distress', { tolerance: 'distress' }],
+  ['suction-spo2-not-recovering', { tolerance: 'desaturation', spo2Low: 80, spo2After: 85 }],
+  ['suction-spo2-low', { tolerance: 'desaturation', spo2Low: 80 }],
+])('%s stands until somebody looks again', (name, overrides) => {
+  const low = anEpisode('11:00', overrides)
+  expect(standing([low])).toEqual([name])
+  expect(standing([low, anEntry(suctions, '11:10', { act: 'need only' })])).toEqual([])
+  expect(standing([low, anEpisode('11:10')])).toEqual([])
 })
 
 test('a standing warning says when it was charted', () => {
@@ -134,6 +153,7 @@ test('a standing warning says when it was charted', () => {
   )
 })
 
-test('nothing stands once the tube is out for good', () => {
-  expect(standing([anEpisode('11:00', { passed: 'no', blood: 'fresh' }), aRemoval('13:00')])).toEqual([])
+test('nothing but a fresh bleed stands once the tube is out for good', () => {
+  expect(standing([anEpisode('11:00', { passed: 'no' }), aRemoval('13:00')])).toEqual([])
+  expect(standing([anEpisode('11:00', { blood: 'fresh' }), aRemoval('13:00')])).toEqual(['warning-bleed'])
 })
