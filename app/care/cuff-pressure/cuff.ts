@@ -26,34 +26,53 @@ export function cuffState(record: PatientRecord): CuffState {
   if (!tube) return 'no tube'
   if (tube.data.cuff === 'none') return 'no cuff'
   if (tube.data.cuff !== 'air') return tube.data.cuff
-  const change = record.latest(
+  const said = record.latest(
     cuffChecks,
-    (data, entry) => data.cuffNow !== undefined && entry.performedAt >= tube.performedAt,
+    (data, entry) => cuffLeft(data) !== undefined && entry.performedAt >= tube.performedAt,
   )
-  return change?.data.cuffNow ?? 'inflated'
+  return (said && cuffLeft(said.data)) ?? 'inflated'
 }
 
-/** Whether a reading may be held against the band: only that of an air cuff that is not deliberately down. */
-export function isBanded(data: CuffData, record: PatientRecord): boolean {
+/** How a check left the cuff: as charted, else up when there is pressure in it, else not said. */
+export function cuffLeft(data: CuffData): 'inflated' | 'deflated' | undefined {
+  if (data.cuffNow) return data.cuffNow
+  const left = leftCmH2O(data)
+  return left !== undefined && left > 0 ? 'inflated' : undefined
+}
+
+/** Whether the band applies to a pressure (cmH2O) of this check: that of an air cuff which is not deliberately down. */
+function isBanded(cmH2O: number, data: CuffData, record: PatientRecord): boolean {
   const state = cuffState(record)
-  return (state === 'inflated' || (state === 'deflated' && data.cuffNow === 'inflated')) && data.cuffNow !== 'deflated'
+  if (data.cuffNow === 'deflated') return false
+  return state === 'inflated' || (state === 'deflated' && cmH2O > 0)
 }
 
 /** The class of the found value, unrounded; undefined when not measured or when the band does not apply. */
 export function foundClass(data: CuffData, context: CareContext): CuffClass | undefined {
-  const found = foundCmH2O(data)
-  return found === undefined || !isBanded(data, context.record) ? undefined : cuffClass(found, cuffBand(context.values))
+  return classOf(foundCmH2O(data), data, context)
 }
 
 /** The class of the value the cuff was left at. */
 export function leftClass(data: CuffData, context: CareContext): CuffClass | undefined {
-  const left = leftCmH2O(data)
-  return left === undefined || !isBanded(data, context.record) ? undefined : cuffClass(left, cuffBand(context.values))
+  return classOf(leftCmH2O(data), data, context)
+}
+
+function classOf(cmH2O: number | undefined, data: CuffData, { record, values }: CareContext): CuffClass | undefined {
+  return cmH2O === undefined || !isBanded(cmH2O, data, record) ? undefined : cuffClass(cmH2O, cuffBand(values))
 }
 
 /** A reading that sets the clock back: taken with a gauge, and left within the band. */
 export function endsInBand(data: CuffData, values: Values): boolean {
+  return isGauged(data) && isLeftInBand(data, values)
+}
+
+/** Whether the cuff was left within the band, whatever it was set by. */
+export function isLeftInBand(data: CuffData, values: Values): boolean {
   const left = leftCmH2O(data)
-  const gauged = data.method === 'manometer' || data.method === 'controller'
-  return gauged && left !== undefined && cuffClass(left, cuffBand(values)) === 'in range'
+  return left !== undefined && cuffClass(left, cuffBand(values)) === 'in range'
+}
+
+/** Read on a gauge: volume and leak techniques set a cuff, they do not measure it. */
+export function isGauged({ method }: CuffData): boolean {
+  return method === 'manometer' || method === 'controller'
 }

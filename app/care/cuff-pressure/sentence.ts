@@ -1,3 +1,4 @@
+import { sentence } from '../sentence.ts'
 import type { CuffData } from './schema.ts'
 
 const by: Readonly<Record<CuffData['method'], string>> = {
@@ -33,7 +34,7 @@ export function cuffSentence(data: CuffData): string {
     ...(data.reason ? [why[data.reason]] : []),
     ...air(data),
     ...(data.leak === 'yes' ? ['Leak or voice with the cuff up.'] : []),
-    ...(data.note ? [data.note.endsWith('.') ? data.note : `${data.note}.`] : []),
+    ...(data.note ? [sentence(data.note)] : []),
   ].join(' ')
 }
 

@@ -65,7 +65,7 @@ export const cuffInterval = numberSetting({
 
 export const cuffEventCheck = numberSetting({
   name: 'cuff-pressure-event-check',
-  label: 'Cuff pressure check after inflation, tube change, turn or transfer within',
+  label: 'Cuff pressure check after inflation, tube change, arrival, turn or transfer within',
   unit: 'min',
   default: 15,
   min: 5,
@@ -90,11 +90,33 @@ export const cuffRecheck = numberSetting({
 
 export const cuffTopUpCount = numberSetting({
   name: 'cuff-top-ups',
-  label: 'Air added this often within 12 hours asks for a review',
+  label: 'Air added this often asks for a review',
   unit: 'times',
   default: 2,
   min: 2,
   max: 6,
+  affects: 'Cuff pressure: warning of a repeated leak.',
+  source: { says: 'Red flag in several teaching texts, without a number', standing: 'product proposal' },
+})
+
+export const cuffTopUpMl = numberSetting({
+  name: 'cuff-top-up-volume',
+  label: 'Air added asks for a review above, in all',
+  unit: 'mL',
+  default: 3,
+  min: 1,
+  max: 10,
+  affects: 'Cuff pressure: warning of a repeated leak.',
+  source: { says: 'Red flag in several teaching texts, without a number', standing: 'product proposal' },
+})
+
+export const cuffTopUpWindow = numberSetting({
+  name: 'cuff-top-up-window',
+  label: 'Air added is counted over the last',
+  unit: 'h',
+  default: 12,
+  min: 4,
+  max: 24,
   affects: 'Cuff pressure: warning of a repeated leak.',
   source: { says: 'Red flag in several teaching texts, without a number', standing: 'product proposal' },
 })
@@ -108,4 +130,6 @@ export const cuffSettings = [
   cuffEventCheck,
   cuffRecheck,
   cuffTopUpCount,
+  cuffTopUpMl,
+  cuffTopUpWindow,
 ]

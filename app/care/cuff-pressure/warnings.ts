@@ -1,23 +1,34 @@
 import { toCmH2O } from '../../clinical/units.ts'
-import { earlier, hours } from '../../time/duration.ts'
 import type { CareContext } from '../kind.ts'
 import { tubeInPlace } from '../tube-change/tube.ts'
-import { LOCAL_PLAN, type Warning } from '../warning.ts'
+import type { Warning } from '../warning.ts'
 import { cuffBand, cuffState, foundClass, leftClass } from './cuff.ts'
-import { type CuffData, cuffChecks, foundCmH2O, leftCmH2O } from './schema.ts'
-import { cuffLower, cuffTopUpCount, cuffUpper } from './settings.ts'
+import { leakWarnings, standingLeakWarnings } from './leak.ts'
+import { type CuffData, cuffChecks } from './schema.ts'
+import { cuffLower, cuffRecheck, cuffUpper } from './settings.ts'
 
 /** What a cuff check asks people to notice. The found value is classed, unrounded, in cmH2O. */
 export function cuffWarnings(data: CuffData, context: CareContext): readonly Warning[] {
-  return [...wrongCuff(data, context), ...outOfBand(data, context), ...unitTrap(data, context), ...leak(data, context)]
+  const leaks = leakWarnings(data, context)
+  return [
+    ...wrongCuff(data, context),
+    ...leaks,
+    ...besides(leaks, outOfBand(data, context)),
+    ...unitTrap(data, context),
+  ]
+}
+
+/** Where a leak says to add no more air, nothing else may ask for it. */
+function besides(leaks: readonly Warning[], others: readonly Warning[]): readonly Warning[] {
+  return leaks.some(({ name }) => name !== 'cuff-leak') ? others.filter(({ name }) => name !== 'cuff-low') : others
 }
 
 function outOfBand(data: CuffData, context: CareContext): readonly Warning[] {
   const found = foundClass(data, context)
   const left = leftClass(data, context)
-  if (!found || (found === 'in range' && left === 'in range')) return []
+  if (!left) return []
   const { lower, upper } = cuffBand(context.values)
-  if (left === 'in range') return [corrected(found, lower, upper)]
+  if (left === 'in range') return !found || found === left ? [] : [corrected(found, lower, upper)]
   const high = left === 'high' || left === 'very high'
   const weak = context.record.patient.ventilated
   return [
@@ -25,7 +36,7 @@ function outOfBand(data: CuffData, context: CareContext): readonly Warning[] {
       name: high ? 'cuff-high' : 'cuff-low',
       level: 'amber',
       action: high
-        ? `Let air out slowly to ${lower} to ${upper} cmH2O and check again in 30 minutes.${left === 'very high' ? ' Do it now.' : ''}`
+        ? `Let air out slowly to ${lower} to ${upper} cmH2O and check again in ${context.values.of(cuffRecheck)} minutes.${left === 'very high' ? ' Do it now.' : ''}`
         : `Add air to ${lower} to ${upper} cmH2O.${left === 'very low' && weak ? ' Do it now: the patient is ventilated.' : ''} If it keeps falling, check tube and pilot line.`,
       cause: high
         ? `Above ${upper} cmH2O the cuff can harm the wall of the windpipe.`
@@ -81,57 +92,14 @@ function unitTrap(data: CuffData, { ward, values }: CareContext): readonly Warni
   ]
 }
 
-function leak(data: CuffData, context: CareContext): readonly Warning[] {
-  const topUps = topUpsBefore(context) + (isTopUp(data) ? 1 : 0)
-  const repeated = topUps >= context.values.of(cuffTopUpCount)
-  if (data.leak === 'yes' && (repeated || isTopUp(data))) {
-    return [
-      {
-        name: 'cuff-leak-displacement',
-        level: 'red',
-        action: `Check the tube position now. The tube or cuff may have moved or failed. Call for help. ${LOCAL_PLAN}`,
-        cause: 'Leak or voice with the cuff up, and air added.',
-        source: 'Red flag in teaching texts (NHS Wales, RCEM learning)',
-      },
-    ]
-  }
-  return isTopUp(data) && repeated ? [repeatedLeak(topUps)] : []
-}
-
-function repeatedLeak(topUps: number): Warning {
-  return {
-    name: 'cuff-repeated-leak',
-    level: 'amber',
-    action: 'Do not add more air. Ask for a review of tube size and position.',
-    cause: `Air added ${topUps} times within 12 hours.`,
-    source: cuffTopUpCount.source.says,
-  }
-}
-
-function isTopUp(data: CuffData): boolean {
-  const found = foundCmH2O(data)
-  const left = leftCmH2O(data)
-  return (data.airMl ?? 0) > 0 || (found !== undefined && left !== undefined && left > found)
-}
-
-function topUpsBefore({ record, now }: CareContext): number {
-  const tube = tubeInPlace(record)
-  return record
-    .since(cuffChecks, earlier(now, hours(12)))
-    .filter(
-      entry => entry.performedAt <= now && (!tube || entry.performedAt >= tube.performedAt) && isTopUp(entry.data),
-    ).length
-}
-
-/** Stands until the next reading: the cuff was left out of the band, or keeps losing air. */
+/** Stands until the next look: the cuff was left out of the band, leaks, or keeps losing air. */
 export function standingCuffWarnings(context: CareContext): readonly Warning[] {
-  if (cuffState(context.record) !== 'inflated') return []
   const tube = tubeInPlace(context.record)
-  const last = context.record.latest(cuffChecks, data => data.found !== undefined)
-  if (!last || (tube && last.performedAt < tube.performedAt)) return []
-  const topUps = topUpsBefore(context)
-  return [
-    ...outOfBand(last.data, context).filter(warning => warning.level !== 'blue'),
-    ...(topUps >= context.values.of(cuffTopUpCount) ? [repeatedLeak(topUps)] : []),
-  ]
+  if (!tube || cuffState(context.record) !== 'inflated') return []
+  const onTube = context.record.since(cuffChecks, tube.performedAt)
+  const reading = onTube.find(({ data }) => data.found !== undefined)
+  const look = onTube.find(({ data }) => data.found !== undefined || data.leak !== undefined)
+  const leaks = standingLeakWarnings(look?.data, context)
+  const outside = reading ? outOfBand(reading.data, context).filter(({ level }) => level !== 'blue') : []
+  return [...leaks, ...besides(leaks, outside)]
 }
