@@ -1,10 +1,9 @@
 import { hours, later } from '../../time/duration.ts'
-import { addDays, startOfDay } from '../../time/zone.ts'
 import { type Clock, intervalClock, noClock, promptClock, sooner, suspended } from '../clock.ts'
 import type { CareContext, TaskRule } from '../kind.ts'
 import type { Setting } from '../policy.ts'
 import { withoutTube } from '../tube-change/tasks.ts'
-import { type TubeEntry, tubeInPlace } from '../tube-change/tube.ts'
+import { insertedAt, type TubeEntry, tubeInPlace } from '../tube-change/tube.ts'
 import { actsOnTube, cannulaType, isCleaning, isInspection, isNarrowed, isRenewal, wasSeen } from './acts.ts'
 import type { InnerCannulaData } from './schema.ts'
 import {
@@ -103,11 +102,4 @@ function lastAct({ record }: CareContext, counts: (data: InnerCannulaData) => bo
 /** Care counts from the tube going in, but never from before the stay: a tube of last week is not overdue on arrival. */
 function startOf(tube: TubeEntry, { record }: CareContext): Date {
   return new Date(Math.max(tube.performedAt.getTime(), record.admittedAt.getTime()))
-}
-
-/** The hour a tube went in. Of one in place on arrival only the day is known: the end of that day, so that a new tube is never taken for an old one. */
-function insertedAt(tube: TubeEntry, { ward }: CareContext): Date {
-  if (tube.data.insertedOn === undefined) return tube.performedAt
-  const dayAfter = startOfDay(addDays(tube.data.insertedOn, 1), ward.zone)
-  return new Date(Math.min(dayAfter.getTime(), tube.performedAt.getTime()))
 }

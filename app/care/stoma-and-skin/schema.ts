@@ -167,6 +167,11 @@ function contradictions(check: StomaData): readonly (readonly [keyof StomaData, 
 /** Stoma and skin checks: ask a record with this. */
 export const stomaChecks = charted({ slug: 'stoma-and-skin', schema: stomaSchema })
 
+/** Whether flange sutures were seen to be in. */
+export function hasSutures({ sutures }: StomaData): boolean {
+  return sutures === 'in place' || sutures === 'loose'
+}
+
 /** Whether the flange sutures came out with this act. */
 export function suturesRemoved(data: StomaData): boolean {
   return data.sutures === 'removed now'
@@ -175,11 +180,11 @@ export function suturesRemoved(data: StomaData): boolean {
 const underFlange = ['flange left', 'flange right', 'flange top', 'flange bottom'] as const
 
 /** Places under tube, sutures and ties that this check left out. Without sutures or ties there is nothing to look under. */
-export function sitesLeftOut({ sites, sutures, ties }: StomaData): readonly SkinSite[] {
-  const hasSutures = sutures === 'in place' || sutures === 'loose'
+export function sitesLeftOut(check: StomaData): readonly SkinSite[] {
+  const { sites, ties } = check
   const asked: readonly SkinSite[] = [
     ...underFlange,
-    ...(hasSutures ? (['under sutures'] as const) : []),
+    ...(hasSutures(check) ? (['under sutures'] as const) : []),
     ...(ties === 'no ties' ? [] : (['back of neck'] as const)),
   ]
   return asked.filter(site => !sites.includes(site))

@@ -4,8 +4,9 @@ import { tubeExamples } from './examples.ts'
 import { tubeChanges } from './schema.ts'
 import { tubeSentence } from './sentence.ts'
 import { tubeChangeSettings } from './settings.ts'
+import { standingTubeWarnings } from './standing.ts'
 import { tubeTasks } from './tasks.ts'
-import { sameTubeAgain, standingTubeWarnings, tubeWarnings } from './warnings.ts'
+import { sameTubeAgain, tubeWarnings } from './warnings.ts'
 
 /** First insertion and every later change of the whole tube. The latest one is the tube in place. */
 export const tubeChange = careKind({

@@ -1,58 +1,7 @@
 import { numberSetting, switchSetting } from '../policy.ts'
+import { dwellSettings } from './dwell-settings.ts'
 
 const RMM = 'Royal Marsden Manual, ch. 12'
-
-export const dwellDual = numberSetting({
-  name: 'dwell-limit-dual-cannula',
-  label: 'Longest use of a dual-cannula tube',
-  unit: 'days',
-  default: 28,
-  min: 7,
-  max: 90,
-  personal: true,
-  affects: 'Tube change: change-by date. The strictest of policy and device label counts.',
-  source: {
-    says: 'National Tracheostomy Safety Project, changing a tracheostomy tube: 28 days; other texts 29 and 30 days',
-    standing: 'published',
-  },
-})
-
-export const dwellSingle = numberSetting({
-  name: 'dwell-limit-single-cannula',
-  label: 'Longest use of a single-cannula tube',
-  unit: 'days',
-  default: 14,
-  min: 3,
-  max: 30,
-  personal: true,
-  affects: 'Tube change: change-by date of tubes without an inner cannula.',
-  source: {
-    says: 'Intensive Care Society, 7 to 14 days, as quoted by the French expert panel 2018',
-    standing: 'published, read second-hand',
-  },
-})
-
-export const dwellNotice = numberSetting({
-  name: 'dwell-notice',
-  label: 'Notice before the change-by date',
-  unit: 'days',
-  default: 7,
-  min: 1,
-  max: 21,
-  affects: 'Tube change: when it is shown as due soon.',
-  source: { says: 'No published number', standing: 'product proposal' },
-})
-
-export const dwellStrongNotice = numberSetting({
-  name: 'dwell-strong-notice',
-  label: 'Strong notice before the change-by date',
-  unit: 'days',
-  default: 2,
-  min: 1,
-  max: 7,
-  affects: 'Tube change: amber warning to plan the change.',
-  source: { says: 'No published number', standing: 'product proposal' },
-})
 
 export const firstChangeSurgicalEarliest = numberSetting({
   name: 'first-change-surgical-earliest',
@@ -110,8 +59,11 @@ export const firstChangeHardLimit = numberSetting({
   default: 72,
   min: 24,
   max: 168,
-  affects: 'Tube change: red warning at charting.',
-  source: { says: `${RMM}, quoting the Intensive Care Society: not in the first 72 hours`, standing: 'published' },
+  affects: 'Tube change: what the warning of an early first change says.',
+  source: {
+    says: `${RMM}, quoting the Intensive Care Society: not in the first 72 hours`,
+    standing: 'published, read second-hand',
+  },
 })
 
 export const routineFirstChange = switchSetting({
@@ -153,18 +105,26 @@ export const blindReinsertionBefore = numberSetting({
   default: 7,
   min: 5,
   max: 14,
-  affects: 'Tube card: the caution shown for a new stoma.',
+  affects: 'Tube card: the caution shown for a new stoma. Tube change: the warning of a tube that is out.',
   source: {
     says: 'Bontempo and Manning: under 7 days only under direct vision; another text says 5',
     standing: 'published',
   },
 })
 
+export const repeatTubeOutWindow = numberSetting({
+  name: 'repeat-tube-out-window',
+  label: 'A second displaced tube asks for the specialist when it comes within',
+  unit: 'days',
+  default: 7,
+  min: 1,
+  max: 30,
+  affects: 'Tube change: warning of a tube that came out again.',
+  source: { says: 'No published number', standing: 'product proposal' },
+})
+
 export const tubeChangeSettings = [
-  dwellDual,
-  dwellSingle,
-  dwellNotice,
-  dwellStrongNotice,
+  ...dwellSettings,
   firstChangeSurgicalEarliest,
   firstChangeSurgicalTarget,
   firstChangePercutaneousEarliest,
@@ -174,4 +134,5 @@ export const tubeChangeSettings = [
   suturesOutBy,
   tractEstablishedAfter,
   blindReinsertionBefore,
+  repeatTubeOutWindow,
 ]

@@ -2,11 +2,9 @@ import { showDate } from '../../time/display.ts'
 import { addDays } from '../../time/zone.ts'
 import { type Clock, dayClock, noClock, suspended } from '../clock.ts'
 import type { CareContext, TaskRule } from '../kind.ts'
-import { stomaChecks, suturesRemoved } from '../stoma-and-skin/schema.ts'
+import { hasSutures, stomaChecks } from '../stoma-and-skin/schema.ts'
+import { dwellDual, dwellNotice, dwellSingle, dwellSingleHeavy, heavyEpisodes } from './dwell-settings.ts'
 import {
-  dwellDual,
-  dwellNotice,
-  dwellSingle,
   firstChangePercutaneousEarliest,
   firstChangePercutaneousTarget,
   firstChangeSurgicalEarliest,
@@ -26,7 +24,7 @@ export function withoutTube(context: CareContext): Clock {
 export const byDate: TaskRule = {
   name: 'tube-change',
   airway: true,
-  settings: [dwellDual, dwellSingle, dwellNotice],
+  settings: [dwellDual, dwellSingle, dwellSingleHeavy, heavyEpisodes, dwellNotice],
   says(context) {
     const tube = tubeInPlace(context.record)
     return tube
@@ -59,8 +57,9 @@ const first: TaskRule = {
   ],
   opensWith: { reason: 'first change' },
   says(context) {
-    const { earliest, target } = firstChangeDays(context)
-    return `First change from day ${earliest}, by day ${target} after insertion. An experienced operator, with airway help at hand.`
+    const { earliest, target, isKnown } = firstChangeDays(context)
+    const why = isKnown ? '' : ' How the opening was made is not known, so the later days count.'
+    return `First change from day ${earliest}, by day ${target} after insertion.${why} An experienced operator, with airway help at hand.`
   },
   clock(context) {
     const tube = tubeInPlace(context.record)
@@ -75,13 +74,23 @@ const first: TaskRule = {
   },
 }
 
-/** Earliest and target day of the first change, by how the opening was made; a technique not known counts as surgical. */
-export function firstChangeDays(context: CareContext): { readonly earliest: number; readonly target: number } {
-  const percutaneous = tubeInPlace(context.record)?.data.technique === 'percutaneous'
-  const { values } = context
-  const earliest = values.of(percutaneous ? firstChangePercutaneousEarliest : firstChangeSurgicalEarliest)
-  const target = values.of(percutaneous ? firstChangePercutaneousTarget : firstChangeSurgicalTarget)
-  return { earliest: Math.min(earliest, target), target }
+interface FirstChange {
+  readonly earliest: number
+  readonly target: number
+  /** Whether it is known how the opening was made. */
+  readonly isKnown: boolean
+}
+
+/**
+ * Earliest and target day of the first change, by how the opening was made. Where that is not known the days of a percutaneous one
+ * count: a change too early may lose the airway, a few days later it does no harm.
+ */
+export function firstChangeDays({ record, values }: CareContext): FirstChange {
+  const technique = tubeInPlace(record)?.data.technique
+  const surgical = technique === 'surgical'
+  const earliest = values.of(surgical ? firstChangeSurgicalEarliest : firstChangePercutaneousEarliest)
+  const target = values.of(surgical ? firstChangeSurgicalTarget : firstChangePercutaneousTarget)
+  return { earliest: Math.min(earliest, target), target, isKnown: surgical || technique === 'percutaneous' }
 }
 
 export const tubeTasks: readonly TaskRule[] = [first, byDate]
@@ -105,12 +114,10 @@ export const sutureRemoval: TaskRule = {
   },
 }
 
-/** Whether the flange sutures of the tube in place are still in. */
-export function suturesIn(context: CareContext): boolean {
-  const tube = tubeInPlace(context.record)
-  if (tube?.data.sutures !== 'in place') return false
-  return !context.record.latest(
-    stomaChecks,
-    (data, entry) => suturesRemoved(data) && entry.performedAt >= tube.performedAt,
-  )
+/** Whether the flange sutures of the tube in place are still in: as last seen, else as charted with the tube. */
+export function suturesIn({ record }: Pick<CareContext, 'record'>): boolean {
+  const tube = tubeInPlace(record)
+  if (!tube) return false
+  const [seen] = record.since(stomaChecks, tube.performedAt)
+  return seen ? hasSutures(seen.data) : tube.data.sutures === 'in place'
 }

@@ -1,10 +1,12 @@
 import { changeByDay } from '../../clinical/dwell.ts'
 import type { Tract } from '../../clinical/tract.ts'
-import { daysBetween, type LocalDay, localDay } from '../../time/zone.ts'
+import { addDays, daysBetween, type LocalDay, localDay, startOfDay } from '../../time/zone.ts'
 import { decannulations } from '../decannulation/schema.ts'
 import type { CareContext, Entry, PatientRecord } from '../kind.ts'
+import type { Setting } from '../policy.ts'
+import { isThroughTube, suctions } from '../suction/schema.ts'
+import { dwellDual, dwellSingle, dwellSingleHeavy, heavyEpisodes } from './dwell-settings.ts'
 import { type TubeData, tubeChanges } from './schema.ts'
-import { dwellDual, dwellSingle } from './settings.ts'
 
 export type { TubeData } from './schema.ts'
 export type TubeEntry = Entry<TubeData>
@@ -26,6 +28,16 @@ export function insertedOn(tube: TubeEntry, context: Pick<CareContext, 'ward'>):
   return tube.data.insertedOn ?? localDay(tube.performedAt, context.ward.zone)
 }
 
+/**
+ * The moment the tube in place went in. Of one in place on arrival only the day is known: the end of that day, so that a new tube is
+ * never taken for an old one.
+ */
+export function insertedAt(tube: TubeEntry, { ward }: Pick<CareContext, 'ward'>): Date {
+  if (tube.data.insertedOn === undefined) return tube.performedAt
+  const dayAfter = startOfDay(addDays(tube.data.insertedOn, 1), ward.zone)
+  return new Date(Math.min(dayAfter.getTime(), tube.performedAt.getTime()))
+}
+
 export interface DwellLimit {
   readonly days: number
   /** Which limit is the strictest, in words. */
@@ -35,13 +47,23 @@ export interface DwellLimit {
 
 /** The strictest of the device's label and the policy for its construction (domain R-303, R-304). */
 export function dwellLimit(tube: TubeEntry, context: CareContext): DwellLimit {
-  const setting = tube.data.construction === 'dual' ? dwellDual : dwellSingle
+  const setting = dwellSetting(tube, context)
   const policy = context.values.of(setting)
   const device = tube.data.longestUseDays
   const days = device !== undefined && device < policy ? device : policy
   const because =
     days === policy ? `${setting.label.toLowerCase()}: ${policy} days` : `longest use on the label: ${days} days`
   return { days, because, changeBy: changeByDay(insertedOn(tube, context), days) }
+}
+
+/** A single cannula clogs for good: heavy secretions shorten its limit, unless the care plan sets one for this patient. */
+function dwellSetting(tube: TubeEntry, { record, values }: CareContext): Setting<number> {
+  if (tube.data.construction === 'dual') return dwellDual
+  if (values.personal(dwellSingle) || values.of(dwellSingleHeavy) >= values.of(dwellSingle)) return dwellSingle
+  const copious = record
+    .since(suctions, tube.performedAt)
+    .filter(({ data }) => isThroughTube(data) && data.amount === 'copious')
+  return copious.length >= values.of(heavyEpisodes) ? dwellSingleHeavy : dwellSingle
 }
 
 /** `8.0 ISO 5366`, `6 Jackson`: the size as printed, with its system. */

@@ -1,79 +1,70 @@
-import { daysLeft, dwellDay, dwellStage } from '../../clinical/dwell.ts'
+import { dwellDay } from '../../clinical/dwell.ts'
 import { hours, since } from '../../time/duration.ts'
-import { localDay, startOfDay } from '../../time/zone.ts'
+import { localDay } from '../../time/zone.ts'
+import { BLEED_ACTION } from '../emergency.ts'
+import { absentWarning } from '../inner-cannula/fit.ts'
 import type { CareContext } from '../kind.ts'
-import { LOCAL_PLAN, type Warning } from '../warning.ts'
+import { bleedCause } from '../suction/bleeding.ts'
+import { bleedWindowTo } from '../suction/bleeding-settings.ts'
+import { lowSaturation } from '../suction/saturation.ts'
+import type { Warning } from '../warning.ts'
 import type { TubeData } from './schema.ts'
-import {
-  blindReinsertionBefore,
-  dwellNotice,
-  dwellStrongNotice,
-  firstChangeHardLimit,
-  suturesOutBy,
-} from './settings.ts'
-import { firstChangeDays, suturesIn } from './tasks.ts'
-import { dwellLimit, insertedOn, isFirstTube, stomaAgeDays, tubeInPlace, tubeWords } from './tube.ts'
+import { firstChangeHardLimit } from './settings.ts'
+import { firstChangeDays } from './tasks.ts'
+import { insertedAt, insertedOn, isFirstTube, tubeInPlace, tubeWords } from './tube.ts'
+import { dayWords, displacedAgain, tubeOut } from './tube-out.ts'
 
 const EMERGENCY = ['blocked', 'displaced', 'fault']
+/** Charted of a tube that is new to the record: nothing was changed. */
+const NO_CHANGE = ['first insertion', 'on arrival']
 
 /** What a tube change asks people to notice as it is charted. Never a refusal: it has happened. */
 export function tubeWarnings(data: TubeData, context: CareContext): readonly Warning[] {
   return [
-    ...failedChange(data, context),
+    ...tubeOut(data, context),
     ...earlyChange(data, context),
-    ...bleeding(data),
+    ...bleeding(data, context),
+    ...lowSaturation('tube-change-spo2-low', data, context),
     ...unconfirmed(data),
     ...noInnerCannula(data),
+    ...displacedAgain(data, context),
     ...expired(data, context),
+    ...datesInDoubt(data, context),
   ]
 }
 
-function failedChange(data: TubeData, context: CareContext): readonly Warning[] {
-  const age = stomaAgeDays(context)
-  const fresh = age !== undefined && age < context.values.of(blindReinsertionBefore)
-  if (data.difficulty !== 'failed' && !(data.reason === 'displaced' && fresh)) return []
-  const laryngectomy = context.record.patient.upperAirway === 'not open'
-  const oxygen = laryngectomy
-    ? 'Oxygen to the stoma. The mouth does not connect to the lungs.'
-    : 'Oxygen to face and stoma.'
-  return [
-    {
-      name: 'tube-out',
-      level: 'red',
-      action: `Call for help now. ${oxygen}${fresh ? ' Do not push the tube back blindly.' : ''} ${LOCAL_PLAN}`,
-      cause: fresh ? `The opening is ${age} days old.` : 'The tube did not go in.',
-      source: 'Bontempo and Manning; critical care texts differ between 5 and 7 days',
-    },
-  ]
-}
-
+/** Said before the change as well, while the form is filled in: the act fits both. */
 function earlyChange(data: TubeData, context: CareContext): readonly Warning[] {
   const tube = tubeInPlace(context.record)
-  if (!tube || !isFirstTube(tube) || EMERGENCY.includes(data.reason)) return []
+  if (!tube || !isFirstTube(tube) || [...EMERGENCY, ...NO_CHANGE].includes(data.reason)) return []
   const age = dwellDay(insertedOn(tube, context), localDay(context.now, context.ward.zone))
-  const putInAt = tube.data.insertedOn ? startOfDay(tube.data.insertedOn, context.ward.zone) : tube.performedAt
-  const tooEarly = since(putInAt, context.now) < hours(context.values.of(firstChangeHardLimit))
+  const limit = context.values.of(firstChangeHardLimit)
+  const tooEarly = since(insertedAt(tube, context), context.now) < hours(limit)
   if (!tooEarly && age >= firstChangeDays(context).earliest) return []
   return [
     {
       name: 'first-change-early',
       level: 'amber',
-      action: `Ask ENT or ICU to review today.`,
-      cause: `The opening is only ${age} days old.${tooEarly ? ` Before ${context.values.of(firstChangeHardLimit)} hours a change is for emergencies.` : ''}`,
+      action: 'Ask ENT or ICU before changing. If it is done, ask them to review today.',
+      cause: `The opening is only ${dayWords(age)} old.${tooEarly ? ` Before ${limit} hours a change is for emergencies.` : ''}`,
       source: firstChangeHardLimit.source.says,
     },
   ]
 }
 
-function bleeding(data: TubeData): readonly Warning[] {
-  if (data.bleeding !== 'fresh' && data.bleeding !== 'active') return []
+function bleeding({ bleeding }: TubeData, context: CareContext): readonly Warning[] {
+  if (bleeding === undefined || bleeding === 'none') return []
+  const isSpotting = bleeding === 'spotting'
+  const seen = isSpotting ? 'Spotting of blood at the tube change' : 'Fresh blood at the tube change'
   return [
     {
       name: 'bleeding',
-      level: 'red',
-      action: `Call for help now and stay with the patient. Leave the tube in; if it has a cuff, keep it up. Treat this as a warning bleed. ${LOCAL_PLAN}`,
-      cause: 'Fresh blood at the tube change.',
-      source: 'Bontempo and Manning: every bleed counts as a warning bleed',
+      level: isSpotting ? 'amber' : 'red',
+      action: isSpotting
+        ? 'Ask a doctor to look at the bleeding this shift, and look again within the hour.'
+        : BLEED_ACTION,
+      cause: bleedCause(seen, context),
+      source: bleedWindowTo.source.says,
     },
   ]
 }
@@ -91,17 +82,8 @@ function unconfirmed(data: TubeData): readonly Warning[] {
   ]
 }
 
-function noInnerCannula(data: TubeData): readonly Warning[] {
-  if (data.construction !== 'dual' || data.innerCannula !== 'none') return []
-  return [
-    {
-      name: 'inner-cannula-absent',
-      level: data.connector === 'inner' ? 'red' : 'amber',
-      action: `Fit the correct inner cannula now.${data.connector === 'inner' ? ` Without it the bag may not connect. ${LOCAL_PLAN}` : ''}`,
-      cause: 'A dual-cannula tube without its inner cannula.',
-      source: 'Common practice',
-    },
-  ]
+function noInnerCannula({ construction, innerCannula, connector }: TubeData): readonly Warning[] {
+  return construction === 'dual' && innerCannula === 'none' ? [absentWarning(connector)] : []
 }
 
 function expired(data: TubeData, context: CareContext): readonly Warning[] {
@@ -118,64 +100,29 @@ function expired(data: TubeData, context: CareContext): readonly Warning[] {
   ]
 }
 
-/** What stands for as long as this tube is in: dwell and sutures. */
-export function standingTubeWarnings(context: CareContext): readonly Warning[] {
-  const tube = tubeInPlace(context.record)
-  if (!tube) return []
-  const today = localDay(context.now, context.ward.zone)
-  const inDays = dwellDay(insertedOn(tube, context), today)
-  const suturesLate = suturesIn(context) && inDays > context.values.of(suturesOutBy)
-  const sutures: Warning = {
-    name: 'sutures-past-day',
-    level: 'amber',
-    action: 'Ask the tracheostomy team about the flange sutures today.',
-    cause: `Day ${inDays}; sutures come out by day ${context.values.of(suturesOutBy)}.`,
-    source: suturesOutBy.source.says,
-  }
-  return [...dwellWarning(context), ...(suturesLate ? [sutures] : [])]
-}
-
-function dwellWarning(context: CareContext): readonly Warning[] {
-  const tube = tubeInPlace(context.record)
-  if (!tube) return []
-  const limit = dwellLimit(tube, context)
-  const today = localDay(context.now, context.ward.zone)
-  const on = insertedOn(tube, context)
-  const left = daysLeft(on, limit.days, today)
-  const stage = dwellStage(left, {
-    noticeDays: context.values.of(dwellNotice),
-    strongDays: context.values.of(dwellStrongNotice),
-  })
-  if (stage === 'quiet') return []
-  const common = { source: `Limit by ${limit.because}` }
-  if (stage === 'past limit') {
-    return [
-      {
-        ...common,
-        name: 'tube-past-limit',
-        level: 'amber',
-        action: 'Tell the tracheostomy team today.',
-        cause: `Tube is ${dwellDay(on, today)} days in; limit is ${limit.days}.`,
-      },
-    ]
-  }
+/** Dwell and tract are counted from these days, so a slip of the keys would move every date after it. */
+function datesInDoubt({ insertedOn: on, stomaMadeOn: made }: TubeData, { now, ward }: CareContext): readonly Warning[] {
+  const today = localDay(now, ward.zone)
+  const isAhead = (on !== undefined && on > today) || (made !== undefined && made > today)
+  if (!isAhead && !(on !== undefined && made !== undefined && made > on)) return []
   return [
     {
-      ...common,
-      name: 'tube-near-limit',
-      level: stage === 'notice' ? 'blue' : 'amber',
-      action: stage === 'limit day' ? 'The tube change is due today.' : 'Plan the tube change.',
-      cause: `Day ${dwellDay(on, today)} of ${limit.days}; ${left === 0 ? 'today is the limit day' : `${left} ${left === 1 ? 'day' : 'days'} left`}.`,
+      name: 'tube-dates',
+      level: 'amber',
+      action: 'Read the dates again.',
+      cause: isAhead ? 'A date lies ahead.' : 'The opening is charted as made after this tube went in.',
+      source: 'Change-by date and age of the opening are counted from these days',
     },
   ]
 }
 
-/** The usual change: the same tube again. Findings and people are left to fill in. */
+/** The usual change: the same tube again. Findings and people, and what is read on this one, are left to fill in. */
 export function sameTubeAgain(context: CareContext) {
   const tube = tubeInPlace(context.record)?.data
   if (!tube) return undefined
   const { line, sizeSystem, size, idWithInner, idWithoutInner, od, lengthMm, cuff, construction } = tube
-  const { innerCannula, fenestrated, connector, flange, longestUseDays } = tube
+  const { fenestrated, connector, flange, longestUseDays } = tube
+  const innerCannula = tube.innerCannula === 'none' ? undefined : tube.innerCannula
   const answers = { line, sizeSystem, size, idWithInner, idWithoutInner, od, lengthMm, cuff, construction }
   return {
     words: `Same tube as now: ${tubeWords(tube)}`,
