@@ -1,4 +1,4 @@
-import { careKind } from '../kind.ts'
+import { type CareContext, careKind } from '../kind.ts'
 import { suturesIn } from '../tube-change/tasks.ts'
 import { tubeInPlace } from '../tube-change/tube.ts'
 import { stomaExamples } from './examples.ts'
@@ -7,6 +7,11 @@ import { stomaSentence } from './sentence.ts'
 import { stomaSettings } from './settings.ts'
 import { stomaTasks } from './tasks.ts'
 import { isOutOfRange, standingStomaWarnings, stomaWarnings } from './warnings.ts'
+
+/** That there are no sutures is a fact where a tube is charted; where none is, nobody has said so. */
+function stomaStart(context: CareContext): Readonly<Record<string, unknown>> {
+  return tubeInPlace(context.record) && !suturesIn(context) ? { sutures: 'none' } : {}
+}
 
 /** The opening, the skin under flange and ties, the dressing, and what holds the tube. */
 export const stomaAndSkin = careKind({
@@ -18,7 +23,7 @@ export const stomaAndSkin = careKind({
   summary: stomaSentence,
   settings: stomaSettings,
   tasks: stomaTasks,
-  startsWith: context => (suturesIn(context) ? {} : { sutures: 'none' }),
+  startsWith: stomaStart,
   usual: ({ record }) =>
     tubeInPlace(record) && {
       words: 'Dressing and ties left as they are',
