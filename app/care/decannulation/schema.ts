@@ -1,3 +1,4 @@
+import type { z } from 'zod'
 import { careFields, choice, note, text, yesNo } from '../field.ts'
 import { charted } from '../kind.ts'
 
@@ -15,3 +16,5 @@ export const decannulations = charted({
     note: note({ label: 'Note', more: true }).optional(),
   }),
 })
+
+export type DecannulationData = z.output<typeof decannulations.schema>
