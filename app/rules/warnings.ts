@@ -6,13 +6,21 @@ import { isTooYoung } from './due-tasks.ts'
 
 /** Warnings that stand for one patient now, most urgent first, each rule once. */
 export function standingWarnings(context: CareContext, kinds: readonly AnyCareKind[] = careKinds): readonly Warning[] {
-  const warnings = [...noRules(context), ...kinds.flatMap(kind => kind.standing?.(context) ?? [])]
-  return onceEach(warnings).toSorted(byUrgency)
+  const warnings = forAge(
+    kinds.flatMap(kind => kind.standing?.(context) ?? []),
+    context,
+  )
+  return onceEach([...noRules(context), ...warnings]).toSorted(byUrgency)
 }
 
 /** Warnings about one act, as it is or was charted; `context` is that of the moment before it. */
 export function entryWarnings(kind: AnyCareKind, data: unknown, context: CareContext): readonly Warning[] {
-  return onceEach(kind.warnings?.(data, context) ?? []).toSorted(byUrgency)
+  return onceEach(forAge(kind.warnings?.(data, context) ?? [], context)).toSorted(byUrgency)
+}
+
+/** Limits for adults say nothing of a child; what is an emergency is one at any age. */
+function forAge(warnings: readonly Warning[], context: CareContext): readonly Warning[] {
+  return isTooYoung(context) ? warnings.filter(({ level }) => level === 'red') : warnings
 }
 
 function noRules(context: CareContext): readonly Warning[] {
@@ -22,7 +30,7 @@ function noRules(context: CareContext): readonly Warning[] {
     {
       name: 'no-rules-for-children',
       level: 'amber',
-      action: 'Follow the written plan of the tracheostomy team; nothing is computed here.',
+      action: 'Follow the written plan of the tracheostomy team; no times and limits are computed here.',
       cause: `Rules of this ward apply from the age of ${from}.`,
       source: adultAge.source.says,
     },
