@@ -1,3 +1,4 @@
+import { bedsideKit } from './bedside-kit/kind.ts'
 import { carePlan } from './care-plan/kind.ts'
 import { cuffPressure } from './cuff-pressure/kind.ts'
 import { decannulation } from './decannulation/kind.ts'
@@ -20,6 +21,7 @@ export const careKinds = [
   ties,
   suction,
   humidification,
+  bedsideKit,
   tubeChange,
   decannulation,
   deferral,

@@ -26,7 +26,7 @@ export const birchStories: readonly BedStory[] = [
     admittedHoursAgo: 112,
     tube: { name: 'corvane 7', inserted: { daysAgo: 8, stomaDaysAgo: 8 }, technique: 'surgical', sutures: true },
     secretions: 'thin',
-    stands: { inner: 2.3, cuff: -4.1, suction: -1.2, dressing: -2.6, stoma: 'due' },
+    stands: { inner: 2.3, cuff: -4.1, suction: -1.2, dressing: -2.6, stoma: 'due', kit: 'due' },
   },
   {
     bed: 'B3',

@@ -5,6 +5,7 @@ import { type Bedside, placeAt } from './bedside.ts'
 import { cuffCare } from './chart-cuff.ts'
 import { humidificationCare } from './chart-humidification.ts'
 import { innerCannulaCare } from './chart-inner-cannula.ts'
+import { kitCare } from './chart-kit.ts'
 import { stomaCare } from './chart-stoma.ts'
 import { suctionCare } from './chart-suction.ts'
 import { tieCare } from './chart-ties.ts'
@@ -61,7 +62,7 @@ function draftsOf(bedside: Bedside): readonly Draft[] {
     ...stomaCare(bedside),
     ...(story.extra ?? []).flatMap(happens => happens(bedside)),
   ]
-  return [...usual, ...tieCare(bedside, usual), ...humidificationCare(bedside)]
+  return [...usual, ...tieCare(bedside, usual), ...humidificationCare(bedside), ...kitCare(bedside)]
 }
 
 const USUAL_DELAY = [1, 9] as const // minutes from the act to its being written

@@ -1,3 +1,4 @@
+import { type KitData, kitChecks } from '#app/care/bedside-kit/schema.ts'
 import { carePlans } from '#app/care/care-plan/schema.ts'
 import { cuffChecks } from '#app/care/cuff-pressure/schema.ts'
 import { type DeferralData, deferrals } from '#app/care/deferral/schema.ts'
@@ -6,6 +7,7 @@ import { suctions } from '#app/care/suction/schema.ts'
 import { addDays, localDay } from '#app/time/zone.ts'
 import { type Bedside, hoursBefore, placeAt, tubeAt } from './bedside.ts'
 import { foundBy } from './chart-cuff.ts'
+import { wholeKit } from './chart-kit.ts'
 import { checkAt } from './chart-stoma.ts'
 import { episode } from './chart-suction.ts'
 import { draft } from './draft.ts'
@@ -29,6 +31,14 @@ export function withoutSpare(hoursAgo: number): Happening {
     const fit = { line: tube.line, size: tube.size, locked: 'yes', spare: 'no' } as const
     const note = 'Last one used. Stores asked for more.'
     return [draft(innerCannulaActs, at, { act: 'replaced', condition: 'light', ...fit, tolerance: 'well', note })]
+  }
+}
+
+/** Something was missing at a check of the bedside kit, and has not come yet. */
+export function kitIncomplete(hoursAgo: number, lacks: Required<Pick<KitData, 'missing' | 'owner'>>): Happening {
+  return bedside => {
+    const { at, tube } = momentOf(bedside, hoursAgo)
+    return [draft(kitChecks, at, { ...wholeKit(bedside, tube), complete: 'no', ...lacks, expectedMin: 20 })]
   }
 }
 

@@ -57,6 +57,7 @@ export interface Standing {
   readonly stoma: ShiftStanding
   /** Of care that every bed has in time unless it is said here. */
   readonly humidification?: ShiftStanding
+  readonly kit?: ShiftStanding
 }
 
 export type Happening = (bedside: Bedside) => readonly Draft[]
