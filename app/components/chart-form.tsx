@@ -45,7 +45,8 @@ export function ChartForm({ kind, view, answer, words, cancelHref, reasonAfterHo
   const { errors, noteChange } = useErrors(answer)
   const openedAt = momentOf(typed.at?.[0]) ?? view.calendar.now.getTime()
   const live = useChartLive({ kind, signer, calendar: view.calendar, openedAt }, form)
-  useKeyboardFocus(form, answer === undefined && kind)
+  // A correction begins with its reason, and an answer with what it says.
+  useKeyboardFocus(form, answer === undefined && reasonAfterHours !== undefined && kind)
   const reviewed = answer?.is === 'reviewed' ? answer : undefined
   const warnings = (live.sentence ? live.warnings : reviewed?.warnings) ?? []
   return (
