@@ -60,33 +60,35 @@ export default function Timeline({ loaderData }: Route.ComponentProps) {
   const withParam = (name: string, value: string) => linkWith(search, name, value)
   const tubeTask = liveTasks(care.tasks, now).find(task => task.name === care.tube?.task)
   return (
-    <div className="grid grid-cols-[minmax(0,1fr)] gap-5 px-4 py-5 md:px-6 lg:grid-cols-[21rem_minmax(0,1fr)] lg:grid-rows-[auto_1fr]">
-      <div className="grid content-start gap-4 lg:col-start-2">
-        <Stale since={live.staleSince === null ? null : new Date(live.staleSince)} zone={zone} />
-        {charted && <Warnings title={charted.says} warnings={charted.warnings} />}
-        <Warnings warnings={care.warnings.filter(({ name }) => !charted?.warnings.some(own => own.name === name))} />
-        <CareDue
-          {...{ patientId, now, zone, charts }}
-          tasks={care.tasks}
-          why={shown.why}
-          nothingDue={shown.nothingDue}
-        />
-        {charts && <ChartOther patientId={patientId} kinds={kinds} stayLinks={stayLinks} />}
-      </div>
-      <aside className="grid content-start gap-4 lg:col-start-1 lg:row-span-2 lg:row-start-1">
-        <TubeCard tube={tube} status={tubeTask?.status ?? 'upcoming'} />
-      </aside>
-      <div className="grid grid-cols-[minmax(0,1fr)] content-start gap-4 lg:col-start-2">
-        <Card
-          title={`Last ${spanHours.back} hours, next ${spanHours.ahead}`}
-          aside={<SpanChoice names={spanNames} current={span} href={name => withParam('span', name)} />}
-        >
-          <CareStrip care={care} now={now} zone={zone} span={spanHours} />
-        </Card>
-        <Card title="Charted" flush id="charted" aside={<KindFilter kinds={kinds} current={kind} href={withParam} />}>
-          <EntryList entries={shown.entries} today={localDay(new Date(now), zone)} />
-          <Pager label="Charted" {...(shown.next ? { older: withParam('before', shown.next) } : {})} />
-        </Card>
+    <div className="px-4 py-5 md:px-6">
+      <Stale since={live.staleSince === null ? null : new Date(live.staleSince)} zone={zone} />
+      <div className="grid grid-cols-[minmax(0,1fr)] gap-5 lg:grid-cols-[21rem_minmax(0,1fr)] lg:grid-rows-[auto_1fr]">
+        <div className="grid content-start gap-4 lg:col-start-2">
+          {charted && <Warnings title={charted.says} warnings={charted.warnings} />}
+          <Warnings warnings={care.warnings.filter(({ name }) => !charted?.warnings.some(own => own.name === name))} />
+          <CareDue
+            {...{ patientId, now, zone, charts }}
+            tasks={care.tasks}
+            why={shown.why}
+            nothingDue={shown.nothingDue}
+          />
+          {charts && <ChartOther patientId={patientId} kinds={kinds} stayLinks={stayLinks} />}
+        </div>
+        <aside className="grid content-start gap-4 lg:col-start-1 lg:row-span-2 lg:row-start-1">
+          <TubeCard tube={tube} status={tubeTask?.status ?? 'upcoming'} />
+        </aside>
+        <div className="grid grid-cols-[minmax(0,1fr)] content-start gap-4 lg:col-start-2">
+          <Card
+            title={`Last ${spanHours.back} hours, next ${spanHours.ahead}`}
+            aside={<SpanChoice names={spanNames} current={span} href={name => withParam('span', name)} />}
+          >
+            <CareStrip care={care} now={now} zone={zone} span={spanHours} />
+          </Card>
+          <Card title="Charted" flush id="charted" aside={<KindFilter kinds={kinds} current={kind} href={withParam} />}>
+            <EntryList entries={shown.entries} today={localDay(new Date(now), zone)} />
+            <Pager label="Charted" {...(shown.next ? { older: withParam('before', shown.next) } : {})} />
+          </Card>
+        </div>
       </div>
     </div>
   )

@@ -1,6 +1,7 @@
 import type { CareContext } from '../care/kind.ts'
 import type { AnySetting, PersonalValue, Policy, SettingValue, Standing } from '../care/policy.ts'
 import { showDateTime, showDay } from '../time/display.ts'
+import type { Zone } from '../time/zone.ts'
 import type { DueTask } from './due-tasks.ts'
 
 /** One number behind a task, with where it came from. */
@@ -26,9 +27,7 @@ export interface WhyDue {
 export function whyDue(task: DueTask, context: CareContext): WhyDue {
   const { zone } = context.ward
   return {
-    last: task.last
-      ? `Last on ${showDateTime(task.last.performedAt, zone)} by ${task.last.recordedByName}.`
-      : 'Not charted yet; counted from when the tube went in or the patient came.',
+    last: lastWords(task, zone),
     rule: task.rule.says(context),
     ...(task.because === undefined ? {} : { because: `${capital(task.because)}.` }),
     ...(task.deferral
@@ -37,6 +36,13 @@ export function whyDue(task: DueTask, context: CareContext): WhyDue {
     policy: policyWords(context.values.policy),
     values: task.rule.settings.map(setting => whyValue(setting, context)),
   }
+}
+
+function lastWords({ byDay, last }: DueTask, zone: Zone): string {
+  if (byDay) return `By date: ${showDay(byDay)}.`
+  return last
+    ? `Last on ${showDateTime(last.performedAt, zone)} by ${last.recordedByName}.`
+    : 'Not charted yet; counted from when the tube went in or the patient came.'
 }
 
 /** Which policy is in force, who reviewed it and when. */
