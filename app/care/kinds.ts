@@ -1,3 +1,4 @@
+import { aboveCuffSuction } from './above-cuff-suction/kind.ts'
 import { bedsideKit } from './bedside-kit/kind.ts'
 import { carePlan } from './care-plan/kind.ts'
 import { cuffPressure } from './cuff-pressure/kind.ts'
@@ -12,14 +13,17 @@ import { stomaAndSkin } from './stoma-and-skin/kind.ts'
 import { suction } from './suction/kind.ts'
 import { ties } from './ties/kind.ts'
 import { tubeChange } from './tube-change/kind.ts'
+import { waterCuff } from './water-cuff/kind.ts'
 
 /** Every kind of care, in the order of lists and lanes. Adding one is a folder and a line here. */
 export const careKinds = [
   innerCannula,
   cuffPressure,
+  waterCuff,
   stomaAndSkin,
   ties,
   suction,
+  aboveCuffSuction,
   humidification,
   bedsideKit,
   tubeChange,

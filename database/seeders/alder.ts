@@ -20,7 +20,7 @@ export const alderStories: readonly BedStory[] = [
     admittedHoursAgo: 93,
     tube: { name: 'corvane 9', inserted: { daysAgo: 9, stomaDaysAgo: 19 }, technique: 'percutaneous' },
     secretions: 'moderate',
-    stands: { inner: 5.9, cuff: -0.6, suction: 0.4, dressing: -6, stoma: 'due' },
+    stands: { inner: 5.9, cuff: -0.6, suction: 0.4, dressing: -6, stoma: 'due', aboveCuff: -1.6 },
   },
   {
     bed: 'A3',

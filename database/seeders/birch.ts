@@ -18,7 +18,7 @@ export const birchStories: readonly BedStory[] = [
       sutures: true,
     },
     secretions: 'moderate',
-    stands: { inner: -3.8, cuff: -0.2, suction: -2.6, dressing: -14, stoma: 'done' },
+    stands: { inner: -3.8, cuff: -0.2, suction: -2.6, dressing: -14, stoma: 'done', aboveCuff: -0.8 },
   },
   {
     bed: 'B2',
@@ -87,7 +87,7 @@ export const birchStories: readonly BedStory[] = [
     admittedHoursAgo: 103,
     tube: { name: 'corvane 7', inserted: { daysAgo: 16, stomaDaysAgo: 27 }, technique: 'percutaneous' },
     secretions: 'moderate',
-    stands: { inner: -4.7, cuff: -1.4, suction: -1.5, dressing: -9, stoma: 'done' },
+    stands: { inner: -4.7, cuff: -1.4, suction: -1.5, dressing: -9, stoma: 'done', aboveCuff: -2.3 },
     extra: [
       streaksOfBlood(0.8),
       digitsSwapped(37.6),

@@ -68,7 +68,7 @@ export const cedarStories: readonly BedStory[] = [
     tube: { name: 'corvane 8', inserted: { daysAgo: 9, stomaDaysAgo: 9 }, technique: 'surgical' },
     change: { hoursAgo: 46.6, name: 'corvane 7', reason: 'first change' },
     secretions: 'moderate',
-    stands: { inner: -1.3, cuff: -3.5, cuffFound: 'high', suction: -1.7, dressing: -10, stoma: 'done' },
+    stands: { inner: -1.3, cuff: -3.5, cuffFound: 'high', suction: -1.7, dressing: -10, stoma: 'done', aboveCuff: 0.4 },
   },
   {
     bed: 'C8',

@@ -2,6 +2,7 @@ import type { Role } from '#app/auth/permissions.ts'
 import { versionOf } from '#app/care/payload.ts'
 import { later, minutes } from '#app/time/duration.ts'
 import { type Bedside, placeAt } from './bedside.ts'
+import { aboveCuffCare } from './chart-above-cuff.ts'
 import { cuffCare } from './chart-cuff.ts'
 import { humidificationCare } from './chart-humidification.ts'
 import { innerCannulaCare } from './chart-inner-cannula.ts'
@@ -10,6 +11,7 @@ import { stomaCare } from './chart-stoma.ts'
 import { suctionCare } from './chart-suction.ts'
 import { tieCare } from './chart-ties.ts'
 import { tubeCare } from './chart-tube.ts'
+import { waterCuffCare } from './chart-water-cuff.ts'
 import type { Draft } from './draft.ts'
 import { idAt } from './random.ts'
 import type { DemoEntry, DemoPerson } from './rows.ts'
@@ -62,7 +64,14 @@ function draftsOf(bedside: Bedside): readonly Draft[] {
     ...stomaCare(bedside),
     ...(story.extra ?? []).flatMap(happens => happens(bedside)),
   ]
-  return [...usual, ...tieCare(bedside, usual), ...humidificationCare(bedside), ...kitCare(bedside)]
+  return [
+    ...usual,
+    ...tieCare(bedside, usual),
+    ...humidificationCare(bedside),
+    ...kitCare(bedside),
+    ...aboveCuffCare(bedside),
+    ...waterCuffCare(bedside),
+  ]
 }
 
 const USUAL_DELAY = [1, 9] as const // minutes from the act to its being written

@@ -54,6 +54,8 @@ export interface Standing {
   readonly cuffFound?: 'high' | 'low'
   readonly suction?: number
   readonly dressing?: number
+  /** Suction above the cuff; left out, the tube has no port for it. */
+  readonly aboveCuff?: number
   readonly stoma: ShiftStanding
   /** Of care that every bed has in time unless it is said here. */
   readonly humidification?: ShiftStanding
