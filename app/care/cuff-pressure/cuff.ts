@@ -63,13 +63,8 @@ function classOf(cmH2O: number | undefined, data: CuffData, { record, values }: 
 
 /** A reading that sets the clock back: taken with a gauge, and left within the band. */
 export function endsInBand(data: CuffData, values: Values): boolean {
-  return isGauged(data) && isLeftInBand(data, values)
-}
-
-/** Whether the cuff was left within the band, whatever it was set by. */
-export function isLeftInBand(data: CuffData, values: Values): boolean {
   const left = leftCmH2O(data)
-  return left !== undefined && cuffClass(left, cuffBand(values)) === 'in range'
+  return isGauged(data) && left !== undefined && cuffClass(left, cuffBand(values)) === 'in range'
 }
 
 /** Read on a gauge: volume and leak techniques set a cuff, they do not measure it. */

@@ -3,8 +3,8 @@ import { type Clock, intervalClock, promptClock, sooner, suspended } from '../cl
 import type { CareContext, TaskRule } from '../kind.ts'
 import { withoutTube } from '../tube-change/tasks.ts'
 import { type TubeEntry, tubeInPlace } from '../tube-change/tube.ts'
-import { type CuffEntry, cuffState, endsInBand, isGauged, isLeftInBand } from './cuff.ts'
-import { cuffChecks, leftCmH2O } from './schema.ts'
+import { type CuffEntry, cuffState, endsInBand, isGauged } from './cuff.ts'
+import { cuffChecks } from './schema.ts'
 import { cuffEventCheck, cuffInterval, cuffLower, cuffRecheck, cuffUpper } from './settings.ts'
 
 const still: Readonly<Record<string, string>> = {
@@ -30,19 +30,18 @@ const check: TaskRule = {
 
 function cuffClock(tube: TubeEntry, context: CareContext): Clock {
   const { record, values } = context
-  const done = record.latest(
-    cuffChecks,
-    (data, entry) => endsInBand(data, values) && entry.performedAt >= tube.performedAt,
-  )
-  const regular = intervalClock({
-    last: done,
-    start: upSince(tube, record),
-    interval: hours(values.of(cuffInterval)),
-  })
-  return [afterEvent(tube, done, context), afterBadReading(done, context)].reduce<Clock>(
-    (clock, prompt) => (prompt ? sooner(clock, prompt) : clock),
-    regular,
-  )
+  const readings = record
+    .since(cuffChecks, tube.performedAt)
+    .filter(({ data }) => isGauged(data) && data.cuffNow !== 'deflated')
+  const done = readings.find(({ data }) => endsInBand(data, values))
+  const [read] = readings
+  const clock =
+    read && read !== done
+      ? recheckClock(read, done, context)
+      : intervalClock({ last: done, start: upSince(tube, record), interval: hours(values.of(cuffInterval)) })
+  const asked = eventSince(read, tube, record)
+  if (!asked) return clock
+  return sooner(clock, promptClock({ ...asked, within: minutes(values.of(cuffEventCheck)), last: done }))
 }
 
 /** Since when the cuff has been up: a cuff let down and inflated again starts anew. */
@@ -51,17 +50,27 @@ function upSince(tube: TubeEntry, record: CareContext['record']): Date {
   return inflation && inflation.performedAt > tube.performedAt ? inflation.performedAt : tube.performedAt
 }
 
-/** Inflation, tube change, arrival, turn or transfer with no good reading since. */
-function afterEvent(tube: TubeEntry, done: CuffEntry | undefined, { record, values }: CareContext): Clock | undefined {
-  const within = minutes(values.of(cuffEventCheck))
-  const event = record.latest(cuffChecks, data => eventWords(data) !== undefined)
+/** A reading left out of the band keeps the task open: measure again soon. A band set after it counts from then. */
+function recheckClock(read: CuffEntry, done: CuffEntry | undefined, { values }: CareContext): Clock {
+  const bandSet = [values.policy.startsAt, ...[cuffLower, cuffUpper].map(limit => values.personal(limit)?.since)]
+  const moments = [read.performedAt, ...bandSet].map(moment => moment?.getTime() ?? 0)
+  return promptClock({
+    event: new Date(Math.max(...moments)),
+    within: minutes(values.of(cuffRecheck)),
+    last: done,
+    because: 'the last reading was left out of the band',
+  })
+}
+
+/** Inflation, tube change, arrival, turn or transfer with no reading by gauge since. */
+function eventSince(read: CuffEntry | undefined, tube: TubeEntry, record: CareContext['record']) {
+  const isUnread = ({ performedAt }: { readonly performedAt: Date }) => !read || read.performedAt < performedAt
+  const event = record.since(cuffChecks, tube.performedAt).find(({ data }) => eventWords(data) !== undefined)
   const because = event && eventWords(event.data)
-  if (event && because && event.performedAt >= tube.performedAt && !(done && done.performedAt >= event.performedAt)) {
-    return promptClock({ event: event.performedAt, within, last: done, because })
-  }
-  if (done) return undefined
+  if (event && because && isUnread(event)) return { event: event.performedAt, because }
+  if (!isUnread(tube)) return undefined
   const came = tube.data.reason === 'on arrival' ? 'the patient arrived with this tube' : 'the tube was changed'
-  return promptClock({ event: tube.performedAt, within, last: done, because: came })
+  return { event: tube.performedAt, because: came }
 }
 
 /** What was charted in place of a reading by gauge, and asks for one. */
@@ -73,20 +82,6 @@ function eventWords(data: CuffEntry['data']): string | undefined {
   if (data.reason === 'turned') return 'the patient was turned'
   if (data.reason === 'transfer') return 'the patient was moved'
   return data.reason === 'leak' || data.leak === 'yes' ? 'a leak was heard' : undefined
-}
-
-/** A reading left out of the band keeps the task open: measure again soon. */
-function afterBadReading(done: CuffEntry | undefined, { record, values }: CareContext): Clock | undefined {
-  const last = record.latest(cuffChecks, data => leftCmH2O(data) !== undefined && data.cuffNow !== 'deflated')
-  if (!last || isLeftInBand(last.data, values) || (done && done.performedAt >= last.performedAt)) return undefined
-  const tube = tubeInPlace(record)
-  if (!tube || last.performedAt < tube.performedAt) return undefined
-  return promptClock({
-    event: last.performedAt,
-    within: minutes(values.of(cuffRecheck)),
-    last: done,
-    because: 'the last reading was left out of the band',
-  })
 }
 
 export const cuffTasks: readonly TaskRule[] = [check]
