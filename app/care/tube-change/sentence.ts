@@ -1,4 +1,5 @@
 import { showDay } from '../../time/display.ts'
+import { sentence } from '../sentence.ts'
 import type { TubeData } from './schema.ts'
 
 const why: Readonly<Record<TubeData['reason'], string>> = {
@@ -62,9 +63,12 @@ function tubeParts(data: TubeData): readonly string[] {
     cuffs[data.cuff],
     inner,
     `${diameters}, OD ${data.od}, length ${data.lengthMm} mm`,
+    ...(data.connector === 'inner' ? ['15 mm connector on the inner cannula'] : []),
+    ...(data.connector === 'none' ? ['no 15 mm connector'] : []),
     ...(data.fenestrated === 'yes' ? ['fenestrated'] : []),
     ...(data.flangeMarkCm === undefined ? [] : [`mark ${data.flangeMarkCm} cm at the flange`]),
     ...(data.lot ? [`lot ${data.lot}`] : []),
+    ...(data.expiresOn ? [`expires ${showDay(data.expiresOn)}`] : []),
   ]
 }
 
@@ -73,6 +77,6 @@ function findings(data: TubeData): readonly string[] {
     ...(data.sutures === 'in place' ? ['Flange sutures in place.'] : []),
     ...(data.bleeding && data.bleeding !== 'none' ? [`Bleeding: ${data.bleeding}.`] : []),
     ...(data.spo2Low === undefined ? [] : [`Lowest SpO2 ${data.spo2Low}%.`]),
-    ...(data.note ? [data.note.endsWith('.') ? data.note : `${data.note}.`] : []),
+    ...(data.note ? [sentence(data.note)] : []),
   ]
 }
