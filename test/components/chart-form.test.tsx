@@ -147,3 +147,15 @@ test.each([
   expect(pressure()).toHaveValue('26')
   expect(screen.getByLabelText('Manometer')).toBeChecked()
 })
+
+test('where no answer came, nobody is told that nothing was charted', async () => {
+  opened(form => {
+    if (form.get('intent') === 'preview') return warned
+    throw new TypeError('Failed to fetch')
+  })
+  await type('26')
+  await tap('Manometer')
+  await press()
+  expect(await screen.findByText(/not known yet whether this was charted/)).toBeVisible()
+  expect(screen.queryByText(/Nothing was charted/)).toBeNull()
+})
