@@ -87,6 +87,16 @@ export function runningMariadb(dataFolder) {
 }
 
 /**
+ * The living process that is to stop the server of a data folder. Null when there is none.
+ * @param {string} dataFolder
+ * @returns {number | null}
+ */
+export function holderOf(dataFolder) {
+  const holder = readState(resolve(dataFolder))?.holder
+  return holder && isRunning(holder) ? Number(holder.split(':')[0]) : null
+}
+
+/**
  * @param {string} folder
  * @param {State} state
  * @param {string} note

@@ -12,7 +12,7 @@ let folder: string
 let port: number
 
 beforeAll(async () => {
-  folder = mkdtempSync(join(tmpdir(), 'cannulary-start-'))
+  folder = mkdtempSync(join(process.env.CANNULARY_TEST_DATA ?? tmpdir(), 'cannulary-start-'))
   chmodSync(folder, 0o711)
   port = (await freePort()) ?? 0
 })

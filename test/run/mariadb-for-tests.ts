@@ -1,4 +1,4 @@
-import { mkdtempSync, rmSync } from 'node:fs'
+import { chmodSync, mkdtempSync, rmSync } from 'node:fs'
 import { tmpdir } from 'node:os'
 import { join } from 'node:path'
 import type { TestProject } from 'vitest/node'
@@ -32,6 +32,7 @@ export default async function setup(project: TestProject) {
 }
 
 async function started() {
-  const folder = process.env.CANNULARY_TEST_DATA ?? mkdtempSync(join(tmpdir(), 'cannulary-test-'))
+  const folder = mkdtempSync(join(process.env.CANNULARY_TEST_DATA ?? tmpdir(), 'cannulary-test-'))
+  chmodSync(folder, 0o711) // user mysql has to walk through
   return { folder, users: 0 }
 }

@@ -16,7 +16,7 @@ let base: string
 let folder: string
 
 beforeEach(() => {
-  base = mkdtempSync(join(tmpdir(), 'cannulary-server-'))
+  base = mkdtempSync(join(process.env.CANNULARY_TEST_DATA ?? tmpdir(), 'cannulary-server-'))
   chmodSync(base, 0o755)
   folder = join(base, 'data')
 })
