@@ -50,6 +50,50 @@ test('a deferral does not count as done', () => {
   expect(taskAt(entries, '12:00', 'cuff-pressure-check')?.last?.performedAt).toEqual(at('2026-03-09 23:00'))
 })
 
+test('a deferral to before the due time moves nothing', () => {
+  const entries = [tube('2026-03-09 07:00'), cuff('06:00'), deferral('12:00', '30')]
+  expect(taskAt(entries, '12:10', 'cuff-pressure-check')).toMatchObject({
+    status: 'deferred',
+    window: { dueAt: at('14:00'), closesAt: at('15:00') },
+  })
+  expect(taskAt(entries, '12:31', 'cuff-pressure-check')?.status).toBe('upcoming')
+})
+
+const turned = anEntry(cuffChecks, '11:00', {
+  unit: 'cmH2O',
+  method: 'not measured',
+  whyNot: 'Gauge in use',
+  reason: 'turned',
+})
+
+test('what was put off before an event is not the check that the event asks for', () => {
+  const calm = [tube('2026-03-09 07:00'), cuff('09:00'), deferral('10:00', '120')]
+  expect(taskAt([...calm, turned], '11:10', 'cuff-pressure-check')).toMatchObject({
+    status: 'due',
+    window: { dueAt: at('11:15') },
+  })
+  const late = [tube('2026-03-09 07:00'), cuff('01:00'), deferral('10:00', '120')]
+  expect(taskAt([...late, turned], '11:10', 'cuff-pressure-check')?.status).toBe('overdue')
+  expect(taskAt([...late, turned, deferral('11:05', '30')], '11:10', 'cuff-pressure-check')?.status).toBe('deferred')
+})
+
+test('what was put off before a tube change is not owed by the new tube', () => {
+  const entries = [tube('2026-03-09 07:00'), cuff('2026-03-09 23:00'), deferral('08:00', '120'), tube('09:00')]
+  expect(taskAt(entries, '09:05', 'cuff-pressure-check')).toMatchObject({
+    status: 'due',
+    window: { dueAt: at('09:15') },
+  })
+})
+
+test('a tube change put off on its limit day is overdue from the new time, without a day of grace', () => {
+  const change = { task: 'tube-change', reason: 'procedure', agreedWith: 'M. Larsen' } as const
+  const entries = [tube('2026-02-10 10:00'), anEntry(deferrals, '2026-03-10 22:00', { ...change, minutes: '240' })]
+  expect(taskAt(entries, '2026-03-11 01:00', 'tube-change')?.status).toBe('deferred')
+  expect(taskAt(entries, '2026-03-11 02:00', 'tube-change')?.status).toBe('due')
+  expect(taskAt(entries, '2026-03-11 02:01', 'tube-change')?.status).toBe('overdue')
+  expect(taskAt(entries, '2026-03-12 00:01', 'tube-change')?.status).toBe('seriously overdue')
+})
+
 test('after the tube is out for good all tube care is suspended', () => {
   const removal = anEntry(decannulations, '10:00', {
     agreed: 'yes',
