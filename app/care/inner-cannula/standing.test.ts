@@ -124,3 +124,12 @@ test('blood on the cannula stands until the next look', () => {
 test('nothing stands once the tube is out for good', () => {
   expect(standing([aTubeIn(), anAct('11:20', { spare: 'no', condition: 'blocked' }), aRemoval('13:00')])).toEqual([])
 })
+
+test('distress and a deep fall of SpO2 stand until the next act', () => {
+  expect(names([aTubeIn(), anAct('11:20', { tolerance: 'distress' })])).toEqual(['inner-cannula-distress'])
+  expect(names([aTubeIn(), anAct('11:20', { tolerance: 'desaturation', spo2Low: 86 })])).toEqual([
+    'inner-cannula-spo2-low',
+  ])
+  expect(names([aTubeIn(), anAct('11:20', { tolerance: 'desaturation', spo2Low: 93 })])).toEqual([])
+  expect(names([aTubeIn(), anAct('11:20', { tolerance: 'distress' }), anAct('11:30')])).toEqual([])
+})

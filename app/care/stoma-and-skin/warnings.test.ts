@@ -118,6 +118,13 @@ test('the form starts with no sutures once the record knows that there are none'
   expect(stomaAndSkin.startsWith?.(context([laterTube('09:00')]))).toEqual({ sutures: 'none' })
 })
 
+test('that there are no sutures is filled in only where the record says so', () => {
+  const starts = (entries: readonly StoredEntry[]) => stomaAndSkin.startsWith?.(aContext(entries, '12:00'))
+  expect(starts([])).toEqual({})
+  expect(starts([firstTube])).toEqual({})
+  expect(starts([laterTube('09:00')])).toEqual({ sutures: 'none' })
+})
+
 test('the usual act fills in what was done and leaves every finding open', () => {
   expect(stomaAndSkin.usual?.(context())?.answers).toEqual({ dressing: 'left in place', holderChanged: 'no' })
   expect(stomaAndSkin.usual?.(aContext([], '12:00'))).toBeUndefined()
