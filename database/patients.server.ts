@@ -2,22 +2,9 @@ import type { Transaction } from 'sequelize'
 import { isUniqueViolation } from './errors.server.ts'
 import { PatientRow } from './models/patient.server.ts'
 import { noteChange } from './record-changes.server.ts'
-import { select, transact } from './sequelize.server.ts'
-import {
-  type Patient,
-  type PatientColumns,
-  patientColumns,
-  patientOf,
-  type Stay,
-  stayRows,
-} from './stay-rows.server.ts'
+import { transact } from './sequelize.server.ts'
+import { type Patient, type Stay, stayRows } from './stay-rows.server.ts'
 import { raiseWards } from './ward-revs.server.ts'
-
-/** A person by their id, whether or not they are here. */
-export async function patientById(id: string): Promise<Patient | undefined> {
-  const [row] = await select<PatientColumns>(`SELECT p.id, ${patientColumns} FROM patients p WHERE p.id = :id`, { id })
-  return row && patientOf(row)
-}
 
 /** Who it is and where: the person with their open stay, or the last one when they are not here now. One query. */
 export async function patientSummary(

@@ -41,7 +41,7 @@ type Flat = Omit<Patient, 'id' | 'ventilated' | 'demo'> &
   Omit<Stay, 'id'> & { stayId: string; ventilated: number; demo: number }
 
 /** The columns of a patient under the alias `p`, apart from the id. */
-export const patientColumns = `p.record_number AS recordNumber, p.family_name AS familyName, p.given_name AS givenName,
+const patientColumns = `p.record_number AS recordNumber, p.family_name AS familyName, p.given_name AS givenName,
   p.born_on AS bornOn, p.sex, p.allergies, p.upper_airway AS upperAirway, p.ventilated, p.oxygen, p.spo2_low AS spo2Low,
   p.spo2_high AS spo2High, p.demo, p.version`
 
@@ -79,13 +79,13 @@ function stayOf(row: Flat): Stay {
   }
 }
 
-export type PatientColumns = Omit<Patient, 'ventilated' | 'demo'> & {
+type PatientColumns = Omit<Patient, 'ventilated' | 'demo'> & {
   readonly ventilated: number
   readonly demo: number
 }
 
 /** A patient from the columns above and the id. MariaDB's booleans are numbers. */
-export function patientOf(row: PatientColumns): Patient {
+function patientOf(row: PatientColumns): Patient {
   return {
     id: row.id,
     recordNumber: row.recordNumber,

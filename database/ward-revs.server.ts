@@ -25,9 +25,3 @@ export async function wardRev(wardId: string): Promise<number> {
   const [row] = await select<{ rev: number }>('SELECT rev FROM ward_revs WHERE ward_id = :wardId', { wardId })
   return row?.rev ?? 0
 }
-
-/** The counters of all wards by their ids: one small query a second serves every live board of a process. */
-export async function wardRevs(): Promise<ReadonlyMap<string, number>> {
-  const rows = await select<{ wardId: string; rev: number }>('SELECT ward_id AS wardId, rev FROM ward_revs')
-  return new Map(rows.map(({ wardId, rev }) => [wardId, rev]))
-}

@@ -64,7 +64,7 @@ function BedForm({ bed, reply }: BedFormProps) {
             {retired ? 'Take into use again' : 'Take out of use'}
           </Button>
         )}
-        <span className="self-center text-ink2">{state}</span>
+        <span className="inline-flex min-h-11 items-center text-ink2">{state}</span>
       </div>
     </Form>
   )

@@ -10,17 +10,14 @@ import { CareFields } from '#app/components/care-fields.tsx'
 import { drawnFields } from '#app/components/conform-fields.ts'
 import { ErrorSummary } from '#app/components/error-summary.tsx'
 import { Notice } from '#app/components/notice.tsx'
-import { Table } from '#app/components/table.tsx'
+import { PatientHistory } from '#app/components/patient-history.tsx'
 import { errorsOf } from '#app/components/text-of.ts'
-import { env } from '#app/env.server.ts'
-import { type ChangeView, changeViews } from '#app/stays/change-words.ts'
 import { openedStay } from '#app/stays/opened-stay.server.ts'
 import { detailsChangedBy } from '#app/stays/patient-details.server.ts'
+import { patientHistory } from '#app/stays/patient-history.server.ts'
 import { answersOf, detailsSchema, person } from '#app/stays/patient-schema.ts'
 import { sentForm } from '#app/views/chart-submission.server.ts'
 import { logAccess } from '#database/access-log.server.ts'
-import { patientById } from '#database/patients.server.ts'
-import { changesOf } from '#database/record-changes.server.ts'
 import type { Route } from './+types/patient-details.ts'
 
 const ACT = 'edit patient details'
@@ -28,14 +25,12 @@ const ACT = 'edit patient details'
 export const meta: Route.MetaFunction = () => [{ title: 'Patient details | Cannulary' }]
 
 export async function loader(arrived: Route.LoaderArgs) {
-  const { stay } = await openedStay(arrived, ACT)
-  const patient = await patientById(stay.patientId)
-  if (!patient) throw data('There is no such patient.', 404)
+  const { stay, patient } = await openedStay(arrived, ACT)
   const user = signedIn(arrived.context)
   const isOpen = stay.dischargedAt === null
   return {
     form: { version: patient.version, person: answersOf(patient) },
-    changes: changeViews(await changesOf([patient.id, stay.id]), env.hospitalTimeZone),
+    history: await patientHistory(stay),
     isSaved: arrived.url.searchParams.has('saved'),
     isAdmitted: arrived.url.searchParams.has('admitted'),
     moves: isOpen && can(user, 'move patients', stay.wardId),
@@ -54,7 +49,7 @@ export async function action(arrived: Route.ActionArgs) {
 }
 
 export default function PatientDetails({ loaderData, actionData, params }: Route.ComponentProps) {
-  const { form, changes, isSaved, isAdmitted, moves, discharges } = loaderData
+  const { form, history, isSaved, isAdmitted, moves, discharges } = loaderData
   const here = `/patients/${params.patientId}`
   return (
     <div className="grid max-w-3xl gap-4 px-4 py-5 md:px-6">
@@ -75,9 +70,7 @@ export default function PatientDetails({ loaderData, actionData, params }: Route
       <Card>
         <DetailsForm key={form.version} form={form} reply={actionData?.reply} />
       </Card>
-      <Card title="What was changed" flush>
-        <Changes changes={changes} />
-      </Card>
+      <PatientHistory {...history} />
     </div>
   )
 }
@@ -104,18 +97,5 @@ function DetailsForm({ form: stored, reply }: DetailsFormProps) {
         Save
       </Button>
     </Form>
-  )
-}
-
-function Changes({ changes }: { readonly changes: readonly ChangeView[] }) {
-  return (
-    <Table
-      caption="What was changed"
-      columns={[{ label: 'When' }, { label: 'Who' }, { label: 'What' }]}
-      rows={changes.map(({ key, when, who, what, details }) => ({
-        key,
-        cells: [when, who, [what, ...details].join('. ')],
-      }))}
-    />
   )
 }

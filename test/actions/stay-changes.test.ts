@@ -140,7 +140,7 @@ test('details are changed, and who changed what is shown', async () => {
   })
   expect((await patientSummary(bedside.patientId))?.patient).toMatchObject({ allergies: 'Latex', version: 2 })
   const page = (await open('details', bedside.nurse)) as Awaited<ReturnType<typeof details.loader>>
-  expect(page.changes[0]).toMatchObject({
+  expect(page.history.changes[0]).toMatchObject({
     who: 'Nurse of Ward 7',
     details: expect.arrayContaining(['Allergies: not recorded, now Latex', 'Upper airway: open, now not open']),
   })

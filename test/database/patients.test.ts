@@ -1,6 +1,6 @@
 import { beforeEach, expect, test } from 'vitest'
 import { searchPatients } from '#database/patient-search.server.ts'
-import { changePatient, type PatientDetails, patientById } from '#database/patients.server.ts'
+import { changePatient, type PatientDetails, patientSummary } from '#database/patients.server.ts'
 import { changesOf } from '#database/record-changes.server.ts'
 import { discharge } from '#database/stay-changes.server.ts'
 import { wardRev } from '#database/ward-revs.server.ts'
@@ -72,7 +72,7 @@ test('pages hold what they say and the total counts all', async () => {
 })
 
 async function details(patientId: string): Promise<{ version: number; details: PatientDetails }> {
-  const patient = await patientById(patientId)
+  const patient = (await patientSummary(patientId))?.patient
   if (!patient) throw new Error('No patient')
   const { id: _id, demo: _demo, version, ...rest } = patient
   return { version, details: rest }

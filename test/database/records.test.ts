@@ -2,7 +2,7 @@ import fc from 'fast-check'
 import { v7 as uuidv7 } from 'uuid'
 import { beforeEach, expect, test, vi } from 'vitest'
 import { addEntry, correctEntry } from '#database/entries.server.ts'
-import { changePatient, patientById } from '#database/patients.server.ts'
+import { changePatient, patientSummary } from '#database/patients.server.ts'
 import type * as recordsModule from '#database/records.server.ts'
 import { select } from '#database/sequelize.server.ts'
 import { discharge, move } from '#database/stay-changes.server.ts'
@@ -116,7 +116,7 @@ test.each<[string, () => Promise<unknown>, (seen: Awaited<ReturnType<Records['wa
     'an edit of a patient',
     async () => {
       const [row] = await select<{ id: string }>('SELECT patient_id AS id FROM stays WHERE id = :id', { id: first() })
-      const patient = await patientById(row?.id ?? '')
+      const patient = (await patientSummary(row?.id ?? ''))?.patient
       if (!patient) throw new Error('No patient')
       const { id, demo: _, version, ...details } = patient
       await changePatient(id, version, { ...details, ventilated: true }, ward.nurse.id)
