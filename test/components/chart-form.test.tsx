@@ -1,4 +1,4 @@
-import { render, screen, waitFor } from '@testing-library/react'
+import { configure, render, screen, waitFor } from '@testing-library/react'
 import userEvent from '@testing-library/user-event'
 import {
   type ActionFunction,
@@ -12,6 +12,10 @@ import type { ChartAnswer } from '#app/charting/chart-answer.ts'
 import { ChartForm, type ChartFormProps } from '#app/components/chart-form.tsx'
 import { UsualAct } from '#app/components/chart-head.tsx'
 import { answerOrKept } from '#app/components/kept-form.ts'
+
+// The warnings wait until typing rests, and a loaded machine types slowly.
+configure({ asyncUtilTimeout: 10_000 })
+vi.setConfig({ testTimeout: 30_000 })
 
 const now = new Date('2026-03-10T14:06:30.000Z')
 const signer = { id: '01939d4e-0000-7000-8000-000000000002', name: 'R. Osei', role: 'respiratory therapist' }
