@@ -8,6 +8,7 @@ import { generalSettings } from './general-settings.ts'
 import { humidification } from './humidification/kind.ts'
 import { innerCannula } from './inner-cannula/kind.ts'
 import type { AnyCareKind, TaskRule } from './kind.ts'
+import { oralCare } from './oral-care/kind.ts'
 import type { AnySetting } from './policy.ts'
 import { stomaAndSkin } from './stoma-and-skin/kind.ts'
 import { suction } from './suction/kind.ts'
@@ -25,6 +26,7 @@ export const careKinds = [
   suction,
   aboveCuffSuction,
   humidification,
+  oralCare,
   bedsideKit,
   tubeChange,
   decannulation,

@@ -48,7 +48,7 @@ export const alderStories: readonly BedStory[] = [
     admittedHoursAgo: 79,
     tube: { name: 'halden 6', inserted: { daysAgo: 11, stomaDaysAgo: 33 }, technique: 'surgical' },
     secretions: 'thin',
-    stands: { inner: -4.5, innerRenewal: -3.2, suction: -0.7, dressing: -12, stoma: 'done' },
+    stands: { inner: -4.5, innerRenewal: -3.2, suction: -0.7, dressing: -12, stoma: 'done', oralCare: 1.6 },
   },
   {
     bed: 'A6',

@@ -7,6 +7,7 @@ import { cuffCare } from './chart-cuff.ts'
 import { humidificationCare } from './chart-humidification.ts'
 import { innerCannulaCare } from './chart-inner-cannula.ts'
 import { kitCare } from './chart-kit.ts'
+import { oralCare } from './chart-oral-care.ts'
 import { stomaCare } from './chart-stoma.ts'
 import { suctionCare } from './chart-suction.ts'
 import { tieCare } from './chart-ties.ts'
@@ -71,6 +72,7 @@ function draftsOf(bedside: Bedside): readonly Draft[] {
     ...kitCare(bedside),
     ...aboveCuffCare(bedside),
     ...waterCuffCare(bedside),
+    ...oralCare(bedside),
   ]
 }
 

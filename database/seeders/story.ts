@@ -60,6 +60,7 @@ export interface Standing {
   /** Of care that every bed has in time unless it is said here. */
   readonly humidification?: ShiftStanding
   readonly kit?: ShiftStanding
+  readonly oralCare?: number
 }
 
 export type Happening = (bedside: Bedside) => readonly Draft[]
