@@ -1,0 +1,108 @@
+import { expect, test } from 'vitest'
+import { careSettings } from '#app/care/kinds.ts'
+import type { Standing } from '#app/care/policy.ts'
+
+/*
+ * Every number of a policy as the clinical reference gives it: its default, how far that was checked, and words of its source.
+ * V read at its source, V2 read second-hand, M from memory or common practice, P our own proposal, to be signed off by the hospital.
+ * A new setting needs a row here; a default that changes must change here too, with its reason.
+ */
+
+type Mark = 'V' | 'V2' | 'M' | 'P'
+type Row = readonly [name: string, value: number | boolean | readonly number[], mark: Mark, source: string]
+
+const rows: readonly Row[] = [
+  // Inner cannula (reference 3.1)
+  ['inner-cannula-inspection-interval', 8, 'V2', 'at least once in 8 hours'],
+  ['inner-cannula-early-interval', 4, 'P', 'No published number'],
+  ['inner-cannula-early-period', 48, 'P', 'No published number'],
+  ['inner-cannula-disposable-interval', 12, 'M', 'Twice a day'],
+  ['inner-cannula-reusable-interval', 24, 'M', 'At least once a day'],
+  ['inner-cannula-recheck', 2, 'P', 'as a recheck a proposal'],
+  ['inner-cannula-repeat-block-window', 24, 'P', 'without a number'],
+  // Cuff (3.2, 4.1)
+  ['cuff-pressure-lower-limit', 20, 'V', 'Lizy 2014'],
+  ['cuff-pressure-upper-limit', 30, 'V', 'BMJ 1984'],
+  ['cuff-pressure-very-low', 15, 'P', 'Lowest published lower limit'],
+  ['cuff-pressure-very-high', 40, 'P', 'near 50 cmH2O'],
+  ['cuff-pressure-interval', 8, 'V', 'every 8 hours no worse than every 4 hours'],
+  ['cuff-pressure-event-check', 15, 'P', 'the minutes are a proposal'],
+  ['cuff-pressure-recheck', 30, 'P', 'No published number'],
+  ['cuff-top-ups', 2, 'P', 'without a number'],
+  ['cuff-top-up-volume', 3, 'P', 'without a number'],
+  ['cuff-top-up-window', 12, 'P', 'without a number'],
+  ['water-cuff-difference', 1, 'P', 'No published number'],
+  // Stoma, skin and ties (3.4 to 3.6, 4.6)
+  ['dressing-change-interval', 24, 'V', 'Royal Marsden Manual'],
+  ['ties-most-fingers', 2, 'V', 'one to two'],
+  ['ties-change-interval', 24, 'M', 'daily in many hospital policies'],
+  ['stoma-infection-signs', 2, 'P', 'No validated score'],
+  // Suction (3.7, 4.3, 5.2)
+  ['suction-need-interval', 4, 'P', 'the hours are a proposal'],
+  ['suction-need-interval-copious', 2, 'P', 'the hours are a proposal'],
+  ['suction-catheter-share', 50, 'V', 'Vanner and Bick 2008'],
+  ['suction-catheter-strictly-below', false, 'V', 'AARC 2010'],
+  ['suction-catheter-sizes', [5, 6, 8, 10, 12, 14, 16, 18], 'M', 'common use'],
+  ['suction-vacuum-low', 80, 'V', '80 to 150 mmHg'],
+  ['suction-vacuum-warn', 150, 'V', '80 to 150 mmHg'],
+  ['suction-vacuum-very-high', 200, 'V', 'below 200 mmHg'],
+  ['suction-vacuum-unit-doubt', 40, 'P', 'the number lies between'],
+  ['suction-pass-warn', 10, 'M', 'at most 10 seconds'],
+  ['suction-pass-limit', 15, 'V', 'at most 15 seconds'],
+  ['suction-most-passes', 3, 'M', 'at most 3'],
+  ['suction-spo2-below-target', 3, 'V', 'BTS oxygen guideline 2017'],
+  ['suction-spo2-without-target', 91, 'V', 'NEWS2'],
+  ['bleed-window-from', 3, 'V', '3 days to 6 weeks'],
+  ['bleed-window-to', 42, 'V', '3 days to 6 weeks'],
+  ['bleed-streaks-red', false, 'P', 'doctor this shift'],
+  ['bleed-watch', 48, 'P', 'the hours are a proposal'],
+  // Above the cuff, humidity, mouth, kit (3.8 to 3.10, 3.12)
+  ['above-cuff-suction-interval', 4, 'M', 'every 1 to 4 hours'],
+  ['above-cuff-rate-limit', 1, 'V', 'Pryor 2016'],
+  ['hme-change-interval', 24, 'V', "St George's NHS"],
+  ['humidifier-water-interval', 4, 'P', 'No published number'],
+  ['oral-care-interval', 4, 'M', 'every 2 to 4 hours'],
+  ['tooth-brushing-interval', 12, 'V', 'twice a day'],
+  ['bedside-kit-after-event', 30, 'P', 'the minutes are a proposal'],
+  ['bedside-kit-missing-within', 15, 'P', 'No published number'],
+  // Tube change, sutures, tract (3.11, 2.4)
+  ['dwell-limit-dual-cannula', 28, 'V', 'National Tracheostomy Safety Project'],
+  ['dwell-limit-single-cannula', 14, 'V2', '7 to 14 days'],
+  ['dwell-limit-single-cannula-heavy-secretions', 7, 'V2', '7 to 14 days'],
+  ['heavy-secretions-after', 3, 'P', 'No published number'],
+  ['dwell-notice', 7, 'P', 'No published number'],
+  ['dwell-strong-notice', 2, 'P', 'No published number'],
+  ['first-change-surgical-earliest', 4, 'V2', 'not before day 4'],
+  ['first-change-surgical-target', 7, 'V2', 'day 3 to 7'],
+  ['first-change-percutaneous-earliest', 7, 'V', 'White 2010'],
+  ['first-change-percutaneous-target', 10, 'V', 'day 10 to 14'],
+  ['first-change-hard-limit', 72, 'V2', 'not in the first 72 hours'],
+  ['routine-first-change', true, 'V2', 'French expert panel 2018'],
+  ['sutures-out-by', 7, 'V', "O'Toole 2017"],
+  ['tract-established-after', 14, 'V', 'Saskatoon'],
+  ['no-blind-reinsertion-before', 7, 'V', 'Bontempo and Manning'],
+  ['repeat-tube-out-window', 7, 'P', 'No published number'],
+  ['after-removal-watch', 48, 'P', 'Stelfox 2008'],
+  // Charting (scope, 10)
+  ['adult-age', 16, 'P', 'Local cut-off'],
+  ['late-entry-after', 60, 'P', 'NMC Code section 10'],
+  ['late-entry-reason-after', 24, 'P', 'no number given'],
+]
+
+const standings: Readonly<Record<Mark, readonly Standing[]>> = {
+  V: ['published'],
+  V2: ['published, read second-hand'],
+  M: ['common practice', 'from memory'],
+  P: ['product proposal'],
+}
+
+test('every setting has a row, and every row a setting, each once', () => {
+  expect(rows.map(([name]) => name).toSorted()).toEqual(careSettings.map(({ name }) => name).toSorted())
+})
+
+test.each(rows)('%s is %s (%s), by a source that says "%s"', (name, value, mark, words) => {
+  const setting = careSettings.find(one => one.name === name)
+  expect(setting?.default).toEqual(value)
+  expect(standings[mark]).toContain(setting?.source.standing)
+  expect(setting?.source.says).toContain(words)
+})
