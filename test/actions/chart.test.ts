@@ -3,6 +3,7 @@ import { v7 as uuidv7 } from 'uuid'
 import { beforeEach, expect, test } from 'vitest'
 import { cuffPressure } from '#app/care/cuff-pressure/kind.ts'
 import { innerCannula } from '#app/care/inner-cannula/kind.ts'
+import { saveDraft } from '#database/drafts.server.ts'
 import { aCharting, changed, chart, openedForm, refusalOf, type Sent, wholeForm } from '#test/charting.ts'
 import { cleared, owner } from '#test/database.ts'
 import { aPerson } from '#test/people.ts'
@@ -142,4 +143,19 @@ test('a form says who charted the same a moment ago', async () => {
     /^Nurse of Ward 7 charted this (less than 1 min|\d min) ago: Cuff pressure 26 cmH2O/,
   )
   expect((await openedForm(given.nurse, given.patientId, slug)).recently).toMatch(/^You charted this/)
+})
+
+test('what was typed when a session ended comes back once, to its author alone, at the time it was meant for', async () => {
+  const path = `/patients/${given.patientId}/chart/${slug}`
+  const draft = Object.fromEntries(form({ at: '2026-11-30T14:06:30.000Z' }).map(([name, value]) => [name, [value]]))
+  await saveDraft(given.nurse.id, path, draft, 24)
+  const other = await aPerson({ name: 'Kofi Lindstrand', wardIds: [given.ward.id] })
+  expect(await openedForm(other, given.patientId, slug)).toMatchObject({ isRestored: false })
+  const back = await openedForm(given.nurse, given.patientId, slug)
+  expect(back).toMatchObject({
+    isRestored: true,
+    typed: { 'care.found': ['26'], when: ['other'], day: ['2026-11-30'], time: ['14:06'] },
+  })
+  expect(back.id).not.toBe(draft.id?.[0])
+  expect(await openedForm(given.nurse, given.patientId, slug)).toMatchObject({ isRestored: false })
 })
