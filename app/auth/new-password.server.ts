@@ -1,13 +1,13 @@
 import type { SubmissionResult } from '@conform-to/react'
-import { parseWithZod } from '@conform-to/zod/v4'
+import { readForm } from '#app/sent-form.server.ts'
 import type { Trace } from '#database/access-log.server.ts'
 import { passwordHashOf, setOwnPassword } from '#database/users.server.ts'
 import { allWards } from '#database/wards.server.ts'
 import { newPasswordSchema } from './new-password.ts'
-import { passwordHash, passwordMatches } from './password.server.ts'
+import { PasswordsBusy, passwordHash, passwordMatches } from './password.server.ts'
 import { passwordFault } from './password-rules.ts'
 import type { CurrentUser } from './permissions.ts'
-import { forgiveAttempt, takeAttempt } from './sign-in-throttle.server.ts'
+import { forgiveAttempt, returnAttempt, takeAttempt } from './sign-in-throttle.server.ts'
 
 // What was typed in them does not go back to the browser.
 const hideFields: ('currentPassword' | 'newPassword')[] = ['currentPassword', 'newPassword']
@@ -21,7 +21,7 @@ export async function replacedPassword(
   form: FormData,
   by: Trace,
 ): Promise<SubmissionResult<string[]> | null> {
-  const submission = parseWithZod(form, { schema: newPasswordSchema })
+  const submission = readForm(form, newPasswordSchema)
   if (submission.status !== 'success') return submission.reply({ hideFields })
   const { currentPassword, newPassword, keepOthers = false } = submission.value
   const says = (field: 'currentPassword' | 'newPassword', words: string) =>
@@ -29,7 +29,11 @@ export async function replacedPassword(
   const attempt = await takeAttempt(user.email, by.address)
   if (typeof attempt === 'number') return says('currentPassword', `Too many tries. Wait ${attempt} s, then try again`)
   const hash = await passwordHashOf(user.id)
-  if (!(await passwordMatches(currentPassword, hash))) return says('currentPassword', 'This is not your password')
+  const isRight = await passwordMatches(currentPassword, hash).catch(async error => {
+    if (error instanceof PasswordsBusy) await returnAttempt(attempt)
+    throw error
+  })
+  if (!isRight) return says('currentPassword', 'This is not your password')
   await forgiveAttempt(attempt)
   if (currentPassword === newPassword) return says('newPassword', 'Choose another one than before')
   const wardNames = (await allWards()).map(ward => ward.name)

@@ -1,6 +1,6 @@
 import type { SubmissionResult } from '@conform-to/react'
-import { parseWithZod } from '@conform-to/zod/v4'
 import { data } from 'react-router'
+import { readForm } from '#app/sent-form.server.ts'
 import type { Trace } from '#database/access-log.server.ts'
 import {
   addPerson,
@@ -11,6 +11,7 @@ import {
   LastAdministrator,
   resetPassword,
 } from '#database/user-changes.server.ts'
+import { allWards } from '#database/wards.server.ts'
 import { ONE_TIME_PASSWORD_HOURS } from './limits.ts'
 import { oneTimePassword, passwordHash } from './password.server.ts'
 import { personSchema } from './person-schema.ts'
@@ -26,8 +27,9 @@ export type PersonOutcome = {
 
 /** Adds the person a form describes. */
 export async function addedPerson(form: FormData, by: Trace): Promise<PersonOutcome> {
-  const submission = parseWithZod(form, { schema: personSchema })
+  const submission = readForm(form, personSchema)
   if (submission.status !== 'success') return { status: 400, reply: submission.reply() }
+  if (await hasUnknownWard(submission.value)) return { status: 400, reply: submission.reply(unknownWard) }
   const { password, oneTime } = await freshOneTime()
   return kept(submission, async () => {
     await addPerson(submission.value, oneTime, by)
@@ -39,8 +41,9 @@ export async function addedPerson(form: FormData, by: Trace): Promise<PersonOutc
 export async function changedPerson(id: string, form: FormData, by: Trace): Promise<PersonOutcome> {
   switch (form.get('intent')) {
     case 'details': {
-      const submission = parseWithZod(form, { schema: personSchema })
+      const submission = readForm(form, personSchema)
       if (submission.status !== 'success') return { status: 400, reply: submission.reply() }
+      if (await hasUnknownWard(submission.value)) return { status: 400, reply: submission.reply(unknownWard) }
       return kept(submission, async () => {
         await changePerson(id, submission.value, by)
         return { status: 200, says: 'Saved. It counts from their next page on.' }
@@ -59,6 +62,13 @@ export async function changedPerson(id: string, form: FormData, by: Trace): Prom
     default:
       throw data('This form is not from this page.', 400)
   }
+}
+
+const unknownWard = { fieldErrors: { wardIds: ['Choose the wards from the list'] } }
+
+async function hasUnknownWard({ wardIds }: { readonly wardIds: readonly string[] }): Promise<boolean> {
+  const known = new Set((await allWards()).map(({ id }) => id))
+  return wardIds.some(id => !known.has(id.toLowerCase()))
 }
 
 const LAST = 'This is the only administrator: make somebody else one first'

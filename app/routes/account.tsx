@@ -15,6 +15,7 @@ import { Table } from '#app/components/table.tsx'
 import { TextField } from '#app/components/text-field.tsx'
 import { errorsOf, textOf } from '#app/components/text-of.ts'
 import { env } from '#app/env.server.ts'
+import { sentForm } from '#app/sent-form.server.ts'
 import { showDateTime } from '#app/time/display.ts'
 import { sessionsOf } from '#database/sessions.server.ts'
 import type { Route } from './+types/account.ts'
@@ -39,7 +40,7 @@ export async function loader({ context, url }: Route.LoaderArgs) {
 export async function action({ request, url, context }: Route.ActionArgs) {
   const { owesPassword } = ownSession(context)
   const by = traceOf({ request, url, context })
-  const reply = await replacedPassword(signedIn(context), await request.formData(), by)
+  const reply = await replacedPassword(signedIn(context), await sentForm(request), by)
   if (reply !== null) return data(reply, 400)
   return redirect(owesPassword ? '/' : '/account?changed=yes')
 }

@@ -12,6 +12,7 @@ import { ErrorSummary } from '#app/components/error-summary.tsx'
 import { OneTimePassword } from '#app/components/one-time-password.tsx'
 import { PersonFields } from '#app/components/person-fields.tsx'
 import { errorsOf } from '#app/components/text-of.ts'
+import { sentForm } from '#app/sent-form.server.ts'
 import { allWards } from '#database/wards.server.ts'
 import type { Route } from './+types/admin-person-new.ts'
 
@@ -26,7 +27,7 @@ export async function loader({ context }: Route.LoaderArgs) {
 export async function action({ request, url, context }: Route.ActionArgs) {
   const by = traceOf({ request, url, context })
   if (!can(signedIn(context), 'manage people')) throw data('People are kept by the administrators.', 403)
-  const outcome = await addedPerson(await request.formData(), by)
+  const outcome = await addedPerson(await sentForm(request), by)
   return data(outcome, outcome.status)
 }
 

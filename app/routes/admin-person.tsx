@@ -14,6 +14,7 @@ import { OneTimePassword } from '#app/components/one-time-password.tsx'
 import { PersonFields } from '#app/components/person-fields.tsx'
 import { Tag } from '#app/components/tag.tsx'
 import { errorsOf } from '#app/components/text-of.ts'
+import { sentForm } from '#app/sent-form.server.ts'
 import { person } from '#database/users.server.ts'
 import { allWards } from '#database/wards.server.ts'
 import type { Route } from './+types/admin-person.ts'
@@ -42,7 +43,7 @@ export async function action({ request, url, params: { userId }, context }: Rout
   const user = signedIn(context)
   if (!can(user, 'manage people')) throw data('People are kept by the administrators.', 403)
   if ((await person(userId)) === null) throw data('There is no such person.', 404)
-  const form = await request.formData()
+  const form = await sentForm(request)
   const outcome = await changedPerson(userId, form, traceOf({ request, url, context }))
   return data(outcome, outcome.status)
 }

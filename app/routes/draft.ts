@@ -4,6 +4,7 @@ import { returnPath } from '#app/auth/return-to.ts'
 import { signOutIdle } from '#app/auth/session.server.ts'
 import { sessionContext } from '#app/auth/signed-in.server.ts'
 import { traceOf } from '#app/auth/trace.server.ts'
+import { sentForm } from '#app/sent-form.server.ts'
 import type { Route } from './+types/draft.ts'
 
 /**
@@ -15,7 +16,7 @@ export async function action({ request, url, context }: Route.ActionArgs) {
   if (session === null) throw data('Sign in first.', 401)
   const ended = session.isOver || (await signOutIdle(session.user.sessionHash, traceOf({ request, url, context })))
   if (!ended) return Response.json({ ended, kept: false })
-  const form = await request.formData()
+  const form = await sentForm(request)
   const path = new URL(returnPath(form.get('draft-path')), url).pathname
   form.delete('draft-path')
   return Response.json({ ended, kept: await keepFields(session.user.id, path, form) })

@@ -1,5 +1,4 @@
 import { useForm } from '@conform-to/react'
-import { parseWithZod } from '@conform-to/zod/v4'
 import { data, Form, redirect } from 'react-router'
 import { GRANT_MINUTES } from '#app/auth/limits.ts'
 import { patientElsewhere, reasonSchema } from '#app/auth/patient-reason.server.ts'
@@ -11,6 +10,7 @@ import { ErrorSummary } from '#app/components/error-summary.tsx'
 import { Notice } from '#app/components/notice.tsx'
 import { TextArea } from '#app/components/text-field.tsx'
 import { errorsOf, textOf } from '#app/components/text-of.ts'
+import { readForm, sentForm } from '#app/sent-form.server.ts'
 import { grantAccess } from '#database/access-grants.server.ts'
 import type { Route } from './+types/patient-access.ts'
 
@@ -26,7 +26,7 @@ export async function action({ request, params: { patientId }, url, context }: R
   const user = signedIn(context)
   const place = await patientElsewhere(user, patientId)
   if (place === 'open') return redirect(wayOn(url, patientId))
-  const submission = parseWithZod(await request.formData(), { schema: reasonSchema })
+  const submission = readForm(await sentForm(request), reasonSchema)
   if (submission.status !== 'success') return data(submission.reply(), 400)
   const { reason } = submission.value
   await grantAccess({ ...place, userId: user.id, reason, minutes: GRANT_MINUTES }, traceOf({ request, url, context }))

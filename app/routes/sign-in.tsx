@@ -10,6 +10,7 @@ import { ErrorSummary } from '#app/components/error-summary.tsx'
 import { Notice } from '#app/components/notice.tsx'
 import { PlainPage } from '#app/components/plain-page.tsx'
 import { TextField } from '#app/components/text-field.tsx'
+import { sentForm } from '#app/sent-form.server.ts'
 import { demoAccounts, demoPassphrase } from '#database/demo.server.ts'
 import type { Route } from './+types/sign-in.ts'
 
@@ -27,6 +28,7 @@ export async function loader({ context, url }: Route.LoaderArgs) {
 
 export async function action({ request, url, context }: Route.ActionArgs) {
   const by = traceOf({ request, url, context })
+  await sentForm(request.clone()) // remix-auth would fail on a body that is no form
   try {
     const user = await authenticator(by).authenticate('form', request)
     const headers = { 'Set-Cookie': await signIn(request, user, by) }

@@ -1,10 +1,10 @@
 import { parseWithZod } from '@conform-to/zod/v4'
 import type { CurrentUser } from '#app/auth/permissions.ts'
 import { env } from '#app/env.server.ts'
+import { onlyFields } from '#app/sent-form.server.ts'
 import { localDay } from '#app/time/zone.ts'
 import { changePatient } from '#database/patients.server.ts'
 import { type FormOutcome, refusedAt, refusedForm } from './moment.server.ts'
-import { onlyFields } from './own-fields.ts'
 import { detailsOf, detailsSchema, namesIn, person, personProblem } from './patient-schema.ts'
 
 /** Changes what is known of a patient as a form says. */

@@ -1,12 +1,11 @@
-import { parseWithZod } from '@conform-to/zod/v4'
 import type { CurrentUser } from '#app/auth/permissions.ts'
 import { env } from '#app/env.server.ts'
+import { readForm } from '#app/sent-form.server.ts'
 import { showDateTime } from '#app/time/display.ts'
 import { freeBeds } from '#database/beds.server.ts'
 import { type Discharged, discharge, type Moved, move } from '#database/stay-changes.server.ts'
 import type { Stay } from '#database/stays.server.ts'
 import { type FormOutcome, momentOf, refusedAt, refusedForm, type Sent } from './moment.server.ts'
-import { onlyFields } from './own-fields.ts'
 import { dischargeSchema, moveSchema } from './stay-forms.ts'
 
 type Asked = { readonly user: CurrentUser; readonly stay: Stay; readonly now: Date }
@@ -16,7 +15,7 @@ const shown = (at: Date) => showDateTime(at, env.hospitalTimeZone)
 
 /** Moves the patient of a stay to the bed that a form names, in any ward that takes patients. */
 export async function moveBy(sent: FormData, { user, stay, now }: Asked): Promise<FormOutcome> {
-  const submission = parseWithZod(onlyFields(sent, Object.keys(moveSchema.shape)), { schema: moveSchema })
+  const submission = readForm(sent, moveSchema)
   if (submission.status !== 'success') return { status: 400, reply: submission.reply() }
   const { value } = submission
   const moment = momentOf(value, { user, now, beganAt: stay.admittedAt }, submission)
@@ -52,7 +51,7 @@ function afterMove(moved: Moved, stay: Stay, submission: Sent): FormOutcome {
 
 /** Ends a stay as a form says. */
 export async function dischargeBy(sent: FormData, { user, stay, now }: Asked): Promise<FormOutcome> {
-  const submission = parseWithZod(onlyFields(sent, Object.keys(dischargeSchema.shape)), { schema: dischargeSchema })
+  const submission = readForm(sent, dischargeSchema)
   if (submission.status !== 'success') return { status: 400, reply: submission.reply() }
   const { reason, note = null, careAfter, ...spine } = submission.value
   const moment = momentOf(spine, { user, now, beganAt: stay.admittedAt }, submission)

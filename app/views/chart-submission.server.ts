@@ -1,4 +1,3 @@
-import { data } from 'react-router'
 import { validate as isUuid, v7 as uuidv7 } from 'uuid'
 import type { CurrentUser } from '#app/auth/permissions.ts'
 import type { AnyCareKind, CareContext } from '#app/care/kind.ts'
@@ -31,16 +30,6 @@ export interface Sent {
 export type Checked =
   | { readonly ok: true; readonly chart: Chartable }
   | { readonly ok: false; readonly answer: ChartAnswer; readonly status: number }
-
-/** The form in a request. Throws a 400 for a body that is no form. */
-export async function sentForm(request: Request): Promise<FormData> {
-  try {
-    return await request.formData()
-  } catch (error) {
-    if (error instanceof TypeError) throw data('This is not a form. Nothing was charted.', 400)
-    throw error
-  }
-}
 
 /** Checks a form and does what its button says, short of charting it. Stores nothing. */
 export async function checked(sent: Sent): Promise<Checked> {

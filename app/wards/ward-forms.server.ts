@@ -1,10 +1,8 @@
 import type { SubmissionResult } from '@conform-to/react'
-import { parseWithZod } from '@conform-to/zod/v4'
 import { data } from 'react-router'
-import type { z } from 'zod'
-import { onlyFields } from '#app/stays/own-fields.ts'
+import { readForm } from '#app/sent-form.server.ts'
 import { addBed, type BedChange, changeBed } from '#database/beds.server.ts'
-import { addWard, changeWard, type WardChange, wardById } from '#database/wards.server.ts'
+import { addWard, changeWard, type Ward, type WardChange, wardById } from '#database/wards.server.ts'
 import { bedChangeSchema, bedSchema, useSchema, wardSchema } from './ward-schema.ts'
 
 /** What came of a form about a ward or its beds: `saved`, or the form with what is wrong with it. `intent` names the form. */
@@ -14,28 +12,26 @@ export type WardOutcome =
 
 type Sent = { reply(refusal: { fieldErrors?: Record<string, string[]> }): SubmissionResult<string[]> }
 
-function read<Schema extends z.ZodObject>(sent: FormData, schema: Schema) {
-  return parseWithZod(onlyFields(sent, Object.keys(schema.shape)), { schema })
-}
-
 /** Adds the ward that a form describes, and gives its id. */
 export async function wardAddedBy(
   sent: FormData,
   userId: string,
 ): Promise<{ readonly wardId: string } | { readonly reply: SubmissionResult<string[]> }> {
-  const submission = read(sent, wardSchema)
+  const submission = readForm(sent, wardSchema)
   if (submission.status !== 'success') return { reply: submission.reply() }
   const { reply } = afterWard(await addWard(submission.value, userId), 'ward', submission)
   return reply ? { reply } : { wardId: submission.value.id }
 }
 
 /** Does what a form's `intent` says to a ward: `ward`, `use`, `add bed`, or `bed` for one of its beds. */
-export function wardChangedBy(sent: FormData, wardId: string, userId: string): Promise<WardOutcome> {
+export async function wardChangedBy(sent: FormData, wardId: string, userId: string): Promise<WardOutcome> {
+  const ward = await wardById(wardId)
+  if (!ward) throw data('There is no such ward.', 404)
   switch (sent.get('intent')) {
     case 'ward':
-      return settingsChanged(sent, wardId, userId)
+      return settingsChanged(sent, ward, userId)
     case 'use':
-      return putInUse(sent, wardId, userId)
+      return putInUse(sent, ward, userId)
     case 'add bed':
       return bedAdded(sent, wardId, userId)
     case 'bed':
@@ -45,25 +41,21 @@ export function wardChangedBy(sent: FormData, wardId: string, userId: string): P
   }
 }
 
-async function settingsChanged(sent: FormData, wardId: string, userId: string): Promise<WardOutcome> {
-  const submission = read(sent, wardSchema.omit({ id: true }))
+async function settingsChanged(sent: FormData, ward: Ward, userId: string): Promise<WardOutcome> {
+  const submission = readForm(sent, wardSchema.omit({ id: true }))
   if (submission.status !== 'success') return { intent: 'ward', reply: submission.reply() }
-  const ward = await wardById(wardId)
-  if (!ward) throw data('There is no such ward.', 404)
   return afterWard(await changeWard({ ...ward, ...submission.value }, userId), 'ward', submission)
 }
 
-async function putInUse(sent: FormData, wardId: string, userId: string): Promise<WardOutcome> {
-  const submission = read(sent, useSchema)
+async function putInUse(sent: FormData, ward: Ward, userId: string): Promise<WardOutcome> {
+  const submission = readForm(sent, useSchema)
   if (submission.status !== 'success') return { intent: 'use', reply: submission.reply() }
-  const ward = await wardById(wardId)
-  if (!ward) throw data('There is no such ward.', 404)
   const retired = submission.value.retired === 'yes'
   return afterWard(await changeWard({ ...ward, retired }, userId), 'use', submission)
 }
 
 async function bedAdded(sent: FormData, wardId: string, userId: string): Promise<WardOutcome> {
-  const submission = read(sent, bedSchema)
+  const submission = readForm(sent, bedSchema)
   if (submission.status !== 'success') return { intent: 'add bed', reply: submission.reply() }
   return afterBed(await addBed({ ...submission.value, wardId }, userId), 'add bed', submission)
 }
@@ -71,7 +63,7 @@ async function bedAdded(sent: FormData, wardId: string, userId: string): Promise
 async function bedChanged(sent: FormData, wardId: string, userId: string): Promise<WardOutcome> {
   const id = sent.get('id')
   const intent = `bed ${typeof id === 'string' ? id : ''}`
-  const submission = read(sent, bedChangeSchema)
+  const submission = readForm(sent, bedChangeSchema)
   if (submission.status !== 'success') return { intent, reply: submission.reply() }
   const { retired, ...bed } = submission.value
   return afterBed(await changeBed({ ...bed, wardId, retired: retired === 'yes' }, userId), intent, submission)
