@@ -50,15 +50,24 @@ async function authenticated(form: FormData, by: Trace): Promise<Authenticated> 
   const isRight = await passwordMatches(password, account?.passwordHash ?? null).catch(async error => {
     if (!(error instanceof PasswordsBusy)) throw error
     await returnAttempt(attempt)
-    throw new SignInRefused('Many people are signing in at this moment. Try again in a few seconds.', 503, email)
+    throw new SignInRefused(error.data, 503, email)
   })
   if (account === null || !isRight || account.mayEnter !== 1) {
     await logAccess({ action: 'signed in', outcome: 'refused', purpose: 'SIGN-IN', by, ...about(account) })
     throw new SignInRefused(WRONG, 400, email)
   }
   await forgiveAttempt(attempt)
-  if (isOutdated(account.passwordHash)) await storeRehashed(account.id, await passwordHash(password))
+  if (isOutdated(account.passwordHash)) await renewHash(account.id, password)
   return { id: account.id, role: account.role }
+}
+
+/** Stores the hash of today's parameters; when too many people wait for theirs, the next sign-in does. */
+async function renewHash(userId: string, password: string): Promise<void> {
+  try {
+    await storeRehashed(userId, await passwordHash(password))
+  } catch (error) {
+    if (!(error instanceof PasswordsBusy)) throw error
+  }
 }
 
 const about = (account: Credentials | null) => (account ? { resource: { type: 'user', id: account.id } } : {})

@@ -8,9 +8,15 @@ import { Tinypool } from 'tinypool'
 const strength = { memoryKib: 19_456, passes: 2 }
 const PARAMETERS = `$argon2id$v=19$m=${strength.memoryKib},t=${strength.passes},p=1$`
 
-/** Too many sign-ins at once: the answer is 503, try again, and nobody was refused. */
+/**
+ * Too many sign-ins at once: try again, and nobody was refused. React Router takes its three last fields for those of a
+ * thrown `data()`, so that wherever it is thrown it becomes the page of a 503.
+ */
 export class PasswordsBusy extends Error {
-  override name = 'PasswordsBusy'
+  override readonly name = 'PasswordsBusy'
+  readonly type = 'DataWithResponseInit'
+  readonly data = 'Many people are signing in at this moment. Try again in a few seconds.'
+  readonly init = { status: 503 }
 }
 
 /** The worker is a file of its own wherever this module was bundled to, so it is looked for upwards from here. */

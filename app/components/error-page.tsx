@@ -40,6 +40,15 @@ function ownWords(error: unknown): string | undefined {
 const isUnreached = (error: unknown): boolean =>
   error instanceof TypeError && /failed to fetch|networkerror|load failed/i.test(error.message)
 
+function wordsFor(error: unknown): Words {
+  const status = isRouteErrorResponse(error) ? error.status : 500
+  const words = wordsByStatus[status]
+  if (!words) return isUnreached(error) ? UNREACHED : UNREADABLE
+  const says = ownWords(error) ?? words.says
+  // A 503 with words of its own is not about the database.
+  return { title: status === 503 && says !== words.says ? 'Not at this moment' : words.title, says }
+}
+
 export interface ErrorPageProps {
   readonly error: unknown
   readonly reference: string | null
@@ -47,12 +56,11 @@ export interface ErrorPageProps {
 
 /** The last page there is: says what happened and what was kept, with a reference instead of a stack. */
 export function ErrorPage({ error, reference }: ErrorPageProps) {
-  const status = isRouteErrorResponse(error) ? error.status : 500
-  const { title, says } = wordsByStatus[status] ?? (isUnreached(error) ? UNREACHED : UNREADABLE)
+  const { title, says } = wordsFor(error)
   return (
     <PlainPage>
       <h1 className="text-2xl">{title}</h1>
-      <p className="mt-3 text-lg">{wordsByStatus[status] ? (ownWords(error) ?? says) : says}</p>
+      <p className="mt-3 text-lg">{says}</p>
       {reference !== null && (
         <p className="mt-3 text-ink2">
           Reference for the people who run the program: <b className="select-all font-semibold text-ink">{reference}</b>
