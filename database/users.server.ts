@@ -32,6 +32,18 @@ export async function people(): Promise<readonly Person[]> {
   return gathered(await select<PersonRow>(selectPeople('')))
 }
 
+/** Somebody of a ward who may sign in. */
+export type Member = { id: string; name: string; role: Role }
+
+/** Who belongs to a ward and may sign in, by name. */
+export function membersOf(wardId: string): Promise<Member[]> {
+  return select<Member>(
+    `SELECT u.id, u.name, u.role FROM ward_members m JOIN users u ON u.id = m.user_id
+     WHERE m.ward_id = :wardId AND u.disabled_at IS NULL ORDER BY u.name, u.id`,
+    { wardId },
+  )
+}
+
 /** One person, or null. */
 export async function person(id: string): Promise<Person | null> {
   return gathered(await select<PersonRow>(selectPeople('WHERE u.id = :id'), { id }))[0] ?? null
@@ -50,12 +62,15 @@ function gathered(rows: readonly PersonRow[]): readonly Person[] {
 /** What is compared at sign-in. `mayEnter` is false for a disabled account and for a one-time password past its time. */
 export type Credentials = { id: string; role: Role; passwordHash: string; mayEnter: number }
 
-/** The credentials behind an e-mail address, in whatever case it was typed; null when there is no such account. */
+/**
+ * The credentials behind an e-mail address in small letters; null when there is no such account. Compared to the character:
+ * to the index, a soft hyphen or a full-width letter is the same address, and tries would be counted for each spelling.
+ */
 export async function credentialsOf(email: string): Promise<Credentials | null> {
   const rows = await select<Credentials>(
     `SELECT id, role, password_hash AS passwordHash,
        disabled_at IS NULL AND (one_time_until IS NULL OR one_time_until > UTC_TIMESTAMP(3)) AS mayEnter
-     FROM users WHERE email = :email`,
+     FROM users WHERE email = :email AND LOWER(email) COLLATE utf8mb4_bin = :email`,
     { email },
   )
   return rows[0] ?? null

@@ -3,7 +3,7 @@ import { type FieldMeta, fieldsOf } from '#app/care/field.ts'
 import type { AnyCareKind, CareContext } from '#app/care/kind.ts'
 import { careSettings } from '#app/care/kinds.ts'
 import { showValue } from '#app/rules/why.ts'
-import { people } from '#database/users.server.ts'
+import { membersOf } from '#database/users.server.ts'
 
 /** Names of the fields of a kind that are drawn with this control. */
 export function fieldsWith(kind: AnyCareKind, control: FieldMeta['control']): readonly string[] {
@@ -30,9 +30,9 @@ export async function witnessesFor(
   wardId: string,
   user: Pick<CurrentUser, 'id'>,
 ): Promise<Readonly<Record<string, string>>> {
-  const present = (await people()).filter(
-    ({ id, role, wards, disabledAt }) =>
-      id !== user.id && disabledAt === null && can({ role, wardIds: wards.map(ward => ward.id) }, 'chart care', wardId),
+  const members = await membersOf(wardId)
+  const present = members.filter(
+    ({ id, role }) => id !== user.id && can({ role, wardIds: [wardId] }, 'chart care', wardId),
   )
   return Object.fromEntries(present.map(({ id, name, role }) => [id, `${name}, ${role}`]))
 }
