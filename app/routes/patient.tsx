@@ -1,4 +1,4 @@
-import { Outlet } from 'react-router'
+import { Outlet, useLocation } from 'react-router'
 import { patientContext, patientOnly } from '#app/auth/patient-access.server.ts'
 import { LinkButton } from '#app/components/button.tsx'
 import { PatientBanner } from '#app/components/patient-banner.tsx'
@@ -16,10 +16,13 @@ export async function loader({ context }: Route.LoaderArgs) {
 
 /** Every page of a patient stands under who they are. */
 export default function Patient({ loaderData: { banner, patientId, discharged, via } }: Route.ComponentProps) {
+  // The patient's own page has no other heading than whose it is.
+  const isTitle = useLocation().pathname.replace(/\/$/, '').endsWith(patientId)
   return (
     <>
       <PatientBanner
         patient={banner}
+        isTitle={isTitle}
         actions={
           <LinkButton variant="danger" href={`/patients/${patientId}/emergency`}>
             Airway emergency steps
