@@ -8,6 +8,7 @@ import { generalSettings } from './general-settings.ts'
 import { humidification } from './humidification/kind.ts'
 import { innerCannula } from './inner-cannula/kind.ts'
 import type { AnyCareKind, TaskRule } from './kind.ts'
+import { observations } from './observations/kind.ts'
 import { oralCare } from './oral-care/kind.ts'
 import type { AnySetting } from './policy.ts'
 import { stomaAndSkin } from './stoma-and-skin/kind.ts'
@@ -27,6 +28,7 @@ export const careKinds = [
   aboveCuffSuction,
   humidification,
   oralCare,
+  observations,
   bedsideKit,
   tubeChange,
   decannulation,

@@ -1,4 +1,11 @@
-import { copiousSecretions, cuffLetDown, digitsSwapped, streaksOfBlood, writtenLate } from './happenings.ts'
+import {
+  copiousSecretions,
+  cuffLetDown,
+  digitsSwapped,
+  hardBreathing,
+  streaksOfBlood,
+  writtenLate,
+} from './happenings.ts'
 import { patient } from './patient.ts'
 import type { BedStory } from './story.ts'
 
@@ -107,7 +114,15 @@ export const birchStories: readonly BedStory[] = [
     admittedHoursAgo: 71,
     tube: { name: 'halden 6 cuffed', inserted: { daysAgo: 20, stomaDaysAgo: 45 }, technique: 'surgical' },
     secretions: 'thick',
-    stands: { inner: -1.3, innerRenewal: 1.2, cuff: -4.4, suction: -1.1, dressing: 1, stoma: 'missed' },
-    extra: [copiousSecretions(1.6)],
+    stands: {
+      inner: -1.3,
+      innerRenewal: 1.2,
+      cuff: -4.4,
+      suction: -1.1,
+      dressing: 1,
+      stoma: 'missed',
+      observations: -0.6,
+    },
+    extra: [copiousSecretions(1.6), hardBreathing(1.5)],
   },
 ]

@@ -76,7 +76,7 @@ export const cedarStories: readonly BedStory[] = [
     admittedHoursAgo: 100,
     tube: { name: 'linnet', inserted: { daysAgo: 13, stomaDaysAgo: 36 }, technique: 'percutaneous' },
     secretions: 'thin',
-    stands: { cuff: -0.4, suction: -2.9, dressing: 3.1, stoma: 'done' },
+    stands: { cuff: -0.4, suction: -2.9, dressing: 3.1, stoma: 'done', observations: 1.8 },
   },
   {
     bed: 'C9',

@@ -7,6 +7,7 @@ import { cuffCare } from './chart-cuff.ts'
 import { humidificationCare } from './chart-humidification.ts'
 import { innerCannulaCare } from './chart-inner-cannula.ts'
 import { kitCare } from './chart-kit.ts'
+import { observationCare } from './chart-observations.ts'
 import { oralCare } from './chart-oral-care.ts'
 import { stomaCare } from './chart-stoma.ts'
 import { suctionCare } from './chart-suction.ts'
@@ -73,6 +74,7 @@ function draftsOf(bedside: Bedside): readonly Draft[] {
     ...aboveCuffCare(bedside),
     ...waterCuffCare(bedside),
     ...oralCare(bedside),
+    ...observationCare(bedside),
   ]
 }
 

@@ -3,11 +3,13 @@ import { carePlans } from '#app/care/care-plan/schema.ts'
 import { cuffChecks } from '#app/care/cuff-pressure/schema.ts'
 import { type DeferralData, deferrals } from '#app/care/deferral/schema.ts'
 import { innerCannulaActs } from '#app/care/inner-cannula/schema.ts'
+import { observationSets } from '#app/care/observations/schema.ts'
 import { suctions } from '#app/care/suction/schema.ts'
 import { addDays, localDay } from '#app/time/zone.ts'
 import { type Bedside, hoursBefore, placeAt, tubeAt } from './bedside.ts'
 import { foundBy } from './chart-cuff.ts'
 import { wholeKit } from './chart-kit.ts'
+import { calmSet } from './chart-observations.ts'
 import { checkAt } from './chart-stoma.ts'
 import { episode } from './chart-suction.ts'
 import { draft } from './draft.ts'
@@ -81,6 +83,15 @@ export function streaksOfBlood(hoursAgo: number): Happening {
     const { at, tube } = momentOf(bedside, hoursAgo)
     const note = 'Doctor told, will come this shift.'
     return [draft(suctions, at, episode(bedside, tube, { blood: 'streaks', note }))]
+  }
+}
+
+/** Breathing faster and harder than usual: a doctor is asked. */
+export function hardBreathing(hoursAgo: number): Happening {
+  return bedside => {
+    const { at } = momentOf(bedside, hoursAgo)
+    const seen = { respiratoryRate: 26, effort: 'increased', heartRate: 108, note: 'Suctioned. Doctor asked.' } as const
+    return [draft(observationSets, at, { ...calmSet(bedside), ...seen })]
   }
 }
 

@@ -61,6 +61,7 @@ export interface Standing {
   readonly humidification?: ShiftStanding
   readonly kit?: ShiftStanding
   readonly oralCare?: number
+  readonly observations?: number
 }
 
 export type Happening = (bedside: Bedside) => readonly Draft[]

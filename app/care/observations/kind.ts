@@ -1,0 +1,23 @@
+import { careKind } from '../kind.ts'
+import { observationExamples } from './examples.ts'
+import { observationSets } from './schema.ts'
+import { observationSentence } from './sentence.ts'
+import { observationSettings } from './settings.ts'
+import { observationTasks } from './tasks.ts'
+import { observationWarnings, standingObservationWarnings } from './warnings.ts'
+
+/** Breathing, oxygen, heart and consciousness. There is no usual answer: everything in it is measured. */
+export const observations = careKind({
+  ...observationSets,
+  title: 'Observations',
+  chartWords: 'Chart observations',
+  lane: 'Tube',
+  cautions: ['This adds up no score: use the early-warning chart of your hospital.'],
+  examples: observationExamples,
+  summary: observationSentence,
+  settings: observationSettings,
+  tasks: observationTasks,
+  warnings: observationWarnings,
+  standing: standingObservationWarnings,
+  outOfRange: (data, context) => observationWarnings(data, context).length > 0,
+})
