@@ -21,19 +21,21 @@ test('the form starts with line and size of a dual tube, and with nothing else',
 test.each<[TubeData['innerCannula'], string]>([
   ['disposable', 'replaced'],
   ['reusable', 'swapped'],
-])('the usual act for a %s one is %s, with every finding left open', (type, act) => {
+])('the usual act for a %s one is %s, without its condition', (type, act) => {
   expect(innerCannula.usual?.(withTube({ innerCannula: type }))?.answers).toEqual({
     act,
     line: 'Alder',
     size: '8.0',
     locked: 'yes',
+    spare: 'yes',
+    tolerance: 'well',
   })
 })
 
-test('the usual act needs condition, spare and tolerance to be complete', () => {
+test('the usual act needs only the condition to be complete', () => {
   const answers = innerCannula.usual?.(withTube())?.answers
-  expect(problemsOf({ ...answers })).toHaveLength(3)
-  expect(problemsOf({ ...answers, condition: 'light', spare: 'yes', tolerance: 'well' })).toBeUndefined()
+  expect(problemsOf({ ...answers })).toEqual(['Choose the condition found'])
+  expect(problemsOf({ ...answers, condition: 'light' })).toBeUndefined()
 })
 
 test('there is no usual act without a tube, or while none was ever fitted', () => {

@@ -13,14 +13,17 @@ const usualAct = {
   reusable: { words: 'Swapped for the clean spare', act: 'swapped' },
 } as const
 
-/** The usual act for this tube, locked as it goes in. Condition, spare and tolerance are left out: they are looked at each time. */
+/**
+ * The usual act for this tube. The tap that chooses it says every answer it gives, so nothing is preset unseen; the condition
+ * is left out, because it has no usual. An act as usual stays within four taps from the board.
+ */
 export function usualInnerCannula(context: CareContext) {
   const tube = tubeInPlace(context.record)
   const type = tube?.data.construction === 'dual' ? cannulaType(tube, context.record) : undefined
   if (!type) return undefined
   const { words, act } = usualAct[type]
   return {
-    words: `${words}, locked`,
-    answers: { ...innerCannulaStart(context), act, locked: 'yes' },
+    words: `${words}, locked, spare at the bedside, tolerated well`,
+    answers: { ...innerCannulaStart(context), act, locked: 'yes', spare: 'yes', tolerance: 'well' },
   }
 }
