@@ -91,16 +91,18 @@ export async function logAccess(entry: AccessEntry, transaction?: Transaction): 
   await change('UPDATE access_log_heads SET seq = :seq, hash = :hash WHERE chain = :chain', row, transaction)
 }
 
+const SAME_LOOK_MINUTES = 5
+
 /**
- * Logs a look, once: the same page in the same session within five minutes is the same look, so that a page which keeps
- * itself up to date does not fill the log.
+ * Logs a look, once: the same page in the same session within so many minutes is the same look, so that a page which is
+ * asked for again and again does not fill the log.
  */
-export async function logLook(entry: AccessEntry): Promise<void> {
+export async function logLook(entry: AccessEntry, onceInMinutes = SAME_LOOK_MINUTES): Promise<void> {
   const row = { ...rowOf(entry), chain: chainOf(entry) }
   const [again] = await select(
-    `SELECT 1 AS found FROM access_log WHERE actor_id = :actorId AND at > UTC_TIMESTAMP(3) - INTERVAL 5 MINUTE
+    `SELECT 1 AS found FROM access_log WHERE actor_id = :actorId AND at > UTC_TIMESTAMP(3) - INTERVAL :onceInMinutes MINUTE
        AND chain = :chain AND session_hash = :sessionHash AND path = :path AND action = :action LIMIT 1`,
-    row,
+    { ...row, onceInMinutes },
   )
   if (again === undefined) await logAccess(entry)
 }

@@ -3,6 +3,9 @@ import { change, select, transact } from './sequelize.server.ts'
 /** A form as it was sent: each name with its values, in order. */
 export type DraftFields = Readonly<Record<string, readonly string[]>>
 
+/** Newest drafts of one person that are kept: more are not typed in a day, and a stolen session cannot fill the disk. */
+const MOST_DRAFTS = 20
+
 /** Keeps what somebody had typed on a page, in place of what was kept there before. */
 export async function saveDraft(userId: string, path: string, fields: DraftFields, hours: number): Promise<void> {
   await transact(async transaction => {
@@ -10,6 +13,12 @@ export async function saveDraft(userId: string, path: string, fields: DraftField
       `INSERT INTO drafts (user_id, path, fields, saved_at) VALUES (:userId, :path, :fields, UTC_TIMESTAMP(3))
        ON DUPLICATE KEY UPDATE fields = VALUE(fields), saved_at = VALUE(saved_at)`,
       { userId, path, fields: JSON.stringify(fields) },
+      transaction,
+    )
+    await change(
+      `DELETE FROM drafts WHERE user_id = :userId AND path NOT IN (SELECT path FROM (
+         SELECT path FROM drafts WHERE user_id = :userId ORDER BY saved_at DESC, path LIMIT :most) newest)`,
+      { userId, most: MOST_DRAFTS },
       transaction,
     )
     await change(

@@ -1,3 +1,4 @@
+import { sentForm } from '#app/sent-form.server.ts'
 import { type DraftFields, saveDraft, takeSavedDraft } from '#database/drafts.server.ts'
 import { DRAFT_HOURS, DRAFT_LIMIT_CHARACTERS } from './limits.ts'
 
@@ -12,11 +13,13 @@ export async function keepDraft(userId: string, path: string, request: Request):
   const length = Number(request.headers.get('Content-Length') ?? 0)
   // Urlencoding triples a character at worst; what is longer than that is not parsed at all.
   if (!formTypes.some(known => type.startsWith(known)) || length > 3 * DRAFT_LIMIT_CHARACTERS) return false
-  return keepFields(userId, path, await request.formData())
+  return keepFields(userId, path, await sentForm(request))
 }
 
-/** The same for a form that has been read. */
+/** The same for a form that has been read. One that somebody else opened is theirs, and is not kept for this person. */
 export async function keepFields(userId: string, path: string, form: FormData): Promise<boolean> {
+  const openedBy = form.get('openedBy')
+  if (openedBy !== null && openedBy !== userId) return false
   const fields = draftFields(form)
   const size = JSON.stringify(fields).length
   if (Object.keys(fields).length === 0 || size > DRAFT_LIMIT_CHARACTERS || path.length > 200) return false
@@ -30,10 +33,12 @@ export function takeDraft(userId: string, path: string): Promise<DraftFields | n
 }
 
 function draftFields(form: FormData): DraftFields {
-  const fields: Record<string, string[]> = {}
+  const fields = new Map<string, string[]>() // a name may be `constructor`
   for (const [name, value] of form) {
     if (typeof value !== 'string' || value === '' || /password/i.test(name)) continue
-    fields[name] = [...(fields[name] ?? []), value]
+    const values = fields.get(name)
+    if (values) values.push(value)
+    else fields.set(name, [value])
   }
-  return fields
+  return Object.fromEntries(fields)
 }

@@ -1,6 +1,7 @@
 import { createContext, data, type MiddlewareFunction, redirect } from 'react-router'
 import { type PatientPlace, placeOf } from '#database/access-grants.server.ts'
 import { logAccess, logLook, type Trace } from '#database/access-log.server.ts'
+import { keepDraft } from './draft.server.ts'
 import { type Act, type CurrentUser, can, canByGrant } from './permissions.ts'
 import { isWrite } from './request-kind.ts'
 import { signedIn } from './signed-in.server.ts'
@@ -14,8 +15,8 @@ export type OpenedPatient = {
   readonly via: 'ward' | 'grant'
 }
 
-/** What is to be done, and from where: `path` is where to go on after a reason was given. */
-export type PatientAsk = { readonly path: string; readonly act: Act; readonly by?: Trace }
+/** What is to be done, and from where: `path` is where to go on after a reason was given; null where none can be asked for. */
+export type PatientAsk = { readonly path: string | null; readonly act: Act; readonly by?: Trace }
 
 /** The patient of this request, set by `patientOnly`. */
 export const patientContext = createContext<OpenedPatient>()
@@ -37,7 +38,7 @@ export async function patientGate(user: CurrentUser, patientId: string, ask: Pat
   if (can(user, ask.act, wardId)) return { patientId, wardId, stayId, via: 'ward' }
   if (place.grantedUntil !== null && canByGrant(user, ask.act)) return { patientId, wardId, stayId, via: 'grant' }
   if (!can(user, 'see patients', wardId) && place.grantedUntil === null) {
-    if (can(user, 'open patients elsewhere')) throw redirect(reasonPath(patientId, ask.path))
+    if (ask.path !== null && can(user, 'open patients elsewhere')) throw redirect(reasonPath(patientId, ask.path))
     await logRefusal(user, place, ask)
     throw data('There is no such patient.', 404)
   }
@@ -54,26 +55,36 @@ export function reasonPath(patientId: string, path: string): string {
 export const patientOnly: MiddlewareFunction<Response> = async ({ params, request, url, context }, next) => {
   const user = signedIn(context)
   const by = traceOf({ request, url, context })
-  const opened = await patientGate(user, params.patientId ?? '', {
-    path: url.pathname + url.search,
-    act: 'see patients',
-    by,
-  })
+  const ask = { path: url.pathname + url.search, act: 'see patients', by } as const
+  const opened = await patientGate(user, params.patientId ?? '', ask).catch(keepingForm({ user, request, url }))
   context.set(patientContext, opened)
   if (!isWrite(request)) await logPatientLook(opened, by)
   return next()
 }
 
-/** Logs that a patient's page was looked at, once in five minutes for each page and session. */
-export function logPatientLook({ patientId, stayId, wardId, via }: OpenedPatient, by: Trace): Promise<void> {
+/**
+ * What the gate throws, thrown again. A form that comes after its reason has run out waits as a draft behind the page that
+ * asks for another one.
+ */
+export function keepingForm(sent: { readonly user: CurrentUser; readonly request: Request; readonly url: URL }) {
+  return async (refusal: unknown): Promise<never> => {
+    const { user, request, url } = sent
+    if (refusal instanceof Response && isWrite(request)) await keepDraft(user.id, url.pathname, request)
+    throw refusal
+  }
+}
+
+/** Logs that a patient's page was looked at, once in so many minutes for each page and session. */
+export function logPatientLook(opened: OpenedPatient, by: Trace, onceInMinutes?: number): Promise<void> {
+  const { patientId, stayId, wardId, via } = opened
   const purpose = via === 'grant' ? 'BTG' : 'TREAT'
-  return logLook({ action: 'opened patient', purpose, by, patientId, stayId, wardId })
+  return logLook({ action: 'opened patient', purpose, by, patientId, stayId, wardId }, onceInMinutes)
 }
 
 async function logRefusal(user: CurrentUser, place: PatientPlace, { path, act, by }: PatientAsk): Promise<void> {
   const nowhere: Trace = {
     actor: user,
-    path: path.split('?')[0] ?? null,
+    path: path?.split('?')[0] ?? null,
     address: null,
     userAgent: null,
     requestId: null,

@@ -1,6 +1,6 @@
 import { data, type RouterContextProvider } from 'react-router'
 import { validate as isUuid } from 'uuid'
-import { logPatientLook, type OpenedPatient, patientGate } from '#app/auth/patient-access.server.ts'
+import { keepingForm, logPatientLook, type OpenedPatient, patientGate } from '#app/auth/patient-access.server.ts'
 import { type Act, type CurrentUser, can, canByGrant } from '#app/auth/permissions.ts'
 import { isWrite } from '#app/auth/request-kind.ts'
 import { signedIn } from '#app/auth/signed-in.server.ts'
@@ -45,8 +45,12 @@ export async function openedEntry(asked: EntryRequest, act: EntryAct): Promise<O
   const path = url.pathname + url.search
   // Of an entry that somebody corrected meanwhile, its own author is told so: nothing can be done to it any more.
   const [first = 'see patients', ...others] = actsFor(act, history.entry, user)
-  const opened = await patientGate(user, history.patientId, { path, act: first, by })
+  const opened = await patientGate(user, history.patientId, { path, act: first, by }).catch(
+    keepingForm({ user, request, url }),
+  )
   for (const other of others) await patientGate(user, history.patientId, { path, act: other, by })
+  // What takes an entry out of the record is not itself put right: that would bring the entry back under another name.
+  if (act !== 'see' && history.entry.status === 'retracted') throw data('A retraction stays. Chart the care anew.', 403)
   if (!isWrite(request)) await logPatientLook(opened, by)
   const now = new Date()
   return { ...history, latest, user, opened, now, care: await patientCare(history.entry.stayId, now) }
