@@ -7,13 +7,19 @@ import { isActivity, isFromElsewhere, isWrite } from './request-kind.ts'
 import { signInPath } from './return-to.ts'
 import { type Session, sessionOf } from './session.server.ts'
 
-/** Who is signed in, set by `loadUser`; null on pages that are open to everybody, and past a session's end. */
+/**
+ * Who is signed in, set by `loadUser`; null on pages that are open to everybody, past a session's end, and with a one-time
+ * password everywhere but where it is replaced.
+ */
 export const userContext = createContext<CurrentUser | null>(null)
 
 /** The session behind a request, with its wards and their counters; it may be over. */
 export const sessionContext = createContext<Session | null>(null)
 
 const OWN_PASSWORD_PAGE = '/account'
+
+/** What a one-time password opens: the page that replaces it, and what that page asks for on its own. */
+const openToOneTime = [OWN_PASSWORD_PAGE, '/still-here', '/draft', '/sign-out']
 
 /** Refuses a write that a page of another site may have sent, on every route. For the root, before anything else. */
 export const sameOriginOnly: MiddlewareFunction<Response> = ({ request, url }, next) => {
@@ -26,7 +32,7 @@ export const loadUser: MiddlewareFunction<Response> = async ({ request, url, con
   const session = await sessionOf(request)
   context.set(sessionContext, session)
   if (session === null || session.isOver) return next()
-  context.set(userContext, session.user)
+  if (!session.owesPassword || openToOneTime.includes(url.pathname)) context.set(userContext, session.user)
   context.get(requestContext).logged.userId = session.user.id
   if (!session.isFresh && isActivity(request, url.pathname)) await touchSession(session.user.sessionHash)
   return next()
@@ -39,10 +45,10 @@ export const loadUser: MiddlewareFunction<Response> = async ({ request, url, con
 export const signedInOnly: MiddlewareFunction<Response> = async ({ request, url, context }, next) => {
   const session = context.get(sessionContext)
   if (context.get(userContext) === null) {
+    if (session !== null && !session.isOver) throw redirect(OWN_PASSWORD_PAGE)
     const isKept = session !== null && isWrite(request) && (await keepDraft(session.user.id, url.pathname, request))
     throw redirect(`${signInPath(url.pathname + url.search)}${isKept ? '&kept=yes' : ''}`)
   }
-  if (session?.owesPassword && url.pathname !== OWN_PASSWORD_PAGE) throw redirect(OWN_PASSWORD_PAGE)
   return next()
 }
 
