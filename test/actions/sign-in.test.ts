@@ -106,6 +106,13 @@ test('an unknown account waits like a known one', async () => {
   expect(await trySignIn({ email: 'nobody@ward.example', password })).toMatchObject({ status: 429 })
 })
 
+test('another spelling that the index takes for the same address is another address', async () => {
+  await aPerson()
+  for (const spelling of ['ngozi.adeye\u00admi@ward.example', 'ngozi.adeyemi@\uff57ard.example']) {
+    expect(await trySignIn({ email: spelling, password })).toMatchObject({ status: 400 })
+  }
+})
+
 test('of twelve guesses at once only five are looked at', async () => {
   await aPerson()
   const guesses = await Promise.all(
