@@ -88,7 +88,7 @@ export function BoardRow({ patient, changed = false, children }: BoardRowProps) 
       <div className="min-w-0">
         <Link
           to={href}
-          className="inline-block min-h-6 max-w-full text-lg leading-tight font-semibold [overflow-wrap:anywhere] hover:underline"
+          className="inline-flex min-h-11 max-w-full items-center text-lg leading-tight font-semibold [overflow-wrap:anywhere] hover:underline"
         >
           {`${family.toUpperCase()}, ${given}`}
         </Link>

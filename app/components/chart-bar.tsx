@@ -40,10 +40,12 @@ function BarNotice({ warnings }: { readonly warnings: readonly WarningView[] }) 
   if (!first) return null
   const more = others.length > 0 ? ` And ${others.length} more.` : ''
   return (
-    <p className={`mb-2 font-semibold ${first.level === 'red' ? 'text-late' : 'text-due'}`}>
-      <a href="#notices" className="line-clamp-2 underline decoration-1 underline-offset-3">
-        {first.action}
-        {more}
+    <p className={`font-semibold ${first.level === 'red' ? 'text-late' : 'text-due'}`}>
+      <a href="#notices" className="flex min-h-11 items-center underline decoration-1 underline-offset-3">
+        <span className="line-clamp-2">
+          {first.action}
+          {more}
+        </span>
       </a>
     </p>
   )

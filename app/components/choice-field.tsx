@@ -61,7 +61,7 @@ export function Chip({ id, type, name, value, words, defaultChecked, invalid }: 
   return (
     <label
       htmlFor={id}
-      className="group/chip relative inline-flex min-h-12 items-center gap-2 rounded-control border border-edge bg-surface px-4 py-1.5 leading-tight font-semibold hover:bg-sunk has-checked:border-brand has-checked:bg-brand has-checked:text-brand-ink has-focus-visible:outline-3 has-focus-visible:outline-offset-2 has-focus-visible:outline-focus has-aria-invalid:not-has-checked:border-late has-disabled:opacity-60"
+      className="group/chip relative inline-flex min-h-12 min-w-12 items-center justify-center gap-2 rounded-control border border-edge bg-surface px-4 py-1.5 leading-tight font-semibold hover:bg-sunk has-checked:border-brand has-checked:bg-brand has-checked:text-brand-ink has-focus-visible:outline-3 has-focus-visible:outline-offset-2 has-focus-visible:outline-focus has-aria-invalid:not-has-checked:border-late has-disabled:opacity-60"
     >
       <input
         id={id}

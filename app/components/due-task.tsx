@@ -36,7 +36,7 @@ export function DueTask({ task, why }: DueTaskProps) {
         <p className="text-sm text-ink2">{detail}</p>
         {why && (
           <details className="text-sm">
-            <summary className="inline-flex min-h-6 items-center font-semibold text-ink2 underline underline-offset-3">
+            <summary className="-mb-2.5 inline-flex min-h-11 min-w-11 items-center font-semibold text-ink2 underline underline-offset-3">
               Why? <span className="sr-only">{title}</span>
             </summary>
             <div className="mt-1 max-w-prose text-ink2">{why}</div>

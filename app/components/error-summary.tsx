@@ -29,7 +29,7 @@ export function ErrorSummary({ errors, title = 'Not charted yet. Please check:' 
               {fieldId ? (
                 <a
                   href={`#${fieldId}`}
-                  className="inline-flex min-h-8 items-center text-late underline underline-offset-3"
+                  className="inline-flex min-h-11 items-center text-late underline underline-offset-3"
                 >
                   {says}
                 </a>

@@ -26,7 +26,12 @@ export function FinalBar({ sentence, missing, notice, words, cancelHref, busy = 
     >
       {notice}
       <div className="flex flex-wrap items-center justify-end gap-x-6 gap-y-2">
-        <p id="will-be-charted" className="min-w-0 flex-1 basis-64 max-md:max-h-20 max-md:overflow-y-auto">
+        <p
+          id="will-be-charted"
+          // biome-ignore lint/a11y/noNoninteractiveTabindex: on a phone a long sentence scrolls, by keyboard too.
+          tabIndex={0}
+          className="min-w-0 flex-1 basis-64 max-md:max-h-20 max-md:overflow-y-auto"
+        >
           {sentence !== null && (
             <>
               <span className="text-ink2">Will be charted as: </span>

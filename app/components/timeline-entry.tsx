@@ -50,7 +50,7 @@ export function TimelineEntry({ entry, children }: TimelineEntryProps) {
             {' '}
             <Link
               to={href}
-              className="inline-block min-h-6 px-1 font-semibold underline underline-offset-3 print:hidden"
+              className="-my-2.5 inline-flex min-h-11 min-w-11 items-center justify-center font-semibold underline underline-offset-3 print:hidden"
             >
               Open <span className="sr-only">{`${title} at ${time}`}</span>
             </Link>

@@ -67,7 +67,7 @@ function cellsOf(ward: Route.ComponentProps['loaderData']['wards'][number]) {
     <Link
       key="name"
       to={`/admin/wards/${ward.id}`}
-      className="inline-flex min-h-11 items-center underline underline-offset-3"
+      className="inline-flex min-h-11 min-w-11 items-center underline underline-offset-3"
     >
       {ward.name}
     </Link>

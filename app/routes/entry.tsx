@@ -79,7 +79,7 @@ function History({ lines }: { readonly lines: EntryView['history'] }) {
             {line.isShown ? (
               <p className="text-sm font-semibold">Shown on this page</p>
             ) : (
-              <Link to={`/entries/${line.id}`} className="inline-flex min-h-8 items-center font-semibold underline">
+              <Link to={`/entries/${line.id}`} className="inline-flex min-h-11 items-center font-semibold underline">
                 Open this version
               </Link>
             )}
