@@ -6,6 +6,9 @@ import { patientHead } from '#app/views/patient-care.server.ts'
 import { patientCare } from '#app/views/patient-context.server.ts'
 import type { Route } from './+types/patient.ts'
 
+// Of the patient's own page. By bed, not by name: titles stay in the browser's history.
+export const meta: Route.MetaFunction = ({ loaderData }) => [{ title: `Bed ${loaderData?.banner.bed} | Cannulary` }]
+
 export const middleware: Route.MiddlewareFunction[] = [patientOnly]
 
 export async function loader({ context }: Route.LoaderArgs) {
