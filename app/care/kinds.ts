@@ -1,9 +1,11 @@
 import { aboveCuffSuction } from './above-cuff-suction/kind.ts'
+import { adverseEvent } from './adverse-event/kind.ts'
 import { bedsideKit } from './bedside-kit/kind.ts'
 import { carePlan } from './care-plan/kind.ts'
 import { cuffPressure } from './cuff-pressure/kind.ts'
 import { decannulation } from './decannulation/kind.ts'
 import { deferral } from './deferral/kind.ts'
+import { freeNote } from './free-note/kind.ts'
 import { generalSettings } from './general-settings.ts'
 import { humidification } from './humidification/kind.ts'
 import { innerCannula } from './inner-cannula/kind.ts'
@@ -32,6 +34,8 @@ export const careKinds = [
   bedsideKit,
   tubeChange,
   decannulation,
+  adverseEvent,
+  freeNote,
   deferral,
   carePlan,
 ] as const satisfies readonly AnyCareKind[]

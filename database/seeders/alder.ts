@@ -1,4 +1,14 @@
-import { cuffLeftHigh, digitsSwapped, heavyCoating, ownValue, putOff, writtenLate, wrongPatient } from './happenings.ts'
+import {
+  blockCleared,
+  cuffLeftHigh,
+  digitsSwapped,
+  heavyCoating,
+  noted,
+  ownValue,
+  putOff,
+  writtenLate,
+  wrongPatient,
+} from './happenings.ts'
 import { patient } from './patient.ts'
 import type { BedStory } from './story.ts'
 
@@ -31,7 +41,7 @@ export const alderStories: readonly BedStory[] = [
     tube: { name: 'corvane 7', inserted: { daysAgo: 26, stomaDaysAgo: 41 }, technique: 'surgical' },
     secretions: 'thin',
     stands: { inner: -3, cuff: -2.2, suction: -2.8, dressing: -3.1, stoma: 'done' },
-    extra: [digitsSwapped(15.3)],
+    extra: [digitsSwapped(15.3), noted(27.2, 'Writes on a slate. Prefers to be asked yes or no.')],
   },
   {
     bed: 'A4',
@@ -145,6 +155,6 @@ export const alderStories: readonly BedStory[] = [
         sizeMm: 8,
       },
     },
-    extra: [heavyCoating(1.2)],
+    extra: [heavyCoating(1.2), blockCleared(52.4)],
   },
 ]

@@ -1,4 +1,4 @@
-import { closingOpening, kitIncomplete, withoutSpare } from './happenings.ts'
+import { closingOpening, kitIncomplete, noted, withoutSpare } from './happenings.ts'
 import { patient } from './patient.ts'
 import type { BedStory } from './story.ts'
 
@@ -59,7 +59,11 @@ export const cedarStories: readonly BedStory[] = [
     tube: { name: 'corvane 8', inserted: { daysAgo: 12, stomaDaysAgo: 21 }, technique: 'percutaneous' },
     secretions: 'moderate',
     stands: { inner: -2, cuff: 1.2, suction: -3, dressing: -15.5, stoma: 'done', kit: 'due' },
-    extra: [withoutSpare(3.1), kitIncomplete(0.4, { missing: ['inner cannula'], owner: 'Ward porter, from stores' })],
+    extra: [
+      noted(19.5, 'Sister visited and was shown suction. Next lesson on Friday.'),
+      withoutSpare(3.1),
+      kitIncomplete(0.4, { missing: ['inner cannula'], owner: 'Ward porter, from stores' }),
+    ],
   },
   {
     bed: 'C7',

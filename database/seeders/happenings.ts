@@ -1,7 +1,9 @@
+import { adverseEvents } from '#app/care/adverse-event/schema.ts'
 import { type KitData, kitChecks } from '#app/care/bedside-kit/schema.ts'
 import { carePlans } from '#app/care/care-plan/schema.ts'
 import { cuffChecks } from '#app/care/cuff-pressure/schema.ts'
 import { type DeferralData, deferrals } from '#app/care/deferral/schema.ts'
+import { freeNotes } from '#app/care/free-note/schema.ts'
 import { innerCannulaActs } from '#app/care/inner-cannula/schema.ts'
 import { observationSets } from '#app/care/observations/schema.ts'
 import { suctions } from '#app/care/suction/schema.ts'
@@ -84,6 +86,23 @@ export function streaksOfBlood(hoursAgo: number): Happening {
     const note = 'Doctor told, will come this shift.'
     return [draft(suctions, at, episode(bedside, tube, { blood: 'streaks', note }))]
   }
+}
+
+/** The tube blocked and was cleared: an event that was put right. */
+export function blockCleared(hoursAgo: number): Happening {
+  return bedside => {
+    const { at } = momentOf(bedside, hoursAgo)
+    const told = ['charge nurse', 'doctor', 'specialist'] as const
+    const done = ['help called', 'inner cannula out', 'suction', 'oxygen'] as const
+    const note = 'Thick plug in the inner cannula. Catheter passed once it was out.'
+    const data = { event: 'blocked', done: [...done], outcome: 'recovered', told: [...told], note } as const
+    return [draft(adverseEvents, at, data, { writtenAfter: 25 })]
+  }
+}
+
+/** A few words for those who come after. */
+export function noted(hoursAgo: number, words: string): Happening {
+  return bedside => [draft(freeNotes, hoursBefore(bedside.now, hoursAgo), { words })]
 }
 
 /** Breathing faster and harder than usual: a doctor is asked. */

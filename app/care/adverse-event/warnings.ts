@@ -1,0 +1,111 @@
+import { showDateTime } from '../../time/display.ts'
+import { decannulations } from '../decannulation/schema.ts'
+import { innerCannulaActs } from '../inner-cannula/schema.ts'
+import type { CareContext, Entry, PatientRecord } from '../kind.ts'
+import { observationSets } from '../observations/schema.ts'
+import { stomaChecks } from '../stoma-and-skin/schema.ts'
+import { suctions } from '../suction/schema.ts'
+import { tubeChanges } from '../tube-change/schema.ts'
+import type { Warning } from '../warning.ts'
+import { outAgain, standingOutAgain } from './repeats.ts'
+import { type AdverseEventData, adverseEvents, leavesTubeOut } from './schema.ts'
+import { urgentWarnings } from './urgent.ts'
+
+/** What an event asks people to notice: what to do now, or what to follow up once it is over. */
+export function adverseEventWarnings(data: AdverseEventData, context: CareContext): readonly Warning[] {
+  const urgent = urgentWarnings(data, context)
+  return [
+    ...urgent,
+    ...outAgain(data, context),
+    ...injury(data),
+    ...untold(data),
+    ...(urgent.length === 0 && data.event !== 'pressure injury' && data.outcome !== 'died' ? [followUp] : []),
+  ]
+}
+
+function injury({ event }: AdverseEventData): readonly Warning[] {
+  if (event !== 'pressure injury') return []
+  return [
+    {
+      name: 'event-pressure-injury',
+      level: 'amber',
+      action: 'Refer to wound care or ENT today, and chart the stage under stoma and skin.',
+      cause: 'A pressure injury from the tube or what holds it.',
+      source: 'NPUAP (now NPIAP) 2016 stages; referral is a product proposal',
+    },
+  ]
+}
+
+function untold({ told }: AdverseEventData): readonly Warning[] {
+  if (!told.includes('nobody')) return []
+  return [
+    {
+      name: 'event-nobody-told',
+      level: 'amber',
+      action: 'Tell the charge nurse now.',
+      cause: 'Nobody has been told of the event yet.',
+      source: 'Common practice',
+    },
+  ]
+}
+
+const followUp: Warning = {
+  name: 'event-follow-up',
+  level: 'blue',
+  action: 'Look for the cause, tell the tracheostomy team today, and report it as your hospital asks.',
+  cause: 'An event that was put right can come again.',
+  source: 'Common practice',
+}
+
+/**
+ * The latest event of each sort stands while it asks for something now: a tube that is out until one is in or taken out for good,
+ * a bleed until a later look found no blood, a wrong cannula until another went in, anything else until the patient breathed easily or it was charted as over.
+ */
+export function standingAdverseEventWarnings(context: CareContext): readonly Warning[] {
+  const { record, ward } = context
+  const all = record.of(adverseEvents)
+  const latest = all.filter(entry => all.find(({ data }) => data.event === entry.data.event) === entry)
+  const stands = latest
+    .filter(entry => isOpen(entry, record))
+    .flatMap(({ data, performedAt }) => {
+      const when = showDateTime(performedAt, ward.zone)
+      return urgentWarnings(data, { ...context, now: performedAt }).map(warning => {
+        return { ...warning, cause: `${warning.cause} Charted ${when}.` }
+      })
+    })
+  return [...stands, ...standingOutAgain(context)]
+}
+
+function isOpen({ data, performedAt: at }: Entry<AdverseEventData>, record: PatientRecord): boolean {
+  if (leavesTubeOut(data)) return !isTubeSettled(at, record)
+  if (data.event === 'bleeding') return data.outcome === 'not settled' && !hasStopped(at, record)
+  if (data.event === 'wrong cannula' && data.outcome !== 'not settled') return !isRefitted(at, record)
+  return !record
+    .since(observationSets, at)
+    .some(({ data: { effort }, performedAt }) => performedAt > at && effort === 'easy')
+}
+
+/** A tube went in, was charted as back, or was given up for good. */
+function isTubeSettled(at: Date, record: PatientRecord): boolean {
+  const isLater = ({ performedAt }: Entry) => performedAt > at
+  return (
+    record.since(tubeChanges, at).some(tube => isLater(tube) && tube.data.difficulty !== 'failed') ||
+    record.since(adverseEvents, at).some(entry => isLater(entry) && entry.data.tubeNow === 'in') ||
+    record.since(decannulations, at).some(isLater)
+  )
+}
+
+/** Another inner cannula went in, by itself or with another tube. */
+function isRefitted(at: Date, record: PatientRecord): boolean {
+  return (
+    record.since(innerCannulaActs, at).some(({ data, performedAt }) => performedAt > at && data.act !== 'unable') ||
+    record.since(tubeChanges, at).some(({ data, performedAt }) => performedAt > at && data.difficulty !== 'failed')
+  )
+}
+
+function hasStopped(at: Date, record: PatientRecord): boolean {
+  return (
+    record.since(suctions, at).some(({ data, performedAt }) => performedAt > at && data.blood === 'none') ||
+    record.since(stomaChecks, at).some(({ data, performedAt }) => performedAt > at && data.bleeding === 'none')
+  )
+}
