@@ -13,6 +13,7 @@ import type { RequestFacts } from './app/request-context.server.ts'
 
 const MOST_BODY_BYTES = 64 * 1024 // the longest form has about 4 kB
 const DRAIN_MS = 2000 // npm start promises an end within three seconds, database included
+const LONGEST_END_MS = 2400 // then npm start kills the process
 
 const build: ServerBuild = await import(new URL('./build/server/index.js', import.meta.url).href)
 // The build holds its own copy of every module: the keys and pools in use are those that its entry exports.
@@ -37,25 +38,41 @@ const server = createServer(
 )
 server.on('error', refusedToListen)
 server.listen(env.port, env.host, () => {
+  // From now on an error is one connection that could not be taken, as when too many are open, and no reason to end.
+  server.off('error', refusedToListen).on('error', error => noteFailure(error))
   const address = server.address()
   process.send?.({ listening: typeof address === 'object' ? address?.port : env.port })
 })
 
 let stopping = false
-for (const signal of ['SIGTERM', 'SIGINT', 'disconnect'] as const) process.on(signal, () => void stop())
+for (const signal of ['SIGTERM', 'SIGINT', 'disconnect'] as const) process.on(signal, () => void stop(0))
+// Node's own report would print a database error with its statement and values, and one forgotten promise would end all wards.
+process.on('unhandledRejection', error => noteFailure(error))
+process.on('uncaughtException', error => {
+  noteFailure(error)
+  void stop(1)
+})
 
 /** Takes no new request, lets those under way finish, then closes the application and ends the process. */
-async function stop() {
+async function stop(code: number) {
   if (stopping) return
   stopping = true
   beginShutdown()
+  // What still waits then, such as a statement on a hung disk, was acknowledged to nobody.
+  setTimeout(() => process.exit(code), LONGEST_END_MS)
   const idle = setInterval(() => server.closeIdleConnections(), 50)
   const late = setTimeout(() => server.closeAllConnections(), DRAIN_MS)
   await new Promise(resolve => server.close(resolve))
   clearInterval(idle)
   clearTimeout(late)
-  await close()
-  process.exit(0)
+  await close().catch(error => noteFailure(error))
+  process.exit(code)
+}
+
+/** Name and code only: a message may quote a statement with names in it. */
+function noteFailure(error: unknown, requestId?: string) {
+  const { name, code } = error instanceof Error ? (error as NodeJS.ErrnoException) : { name: typeof error, code: null }
+  console.error(JSON.stringify({ at: new Date().toISOString(), failed: name, code, requestId }))
 }
 
 function refusedToListen(error: NodeJS.ErrnoException) {
@@ -160,8 +177,6 @@ function failed(...[error, , response, _next]: Parameters<ErrorRequestHandler>) 
   const { requestId } = factsOf(response)
   if (response.headersSent) return void response.destroy()
   const status = Number.isInteger(error?.status) && error.status >= 400 ? error.status : 500
-  if (status >= 500) {
-    console.error(JSON.stringify({ at: new Date().toISOString(), failed: error?.name, code: error?.code, requestId }))
-  }
+  if (status >= 500) noteFailure(error, requestId)
   response.status(status).type('text').send(`This request failed. Reference: ${requestId}`)
 }
