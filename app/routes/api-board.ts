@@ -3,7 +3,7 @@ import { SESSION_LIMIT_HOURS } from '#app/auth/limits.ts'
 import { can } from '#app/auth/permissions.ts'
 import { ownSession, signedIn } from '#app/auth/signed-in.server.ts'
 import { traceOf } from '#app/auth/trace.server.ts'
-import { boardTag, wardBoard } from '#app/views/ward-board.server.ts'
+import { boardJson, boardTag, wardBoard } from '#app/views/ward-board.server.ts'
 import { logLook } from '#database/access-log.server.ts'
 import type { Route } from './+types/api-board.ts'
 
@@ -24,8 +24,6 @@ export async function loader({ params: { wardId }, context, request, url }: Rout
   if (!served) throw data('There is no such ward.', 404)
   const by = { ...traceOf({ request, url, context }), path: `/wards/${wardId}/board` }
   await logLook({ action: 'saw board', purpose: 'TREAT', by, wardId }, SESSION_LIMIT_HOURS * 60)
-  return Response.json(
-    { data: served.data, at: served.at },
-    { headers: { ETag: served.etag, 'Cache-Control': 'no-store' } },
-  )
+  const headers = { 'Content-Type': 'application/json', ETag: served.etag, 'Cache-Control': 'no-store' }
+  return new Response(boardJson(served), { headers })
 }

@@ -4,17 +4,14 @@ import { patientRecord } from '#app/care/record.ts'
 import { careContext } from '#app/rules/context.ts'
 import type { StayRecord } from '#database/records.server.ts'
 
-const records = new WeakMap<
-  StayRecord['entries'],
-  { readonly patient: StayRecord['patient']; readonly record: PatientRecord }
->()
+const records = new WeakMap<StayRecord['entries'], { readonly version: number; readonly record: PatientRecord }>()
 
 /** The record of a stay: the same object until something is charted or the patient's facts are edited. */
 export function recordOf({ entries, patient, stay }: StayRecord): PatientRecord {
   const known = records.get(entries)
-  if (known?.patient === patient && entries.length > 0) return known.record
+  if (known?.version === patient.version && entries.length > 0) return known.record
   const record = patientRecord(entries, { admittedAt: stay.admittedAt, patient })
-  records.set(entries, { patient, record })
+  records.set(entries, { version: patient.version, record })
   return record
 }
 

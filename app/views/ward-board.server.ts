@@ -2,7 +2,7 @@ import type { WardFacts } from '#app/care/kind.ts'
 import { type Policy, policyInForce } from '#app/care/policy.ts'
 import { env } from '#app/env.server.ts'
 import type { Board, BoardPatient } from '#app/rules/board.ts'
-import { careView } from '#app/rules/views.ts'
+import { type CareView, careView } from '#app/rules/views.ts'
 import { policyWords } from '#app/rules/why.ts'
 import { ageOn } from '#app/time/display.ts'
 import { earlier, hours } from '#app/time/duration.ts'
@@ -31,8 +31,10 @@ const MOST_BOARDS = 200
 
 /** The tag of a ward's board: the ward's counter, and the five minutes that it was computed in. */
 export function boardTag(wardId: string, rev: number, now: Date): string {
-  return `"${wardId.slice(0, 8)}.${rev}.${Math.floor(now.getTime() / SLOT_MS)}"`
+  return `"${wardId.slice(0, 8)}.${rev}.${slotOf(now)}"`
 }
+
+const slotOf = (now: Date): number => Math.floor(now.getTime() / SLOT_MS)
 
 /**
  * The board of a ward, computed once for each state of the ward and five minutes; undefined when there is no such ward.
@@ -51,6 +53,15 @@ export async function wardBoard(wardId: string, now: Date, rev?: number): Promis
   return served
 }
 
+const texts = new WeakMap<Board, Buffer>()
+
+/** The board and the clock as JSON in UTF-8, for data refreshes: `{"data": …, "at": …}`. Written once for each state of the ward. */
+export function boardJson({ data, at }: ServedBoard): Uint8Array<ArrayBuffer> {
+  const text = texts.get(data) ?? Buffer.from(JSON.stringify(data))
+  texts.set(data, text)
+  return Buffer.concat([Buffer.from('{"data":'), text, Buffer.from(`,"at":${at}}`)])
+}
+
 async function computedBoard(wardId: string, now: Date, rev: number): Promise<Board | undefined> {
   const [ward, known, records] = await Promise.all([wardById(wardId), policies(), wardRecords(wardId, rev)])
   if (!ward) return undefined
@@ -66,8 +77,6 @@ async function computedBoard(wardId: string, now: Date, rev: number): Promise<Bo
   }
 }
 
-const NOTHING = { tasks: [], marks: [], warnings: [] } as const
-
 function boardPatient(record: StayRecord, policy: Policy | undefined, ward: WardFacts, now: Date): BoardPatient {
   const { patient, stay } = record
   return {
@@ -78,6 +87,20 @@ function boardPatient(record: StayRecord, policy: Policy | undefined, ward: Ward
     age: ageOn(patient.bornOn, localDay(now, ward.zone)),
     recordNumber: patient.recordNumber,
     laryngectomy: patient.upperAirway === 'not open',
-    care: policy ? careView(contextOf(record, policy, ward, now), earlier(now, MARKS_BACK)) : NOTHING,
+    care: policy ? careOf(record, policy, ward, now) : NOTHING,
   }
+}
+
+const NOTHING = { tasks: [], marks: [], warnings: [] } as const
+
+const cares = new WeakMap<StayRecord['entries'], { readonly of: string; readonly care: CareView }>()
+
+/** One patient's care, computed once for each state of the patient and five minutes: what is charted for one is one's own. */
+function careOf(record: StayRecord, policy: Policy, ward: WardFacts, now: Date): CareView {
+  const of = JSON.stringify([slotOf(now), policy.id, record.patient.version, ward])
+  const known = cares.get(record.entries)
+  if (known?.of === of) return known.care
+  const care = careView(contextOf(record, policy, ward, now), earlier(now, MARKS_BACK))
+  cares.set(record.entries, { of, care })
+  return care
 }
