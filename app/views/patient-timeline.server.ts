@@ -70,7 +70,9 @@ export function timelineQuery(url: URL) {
 export function timelineTag({ stay, patient }: PatientCare['record'], url: URL, now: Date): string {
   const asked = timelineQuery(url)
   const view = `${asked.span}.${asked.kind ?? ''}.${asked.before?.id ?? ''}`.replaceAll(' ', '')
-  return `"${stay.id.slice(0, 8)}.${stay.entryCount}.${patient.version}.${Math.floor(now.getTime() / SLOT_MS)}.${view}"`
+  // A discharge or a move charts nothing, and ends or changes what is due.
+  const place = `${stay.bedId.slice(-8)}${stay.dischargedAt === null ? '' : '.left'}`
+  return `"${stay.id.slice(0, 8)}.${place}.${stay.entryCount}.${patient.version}.${Math.floor(now.getTime() / SLOT_MS)}.${view}"`
 }
 
 /** One patient's page: due care with its reasons, the tube, marks for the strip, and a page of entries. */
