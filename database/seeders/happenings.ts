@@ -1,4 +1,4 @@
-import { adverseEvents } from '#app/care/adverse-event/schema.ts'
+import { type AdverseEventData, adverseEvents } from '#app/care/adverse-event/schema.ts'
 import { type KitData, kitChecks } from '#app/care/bedside-kit/schema.ts'
 import { carePlans } from '#app/care/care-plan/schema.ts'
 import { cuffChecks } from '#app/care/cuff-pressure/schema.ts'
@@ -92,10 +92,13 @@ export function streaksOfBlood(hoursAgo: number): Happening {
 export function blockCleared(hoursAgo: number): Happening {
   return bedside => {
     const { at } = momentOf(bedside, hoursAgo)
-    const told = ['charge nurse', 'doctor', 'specialist'] as const
-    const done = ['help called', 'inner cannula out', 'suction', 'oxygen'] as const
-    const note = 'Thick plug in the inner cannula. Catheter passed once it was out.'
-    const data = { event: 'blocked', done: [...done], outcome: 'recovered', told: [...told], note } as const
+    const data: AdverseEventData = {
+      event: 'blocked',
+      done: ['help called', 'inner cannula out', 'suction', 'oxygen'],
+      outcome: 'recovered',
+      told: ['charge nurse', 'doctor', 'specialist'],
+      note: 'Thick plug in the inner cannula. Catheter passed once it was out.',
+    }
     return [draft(adverseEvents, at, data, { writtenAfter: 25 })]
   }
 }

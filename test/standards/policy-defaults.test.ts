@@ -65,6 +65,16 @@ const rows: readonly Row[] = [
   ['tooth-brushing-interval', 12, 'V', 'twice a day'],
   ['bedside-kit-after-event', 30, 'P', 'the minutes are a proposal'],
   ['bedside-kit-missing-within', 15, 'P', 'No published number'],
+  // Observations (3.13, 4.7)
+  ['observations-interval', 4, 'M', 'early-warning policy'],
+  ['observations-spo2-fall', 3, 'V', 'BTS oxygen guideline 2017'],
+  ['observations-respiratory-rate-low', 8, 'V', '8 or less'],
+  ['observations-respiratory-rate-high', 25, 'V', '25 or more'],
+  ['observations-heart-rate-low', 40, 'V', '40 or less'],
+  ['observations-heart-rate-high', 131, 'V', '131 or more'],
+  ['observations-systolic-low', 90, 'V', '90 or less'],
+  ['observations-systolic-high', 220, 'V', '220 or more'],
+  ['observations-spo2-low-scale-2', 83, 'V', '83% or less'],
   // Tube change, sutures, tract (3.11, 2.4)
   ['dwell-limit-dual-cannula', 28, 'V', 'National Tracheostomy Safety Project'],
   ['dwell-limit-single-cannula', 14, 'V2', '7 to 14 days'],
