@@ -1,6 +1,6 @@
 import { spawn } from 'node:child_process'
 import { once } from 'node:events'
-import { readFileSync } from 'node:fs'
+import { readdirSync, readFileSync } from 'node:fs'
 import { ROOT, resolved } from '../../database/run/tool.mjs'
 
 /** A server under measurement. */
@@ -39,15 +39,9 @@ export async function served(file: string, env: NodeJS.ProcessEnv, flags: readon
   }
 }
 
-const MS_A_TICK = 10 // USER_HZ is 100 on every Linux
-
-/** The CPU time that processes have used so far with all their threads, in ms. */
+/** The CPU time that processes have used so far with all their threads, in ms; to the microsecond, so that rounds may be short. */
 export function cpuMs(pids: readonly number[]): number {
-  const ticks = pids.map(pid => {
-    const stat = readFileSync(`/proc/${pid}/stat`, 'utf8')
-    // The name in brackets may hold spaces: the fields are counted from behind it. 11 = user, 12 = system.
-    const fields = stat.slice(stat.lastIndexOf(')') + 2).split(' ')
-    return Number(fields[11]) + Number(fields[12])
-  })
-  return ticks.reduce((sum, count) => sum + count, 0) * MS_A_TICK
+  const tasks = pids.flatMap(pid => readdirSync(`/proc/${pid}/task`).map(task => `/proc/${pid}/task/${task}/schedstat`))
+  const nanoseconds = tasks.map(file => Number(readFileSync(file, 'utf8').split(' ')[0]))
+  return nanoseconds.reduce((sum, time) => sum + time, 0) / 1e6
 }
