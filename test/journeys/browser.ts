@@ -35,12 +35,16 @@ export async function openedPage(browser: Browser, options: BrowserContextOption
 
 const RULES = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa', 'best-practice']
 
-/** What axe finds wrong with the page as it stands, one line for each element: `rule: element: why`. */
-export async function axeProblems(page: Page): Promise<string[]> {
-  await page.evaluate(axe.source)
+/**
+ * What axe finds wrong with the page as it stands, one line for each element: `rule: element: why`. Looks at everything, or at
+ * the rules that are named.
+ */
+export async function axeProblems(page: Page, only: readonly string[] = RULES): Promise<string[]> {
+  const isThere = await page.evaluate(() => 'axe' in globalThis)
+  if (!isThere) await page.evaluate(axe.source)
   const found = await page.evaluate(
-    async rules => (await (globalThis as unknown as { axe: typeof axe }).axe.run({ runOnly: rules })).violations,
-    RULES,
+    async runOnly => (await (globalThis as unknown as { axe: typeof axe }).axe.run({ runOnly })).violations,
+    [...only],
   )
   return found.flatMap(({ id, nodes }) =>
     nodes.map(({ target, failureSummary }) => `${id}: ${target.join(' ')}: ${failureSummary ?? ''}`),

@@ -1,0 +1,87 @@
+import type { RouteConfigEntry } from '@react-router/dev/routes'
+import { careKinds } from '#app/care/kinds.ts'
+
+/** Ids that stand in addresses. */
+export interface Known {
+  readonly ward: string
+  readonly patient: string
+  /** An entry that counts. */
+  readonly entry: string
+  /** A patient of a ward that `nurse.birch` belongs to and `nurse.alder` does not. */
+  readonly elsewhere: string
+  readonly person: string
+}
+
+export interface PageEntry {
+  /** As in `app/routes.ts`. */
+  readonly route: string
+  /** A demo account that may see it; null for somebody who has not signed in. */
+  readonly as: string | null
+  readonly path: (known: Known) => string
+}
+
+/** Addresses that answer with something else than a page. */
+export const notPages: Readonly<Record<string, string>> = {
+  health: 'plain text',
+  'health/ready': 'JSON',
+  '': 'leads to the page each person starts from',
+  'sign-out': 'a form is sent to it',
+  'sign-out-everywhere': 'a form is sent to it',
+  theme: 'a form is sent to it',
+  draft: 'the idle watch sends to it',
+  'still-here': 'the idle watch sends to it',
+  'api/patients/:patientId/timeline': 'JSON',
+  'api/wards/:wardId/board': 'JSON',
+}
+
+const specialist = 'specialist'
+const charge = 'charge.alder'
+const administrator = 'administrator'
+
+/** Every page there is, each with an address or more. */
+export const pages: readonly PageEntry[] = [
+  { route: 'sign-in', as: null, path: () => '/sign-in' },
+  { route: 'round', as: 'nurse.alder', path: () => '/round' },
+  { route: 'wards/:wardId/board', as: charge, path: ({ ward }) => `/wards/${ward}/board` },
+  { route: 'wards/:wardId/admit', as: charge, path: ({ ward }) => `/wards/${ward}/admit` },
+  { route: 'wards/:wardId/admit', as: charge, path: ({ ward }) => `/wards/${ward}/admit?known` },
+  { route: 'wards/:wardId/access', as: charge, path: ({ ward }) => `/wards/${ward}/access` },
+  { route: 'patients', as: 'nurse.alder', path: () => '/patients' },
+  { route: 'patients/:patientId', as: 'nurse.alder', path: ({ patient }) => `/patients/${patient}` },
+  { route: 'patients/:patientId', as: 'therapist.alder', path: ({ patient }) => `/patients/${patient}?span=7+days` },
+  ...careKinds.map(({ slug }) => ({
+    route: 'patients/:patientId/chart/:kind',
+    as: specialist,
+    path: ({ patient }: Known) => `/patients/${patient}/chart/${slug}`,
+  })),
+  { route: 'patients/:patientId/details', as: charge, path: ({ patient }) => `/patients/${patient}/details` },
+  { route: 'patients/:patientId/move', as: charge, path: ({ patient }) => `/patients/${patient}/move` },
+  { route: 'patients/:patientId/discharge', as: charge, path: ({ patient }) => `/patients/${patient}/discharge` },
+  {
+    route: 'patients/:patientId/emergency',
+    as: 'nurse.alder',
+    path: ({ patient }) => `/patients/${patient}/emergency`,
+  },
+  { route: 'patients/:patientId/access', as: 'nurse.alder', path: ({ elsewhere }) => `/patients/${elsewhere}/access` },
+  { route: 'entries/:entryId', as: charge, path: ({ entry }) => `/entries/${entry}` },
+  { route: 'entries/:entryId/correct', as: charge, path: ({ entry }) => `/entries/${entry}/correct` },
+  { route: 'entries/:entryId/retract', as: charge, path: ({ entry }) => `/entries/${entry}/retract` },
+  { route: 'account', as: 'observer.alder', path: () => '/account' },
+  { route: 'policy', as: 'educator', path: () => '/policy' },
+  { route: 'admin/people', as: administrator, path: () => '/admin/people' },
+  { route: 'admin/people/new', as: administrator, path: () => '/admin/people/new' },
+  { route: 'admin/people/:userId', as: administrator, path: ({ person }) => `/admin/people/${person}` },
+  { route: 'admin/wards', as: administrator, path: () => '/admin/wards' },
+  { route: 'admin/wards/:wardId', as: administrator, path: ({ ward }) => `/admin/wards/${ward}` },
+]
+
+/** The address of every route that answers by itself, as in `app/routes.ts`. */
+export function routesOf(config: readonly RouteConfigEntry[], above = ''): string[] {
+  return config.flatMap(({ path, children }) => {
+    const here = [above, path].filter(Boolean).join('/')
+    if (!children) return [here]
+    const below = routesOf(children, here)
+    // A layout has no address of its own, and with an index its own address is that of the index.
+    return path === undefined || children.some(child => child.index) ? below : [here, ...below]
+  })
+}
