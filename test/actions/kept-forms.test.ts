@@ -45,7 +45,7 @@ test('fields may have any name', async () => {
   const form = formOf(['__proto__', 'constructor', 'toString', '__proto__'].map(name => [name, 'x'] as const))
   expect(await keepFields(user.id, '/here', form)).toBe(true)
   const draft = await takeDraft(user.id, '/here')
-  expect(Object.entries(draft ?? {}).sort()).toEqual([
+  expect(Object.entries(draft ?? {}).toSorted(([a], [b]) => a.localeCompare(b))).toEqual([
     ['__proto__', ['x', 'x']],
     ['constructor', ['x']],
     ['toString', ['x']],

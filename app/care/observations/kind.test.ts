@@ -94,6 +94,6 @@ test('they do not concern somebody without a tube, and stand still after removal
 })
 
 test('nothing is ever filled in ahead', () => {
-  expect(observations.startsWith).toBeUndefined()
-  expect(observations.usual).toBeUndefined()
+  expect(observations).not.toHaveProperty('startsWith')
+  expect(observations).not.toHaveProperty('usual')
 })
