@@ -33,7 +33,9 @@ const wordsByStatus: Readonly<Record<number, Words>> = {
 
 /** What a thrown `data(words, …)` carries to be read by people; anything else it carries is not shown. */
 function ownWords(error: unknown): string | undefined {
-  return isRouteErrorResponse(error) && typeof error.data === 'string' && error.data !== '' ? error.data : undefined
+  if (!isRouteErrorResponse(error) || typeof error.data !== 'string' || error.data === '') return undefined
+  // The router's own words about an address that leads nowhere are for developers.
+  return error.data.startsWith('Error: No route matches URL') ? undefined : error.data
 }
 
 /** A page that was asked for from another page fails as `fetch` does when no answer comes. Each browser has words of its own. */
