@@ -2,6 +2,7 @@ import type { ReactNode } from 'react'
 import { Links, Meta, Outlet, Scripts, ScrollRestoration, useRouteLoaderData } from 'react-router'
 import { loadUser, sameOriginOnly } from '#app/auth/signed-in.server.ts'
 import { ErrorPage } from '#app/components/error-page.tsx'
+import { JumpLink } from '#app/components/jump-link.tsx'
 import { type Theme, themeOf } from '#app/components/theme.ts'
 import type { Route } from './+types/root.ts'
 import '#app/zod.ts'
@@ -34,12 +35,12 @@ export function Layout({ children }: { readonly children: ReactNode }) {
         <Links />
       </head>
       <body>
-        <a
-          href="#main"
+        <JumpLink
+          to="main"
           className="absolute top-2 left-2 z-50 -translate-y-20 rounded-control bg-brand px-4 py-3 font-semibold text-brand-ink focus:translate-y-0 print:hidden"
         >
           Skip to the content
-        </a>
+        </JumpLink>
         {children}
         <ScrollRestoration />
         <Scripts />

@@ -4,6 +4,7 @@ import type { LiveSentence } from '#app/charting/sentence.ts'
 import { Button } from './button.tsx'
 import { FinalBar } from './final-bar.tsx'
 import { useHydrated } from './hydrated.ts'
+import { JumpLink } from './jump-link.tsx'
 
 interface ChartBarProps {
   readonly words: string
@@ -41,12 +42,12 @@ function BarNotice({ warnings }: { readonly warnings: readonly WarningView[] }) 
   const more = others.length > 0 ? ` And ${others.length} more.` : ''
   return (
     <p className={`font-semibold ${first.level === 'red' ? 'text-late' : 'text-due'}`}>
-      <a href="#notices" className="flex min-h-11 items-center underline decoration-1 underline-offset-3">
+      <JumpLink to="notices" className="flex min-h-11 items-center underline decoration-1 underline-offset-3">
         <span className="line-clamp-2">
           {first.action}
           {more}
         </span>
-      </a>
+      </JumpLink>
     </p>
   )
 }

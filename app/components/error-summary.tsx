@@ -1,4 +1,5 @@
 import { useEffect, useRef } from 'react'
+import { JumpLink } from './jump-link.tsx'
 
 export interface FormError {
   /** Id of the field it belongs to; absent for an error of the whole form. */
@@ -27,12 +28,12 @@ export function ErrorSummary({ errors, title = 'Not charted yet. Please check:' 
           {errors.map(({ fieldId, says }) => (
             <li key={`${fieldId} ${says}`} className="font-semibold">
               {fieldId ? (
-                <a
-                  href={`#${fieldId}`}
+                <JumpLink
+                  to={fieldId}
                   className="inline-flex min-h-11 items-center text-late underline underline-offset-3"
                 >
                   {says}
-                </a>
+                </JumpLink>
               ) : (
                 says
               )}
