@@ -1,6 +1,7 @@
 // npm run bench [-- --json] [-- --profile]: measures the built application against bare routes of the same framework, on a
 // MariaDB of its own in a temporary folder, and leaves nothing running. A missed target is reported; it is no failure.
 import { spawn } from 'node:child_process'
+import { randomBytes } from 'node:crypto'
 import { chmodSync, mkdtempSync, rmSync } from 'node:fs'
 import { tmpdir } from 'node:os'
 import { join } from 'node:path'
@@ -26,6 +27,9 @@ try {
     BENCH_FOLDER: folder,
     APP_SERVER: url('app', ''),
     OWNER_SERVER: url('owner', ''),
+    // The loader shares code with the application, which checks its settings as it starts.
+    DATABASE_URL: url('owner', 'bench'),
+    SESSION_SECRET: randomBytes(32).toString('hex'),
   })
 } catch (error) {
   console.error(error instanceof Error ? error.message : error)
