@@ -1,7 +1,8 @@
 import { validate as isUuid, v7 as uuidv7 } from 'uuid'
 import { readRetraction } from '#app/charting/retract-form.ts'
 import { showDateTime } from '#app/time/display.ts'
-import { type Charting, retractEntry } from '#database/entries.server.ts'
+import { retractEntry } from '#database/entries.server.ts'
+import type { Charting } from '#database/entry-outcome.server.ts'
 import { person } from '#database/users.server.ts'
 import type { OpenedEntry } from './opened-entry.server.ts'
 

@@ -1,7 +1,9 @@
+import type { Transaction } from 'sequelize'
 import { v7 as uuidv7 } from 'uuid'
 import { beforeEach, expect, test } from 'vitest'
 import { addEntry, correctEntry, retractEntry } from '#database/entries.server.ts'
 import { stayRecord } from '#database/records.server.ts'
+import { sequelize } from '#database/sequelize.server.ts'
 import { discharge } from '#database/stay-changes.server.ts'
 import { wardRev } from '#database/ward-revs.server.ts'
 import { cleared } from '#test/database.ts'
@@ -90,7 +92,7 @@ test('of twenty who correct one entry at once one is heard, and the others are t
   const act = anAct()
   await addEntry(act)
   const corrections = Array.from({ length: 20 }, () => ({ ...anAct(), supersedes: act.id, reason: 'Misread' }))
-  const outcomes = await Promise.all(corrections.map(correctEntry))
+  const outcomes = await Promise.all(corrections.map(correction => correctEntry(correction)))
   const winners = outcomes.flatMap(outcome => (outcome.outcome === 'charted' ? [outcome.entry] : []))
   expect(winners).toHaveLength(1)
   const losers = outcomes.filter(({ outcome }) => outcome !== 'charted')
@@ -160,4 +162,34 @@ test('a witness is kept by name', async () => {
   const witness = await aPerson({ name: 'Bea Lindqvist' })
   await addEntry(anAct({ witnessId: witness.id }))
   expect(await charted()).toMatchObject([{ witnessName: 'Bea Lindqvist' }])
+})
+
+test('a used id with another witness changes nothing', async () => {
+  const act = anAct({ witnessId: (await aPerson({ name: 'Second Nurse' })).id })
+  await addEntry(act)
+  expect(await addEntry(act)).toMatchObject({ outcome: 'already charted' })
+  expect(await addEntry({ ...act, witnessId: (await aPerson({ name: 'Third Nurse' })).id })).toEqual({
+    outcome: 'other body under this id',
+  })
+})
+
+test('what is written alongside is written with the act, once, or not at all', async () => {
+  const lines: string[] = []
+  const alongside = async (transaction: Transaction) => {
+    await sequelize.query('UPDATE wards SET name = :name WHERE id = :id', {
+      replacements: { name: 'Renamed by the act', id: bedside.ward.id },
+      transaction,
+    })
+    lines.push('written')
+  }
+  const act = anAct()
+  expect(await addEntry(act, alongside)).toMatchObject({ outcome: 'charted' })
+  expect(await addEntry(act, alongside)).toMatchObject({ outcome: 'already charted' })
+  expect(lines).toEqual(['written'])
+  const failing = async () => {
+    throw new RangeError('No such item')
+  }
+  const other = anAct()
+  await expect(addEntry(other, failing)).rejects.toThrow('No such item')
+  expect((await charted()).map(({ id }) => id)).toEqual([act.id])
 })
