@@ -1,4 +1,5 @@
 import { numberSetting } from './policy.ts'
+import { supplySettings } from './supply-settings.ts'
 
 /** Numbers that concern charting as a whole rather than one kind of care. */
 export const adultAge = numberSetting({
@@ -37,4 +38,4 @@ export const lateReasonAfter = numberSetting({
   source: { says: 'US payer guides: a delayed entry needs its reason; no number given', standing: 'product proposal' },
 })
 
-export const generalSettings = [adultAge, lateEntryAfter, lateReasonAfter]
+export const generalSettings = [adultAge, lateEntryAfter, lateReasonAfter, ...supplySettings]

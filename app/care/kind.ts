@@ -5,6 +5,7 @@ import type { LocalDay, Zone } from '../time/zone.ts'
 import type { Clock } from './clock.ts'
 import type { Lane } from './lanes.ts'
 import type { AnySetting, Values } from './policy.ts'
+import type { PlannedUse, Used } from './supply.ts'
 import type { Warning } from './warning.ts'
 
 /** What the act needs beyond charting care in general; `can()` decides. */
@@ -152,6 +153,10 @@ export interface CareKind<Slug extends string, Schema extends z.ZodObject> exten
    * For plans and orders; never clinical judgement, and never a refusal to record care that was given.
    */
   problems?(data: z.output<Schema>, context: CareContext, known: KnownNames): readonly FormProblem[]
+  /** What the act takes from the stock; `context` is that of the moment before the act, as for `warnings`. */
+  uses?(data: z.output<Schema>, context: CareContext): readonly Used[]
+  /** What this patient is going to take, by the intervals in force. */
+  plannedUse?(context: CareContext): readonly PlannedUse[]
   /** A deferral is not care done: the strip shows it with a note instead of a dot. */
   readonly marksAs?: 'deferred'
   /** Drawn as a triangle instead of a dot; `context` is that of the moment before the act, as for `warnings`. */

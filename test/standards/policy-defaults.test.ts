@@ -97,6 +97,13 @@ const rows: readonly Row[] = [
   ['adult-age', 16, 'P', 'Local cut-off'],
   ['late-entry-after', 60, 'P', 'NMC Code section 10'],
   ['late-entry-reason-after', 24, 'P', 'no number given'],
+  // Supplies (7.2)
+  ['supply-wastage', 20, 'P', 'no published share'],
+  ['supply-lead-days', 3, 'P', 'those of the own store'],
+  ['supply-safety-days', 7, 'P', 'no published number'],
+  ['supply-horizon', 28, 'P', '28 days is a proposal'],
+  ['supply-rate-days', 14, 'P', 'No published number'],
+  ['supply-least-days', 3, 'P', 'No published number'],
 ]
 
 const standings: Readonly<Record<Mark, readonly Standing[]>> = {

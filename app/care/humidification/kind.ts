@@ -4,6 +4,7 @@ import { currentRun } from './runs.ts'
 import { humidifications, methods } from './schema.ts'
 import { humidificationSentence } from './sentence.ts'
 import { humidificationSettings } from './settings.ts'
+import { humidificationUse, plannedExchangers } from './supplies.ts'
 import { humidificationTasks } from './tasks.ts'
 import { humidificationWarnings, standingHumidificationWarnings } from './warnings.ts'
 
@@ -18,6 +19,8 @@ export const humidification = careKind({
   settings: humidificationSettings,
   tasks: humidificationTasks,
   usual,
+  uses: humidificationUse,
+  plannedUse: plannedExchangers,
   warnings: humidificationWarnings,
   standing: standingHumidificationWarnings,
   outOfRange: ({ method, waterLevel }) => method === 'none' || waterLevel === 'low',

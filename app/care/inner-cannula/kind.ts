@@ -5,6 +5,7 @@ import { innerCannulaActs } from './schema.ts'
 import { innerCannulaSentence } from './sentence.ts'
 import { innerCannulaSettings } from './settings.ts'
 import { innerCannulaStart, usualInnerCannula } from './start.ts'
+import { innerCannulaUse, plannedInnerCannulas } from './supplies.ts'
 import { innerCannulaTasks } from './tasks.ts'
 import { innerCannulaWarnings, standingInnerCannulaWarnings } from './warnings.ts'
 
@@ -21,6 +22,8 @@ export const innerCannula = careKind({
   tasks: innerCannulaTasks,
   startsWith: innerCannulaStart,
   usual: usualInnerCannula,
+  uses: innerCannulaUse,
+  plannedUse: plannedInnerCannulas,
   warnings: innerCannulaWarnings,
   standing: standingInnerCannulaWarnings,
   outOfRange: data => isNarrowed(data) || data.act === 'unable',

@@ -5,6 +5,7 @@ import { stomaExamples } from './examples.ts'
 import { stomaChecks } from './schema.ts'
 import { stomaSentence } from './sentence.ts'
 import { stomaSettings } from './settings.ts'
+import { plannedDressings, stomaUse } from './supplies.ts'
 import { stomaTasks } from './tasks.ts'
 import { isOutOfRange, standingStomaWarnings, stomaWarnings } from './warnings.ts'
 
@@ -29,6 +30,8 @@ export const stomaAndSkin = careKind({
       words: 'Dressing and ties left as they are',
       answers: { dressing: 'left in place', holderChanged: 'no' },
     },
+  uses: stomaUse,
+  plannedUse: plannedDressings,
   warnings: stomaWarnings,
   standing: standingStomaWarnings,
   outOfRange: isOutOfRange,

@@ -3,6 +3,7 @@ import { suctionExamples } from './examples.ts'
 import { suctions } from './schema.ts'
 import { suctionSentence } from './sentence.ts'
 import { suctionSettings } from './settings.ts'
+import { suctionUse } from './supplies.ts'
 import { suctionTasks } from './tasks.ts'
 import { isOutOfRange, standingSuctionWarnings, suctionWarnings } from './warnings.ts'
 
@@ -16,6 +17,7 @@ export const suction = careKind({
   summary: suctionSentence,
   settings: suctionSettings,
   tasks: suctionTasks,
+  uses: suctionUse,
   warnings: suctionWarnings,
   standing: standingSuctionWarnings,
   outOfRange: isOutOfRange,

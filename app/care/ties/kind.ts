@@ -4,6 +4,7 @@ import { tieExamples } from './examples.ts'
 import { tieChecks } from './schema.ts'
 import { tieSentence } from './sentence.ts'
 import { tieSettings } from './settings.ts'
+import { plannedTies, tieUse } from './supplies.ts'
 import { tieTasks } from './tasks.ts'
 import { standingTieWarnings, tieWarnings } from './warnings.ts'
 
@@ -26,6 +27,8 @@ export const ties = careKind({
     return holder ? { holder } : {}
   },
   usual: ({ record }) => tubeInPlace(record) && { words: 'Ties left as they are', answers: { changed: 'no' } },
+  uses: tieUse,
+  plannedUse: plannedTies,
   warnings: tieWarnings,
   standing: standingTieWarnings,
   outOfRange: (data, context) => tieWarnings(data, context).length > 0,

@@ -5,6 +5,7 @@ import { tubeChanges } from './schema.ts'
 import { tubeSentence } from './sentence.ts'
 import { tubeChangeSettings } from './settings.ts'
 import { standingTubeWarnings } from './standing.ts'
+import { tubeUse } from './supplies.ts'
 import { tubeTasks } from './tasks.ts'
 import { sameTubeAgain, tubeWarnings } from './warnings.ts'
 
@@ -20,6 +21,7 @@ export const tubeChange = careKind({
   settings: tubeChangeSettings,
   tasks: tubeTasks,
   usual: sameTubeAgain,
+  uses: tubeUse,
   warnings: tubeWarnings,
   standing: standingTubeWarnings,
 })

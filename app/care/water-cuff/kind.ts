@@ -4,6 +4,7 @@ import { waterCuffExamples } from './examples.ts'
 import { waterCuffs } from './schema.ts'
 import { waterCuffSentence } from './sentence.ts'
 import { waterCuffSettings } from './settings.ts'
+import { waterCuffUse } from './supplies.ts'
 import { waterCuffTasks } from './tasks.ts'
 import { standingWaterCuffWarnings, waterCuffWarnings } from './warnings.ts'
 
@@ -23,6 +24,7 @@ export const waterCuff = careKind({
     const last = tube && record.since(waterCuffs, tube.performedAt)[0]
     return last ? { prescribedMl: last.data.prescribedMl } : {}
   },
+  uses: waterCuffUse,
   warnings: waterCuffWarnings,
   standing: standingWaterCuffWarnings,
   outOfRange: (data, context) => waterCuffWarnings(data, context).length > 0,
