@@ -1,5 +1,6 @@
 import './database/environment.ts'
 import { randomBytes, randomUUID } from 'node:crypto'
+import { once } from 'node:events'
 import { createServer } from 'node:http'
 import { fileURLToPath } from 'node:url'
 import { constants } from 'node:zlib'
@@ -36,6 +37,8 @@ const server = createServer(
   { headersTimeout: 8000, requestTimeout: 15_000, connectionsCheckingInterval: 2000, keepAliveTimeout: 10_000 },
   app,
 )
+// npm start brings the database up to date while this process loads.
+if (process.env.LISTEN === 'when told') await once(process, 'message')
 server.on('error', refusedToListen)
 server.listen(env.port, env.host, () => {
   // From now on an error is one connection that could not be taken, as when too many are open, and no reason to end.

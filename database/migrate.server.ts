@@ -1,18 +1,18 @@
 import { QueryTypes, type Sequelize } from 'sequelize'
-import { SequelizeStorage, Umzug } from 'umzug'
 import { migrations } from './migrations/list.ts'
 
 const LEDGER = 'schema_migrations'
 
 /** The names of all migrations, and of those the database has not seen yet. */
 export async function migrationStatus(owner: Sequelize): Promise<{ all: string[]; pending: string[] }> {
-  const pending = await umzug(owner).pending()
+  const pending = await (await umzug(owner)).pending()
   return { all: Object.keys(migrations), pending: pending.map(({ name }) => name) }
 }
 
 /** Applies what is pending and returns the names. Of several processes at once, one migrates and the others wait. */
-export function migrateUp(owner: Sequelize): Promise<string[]> {
-  return oneAtATime(owner, async () => (await umzug(owner).up()).map(({ name }) => name))
+export async function migrateUp(owner: Sequelize): Promise<string[]> {
+  if (await isUpToDate(owner)) return []
+  return oneAtATime(owner, async () => (await (await umzug(owner)).up()).map(({ name }) => name))
 }
 
 /**
@@ -21,15 +21,29 @@ export function migrateUp(owner: Sequelize): Promise<string[]> {
  */
 export function migrateDown(owner: Sequelize, to: string): Promise<string[]> {
   return oneAtATime(owner, async () => {
-    if (to === '0') return (await umzug(owner).down({ to: 0 })).map(({ name }) => name)
-    const applied = (await umzug(owner).executed()).map(({ name }) => name)
+    const ledger = await umzug(owner)
+    if (to === '0') return (await ledger.down({ to: 0 })).map(({ name }) => name)
+    const applied = (await ledger.executed()).map(({ name }) => name)
     if (!applied.includes(to)) throw new Error(`${to} is not among the applied migrations: ${applied.join(', ')}`)
     const next = applied[applied.indexOf(to) + 1]
-    return next ? (await umzug(owner).down({ to: next })).map(({ name }) => name) : []
+    return next ? (await ledger.down({ to: next })).map(({ name }) => name) : []
   })
 }
 
-function umzug(owner: Sequelize) {
+/** Asked before anything else, so that the usual start neither waits for a lock nor loads what migrates. */
+async function isUpToDate(owner: Sequelize): Promise<boolean> {
+  const ledgers = await owner.query('SHOW TABLES LIKE :ledger', {
+    replacements: { ledger: LEDGER },
+    type: QueryTypes.SELECT,
+  })
+  if (ledgers.length === 0) return false
+  const applied = await owner.query<{ name: string }>(`SELECT name FROM ${LEDGER}`, { type: QueryTypes.SELECT })
+  const names = new Set(applied.map(({ name }) => name))
+  return Object.keys(migrations).every(name => names.has(name))
+}
+
+async function umzug(owner: Sequelize) {
+  const { SequelizeStorage, Umzug } = await import('umzug')
   return new Umzug({
     migrations: Object.entries(migrations).map(([name, migration]) => ({ name, ...migration })),
     context: owner.getQueryInterface(),

@@ -1,8 +1,8 @@
 import '../environment.ts'
 import { env } from '#app/env.server.ts'
 import { connection } from '../connection.server.ts'
-import { grantAppRights } from '../grants.server.ts'
-import { migrateDown, migrateUp, migrationStatus } from '../migrate.server.ts'
+import { migrateDown, migrationStatus } from '../migrate.server.ts'
+import { counted, schemaUp } from '../schema-up.server.ts'
 
 const USAGE = 'Say what to do: npm run migrate -- up | down --to <name, or 0 for all> | status'
 
@@ -18,16 +18,13 @@ try {
 
 async function answer([command, ...options]: string[]): Promise<string> {
   switch (command) {
-    case 'up': {
-      const applied = await migrateUp(owner)
-      await grantAppRights(owner, env.databaseUrl)
-      return applied.length > 0 ? `applied ${count(applied)}` : 'up to date'
-    }
+    case 'up':
+      return schemaUp(owner, env.databaseUrl)
     case 'down': {
       const [option, to] = options
       if (option !== '--to' || !to) throw new Error(USAGE)
       const reverted = await migrateDown(owner, to)
-      return reverted.length > 0 ? `took back ${count(reverted)}` : 'nothing to take back'
+      return reverted.length > 0 ? `took back ${counted(reverted)}` : 'nothing to take back'
     }
     case 'status': {
       const { all, pending } = await migrationStatus(owner)
@@ -36,8 +33,4 @@ async function answer([command, ...options]: string[]): Promise<string> {
     default:
       throw new Error(USAGE)
   }
-}
-
-function count(names: string[]) {
-  return `${names.length === 1 ? 'one migration' : `${names.length} migrations, the last is`} ${names.at(-1)}`
 }

@@ -1,6 +1,5 @@
 import '../environment.ts'
 import { parseArgs } from 'node:util'
-import { closePasswords } from '#app/auth/password.server.ts'
 import { env } from '#app/env.server.ts'
 import { connection } from '../connection.server.ts'
 import { seed } from '../seeders/seed.server.ts'
@@ -17,7 +16,7 @@ try {
   console.error(error instanceof Error ? error.message : error)
   process.exitCode = 1
 } finally {
-  await Promise.all([owner.close(), sequelize.close(), closePasswords()])
+  await Promise.all([owner.close(), sequelize.close()])
 }
 
 function moment(text: string | undefined): Date {

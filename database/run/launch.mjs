@@ -16,7 +16,7 @@ const LONGEST_END_MS = 2500
  * @property {'production' | 'development'} mode
  * @property {string[]} server the program that serves, as for `tool`
  * @property {(end: AbortSignal) => Promise<void>} [before] what has to be done before serving
- * @property {boolean} [tellsReady] true when the server sends a message once it listens
+ * @property {boolean} [waits] true when the server loads at once, listens when it is told to, and tells when it does
  */
 
 /**
@@ -39,9 +39,10 @@ export async function launch(way) {
     if (database.held) held = settings.folder
     end.throwIfAborted()
     const env = { ...database.env, NODE_ENV: way.mode, TZ: 'UTC' }
-    await schemaAndDemo(settings, env, end)
     await way.before?.(end)
-    process.exitCode = await served(way, settings, env, end, held)
+    const data = () => dataMade(settings, env, end)
+    if (!way.waits) await data()
+    process.exitCode = await served(way, settings, env, end, { held, first: way.waits ? data : undefined })
   } catch (error) {
     if (!end.aborted) {
       console.error(error instanceof Error ? `\n${error.message}` : error)
@@ -63,21 +64,13 @@ async function addressIsFree({ port, host }) {
  * @param {NodeJS.ProcessEnv} env
  * @param {AbortSignal} signal
  */
-async function schemaAndDemo({ demo, databaseUrl }, env, signal) {
-  const advice = databaseUrl ? 'Is DATABASE_URL right, and may its user create tables there?' : ''
-  await step('Schema', async () => [
-    await tool(['tsx', 'database/commands/migrate.ts', 'up'], { env, signal, advice }),
-    null,
-  ])
-  if (!demo) return
-  await step('Demo hospital', async () => [
-    await tool(['tsx', 'database/commands/seed.ts', '--if-empty'], {
-      env,
-      signal,
-      advice: 'To start without the demo hospital: DEMO=off npm start',
-    }),
-    null,
-  ])
+async function dataMade({ demo, databaseUrl }, env, signal) {
+  const advice = [
+    databaseUrl ? 'Is DATABASE_URL right, and may its user create tables there?' : '',
+    demo ? 'To start without the demo hospital: DEMO=off npm start' : '',
+  ].join('\n')
+  const command = ['tsx', 'database/commands/prepare.ts', ...(demo ? ['--demo'] : [])]
+  await step('Data', async () => [await tool(command, { env, signal, advice }), null])
 }
 
 /**
@@ -85,15 +78,16 @@ async function schemaAndDemo({ demo, databaseUrl }, env, signal) {
  * @param {import('./settings.mjs').Settings} settings
  * @param {NodeJS.ProcessEnv} env
  * @param {AbortSignal} end
- * @param {string | null} held the data folder whose MariaDB is this process's own
+ * @param {{ held: string | null, first?: (() => Promise<void>) | undefined }} around the data folder whose MariaDB is this
+ *   process's own, and what has to be done before a waiting server may listen
  * @returns {Promise<number>} the exit code
  */
-async function served(way, settings, env, end, held) {
+async function served(way, settings, env, end, { held, first }) {
   const [program, ...args] = resolved(way.server)
   const server = spawn(program, args, {
     cwd: ROOT,
-    env: { ...process.env, ...env },
-    stdio: way.tellsReady ? ['ignore', 'inherit', 'inherit', 'ipc'] : ['ignore', 'inherit', 'inherit'],
+    env: { ...process.env, ...env, ...(first ? { LISTEN: 'when told' } : {}) },
+    stdio: way.waits ? ['ignore', 'inherit', 'inherit', 'ipc'] : ['ignore', 'inherit', 'inherit'],
   })
   const { promise: over, settle } = settled()
   server.once('error', error => settle(error))
@@ -110,6 +104,7 @@ async function served(way, settings, env, end, held) {
   }
   if (end.aborted) stop()
   end.addEventListener('abort', stop)
+  first?.().then(() => server.connected && server.send('listen'), settle)
   const outcome = await over
   clearInterval(watch)
   if (typeof outcome === 'number') return outcome

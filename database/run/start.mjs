@@ -7,5 +7,5 @@ await launch({
   mode: 'production',
   before: end => step('Application', async () => [await built(end), undefined]),
   server: ['tsx', 'server.ts'],
-  tellsReady: true,
+  waits: true,
 })

@@ -1,5 +1,5 @@
 import type { Sequelize, Transaction } from 'sequelize'
-import { passwordHash } from '#app/auth/password.server.ts'
+import { closePasswords, passwordHash } from '#app/auth/password.server.ts'
 import { type DemoNote, demoPassphrase } from '../demo.server.ts'
 import { utcText } from '../sequelize.server.ts'
 import type { DemoHospital } from './rows.ts'
@@ -13,6 +13,7 @@ const ROWS_A_STATEMENT = 500
  */
 export async function loadDemo(owner: Sequelize, hospital: DemoHospital): Promise<void> {
   const hash = await passwordHash(demoPassphrase)
+  await closePasswords() // no other is hashed here, and waiting threads would keep a command from ending
   const note: DemoNote = {
     seededAt: hospital.seededAt.toISOString(),
     userIds: hospital.people.map(({ id }) => id),

@@ -3,9 +3,6 @@ import { showDateTime, showDuration } from '#app/time/display.ts'
 import { days, since } from '#app/time/duration.ts'
 import type { Zone } from '#app/time/zone.ts'
 import { demoSeededAt, population } from '../demo.server.ts'
-import { demoHospital } from './hospital.ts'
-import { loadDemo } from './load.server.ts'
-import { emptyDemo } from './reset.server.ts'
 
 /** What is wanted: `if empty` leaves anything else as it is and says how it stands, `only` refuses, `reset` replaces the demo hospital. */
 export type Seeding = 'if empty' | 'only' | 'reset'
@@ -18,6 +15,7 @@ const FRESH = 'npm run seed -- --reset'
  */
 export async function seed(owner: Sequelize, how: Seeding, now: Date, zone: Zone): Promise<string> {
   if (how === 'reset') {
+    const { emptyDemo } = await import('./reset.server.ts')
     await emptyDemo(owner)
     return load(owner, now, zone)
   }
@@ -29,8 +27,10 @@ export async function seed(owner: Sequelize, how: Seeding, now: Date, zone: Zone
   throw new Error(seededAt ? `Nothing was changed. ${stands} To replace it: ${FRESH}` : stands)
 }
 
+/** The makers of the demo hospital are read only when it is made: a start that finds it in place need not wait for them. */
 async function load(owner: Sequelize, now: Date, zone: Zone): Promise<string> {
   const startedAt = performance.now()
+  const [{ demoHospital }, { loadDemo }] = await Promise.all([import('./hospital.ts'), import('./load.server.ts')])
   const hospital = demoHospital(now, zone)
   await loadDemo(owner, hospital)
   const { wards, patients, people, entries } = hospital

@@ -52,9 +52,7 @@ async function serving(started: { child: ChildProcess; output: string }) {
 
 test('npm start leads to a page, mends its database, and is ended by SIGTERM', { timeout: 120_000 }, async () => {
   const started = npmStart()
-  expect(await serving(started)).toMatch(
-    /Packages .*\nMariaDB .*\nSchema .*\nDemo hospital .*\nApplication .*\n\nCannulary is/,
-  )
+  expect(await serving(started)).toMatch(/Packages .*\nMariaDB .*\nApplication .*\nData .*\n\nCannulary is/)
   expect(await readiness()).toBe('ready')
   process.kill(databasePid(), 'SIGKILL')
   expect(await until(async () => (await readiness()) === 'database away', 10_000)).toBe(true)
