@@ -1,52 +1,5 @@
 import { z } from 'zod'
-
-interface Shared {
-  readonly label: string
-  readonly hint?: string
-  /** Heading that this field stands under; a field without one continues the section before it. */
-  readonly section?: string
-  /** Kept out of the way under "More details": good to have, not needed to chart the act. */
-  readonly more?: boolean
-  /** The question only arises when another field of the same form has one of these values. */
-  readonly when?: { readonly field: string; readonly is: readonly string[] }
-  /** With `when`: an answer is needed once the question arises. */
-  readonly neededThen?: boolean
-}
-
-export interface QuantityMeta extends Shared {
-  readonly control: 'quantity'
-  /** Unit as shown beside the number; absent when `unitField` names the field that holds it. */
-  readonly unit?: string
-  readonly unitField?: string
-  readonly min: number
-  readonly max: number
-  readonly step: number
-  /** Drawn large, with a keypad: the number that the act is about. */
-  readonly large?: boolean
-}
-export interface ChoiceMeta extends Shared {
-  readonly control: 'choice' | 'choices'
-  readonly options: Readonly<Record<string, string>>
-}
-export interface TextMeta extends Shared {
-  readonly control: 'text' | 'note'
-  readonly maxLength: number
-}
-export interface DateMeta extends Shared {
-  readonly control: 'date'
-}
-/** A name chosen from a list that the page supplies: a due task, or a policy setting. */
-export interface NameMeta extends Shared {
-  readonly control: 'task' | 'setting'
-}
-/** What a form needs to know to draw one field: declared once, beside the value's own rules. */
-export type FieldMeta = QuantityMeta | ChoiceMeta | TextMeta | DateMeta | NameMeta
-
-const fields = z.registry<FieldMeta>()
-
-type Extra = Omit<Shared, 'label'>
-
-const inSentence = (label: string): string => label.charAt(0).toLowerCase() + label.slice(1)
+import { type Extra, type FieldMeta, fieldMetas, inSentence, type NameMeta, type QuantityMeta } from './field-meta.ts'
 
 /** A number with its unit and range. Messages name the field and the range. */
 export function quantity(meta: Omit<QuantityMeta, 'control' | 'step'> & { readonly step?: number }): z.ZodNumber {
@@ -58,7 +11,7 @@ export function quantity(meta: Omit<QuantityMeta, 'control' | 'step'> & { readon
     .max(meta.max, range)
   const step = meta.step ?? 1
   const checked = schema.refine(value => isMultipleOf(value, step), `${meta.label} must be in steps of ${step}${unit}`)
-  fields.add(checked, { ...meta, control: 'quantity', step })
+  fieldMetas.add(checked, { ...meta, control: 'quantity', step })
   return checked
 }
 
@@ -74,7 +27,7 @@ export function choice<const Options extends Readonly<Record<string, string>>>(
 ): z.ZodEnum<{ [Name in keyof Options & string]: Name }> {
   const names = Object.keys(meta.options) as (keyof Options & string)[]
   const schema = z.enum(names, { error: `Choose the ${inSentence(meta.label)}` })
-  fields.add(schema, { ...meta, control: 'choice' })
+  fieldMetas.add(schema, { ...meta, control: 'choice' })
   return schema as unknown as z.ZodEnum<{ [Name in keyof Options & string]: Name }>
 }
 
@@ -89,7 +42,7 @@ export function choices<const Options extends Readonly<Record<string, string>>>(
     .min(1, words)
     .max(names.length, words)
     .refine(chosen => new Set(chosen).size === chosen.length, 'Choose each option once')
-  fields.add(schema, { ...meta, control: 'choices' })
+  fieldMetas.add(schema, { ...meta, control: 'choices' })
   return schema as unknown as z.ZodArray<z.ZodEnum<{ [Name in keyof Options & string]: Name }>>
 }
 
@@ -113,14 +66,14 @@ function words(control: 'text' | 'note', meta: { label: string; maxLength: numbe
     .min(1, `Enter the ${inSentence(meta.label)}`)
     .max(meta.maxLength, `${meta.label} must be at most ${meta.maxLength} characters`)
     .regex(allowed, `${meta.label} has characters that cannot be stored`)
-  fields.add(schema, { ...meta, control })
+  fieldMetas.add(schema, { ...meta, control })
   return schema
 }
 
 /** A calendar date, stored as `2026-12-01`. */
 export function date(meta: { readonly label: string } & Extra): z.ZodISODate {
   const schema = z.iso.date({ error: `Enter the ${inSentence(meta.label)} as a date` })
-  fields.add(schema, { ...meta, control: 'date' })
+  fieldMetas.add(schema, { ...meta, control: 'date' })
   return schema
 }
 
@@ -129,7 +82,7 @@ export function nameOf(control: NameMeta['control'], meta: { readonly label: str
   const schema = z
     .string({ error: `Choose the ${inSentence(meta.label)}` })
     .regex(/^[a-z][a-z0-9-]{2,63}$/, `Choose the ${inSentence(meta.label)}`)
-  fields.add(schema, { ...meta, control })
+  fieldMetas.add(schema, { ...meta, control })
   return schema
 }
 
@@ -143,7 +96,7 @@ export interface Field {
 export function fieldsOf(schema: z.ZodObject): readonly Field[] {
   return Object.entries(schema.shape).map(([name, member]) => {
     const inner = member instanceof z.ZodOptional ? member.unwrap() : member
-    const meta = fields.get(inner as z.ZodType)
+    const meta = fieldMetas.get(inner as z.ZodType)
     if (!meta) throw new Error(`Field ${name} has no label: declare it with a function of field.ts`)
     return { name, meta, required: inner === member }
   })

@@ -71,7 +71,8 @@ const notFields = ['intent']
  * `care.__proto__` or `care[9999999]` would be followed. A decimal comma counts as a point; files count as unknown.
  */
 export function ownFields(kind: AnyCareKind, sent: FormData): FormRead {
-  const care = new Map(fieldsOf(kind.schema).map(({ name, meta }) => [`care.${name}`, meta.control]))
+  const fields = fieldsOf(kind.schema).filter(({ meta }) => meta.control !== 'decided')
+  const care = new Map(fields.map(({ name, meta }) => [`care.${name}`, meta.control]))
   const form = new FormData()
   const unknown = new Set<string>()
   for (const [name, value] of sent) {

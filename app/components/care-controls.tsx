@@ -1,12 +1,12 @@
 import type { ReactNode } from 'react'
-import type { FieldMeta } from '#app/care/field.ts'
+import { type AskedMeta, type FieldMeta, isCarried } from '#app/care/field-meta.ts'
 import { ChoiceField } from './choice-field.tsx'
 import type { FieldProps } from './field-parts.tsx'
 import { type Band, QuantityField } from './quantity-field.tsx'
 import { SelectField, TextArea, TextField } from './text-field.tsx'
 
-type Control = FieldMeta['control']
-type MetaOf<C extends Control, M extends FieldMeta = FieldMeta> = M extends FieldMeta
+type Control = AskedMeta['control']
+type MetaOf<C extends Control, M extends AskedMeta = AskedMeta> = M extends AskedMeta
   ? C extends M['control']
     ? M
     : never
@@ -50,6 +50,7 @@ const controls: { readonly [C in Control]: (meta: MetaOf<C>, drawing: Drawing) =
 }
 
 export function CareControl({ meta, drawing }: { readonly meta: FieldMeta; readonly drawing: Drawing }) {
+  if (isCarried(meta)) return null
   // The table pairs each control with its own metadata, which TypeScript cannot follow through the lookup.
   const draw = controls[meta.control] as (meta: FieldMeta, drawing: Drawing) => ReactNode
   return draw(meta, drawing)

@@ -1,9 +1,11 @@
 import { Fragment, type ReactNode, useRef } from 'react'
-import { type FieldMeta, isShown } from '#app/care/field.ts'
+import { isShown } from '#app/care/field.ts'
+import { type FieldMeta, isCarried } from '#app/care/field-meta.ts'
 import type { Gauge } from '#app/care/kind.ts'
 import { type Answers, useAnswers } from './answers.ts'
 import { CareControl } from './care-controls.tsx'
 import type { DrawnField } from './conform-fields.ts'
+import { FieldErrors } from './field-parts.tsx'
 import { useHydrated } from './hydrated.ts'
 
 export interface CareFieldsProps {
@@ -25,8 +27,9 @@ export function CareFields({ fields, gauges = [], lists = {}, units = {}, notice
   const root = useRef<HTMLDivElement>(null)
   const answers = useAnswers(fields, root)
   const context = { all: fields, answers, gauges, lists, units }
-  const shown = fields.filter(field => !field.meta.more)
-  const more = fields.filter(field => field.meta.more)
+  const asked = fields.filter(field => !isCarried(field.meta))
+  const shown = asked.filter(field => !field.meta.more)
+  const more = asked.filter(field => field.meta.more)
   const noticed = shown.find(({ meta }) => meta.control === 'quantity' && meta.large) ?? shown.at(-1)
   const isNeeded = more.some(field => field.errors?.length || field.answers.length > 0)
   return (
@@ -49,6 +52,22 @@ export function CareFields({ fields, gauges = [], lists = {}, units = {}, notice
           </div>
         </details>
       )}
+      {fields
+        .filter(field => isCarried(field.meta))
+        .map(field => (
+          <CarriedAnswer key={field.formKey ?? field.name} field={field} />
+        ))}
+    </div>
+  )
+}
+
+/** Filled in by a scan: nothing to look at but what is wrong with it. What the catalogue decides is not sent at all. */
+function CarriedAnswer({ field: { id, meta, fullName, answers, errors } }: { readonly field: DrawnField }) {
+  if (meta.control === 'decided') return null
+  return (
+    <div id={id} tabIndex={-1} className={errors?.length ? '' : 'contents'}>
+      <input type="hidden" name={fullName} defaultValue={answers[0]} />
+      <FieldErrors id={id} errors={errors} />
     </div>
   )
 }

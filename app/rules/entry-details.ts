@@ -1,4 +1,5 @@
-import { type FieldMeta, fieldsOf } from '../care/field.ts'
+import { fieldsOf } from '../care/field.ts'
+import type { FieldMeta } from '../care/field-meta.ts'
 import { type AnyCareKind, wordsOf } from '../care/kind.ts'
 import { showDay } from '../time/display.ts'
 
@@ -14,7 +15,11 @@ type Answers = Readonly<Record<string, unknown>>
 export function entryDetails(kind: AnyCareKind, data: Answers): readonly Detail[] {
   return fieldsOf(kind.schema).flatMap(({ name, meta }) => {
     const value = data[name]
-    return value === undefined || value === null ? [] : [{ label: meta.label, value: inWords(meta, value, data) }]
+    // The catalogue's ids are for programs: line and size stand in fields of their own.
+    const isForReaders = meta.control !== 'item' && meta.control !== 'decided'
+    return !isForReaders || value === undefined || value === null
+      ? []
+      : [{ label: meta.label, value: inWords(meta, value, data) }]
   })
 }
 
@@ -33,6 +38,10 @@ function inWords(meta: FieldMeta, value: unknown, data: Answers): string {
     case 'task':
     case 'setting':
       return wordsOf(String(value))
+    case 'codes':
+      return String(value).replaceAll('\u001d', ' ')
+    case 'item':
+    case 'decided':
     case 'text':
     case 'note':
       return String(value)

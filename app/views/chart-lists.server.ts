@@ -1,5 +1,6 @@
 import { type CurrentUser, can } from '#app/auth/permissions.ts'
-import { type FieldMeta, fieldsOf } from '#app/care/field.ts'
+import { fieldsOf } from '#app/care/field.ts'
+import type { FieldMeta } from '#app/care/field-meta.ts'
 import type { AnyCareKind, CareContext } from '#app/care/kind.ts'
 import { careSettings } from '#app/care/kinds.ts'
 import { showValue } from '#app/rules/why.ts'

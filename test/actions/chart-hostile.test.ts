@@ -1,8 +1,8 @@
 import { QueryTypes } from 'sequelize'
 import { beforeAll, expect, test } from 'vitest'
 import type { CurrentUser } from '#app/auth/permissions.ts'
-import type { FieldMeta } from '#app/care/field.ts'
 import { fieldsOf } from '#app/care/field.ts'
+import type { FieldMeta } from '#app/care/field-meta.ts'
 import type { AnyCareKind } from '#app/care/kind.ts'
 import { careKinds } from '#app/care/kinds.ts'
 import { aCharting, changed, chart, openedForm, type Sent, wholeForm } from '#test/charting.ts'
@@ -49,6 +49,9 @@ const ofControl: Readonly<Record<FieldMeta['control'], readonly string[]>> = {
   note: [LONG, '\u0000', '\u001b[31m'],
   date: ['2026-02-30', '0000-00-00', 'yesterday', '2026-13-01', LONG],
   task: ['', 'no-such-task', '../x', '__proto__', LONG],
+  item: ['x', '1', '__proto__', LONG],
+  codes: ['x', 'barcode', 'barcode \u0000', 'voice ]d2', 'barcode a\n', LONG],
+  decided: ['019aa7c2-0000-7000-8000-000000000001'],
   setting: ['', 'no-such-setting', 'constructor', LONG],
 }
 

@@ -1,4 +1,5 @@
 import type { z } from 'zod'
+import { codes, decidedItem, itemOf } from '../carried-field.ts'
 import { careFields, choice, date, note, quantity, text, yesNo } from '../field.ts'
 import { charted } from '../kind.ts'
 import { amountField, bloodField, colourField, consistencyField } from '../suction/secretions.ts'
@@ -75,6 +76,14 @@ const fields = careFields({
   assistant: text({ label: 'Assistant', more: true }).optional(),
   lot: text({ label: 'Lot', maxLength: 20, more: true }).optional(),
   expiresOn: date({ label: 'Expiry date', more: true }).optional(),
+  item: itemOf({
+    label: 'Scanned inner cannula',
+    of: 'inner cannula',
+    prints: { line: 'line', size: 'size' },
+  }).optional(),
+  scanned: codes({ label: 'Codes of the inner cannula' }).optional(),
+  madeFor: decidedItem({ label: 'Tube in place, which it is made for' }).optional(),
+  notMadeFor: decidedItem({ label: 'Tube in place, which it is not made for' }).optional(),
   note: note({ label: 'Note', more: true }).optional(),
 })
 

@@ -1,4 +1,5 @@
 import type { z } from 'zod'
+import { codes, itemOf } from '../carried-field.ts'
 import { careFields, choice, date, note, quantity, text, yesNo } from '../field.ts'
 import { charted } from '../kind.ts'
 
@@ -80,6 +81,8 @@ const fields = careFields({
   }).optional(),
   lot: text({ label: 'Lot', maxLength: 20, more: true }).optional(),
   expiresOn: date({ label: 'Expiry date', more: true }).optional(),
+  item: itemOf({ label: 'Scanned tube', of: 'tube', prints: { line: 'line', size: 'size' } }).optional(),
+  scanned: codes({ label: 'Codes of the tube' }).optional(),
   technique: choice({
     label: 'Technique',
     section: 'Opening and fixing',
