@@ -25,6 +25,9 @@ export interface Setting<Value extends SettingValue = SettingValue> {
   /** Allowed range of numbers; absent for switches and lists. */
   readonly min?: number
   readonly max?: number
+  /** Names of settings of the same unit that it may not lie above, or below: both ends of one band. */
+  readonly notAbove?: string
+  readonly notBelow?: string
   /** A patient's care plan may override it. */
   readonly personal?: boolean
   readonly affects: string

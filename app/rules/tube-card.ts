@@ -7,10 +7,11 @@ import {
   insertedOn,
   type TubeData,
   tubeInPlace,
-  tubeOutSince,
   tubeTract,
+  tubeWords,
   workingIdMm,
 } from '../care/tube-change/tube.ts'
+import { lastTube, tubeAbsence } from '../care/tube-change/tube-absence.ts'
 import { largestCatheter } from '../clinical/suction-catheter.ts'
 import { isNewStoma, tractState } from '../clinical/tract.ts'
 import { showDateTime, showDay } from '../time/display.ts'
@@ -44,10 +45,7 @@ const cuffs: Readonly<Record<TubeData['cuff'], string>> = {
 export function tubeCard(context: CareContext): TubeCardOrNone {
   const tube = tubeInPlace(context.record)
   if (!tube) {
-    const since = tubeOutSince(context.record)
-    return {
-      none: since ? `Tube out for good since ${showDateTime(since, context.ward.zone)}.` : 'No tube charted yet.',
-    }
+    return { none: noTubeWords(context) }
   }
   const { data } = tube
   const tract = tubeTract(context)
@@ -65,6 +63,16 @@ export function tubeCard(context: CareContext): TubeCardOrNone {
     facts: [...buildFacts(data, context), ...timeFacts(context)],
     newStoma: tract !== undefined && isNewStoma({ ...tract, blindDays: context.values.of(blindReinsertionBefore) }),
   }
+}
+
+/** Why there is no tube; of one that came out, which it was, since it or one like it has to go back in. */
+function noTubeWords({ record, ward }: CareContext): string {
+  const absence = tubeAbsence(record)
+  if (!absence) return 'No tube charted yet.'
+  const since = showDateTime(absence.since, ward.zone)
+  if (absence.why === 'removed for good') return `Tube removed for good ${since}.`
+  const tube = lastTube(record)?.data
+  return `Tube came out ${since} and is not charted as back.${tube ? ` It was ${tube.line} ${tubeWords(tube)}.` : ''}`
 }
 
 function buildFacts(data: TubeData, context: CareContext) {

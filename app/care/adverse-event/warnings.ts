@@ -3,10 +3,10 @@ import { decannulations } from '../decannulation/schema.ts'
 import { innerCannulaActs } from '../inner-cannula/schema.ts'
 import type { CareContext, Entry, PatientRecord } from '../kind.ts'
 import { observationSets } from '../observations/schema.ts'
-import { stomaChecks } from '../stoma-and-skin/schema.ts'
-import { suctions } from '../suction/schema.ts'
 import { tubeChanges } from '../tube-change/schema.ts'
+import { isBackIn } from '../tube-change/tube-absence.ts'
 import type { Warning } from '../warning.ts'
+import { isStillBleeding } from './bleed.ts'
 import { outAgain, standingOutAgain } from './repeats.ts'
 import { type AdverseEventData, adverseEvents, leavesTubeOut } from './schema.ts'
 import { urgentWarnings } from './urgent.ts'
@@ -76,9 +76,10 @@ export function standingAdverseEventWarnings(context: CareContext): readonly War
   return [...stands, ...standingOutAgain(context)]
 }
 
-function isOpen({ data, performedAt: at }: Entry<AdverseEventData>, record: PatientRecord): boolean {
-  if (leavesTubeOut(data)) return !isTubeSettled(at, record)
-  if (data.event === 'bleeding') return data.outcome === 'not settled' && !hasStopped(at, record)
+function isOpen(entry: Entry<AdverseEventData>, record: PatientRecord): boolean {
+  const { data, performedAt: at } = entry
+  if (leavesTubeOut(data)) return !isTubeSettled(entry, record)
+  if (data.event === 'bleeding') return isStillBleeding(entry, record)
   if (data.event === 'wrong cannula' && data.outcome !== 'not settled') return !isRefitted(at, record)
   return !record
     .since(observationSets, at)
@@ -86,13 +87,9 @@ function isOpen({ data, performedAt: at }: Entry<AdverseEventData>, record: Pati
 }
 
 /** A tube went in, was charted as back, or was given up for good. */
-function isTubeSettled(at: Date, record: PatientRecord): boolean {
-  const isLater = ({ performedAt }: Entry) => performedAt > at
-  return (
-    record.since(tubeChanges, at).some(tube => isLater(tube) && tube.data.difficulty !== 'failed') ||
-    record.since(adverseEvents, at).some(entry => isLater(entry) && entry.data.tubeNow === 'in') ||
-    record.since(decannulations, at).some(isLater)
-  )
+function isTubeSettled(out: Entry<AdverseEventData>, record: PatientRecord): boolean {
+  const { performedAt: at } = out
+  return isBackIn(out, record) || record.since(decannulations, at).some(({ performedAt }) => performedAt > at)
 }
 
 /** Another inner cannula went in, by itself or with another tube. */
@@ -100,12 +97,5 @@ function isRefitted(at: Date, record: PatientRecord): boolean {
   return (
     record.since(innerCannulaActs, at).some(({ data, performedAt }) => performedAt > at && data.act !== 'unable') ||
     record.since(tubeChanges, at).some(({ data, performedAt }) => performedAt > at && data.difficulty !== 'failed')
-  )
-}
-
-function hasStopped(at: Date, record: PatientRecord): boolean {
-  return (
-    record.since(suctions, at).some(({ data, performedAt }) => performedAt > at && data.blood === 'none') ||
-    record.since(stomaChecks, at).some(({ data, performedAt }) => performedAt > at && data.bleeding === 'none')
   )
 }

@@ -77,6 +77,44 @@ test.each([
   expect(problemsOf({ ...own, reviewOn })).toEqual(expected)
 })
 
+const band: KnownNames = {
+  settings: [
+    numberSetting({ ...about, name: 'band-low', label: 'Lower', personal: true, notAbove: 'band-high' }),
+    numberSetting({ ...about, name: 'band-high', label: 'Upper', personal: true, notBelow: 'band-low', default: 10 }),
+  ],
+  tasks: [],
+}
+
+test.each<[string, CarePlanData, readonly CarePlanData[], readonly string[]]>([
+  ['a lower end at the upper one', { ...own, setting: 'band-low', value: 10 }, [], []],
+  [
+    'a lower end above the upper one',
+    { ...own, setting: 'band-low', value: 10.5 },
+    [],
+    ['value: Lower: at most 10 h, the upper of this patient'],
+  ],
+  [
+    'an upper end below the lower one',
+    { ...own, setting: 'band-high', value: 7.5 },
+    [],
+    ['value: Upper: at least 8 h, the lower of this patient'],
+  ],
+  [
+    'an upper end given back below an own lower one',
+    { ...back, setting: 'band-high' },
+    [
+      { ...own, setting: 'band-high', value: 12 },
+      { ...own, setting: 'band-low', value: 11 },
+    ],
+    ['step: Upper: at least 11 h, the lower of this patient'],
+  ],
+])('a band keeps its order: %s', (_, plan, before, expected) => {
+  const entries = before.map((data, i) => anEntry(carePlans, `09:0${i}`, data))
+  const personal = Object.fromEntries(before.map(({ setting, value = 0 }) => [setting, value]))
+  const found = carePlan.problems?.(plan, aContext(entries, '12:00', { personal }), band)
+  expect(found?.map(({ field, message }) => `${field}: ${message}`)).toEqual(expected)
+})
+
 test.each(['ward-interval', 'strict', 'not-a-setting'])('%s cannot be set for one patient', setting => {
   expect(problemsOf({ ...own, setting })).toEqual(['setting: Choose a setting that may be set for one patient'])
 })

@@ -1,7 +1,7 @@
 import { showDay } from '../../time/display.ts'
 import { localDay } from '../../time/zone.ts'
 import { type CareContext, careKind, type FormProblem, type KnownNames, wordsOf } from '../kind.ts'
-import type { AnySetting } from '../policy.ts'
+import type { AnySetting, SettingValue } from '../policy.ts'
 import { sentence } from '../sentence.ts'
 import type { Warning } from '../warning.ts'
 import { personalValues } from './personal-values.ts'
@@ -40,10 +40,36 @@ function carePlanSentence({ setting, step, value, reviewOn, reason }: CarePlanDa
 function planProblems(data: CarePlanData, context: CareContext, known: KnownNames): readonly FormProblem[] {
   const setting = known.settings.find(({ name, personal }) => personal && name === data.setting)
   if (!setting) return [{ field: 'setting', message: 'Choose a setting that may be set for one patient' }]
-  if (data.step === 'set own value') return [...rangeProblem(setting, data), ...reviewProblem(data, context)]
-  return personalValues(context.record).some(value => value.setting === setting.name)
-    ? []
-    : [{ field: 'step', message: `This patient has no own value for ${wordsOf(setting.name).toLowerCase()}` }]
+  if (data.step === 'set own value') {
+    return [
+      ...rangeProblem(setting, data),
+      ...bandProblem({ setting, value: data.value, field: 'value' }, context, known),
+      ...reviewProblem(data, context),
+    ]
+  }
+  if (!personalValues(context.record).some(value => value.setting === setting.name)) {
+    return [{ field: 'step', message: `This patient has no own value for ${wordsOf(setting.name).toLowerCase()}` }]
+  }
+  const value = context.values.policy.values[setting.name] ?? setting.default
+  return bandProblem({ setting, value, field: 'step' }, context, known)
+}
+
+/** The lower end of a band may not pass the upper one, whichever of them is set: every value would then be outside. */
+function bandProblem(
+  plan: { readonly setting: AnySetting; readonly value: SettingValue | undefined; readonly field: string },
+  context: CareContext,
+  known: KnownNames,
+): readonly FormProblem[] {
+  const { setting, value, field } = plan
+  if (typeof value !== 'number') return []
+  const end = known.settings.find(({ name }) => name === setting.notAbove || name === setting.notBelow)
+  const limit = end && context.values.shown(end)
+  if (typeof limit !== 'number' || !end) return []
+  const isAbove = end.name === setting.notAbove && value > limit
+  const isBelow = end.name === setting.notBelow && value < limit
+  if (!isAbove && !isBelow) return []
+  const words = `${isAbove ? 'at most' : 'at least'} ${limit} ${setting.unit}, the ${end.label.toLowerCase()} of this patient`
+  return [{ field, message: `${setting.label}: ${words}` }]
 }
 
 function rangeProblem({ label, unit, min, max }: AnySetting, { value }: CarePlanData): readonly FormProblem[] {

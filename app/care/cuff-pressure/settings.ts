@@ -4,6 +4,7 @@ const GLASGOW = 'NHS Greater Glasgow and Clyde, management of the tracheostomy c
 
 export const cuffUpper = numberSetting({
   name: 'cuff-pressure-upper-limit',
+  notBelow: 'cuff-pressure-lower-limit',
   label: 'Cuff pressure, upper limit',
   unit: 'cmH2O',
   default: 30,
@@ -19,6 +20,7 @@ export const cuffUpper = numberSetting({
 
 export const cuffLower = numberSetting({
   name: 'cuff-pressure-lower-limit',
+  notAbove: 'cuff-pressure-upper-limit',
   label: 'Cuff pressure, lower limit',
   unit: 'cmH2O',
   default: 20,

@@ -103,7 +103,8 @@ const notLocked: Rule = data =>
       ]
     : []
 
-const noSpare: Rule = data =>
+/** No matching spare lies at the bedside. */
+export const noSpare: Rule = data =>
   data.spare === 'no'
     ? [
         {
@@ -124,5 +125,4 @@ export const fitRules: readonly FitRule[] = [
   { warns: notChecked, isSettledBy: always },
   { warns: reused, isSettledBy: putsBack },
   { warns: notLocked, isSettledBy: data => data.locked !== undefined },
-  { warns: noSpare, isSettledBy: always },
 ]

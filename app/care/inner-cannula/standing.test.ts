@@ -1,4 +1,6 @@
 import { expect, test } from 'vitest'
+import { wholeKit } from '../bedside-kit/examples.ts'
+import { type KitData, kitChecks } from '../bedside-kit/schema.ts'
 import type { StoredEntry } from '../kind.ts'
 import { aContext, anEntry, aRemoval, aTube } from '../make.ts'
 import { type TubeData, tubeChanges } from '../tube-change/schema.ts'
@@ -94,6 +96,14 @@ test('no spare at the last check stands, with when it was charted', () => {
     { name: 'inner-cannula-no-spare', cause: 'No matching spare at the bedside. Charted 10-Mar-2026 11:20.' },
   ])
   expect(standing([aTubeIn(), anAct('11:20', { spare: 'no' }), anAct('13:00')])).toEqual([])
+})
+
+test('no spare is settled by a later check of the kit that found everything, not by one that did not', () => {
+  const noSpare = [aTubeIn(), anAct('11:20', { spare: 'no' })]
+  const lacking: KitData = { ...wholeKit, complete: 'no', missing: ['gel'], owner: 'T. Okafor' }
+  expect(names([...noSpare, anEntry(kitChecks, '11:40', wholeKit)])).toEqual([])
+  expect(names([...noSpare, anEntry(kitChecks, '11:40', lacking)])).toEqual(['inner-cannula-no-spare'])
+  expect(names([...noSpare, anEntry(kitChecks, '11:00', wholeKit)])).toEqual(['inner-cannula-no-spare'])
 })
 
 test('a cannula of another tube stands until one is charted that matches', () => {

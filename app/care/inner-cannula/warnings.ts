@@ -1,3 +1,4 @@
+import { lastComplete } from '../bedside-kit/gaps.ts'
 import { BREATHING_SOURCE, breathingAction } from '../emergency.ts'
 import type { CareContext } from '../kind.ts'
 import { standsSince } from '../standing.ts'
@@ -6,7 +7,7 @@ import { lowSaturation } from '../suction/saturation.ts'
 import { tubeInPlace } from '../tube-change/tube.ts'
 import type { Warning } from '../warning.ts'
 import { actsOnTube, wasSeen } from './acts.ts'
-import { absence, absentWarning, fitRules } from './fit.ts'
+import { absence, absentWarning, fitRules, noSpare } from './fit.ts'
 import { narrowed, repeatedBlock, shorterInterval, standingBlocks, stillNarrowed } from './narrowing.ts'
 import type { InnerCannulaData } from './schema.ts'
 
@@ -16,6 +17,7 @@ export function innerCannulaWarnings(data: InnerCannulaData, context: CareContex
     ...notWell(data, context),
     ...blood(data, context),
     ...fitRules.flatMap(rule => rule.warns(data, context)),
+    ...noSpare(data, context),
     ...narrowed(data, context),
     ...repeatedBlock(data, context),
   ]
@@ -47,10 +49,18 @@ export function standingInnerCannulaWarnings(context: CareContext): readonly War
     ...standsSince(acts, { isSettledBy: wasSeen, warns: blood }, context),
     ...neverFitted(context),
     ...fitRules.flatMap(rule => standsSince(acts, rule, context)),
+    ...spareMissing(context),
     ...stillNarrowed(context),
     ...standingBlocks(context),
     ...shorterInterval(context),
   ]
+}
+
+/** No spare at the last act stands until an act found one, or a check of the kit found everything there. */
+function spareMissing(context: CareContext): readonly Warning[] {
+  const whole = lastComplete(context.record)?.performedAt
+  const acts = actsOnTube(context.record).filter(({ performedAt }) => !whole || performedAt >= whole)
+  return standsSince(acts, { isSettledBy: () => true, warns: noSpare }, context)
 }
 
 /** A dual tube that went in without an inner cannula, where no act says that one was fitted or tried. */

@@ -1,11 +1,11 @@
-import { showDate } from '../../time/display.ts'
 import { hours } from '../../time/duration.ts'
 import { type Clock, intervalClock, noClock, shiftClock, suspended } from '../clock.ts'
 import { decannulations } from '../decannulation/schema.ts'
 import type { CareContext, Entry, TaskRule } from '../kind.ts'
 import { tubeChanges } from '../tube-change/schema.ts'
-import { sutureRemoval, withoutTube } from '../tube-change/tasks.ts'
-import { tubeInPlace, tubeOutSince } from '../tube-change/tube.ts'
+import { absenceWords, sutureRemoval, withoutTube } from '../tube-change/tasks.ts'
+import { tubeInPlace } from '../tube-change/tube.ts'
+import { tubeAbsence } from '../tube-change/tube-absence.ts'
 import { sitesLeftOut, stomaChecks } from './schema.ts'
 import { dressingInterval } from './settings.ts'
 
@@ -54,11 +54,10 @@ export function isLaryngectomy({ record }: Pick<CareContext, 'record'>): boolean
 }
 
 function withoutOpening({ record, ward }: CareContext): Clock {
-  const since = tubeOutSince(record)
-  if (!since) return noClock
-  return suspended(
-    `tube out for good since ${showDate(since, ward.zone)}; look at the opening daily until it has closed`,
-  )
+  const absence = tubeAbsence(record)
+  if (!absence) return noClock
+  const words = absenceWords(absence, ward.zone)
+  return suspended(absence.why === 'came out' ? words : `${words}; look at the opening daily until it has closed`)
 }
 
 /** The latest act that put on a fresh dressing. A tube that was in place on arrival is not an act. */

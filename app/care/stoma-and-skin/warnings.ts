@@ -1,7 +1,7 @@
 import type { CareContext } from '../kind.ts'
 import { tubeInPlace } from '../tube-change/tube.ts'
 import type { Warning } from '../warning.ts'
-import { fixingWarnings } from './fixing.ts'
+import { fixingWarnings, looseSutures } from './fixing.ts'
 import { openingWarnings } from './opening.ts'
 import { type StomaData, stomaChecks } from './schema.ts'
 import { skinWarnings, standingSkinWarnings } from './skin.ts'
@@ -12,18 +12,18 @@ export function stomaWarnings(data: StomaData, context: CareContext): readonly W
 }
 
 /**
- * What stands until a later check: the opening as last seen, skin damage not cleared since, ties and sutures unless the tube has
- * been changed since.
+ * What stands until a later check: the opening as last seen, skin damage not cleared since, loose sutures unless the tube has been
+ * changed since. How the ties fit stands with their own kind, which knows the looks of both forms.
  */
 export function standingStomaWarnings(context: CareContext): readonly Warning[] {
   const last = context.record.latest(stomaChecks)
   if (!last) return []
   const then = { ...context, now: last.performedAt }
   const tube = tubeInPlace(context.record)
-  const tubeChangedSince = tube !== undefined && tube.performedAt > last.performedAt
+  const tubeInPlaceSince = tube !== undefined && tube.performedAt <= last.performedAt
   return [
     ...openingWarnings(last.data, then),
-    ...(tubeChangedSince ? [] : fixingWarnings(last.data, then)),
+    ...(tubeInPlaceSince ? looseSutures(last.data) : []),
     ...standingSkinWarnings(context),
   ]
 }

@@ -1,4 +1,6 @@
 import { expect, test } from 'vitest'
+import { aboveCuffSuctions } from '../above-cuff-suction/schema.ts'
+import { type AdverseEventData, adverseEvents } from '../adverse-event/schema.ts'
 import { replacedWithNew } from '../inner-cannula/examples.ts'
 import { innerCannulaActs } from '../inner-cannula/schema.ts'
 import type { StoredEntry } from '../kind.ts'
@@ -19,6 +21,11 @@ const stoma = (when: string, bleeding: 'none' | 'spotting' | 'fresh ooze') =>
   anEntry(stomaChecks, when, { ...usualCheck, appearance: ['redness'], bleeding })
 const tube = (when: string, overrides: Partial<TubeData> = {}) => anEntry(tubeChanges, when, aTube(overrides))
 
+const drawn = (when: string, blood: 'none' | 'fresh') =>
+  anEntry(aboveCuffSuctions, when, { volumeMl: 4, port: 'open', blood })
+const event = (when: string, outcome: AdverseEventData['outcome']) =>
+  anEntry(adverseEvents, when, { event: 'bleeding', done: ['help called'], outcome, told: ['doctor'] })
+
 const seen = (entries: readonly StoredEntry[], now = '14:00') =>
   bleedWatch(aContext([first, ...entries], now)).map(({ name, level }) => `${name} ${level}`)
 
@@ -32,6 +39,11 @@ test.each<[string, readonly StoredEntry[], readonly string[]]>([
   ['a bleed on the inner cannula that has stopped', [cannula('11:00', 'fresh'), cannula('12:00', 'none')], watched],
   ['a bleed at the stoma that has stopped', [stoma('11:00', 'fresh ooze'), stoma('12:00', 'none')], watched],
   ['a bleed at a tube change, from then on', [tube('11:00', { bleeding: 'active' })], watched],
+  ['a bleed above the cuff that has stopped', [drawn('11:00', 'fresh'), drawn('12:00', 'none')], watched],
+  ['nothing while the red of a bleed above the cuff stands', [drawn('11:00', 'fresh')], []],
+  ['a bleed charted as an event that was over', [event('11:00', 'recovered')], watched],
+  ['nothing while the red of that event stands', [event('11:00', 'not settled')], []],
+  ['an event that a later look found over', [event('11:00', 'not settled'), suctioned('12:00', 'none')], watched],
   [
     'a bleed before the tube was changed, whose red went with the tube',
     [suctioned('11:00', 'fresh'), tube('12:00')],

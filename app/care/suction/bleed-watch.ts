@@ -1,7 +1,10 @@
 import { showDateTime } from '../../time/display.ts'
 import { earlier, hours } from '../../time/duration.ts'
+import { aboveCuffSuctions } from '../above-cuff-suction/schema.ts'
+import { isStillBleeding } from '../adverse-event/bleed.ts'
+import { adverseEvents } from '../adverse-event/schema.ts'
 import { innerCannulaActs } from '../inner-cannula/schema.ts'
-import type { AnyCharted, CareContext, DataOf, Entry } from '../kind.ts'
+import type { AnyCharted, CareContext, DataOf, Entry, PatientRecord } from '../kind.ts'
 import { stomaChecks } from '../stoma-and-skin/schema.ts'
 import { tubeChanges } from '../tube-change/schema.ts'
 import { tubeInPlace } from '../tube-change/tube.ts'
@@ -52,6 +55,7 @@ function lastBleeds({ record }: CareContext): readonly Bleed[] {
   const onTube = ({ performedAt }: Entry) => tube !== undefined && performedAt >= tube.performedAt
   return [
     ...lastOf(suctions, ({ blood }) => blood, onTube),
+    ...lastOf(aboveCuffSuctions, ({ blood }) => blood, onTube),
     ...lastOf(innerCannulaActs, ({ blood }) => blood, onTube),
     ...lastOf(
       stomaChecks,
@@ -63,7 +67,14 @@ function lastBleeds({ record }: CareContext): readonly Bleed[] {
       ({ bleeding }) => bleeding,
       () => false,
     ),
+    ...lastEvent(record),
   ]
+}
+
+/** A bleed charted as an event was fresh by its name; one that was settled at once is kept in sight from then on. */
+function lastEvent(record: PatientRecord): readonly Bleed[] {
+  const entry = record.latest(adverseEvents, ({ event, outcome }) => event === 'bleeding' && outcome !== 'died')
+  return entry ? [{ entry, stands: isStillBleeding(entry, record) }] : []
 }
 
 /** Fresh, heavy or active, as each kind words it; streaks, spotting and old blood are not. */

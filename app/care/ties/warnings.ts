@@ -1,39 +1,15 @@
 import type { CareContext } from '../kind.ts'
 import { standsSince } from '../standing.ts'
 import { stomaChecks } from '../stoma-and-skin/schema.ts'
-import { tiesMostFingers } from '../stoma-and-skin/settings.ts'
 import { tubeInPlace } from '../tube-change/tube.ts'
 import type { Warning } from '../warning.ts'
-import { lastTieLook, type TieLook } from './looks.ts'
+import { fitWarnings } from './fit.ts'
+import { lastTieLook } from './looks.ts'
 import { type TieData, tieChecks } from './schema.ts'
 
 /** What a look at the ties asks people to notice. Silent when no tube is in. */
 export function tieWarnings(data: TieData, context: CareContext): readonly Warning[] {
   return tubeInPlace(context.record) ? [...fitWarnings(data.fingers, context), ...skinWarnings(data)] : []
-}
-
-const count: Readonly<Record<TieLook['fingers'], number | undefined>> = {
-  none: 0,
-  one: 1,
-  two: 2,
-  'more than two': 3,
-  'no ties': undefined,
-}
-
-/** Ties that no finger fits under, or more fingers than the policy allows. */
-export function fitWarnings(fingers: TieLook['fingers'], { values }: Pick<CareContext, 'values'>): readonly Warning[] {
-  const fit = count[fingers]
-  const most = values.of(tiesMostFingers)
-  if (fit === undefined || (fit >= 1 && fit <= most)) return []
-  return [
-    {
-      name: fit === 0 ? 'ties-tight' : 'ties-loose',
-      level: 'amber',
-      action: `Re-fit ties so ${most === 1 ? 'one finger fits' : 'one to two fingers fit'}.`,
-      cause: fit === 0 ? 'Tight ties press on skin and veins.' : 'Loose ties let the tube move out.',
-      source: tiesMostFingers.source.says,
-    },
-  ]
 }
 
 function skinWarnings({ skin }: TieData): readonly Warning[] {

@@ -5,7 +5,8 @@ import type { Warning } from '../warning.ts'
 import { dwellNotice, dwellStrongNotice } from './dwell-settings.ts'
 import { suturesOutBy } from './settings.ts'
 import { suturesIn } from './tasks.ts'
-import { dwellLimit, insertedOn, type TubeEntry, tubeInPlace, tubeOutSince } from './tube.ts'
+import { dwellLimit, insertedOn, type TubeEntry, tubeInPlace } from './tube.ts'
+import { tubeAbsence } from './tube-absence.ts'
 import { dayWords, standingDisplacements, standingTubeOut } from './tube-out.ts'
 
 /** What stands by the tubes charted so far: one that did not go in, dwell, sutures; or that none is charted. */
@@ -20,7 +21,7 @@ export function standingTubeWarnings(context: CareContext): readonly Warning[] {
 
 /** A laryngectomy may have no tube at all; of anybody else here it says that no tube care can be due. */
 function notCharted({ record }: CareContext): readonly Warning[] {
-  if (tubeOutSince(record) || record.patient.upperAirway === 'not open') return []
+  if (tubeAbsence(record) || record.patient.upperAirway === 'not open') return []
   return [
     {
       name: 'tube-not-charted',

@@ -1,5 +1,5 @@
-import { showDate } from '../../time/display.ts'
-import { addDays } from '../../time/zone.ts'
+import { showDate, showDateTime } from '../../time/display.ts'
+import { addDays, type Zone } from '../../time/zone.ts'
 import { type Clock, dayClock, noClock, suspended } from '../clock.ts'
 import type { CareContext, TaskRule } from '../kind.ts'
 import { hasSutures, stomaChecks } from '../stoma-and-skin/schema.ts'
@@ -12,12 +12,20 @@ import {
   routineFirstChange,
   suturesOutBy,
 } from './settings.ts'
-import { dwellLimit, insertedOn, isFirstTube, tubeInPlace, tubeOutSince } from './tube.ts'
+import { dwellLimit, insertedOn, isFirstTube, tubeInPlace } from './tube.ts'
+import { type TubeAbsence, tubeAbsence } from './tube-absence.ts'
 
-/** What a clock says when there is no tube: suspended after removal for good, silent when none was ever charted. */
-export function withoutTube(context: CareContext): Clock {
-  const since = tubeOutSince(context.record)
-  return since ? suspended(`tube out for good since ${showDate(since, context.ward.zone)}`) : noClock
+/** What a clock says when there is no tube: suspended once it came out or was removed, silent when none was ever charted. */
+export function withoutTube({ record, ward }: CareContext): Clock {
+  const absence = tubeAbsence(record)
+  return absence ? suspended(absenceWords(absence, ward.zone)) : noClock
+}
+
+/** `tube came out 10-Mar-2026 09:00, not back`, `tube out for good since 10-Mar-2026`. */
+export function absenceWords({ why, since }: TubeAbsence, zone: Zone): string {
+  return why === 'came out'
+    ? `tube came out ${showDateTime(since, zone)}, not back`
+    : `tube out for good since ${showDate(since, zone)}`
 }
 
 /** The next change of the tube, by the date that its limit sets. */

@@ -9,7 +9,6 @@ import {
   stomaAgeDays,
   stomaMadeOn,
   tubeInPlace,
-  tubeOutSince,
   tubeTract,
   tubeWords,
   workingIdMm,
@@ -31,12 +30,6 @@ test.each<[string, readonly StoredEntry[], Date | undefined]>([
   ['the one put back', [first, aRemoval('09:00'), tube('10:00')], at('10:00')],
 ])('the tube in place: %s', (_, entries, expected) => {
   expect(tubeInPlace(contextOf(...entries).record)?.performedAt).toEqual(expected)
-})
-
-test('a tube is out since its removal, until one goes in', () => {
-  expect(tubeOutSince(contextOf(first, aRemoval('09:00')).record)).toEqual(at('09:00'))
-  expect(tubeOutSince(contextOf(first, aRemoval('09:00'), tube('10:00')).record)).toBeUndefined()
-  expect(tubeOutSince(contextOf().record)).toBeUndefined()
 })
 
 test.each([

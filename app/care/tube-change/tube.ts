@@ -1,26 +1,19 @@
 import { changeByDay } from '../../clinical/dwell.ts'
 import type { Tract } from '../../clinical/tract.ts'
 import { addDays, daysBetween, type LocalDay, localDay, startOfDay } from '../../time/zone.ts'
-import { decannulations } from '../decannulation/schema.ts'
 import type { CareContext, Entry, PatientRecord } from '../kind.ts'
 import type { Setting } from '../policy.ts'
 import { isThroughTube, suctions } from '../suction/schema.ts'
 import { dwellDual, dwellSingle, dwellSingleHeavy, heavyEpisodes } from './dwell-settings.ts'
 import { type TubeData, tubeChanges } from './schema.ts'
+import { lastTube, tubeAbsence } from './tube-absence.ts'
 
 export type { TubeData } from './schema.ts'
 export type TubeEntry = Entry<TubeData>
 
-/** The tube in place: the latest change that did not fail, unless the tube was taken out for good after it. */
+/** The tube in place: the latest change that did not fail, unless the tube was taken out for good or came out after it. */
 export function tubeInPlace(record: PatientRecord): TubeEntry | undefined {
-  const change = record.latest(tubeChanges, data => data.difficulty !== 'failed')
-  const removal = record.latest(decannulations)
-  return change && removal && removal.performedAt >= change.performedAt ? undefined : change
-}
-
-/** When the tube was taken out for good, if no tube has gone in since. */
-export function tubeOutSince(record: PatientRecord): Date | undefined {
-  return tubeInPlace(record) ? undefined : record.latest(decannulations)?.performedAt
+  return tubeAbsence(record) ? undefined : lastTube(record)
 }
 
 /** Local day on which the tube in place went in: day 0 of its dwell. */

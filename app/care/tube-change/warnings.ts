@@ -12,6 +12,7 @@ import type { TubeData } from './schema.ts'
 import { firstChangeHardLimit } from './settings.ts'
 import { firstChangeDays } from './tasks.ts'
 import { insertedAt, insertedOn, isFirstTube, tubeInPlace, tubeWords } from './tube.ts'
+import { lastTube } from './tube-absence.ts'
 import { dayWords, displacedAgain, tubeOut } from './tube-out.ts'
 
 const EMERGENCY = ['blocked', 'displaced', 'fault']
@@ -116,16 +117,16 @@ function datesInDoubt({ insertedOn: on, stomaMadeOn: made }: TubeData, { now, wa
   ]
 }
 
-/** The usual change: the same tube again. Findings and people, and what is read on this one, are left to fill in. */
-export function sameTubeAgain(context: CareContext) {
-  const tube = tubeInPlace(context.record)?.data
+/** The usual change: the same tube again, or the one that came out. Findings and people, and what is read on this one, are left to fill in. */
+export function sameTubeAgain({ record }: CareContext) {
+  const tube = lastTube(record)?.data
   if (!tube) return undefined
   const { line, sizeSystem, size, idWithInner, idWithoutInner, od, lengthMm, cuff, construction } = tube
   const { fenestrated, connector, flange, longestUseDays } = tube
   const innerCannula = tube.innerCannula === 'none' ? undefined : tube.innerCannula
   const answers = { line, sizeSystem, size, idWithInner, idWithoutInner, od, lengthMm, cuff, construction }
   return {
-    words: `Same tube as now: ${tubeWords(tube)}`,
+    words: `Same tube as ${tubeInPlace(record) ? 'now' : 'the one that came out'}: ${tubeWords(tube)}`,
     answers: { ...answers, innerCannula, fenestrated, connector, flange, longestUseDays },
   }
 }
