@@ -82,6 +82,22 @@ CREATE TABLE `bed_moves` (
   CONSTRAINT `bed_moves_stay` FOREIGN KEY (`stay_id`) REFERENCES `stays` (`id`)
 ) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
 
+CREATE TABLE `catalogue_changes` (
+  `id` bigint(20) unsigned NOT NULL AUTO_INCREMENT,
+  `subject` varchar(16) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  `subject_id` uuid NOT NULL,
+  `what` varchar(64) NOT NULL COMMENT 'in words: tube added, tube retired',
+  `changed_by` uuid NOT NULL,
+  `changed_at` datetime(3) NOT NULL DEFAULT utc_timestamp(3),
+  `old_values` longtext CHARACTER SET utf8mb4 COLLATE utf8mb4_bin DEFAULT NULL COMMENT 'only what changed; null: it is new' CHECK (json_valid(`old_values`)),
+  `new_values` longtext CHARACTER SET utf8mb4 COLLATE utf8mb4_bin NOT NULL CHECK (json_valid(`new_values`)),
+  PRIMARY KEY (`id`),
+  KEY `catalogue_changes_of_subject` (`subject_id`,`id`),
+  KEY `catalogue_changes_changed_by` (`changed_by`),
+  CONSTRAINT `catalogue_changes_changed_by` FOREIGN KEY (`changed_by`) REFERENCES `users` (`id`),
+  CONSTRAINT `catalogue_changes_subject_is_known` CHECK (`subject` in ('line','tube','inner cannula'))
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
 CREATE TABLE `drafts` (
   `user_id` uuid NOT NULL,
   `path` varchar(200) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
@@ -128,6 +144,35 @@ CREATE TABLE `entries` (
   CONSTRAINT `entries_correct_with_a_reason` CHECK (`supersedes_id` is null or `reason` is not null and char_length(trim(`reason`)) > 0),
   CONSTRAINT `entries_have_happened` CHECK (`performed_at` <= `recorded_at` + interval 2 minute),
   CONSTRAINT `entries_are_witnessed_by_another` CHECK (`witness_id` is null or `witness_id` <> `recorded_by`)
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
+CREATE TABLE `inner_cannulas` (
+  `id` uuid NOT NULL,
+  `line_id` uuid NOT NULL,
+  `size` varchar(12) NOT NULL COMMENT 'as on the label',
+  `used_as` varchar(16) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  `fenestrated` tinyint(1) NOT NULL,
+  `pack_size` smallint(5) unsigned NOT NULL,
+  `gtin` char(14) CHARACTER SET ascii COLLATE ascii_bin DEFAULT NULL,
+  `retired_at` datetime(3) DEFAULT NULL,
+  `version` int(10) unsigned NOT NULL DEFAULT 1 COMMENT 'raised by each edit, so that two at once are noticed',
+  PRIMARY KEY (`id`),
+  UNIQUE KEY `inner_cannulas_described` (`line_id`,`size`,`used_as`,`fenestrated`,`pack_size`),
+  UNIQUE KEY `inner_cannulas_gtin` (`gtin`),
+  CONSTRAINT `inner_cannulas_line` FOREIGN KEY (`line_id`) REFERENCES `tube_lines` (`id`),
+  CONSTRAINT `inner_cannulas_have_a_size` CHECK (char_length(trim(`size`)) > 0),
+  CONSTRAINT `inner_cannulas_use_is_known` CHECK (`used_as` in ('disposable','reusable')),
+  CONSTRAINT `inner_cannulas_come_in_packs` CHECK (`pack_size` > 0),
+  CONSTRAINT `inner_cannulas_gtin_is_digits` CHECK (`gtin` is null or `gtin` regexp '^[0-9]{14}$')
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
+CREATE TABLE `inner_cannula_fits` (
+  `tube_id` uuid NOT NULL,
+  `inner_cannula_id` uuid NOT NULL,
+  PRIMARY KEY (`tube_id`,`inner_cannula_id`),
+  KEY `inner_cannula_fits_cannula` (`inner_cannula_id`,`tube_id`),
+  CONSTRAINT `inner_cannula_fits_inner_cannula` FOREIGN KEY (`inner_cannula_id`) REFERENCES `inner_cannulas` (`id`),
+  CONSTRAINT `inner_cannula_fits_tube` FOREIGN KEY (`tube_id`) REFERENCES `tubes` (`id`)
 ) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
 
 CREATE TABLE `installation` (
@@ -259,6 +304,54 @@ CREATE TABLE `stays` (
   CONSTRAINT `stays_end_after_they_start` CHECK (`discharged_at` is null or `discharged_at` >= `admitted_at`)
 ) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
 
+CREATE TABLE `tubes` (
+  `id` uuid NOT NULL,
+  `line_id` uuid NOT NULL,
+  `size` varchar(12) NOT NULL COMMENT 'as on the label',
+  `size_system` varchar(16) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  `construction` varchar(8) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  `inner_cannula` varchar(16) CHARACTER SET ascii COLLATE ascii_bin DEFAULT NULL COMMENT 'null: single cannula',
+  `id_with_inner` decimal(4,1) DEFAULT NULL COMMENT 'mm; null: single cannula',
+  `id_without_inner` decimal(4,1) NOT NULL COMMENT 'mm',
+  `od` decimal(4,1) NOT NULL COMMENT 'mm',
+  `length_mm` decimal(4,1) NOT NULL,
+  `cuff` varchar(8) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  `fenestrated` tinyint(1) NOT NULL,
+  `connector` varchar(8) CHARACTER SET ascii COLLATE ascii_bin NOT NULL COMMENT 'where the 15 mm connector sits',
+  `flange` varchar(16) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  `longest_use_days` smallint(5) unsigned DEFAULT NULL COMMENT 'null: the label gives none',
+  `gtin` char(14) CHARACTER SET ascii COLLATE ascii_bin DEFAULT NULL,
+  `insertion_aid` tinyint(1) NOT NULL COMMENT 'an obturator comes with it',
+  `reusable_inner_cannulas` tinyint(3) unsigned NOT NULL COMMENT 'how many come with it',
+  `retired_at` datetime(3) DEFAULT NULL,
+  `version` int(10) unsigned NOT NULL DEFAULT 1 COMMENT 'raised by each edit, so that two at once are noticed',
+  `sold_with` varchar(16) CHARACTER SET ascii COLLATE ascii_bin GENERATED ALWAYS AS (coalesce(`inner_cannula`,'none')) VIRTUAL,
+  PRIMARY KEY (`id`),
+  UNIQUE KEY `tubes_gtin` (`gtin`),
+  UNIQUE KEY `tubes_described` (`line_id`,`size`,`size_system`,`construction`,`sold_with`,`cuff`,`fenestrated`,`connector`,`flange`,`length_mm`),
+  KEY `tubes_by_size` (`size_system`,`size`),
+  CONSTRAINT `tubes_line` FOREIGN KEY (`line_id`) REFERENCES `tube_lines` (`id`),
+  CONSTRAINT `tubes_have_a_size` CHECK (char_length(trim(`size`)) > 0),
+  CONSTRAINT `tubes_size_system_is_known` CHECK (`size_system` in ('ISO 5366','Jackson')),
+  CONSTRAINT `tubes_are_single_or_dual` CHECK (`construction` = 'single' and `inner_cannula` is null and `id_with_inner` is null or `construction` = 'dual' and `inner_cannula` is not null and `inner_cannula` in ('disposable','reusable') and `id_with_inner` is not null),
+  CONSTRAINT `tubes_walls_nest` CHECK (`od` > `id_without_inner` and (`id_with_inner` is null or `id_with_inner` > 0 and `id_without_inner` > `id_with_inner`)),
+  CONSTRAINT `tubes_have_a_length` CHECK (`length_mm` > 0),
+  CONSTRAINT `tubes_cuff_is_known` CHECK (`cuff` in ('none','air','water','foam')),
+  CONSTRAINT `tubes_connector_is_known` CHECK (`connector` in ('outer','inner','none')),
+  CONSTRAINT `tubes_flange_is_known` CHECK (`flange` in ('fixed','adjustable')),
+  CONSTRAINT `tubes_last_a_day` CHECK (`longest_use_days` is null or `longest_use_days` > 0),
+  CONSTRAINT `tubes_gtin_is_digits` CHECK (`gtin` is null or `gtin` regexp '^[0-9]{14}$')
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
+CREATE TABLE `tube_lines` (
+  `id` uuid NOT NULL,
+  `name` varchar(80) NOT NULL COMMENT 'as printed on the flange',
+  `maker` varchar(80) NOT NULL,
+  PRIMARY KEY (`id`),
+  UNIQUE KEY `tube_lines_name` (`name`),
+  CONSTRAINT `tube_lines_are_named` CHECK (char_length(trim(`name`)) > 0 and char_length(trim(`maker`)) > 0)
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
 CREATE TABLE `users` (
   `id` uuid NOT NULL,
   `name` varchar(120) NOT NULL,
@@ -322,6 +415,12 @@ CREATE TRIGGER IF NOT EXISTS access_log_refuses_delete BEFORE DELETE ON access_l
 
 CREATE TRIGGER IF NOT EXISTS access_log_refuses_update BEFORE UPDATE ON access_log FOR EACH ROW
     SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'access_log is append-only';
+
+CREATE TRIGGER IF NOT EXISTS catalogue_changes_refuse_delete BEFORE DELETE ON catalogue_changes
+    FOR EACH ROW SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'catalogue_changes is append-only';
+
+CREATE TRIGGER IF NOT EXISTS catalogue_changes_refuse_update BEFORE UPDATE ON catalogue_changes
+    FOR EACH ROW SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'catalogue_changes is append-only';
 
 CREATE TRIGGER IF NOT EXISTS entries_are_numbered BEFORE INSERT ON entries FOR EACH ROW
 BEGIN

@@ -35,6 +35,16 @@ const nursing = { nurse: 'own wards', 'charge nurse': 'own wards' } as const sat
 
 const leading = { 'charge nurse': 'own wards', 'tracheostomy specialist': 'own wards' } as const satisfies Allowance
 
+const everybody = {
+  nurse: 'everywhere',
+  'respiratory therapist': 'everywhere',
+  'charge nurse': 'everywhere',
+  'tracheostomy specialist': 'everywhere',
+  educator: 'everywhere',
+  administrator: 'everywhere',
+  observer: 'everywhere',
+} as const satisfies Allowance
+
 /**
  * Who may do what; what is not written here is refused.
  * An educator works with people, policy and measures and needs no patient, so sees none. An administrator keeps people,
@@ -71,6 +81,7 @@ const permissions = {
   },
   'manage people': { administrator: 'everywhere' },
   'manage wards': { administrator: 'everywhere' },
+  'see catalogue': everybody,
   'manage catalogue': { administrator: 'everywhere', 'tracheostomy specialist': 'everywhere' },
 } as const satisfies Record<string, Allowance>
 

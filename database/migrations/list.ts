@@ -13,6 +13,10 @@ import { recordChanges } from './0015-record-changes.ts'
 import { accessGrants } from './0020-access-grants.ts'
 import { drafts } from './0021-drafts.ts'
 import { installation } from './0030-installation.ts'
+import { tubeLines } from './0040-tube-lines.ts'
+import { tubes } from './0041-tubes.ts'
+import { innerCannulas } from './0042-inner-cannulas.ts'
+import { catalogueChanges } from './0043-catalogue-changes.ts'
 import type { Migration } from './migration.ts'
 
 /** Every migration under its name, in the order in which they are applied. */
@@ -32,4 +36,8 @@ export const migrations: Record<string, Migration> = {
   '0020-access-grants': accessGrants,
   '0021-drafts': drafts,
   '0030-installation': installation,
+  '0040-tube-lines': tubeLines,
+  '0041-tubes': tubes,
+  '0042-inner-cannulas': innerCannulas,
+  '0043-catalogue-changes': catalogueChanges,
 }

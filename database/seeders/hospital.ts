@@ -2,6 +2,7 @@ import type { Zone } from '#app/time/zone.ts'
 import { alderStories } from './alder.ts'
 import { type Bedside, bedsideOf, hoursBefore, type Place } from './bedside.ts'
 import { birchStories } from './birch.ts'
+import { demoCatalogue } from './catalogue.ts'
 import { cedarStories } from './cedar.ts'
 import { changesOf, onDuty } from './changes.ts'
 import { entriesOf } from './entries.ts'
@@ -37,6 +38,7 @@ export function demoHospital(now: Date, zone: Zone): DemoHospital {
     stays: stays.map(({ stay }) => stay),
     moves: stays.flatMap(({ moves }) => moves),
     changes: stays.flatMap(({ changes }) => changes).toSorted((a, b) => a.changedAt.getTime() - b.changedAt.getTime()),
+    catalogue: demoCatalogue,
     policies: demoPolicies(now, zone, wards, specialistOf(people)),
     entries: stays.flatMap(({ entries }) => entries),
   }

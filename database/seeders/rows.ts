@@ -3,6 +3,7 @@ import type { PatientFacts, StoredEntry } from '#app/care/kind.ts'
 import type { Policy } from '#app/care/policy.ts'
 import type { PressureUnit } from '#app/clinical/units.ts'
 import type { LocalDay, Zone } from '#app/time/zone.ts'
+import type { DemoCatalogue } from './catalogue.ts'
 
 /** The demo hospital as plain rows: what is loaded, and what tests run the rules over. Moments are UTC. */
 export interface DemoHospital {
@@ -16,6 +17,7 @@ export interface DemoHospital {
   readonly moves: readonly DemoMove[]
   readonly changes: readonly DemoChange[]
   readonly policies: readonly DemoPolicy[]
+  readonly catalogue: DemoCatalogue
   readonly entries: readonly DemoEntry[]
 }
 

@@ -1,3 +1,4 @@
+import { type DemoCatalogue, demoCatalogueChanges } from './catalogue.ts'
 import type { DemoChange, DemoEntry, DemoHospital, DemoPatient, DemoPolicy } from './rows.ts'
 
 /** Rows of one table by the names of its columns. */
@@ -16,6 +17,7 @@ export function demoTables(hospital: DemoHospital, passwordHash: string): readon
     ...stayTables(hospital),
     { table: 'record_changes', rows: changes.map(changeRow) },
     { table: 'policies', rows: policies.map(policyRow) },
+    ...catalogueTables(hospital),
     { table: 'entries', rows: entries.map(entryRow) },
   ]
 }
@@ -37,6 +39,62 @@ function peopleTables({ people, wards, beds, seededAt }: DemoHospital, passwordH
     { table: 'users', rows: users },
     { table: 'ward_members', rows: members },
   ]
+}
+
+function catalogueTables({ catalogue, people }: DemoHospital): readonly TableRows[] {
+  const { lines, tubes, innerCannulas, fits } = catalogue
+  const specialist = people.find(({ role }) => role === 'tracheostomy specialist')
+  const fitRows = fits.map(({ tubeId, innerCannulaId }) => ({ tube_id: tubeId, inner_cannula_id: innerCannulaId }))
+  return [
+    { table: 'tube_lines', rows: lines },
+    { table: 'tubes', rows: tubes.map(tubeRow) },
+    { table: 'inner_cannulas', rows: innerCannulas.map(innerCannulaRow) },
+    { table: 'inner_cannula_fits', rows: fitRows },
+    { table: 'catalogue_changes', rows: specialist ? demoCatalogueChanges(catalogue, specialist.id) : [] },
+  ]
+}
+
+function tubeRow(tube: DemoCatalogue['tubes'][number]) {
+  const { id, lineId, size, construction, od, cuff, connector, flange, gtin, version } = tube
+  const numbers = {
+    id_with_inner: tube.idWithInner,
+    id_without_inner: tube.idWithoutInner,
+    od,
+    length_mm: tube.lengthMm,
+  }
+  const inner = { inner_cannula: tube.innerCannula, reusable_inner_cannulas: tube.reusableInnerCannulas }
+  const kind = {
+    size,
+    size_system: tube.sizeSystem,
+    construction,
+    cuff,
+    fenestrated: tube.fenestrated === 'yes',
+    connector,
+    flange,
+  }
+  const rest = {
+    longest_use_days: tube.longestUseDays,
+    insertion_aid: tube.insertionAid,
+    gtin,
+    retired_at: tube.retiredAt,
+    version,
+  }
+  return { id, line_id: lineId, ...kind, ...numbers, ...inner, ...rest }
+}
+
+function innerCannulaRow({
+  id,
+  lineId,
+  size,
+  use,
+  fenestrated,
+  packSize,
+  gtin,
+  retiredAt,
+  version,
+}: DemoCatalogue['innerCannulas'][number]) {
+  const kind = { size, used_as: use, fenestrated: fenestrated === 'yes', pack_size: packSize }
+  return { id, line_id: lineId, ...kind, gtin, retired_at: retiredAt, version }
 }
 
 function patientRow(patient: DemoPatient) {

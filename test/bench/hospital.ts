@@ -3,6 +3,7 @@ import { earlier, hours } from '#app/time/duration.ts'
 import { alderStories } from '#database/seeders/alder.ts'
 import { bedsideOf, type Place } from '#database/seeders/bedside.ts'
 import { birchStories } from '#database/seeders/birch.ts'
+import { demoCatalogue } from '#database/seeders/catalogue.ts'
 import { cedarStories } from '#database/seeders/cedar.ts'
 import { entriesOf } from '#database/seeders/entries.ts'
 import type { Rota } from '#database/seeders/people.ts'
@@ -47,6 +48,7 @@ export function largeHospital(now: Date): BenchHospital {
       stays: [...charts, ...others].map(({ stay }) => stay),
       moves: [],
       changes: [],
+      catalogue: demoCatalogue,
       policies: demoPolicies(now, ZONE, [first], author),
       entries: charts.flatMap(({ entries }) => latest(entries, ENTRIES_EACH)),
     },

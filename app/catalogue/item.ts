@@ -1,0 +1,103 @@
+import type { TubeData } from '../care/tube-change/schema.ts'
+
+/** What a tube line is called on the flange, and who makes it. */
+export interface TubeLine {
+  readonly id: string
+  readonly line: string
+  readonly maker: string
+}
+
+/** What every item of the catalogue has: its line, and whether it is still bought. */
+interface Item {
+  readonly id: string
+  readonly lineId: string
+  readonly line: string
+  readonly maker: string
+  /** As on the label. */
+  readonly size: string
+  /** Fourteen digits; null when the label carries none. */
+  readonly gtin: string | null
+  readonly retiredAt: Date | null
+  /** Raised by each edit, so that two at once are noticed. */
+  readonly version: number
+}
+
+/**
+ * A tube as its maker describes it, in the words and units (mm, days) of a charted tube. Null: a single cannula has no inner
+ * one, a label may give no longest use.
+ */
+export interface CatalogueTube
+  extends Item,
+    Pick<
+      TubeData,
+      | 'sizeSystem'
+      | 'construction'
+      | 'idWithoutInner'
+      | 'od'
+      | 'lengthMm'
+      | 'cuff'
+      | 'fenestrated'
+      | 'connector'
+      | 'flange'
+    > {
+  readonly innerCannula: InnerCannulaUse | null
+  readonly idWithInner: number | null
+  readonly longestUseDays: number | null
+  /** Whether an obturator comes with it. */
+  readonly insertionAid: boolean
+  /** How many reusable inner cannulas come with it. */
+  readonly reusableInnerCannulas: number
+}
+
+export type InnerCannulaUse = 'disposable' | 'reusable'
+
+/** An inner cannula as its maker describes it. */
+export interface CatalogueInnerCannula extends Item {
+  readonly use: InnerCannulaUse
+  readonly fenestrated: TubeData['fenestrated']
+  /** How many are in a box. */
+  readonly packSize: number
+}
+
+/** What a tube-change form asks of the tube itself, from the catalogue: what is read on this one tube, such as lot and flange mark, is left out. */
+export type PrintedAnswers = Pick<
+  TubeData,
+  | 'line'
+  | 'sizeSystem'
+  | 'size'
+  | 'construction'
+  | 'innerCannula'
+  | 'idWithInner'
+  | 'idWithoutInner'
+  | 'od'
+  | 'lengthMm'
+  | 'cuff'
+  | 'fenestrated'
+  | 'connector'
+  | 'flange'
+  | 'longestUseDays'
+>
+
+/** The answers of a tube-change form that follow from which tube it is. */
+export function printedAnswers(tube: CatalogueTube): PrintedAnswers {
+  const { line, sizeSystem, size, construction, innerCannula, idWithInner, idWithoutInner, od, lengthMm } = tube
+  const { cuff, fenestrated, connector, flange, longestUseDays } = tube
+  return {
+    ...{ line, sizeSystem, size, construction, idWithoutInner, od, lengthMm, cuff, fenestrated, connector, flange },
+    ...(innerCannula === null ? {} : { innerCannula }),
+    ...(idWithInner === null ? {} : { idWithInner }),
+    ...(longestUseDays === null ? {} : { longestUseDays }),
+  }
+}
+
+/** What a tube is called in a list: `Corvane Dual 8.0 ISO 5366`. */
+export function tubeName({ line, size, sizeSystem }: Pick<CatalogueTube, 'line' | 'size' | 'sizeSystem'>): string {
+  return `${line} ${size} ${sizeSystem}`
+}
+
+/** What an inner cannula is called in a list: `Corvane Dual 8.0, disposable, fenestrated`. */
+export function innerCannulaName(
+  cannula: Pick<CatalogueInnerCannula, 'line' | 'size' | 'use' | 'fenestrated'>,
+): string {
+  return `${cannula.line} ${cannula.size}, ${cannula.use}${cannula.fenestrated === 'yes' ? ', fenestrated' : ''}`
+}
