@@ -213,7 +213,9 @@ CREATE TABLE `policies` (
   `name` varchar(120) NOT NULL,
   `version` int(10) unsigned NOT NULL COMMENT 'from 1, for each ward and for the hospital',
   `ward_id` uuid DEFAULT NULL COMMENT 'null: the whole hospital',
+  `rule_set` varchar(8) CHARACTER SET ascii COLLATE ascii_bin NOT NULL DEFAULT 'adults',
   `reviewed_by` varchar(120) NOT NULL COMMENT 'empty: by nobody yet, so never in force',
+  `reviewer_id` uuid DEFAULT NULL COMMENT 'null: reviewed by somebody from outside',
   `reviewed_on` date NOT NULL,
   `starts_at` datetime(3) NOT NULL,
   `reason` varchar(500) NOT NULL,
@@ -222,13 +224,46 @@ CREATE TABLE `policies` (
   `setting_values` longtext CHARACTER SET utf8mb4 COLLATE utf8mb4_bin NOT NULL CHECK (json_valid(`setting_values`)),
   `scope` char(36) CHARACTER SET ascii COLLATE ascii_bin GENERATED ALWAYS AS (coalesce(cast(`ward_id` as char charset utf8mb4),'hospital')) VIRTUAL,
   PRIMARY KEY (`id`),
-  UNIQUE KEY `policies_version` (`scope`,`version`),
+  UNIQUE KEY `policies_version` (`scope`,`rule_set`,`version`),
   KEY `policies_ward` (`ward_id`),
   KEY `policies_created_by` (`created_by`),
+  KEY `policies_reviewer` (`reviewer_id`),
   CONSTRAINT `policies_created_by` FOREIGN KEY (`created_by`) REFERENCES `users` (`id`),
+  CONSTRAINT `policies_reviewer` FOREIGN KEY (`reviewer_id`) REFERENCES `users` (`id`),
   CONSTRAINT `policies_ward` FOREIGN KEY (`ward_id`) REFERENCES `wards` (`id`),
   CONSTRAINT `policies_have_a_reason` CHECK (char_length(trim(`reason`)) > 0),
-  CONSTRAINT `policies_values_are_an_object` CHECK (json_type(`setting_values`) = 'OBJECT')
+  CONSTRAINT `policies_values_are_an_object` CHECK (json_type(`setting_values`) = 'OBJECT'),
+  CONSTRAINT `policies_rule_set_is_known` CHECK (`rule_set` in ('adults','children')),
+  CONSTRAINT `policies_are_reviewed_by_another` CHECK (`reviewer_id` is null or `reviewer_id` <> `created_by`)
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
+CREATE TABLE `policy_drafts` (
+  `id` uuid NOT NULL,
+  `ward_id` uuid NOT NULL,
+  `rule_set` varchar(8) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  `rev` int(10) unsigned NOT NULL COMMENT 'raised with every save: a form that saw another one is told',
+  `setting_values` longtext CHARACTER SET utf8mb4 COLLATE utf8mb4_bin NOT NULL CHECK (json_valid(`setting_values`)),
+  `changed_by` uuid NOT NULL,
+  `changed_at` datetime(3) NOT NULL DEFAULT utc_timestamp(3),
+  PRIMARY KEY (`id`),
+  UNIQUE KEY `policy_drafts_of_ward` (`ward_id`,`rule_set`),
+  KEY `policy_drafts_changed_by` (`changed_by`),
+  CONSTRAINT `policy_drafts_changed_by` FOREIGN KEY (`changed_by`) REFERENCES `users` (`id`),
+  CONSTRAINT `policy_drafts_ward` FOREIGN KEY (`ward_id`) REFERENCES `wards` (`id`),
+  CONSTRAINT `policy_drafts_rule_set_is_known` CHECK (`rule_set` in ('adults','children')),
+  CONSTRAINT `policy_drafts_values_are_an_object` CHECK (json_type(`setting_values`) = 'OBJECT')
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
+CREATE TABLE `policy_withdrawals` (
+  `policy_id` uuid NOT NULL,
+  `reason` varchar(500) NOT NULL,
+  `withdrawn_by` uuid NOT NULL,
+  `withdrawn_at` datetime(3) NOT NULL DEFAULT utc_timestamp(3),
+  PRIMARY KEY (`policy_id`),
+  KEY `policy_withdrawals_by` (`withdrawn_by`),
+  CONSTRAINT `policy_withdrawals_by` FOREIGN KEY (`withdrawn_by`) REFERENCES `users` (`id`),
+  CONSTRAINT `policy_withdrawals_policy` FOREIGN KEY (`policy_id`) REFERENCES `policies` (`id`),
+  CONSTRAINT `policy_withdrawals_have_a_reason` CHECK (char_length(trim(`reason`)) > 0)
 ) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
 
 CREATE TABLE `record_changes` (
@@ -460,6 +495,17 @@ CREATE TRIGGER IF NOT EXISTS policies_refuse_delete BEFORE DELETE ON policies FO
 
 CREATE TRIGGER IF NOT EXISTS policies_refuse_update BEFORE UPDATE ON policies FOR EACH ROW
     SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'policies is append-only: a change is a new version';
+
+CREATE TRIGGER IF NOT EXISTS policy_withdrawals_come_early BEFORE INSERT ON policy_withdrawals FOR EACH ROW
+  IF (SELECT starts_at FROM policies WHERE id = NEW.policy_id) <= UTC_TIMESTAMP(3) THEN
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'this policy has started: it cannot be withdrawn';
+  END IF;
+
+CREATE TRIGGER IF NOT EXISTS policy_withdrawals_refuse_delete BEFORE DELETE ON policy_withdrawals FOR EACH ROW
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'policy_withdrawals is append-only';
+
+CREATE TRIGGER IF NOT EXISTS policy_withdrawals_refuse_update BEFORE UPDATE ON policy_withdrawals FOR EACH ROW
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'policy_withdrawals is append-only';
 
 CREATE TRIGGER IF NOT EXISTS record_changes_refuse_delete BEFORE DELETE ON record_changes FOR EACH ROW
     SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'record_changes is append-only';

@@ -28,6 +28,8 @@ export type Clock =
       readonly because?: string
       /** By calendar date (dwell), not by the hour. */
       readonly byDay?: LocalDay
+      /** The interval, of a clock that runs by one. */
+      readonly every?: Duration
     }
 
 export const noClock: Clock = { state: 'none' }
@@ -50,6 +52,7 @@ export function intervalClock(options: {
     window: windowAround(later(from, options.interval), options.interval),
     last: options.last,
     from,
+    every: options.interval,
     ...(options.because === undefined ? {} : { because: options.because }),
   }
 }

@@ -9,6 +9,7 @@ export const adultAge = numberSetting({
   default: 16,
   min: 12,
   max: 21,
+  adultsOnly: true,
   affects: 'All due care: nothing is computed for younger people without a rule set for children.',
   source: { says: 'Local cut-off; values for children differ', standing: 'product proposal' },
 })

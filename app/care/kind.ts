@@ -5,6 +5,7 @@ import type { LocalDay, Zone } from '../time/zone.ts'
 import type { Clock } from './clock.ts'
 import type { Lane } from './lanes.ts'
 import type { AnySetting, Values } from './policy.ts'
+import type { PolicyCheck } from './policy-check.ts'
 import type { PlannedUse, Used } from './supply.ts'
 import type { Warning } from './warning.ts'
 
@@ -136,6 +137,8 @@ export interface CareKind<Slug extends string, Schema extends z.ZodObject> exten
   /** What must be read wherever this is charted. Short sentences. */
   readonly cautions?: readonly string[]
   readonly settings?: readonly AnySetting[]
+  /** Settings that must fit together, held against a policy before it is published. */
+  readonly checks?: readonly PolicyCheck[]
   readonly tasks?: readonly TaskRule[]
   /** What the record already says, filled in as the form opens: facts, never findings. */
   startsWith?(context: CareContext): Readonly<Record<string, unknown>>

@@ -13,6 +13,7 @@ import type { AnyCareKind, TaskRule } from './kind.ts'
 import { observations } from './observations/kind.ts'
 import { oralCare } from './oral-care/kind.ts'
 import type { AnySetting } from './policy.ts'
+import type { PolicyCheck } from './policy-check.ts'
 import { stomaAndSkin } from './stoma-and-skin/kind.ts'
 import { suction } from './suction/kind.ts'
 import { ties } from './ties/kind.ts'
@@ -53,6 +54,9 @@ export function findKind(slug: string): AnyCareKind | undefined {
 export const careSettings: readonly AnySetting[] = [
   ...new Set([...careKinds.flatMap((kind: AnyCareKind) => kind.settings ?? []), ...generalSettings]),
 ]
+
+/** Every check of settings that must fit together. */
+export const careChecks: readonly PolicyCheck[] = careKinds.flatMap((kind: AnyCareKind) => kind.checks ?? [])
 
 export interface KindTask {
   readonly kind: AnyCareKind

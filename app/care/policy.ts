@@ -1,4 +1,5 @@
 import type { LocalDay } from '../time/zone.ts'
+import { type AgeGroup, childSetting, type ForChildren } from './children.ts'
 
 export type SettingValue = number | boolean | readonly number[]
 
@@ -30,6 +31,10 @@ export interface Setting<Value extends SettingValue = SettingValue> {
   readonly notBelow?: string
   /** A patient's care plan may override it. */
   readonly personal?: boolean
+  /** Its value for children, where one is known; without it the number for adults is carried over and says so. */
+  readonly children?: ForChildren<Value>
+  /** Not part of a rule set for children. */
+  readonly adultsOnly?: boolean
   readonly affects: string
   readonly source: Source
 }
@@ -53,12 +58,21 @@ export function listSetting(setting: Setting<readonly number[]>): Setting<readon
   return setting
 }
 
+/** Whom a policy is for: people of the age from which the rules for adults apply, or those under it. */
+export type RuleSet = 'adults' | 'children'
+
 /** One reviewed set of values, for one ward or (wardId null) for the whole hospital, in force from `startsAt`. */
 export interface Policy {
   readonly id: string
   readonly name: string
   readonly version: number
   readonly wardId: string | null
+  /** For adults unless it says otherwise. */
+  readonly ruleSet?: RuleSet
+  /** Of a policy in force for adults: the rule set for children in force beside it. */
+  readonly children?: Policy
+  /** Taken back before it started: never in force. */
+  readonly withdrawn?: boolean
   readonly reviewedBy: string
   readonly reviewedOn: LocalDay
   readonly startsAt: Date
@@ -76,17 +90,36 @@ export interface PersonalValue {
 }
 
 /**
- * The policy of a ward at a moment: the ward's own if it has one, else the hospital's; the latest that has started.
- * One that nobody has reviewed is never in force. Undefined when there is none, in which case no rule may run.
+ * The policy of a ward at a moment, with the rule set for children of that moment beside it: the ward's own if it has one, else the
+ * hospital's; the latest that has started. One that nobody has reviewed, or that was withdrawn, is never in force. Undefined when
+ * there is none for adults, in which case no rule may run.
  */
 export function policyInForce(policies: readonly Policy[], wardId: string, at: Date): Policy | undefined {
-  const started = policies.filter(policy => policy.startsAt <= at && policy.reviewedBy.trim() !== '')
+  const adults = ruleSetInForce(policies, wardId, 'adults', at)
+  const children = ruleSetInForce(policies, wardId, 'children', at)
+  return adults && (children ? { ...adults, children } : adults)
+}
+
+/** The version of one rule set that is in force on a ward at a moment, if there is one. */
+export function ruleSetInForce<P extends Policy>(
+  policies: readonly P[],
+  wardId: string,
+  ruleSet: RuleSet,
+  at: Date,
+): P | undefined {
+  const started = policies.filter(
+    policy =>
+      (policy.ruleSet ?? 'adults') === ruleSet &&
+      policy.startsAt <= at &&
+      !policy.withdrawn &&
+      policy.reviewedBy.trim() !== '',
+  )
   const own = started.filter(policy => policy.wardId === wardId)
   return latest(own.length > 0 ? own : started.filter(policy => policy.wardId === null))
 }
 
-function latest(policies: readonly Policy[]): Policy | undefined {
-  return policies.reduce<Policy | undefined>(
+function latest<P extends Policy>(policies: readonly P[]): P | undefined {
+  return policies.reduce<P | undefined>(
     (best, policy) =>
       !best ||
       policy.startsAt > best.startsAt ||
@@ -104,27 +137,35 @@ export interface Values {
   of<Value extends SettingValue>(setting: Setting<Value>): Value
   /** The same for a setting of any type, to show it. */
   shown(setting: AnySetting): SettingValue
+  /** The setting as it applies to this patient: for a child, the one of its age. */
+  judged(setting: AnySetting): AnySetting
   /** Where that value came from. */
   originOf(setting: AnySetting): 'care plan' | 'policy' | 'product default'
   personal(setting: AnySetting): PersonalValue | undefined
 }
 
-/** The values in force for one patient. Personal values count only for settings that allow it. */
-export function valuesFor(policy: Policy, personal: readonly PersonalValue[] = []): Values {
+/**
+ * The values in force for one patient. Personal values count only for settings that allow it. Of a rule set for children, the
+ * numbers are those of the age group.
+ */
+export function valuesFor(policy: Policy, personal: readonly PersonalValue[] = [], group?: AgeGroup): Values {
   const own = new Map(personal.map(value => [value.setting, value]))
   const personalOf = (setting: AnySetting) => (setting.personal ? own.get(setting.name) : undefined)
+  const judged = (setting: AnySetting) => (policy.ruleSet === 'children' ? childSetting(setting, group) : setting)
   function of<Value extends SettingValue>(setting: Setting<Value>): Value {
     const mine = setting.personal ? own.get(setting.name)?.value : undefined
-    const value = mine ?? policy.values[setting.name] ?? setting.default
-    return (typeof value === typeof setting.default ? value : setting.default) as Value
+    const here = policy.ruleSet === 'children' ? judged(setting as AnySetting) : setting
+    const value = mine ?? policy.values[here.name] ?? here.default
+    return (typeof value === typeof here.default ? value : here.default) as Value
   }
   return {
     policy,
     of,
     shown: setting => of(setting as Setting),
+    judged,
     originOf: setting => {
       if (personalOf(setting)) return 'care plan'
-      return policy.values[setting.name] === undefined ? 'product default' : 'policy'
+      return policy.values[judged(setting).name] === undefined ? 'product default' : 'policy'
     },
     personal: personalOf,
   }

@@ -1,9 +1,16 @@
 import { personalValues } from '../care/care-plan/personal-values.ts'
+import { ageGroupOf } from '../care/children.ts'
+import { adultAge } from '../care/general-settings.ts'
 import type { CareContext, Entry, PatientRecord, WardFacts } from '../care/kind.ts'
-import { type Policy, valuesFor } from '../care/policy.ts'
+import { type Policy, type Values, valuesFor } from '../care/policy.ts'
 import { recordBefore } from '../care/record.ts'
+import { ageOn } from '../time/display.ts'
+import { localDay } from '../time/zone.ts'
 
-/** What rules decide from: the record, the policy of the ward with the patient's own plan over it, and the moment. */
+/**
+ * What rules decide from: the record, the policy of the ward with the patient's own plan over it, and the moment. Somebody under the
+ * age for adults is judged by the rule set for children where there is one; where there is none, `isTooYoung` keeps rules from running.
+ */
 export function careContext(given: {
   readonly record: PatientRecord
   readonly policy: Policy
@@ -11,7 +18,19 @@ export function careContext(given: {
   readonly now: Date
 }): CareContext {
   const { record, policy, ward, now } = given
-  return { record, values: valuesFor(policy, personalValues(record)), ward, now }
+  return { record, values: valuesOf(policy, record, ward, now), ward, now }
+}
+
+function valuesOf(policy: Policy, record: PatientRecord, ward: WardFacts, now: Date): Values {
+  const personal = personalValues(record)
+  const children = policy.ruleSet === 'children' ? policy : policy.children
+  if (!children) return valuesFor(policy, personal)
+  const today = localDay(now, ward.zone)
+  const age = ageOn(record.patient.bornOn, today)
+  const isChild = policy.ruleSet === 'children' || age < valuesFor(policy).of(adultAge)
+  return isChild
+    ? valuesFor(children, personal, ageGroupOf(age, record.patient.bornOn, today))
+    : valuesFor(policy, personal)
 }
 
 /** What an act that is on record is judged by: the record and the patient's own values of its moment, under the policy in force now. */

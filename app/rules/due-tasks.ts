@@ -32,8 +32,9 @@ export function dueTasks(context: CareContext, tasks: readonly KindTask[] = care
   return tasks.flatMap(task => dueTask(task, context)).toSorted(byPress)
 }
 
-/** Whether the person is younger than the age from which adult rules apply. */
+/** Whether nothing may be computed: the person is younger than the age for adults, and no rule set for children judges them. */
 export function isTooYoung({ record, values, ward, now }: CareContext): boolean {
+  if (values.policy.ruleSet === 'children') return false
   return ageOn(record.patient.bornOn, localDay(now, ward.zone)) < values.of(adultAge)
 }
 

@@ -17,6 +17,9 @@ import { tubeLines } from './0040-tube-lines.ts'
 import { tubes } from './0041-tubes.ts'
 import { innerCannulas } from './0042-inner-cannulas.ts'
 import { catalogueChanges } from './0043-catalogue-changes.ts'
+import { policyRuleSets } from './0080-policy-rule-sets.ts'
+import { policyWithdrawals } from './0081-policy-withdrawals.ts'
+import { policyDrafts } from './0082-policy-drafts.ts'
 import type { Migration } from './migration.ts'
 
 /** Every migration under its name, in the order in which they are applied. */
@@ -40,4 +43,7 @@ export const migrations: Record<string, Migration> = {
   '0041-tubes': tubes,
   '0042-inner-cannulas': innerCannulas,
   '0043-catalogue-changes': catalogueChanges,
+  '0080-policy-rule-sets': policyRuleSets,
+  '0081-policy-withdrawals': policyWithdrawals,
+  '0082-policy-drafts': policyDrafts,
 }

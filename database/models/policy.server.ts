@@ -1,5 +1,5 @@
-import { DataTypes, type InferAttributes, type InferCreationAttributes, Model } from 'sequelize'
-import type { Policy } from '#app/care/policy.ts'
+import { type CreationOptional, DataTypes, type InferAttributes, type InferCreationAttributes, Model } from 'sequelize'
+import type { Policy, RuleSet } from '#app/care/policy.ts'
 import { sequelize } from '../sequelize.server.ts'
 
 /** One reviewed set of values. Rows are never updated or deleted: a change is a new version. */
@@ -8,7 +8,9 @@ export class PolicyRow extends Model<InferAttributes<PolicyRow>, InferCreationAt
   declare name: string
   declare version: number
   declare wardId: string | null
+  declare ruleSet: CreationOptional<RuleSet>
   declare reviewedBy: string
+  declare reviewerId: CreationOptional<string | null>
   declare reviewedOn: string
   declare startsAt: Date
   declare reason: string
@@ -22,7 +24,9 @@ PolicyRow.init(
     name: { type: DataTypes.STRING(120), allowNull: false },
     version: { type: DataTypes.INTEGER.UNSIGNED, allowNull: false },
     wardId: { type: DataTypes.UUID, allowNull: true },
+    ruleSet: { type: DataTypes.STRING(8), allowNull: false, defaultValue: 'adults' },
     reviewedBy: { type: DataTypes.STRING(120), allowNull: false },
+    reviewerId: { type: DataTypes.UUID, allowNull: true },
     reviewedOn: { type: DataTypes.DATEONLY, allowNull: false },
     startsAt: { type: DataTypes.DATE(3), allowNull: false },
     reason: { type: DataTypes.STRING(500), allowNull: false },

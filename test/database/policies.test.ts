@@ -29,7 +29,15 @@ test('a policy comes back as it was added, with who added it', async () => {
   const policy = aPolicy()
   expect(await addPolicy(policy, ward.admin.id)).toEqual({ version: 1 })
   expect(await policies()).toEqual([
-    { ...policy, version: 1, createdAt: expect.any(Date), createdByName: 'Admin of Ward 7' },
+    {
+      ...policy,
+      ruleSet: 'adults',
+      withdrawn: false,
+      withdrawal: null,
+      version: 1,
+      createdAt: expect.any(Date),
+      createdByName: 'Admin of Ward 7',
+    },
   ])
 })
 

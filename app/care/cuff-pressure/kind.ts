@@ -1,4 +1,5 @@
 import { careKind } from '../kind.ts'
+import { cuffChecksOfPolicy } from './checks.ts'
 import { cuffBand, cuffState, foundClass } from './cuff.ts'
 import { cuffChecks } from './schema.ts'
 import { cuffSentence } from './sentence.ts'
@@ -25,6 +26,7 @@ export const cuffPressure = careKind({
   ],
   summary: cuffSentence,
   settings: cuffSettings,
+  checks: cuffChecksOfPolicy,
   tasks: cuffTasks,
   startsWith: ({ ward }) => ({ unit: ward.pressureUnit }),
   gauges({ values, record }) {

@@ -1,5 +1,6 @@
 import { careKind } from '../kind.ts'
 import { isNarrowed } from './acts.ts'
+import { innerCannulaChecks } from './checks.ts'
 import { innerCannulaExamples } from './examples.ts'
 import { innerCannulaActs } from './schema.ts'
 import { innerCannulaSentence } from './sentence.ts'
@@ -19,6 +20,7 @@ export const innerCannula = careKind({
   examples: innerCannulaExamples,
   summary: innerCannulaSentence,
   settings: innerCannulaSettings,
+  checks: innerCannulaChecks,
   tasks: innerCannulaTasks,
   startsWith: innerCannulaStart,
   usual: usualInnerCannula,

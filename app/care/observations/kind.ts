@@ -1,4 +1,5 @@
 import { careKind } from '../kind.ts'
+import { observationChecks } from './checks.ts'
 import { observationExamples } from './examples.ts'
 import { observationSets } from './schema.ts'
 import { observationSentence } from './sentence.ts'
@@ -16,6 +17,7 @@ export const observations = careKind({
   examples: observationExamples,
   summary: observationSentence,
   settings: observationSettings,
+  checks: observationChecks,
   tasks: observationTasks,
   warnings: observationWarnings,
   standing: standingObservationWarnings,

@@ -1,5 +1,13 @@
 import { numberSetting } from '../policy.ts'
 import { spo2Fall, spo2Floor } from '../suction/settings.ts'
+import {
+  heartHighForChildren,
+  heartLowForChildren,
+  rateHighForChildren,
+  rateLowForChildren,
+  systolicHighForChildren,
+  systolicLowForChildren,
+} from './for-children.ts'
 
 const NEWS2 = 'NEWS2, Royal College of Physicians: scores 3 alone'
 
@@ -36,6 +44,7 @@ export const rateLow = numberSetting({
   default: 8,
   min: 6,
   max: 12,
+  children: rateLowForChildren,
   affects: 'Observations: amber warning, urgent review.',
   source: { says: `${NEWS2}: 8 or less`, standing: 'published' },
 })
@@ -48,6 +57,7 @@ export const rateHigh = numberSetting({
   min: 20,
   max: 40,
   personal: true,
+  children: rateHighForChildren,
   affects: 'Observations: amber warning, urgent review.',
   source: { says: `${NEWS2}: 25 or more`, standing: 'published' },
 })
@@ -60,6 +70,7 @@ export const heartLow = numberSetting({
   min: 30,
   max: 60,
   personal: true,
+  children: heartLowForChildren,
   affects: 'Observations: amber warning, urgent review.',
   source: { says: `${NEWS2}: 40 or less`, standing: 'published' },
 })
@@ -72,6 +83,7 @@ export const heartHigh = numberSetting({
   min: 100,
   max: 160,
   personal: true,
+  children: heartHighForChildren,
   affects: 'Observations: amber warning, urgent review.',
   source: { says: `${NEWS2}: 131 or more`, standing: 'published' },
 })
@@ -84,6 +96,7 @@ export const systolicLow = numberSetting({
   min: 70,
   max: 110,
   personal: true,
+  children: systolicLowForChildren,
   affects: 'Observations: amber warning, urgent review.',
   source: { says: `${NEWS2}: 90 or less`, standing: 'published' },
 })
@@ -95,6 +108,7 @@ export const systolicHigh = numberSetting({
   default: 220,
   min: 180,
   max: 240,
+  children: systolicHighForChildren,
   affects: 'Observations: amber warning, urgent review.',
   source: { says: `${NEWS2}: 220 or more`, standing: 'published' },
 })

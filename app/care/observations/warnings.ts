@@ -39,7 +39,10 @@ function extremes(data: ObservationData, context: CareContext): readonly Warning
       level: 'amber',
       action: 'Ask a doctor to see the patient within the hour, and tell the charge nurse.',
       cause: `${found.join(', ')}.`,
-      source: 'NEWS2, Royal College of Physicians: any single value that scores 3 is an urgent review',
+      source:
+        context.values.policy.ruleSet === 'children'
+          ? 'Limits by age of the rule set for children'
+          : 'NEWS2, Royal College of Physicians: any single value that scores 3 is an urgent review',
     },
   ]
 }

@@ -1,4 +1,5 @@
 import { careKind } from '../kind.ts'
+import { suctionChecks } from './checks.ts'
 import { suctionExamples } from './examples.ts'
 import { suctions } from './schema.ts'
 import { suctionSentence } from './sentence.ts'
@@ -16,6 +17,7 @@ export const suction = careKind({
   examples: suctionExamples,
   summary: suctionSentence,
   settings: suctionSettings,
+  checks: suctionChecks,
   tasks: suctionTasks,
   uses: suctionUse,
   warnings: suctionWarnings,

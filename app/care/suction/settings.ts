@@ -1,5 +1,11 @@
 import { listSetting, numberSetting, switchSetting } from '../policy.ts'
 import { bleedingSettings } from './bleeding-settings.ts'
+import {
+  catheterShareForChildren,
+  vacuumLowForChildren,
+  vacuumVeryHighForChildren,
+  vacuumWarnForChildren,
+} from './for-children.ts'
 
 const AARC = 'AARC clinical practice guideline on suctioning, 2022'
 const ACI = 'NSW Agency for Clinical Innovation, suctioning an adult, 2014'
@@ -37,6 +43,7 @@ export const catheterShare = numberSetting({
   default: 50,
   min: 40,
   max: 70,
+  children: catheterShareForChildren,
   affects: 'Suction: largest catheter for the tube.',
   source: {
     says: `${ACI}: less than half; Vanner and Bick 2008: half keeps the pressure in the windpipe near that of the air`,
@@ -69,6 +76,7 @@ export const vacuumLow = numberSetting({
   default: 80,
   min: 50,
   max: 120,
+  children: vacuumLowForChildren,
   affects: 'Suction: the range named in the warning.',
   source: { says: `${ACI}: 80 to 150 mmHg`, standing: 'published' },
 })
@@ -81,6 +89,7 @@ export const vacuumWarn = numberSetting({
   min: 80,
   max: 200,
   personal: true,
+  children: vacuumWarnForChildren,
   affects: 'Suction: amber warning.',
   source: { says: `${ACI}: 80 to 150 mmHg (20 kPa)`, standing: 'published' },
 })
@@ -92,6 +101,7 @@ export const vacuumVeryHigh = numberSetting({
   default: 200,
   min: 150,
   max: 300,
+  children: vacuumVeryHighForChildren,
   affects: 'Suction: amber warning that asks to read the gauge again.',
   source: { says: `${AARC}: below 200 mmHg, as low as effective`, standing: 'published' },
 })

@@ -1,4 +1,15 @@
+import type { ForChildren } from '../children.ts'
 import { numberSetting } from '../policy.ts'
+
+/** Reference R-306. */
+const weekly: ForChildren<number> = {
+  default: 7,
+  min: 3,
+  source: {
+    says: 'AARC paediatric tracheostomy guideline 2021: at least every 1 to 2 weeks and as needed',
+    standing: 'published',
+  },
+}
 
 export const dwellDual = numberSetting({
   name: 'dwell-limit-dual-cannula',
@@ -8,6 +19,7 @@ export const dwellDual = numberSetting({
   min: 7,
   max: 90,
   personal: true,
+  children: weekly,
   affects: 'Tube change: change-by date. The strictest of policy and device label counts.',
   source: {
     says: 'National Tracheostomy Safety Project, changing a tracheostomy tube: 28 days; other texts 29 and 30 days',
@@ -23,6 +35,7 @@ export const dwellSingle = numberSetting({
   min: 3,
   max: 30,
   personal: true,
+  children: weekly,
   affects: 'Tube change: change-by date of tubes without an inner cannula.',
   source: {
     says: 'Intensive Care Society, 7 to 14 days, as quoted by the French expert panel 2018',

@@ -1,5 +1,6 @@
 import { careKind } from '../kind.ts'
 import { tubeCautions } from './cautions.ts'
+import { tubeChangeChecks } from './checks.ts'
 import { tubeExamples } from './examples.ts'
 import { tubeChanges } from './schema.ts'
 import { tubeSentence } from './sentence.ts'
@@ -19,6 +20,7 @@ export const tubeChange = careKind({
   examples: tubeExamples,
   summary: tubeSentence,
   settings: tubeChangeSettings,
+  checks: tubeChangeChecks,
   tasks: tubeTasks,
   usual: sameTubeAgain,
   uses: tubeUse,

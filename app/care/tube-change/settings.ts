@@ -10,6 +10,10 @@ export const firstChangeSurgicalEarliest = numberSetting({
   default: 4,
   min: 3,
   max: 14,
+  children: {
+    default: 3,
+    source: { says: 'AARC paediatric tracheostomy guideline 2021: first change on day 3', standing: 'published' },
+  },
   affects: 'Tube change: window of the first change and its warning.',
   source: {
     says: 'AAO-HNS 2013, day 3 to 7 (in a Critical Care Nurse review, 2013); French expert panel 2018, not before day 4',
