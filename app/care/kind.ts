@@ -134,6 +134,8 @@ export interface CareKind<Slug extends string, Schema extends z.ZodObject> exten
   /** The sentence on the timeline and before charting. */
   summary(data: z.output<Schema>): string
   readonly act?: ChartingAct
+  /** Charting it asks for the password again: the final act of something that cannot be taken back. */
+  readonly needsFreshSignIn?: boolean
   /** What must be read wherever this is charted. Short sentences. */
   readonly cautions?: readonly string[]
   readonly settings?: readonly AnySetting[]

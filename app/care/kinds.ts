@@ -18,6 +18,7 @@ import { stomaAndSkin } from './stoma-and-skin/kind.ts'
 import { suction } from './suction/kind.ts'
 import { ties } from './ties/kind.ts'
 import { tubeChange } from './tube-change/kind.ts'
+import { tubeChangePlan } from './tube-change-plan/kind.ts'
 import { waterCuff } from './water-cuff/kind.ts'
 
 /** Every kind of care, in the order of lists and lanes. Adding one is a folder and a line here. */
@@ -34,6 +35,7 @@ export const careKinds = [
   observations,
   bedsideKit,
   tubeChange,
+  tubeChangePlan,
   decannulation,
   adverseEvent,
   freeNote,

@@ -12,6 +12,7 @@ import {
   workingIdMm,
 } from '../care/tube-change/tube.ts'
 import { lastTube, tubeAbsence } from '../care/tube-change/tube-absence.ts'
+import { openPlan } from '../care/tube-change-plan/open-plan.ts'
 import { largestCatheter } from '../clinical/suction-catheter.ts'
 import { isNewStoma, tractState } from '../clinical/tract.ts'
 import { showDateTime, showDay } from '../time/display.ts'
@@ -119,7 +120,15 @@ function timeFacts(context: CareContext) {
     },
     ...(tract ? [{ term: 'Stoma made', value: `${showDay(tract.madeOn)}${state ? `, ${state}` : ''}` }] : []),
     { term: 'Change by', value: `${showDay(limit.changeBy)} (${limit.because})` },
+    ...plannedFact(context),
   ]
+}
+
+function plannedFact({ record }: CareContext) {
+  const plan = openPlan(record)
+  if (!plan) return []
+  const { operator } = plan.entry.data
+  return [{ term: 'Change planned', value: `${showDay(plan.plannedOn)}${operator ? `, by ${operator}` : ''}` }]
 }
 
 const capital = (words: string): string => words.charAt(0).toUpperCase() + words.slice(1)

@@ -2,6 +2,7 @@ import { careKind } from '../kind.ts'
 import { tubeCautions } from './cautions.ts'
 import { tubeChangeChecks } from './checks.ts'
 import { tubeExamples } from './examples.ts'
+import { plannedAnswers } from './planned.ts'
 import { tubeChanges } from './schema.ts'
 import { tubeSentence } from './sentence.ts'
 import { tubeChangeSettings } from './settings.ts'
@@ -22,6 +23,8 @@ export const tubeChange = careKind({
   settings: tubeChangeSettings,
   checks: tubeChangeChecks,
   tasks: tubeTasks,
+  needsFreshSignIn: true,
+  startsWith: plannedAnswers,
   usual: sameTubeAgain,
   uses: tubeUse,
   warnings: tubeWarnings,

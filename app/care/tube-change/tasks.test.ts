@@ -170,6 +170,7 @@ test('the rules are said with the numbers in force', () => {
   const says = (entries: readonly StoredEntry[]) => tubeChange.tasks?.map(task => task.says(aContext(entries, '12:00')))
   expect(says([first('surgical')])).toEqual([
     'First change from day 4, by day 7 after insertion. An experienced operator, with airway help at hand.',
+    'On the day that the plan names, once its gate of questions was gone through.',
     'The strictest limit counts: longest use of a dual-cannula tube: 28 days. The day of insertion is day 0.',
   ])
   expect(says([first('not known')])?.[0]).toContain(

@@ -3,16 +3,11 @@ import { addDays, type Zone } from '../../time/zone.ts'
 import { type Clock, dayClock, noClock, suspended } from '../clock.ts'
 import type { CareContext, TaskRule } from '../kind.ts'
 import { hasSutures, stomaChecks } from '../stoma-and-skin/schema.ts'
+import { openPlan } from '../tube-change-plan/open-plan.ts'
 import { dwellDual, dwellNotice, dwellSingle, dwellSingleHeavy, heavyEpisodes } from './dwell-settings.ts'
-import {
-  firstChangePercutaneousEarliest,
-  firstChangePercutaneousTarget,
-  firstChangeSurgicalEarliest,
-  firstChangeSurgicalTarget,
-  routineFirstChange,
-  suturesOutBy,
-} from './settings.ts'
-import { dwellLimit, insertedOn, isFirstTube, tubeInPlace } from './tube.ts'
+import { firstChange } from './first-change.ts'
+import { suturesOutBy } from './settings.ts'
+import { dwellLimit, insertedOn, tubeInPlace } from './tube.ts'
 import { type TubeAbsence, tubeAbsence } from './tube-absence.ts'
 
 /** What a clock says when there is no tube: suspended once it came out or was removed, silent when none was ever charted. */
@@ -53,55 +48,20 @@ export const byDate: TaskRule = {
   },
 }
 
-const first: TaskRule = {
-  name: 'first-tube-change',
+/** A change that was planned, on its day. */
+const planned: TaskRule = {
+  name: 'planned-tube-change',
   airway: true,
-  settings: [
-    firstChangeSurgicalEarliest,
-    firstChangeSurgicalTarget,
-    firstChangePercutaneousEarliest,
-    firstChangePercutaneousTarget,
-    routineFirstChange,
-  ],
-  opensWith: { reason: 'first change' },
-  says(context) {
-    const { earliest, target, isKnown } = firstChangeDays(context)
-    const why = isKnown ? '' : ' How the opening was made is not known, so the later days count.'
-    return `First change from day ${earliest}, by day ${target} after insertion.${why} An experienced operator, with airway help at hand.`
-  },
+  settings: [],
+  says: () => 'On the day that the plan names, once its gate of questions was gone through.',
   clock(context) {
-    const tube = tubeInPlace(context.record)
-    if (!tube || !isFirstTube(tube) || !context.values.of(routineFirstChange)) return noClock
-    const { earliest, target } = firstChangeDays(context)
-    return dayClock({
-      dueOn: addDays(insertedOn(tube, context), target),
-      soonDays: target - earliest,
-      ward: context.ward,
-      last: tube,
-    })
+    const plan = openPlan(context.record)
+    if (!plan) return noClock
+    return dayClock({ dueOn: plan.plannedOn, soonDays: 1, ward: context.ward, last: plan.entry })
   },
 }
 
-interface FirstChange {
-  readonly earliest: number
-  readonly target: number
-  /** Whether it is known how the opening was made. */
-  readonly isKnown: boolean
-}
-
-/**
- * Earliest and target day of the first change, by how the opening was made. Where that is not known the days of a percutaneous one
- * count: a change too early may lose the airway, a few days later it does no harm.
- */
-export function firstChangeDays({ record, values }: CareContext): FirstChange {
-  const technique = tubeInPlace(record)?.data.technique
-  const surgical = technique === 'surgical'
-  const earliest = values.of(surgical ? firstChangeSurgicalEarliest : firstChangePercutaneousEarliest)
-  const target = values.of(surgical ? firstChangeSurgicalTarget : firstChangePercutaneousTarget)
-  return { earliest: Math.min(earliest, target), target, isKnown: surgical || technique === 'percutaneous' }
-}
-
-export const tubeTasks: readonly TaskRule[] = [first, byDate]
+export const tubeTasks: readonly TaskRule[] = [firstChange, planned, byDate]
 
 /** Flange sutures out by their day. Charted with stoma and skin, which lists it among its tasks. */
 export const sutureRemoval: TaskRule = {
