@@ -146,6 +146,25 @@ CREATE TABLE `entries` (
   CONSTRAINT `entries_are_witnessed_by_another` CHECK (`witness_id` is null or `witness_id` <> `recorded_by`)
 ) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
 
+CREATE TABLE `entry_signatures` (
+  `entry_id` uuid NOT NULL,
+  `part` varchar(16) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  `user_id` uuid NOT NULL,
+  `role` varchar(64) CHARACTER SET ascii COLLATE ascii_bin NOT NULL COMMENT 'at that moment',
+  `proof` varchar(16) CHARACTER SET ascii COLLATE ascii_bin NOT NULL COMMENT 'not given: asked for, and charted without',
+  `competence` varchar(16) CHARACTER SET ascii COLLATE ascii_bin DEFAULT NULL COMMENT 'for this act, at that moment; null: not asked for',
+  `signed_at` datetime(3) NOT NULL DEFAULT utc_timestamp(3),
+  `hash` char(64) CHARACTER SET ascii COLLATE ascii_bin NOT NULL COMMENT 'SHA-256 of the hash of the entry and this row; set by trigger',
+  PRIMARY KEY (`entry_id`,`part`),
+  KEY `entry_signatures_user` (`user_id`),
+  CONSTRAINT `entry_signatures_entry` FOREIGN KEY (`entry_id`) REFERENCES `entries` (`id`),
+  CONSTRAINT `entry_signatures_user` FOREIGN KEY (`user_id`) REFERENCES `users` (`id`),
+  CONSTRAINT `entry_signatures_part_is_known` CHECK (`part` in ('author','second person')),
+  CONSTRAINT `entry_signatures_proof_is_known` CHECK (`proof` in ('password','recent sign-in','session','not given')),
+  CONSTRAINT `entry_signatures_second_by_password` CHECK (`part` = 'author' or `proof` = 'password'),
+  CONSTRAINT `entry_signatures_competence_is_known` CHECK (`competence` in ('held','supervised','out of date','missing'))
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
 CREATE TABLE `inner_cannulas` (
   `id` uuid NOT NULL,
   `line_id` uuid NOT NULL,
@@ -489,6 +508,24 @@ CREATE TRIGGER IF NOT EXISTS entries_refuse_delete BEFORE DELETE ON entries FOR 
 
 CREATE TRIGGER IF NOT EXISTS entries_refuse_update BEFORE UPDATE ON entries FOR EACH ROW
     SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'entries is append-only: correct or retract with a new entry';
+
+CREATE TRIGGER IF NOT EXISTS entry_signatures_are_bound BEFORE INSERT ON entry_signatures FOR EACH ROW
+BEGIN
+  DECLARE author, witness UUID;
+  DECLARE head CHAR(64) CHARACTER SET ascii;
+  SELECT recorded_by, witness_id, hash INTO author, witness, head FROM entries WHERE id = NEW.entry_id;
+  IF NOT (NEW.user_id <=> IF(NEW.part = 'author', author, witness)) THEN
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'a signature is that of the author or the second person of its entry';
+  END IF;
+  SET NEW.hash = SHA2(CONCAT_WS('\n', head, NEW.entry_id, NEW.part, NEW.user_id, NEW.role, NEW.proof,
+    COALESCE(NEW.competence, '-'), NEW.signed_at), 256);
+END;
+
+CREATE TRIGGER IF NOT EXISTS entry_signatures_refuse_delete BEFORE DELETE ON entry_signatures FOR EACH ROW
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'entry_signatures is append-only';
+
+CREATE TRIGGER IF NOT EXISTS entry_signatures_refuse_update BEFORE UPDATE ON entry_signatures FOR EACH ROW
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'entry_signatures is append-only';
 
 CREATE TRIGGER IF NOT EXISTS policies_refuse_delete BEFORE DELETE ON policies FOR EACH ROW
     SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'policies is append-only: a change is a new version';

@@ -9,6 +9,7 @@ export type OwnWard = { readonly id: string; readonly name: string; readonly rev
 export type KnownSession = {
   readonly user: { readonly id: string; readonly name: string; readonly email: string; readonly role: Role }
   readonly wards: readonly OwnWard[]
+  readonly startedAt: Date
   readonly endsAt: Date
   readonly isOver: boolean
   /** Seen within the last minute, so that there is nothing to write. */
@@ -32,6 +33,7 @@ type SessionRow = {
   name: string
   email: string
   role: Role
+  startedAt: Date
   endsAt: Date
   isOver: number
   isFresh: number
@@ -47,7 +49,7 @@ type SessionRow = {
  */
 export async function knownSession(idHash: string, idleMinutes: number): Promise<KnownSession | null> {
   const rows = await select<SessionRow>(
-    `SELECT u.id AS userId, u.name, u.email, u.role, s.ends_at AS endsAt,
+    `SELECT u.id AS userId, u.name, u.email, u.role, s.started_at AS startedAt, s.ends_at AS endsAt,
        (s.ends_at <= UTC_TIMESTAMP(3) OR s.seen_at <= UTC_TIMESTAMP(3) - INTERVAL :idleMinutes MINUTE) AS isOver,
        s.seen_at > UTC_TIMESTAMP(3) - INTERVAL 1 MINUTE AS isFresh, u.one_time_until IS NOT NULL AS owesPassword,
        w.id AS wardId, w.name AS wardName, r.rev
@@ -66,6 +68,7 @@ export async function knownSession(idHash: string, idleMinutes: number): Promise
     wards: rows.flatMap(({ wardId, wardName, rev }) =>
       wardId ? [{ id: wardId, name: wardName ?? '', rev: rev ?? 0 }] : [],
     ),
+    startedAt: first.startedAt,
     endsAt: first.endsAt,
     isOver: first.isOver === 1,
     isFresh: first.isFresh === 1,

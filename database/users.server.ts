@@ -85,6 +85,19 @@ export async function passwordHashOf(userId: string): Promise<string | null> {
   return row?.passwordHash ?? null
 }
 
+/** What confirms that somebody is who they say; `mayEnter` is false for a disabled account and one with a one-time password. */
+export type OwnCredentials = Pick<Credentials, 'passwordHash' | 'mayEnter'> & { email: string }
+
+/** The credentials of one account by its id; null when there is none. */
+export async function credentialsById(userId: string): Promise<OwnCredentials | null> {
+  const rows = await select<OwnCredentials>(
+    `SELECT email, password_hash AS passwordHash, disabled_at IS NULL AND one_time_until IS NULL AS mayEnter
+     FROM users WHERE id = :userId`,
+    { userId },
+  )
+  return rows[0] ?? null
+}
+
 /** Stores the same password under today's parameters. */
 export async function storeRehashed(userId: string, passwordHash: string): Promise<void> {
   await transact(transaction => UserRow.update({ passwordHash }, { where: { id: userId }, transaction }))

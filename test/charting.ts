@@ -68,17 +68,33 @@ export function sentRequest(path: string, form: Sent | FormData): Request {
 }
 
 /** What comes of sending a chart form of this kind. */
-export function chart(user: CurrentUser, patientId: string, slug: string, form: Sent | FormData | Request) {
+export function chart(
+  user: CurrentUser,
+  patientId: string,
+  slug: string,
+  form: Sent | FormData | Request,
+  signedInAt?: Date,
+) {
   const path = `/patients/${patientId}/chart/${slug}`
   const request = form instanceof Request ? form : sentRequest(path, form)
-  const args = { params: { patientId, kind: slug }, request, url: new URL(request.url), context: contextOf(user) }
+  const args = {
+    params: { patientId, kind: slug },
+    request,
+    url: new URL(request.url),
+    context: contextOf(user, undefined, signedInAt),
+  }
   return answerOf(() => chartAction({ ...args, pattern: '/patients/:patientId/chart/:kind' }))
 }
 
 /** What the loader of a chart form hands to its page. */
-export async function openedForm(user: CurrentUser, patientId: string, slug: string, search = '') {
+export async function openedForm(user: CurrentUser, patientId: string, slug: string, search = '', signedInAt?: Date) {
   const request = new Request(`${site}/patients/${patientId}/chart/${slug}${search}`)
-  const args = { params: { patientId, kind: slug }, request, url: new URL(request.url), context: contextOf(user) }
+  const args = {
+    params: { patientId, kind: slug },
+    request,
+    url: new URL(request.url),
+    context: contextOf(user, undefined, signedInAt),
+  }
   return answerOf(() => chartLoader({ ...args, pattern: '/patients/:patientId/chart/:kind' }))
 }
 

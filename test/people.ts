@@ -67,14 +67,18 @@ export async function aPerson({ name = 'Ngozi Adeyemi', role = 'nurse', wardIds 
 }
 
 /** A request's context in which this person is signed in; without one, nobody is. */
-export function contextOf(user: CurrentUser | null = null, address = '203.0.113.7'): RouterContextProvider {
+export function contextOf(
+  user: CurrentUser | null = null,
+  address = '203.0.113.7',
+  startedAt = new Date(),
+): RouterContextProvider {
   const context = new RouterContextProvider()
   context.set(requestContext, { address, requestId: 'request-1', nonce: undefined, logged: {} })
   if (user === null) return context
   const wards = user.wardIds.map(id => ({ id, name: 'Ward 7', rev: 1 }))
   const endsAt = new Date('2026-12-01T19:00:00.000Z')
   context.set(userContext, user)
-  context.set(sessionContext, { user, wards, endsAt, isOver: false, isFresh: true, owesPassword: false })
+  context.set(sessionContext, { user, wards, startedAt, endsAt, isOver: false, isFresh: true, owesPassword: false })
   return context
 }
 

@@ -1,4 +1,5 @@
 import { numberSetting } from './policy.ts'
+import { signingSettings } from './signing-settings.ts'
 import { supplySettings } from './supply-settings.ts'
 
 /** Numbers that concern charting as a whole rather than one kind of care. */
@@ -39,4 +40,4 @@ export const lateReasonAfter = numberSetting({
   source: { says: 'US payer guides: a delayed entry needs its reason; no number given', standing: 'product proposal' },
 })
 
-export const generalSettings = [adultAge, lateEntryAfter, lateReasonAfter, ...supplySettings]
+export const generalSettings = [adultAge, lateEntryAfter, lateReasonAfter, ...signingSettings, ...supplySettings]

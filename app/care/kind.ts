@@ -6,6 +6,7 @@ import type { Clock } from './clock.ts'
 import type { Lane } from './lanes.ts'
 import type { AnySetting, Values } from './policy.ts'
 import type { PolicyCheck } from './policy-check.ts'
+import type { Skill } from './skills.ts'
 import type { PlannedUse, Used } from './supply.ts'
 import type { Warning } from './warning.ts'
 
@@ -134,8 +135,12 @@ export interface CareKind<Slug extends string, Schema extends z.ZodObject> exten
   /** The sentence on the timeline and before charting. */
   summary(data: z.output<Schema>): string
   readonly act?: ChartingAct
-  /** Charting it asks for the password again: the final act of something that cannot be taken back. */
+  /** A final act, such as taking a tube out: the form asks for the signer's own password again. */
   readonly needsFreshSignIn?: boolean
+  /** The skill that whoever does this is signed off for. Its lack warns and is kept with the entry; it never refuses. */
+  readonly needsCompetence?: Skill
+  /** Whether this is an act of two people: the form then asks for the second one, who signs on the same screen. */
+  twoPeople?(data: z.output<Schema>): boolean
   /** What must be read wherever this is charted. Short sentences. */
   readonly cautions?: readonly string[]
   readonly settings?: readonly AnySetting[]

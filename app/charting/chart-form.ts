@@ -38,6 +38,8 @@ const spine = {
     .regex(/^(?:[^\p{Cc}\p{Cs}]|[\n\r\t])*$/u, 'The reason has characters that cannot be stored')
     .optional(),
   witness: z.uuid('Choose the second person from the list').optional(),
+  /** A final act charted without the password again, which the entry then says. */
+  unsigned: z.literal('yes', 'Tick this, or leave it').optional(),
 }
 
 const spineSchema = z.object(spine)
@@ -64,7 +66,10 @@ export interface FormRead {
   readonly unknown: readonly string[]
 }
 
-const notFields = ['intent']
+/** Passwords on a chart form: read by the server as it charts, and by nothing else. Drafts leave out whatever is so named. */
+export const passwordFields = ['signerPassword', 'witnessPassword'] as const
+
+const notFields: readonly string[] = ['intent', ...passwordFields]
 
 /**
  * Keeps the fields that a form of this kind has. Names are compared before anything takes them for paths, since

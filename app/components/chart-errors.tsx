@@ -29,7 +29,18 @@ export function ChartErrors({ kind, answer }: ChartErrorsProps) {
   )
 }
 
-const onceOnly = ['', 'reason', 'when', 'day', 'time', 'occurrence', 'witness']
+const onceOnly = [
+  '',
+  'reason',
+  'when',
+  'day',
+  'time',
+  'occurrence',
+  'witness',
+  'witnessPassword',
+  'signerPassword',
+  'unsigned',
+]
 
 function inOrder(kind: AnyCareKind, errors: FormErrors): readonly FormError[] {
   const drawn = [...fieldsOf(kind.schema).map(({ name }) => `care.${name}`), ...onceOnly]

@@ -1,7 +1,8 @@
+import type { ReactNode } from 'react'
 import type { FormErrors } from '#app/charting/assess.ts'
 import type { Typed } from '#app/charting/chart-form.ts'
 import type { Zone } from '#app/time/zone.ts'
-import { SelectField, TextArea } from './text-field.tsx'
+import { TextArea } from './text-field.tsx'
 import { WhenField } from './when-field.tsx'
 
 export interface ChartFootProps {
@@ -11,12 +12,13 @@ export interface ChartFootProps {
   readonly zone: Zone
   readonly asks: boolean
   readonly daysBack: number
-  readonly witnesses: Readonly<Record<string, string>>
   /** When a late entry needs its reason; absent where a reason is asked for elsewhere. */
   readonly reasonAfterHours?: number | undefined
+  /** Who else signs. */
+  readonly children: ReactNode
 }
 
-/** When it was done, why it is written so late, and the second person. */
+/** When it was done, why it is written so late, and who signs. */
 export function ChartFoot({
   typed,
   errors,
@@ -24,8 +26,8 @@ export function ChartFoot({
   zone,
   asks,
   daysBack,
-  witnesses,
   reasonAfterHours,
+  children,
 }: ChartFootProps) {
   const first = (name: string) => typed[name]?.[0]
   const answers = { when: first('when'), day: first('day'), time: first('time'), occurrence: first('occurrence') }
@@ -53,25 +55,7 @@ export function ChartFoot({
           />
         </div>
       )}
-      {Object.keys(witnesses).length > 0 && (
-        <details open={errors.witness !== undefined || first('witness') !== undefined}>
-          <summary className="inline-flex min-h-11 items-center font-semibold text-brand underline underline-offset-3">
-            Second person
-          </summary>
-          <div className="mt-2">
-            <SelectField
-              id="witness"
-              name="witness"
-              label="Who checked or helped"
-              optional
-              options={witnesses}
-              nothing="Nobody"
-              defaultValue={first('witness')}
-              errors={errors.witness}
-            />
-          </div>
-        </details>
-      )}
+      {children}
     </div>
   )
 }

@@ -11,6 +11,7 @@ import { ChartBar } from './chart-bar.tsx'
 import { ChartErrors, fieldId } from './chart-errors.tsx'
 import { ChartFoot } from './chart-foot.tsx'
 import { useChartLive } from './chart-live.ts'
+import { OwnSignature, SecondPerson } from './chart-signing.tsx'
 import type { DrawnField } from './conform-fields.ts'
 import { fillForm } from './fill-form.ts'
 import { Warnings } from './warnings.tsx'
@@ -20,6 +21,11 @@ export interface ChartFormProps {
   readonly view: {
     readonly id: string
     readonly signer: FormSigner
+    readonly signing: {
+      readonly password: boolean
+      readonly email: string
+      readonly second: 'offered' | 'asked' | 'expected'
+    }
     readonly calendar: Calendar
     readonly typed: Typed
     readonly gauges: readonly Gauge[]
@@ -83,8 +89,12 @@ export function ChartForm({ kind, view, answer, words, cancelHref, reasonAfterHo
           zone={view.calendar.zone}
           asks={answer?.is === 'refused' && answer.asks}
           daysBack={view.daysBack}
-          witnesses={view.witnesses}
-        />
+        >
+          <SecondPerson {...{ typed, errors, answer }} witnesses={view.witnesses} ask={view.signing.second} />
+          {(view.signing.password || asksPassword(answer)) && (
+            <OwnSignature {...{ signer, typed, errors, answer }} email={view.signing.email} />
+          )}
+        </ChartFoot>
       </div>
       <ChartBar {...{ words, cancelHref, signer, warnings }} live={live.sentence} reviewed={reviewed?.sentence} />
     </Form>
@@ -113,6 +123,10 @@ function useKeyboardFocus(form: { readonly current: HTMLFormElement | null }, ki
     form.current?.querySelector<HTMLInputElement>(`#${fieldId(`care.${first.name}`)}`)?.focus()
   }, [form, kind])
 }
+
+/** The password was not needed when the form opened, and is by now. */
+const asksPassword = (answer: ChartAnswer | undefined): boolean =>
+  answer?.is === 'refused' && answer.errors.signerPassword !== undefined
 
 function drawn(kind: AnyCareKind, typed: Typed, errors: FormErrors): readonly DrawnField[] {
   return fieldsOf(kind.schema).map(field => {

@@ -2,6 +2,7 @@ import { type FormEvent, type RefObject, useCallback, useEffect, useRef, useStat
 import { useFetcher } from 'react-router'
 import type { AnyCareKind } from '#app/care/kind.ts'
 import type { ChartAnswer, FormSigner, WarningView } from '#app/charting/chart-answer.ts'
+import { passwordFields } from '#app/charting/chart-form.ts'
 import type { Calendar } from '#app/charting/performed-at.ts'
 import { type LiveSentence, liveSentence } from '#app/charting/sentence.ts'
 
@@ -84,6 +85,7 @@ function usePreview(form: RefObject<HTMLFormElement | null>) {
       if (!form.current) return
       const body = new FormData(form.current)
       body.set('intent', 'preview')
+      for (const name of passwordFields) body.delete(name)
       void submit(body, { method: 'post', defaultShouldRevalidate: false })
     }, WAIT_MS)
   }, [form, submit, keepQuiet])

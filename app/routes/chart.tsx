@@ -1,6 +1,6 @@
 import { data, redirect } from 'react-router'
 import { patientGate } from '#app/auth/patient-access.server.ts'
-import { signedIn } from '#app/auth/signed-in.server.ts'
+import { ownSession, signedIn } from '#app/auth/signed-in.server.ts'
 import { traceOf } from '#app/auth/trace.server.ts'
 import { findKind } from '#app/care/kinds.ts'
 import { ChartForm } from '#app/components/chart-form.tsx'
@@ -27,7 +27,7 @@ export async function loader({ params, context, request, url }: Route.LoaderArgs
   const { stayId } = await patientGate(user, params.patientId, askOf({ kind, context, request, url }))
   const now = new Date()
   const care = await patientCare(stayId, now)
-  return chartForm(kind, { care, user, url, now })
+  return chartForm(kind, { care, user, url, now, signedInAt: ownSession(context).startedAt })
 }
 
 export async function action({ params, context, request, url }: Route.ActionArgs) {
@@ -35,11 +35,13 @@ export async function action({ params, context, request, url }: Route.ActionArgs
   const kind = kindOr404(params.kind)
   const { stayId } = await patientGate(user, params.patientId, askOf({ kind, context, request, url }))
   const now = new Date()
-  const sent = { kind, user, now, form: await sentForm(request), care: await patientCare(stayId, now) }
+  const from = { signedInAt: ownSession(context).startedAt, by: traceOf({ request, url, context }) }
+  const sent = { kind, user, now, ...from, form: await sentForm(request), care: await patientCare(stayId, now) }
   const check = await checked(sent)
   if (!check.ok) return data(check.answer, check.status)
   const { id, performedAt, witnessId, reason, care } = check.chart
-  const charting = await addEntry({ id, kind, stayId, performedAt, recordedBy: user, witnessId, reason, data: care })
+  const entry = { id, kind, stayId, performedAt, recordedBy: user, witnessId, reason, data: care }
+  const charting = await addEntry(entry, check.alongside)
   if (charting.outcome === 'charted' || charting.outcome === 'already charted') {
     return redirect(`/patients/${params.patientId}?charted=${charting.entry.id}`)
   }

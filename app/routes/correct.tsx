@@ -28,18 +28,19 @@ export async function loader({ params, context, request, url }: Route.LoaderArgs
 }
 
 export async function action({ params, context, request, url }: Route.ActionArgs) {
-  const { entry, care, user, now, patientId } = await openedEntry({ params, context, request, url }, 'correct')
+  const { entry, patientId, ...asked } = await openedEntry({ params, context, request, url }, 'correct')
   const kind = kindOr404(entry.kind)
-  const sent = { kind, user, now, care, form: await sentForm(request), corrects: entry.id }
+  const sent = { ...asked, kind, form: await sentForm(request), corrects: entry.id }
   const check = await checked(sent)
   if (!check.ok) return data(check.answer, check.status)
   const { id, performedAt, witnessId, reason = '' } = check.chart
-  const charting = await correctEntry({
+  const correction = {
     ...{ id, kind, performedAt, witnessId, reason, data: check.chart.care },
     stayId: entry.stayId,
-    recordedBy: user,
+    recordedBy: asked.user,
     supersedes: entry.id,
-  })
+  }
+  const charting = await correctEntry(correction, check.alongside)
   if (charting.outcome === 'charted' || charting.outcome === 'already charted') {
     return redirect(`/patients/${patientId}?charted=${charting.entry.id}`)
   }

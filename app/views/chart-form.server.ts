@@ -17,6 +17,7 @@ import { showDuration } from '#app/time/display.ts'
 import { hours, since } from '#app/time/duration.ts'
 import { daysBetween, localDay } from '#app/time/zone.ts'
 import { fieldsWith, personalSettings, witnessesFor } from './chart-lists.server.ts'
+import { type SigningAsk, signingAsk } from './chart-signing.server.ts'
 import type { PatientCare } from './patient-context.server.ts'
 
 /** A chart form as it opens. */
@@ -25,6 +26,7 @@ export interface ChartFormView {
   /** Minted here: the same form sent twice is one act. */
   readonly id: string
   readonly signer: FormSigner
+  readonly signing: SigningAsk
   readonly calendar: Calendar
   readonly typed: Typed
   /** The usual act in words, with its answers. */
@@ -49,6 +51,7 @@ export interface Opening {
   readonly user: CurrentUser
   readonly url: URL
   readonly now: Date
+  readonly signedInAt: Date
 }
 
 const MOST_DAYS_BACK = 60
@@ -79,13 +82,14 @@ export async function chartForm(kind: AnyCareKind, opening: Opening): Promise<Ch
 }
 
 /** What every form of a kind is drawn with, whatever it opens with. */
-export function frameOf(kind: AnyCareKind, { care, user, now }: Omit<Opening, 'url'>) {
+export function frameOf(kind: AnyCareKind, { care, user, now, signedInAt }: Omit<Opening, 'url'>) {
   const { context, ward } = care
   const { label, units } = personalSettings(context)
   const began = localDay(care.record.stay.admittedAt, ward.zone)
   return {
     kind: kind.slug,
     signer: signerOf(user),
+    signing: signingAsk(kind, { user, context, now, signedInAt }),
     calendar: calendarOf(care, now),
     gauges: context ? (kind.gauges?.(context) ?? []) : [],
     lists: { task: context ? deferrable(context) : {}, setting: label },

@@ -2,17 +2,20 @@ import { validate as isUuid, v7 as uuidv7 } from 'uuid'
 import type { CurrentUser } from '#app/auth/permissions.ts'
 import type { AnyCareKind, CareContext } from '#app/care/kind.ts'
 import { careSettings, careTasks } from '#app/care/kinds.ts'
-import { assessed, type Chartable, type Situation } from '#app/charting/assess.ts'
+import { type Assessed, assessed, type Chartable, type Situation } from '#app/charting/assess.ts'
 import type { ChartAnswer, Otherwise, WarningView } from '#app/charting/chart-answer.ts'
 import { intentOf, typedIn } from '#app/charting/chart-form.ts'
 import { chartedSentence } from '#app/charting/sentence.ts'
 import { entryWarnings } from '#app/rules/warnings.ts'
 import { showDateTime } from '#app/time/display.ts'
+import type { Trace } from '#database/access-log.server.ts'
+import type { Alongside } from '#database/entries.server.ts'
 import type { Charting } from '#database/entry-outcome.server.ts'
 import { policies } from '#database/policies.server.ts'
 import { person } from '#database/users.server.ts'
 import { calendarOf, shownWarning, signerOf } from './chart-form.server.ts'
 import { witnessesFor } from './chart-lists.server.ts'
+import { signed } from './chart-signing.server.ts'
 import { contextOfAct, contextOfCorrection } from './patient-care.server.ts'
 import type { PatientCare } from './patient-context.server.ts'
 
@@ -23,12 +26,14 @@ export interface Sent {
   readonly care: PatientCare
   readonly user: CurrentUser
   readonly now: Date
+  readonly signedInAt: Date
+  readonly by: Trace
   readonly corrects?: string
 }
 
 /** What a form may be answered with before anything is stored, or what is to be stored. */
 export type Checked =
-  | { readonly ok: true; readonly chart: Chartable }
+  | { readonly ok: true; readonly chart: Chartable; readonly alongside: Alongside | undefined }
   | { readonly ok: false; readonly answer: ChartAnswer; readonly status: number }
 
 /** Checks a form and does what its button says, short of charting it. Stores nothing. */
@@ -43,10 +48,20 @@ export async function checked(sent: Sent): Promise<Checked> {
     const { errors, asks } = answer
     return refused({ ...keptOf(sent), title: 'Not charted yet. Please check:', errors, asks }, 400)
   }
-  if (intent !== 'review') return { ok: true, chart: answer.chart }
+  if (intent !== 'review') return signedChart(sent, answer)
   const { care, performedAt } = answer.chart
   const sentence = chartedSentence(kind, care, performedAt, user, calendarOf(sent.care, sent.now))
   return looked({ is: 'reviewed', sentence, warnings: warningsOf(kind, answer), ...keptOf(sent) })
+}
+
+/** What is to be charted, with the signatures that go with it; a password that is not right is said at its field. */
+async function signedChart(sent: Sent, { chart, context }: Assessed & { ok: true }): Promise<Checked> {
+  const signing = await signed(sent, chart, context)
+  if (!signing.ok) {
+    const { errors, status } = signing
+    return refused({ ...keptOf(sent), title: 'Not charted yet. Please check:', errors, asks: false }, status)
+  }
+  return { ok: true, chart, alongside: signing.alongside }
 }
 
 function looked(answer: ChartAnswer): Checked {

@@ -11,10 +11,14 @@ import { witnessesFor } from './chart-lists.server.ts'
 import type { OpenedEntry } from './opened-entry.server.ts'
 
 /** The form of an entry's kind, filled in with the entry. */
-export async function correctForm(kind: AnyCareKind, { entry, care, user, now }: OpenedEntry, path: string) {
+export async function correctForm(
+  kind: AnyCareKind,
+  { entry, care, user, now, signedInAt }: OpenedEntry,
+  path: string,
+) {
   const { zone } = care.ward
   const witnesses = await witnessesFor(care.ward.id, user)
-  const frame = frameOf(kind, { care, user, now })
+  const frame = frameOf(kind, { care, user, now, signedInAt })
   const draft = await takeDraft(user.id, path)
   const data = readEntry(kind, entry)[0]?.data as Readonly<Record<string, unknown>> | undefined
   const asCharted = { ...typedFrom(data ?? {}), ...momentOf(entry.performedAt, zone), ...witnessOf(entry, witnesses) }

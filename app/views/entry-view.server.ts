@@ -4,8 +4,10 @@ import { readEntry } from '#app/care/record.ts'
 import type { WarningView } from '#app/charting/chart-answer.ts'
 import { type Detail, entryDetails } from '#app/rules/entry-details.ts'
 import { entryWords, lateWords } from '#app/rules/entry-words.ts'
+import { authorWords, competenceWords, type SignatureFact, secondPersonWords } from '#app/rules/signature-words.ts'
 import { policyWords } from '#app/rules/why.ts'
 import { showDateTime, showOffset } from '#app/time/display.ts'
+import { signaturesOf } from '#database/entry-signatures.server.ts'
 import { policies } from '#database/policies.server.ts'
 import { shownWarning } from './chart-form.server.ts'
 import { warningsOf } from './charted-now.server.ts'
@@ -50,6 +52,7 @@ export async function entryView(opened: OpenedEntry): Promise<EntryView> {
   const data = kind && readEntry(kind, entry)[0]?.data
   const counts = entry.id === latest.id && entry.status === 'final'
   const context = contextOfAct(care, known, entry.performedAt, entry)
+  const signatures = (await signaturesOf([entry.id])).get(entry.id) ?? []
   return {
     id: entry.id,
     head: patientHead(care, now),
@@ -59,7 +62,7 @@ export async function entryView(opened: OpenedEntry): Promise<EntryView> {
       : 'This entry cannot be read by the program. It is shown as it is stored.',
     standing: standingOf(opened),
     replacedBy: replacedBy(opened),
-    facts: factsOf(opened, (context && lateWords(entry, context.values)) ?? null),
+    facts: factsOf(opened, (context && lateWords(entry, context.values)) ?? null, signatures),
     details: kind && data ? entryDetails(kind, data as Readonly<Record<string, unknown>>) : [],
     raw: words.readable ? null : rawOf(entry),
     warnings: warningsOf(care, known, entry).map(shownWarning),
@@ -83,13 +86,21 @@ function replacedBy({ entry, chain, care }: OpenedEntry): EntryView['replacedBy'
   return { says: `${what} by ${next.recordedByName} on ${at}: ${next.reason ?? ''}`, href: `/entries/${next.id}` }
 }
 
-function factsOf({ entry, care }: OpenedEntry, late: string | null): readonly Detail[] {
+function factsOf(
+  { entry, care }: OpenedEntry,
+  late: string | null,
+  signatures: readonly SignatureFact[],
+): readonly Detail[] {
+  const signed = authorWords(signatures)
+  const second = secondPersonWords(entry, signatures)
+  const competence = competenceWords(findKind(entry.kind), signatures)
   const moment = (at: Date) => `${showDateTime(at, care.ward.zone)} (UTC ${showOffset(at, care.ward.zone)})`
   return [
     { label: 'Done', value: moment(entry.performedAt) },
     { label: 'Written down', value: `${moment(entry.recordedAt)}${late ? `, ${late}` : ''}` },
-    { label: 'By', value: `${entry.recordedByName}, ${entry.recordedRole}` },
-    ...(entry.witnessName ? [{ label: 'Second person', value: entry.witnessName }] : []),
+    { label: 'By', value: `${entry.recordedByName}, ${entry.recordedRole}${signed ? `, ${signed}` : ''}` },
+    ...(competence ? [{ label: 'Competence then', value: competence }] : []),
+    ...(second ? [{ label: 'Second person', value: second }] : []),
     ...(entry.reason ? [{ label: 'Reason', value: entry.reason }] : []),
     { label: 'Number in the chart', value: String(entry.number) },
   ]

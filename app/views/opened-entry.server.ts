@@ -3,10 +3,11 @@ import { validate as isUuid } from 'uuid'
 import { keepingForm, logPatientLook, type OpenedPatient, patientGate } from '#app/auth/patient-access.server.ts'
 import { type Act, type CurrentUser, can, canByGrant } from '#app/auth/permissions.ts'
 import { isWrite } from '#app/auth/request-kind.ts'
-import { signedIn } from '#app/auth/signed-in.server.ts'
+import { ownSession, signedIn } from '#app/auth/signed-in.server.ts'
 import { traceOf } from '#app/auth/trace.server.ts'
 import type { StoredEntry } from '#app/care/kind.ts'
 import { findKind } from '#app/care/kinds.ts'
+import type { Trace } from '#database/access-log.server.ts'
 import { type EntryHistory, entryWithHistory } from '#database/timeline.server.ts'
 import { type PatientCare, patientCare } from './patient-context.server.ts'
 
@@ -29,6 +30,9 @@ export interface OpenedEntry extends EntryHistory {
   /** The last link of its chain: what counts today. */
   readonly latest: StoredEntry
   readonly now: Date
+  /** When this person signed in, and from where. */
+  readonly signedInAt: Date
+  readonly by: Trace
 }
 
 /**
@@ -53,7 +57,8 @@ export async function openedEntry(asked: EntryRequest, act: EntryAct): Promise<O
   if (act !== 'see' && history.entry.status === 'retracted') throw data('A retraction stays. Chart the care anew.', 403)
   if (!isWrite(request)) await logPatientLook(opened, by)
   const now = new Date()
-  return { ...history, latest, user, opened, now, care: await patientCare(history.entry.stayId, now) }
+  const signedInAt = ownSession(asked.context).startedAt
+  return { ...history, latest, user, opened, now, signedInAt, by, care: await patientCare(history.entry.stayId, now) }
 }
 
 /** Every act that somebody must be allowed to, to do this with an entry. */

@@ -17,6 +17,7 @@ import { tubeLines } from './0040-tube-lines.ts'
 import { tubes } from './0041-tubes.ts'
 import { innerCannulas } from './0042-inner-cannulas.ts'
 import { catalogueChanges } from './0043-catalogue-changes.ts'
+import { entrySignatures } from './0070-entry-signatures.ts'
 import { policyRuleSets } from './0080-policy-rule-sets.ts'
 import { policyWithdrawals } from './0081-policy-withdrawals.ts'
 import { policyDrafts } from './0082-policy-drafts.ts'
@@ -43,6 +44,7 @@ export const migrations: Record<string, Migration> = {
   '0041-tubes': tubes,
   '0042-inner-cannulas': innerCannulas,
   '0043-catalogue-changes': catalogueChanges,
+  '0070-entry-signatures': entrySignatures,
   '0080-policy-rule-sets': policyRuleSets,
   '0081-policy-withdrawals': policyWithdrawals,
   '0082-policy-drafts': policyDrafts,

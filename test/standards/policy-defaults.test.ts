@@ -97,6 +97,8 @@ const rows: readonly Row[] = [
   ['adult-age', 16, 'P', 'Local cut-off'],
   ['late-entry-after', 60, 'P', 'NMC Code section 10'],
   ['late-entry-reason-after', 24, 'P', 'no number given'],
+  ['fresh-sign-in', 10, 'P', 'no number given'],
+  ['second-person-signs', true, 'P', 'local rule'],
   // Supplies (7.2)
   ['supply-wastage', 20, 'P', 'no published share'],
   ['supply-lead-days', 3, 'P', 'those of the own store'],

@@ -10,6 +10,8 @@ export const decannulation = careKind({
   title: 'Tube removal for good',
   chartWords: 'Chart removal',
   lane: 'Tube',
+  needsFreshSignIn: true,
+  twoPeople: () => true,
   settings: decannulationSettings,
   warnings: removalWarnings,
   standing: standingRemovalWarnings,

@@ -20,6 +20,7 @@ export const stomaAndSkin = careKind({
   title: 'Stoma and skin',
   chartWords: 'Chart stoma',
   lane: 'Stoma and skin',
+  twoPeople: ({ dressing, holderChanged }) => dressing === 'changed' || holderChanged === 'yes',
   examples: stomaExamples,
   summary: stomaSentence,
   settings: stomaSettings,

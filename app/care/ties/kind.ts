@@ -14,6 +14,7 @@ export const ties = careKind({
   title: 'Ties',
   chartWords: 'Chart ties',
   lane: 'Stoma and skin',
+  twoPeople: ({ changed }) => changed === 'yes',
   cautions: [
     'Two people: one holds the tube. If you are alone, fasten the new holder before the old one comes off.',
     'A check of stoma and skin holds the ties as well: chart them on one form.',

@@ -17,6 +17,8 @@ export const tubeChange = careKind({
   title: 'Tube change',
   chartWords: 'Chart tube change',
   lane: 'Tube',
+  needsFreshSignIn: true,
+  twoPeople: () => true,
   cautions: tubeCautions,
   examples: tubeExamples,
   summary: tubeSentence,
