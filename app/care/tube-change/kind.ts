@@ -25,7 +25,6 @@ export const tubeChange = careKind({
   settings: tubeChangeSettings,
   checks: tubeChangeChecks,
   tasks: tubeTasks,
-  needsFreshSignIn: true,
   startsWith: plannedAnswers,
   usual: sameTubeAgain,
   uses: tubeUse,
