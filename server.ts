@@ -1,6 +1,7 @@
 import './database/environment.ts'
 import { randomBytes, randomUUID } from 'node:crypto'
 import { once } from 'node:events'
+import { readdirSync } from 'node:fs'
 import { createServer } from 'node:http'
 import { fileURLToPath } from 'node:url'
 import { constants } from 'node:zlib'
@@ -27,7 +28,7 @@ app.set('trust proxy', 'loopback')
 app.use(identified, logged, headersSet)
 app.use(compression({ level: 1, brotli: { params: { [constants.BROTLI_PARAM_QUALITY]: 0 } } }))
 app.use('/assets', express.static(`${clientFiles}assets`, { immutable: true, maxAge: '1y', index: false }), notFound)
-app.use(express.static(clientFiles, { maxAge: '1h', index: false, redirect: false }))
+app.use(openFiles(express.static(clientFiles, { maxAge: '1h', index: false, redirect: false })))
 app.use(bodyLimited)
 app.use(createRequestHandler({ build, getLoadContext: contextOf }))
 app.use(failed)
@@ -37,8 +38,7 @@ const server = createServer(
   { headersTimeout: 8000, requestTimeout: 15_000, connectionsCheckingInterval: 2000, keepAliveTimeout: 10_000 },
   app,
 )
-// npm start brings the database up to date while this process loads.
-if (process.env.LISTEN === 'when told') await once(process, 'message')
+if (env.listens === 'when told') await once(process, 'message')
 server.on('error', refusedToListen)
 server.listen(env.port, env.host, () => {
   // From now on an error is one connection that could not be taken, as when too many are open, and no reason to end.
@@ -46,6 +46,13 @@ server.listen(env.port, env.host, () => {
   const address = server.address()
   process.send?.({ listening: typeof address === 'object' ? address?.port : env.port })
 })
+
+/** Asks the disk only for what lies beside the assets: every other address is a page's. */
+function openFiles(files: RequestHandler): RequestHandler {
+  const names = new Set(readdirSync(clientFiles))
+  return (request, response, next) =>
+    names.has(request.path.split('/')[1] ?? '') ? files(request, response, next) : next()
+}
 
 let stopping = false
 for (const signal of ['SIGTERM', 'SIGINT', 'disconnect'] as const) process.on(signal, () => void stop(0))

@@ -1,5 +1,4 @@
-import { PassThrough } from 'node:stream'
-import { createReadableStreamFromReadable } from '@react-router/node'
+import { Writable } from 'node:stream'
 import { renderToPipeableStream } from 'react-dom/server'
 import {
   type EntryContext,
@@ -39,10 +38,8 @@ export default function respond(
         ...withNonce,
         onShellReady() {
           shellSent = true
-          const body = new PassThrough()
           headers.set('Content-Type', 'text/html; charset=utf-8')
-          resolve(new Response(createReadableStreamFromReadable(body), { headers, status }))
-          pipe(body)
+          pipe(whole(body => resolve(new Response(body, { headers, status }))))
         },
         onShellError: reject,
         onError(error) {
@@ -76,4 +73,19 @@ function traits(error: Error) {
   const code = 'code' in cause ? String(cause.code) : null
   const lines = error.stack?.split('\n').filter(line => /^\s+at /.test(line)) ?? []
   return { name: error.name, code, place: lines.slice(0, 5).map(line => line.trim()) }
+}
+
+/** Gathers a page, and hands it on in one piece: piece by piece it would be compressed and sent in a hundred. */
+function whole(done: (body: Uint8Array<ArrayBuffer>) => void): Writable {
+  const pieces: Buffer[] = []
+  return new Writable({
+    write(piece: Buffer, _encoding, next) {
+      pieces.push(piece)
+      next()
+    },
+    final(next) {
+      done(Buffer.concat(pieces))
+      next()
+    },
+  })
 }

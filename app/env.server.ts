@@ -11,6 +11,8 @@ const schema = z.object({
   SESSION_SECRET: z.string().min(32),
   HOST: z.string().min(1).default('127.0.0.1'),
   PORT: z.coerce.number().int().min(0).max(65_535).default(3000),
+  /** `when told`: npm start brings the database up to date while the server loads, and then sends it a message. */
+  LISTEN: z.enum(['at once', 'when told']).default('at once'),
   NODE_ENV: z.enum(['production', 'development', 'test']).default('production'),
 })
 
@@ -33,6 +35,7 @@ function settings(from: NodeJS.ProcessEnv) {
     sessionSecret: data.SESSION_SECRET,
     host: data.HOST,
     port: data.PORT,
+    listens: data.LISTEN,
     isProduction: data.NODE_ENV === 'production',
   }
 }

@@ -1,15 +1,17 @@
-import { lanes } from '#app/care/lanes.ts'
-import { type Board, type BoardOrder, boardCounts, type LivePatient, livePatients } from '#app/rules/board.ts'
-import { inLanes } from '#app/rules/views.ts'
+import { type Lane, lanes } from '#app/care/lanes.ts'
+import { type Board, boardCounts, type LiveBoardTask, type LivePatient } from '#app/rules/board.ts'
+import type { LaneMarks } from '#app/rules/board-care.ts'
 import { standingWords } from '#app/rules/words.ts'
 import { showTime } from '#app/time/display.ts'
 import type { Zone } from '#app/time/zone.ts'
 import { BoardHead, type BoardPatient, BoardRow } from './board-row.tsx'
 import { chartHref } from './chart-href.ts'
 import { Empty } from './empty.tsx'
-import { HourStrip } from './hour-strip.tsx'
-import type { StripLane } from './strip-lanes.ts'
+import { BOARD_LANE_PX, HourStrip } from './hour-strip.tsx'
+import { gridTicks } from './hour-ticks.ts'
+import type { StripLane, StripMark, StripWindow } from './strip-lanes.ts'
 import { StripPatterns } from './strip-patterns.tsx'
+import { SharedGrid } from './strip-shapes.tsx'
 import { SummaryCounts } from './summary-counts.tsx'
 
 const HOUR_MS = 3_600_000
@@ -17,20 +19,20 @@ const BACK_MS = 8 * HOUR_MS
 const AHEAD_MS = 6 * HOUR_MS
 /** Of the strip on a desk 1440 px wide. */
 const STRIP_PX = 530
+const GRID = 'board-hours'
 
 interface BoardViewProps {
   readonly board: Board
   /** The server's clock (ms). */
   readonly now: number
-  readonly order: BoardOrder
+  /** Its patients as they stand now, in the order of the rows. */
+  readonly patients: readonly LivePatient[]
   /** The person may chart on this ward, so that due care leads to its form. */
   readonly charts: boolean
 }
 
 /** The ward's patients with their strips and what is due next; drawn anew as `now` moves on. */
-export function BoardView({ board, now, order, charts }: BoardViewProps) {
-  const patients = livePatients(board, now, order)
-  const zone = board.zone
+export function BoardView({ board: { zone }, now, patients, charts }: BoardViewProps) {
   const span = {
     from: new Date(now - BACK_MS),
     to: new Date(now + AHEAD_MS),
@@ -41,6 +43,10 @@ export function BoardView({ board, now, order, charts }: BoardViewProps) {
   return (
     <>
       <StripPatterns />
+      <SharedGrid
+        id={GRID}
+        {...{ ticks: gridTicks(span, zone, STRIP_PX), rows: lanes.length, top: 0, laneHeight: BOARD_LANE_PX }}
+      />
       <div className="rounded-card border border-line bg-surface">
         <BoardHead>
           <HourStrip {...span} lanes={[]} axis title="Hours" />
@@ -49,7 +55,13 @@ export function BoardView({ board, now, order, charts }: BoardViewProps) {
         <ul aria-label="Patients">
           {patients.map(patient => (
             <BoardRow key={patient.patientId} patient={rowOf(patient, { now, zone, charts })}>
-              <HourStrip {...span} lanes={stripLanes(patient, now, zone)} axis={false} title={`Bed ${patient.bed}`} />
+              <HourStrip
+                {...span}
+                grid={GRID}
+                lanes={stripLanes(patient, now, zone)}
+                axis={false}
+                title={`Bed ${patient.bed}`}
+              />
             </BoardRow>
           ))}
         </ul>
@@ -61,14 +73,12 @@ export function BoardView({ board, now, order, charts }: BoardViewProps) {
 
 interface BoardSummaryProps {
   readonly board: Board
-  /** The server's clock (ms). */
-  readonly now: number
+  readonly patients: readonly LivePatient[]
 }
 
 /** The ward in a few numbers. */
-export function BoardSummary({ board, now }: BoardSummaryProps) {
-  const { shiftEndsAt, zone } = board
-  const counts = boardCounts(livePatients(board, now, 'bed'), shiftEndsAt)
+export function BoardSummary({ board: { shiftEndsAt, zone }, patients }: BoardSummaryProps) {
+  const counts = boardCounts(patients, shiftEndsAt)
   return (
     <SummaryCounts
       counts={[
@@ -119,24 +129,30 @@ function rowOf(patient: LivePatient, { now, zone, charts }: Seen): BoardPatient 
   }
 }
 
-/** The five lanes of a patient with what was done and what is due, in words for those who hear it. */
-function stripLanes(patient: LivePatient, now: number, zone: Zone): readonly StripLane[] {
-  const byName = new Map(patient.tasks.map(task => [task.name, task]))
-  return inLanes(patient.care).map(({ name, marks, tasks }) => ({
-    name,
-    marks: marks.map(({ at, shape }) => ({
-      at: new Date(at),
-      shape,
-      says: `${shape} ${showTime(new Date(at), zone)}`,
-    })),
-    windows: tasks.flatMap(task => {
-      const live = byName.get(task.name)
-      if (!live?.window || live.byDay) return []
-      const { opensAt, closesAt } = live.window
-      const says = `${live.title} ${standingWords(live, now, zone)}`
-      return [{ opensAt: new Date(opensAt), closesAt: new Date(closesAt), status: live.status, says }]
-    }),
+/** The lanes of a patient with what was done and what is due, in words for those who hear it. */
+function stripLanes({ care, tasks }: LivePatient, now: number, zone: Zone): readonly StripLane[] {
+  return care.marks.map(marks => ({
+    name: marks.lane,
+    marks: stripMarks(marks, zone),
+    windows: stripWindows(marks.lane, tasks, now, zone),
   }))
+}
+
+function stripMarks({ done, outOfRange, deferred }: LaneMarks, zone: Zone): readonly StripMark[] {
+  const as = (shape: StripMark['shape']) => (ms: number) => {
+    const at = new Date(ms)
+    return { at, shape, says: () => `${shape} ${showTime(at, zone)}` }
+  }
+  return [...done.map(as('done')), ...outOfRange.map(as('out of range')), ...deferred.map(as('deferred'))]
+}
+
+function stripWindows(lane: Lane, tasks: readonly LiveBoardTask[], now: number, zone: Zone): readonly StripWindow[] {
+  return tasks.flatMap(task => {
+    if (task.lane !== lane || !task.window || task.byDay) return []
+    const { opensAt, closesAt } = task.window
+    const says = `${task.title} ${standingWords(task, now, zone)}`
+    return [{ opensAt: new Date(opensAt), closesAt: new Date(closesAt), status: task.status, says }]
+  })
 }
 
 function Legend() {

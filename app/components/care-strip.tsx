@@ -45,7 +45,7 @@ function kindLanes(care: CareView, now: number, zone: Zone): readonly StripLane[
     name: kindTitle(kind),
     marks: care.marks
       .filter(mark => mark.kind === kind)
-      .map(({ at, shape }) => ({ at: new Date(at), shape, says: `${shape} ${showTime(new Date(at), zone)}` })),
+      .map(({ at, shape }) => ({ at: new Date(at), shape, says: () => `${shape} ${showTime(new Date(at), zone)}` })),
     windows: tasks
       .filter(task => task.kind === kind)
       .flatMap(task => {

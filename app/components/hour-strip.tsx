@@ -18,19 +18,33 @@ export interface HourStripProps {
   readonly title: string
   /** Px a lane; a wall board has tall ones. */
   readonly laneHeight?: number
+  /** Name of the `SharedGrid` to draw instead of a grid of its own. */
+  readonly grid?: string
 }
 
 const AXIS_PX = 26
-const BOARD_LANE_PX = 15
+export const BOARD_LANE_PX = 15
 const NAMED_LANE_PX = 30
 
 /** A time axis with lanes of care: what was done left of now, what will be due right of it, and lateness as a length. */
-export function HourStrip({ from, to, now, zone, width, lanes, axis, labels = false, title, ...rest }: HourStripProps) {
+export function HourStrip({
+  from,
+  to,
+  now,
+  zone,
+  width,
+  lanes,
+  axis,
+  labels = false,
+  title,
+  grid,
+  ...rest
+}: HourStripProps) {
   const span = { from, to }
   const laneHeight = labels ? NAMED_LANE_PX : (rest.laneHeight ?? BOARD_LANE_PX)
   const top = axis ? AXIS_PX : 0
   const height = top + lanes.length * laneHeight
-  const ticks = gridTicks(span, zone, width)
+  const ticks = axis || grid === undefined ? gridTicks(span, zone, width) : []
   const nowX = place(now, span)
   const words = lanes.length === 0 ? title : stripWords(title, lanes)
   return (
@@ -38,7 +52,11 @@ export function HourStrip({ from, to, now, zone, width, lanes, axis, labels = fa
       {labels && <LaneNames lanes={lanes} axis={axis} />}
       <div className="@container min-w-0 flex-1">
         <svg role="img" aria-label={words} className="block w-full" height={height}>
-          <StripGrid ticks={ticks} rows={lanes.length} top={top} laneHeight={laneHeight} />
+          {grid === undefined ? (
+            <StripGrid ticks={ticks} rows={lanes.length} top={top} laneHeight={laneHeight} />
+          ) : (
+            <use href={`#${grid}`} width="100%" height={height} />
+          )}
           <StripShapes shapes={laneShapes(lanes, { span, now, top, laneHeight })} height={height} />
           <line
             x1={percent(nowX)}

@@ -1,5 +1,5 @@
 import { Link } from 'react-router'
-import { type Board, isLate, type LivePatient, type LiveTask, livePatients } from '#app/rules/board.ts'
+import { type Board, isLate, type LiveBoardTask, type LivePatient, livePatients } from '#app/rules/board.ts'
 import { momentWords, standingWords } from '#app/rules/words.ts'
 import type { Zone } from '#app/time/zone.ts'
 import { LinkButton } from './button.tsx'
@@ -75,13 +75,13 @@ function RoundPatient({ patient, board, now, charts }: RoundViewProps & { readon
   )
 }
 
-function isThisShift({ status, window, byDay }: LiveTask, shiftEndsAt: number): boolean {
+function isThisShift({ status, window, byDay }: LiveBoardTask, shiftEndsAt: number): boolean {
   if (status === 'suspended' || !window) return false
   return status !== 'upcoming' ? !(byDay && status === 'due soon') : window.dueAt <= shiftEndsAt
 }
 
 interface RoundTaskProps {
-  readonly task: LiveTask
+  readonly task: LiveBoardTask
   readonly patientId: string
   readonly now: number
   readonly zone: Zone

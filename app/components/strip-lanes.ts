@@ -4,8 +4,8 @@ import { place, type Span, tenth } from './hour-ticks.ts'
 export interface StripMark {
   readonly at: Date
   readonly shape: 'done' | 'out of range' | 'deferred'
-  /** What it is, in words and with its time. */
-  readonly says: string
+  /** What it is, in words and with its time; asked of few, since a lane is said by its last. */
+  says(): string
 }
 export interface StripWindow {
   readonly opensAt: Date
@@ -106,8 +106,8 @@ function laneWords({ name, marks, windows }: StripLane): string {
   const last = done.at(-1)
   const parts = [
     ...windows.map(window => window.says),
-    ...marks.filter(mark => mark.shape !== 'done').map(mark => mark.says),
-    ...(last ? [done.length === 1 ? last.says : `${done.length} done, last ${last.says}`] : []),
+    ...marks.filter(mark => mark.shape !== 'done').map(mark => mark.says()),
+    ...(last ? [done.length === 1 ? last.says() : `${done.length} done, last ${last.says()}`] : []),
   ]
   return `${name}: ${parts.length === 0 ? 'nothing' : parts.join('; ')}.`
 }

@@ -24,16 +24,36 @@ interface StripGridProps {
   readonly laneHeight: number
 }
 
-export function StripGrid({ ticks, rows, top, laneHeight }: StripGridProps) {
+/** The hours and the lanes of one strip. */
+export function StripGrid(grid: StripGridProps) {
+  return (
+    <Stretched height={grid.top + grid.rows * grid.laneHeight}>
+      <GridLines {...grid} />
+    </Stretched>
+  )
+}
+
+/** The grid of many strips that are alike, drawn once under a name: place it before the first of them. */
+export function SharedGrid({ id, ...grid }: StripGridProps & { readonly id: string }) {
+  return (
+    <svg width="0" height="0" aria-hidden="true" className="absolute">
+      <symbol id={id} viewBox={`0 0 1000 ${grid.top + grid.rows * grid.laneHeight}`} preserveAspectRatio="none">
+        <GridLines {...grid} />
+      </symbol>
+    </svg>
+  )
+}
+
+function GridLines({ ticks, rows, top, laneHeight }: StripGridProps) {
   const bottom = top + rows * laneHeight
   const start = rows === 0 ? top - 6 : top
   const hours = ticks.map(tick => `M${tick.x} ${start}V${bottom}`).join('')
   const lanes = Array.from({ length: rows }, (_, row) => `M0 ${top + (row + 0.5) * laneHeight}H1000`).join('')
   return (
-    <Stretched height={bottom}>
+    <>
       <path d={hours} className="fill-none stroke-line" vectorEffect="non-scaling-stroke" />
       <path d={lanes} className="fill-none stroke-line" strokeDasharray="1 3" vectorEffect="non-scaling-stroke" />
-    </Stretched>
+    </>
   )
 }
 

@@ -7,6 +7,7 @@ import { LinkButton } from '#app/components/button.tsx'
 import { useLive } from '#app/components/live.ts'
 import { Notice } from '#app/components/notice.tsx'
 import { Stale } from '#app/components/stale.tsx'
+import { livePatients } from '#app/rules/board.ts'
 import { wardBoard } from '#app/views/ward-board.server.ts'
 import { logLook } from '#database/access-log.server.ts'
 import type { Route } from './+types/board.ts'
@@ -36,12 +37,13 @@ export async function loader({ params: { wardId }, context, request, url }: Rout
 export default function WardBoard({ loaderData }: Route.ComponentProps) {
   const { served, order, wards, charts, admits, seesAccess } = loaderData
   const { data: board, now, staleSince } = useLive(`/api/wards/${served.data.wardId}/board`, served)
+  const patients = livePatients(board, now, order)
   const here = `/wards/${board.wardId}`
   return (
     <div className="grid grid-cols-[minmax(0,1fr)] gap-2 px-4 py-3 md:px-6">
       <header className="flex flex-wrap items-center gap-x-8 gap-y-3">
         <h1 className="text-2xl font-bold">{board.wardName}</h1>
-        <BoardSummary board={board} now={now} />
+        <BoardSummary board={board} patients={patients} />
         <WardLinks wards={wards.filter(ward => ward.id !== board.wardId)} />
         <div className="flex flex-wrap gap-2 print:hidden md:ml-auto">
           <LinkButton href={order === 'bed' ? `${here}/board` : `${here}/board?sort=bed`}>
@@ -57,7 +59,7 @@ export default function WardBoard({ loaderData }: Route.ComponentProps) {
           Without one nothing is computed: no due care and no warnings.
         </Notice>
       )}
-      <BoardView board={board} now={now} order={order} charts={charts} />
+      <BoardView board={board} now={now} patients={patients} charts={charts} />
     </div>
   )
 }

@@ -1,6 +1,7 @@
+import type { BoardCare, BoardTask } from './board-care.ts'
 import { pressOf } from './due-tasks.ts'
 import type { TaskStatus } from './status.ts'
-import { type CareView, liveStatus, type TaskView } from './views.ts'
+import { liveStatus, type TaskView } from './views.ts'
 
 /** A patient on a board: bed and person beside the care. */
 export interface BoardPatient {
@@ -11,7 +12,7 @@ export interface BoardPatient {
   readonly age: number
   readonly recordNumber: string
   readonly laryngectomy: boolean
-  readonly care: CareView
+  readonly care: BoardCare
 }
 
 /** A whole board as plain data; moments are milliseconds. */
@@ -25,14 +26,21 @@ export interface Board {
   readonly patients: readonly BoardPatient[]
 }
 
-export interface LiveTask extends TaskView {
+/** How a task stands at a moment. */
+export type Live<Task extends BoardTask> = Task & {
   readonly status: TaskStatus
   /** How long it has been overdue (ms), 0 when it is not. */
   readonly lateBy: number
 }
+export type LiveTask = Live<TaskView>
+export type LiveBoardTask = Live<BoardTask>
+
+// Made once: comparing by locale makes a new one for each pair.
+const byTitle = new Intl.Collator('en')
+const byLabel = new Intl.Collator('en', { numeric: true })
 
 /** The tasks of one patient as they stand at `now` (ms), most pressing first. */
-export function liveTasks(tasks: readonly TaskView[], now: number): readonly LiveTask[] {
+export function liveTasks<Task extends BoardTask>(tasks: readonly Task[], now: number): readonly Live<Task>[] {
   return tasks
     .map(task => ({
       ...task,
@@ -43,13 +51,13 @@ export function liveTasks(tasks: readonly TaskView[], now: number): readonly Liv
       (a, b) =>
         pressOf(a.status, a.airway) - pressOf(b.status, b.airway) ||
         (a.window?.closesAt ?? 0) - (b.window?.closesAt ?? 0) ||
-        a.title.localeCompare(b.title),
+        byTitle.compare(a.title, b.title),
     )
 }
 
 export interface LivePatient extends Omit<BoardPatient, 'care'> {
-  readonly care: CareView
-  readonly tasks: readonly LiveTask[]
+  readonly care: BoardCare
+  readonly tasks: readonly LiveBoardTask[]
   /** The status of the most pressing task; undefined when nothing is due at all. */
   readonly worst: TaskStatus | undefined
 }
@@ -80,7 +88,7 @@ function risk({ care, tasks }: LivePatient): number {
 
 const firstDue = ({ tasks }: LivePatient): number => tasks[0]?.window?.closesAt ?? Number.MAX_SAFE_INTEGER
 
-const byBed = (a: LivePatient, b: LivePatient): number => a.bed.localeCompare(b.bed, 'en', { numeric: true })
+const byBed = (a: LivePatient, b: LivePatient): number => byLabel.compare(a.bed, b.bed)
 
 export interface BoardCounts {
   readonly overdue: number

@@ -7,7 +7,7 @@ import {
   wordsOf,
 } from '../care/kind.ts'
 import { careKinds } from '../care/kinds.ts'
-import { type Lane, lanes } from '../care/lanes.ts'
+import type { Lane } from '../care/lanes.ts'
 import { dwellNotice, dwellStrongNotice } from '../care/tube-change/dwell-settings.ts'
 import { byDate } from '../care/tube-change/tasks.ts'
 import { dwellLimit, insertedOn, type TubeEntry, tubeInPlace, tubeWords } from '../care/tube-change/tube.ts'
@@ -61,7 +61,7 @@ export interface TubeView {
   readonly task: string
 }
 
-/** One patient's care on a board or a round. */
+/** One patient's care on their own page. */
 export interface CareView {
   readonly tasks: readonly TaskView[]
   readonly marks: readonly MarkView[]
@@ -117,16 +117,7 @@ function inMilliseconds(window: NonNullable<DueTask['window']>) {
 export function liveStatus(task: Pick<TaskView, 'window' | 'deferredUntil'>, now: number): TaskStatus {
   if (!task.window) return 'suspended'
   if (task.deferredUntil !== undefined && now < task.deferredUntil) return 'deferred'
-  const { soonAt, opensAt, closesAt, seriousAt } = task.window
-  return statusOf(
-    {
-      soonAt: new Date(soonAt),
-      opensAt: new Date(opensAt),
-      closesAt: new Date(closesAt),
-      seriousAt: new Date(seriousAt),
-    },
-    new Date(now),
-  )
+  return statusOf(task.window, now)
 }
 
 /** How long a tube has been in, against its limit. */
@@ -171,15 +162,6 @@ function mark(kind: AnyCareKind, entry: Entry, context: CareContext): MarkView {
 /** Whether an act on record is drawn as out of range: judged by tube, cuff and own values of its time. */
 export function isOutOfRange(kind: AnyCareKind, entry: Entry, context: CareContext): boolean {
   return kind.outOfRange?.(entry.data, contextBefore(entry, context)) === true
-}
-
-/** The lanes of a board, in their fixed order, with their marks and tasks. */
-export function inLanes(care: Pick<CareView, 'marks' | 'tasks'>) {
-  return lanes.map(name => ({
-    name,
-    marks: care.marks.filter(mark => mark.lane === name),
-    tasks: care.tasks.filter(task => task.lane === name),
-  }))
 }
 
 /** `Cuff pressure`: the title of a kind by its stored name, or that name in words. */

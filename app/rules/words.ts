@@ -1,9 +1,9 @@
 import { showDay, showDuration, showTime, showWeekdayDate } from '../time/display.ts'
 import { addDays, daysBetween, type LocalDay, localDay, type Zone } from '../time/zone.ts'
-import { isLate, type LiveTask } from './board.ts'
+import { isLate, type LiveBoardTask } from './board.ts'
 
 /** How a task stands, in a few words: `52 min late`, `due by 14:36`, `due 16:06`, `by 19-Dec-2026`, `deferred to 17:00`. */
-export function standingWords(task: LiveTask, now: number, zone: Zone): string {
+export function standingWords(task: LiveBoardTask, now: number, zone: Zone): string {
   if (task.status === 'suspended' || !task.window) return 'suspended'
   if (isLate(task.status)) return task.byDay ? daysLate(task.byDay, now, zone) : `${showDuration(task.lateBy)} late`
   if (task.byDay) return dayWords(task.byDay, now, zone)

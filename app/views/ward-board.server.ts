@@ -2,7 +2,8 @@ import type { WardFacts } from '#app/care/kind.ts'
 import { type Policy, policyInForce } from '#app/care/policy.ts'
 import { env } from '#app/env.server.ts'
 import type { Board, BoardPatient } from '#app/rules/board.ts'
-import { type CareView, careView } from '#app/rules/views.ts'
+import { type BoardCare, boardCare } from '#app/rules/board-care.ts'
+import { careView } from '#app/rules/views.ts'
 import { policyWords } from '#app/rules/why.ts'
 import { ageOn } from '#app/time/display.ts'
 import { earlier, hours } from '#app/time/duration.ts'
@@ -93,14 +94,14 @@ function boardPatient(record: StayRecord, policy: Policy | undefined, ward: Ward
 
 const NOTHING = { tasks: [], marks: [], warnings: [] } as const
 
-const cares = new WeakMap<StayRecord['entries'], { readonly of: string; readonly care: CareView }>()
+const cares = new WeakMap<StayRecord['entries'], { readonly of: string; readonly care: BoardCare }>()
 
 /** One patient's care, computed once for each state of the patient and five minutes: what is charted for one is one's own. */
-function careOf(record: StayRecord, policy: Policy, ward: WardFacts, now: Date): CareView {
+function careOf(record: StayRecord, policy: Policy, ward: WardFacts, now: Date): BoardCare {
   const of = JSON.stringify([slotOf(now), policy.id, record.patient.version, ward])
   const known = cares.get(record.entries)
   if (known?.of === of) return known.care
-  const care = careView(contextOf(record, policy, ward, now), earlier(now, MARKS_BACK))
+  const care = boardCare(careView(contextOf(record, policy, ward, now), earlier(now, MARKS_BACK)))
   cares.set(record.entries, { of, care })
   return care
 }

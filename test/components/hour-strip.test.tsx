@@ -10,7 +10,7 @@ const board = { from: at('06:00'), to: at('20:00'), now: at('14:06'), zone: 'Etc
 const lane = (name: string, given: Partial<StripLane>): StripLane => ({ name, marks: [], windows: [], ...given })
 
 const overdue = lane('Inner cannula', {
-  marks: [{ at: at('06:10'), shape: 'done', says: 'Inner cannula changed at 06:10' }],
+  marks: [{ at: at('06:10'), shape: 'done', says: () => 'Inner cannula changed at 06:10' }],
   windows: [
     {
       opensAt: at('11:14'),
@@ -21,7 +21,7 @@ const overdue = lane('Inner cannula', {
   ],
 })
 const outOfRange = lane('Cuff', {
-  marks: [{ at: at('06:30'), shape: 'out of range', says: 'Cuff pressure 34 cmH2O at 06:30' }],
+  marks: [{ at: at('06:30'), shape: 'out of range', says: () => 'Cuff pressure 34 cmH2O at 06:30' }],
 })
 
 function strip(given: Partial<HourStripProps> = {}) {
@@ -56,7 +56,7 @@ test('care outside the span is not drawn', () => {
   const { container } = strip({
     lanes: [
       lane('Tube', {
-        marks: [{ at: at('05:00'), shape: 'done', says: 'Tube changed at 05:00' }],
+        marks: [{ at: at('05:00'), shape: 'done', says: () => 'Tube changed at 05:00' }],
         windows: [{ opensAt: at('21:00'), closesAt: at('22:00'), status: 'upcoming', says: 'Tube change at 21:00' }],
       }),
     ],
@@ -70,7 +70,7 @@ test('a strip of five busy lanes stays a few elements', () => {
     marks: Array.from({ length: 40 }, (_, n) => ({
       at: new Date(at('06:00').getTime() + n * 600_000),
       shape: 'done' as const,
-      says: 'Suction',
+      says: () => 'Suction',
     })),
     windows: [{ opensAt: at('15:00'), closesAt: at('16:00'), status: 'upcoming', says: 'Suction check at 15:30' }],
   })

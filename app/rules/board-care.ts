@@ -1,0 +1,38 @@
+import { type Lane, lanes } from '../care/lanes.ts'
+import type { CareView, TaskView, TubeView } from './views.ts'
+
+/** A due task as a board shows it: its words and reasons are on the patient's own page. */
+export type BoardTask = Omit<TaskView, 'chartWords' | 'because' | 'opensWith'>
+
+/** What was charted in one lane, oldest first (ms). */
+export interface LaneMarks {
+  readonly lane: Lane
+  readonly done: readonly number[]
+  readonly outOfRange: readonly number[]
+  readonly deferred: readonly number[]
+}
+
+/** One patient's care on a board or a round: what these show and no more, since forty of them make one page. */
+export interface BoardCare {
+  readonly tasks: readonly BoardTask[]
+  readonly marks: readonly LaneMarks[]
+  readonly warnings: readonly Omit<CareView['warnings'][number], 'cause'>[]
+  readonly tube?: TubeView
+}
+
+/** The part of a patient's care that boards show. */
+export function boardCare({ tasks, marks, warnings, tube }: CareView): BoardCare {
+  const momentsOf = (lane: Lane, shape: string) =>
+    marks.filter(mark => mark.lane === lane && mark.shape === shape).map(({ at }) => at)
+  return {
+    tasks: tasks.map(({ chartWords: _words, because: _because, opensWith: _answers, ...task }) => task),
+    marks: lanes.map(lane => ({
+      lane,
+      done: momentsOf(lane, 'done'),
+      outOfRange: momentsOf(lane, 'out of range'),
+      deferred: momentsOf(lane, 'deferred'),
+    })),
+    warnings: warnings.map(({ cause: _cause, ...warning }) => warning),
+    ...(tube ? { tube } : {}),
+  }
+}
