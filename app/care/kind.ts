@@ -3,9 +3,11 @@ import type { PressureUnit } from '../clinical/units.ts'
 import type { ShiftTimes } from '../time/shift.ts'
 import type { LocalDay, Zone } from '../time/zone.ts'
 import type { Clock } from './clock.ts'
+import type { Gauge } from './gauge.ts'
 import type { Lane } from './lanes.ts'
 import type { AnySetting, Values } from './policy.ts'
 import type { PolicyCheck } from './policy-check.ts'
+import type { RunningAct } from './running-act.ts'
 import type { Skill } from './skills.ts'
 import type { PlannedUse, Used } from './supply.ts'
 import type { Warning } from './warning.ts'
@@ -93,16 +95,6 @@ export interface TaskRule {
   clock(context: CareContext): Clock
 }
 
-/** The band that a number is shown against while it is typed. */
-export interface Gauge {
-  readonly field: string
-  readonly unitField?: string
-  readonly lower: number
-  readonly upper: number
-  readonly max: number
-  readonly unit: string
-}
-
 /** What is stored of a kind: enough to ask a record for its entries. Kept apart from rules, so that rules of two kinds can ask for each other's entries. */
 export interface Charted<Slug extends string, Schema extends z.ZodObject> {
   /** Folder, URL segment and stored name; never renamed after release. */
@@ -153,6 +145,8 @@ export interface CareKind<Slug extends string, Schema extends z.ZodObject> exten
   usual?(
     context: CareContext,
   ): { readonly words: string; readonly answers: Readonly<Record<string, unknown>> } | undefined
+  /** What runs now. */
+  running?(context: CareContext): readonly RunningAct[]
   gauges?(context: CareContext): readonly Gauge[]
   /** Warnings about this act; `context.record` does not hold it yet, `context.now` is when it was done. */
   warnings?(data: z.output<Schema>, context: CareContext): readonly Warning[]

@@ -1,9 +1,13 @@
 import { aboveCuffSuction } from './above-cuff-suction/kind.ts'
 import { adverseEvent } from './adverse-event/kind.ts'
+import { afterRemoval } from './after-removal/kind.ts'
 import { bedsideKit } from './bedside-kit/kind.ts'
 import { carePlan } from './care-plan/kind.ts'
+import { coughStrength } from './cough-strength/kind.ts'
 import { cuffPressure } from './cuff-pressure/kind.ts'
+import { cuffStateKind } from './cuff-state/kind.ts'
 import { decannulation } from './decannulation/kind.ts'
+import { decannulationReadiness } from './decannulation-readiness/kind.ts'
 import { deferral } from './deferral/kind.ts'
 import { freeNote } from './free-note/kind.ts'
 import { generalSettings } from './general-settings.ts'
@@ -14,21 +18,28 @@ import { observations } from './observations/kind.ts'
 import { oralCare } from './oral-care/kind.ts'
 import type { AnySetting } from './policy.ts'
 import type { PolicyCheck } from './policy-check.ts'
+import { secretionGrade } from './secretion-grade/kind.ts'
 import { stomaAndSkin } from './stoma-and-skin/kind.ts'
 import { suction } from './suction/kind.ts'
 import { ties } from './ties/kind.ts'
+import { transferChecklist } from './transfer-checklist/kind.ts'
 import { tubeChange } from './tube-change/kind.ts'
 import { tubeChangePlan } from './tube-change-plan/kind.ts'
 import { waterCuff } from './water-cuff/kind.ts'
+import { weaningPlan } from './weaning-plan/kind.ts'
+import { weaningTrial } from './weaning-trial/kind.ts'
 
 /** Every kind of care, in the order of lists and lanes. Adding one is a folder and a line here. */
 export const careKinds = [
   innerCannula,
   cuffPressure,
+  cuffStateKind,
   waterCuff,
   stomaAndSkin,
   ties,
   suction,
+  secretionGrade,
+  coughStrength,
   aboveCuffSuction,
   humidification,
   oralCare,
@@ -36,7 +47,12 @@ export const careKinds = [
   bedsideKit,
   tubeChange,
   tubeChangePlan,
+  weaningPlan,
+  weaningTrial,
+  decannulationReadiness,
   decannulation,
+  afterRemoval,
+  transferChecklist,
   adverseEvent,
   freeNote,
   deferral,

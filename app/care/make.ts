@@ -78,7 +78,7 @@ export function aCorrection<K extends AnyCharted>(
 /** The tube taken out for good at `when`. */
 export function aRemoval(when: string): StoredEntry {
   const agreed = { agreed: 'yes', operator: 'M. Osei', helper: 'T. Okafor' } as const
-  return anEntry(decannulations, when, { ...agreed, breathing: 'comfortable', dressing: 'yes' })
+  return anEntry(decannulations, when, { ...agreed, kit: 'complete', breathing: 'comfortable', dressing: 'yes' })
 }
 
 /** What a context says apart from its entries and its moment. */

@@ -74,14 +74,22 @@ function groupedByKind(entries: readonly StoredEntry[]): ReadonlyMap<string, rea
  * tube and the cuff of its own time.
  */
 export function recordBefore(record: PatientRecord, act: Pick<Entry, 'id' | 'performedAt'>): PatientRecord {
-  const isBefore = (entry: Entry) => entry.performedAt <= act.performedAt && entry.id !== act.id
+  return recordWhere(record, entry => entry.performedAt <= act.performedAt && entry.id !== act.id)
+}
+
+/** The record as it was at a moment: what had been done by then, that moment included. */
+export function recordUpTo(record: PatientRecord, at: Date): PatientRecord {
+  return recordWhere(record, entry => entry.performedAt <= at)
+}
+
+function recordWhere(record: PatientRecord, holds: (entry: Entry) => boolean): PatientRecord {
   return {
     admittedAt: record.admittedAt,
     patient: record.patient,
-    of: kind => record.of(kind).filter(isBefore),
+    of: kind => record.of(kind).filter(holds),
     latest: (kind, where) =>
-      record.latest(kind, (data, entry) => isBefore(entry) && (where === undefined || where(data, entry))),
-    since: (kind, from) => record.since(kind, from).filter(isBefore),
+      record.latest(kind, (data, entry) => holds(entry) && (where === undefined || where(data, entry))),
+    since: (kind, from) => record.since(kind, from).filter(holds),
   }
 }
 

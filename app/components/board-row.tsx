@@ -33,6 +33,8 @@ export interface BoardPatient {
   readonly next: readonly NextCare[]
   /** The most pressing status of all. */
   readonly worst: TaskStatus
+  /** What runs, with how long it has: `Cap trial 3 h 5 min`. */
+  readonly running?: readonly string[]
   /** Red and amber warnings that stand. */
   readonly warnings?: number
   /** One of them asks to act now. */
@@ -76,7 +78,20 @@ export interface BoardRowProps {
 
 /** One patient on the board, as an item of a list. */
 export function BoardRow({ patient, changed = false, children }: BoardRowProps) {
-  const { href, bed, family, given, age, recordNo, tube, next, worst, warnings = 0, isUrgent = false } = patient
+  const {
+    href,
+    bed,
+    family,
+    given,
+    age,
+    recordNo,
+    tube,
+    next,
+    worst,
+    running = [],
+    warnings = 0,
+    isUrgent = false,
+  } = patient
   return (
     <li
       className={`relative grid grid-cols-[3.5rem_minmax(0,1fr)] items-center gap-x-4 gap-y-3 border-t border-hair px-4 py-3 pl-5 first:border-0 xl:gap-x-5 xl:px-5 xl:py-0.5 ${COLUMNS} ${edgeOf[worst]} ${changed ? 'row-fade' : ''}`}
@@ -95,6 +110,11 @@ export function BoardRow({ patient, changed = false, children }: BoardRowProps) 
         <p className="text-sm text-ink2">
           {age} y · {recordNo}
         </p>
+        {running.map(words => (
+          <p key={words}>
+            <Tag tone="ok">{words}</Tag>
+          </p>
+        ))}
         {warnings > 0 && (
           <Tag tone={isUrgent ? 'late' : 'due'}>{warnings === 1 ? '1 warning' : `${warnings} warnings`}</Tag>
         )}

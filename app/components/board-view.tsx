@@ -1,6 +1,7 @@
 import { type Lane, lanes } from '#app/care/lanes.ts'
 import { type Board, boardCounts, type LiveBoardTask, type LivePatient } from '#app/rules/board.ts'
 import type { LaneMarks } from '#app/rules/board-care.ts'
+import { runningWords } from '#app/rules/running.ts'
 import { standingWords } from '#app/rules/words.ts'
 import { showTime } from '#app/time/display.ts'
 import type { Zone } from '#app/time/zone.ts'
@@ -124,6 +125,7 @@ function rowOf(patient: LivePatient, { now, zone, charts }: Seen): BoardPatient 
         ...(charts ? { href: chartHref(patientId, task) } : {}),
       })),
     worst: worst ?? 'upcoming',
+    running: care.running.map(act => runningWords(act, now)),
     warnings: care.warnings.filter(({ level }) => level !== 'blue').length,
     isUrgent: care.warnings.some(({ level }) => level === 'red'),
   }

@@ -1,7 +1,7 @@
 import { Fragment, type ReactNode, useRef } from 'react'
 import { isShown } from '#app/care/field.ts'
 import { type FieldMeta, isCarried } from '#app/care/field-meta.ts'
-import type { Gauge } from '#app/care/kind.ts'
+import type { Gauge } from '#app/care/gauge.ts'
 import { type Answers, useAnswers } from './answers.ts'
 import { CareControl } from './care-controls.tsx'
 import type { DrawnField } from './conform-fields.ts'

@@ -1,5 +1,6 @@
 import { Link } from 'react-router'
 import { type Board, isLate, type LiveBoardTask, type LivePatient, livePatients } from '#app/rules/board.ts'
+import { runningWords } from '#app/rules/running.ts'
 import { momentWords, standingWords } from '#app/rules/words.ts'
 import type { Zone } from '#app/time/zone.ts'
 import { LinkButton } from './button.tsx'
@@ -58,6 +59,11 @@ function RoundPatient({ patient, board, now, charts }: RoundViewProps & { readon
               ? `${care.tube.words} · ${dwellWords(care.tube.day, care.tube.limit).toLowerCase()}`
               : 'No tube charted'}
           </p>
+          {care.running.map(act => (
+            <p key={act.name} className="text-sm font-semibold text-brand">
+              {runningWords(act, now)}
+            </p>
+          ))}
           {care.warnings[0] && care.warnings[0].level !== 'blue' && (
             <p className={`text-sm font-semibold ${care.warnings[0].level === 'red' ? 'text-late' : 'text-due'}`}>
               {care.warnings[0].action}

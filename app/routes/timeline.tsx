@@ -10,6 +10,7 @@ import { EntryList } from '#app/components/entry-list.tsx'
 import { KindFilter } from '#app/components/kind-filter.tsx'
 import { useLive } from '#app/components/live.ts'
 import { Pager } from '#app/components/pager.tsx'
+import { RunningActs } from '#app/components/running-acts.tsx'
 import { Stale } from '#app/components/stale.tsx'
 import { TubeCard } from '#app/components/tube-card.tsx'
 import { Warnings } from '#app/components/warnings.tsx'
@@ -58,7 +59,8 @@ export default function Timeline({ loaderData }: Route.ComponentProps) {
   const { data: shown, now } = live
   const { care, tube, zone } = shown
   const withParam = (name: string, value: string) => linkWith(search, name, value)
-  const tubeTask = liveTasks(care.tasks, now).find(task => task.name === care.tube?.task)
+  const tasks = liveTasks(care.tasks, now)
+  const tubeTask = tasks.find(task => task.name === care.tube?.task)
   return (
     <div className="px-4 py-5 md:px-6">
       <Stale since={live.staleSince === null ? null : new Date(live.staleSince)} zone={zone} />
@@ -66,6 +68,7 @@ export default function Timeline({ loaderData }: Route.ComponentProps) {
         <div className="grid content-start gap-4 lg:col-start-2">
           {charted && <Warnings title={charted.says} warnings={charted.warnings} />}
           <Warnings warnings={care.warnings.filter(({ name }) => !charted?.warnings.some(own => own.name === name))} />
+          <RunningActs {...{ patientId, now, zone, charts, tasks }} running={care.running} />
           <CareDue
             {...{ patientId, now, zone, charts }}
             tasks={care.tasks}

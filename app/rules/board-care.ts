@@ -1,8 +1,12 @@
 import { type Lane, lanes } from '../care/lanes.ts'
+import type { RunningView } from './running.ts'
 import type { CareView, TaskView, TubeView } from './views.ts'
 
 /** A due task as a board shows it: its words and reasons are on the patient's own page. */
 export type BoardTask = Omit<TaskView, 'chartWords' | 'because' | 'opensWith'>
+
+/** What runs, for one line: the card is on the patient's own page. */
+export type BoardRunning = Pick<RunningView, 'name' | 'title' | 'since'>
 
 /** What was charted in one lane, oldest first (ms). */
 export interface LaneMarks {
@@ -16,12 +20,13 @@ export interface LaneMarks {
 export interface BoardCare {
   readonly tasks: readonly BoardTask[]
   readonly marks: readonly LaneMarks[]
+  readonly running: readonly BoardRunning[]
   readonly warnings: readonly Omit<CareView['warnings'][number], 'cause'>[]
   readonly tube?: TubeView
 }
 
 /** The part of a patient's care that boards show. */
-export function boardCare({ tasks, marks, warnings, tube }: CareView): BoardCare {
+export function boardCare({ tasks, marks, running, warnings, tube }: CareView): BoardCare {
   const momentsOf = (lane: Lane, shape: string) =>
     marks.filter(mark => mark.lane === lane && mark.shape === shape).map(({ at }) => at)
   return {
@@ -32,6 +37,7 @@ export function boardCare({ tasks, marks, warnings, tube }: CareView): BoardCare
       outOfRange: momentsOf(lane, 'out of range'),
       deferred: momentsOf(lane, 'deferred'),
     })),
+    running: running.map(({ name, title, since }) => ({ name, title, since })),
     warnings: warnings.map(({ cause: _cause, ...warning }) => warning),
     ...(tube ? { tube } : {}),
   }

@@ -31,7 +31,7 @@ function aBoard(beds: Readonly<Record<string, readonly TaskView[]>>): Board {
       age: 60,
       recordNumber: bed,
       laryngectomy: false,
-      care: { tasks, marks: [], warnings: [] },
+      care: { tasks, marks: [], running: [], warnings: [] },
     })),
   }
 }

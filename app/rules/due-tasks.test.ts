@@ -99,6 +99,7 @@ test('after the tube is out for good all tube care is suspended', () => {
     agreed: 'yes',
     operator: 'A',
     helper: 'B',
+    kit: 'complete',
     breathing: 'comfortable',
     dressing: 'yes',
   })

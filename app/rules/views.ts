@@ -16,6 +16,7 @@ import { type DwellStage, daysLeft, dwellDay, dwellStage } from '../clinical/dwe
 import { localDay } from '../time/zone.ts'
 import { contextBefore } from './context.ts'
 import { type DueTask, dueTasks } from './due-tasks.ts'
+import { type RunningView, runningViews } from './running.ts'
 import { statusOf, type TaskStatus } from './status.ts'
 import { standingWarnings } from './warnings.ts'
 
@@ -65,6 +66,8 @@ export interface TubeView {
 export interface CareView {
   readonly tasks: readonly TaskView[]
   readonly marks: readonly MarkView[]
+  /** Trials and the like that have begun and not ended. */
+  readonly running: readonly RunningView[]
   readonly warnings: readonly {
     readonly level: WarningLevel
     readonly name: string
@@ -80,6 +83,7 @@ export function careView(context: CareContext, marksFrom: Date): CareView {
   return {
     tasks: dueTasks(context).map(taskView),
     marks: marksSince(context, marksFrom),
+    running: runningViews(context),
     warnings: standingWarnings(context).map(({ level, name, action, cause }) => ({ level, name, action, cause })),
     ...(tube ? { tube: tubeView(tube, context) } : {}),
   }

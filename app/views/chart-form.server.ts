@@ -1,8 +1,9 @@
 import { v7 as uuidv7 } from 'uuid'
 import { takeDraft } from '#app/auth/draft.server.ts'
 import type { CurrentUser } from '#app/auth/permissions.ts'
+import type { Gauge } from '#app/care/gauge.ts'
 import { lateReasonAfter } from '#app/care/general-settings.ts'
-import type { AnyCareKind, CareContext, Gauge } from '#app/care/kind.ts'
+import type { AnyCareKind, CareContext } from '#app/care/kind.ts'
 import type { FormSigner, WarningView } from '#app/charting/chart-answer.ts'
 import { type Typed, typedFrom } from '#app/charting/chart-form.ts'
 import { restored } from '#app/charting/drafts.ts'
@@ -114,14 +115,16 @@ function lastMoment({ record: { stay }, ward }: PatientCare): Typed {
   return stay.dischargedAt === null ? {} : { when: ['other'], day: [localDay(stay.dischargedAt, ward.zone)] }
 }
 
-/** Facts of the record, then what the task that was followed here already says. */
+/** Facts of the record, then what the task or the running act that was followed here already says. */
 function openingAnswers(kind: AnyCareKind, context: CareContext | null, url: URL): Typed {
   const name = url.searchParams.get('task') ?? ''
   const rule = kind.tasks?.find(task => task.name === name)
+  const running = context && kind.running?.(context).find(act => act.name === url.searchParams.get('running'))
   const named = context && Object.hasOwn(deferrable(context), name) ? fieldsWith(kind, 'task') : []
   return {
     ...(context ? typedFrom(kind.startsWith?.(context) ?? {}) : {}),
     ...typedFrom(rule?.opensWith ?? {}),
+    ...typedFrom(running?.stopsWith ?? {}),
     ...Object.fromEntries(named.map(field => [`care.${field}`, [name]])),
   }
 }

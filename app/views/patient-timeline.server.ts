@@ -97,10 +97,11 @@ export async function patientTimeline(patient: PatientCare, url: URL, now: Date)
 }
 
 function careOf({ context, nothingDue }: PatientCare, back: Duration) {
-  if (!context) return { care: { tasks: [], marks: [], warnings: [] }, why: {}, tube: { none: 'Not computed.' } }
+  if (!context)
+    return { care: { tasks: [], marks: [], running: [], warnings: [] }, why: {}, tube: { none: 'Not computed.' } }
   const care = careView(context, earlier(context.now, back))
   return {
-    care: nothingDue === null ? care : { ...care, tasks: [], warnings: [] },
+    care: nothingDue === null ? care : { ...care, tasks: [], running: [], warnings: [] },
     why: Object.fromEntries(dueTasks(context).map(task => [task.rule.name, whyDue(task, context)])),
     tube: tubeCard(context),
   }

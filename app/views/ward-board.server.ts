@@ -92,7 +92,7 @@ function boardPatient(record: StayRecord, policy: Policy | undefined, ward: Ward
   }
 }
 
-const NOTHING = { tasks: [], marks: [], warnings: [] } as const
+const NOTHING = { tasks: [], marks: [], running: [], warnings: [] } as const
 
 const cares = new WeakMap<StayRecord['entries'], { readonly of: string; readonly care: BoardCare }>()
 

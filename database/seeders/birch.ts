@@ -1,11 +1,5 @@
-import {
-  copiousSecretions,
-  cuffLetDown,
-  digitsSwapped,
-  hardBreathing,
-  streaksOfBlood,
-  writtenLate,
-} from './happenings.ts'
+import { cuffLetDown, graded, transferred, trialPlanned, valveRunning } from './chart-weaning.ts'
+import { copiousSecretions, digitsSwapped, hardBreathing, streaksOfBlood, writtenLate } from './happenings.ts'
 import { patient } from './patient.ts'
 import type { BedStory } from './story.ts'
 
@@ -43,6 +37,7 @@ export const birchStories: readonly BedStory[] = [
     tube: { name: 'corvane 8', inserted: { daysAgo: 10, stomaDaysAgo: 24 }, technique: 'percutaneous' },
     secretions: 'thin',
     stands: { inner: -5.1, innerRenewal: -1.7, cuff: -5.6, suction: -2.1, dressing: -16, stoma: 'done' },
+    extra: [transferred(40.5, 'Birch ward', 'Nurse in charge, Birch ward'), trialPlanned(20.2, 'cuff', 1)],
   },
   {
     bed: 'B4',
@@ -85,8 +80,13 @@ export const birchStories: readonly BedStory[] = [
     admittedHoursAgo: 108,
     tube: { name: 'corvane 8', inserted: { daysAgo: 14, stomaDaysAgo: 28 }, technique: 'percutaneous' },
     secretions: 'thin',
-    stands: { inner: -6.9, cuff: -2, suction: -0.5, dressing: -11, stoma: 'done' },
-    extra: [cuffLetDown(4.6)],
+    stands: { inner: -6.9, cuff: -2, suction: -0.5, dressing: -11, stoma: 'done', observations: -2.2 },
+    extra: [
+      cuffLetDown(4.6),
+      valveRunning(1.2, [0.95, 0.7, 0.45, 0.2]),
+      graded(28.5, { passes: 'two', colour: 'tan', interval: 'two to three' }),
+      graded(5.1, {}, 118),
+    ],
   },
   {
     bed: 'B9',

@@ -1,3 +1,4 @@
+import { capPassed, graded, readyInPart } from './chart-weaning.ts'
 import { closingOpening, kitIncomplete, noted, withoutSpare } from './happenings.ts'
 import { patient } from './patient.ts'
 import type { BedStory } from './story.ts'
@@ -51,6 +52,7 @@ export const cedarStories: readonly BedStory[] = [
     tube: { name: 'halden 6', inserted: { daysAgo: 19, stomaDaysAgo: 40 }, technique: 'percutaneous' },
     secretions: 'thin',
     stands: { inner: -5, innerRenewal: -2.5, suction: 0.3, dressing: -13, stoma: 'done' },
+    extra: [capPassed(40.3, 14.6), readyInPart(4.8), graded(10.2, { colour: 'tan' }, 132)],
   },
   {
     bed: 'C6',

@@ -23,6 +23,7 @@ export function calmSet({ story, random }: Bedside): ObservationData {
     effort: 'easy',
     heartRate: random.whole(66, 98),
     awareness: story.patient.ventilated ? 'sedated' : 'alert',
+    redFlags: ['none'],
     ...(random.chance(0.4) ? { temperature: random.whole(363, 374) / 10 } : {}),
   }
 }

@@ -74,7 +74,7 @@ function removal({ story, until, place: { ward, bed }, rota }: Bedside): readonl
     draft(
       decannulations,
       until,
-      { agreed: 'yes', ...people, breathing: 'comfortable', dressing: 'yes' },
+      { agreed: 'yes', ...people, kit: 'complete', breathing: 'comfortable', dressing: 'yes' },
       { by: 'tracheostomy specialist', witness: 'charge nurse' },
     ),
   ]

@@ -3,6 +3,7 @@ import { versionOf } from '#app/care/payload.ts'
 import { later, minutes } from '#app/time/duration.ts'
 import { type Bedside, placeAt } from './bedside.ts'
 import { aboveCuffCare } from './chart-above-cuff.ts'
+import { removalCare } from './chart-after-removal.ts'
 import { cuffCare } from './chart-cuff.ts'
 import { humidificationCare } from './chart-humidification.ts'
 import { innerCannulaCare } from './chart-inner-cannula.ts'
@@ -75,6 +76,7 @@ function draftsOf(bedside: Bedside): readonly Draft[] {
     ...waterCuffCare(bedside),
     ...oralCare(bedside),
     ...observationCare(bedside),
+    ...removalCare(bedside),
   ]
 }
 

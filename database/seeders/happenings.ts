@@ -56,20 +56,6 @@ export function cuffLeftHigh(hoursAgo: number): Happening {
   }
 }
 
-/** The cuff was let down and is still down. */
-export function cuffLetDown(hoursAgo: number): Happening {
-  return bedside => {
-    const at = hoursBefore(bedside.now, hoursAgo)
-    const before = episode(bedside, momentOf(bedside, hoursAgo).tube, { indication: ['cuff down'], amount: 'small' })
-    const { unit } = foundBy(bedside, at, 25, {})
-    const data = { unit, method: 'not measured', whyNot: 'Let down for a valve trial', cuffNow: 'deflated' } as const
-    return [
-      draft(suctions, hoursBefore(at, 0.1), before, { by: 'respiratory therapist' }),
-      draft(cuffChecks, at, data, { by: 'respiratory therapist', writtenAfter: 3 }),
-    ]
-  }
-}
-
 /** Copious secretions: the need is looked at again sooner. */
 export function copiousSecretions(hoursAgo: number): Happening {
   return bedside => {

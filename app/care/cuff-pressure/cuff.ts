@@ -1,7 +1,11 @@
 import { type CuffBand, type CuffClass, cuffClass } from '../../clinical/cuff-band.ts'
+import { cuffStates, isUp } from '../cuff-state/schema.ts'
 import type { CareContext, Entry, PatientRecord } from '../kind.ts'
 import type { Values } from '../policy.ts'
-import { tubeInPlace } from '../tube-change/tube.ts'
+import { recordUpTo } from '../record.ts'
+import { type TubeEntry, tubeInPlace } from '../tube-change/tube.ts'
+import { waterCuffs } from '../water-cuff/schema.ts'
+import { weaningTrials } from '../weaning-trial/schema.ts'
 import { type CuffData, cuffChecks, foundCmH2O, leftCmH2O } from './schema.ts'
 import { cuffLower, cuffUpper, cuffVeryHigh, cuffVeryLow } from './settings.ts'
 
@@ -20,17 +24,63 @@ export function cuffBand(values: Values): CuffBand {
   }
 }
 
-/** The cuff of the tube in place. An air cuff counts as inflated until it is charted as let down. */
+/** The cuff of the tube in place. It counts as up until it is charted as let down, by whatever was charted of it last. */
 export function cuffState(record: PatientRecord): CuffState {
   const tube = tubeInPlace(record)
   if (!tube) return 'no tube'
   if (tube.data.cuff === 'none') return 'no cuff'
-  if (tube.data.cuff !== 'air') return tube.data.cuff
-  const said = record.latest(
-    cuffChecks,
-    (data, entry) => cuffLeft(data) !== undefined && entry.performedAt >= tube.performedAt,
-  )
-  return (said && cuffLeft(said.data)) ?? 'inflated'
+  if (tube.data.cuff === 'foam') return 'foam'
+  const isDown = lastSaid(tube, record) === 'deflated'
+  if (tube.data.cuff === 'water') return isDown ? 'deflated' : 'water'
+  return isDown ? 'deflated' : 'inflated'
+}
+
+/** The same at a moment of the past. */
+export function cuffStateAt(record: PatientRecord, at: Date): CuffState {
+  return cuffState(recordUpTo(record, at))
+}
+
+/** What was charted of the cuff last: by a check, as let down or inflated, with a trial, or as water put in. */
+function lastSaid(tube: TubeEntry, record: PatientRecord): 'inflated' | 'deflated' | undefined {
+  const onTube = ({ performedAt }: Entry) => performedAt >= tube.performedAt
+  const said = <Data>(
+    entry: Entry<Data> | undefined,
+    state: (data: Data) => 'inflated' | 'deflated' | undefined,
+  ): readonly Said[] => (entry ? [{ at: entry.performedAt, state: state(entry.data) }] : [])
+  return [
+    ...said(
+      record.latest(cuffChecks, (data, entry) => onTube(entry) && cuffLeft(data) !== undefined),
+      cuffLeft,
+    ),
+    ...said(
+      record.latest(cuffStates, (_, entry) => onTube(entry)),
+      data => (isUp(data) ? 'inflated' : 'deflated'),
+    ),
+    ...said(
+      record.latest(weaningTrials, ({ cuffNow }, entry) => onTube(entry) && (cuffNow === 'up' || cuffNow === 'down')),
+      ({ cuffNow }) => (cuffNow === 'up' ? 'inflated' : 'deflated'),
+    ),
+    ...said(
+      record.latest(waterCuffs, (_, entry) => onTube(entry)),
+      ({ instilledMl }) => (instilledMl > 0 ? 'inflated' : 'deflated'),
+    ),
+  ].reduce<Said | undefined>((last, one) => (last && last.at >= one.at ? last : one), undefined)?.state
+}
+
+interface Said {
+  readonly at: Date
+  readonly state: 'inflated' | 'deflated' | undefined
+}
+
+/** The latest time at which the cuff of the tube in place was let go up again, not just read as up. */
+export function inflatedAt(record: PatientRecord): Date | undefined {
+  const tube = tubeInPlace(record)
+  const moments = [
+    record.latest(cuffChecks, data => data.cuffNow === 'inflated'),
+    record.latest(cuffStates, ({ act }) => act === 'up'),
+    record.latest(weaningTrials, ({ step, cuffNow }) => step === 'end' && cuffNow === 'up'),
+  ].flatMap(entry => (entry && tube && entry.performedAt >= tube.performedAt ? [entry.performedAt.getTime()] : []))
+  return moments.length === 0 ? undefined : new Date(Math.max(...moments))
 }
 
 /** How a check left the cuff: as charted, else up when there is pressure in it, else not said. */

@@ -1,9 +1,10 @@
 import { hours, minutes } from '../../time/duration.ts'
 import { type Clock, intervalClock, promptClock, sooner, suspended } from '../clock.ts'
 import type { CareContext, TaskRule } from '../kind.ts'
+import { isArrival, transfers } from '../transfer-checklist/schema.ts'
 import { withoutTube } from '../tube-change/tasks.ts'
 import { type TubeEntry, tubeInPlace } from '../tube-change/tube.ts'
-import { type CuffEntry, cuffState, endsInBand, isGauged } from './cuff.ts'
+import { type CuffEntry, cuffState, endsInBand, inflatedAt, isGauged } from './cuff.ts'
 import { cuffChecks } from './schema.ts'
 import { cuffEventCheck, cuffInterval, cuffLower, cuffRecheck, cuffUpper } from './settings.ts'
 
@@ -46,8 +47,7 @@ function cuffClock(tube: TubeEntry, context: CareContext): Clock {
 
 /** Since when the cuff has been up: a cuff let down and inflated again starts anew. */
 function upSince(tube: TubeEntry, record: CareContext['record']): Date {
-  const inflation = record.latest(cuffChecks, data => data.cuffNow === 'inflated')
-  return inflation && inflation.performedAt > tube.performedAt ? inflation.performedAt : tube.performedAt
+  return inflatedAt(record) ?? tube.performedAt
 }
 
 /** A reading left out of the band keeps the task open: measure again soon. A band set after it counts from then. */
@@ -64,13 +64,20 @@ function recheckClock(read: CuffEntry, done: CuffEntry | undefined, { values }: 
 
 /** Inflation, tube change, arrival, turn or transfer with no reading by gauge since. */
 function eventSince(read: CuffEntry | undefined, tube: TubeEntry, record: CareContext['record']) {
-  const isUnread = ({ performedAt }: { readonly performedAt: Date }) => !read || read.performedAt < performedAt
-  const event = record.since(cuffChecks, tube.performedAt).find(({ data }) => eventWords(data) !== undefined)
-  const because = event && eventWords(event.data)
-  if (event && because && isUnread(event)) return { event: event.performedAt, because }
-  if (!isUnread(tube)) return undefined
+  const isUnread = (at: Date) => !read || read.performedAt < at
+  const check = record.since(cuffChecks, tube.performedAt).find(({ data }) => eventWords(data) !== undefined)
+  const because = check && eventWords(check.data)
+  const inflated = inflatedAt(record)
+  const moved = record.since(transfers, tube.performedAt).find(isArrival)
   const came = tube.data.reason === 'on arrival' ? 'the patient arrived with this tube' : 'the tube was changed'
-  return { event: tube.performedAt, because: came }
+  return [
+    ...(check && because ? [{ event: check.performedAt, because }] : []),
+    ...(inflated ? [{ event: inflated, because: 'the cuff was inflated' }] : []),
+    ...(moved ? [{ event: moved.performedAt, because: 'the patient was moved' }] : []),
+    { event: tube.performedAt, because: came },
+  ]
+    .filter(({ event }) => isUnread(event))
+    .toSorted((a, b) => b.event.getTime() - a.event.getTime())[0]
 }
 
 /** What was charted in place of a reading by gauge, and asks for one. */

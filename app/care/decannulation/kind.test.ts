@@ -4,6 +4,7 @@ import { aContext, anEntry, aRemoval, aTube } from '../make.ts'
 import { usualCheck } from '../stoma-and-skin/examples.ts'
 import { stomaChecks } from '../stoma-and-skin/schema.ts'
 import { tubeChanges } from '../tube-change/schema.ts'
+import { tubesBack } from './failed.ts'
 import { decannulation } from './kind.ts'
 import { type DecannulationData, decannulations } from './schema.ts'
 import { removalWarnings, standingRemovalWarnings } from './warnings.ts'
@@ -13,6 +14,7 @@ const smooth: DecannulationData = {
   agreed: 'yes',
   operator: 'M. Osei',
   helper: 'T. Okafor',
+  kit: 'complete',
   breathing: 'comfortable',
   dressing: 'yes',
 }
@@ -20,7 +22,8 @@ const removed = (when: string, overrides: Partial<DecannulationData> = {}) =>
   anEntry(decannulations, when, { ...smooth, ...overrides })
 
 function warningsOf(overrides: Partial<DecannulationData>, upperAirway: PatientFacts['upperAirway'] = 'open') {
-  return removalWarnings({ ...smooth, ...overrides }, aContext([tube], '12:00', { patient: { upperAirway } }))
+  const all = removalWarnings({ ...smooth, ...overrides }, aContext([tube], '12:00', { patient: { upperAirway } }))
+  return all.filter(({ name }) => name !== 'removal-criteria-not-met')
 }
 
 test.each<[PatientFacts['upperAirway'], DecannulationData['dressing'], string | undefined]>([
@@ -69,7 +72,12 @@ test.each<[string, readonly StoredEntry[], string, readonly string[]]>([
   ['nothing while a tube is in', [], '12:00', []],
   ['the spare for 48 hours', [aRemoval('10:00')], '2026-03-12 10:00', ['after-removal']],
   ['nothing after that', [aRemoval('10:00')], '2026-03-12 10:01', []],
-  ['nothing once a tube is back', [aRemoval('10:00'), anEntry(tubeChanges, '10:30', aTube())], '12:00', []],
+  [
+    'a failed removal once a tube is back',
+    [aRemoval('10:00'), anEntry(tubeChanges, '10:30', aTube())],
+    '12:00',
+    ['removal-failed'],
+  ],
   ['bad breathing', [removed('10:00', { breathing: 'stridor' })], '12:00', ['removal-breathing', 'after-removal']],
   ['no bad breathing once looked at', [removed('10:00', { breathing: 'stridor' }), looked], '12:00', ['after-removal']],
   ['no amber ones', [removed('10:00', { agreed: 'no', dressing: 'no' })], '12:00', ['after-removal']],
@@ -85,6 +93,30 @@ test('it says until when the spare stays', () => {
 
 test('the sentence says who, how it went and what was noted', () => {
   expect(decannulation.summary({ ...smooth, agreed: 'no', dressing: 'no', note: 'Voice clear' })).toBe(
-    'Tube taken out for good by M. Osei with T. Okafor. Breathing comfortable. No airtight dressing. Not agreed by the team. Voice clear.',
+    'Tube taken out for good by M. Osei with T. Okafor. Breathing comfortable. Kit complete. No airtight dressing. Not agreed by the team. Voice clear.',
   )
+})
+
+test('what the record did not show as ready is said with the removal, and not refused', () => {
+  const [warning] = removalWarnings(smooth, aContext([tube], '12:00'))
+  expect(warning).toMatchObject({
+    name: 'removal-criteria-not-met',
+    level: 'amber',
+    cause:
+      'Not shown by the record before the tube came out: the cuff was charted as up; no cap trial was passed; readiness for removal was not charted.',
+  })
+})
+
+test('what was missing from the kit is got', () => {
+  expect(warningsOf({ kit: 'incomplete', kitMissing: ['dilators'] })).toMatchObject([
+    { name: 'removal-kit-incomplete', level: 'amber', cause: 'Missing at the bedside: tracheal dilators.' },
+  ])
+})
+
+test('a tube that went back in late is no failed removal', () => {
+  const back = anEntry(tubeChanges, '2026-03-07 10:01', aTube())
+  const out = aRemoval('2026-03-05 10:00')
+  expect(tubesBack(aContext([tube, out, back], '12:00').record, aContext([], '12:00').values)).toMatchObject([
+    { isFailure: false },
+  ])
 })

@@ -1,6 +1,7 @@
 import { careKind } from '../kind.ts'
 import { sentence } from '../sentence.ts'
-import { breathing, decannulations } from './schema.ts'
+import { plannedRemoval } from '../weaning-plan/tasks.ts'
+import { breathing, type DecannulationData, decannulations, removalKit } from './schema.ts'
 import { decannulationSettings } from './settings.ts'
 import { removalWarnings, standingRemovalWarnings } from './warnings.ts'
 
@@ -15,11 +16,41 @@ export const decannulation = careKind({
   settings: decannulationSettings,
   warnings: removalWarnings,
   standing: standingRemovalWarnings,
+  tasks: [plannedRemoval],
+  cautions: ['Two staff, with the whole kit at the bedside. Observations are due within minutes.'],
   examples: [
-    { agreed: 'yes', operator: 'A. Bergqvist', helper: 'T. Okafor', breathing: 'comfortable', dressing: 'yes' },
+    {
+      agreed: 'yes',
+      operator: 'A. Bergqvist',
+      helper: 'T. Okafor',
+      kit: 'complete',
+      breathing: 'comfortable',
+      dressing: 'yes',
+    },
+    {
+      agreed: 'no',
+      operator: 'A. Bergqvist',
+      helper: 'T. Okafor',
+      kit: 'incomplete',
+      kitMissing: ['dilators'],
+      breathing: 'laboured',
+      dressing: 'no',
+    },
   ],
-  summary: data =>
-    `Tube taken out for good by ${data.operator} with ${data.helper}. Breathing ${breathing[data.breathing].toLowerCase()}.${
-      data.dressing === 'yes' ? ' Airtight dressing on.' : ' No airtight dressing.'
-    }${data.agreed === 'no' ? ' Not agreed by the team.' : ''}${data.note ? ` ${sentence(data.note)}` : ''}`,
+  summary: removalSentence,
 })
+
+function removalSentence(data: DecannulationData): string {
+  const { operator, helper, kit, kitMissing = [], dressing, agreed, note } = data
+  return [
+    `Tube taken out for good by ${operator} with ${helper}.`,
+    `Breathing ${breathing[data.breathing].toLowerCase()}.`,
+    ...(kit === 'complete' ? ['Kit complete.'] : []),
+    ...(kitMissing.length > 0
+      ? [`Missing: ${kitMissing.map(item => removalKit[item].toLowerCase()).join(', ')}.`]
+      : []),
+    dressing === 'yes' ? 'Airtight dressing on.' : 'No airtight dressing.',
+    ...(agreed === 'no' ? ['Not agreed by the team.'] : []),
+    ...(note ? [sentence(note)] : []),
+  ].join(' ')
+}

@@ -1,17 +1,27 @@
 import { showDateTime } from '../../time/display.ts'
 import { hours, later } from '../../time/duration.ts'
+import { afterRemovals } from '../after-removal/schema.ts'
+import { cuffState } from '../cuff-pressure/cuff.ts'
 import { BREATHING_SOURCE, breathingAction } from '../emergency.ts'
 import type { CareContext } from '../kind.ts'
 import { standsSince } from '../standing.ts'
 import { stomaChecks } from '../stoma-and-skin/schema.ts'
 import { tubeOutSince } from '../tube-change/tube-absence.ts'
 import { LOCAL_PLAN, type Warning } from '../warning.ts'
-import { type DecannulationData, decannulations } from './schema.ts'
+import { unmetCriteria } from '../weaning-plan/criteria.ts'
+import { standingTubeBack } from './failed.ts'
+import { type DecannulationData, decannulations, removalKit } from './schema.ts'
 import { afterRemovalWatch } from './settings.ts'
 
 /** What the removal of a tube for good asks people to notice. */
 export function removalWarnings(data: DecannulationData, context: CareContext): readonly Warning[] {
-  return [...covered(data, context), ...breathing(data, context), ...notAgreed(data)]
+  return [
+    ...covered(data, context),
+    ...breathing(data, context),
+    ...notAgreed(data),
+    ...kitIncomplete(data),
+    ...againstCriteria(context),
+  ]
 }
 
 /** After a laryngectomy an airtight dressing closes the only airway; otherwise the opening is to be closed by one. */
@@ -70,12 +80,43 @@ function notAgreed({ agreed }: DecannulationData): readonly Warning[] {
   ]
 }
 
+function kitIncomplete({ kitMissing = [] }: DecannulationData): readonly Warning[] {
+  if (kitMissing.length === 0) return []
+  return [
+    {
+      name: 'removal-kit-incomplete',
+      level: 'amber',
+      action: 'Get what is missing now. Stay with the patient until it arrives.',
+      cause: `Missing at the bedside: ${kitMissing.map(item => removalKit[item].toLowerCase()).join(', ')}.`,
+      source: "Royal Marsden Manual and St George's NHS, decannulation: equipment at the bedside",
+    },
+  ]
+}
+
+/** It has been done: what the record did not show as ready is said, so that people watch for it. */
+function againstCriteria(context: CareContext): readonly Warning[] {
+  if (context.record.patient.upperAirway === 'not open') return []
+  const isUp = cuffState(context.record) === 'inflated'
+  const criteria = [...(isUp ? ['the cuff was charted as up'] : []), ...unmetCriteria('removal', context)]
+  if (criteria.length === 0) return []
+  return [
+    {
+      name: 'removal-criteria-not-met',
+      level: 'amber',
+      action: 'Watch closely, and tell the tracheostomy team today.',
+      cause: `Not shown by the record before the tube came out: ${criteria.join('; ')}.`,
+      source: 'Royal Marsden Manual, Ceriana: readiness for removal',
+    },
+  ]
+}
+
 /** What is red until the opening is looked at again, and for the first days that a tube may have to go back in. */
 export function standingRemovalWarnings(context: CareContext): readonly Warning[] {
   const { record, values, ward, now } = context
   const since = tubeOutSince(record)
-  if (!since) return []
-  const isLookedAt = record.since(stomaChecks, since).some(({ performedAt }) => performedAt > since)
+  if (!since) return standingTubeBack(context)
+  const looks = [...record.since(stomaChecks, since), ...record.since(afterRemovals, since)]
+  const isLookedAt = looks.some(({ performedAt }) => performedAt > since)
   const rule = { isSettledBy: () => true, warns: removalWarnings }
   const red = isLookedAt ? [] : standsSince(record.of(decannulations), rule, context).filter(isRed)
   const until = later(since, hours(values.of(afterRemovalWatch)))

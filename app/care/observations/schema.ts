@@ -1,6 +1,6 @@
 import type { z } from 'zod'
 import { spo2Range } from '../../clinical/observations.ts'
-import { careFields, choice, note, quantity } from '../field.ts'
+import { careFields, choice, choices, note, quantity } from '../field.ts'
 import { charted } from '../kind.ts'
 
 export const oxygenDevices = {
@@ -28,6 +28,32 @@ export const awareness = {
   unresponsive: 'Unresponsive',
   sedated: 'Sedated on purpose',
 } as const
+
+/** What may sit on the end of the tube. */
+export const onTubes = {
+  nothing: 'Nothing, or an exchanger',
+  valve: 'One-way valve',
+  cap: 'Cap',
+  circuit: 'Mask, circuit or ventilator',
+} as const
+
+/** Red flags worth a tick-list in each shift (NHS Wales, RCEM learning, a UK teaching hospital). */
+export const redFlags = {
+  none: 'None of these',
+  noise: 'Noisy breathing or stridor',
+  voice: 'Voice or bubbles with the cuff up',
+  muscles: 'Breathing pauses, or muscles of the neck at work',
+  secretions: 'Secretions that can be heard',
+  air: 'Cuff needs more air than before',
+  cannula: 'Inner cannula changed more often than before',
+  moved: 'Tube displaced, or its mark at the flange moved',
+  blood: 'Fresh blood',
+  swelling: 'New swelling of the neck, or air under the skin',
+  pain: 'Pain at tube or neck',
+  agitation: 'Agitation',
+  worse: 'Worse than before, without a clear cause',
+} as const
+export type RedFlag = keyof typeof redFlags
 
 const onOxygen = {
   when: { field: 'oxygen', is: ['stoma mask', 'exchanger', 't-piece', 'high flow', 'ventilator', 'other'] },
@@ -57,6 +83,10 @@ const fields = careFields({
   effort: choice({ label: 'Breathing', options: efforts }),
   heartRate: quantity({ label: 'Heart rate', unit: 'a min', min: 0, max: 250 }),
   awareness: choice({ label: 'Consciousness', options: awareness }),
+  onTube: choice({ label: 'On the tube', options: onTubes }).optional(),
+  redFlags: choices({ label: 'Red flags', hint: 'Looked for once in each shift', options: redFlags })
+    .refine(chosen => chosen.length === 1 || !chosen.includes('none'), 'None of these does not go with another')
+    .optional(),
   systolic: quantity({ label: 'Systolic blood pressure', unit: 'mmHg', min: 30, max: 300, more: true }).optional(),
   temperature: quantity({ label: 'Temperature', unit: '°C', min: 30, max: 43, step: 0.1, more: true }).optional(),
   note: note({ label: 'Note', more: true }).optional(),

@@ -1,5 +1,5 @@
 import { sentence } from '../sentence.ts'
-import { awareness, type ObservationData, oxygenDevices } from './schema.ts'
+import { awareness, type ObservationData, onTubes, oxygenDevices, redFlags } from './schema.ts'
 
 const breathing: Readonly<Record<ObservationData['effort'], string>> = {
   easy: 'Breathing easy',
@@ -17,8 +17,16 @@ export function observationSentence(data: ObservationData): string {
     `Heart rate ${heartRate} a min${systolic === undefined ? '' : `, systolic ${systolic} mmHg`}.`,
     ...(temperature === undefined ? [] : [`Temperature ${temperature} °C.`]),
     `${awareness[data.awareness]}.`,
+    ...(data.onTube ? [`On the tube: ${onTubes[data.onTube].toLowerCase()}.`] : []),
+    ...flagWords(data),
     ...(note ? [sentence(note)] : []),
   ].join(' ')
+}
+
+function flagWords({ redFlags: seen }: ObservationData): readonly string[] {
+  if (!seen) return []
+  const words = seen.map(flag => redFlags[flag].toLowerCase()).join('; ')
+  return [seen.includes('none') ? 'No red flags.' : `Red flags: ${words}.`]
 }
 
 function oxygenWords({ oxygen, fio2, flow }: ObservationData): string {

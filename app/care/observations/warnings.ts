@@ -1,7 +1,11 @@
+import { cuffState } from '../cuff-pressure/cuff.ts'
 import { BREATHING_SOURCE, breathingAction } from '../emergency.ts'
 import type { CareContext } from '../kind.ts'
 import { standsSince } from '../standing.ts'
 import type { Warning } from '../warning.ts'
+import { closedTube } from '../weaning-trial/closed-tube.ts'
+import { stopWarnings } from '../weaning-trial/stop.ts'
+import { redFlagWarnings } from './red-flags.ts'
 import { saturationWarnings } from './saturation.ts'
 import { awareness, type ObservationData, observationSets } from './schema.ts'
 import { heartHigh, heartLow, rateHigh, rateLow, systolicHigh, systolicLow } from './settings.ts'
@@ -9,11 +13,20 @@ import { heartHigh, heartLow, rateHigh, rateLow, systolicHigh, systolicLow } fro
 /** What a set of observations asks people to notice, most urgent first. */
 export function observationWarnings(data: ObservationData, context: CareContext): readonly Warning[] {
   return [
+    ...onTheTube(data, context),
     ...breathing(data, context),
+    ...stopWarnings(data, context),
+    ...redFlagWarnings(data, context),
     ...saturationWarnings(data, context),
     ...extremes(data, context),
     ...effortful(data),
   ]
+}
+
+/** A valve or cap seen on the tube, held against the cuff as charted. */
+function onTheTube({ onTube }: ObservationData, { record }: CareContext): readonly Warning[] {
+  if (onTube !== 'valve' && onTube !== 'cap') return []
+  return closedTube(onTube, { state: cuffState(record), upperAirway: record.patient.upperAirway })
 }
 
 function breathing({ effort }: ObservationData, { record }: CareContext): readonly Warning[] {

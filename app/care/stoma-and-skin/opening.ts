@@ -48,16 +48,18 @@ const oxygen = { open: 'Oxygen to face.', 'not open': 'Oxygen to the stoma.', 'n
 
 function neckSwelling({ appearance }: StomaData, { record }: CareContext): readonly Warning[] {
   const seen = (['surgical emphysema', 'neck swelling'] as const).filter(finding => appearance.includes(finding))
-  if (seen.length === 0) return []
-  return [
-    {
-      name: 'neck-swelling',
-      level: 'red',
-      action: `Stop any bagging through the tube. ${oxygen[record.patient.upperAirway]} Call for help now. ${LOCAL_PLAN}`,
-      cause: `${seen.map(finding => openingFindings[finding]).join('; ')}: the tube may lie outside the windpipe.`,
-      source: 'Emergency teaching texts (RCEM learning, NSW ACI)',
-    },
-  ]
+  return seen.length === 0 ? [] : [swellingWarning(seen.map(finding => openingFindings[finding]).join('; '), record)]
+}
+
+/** Air under the skin or a new swelling of the neck, as it was seen: nothing more is blown through the tube. */
+export function swellingWarning(seenWords: string, { patient }: CareContext['record']): Warning {
+  return {
+    name: 'neck-swelling',
+    level: 'red',
+    action: `Stop any bagging through the tube. ${oxygen[patient.upperAirway]} Call for help now. ${LOCAL_PLAN}`,
+    cause: `${seenWords}: the tube may lie outside the windpipe.`,
+    source: 'Emergency teaching texts (RCEM learning, NSW ACI)',
+  }
 }
 
 function infection(data: StomaData, { values }: CareContext): readonly Warning[] {

@@ -17,6 +17,7 @@ export const openingFindings = {
   'air leak': 'Enlarged, or air leaks around the tube',
   'neck swelling': 'New swelling of the neck',
   'surgical emphysema': 'Surgical emphysema (air under the skin)',
+  closed: 'Closed, after the tube came out for good',
 } as const
 
 export const exudateAmounts = { none: 'None', scant: 'Scant', moderate: 'Moderate', copious: 'Copious' } as const

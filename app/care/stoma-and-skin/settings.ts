@@ -37,4 +37,15 @@ export const infectionSigns = numberSetting({
   source: { says: 'No validated score for a tracheostomy stoma', standing: 'product proposal' },
 })
 
-export const stomaSettings = [dressingInterval, tiesMostFingers, infectionSigns]
+export const closingInterval = numberSetting({
+  name: 'opening-review-interval',
+  label: 'After removal for good the opening is looked at every',
+  unit: 'h',
+  default: 24,
+  min: 8,
+  max: 48,
+  affects: 'Stoma and skin: when the next look is due, until the opening has closed.',
+  source: { says: 'Dressing changed daily; an opening closes in 5 to 7 days', standing: 'published, read second-hand' },
+})
+
+export const stomaSettings = [dressingInterval, tiesMostFingers, infectionSigns, closingInterval]

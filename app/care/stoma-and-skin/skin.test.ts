@@ -155,6 +155,7 @@ test('an injury stands after the tube is out for good', () => {
     agreed: 'yes',
     operator: 'A. Haddad',
     helper: 'T. Okafor',
+    kit: 'complete',
     breathing: 'comfortable',
     dressing: 'yes',
   })

@@ -21,6 +21,7 @@ const removal = (when: string) =>
     agreed: 'yes',
     operator: 'A. Haddad',
     helper: 'T. Okafor',
+    kit: 'complete',
     breathing: 'comfortable',
     dressing: 'yes',
   })
@@ -73,12 +74,13 @@ test('a patient without a tube or a laryngectomy owes no inspection', () => {
   expect(dressingOf([])).toEqual({ state: 'none' })
 })
 
-test('after removal for good inspection stands still and says what to look at', () => {
-  expect(inspectionOf([tube(), check('08:00'), removal('10:00')])).toEqual({
-    state: 'suspended',
-    because: 'tube out for good since 10-Mar-2026; look at the opening daily until it has closed',
-  })
-  expect(dressingOf([tube(), removal('10:00')])).toMatchObject({ state: 'suspended' })
+test('after removal for good the opening is looked at daily until it has closed', () => {
+  const out = [tube(), check('2026-03-09 08:00'), removal('2026-03-09 10:00')]
+  expect(dueAt(inspectionOf(out))).toEqual(at('10:00'))
+  const closed = anEntry(stomaChecks, '09:00', { ...usualCheck, appearance: ['closed'] })
+  expect(dueAt(inspectionOf([...out, check('08:30')]))).toEqual(at('2026-03-11 08:30'))
+  expect(inspectionOf([...out, closed])).toEqual({ state: 'suspended', because: 'opening closed on 10-Mar-2026' })
+  expect(dressingOf(out)).toMatchObject({ state: 'suspended' })
 })
 
 test('a tube put back after removal starts the shift of its insertion', () => {

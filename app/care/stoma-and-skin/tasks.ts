@@ -1,3 +1,4 @@
+import { showDate } from '../../time/display.ts'
 import { hours } from '../../time/duration.ts'
 import { type Clock, intervalClock, noClock, shiftClock, suspended } from '../clock.ts'
 import { decannulations } from '../decannulation/schema.ts'
@@ -7,14 +8,14 @@ import { absenceWords, sutureRemoval, withoutTube } from '../tube-change/tasks.t
 import { tubeInPlace } from '../tube-change/tube.ts'
 import { tubeAbsence } from '../tube-change/tube-absence.ts'
 import { sitesLeftOut, stomaChecks } from './schema.ts'
-import { dressingInterval } from './settings.ts'
+import { closingInterval, dressingInterval } from './settings.ts'
 
 const inspection: TaskRule = {
   name: 'stoma-inspection',
   airway: false,
-  settings: [],
-  says: () =>
-    'Once in each shift: the opening, and the skin under all sides of the flange, under sutures and under the ties. A look at some of these places does not count.',
+  settings: [closingInterval],
+  says: ({ values }) =>
+    `Once in each shift: the opening, and the skin under all sides of the flange, under sutures and under the ties. A look at some of these places does not count. After removal for good every ${values.of(closingInterval)} hours until the opening has closed.`,
   clock(context) {
     const { record, ward } = context
     const tube = tubeInPlace(record)
@@ -53,11 +54,16 @@ export function isLaryngectomy({ record }: Pick<CareContext, 'record'>): boolean
   return record.patient.upperAirway === 'not open'
 }
 
-function withoutOpening({ record, ward }: CareContext): Clock {
+/** After removal for good: a look a day until the opening is charted as closed. */
+function withoutOpening({ record, values, ward }: CareContext): Clock {
   const absence = tubeAbsence(record)
   if (!absence) return noClock
-  const words = absenceWords(absence, ward.zone)
-  return suspended(absence.why === 'came out' ? words : `${words}; look at the opening daily until it has closed`)
+  if (absence.why === 'came out') return suspended(absenceWords(absence, ward.zone))
+  const [last] = record.since(stomaChecks, absence.since)
+  if (last?.data.appearance.includes('closed')) {
+    return suspended(`opening closed on ${showDate(last.performedAt, ward.zone)}`)
+  }
+  return intervalClock({ last, start: absence.since, interval: hours(values.of(closingInterval)) })
 }
 
 /** The latest act that put on a fresh dressing. A tube that was in place on arrival is not an act. */

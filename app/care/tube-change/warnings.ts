@@ -1,6 +1,7 @@
 import { dwellDay } from '../../clinical/dwell.ts'
 import { hours, since } from '../../time/duration.ts'
 import { localDay } from '../../time/zone.ts'
+import { tubeBackNow } from '../decannulation/failed.ts'
 import { BLEED_ACTION } from '../emergency.ts'
 import { absentWarning } from '../inner-cannula/fit.ts'
 import type { CareContext } from '../kind.ts'
@@ -29,6 +30,7 @@ export function tubeWarnings(data: TubeData, context: CareContext): readonly War
     ...unconfirmed(data),
     ...noInnerCannula(data),
     ...displacedAgain(data, context),
+    ...(data.difficulty === 'failed' ? [] : tubeBackNow(context)),
     ...expired(data, context),
     ...datesInDoubt(data, context),
   ]

@@ -1,0 +1,2 @@
+/** The task that observations are due by; what runs under observation names it. */
+export const observationTaskName = 'observations'
