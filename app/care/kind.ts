@@ -147,6 +147,11 @@ export interface CareKind<Slug extends string, Schema extends z.ZodObject> exten
   ): { readonly words: string; readonly answers: Readonly<Record<string, unknown>> } | undefined
   /** What runs now. */
   running?(context: CareContext): readonly RunningAct[]
+  /**
+   * Options that the form of this patient does not offer, by field; a field with none left is not asked. Only the form: what was
+   * found so is taken and warned of.
+   */
+  notOffered?(context: CareContext): Readonly<Record<string, readonly string[]>>
   gauges?(context: CareContext): readonly Gauge[]
   /** Warnings about this act; `context.record` does not hold it yet, `context.now` is when it was done. */
   warnings?(data: z.output<Schema>, context: CareContext): readonly Warning[]

@@ -118,7 +118,7 @@ interface OnlyIfProps {
 function OnlyIf({ when, all }: OnlyIfProps): ReactNode {
   const other = all.find(field => field.name === when.field)?.meta
   if (!other) return null
-  const names = when.is.map(value => ('options' in other ? (other.options[value] ?? value) : value))
+  const names = when.is.flatMap(value => ('options' in other ? (other.options[value] ?? []) : value))
   return (
     <p className="hidden text-sm text-ink2 unscripted:block">{`Only if "${other.label}" is: ${names.join(', ')}.`}</p>
   )

@@ -13,7 +13,7 @@ import { ChartErrors, fieldId } from './chart-errors.tsx'
 import { ChartFoot } from './chart-foot.tsx'
 import { useChartLive } from './chart-live.ts'
 import { OwnSignature, SecondPerson } from './chart-signing.tsx'
-import type { DrawnField } from './conform-fields.ts'
+import { drawnOf } from './drawn-fields.ts'
 import { fillForm } from './fill-form.ts'
 import { Warnings } from './warnings.tsx'
 
@@ -30,6 +30,7 @@ export interface ChartFormProps {
     readonly calendar: Calendar
     readonly typed: Typed
     readonly gauges: readonly Gauge[]
+    readonly notOffered: Readonly<Record<string, readonly string[]>>
     readonly lists: Readonly<Record<'task' | 'setting', Readonly<Record<string, string>>>>
     readonly units: Readonly<Record<string, string>>
     readonly witnesses: Readonly<Record<string, string>>
@@ -74,7 +75,7 @@ export function ChartForm({ kind, view, answer, words, cancelHref, reasonAfterHo
         <ChartErrors kind={kind} answer={answer} />
         {children?.(answers => form.current && fillForm(form.current, answers))}
         <CareFields
-          fields={drawn(kind, typed, errors)}
+          fields={drawnOf(kind, { typed, errors, notOffered: view.notOffered })}
           gauges={view.gauges}
           lists={view.lists}
           units={view.units}
@@ -128,13 +129,6 @@ function useKeyboardFocus(form: { readonly current: HTMLFormElement | null }, ki
 /** The password was not needed when the form opened, and is by now. */
 const asksPassword = (answer: ChartAnswer | undefined): boolean =>
   answer?.is === 'refused' && answer.errors.signerPassword !== undefined
-
-function drawn(kind: AnyCareKind, typed: Typed, errors: FormErrors): readonly DrawnField[] {
-  return fieldsOf(kind.schema).map(field => {
-    const fullName = `care.${field.name}`
-    return { ...field, id: fieldId(fullName), fullName, answers: typed[fullName] ?? [], errors: errors[fullName] }
-  })
-}
 
 function momentOf(text: string | undefined): number | undefined {
   const ms = text === undefined ? Number.NaN : Date.parse(text)

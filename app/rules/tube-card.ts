@@ -1,4 +1,5 @@
 import { cuffState } from '../care/cuff-pressure/cuff.ts'
+import { pairWords } from '../care/inner-cannula/pair.ts'
 import type { CareContext } from '../care/kind.ts'
 import { catheterRule } from '../care/suction/catheter.ts'
 import { blindReinsertionBefore, tractEstablishedAfter } from '../care/tube-change/settings.ts'
@@ -89,6 +90,7 @@ function buildFacts(data: TubeData, context: CareContext) {
       value: `${capital(data.construction)} cannula${data.fenestrated === 'yes' ? ', fenestrated' : ''}`,
     },
     ...(data.construction === 'dual' ? [{ term: 'Inner cannula', value: innerWords(data) }] : []),
+    ...pairFact(context),
     { term: '15 mm connector', value: connectors[data.connector] },
     ...(data.flange === 'adjustable' ? [{ term: 'Flange', value: `Adjustable, at ${data.flangeMarkCm} cm` }] : []),
     { term: 'Suction catheter', value: catheter === undefined ? 'None in stock fits' : `${catheter} Fr at most` },
@@ -122,6 +124,11 @@ function timeFacts(context: CareContext) {
     { term: 'Change by', value: `${showDay(limit.changeBy)} (${limit.because})` },
     ...plannedFact(context),
   ]
+}
+
+function pairFact(context: CareContext) {
+  const words = pairWords(context)
+  return words === undefined ? [] : [{ term: 'Reusable pair', value: words }]
 }
 
 function plannedFact({ record }: CareContext) {

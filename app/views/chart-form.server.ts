@@ -33,6 +33,7 @@ export interface ChartFormView {
   /** The usual act in words, with its answers. */
   readonly usual: { readonly words: string; readonly answers: Typed } | null
   readonly gauges: readonly Gauge[]
+  readonly notOffered: Readonly<Record<string, readonly string[]>>
   readonly lists: Readonly<Record<'task' | 'setting', Readonly<Record<string, string>>>>
   readonly units: Readonly<Record<string, string>>
   readonly witnesses: Readonly<Record<string, string>>
@@ -93,6 +94,7 @@ export function frameOf(kind: AnyCareKind, { care, user, now, signedInAt }: Omit
     signing: signingAsk(kind, { user, context, now, signedInAt }),
     calendar: calendarOf(care, now),
     gauges: context ? (kind.gauges?.(context) ?? []) : [],
+    notOffered: context ? (kind.notOffered?.(context) ?? {}) : {},
     lists: { task: context ? deferrable(context) : {}, setting: label },
     units,
     reasonAfterHours: context?.values.of(lateReasonAfter) ?? lateReasonAfter.default,

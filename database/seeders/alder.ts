@@ -1,10 +1,12 @@
 import {
   blockCleared,
+  changePlanned,
   cuffLeftHigh,
   digitsSwapped,
   heavyCoating,
   noted,
   ownValue,
+  pairInCleaning,
   putOff,
   writtenLate,
   wrongPatient,
@@ -41,7 +43,11 @@ export const alderStories: readonly BedStory[] = [
     tube: { name: 'corvane 7', inserted: { daysAgo: 26, stomaDaysAgo: 41 }, technique: 'surgical' },
     secretions: 'thin',
     stands: { inner: -3, cuff: -2.2, suction: -2.8, dressing: -3.1, stoma: 'done' },
-    extra: [digitsSwapped(15.3), noted(27.2, 'Writes on a slate. Prefers to be asked yes or no.')],
+    extra: [
+      changePlanned(20.4, 1),
+      digitsSwapped(15.3),
+      noted(27.2, 'Writes on a slate. Prefers to be asked yes or no.'),
+    ],
   },
   {
     bed: 'A4',
@@ -50,7 +56,7 @@ export const alderStories: readonly BedStory[] = [
     tube: { name: 'corvane 8', inserted: { daysAgo: 29, stomaDaysAgo: 52 }, technique: 'percutaneous' },
     secretions: 'moderate',
     stands: { inner: -1.6, cuff: 1.4, suction: -2.2, dressing: -9, stoma: 'done' },
-    extra: [wrongPatient(21.4)],
+    extra: [changePlanned(30.2, 0, { fasted: 'yes' }), wrongPatient(21.4)],
   },
   {
     bed: 'A5',
@@ -59,6 +65,7 @@ export const alderStories: readonly BedStory[] = [
     tube: { name: 'halden 6', inserted: { daysAgo: 11, stomaDaysAgo: 33 }, technique: 'surgical' },
     secretions: 'thin',
     stands: { inner: -4.5, innerRenewal: -3.2, suction: -0.7, dressing: -12, stoma: 'done', oralCare: 1.6 },
+    extra: [pairInCleaning(1.9)],
   },
   {
     bed: 'A6',

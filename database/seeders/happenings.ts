@@ -7,6 +7,7 @@ import { freeNotes } from '#app/care/free-note/schema.ts'
 import { innerCannulaActs } from '#app/care/inner-cannula/schema.ts'
 import { observationSets } from '#app/care/observations/schema.ts'
 import { suctions } from '#app/care/suction/schema.ts'
+import { type TubePlanData, tubePlans } from '#app/care/tube-change-plan/schema.ts'
 import { addDays, localDay } from '#app/time/zone.ts'
 import { type Bedside, hoursBefore, placeAt, tubeAt } from './bedside.ts'
 import { foundBy } from './chart-cuff.ts'
@@ -35,6 +36,41 @@ export function withoutSpare(hoursAgo: number): Happening {
     const fit = { line: tube.line, size: tube.size, locked: 'yes', spare: 'no' } as const
     const note = 'Last one used. Stores asked for more.'
     return [draft(innerCannulaActs, at, { act: 'replaced', condition: 'light', ...fit, tolerance: 'well', note })]
+  }
+}
+
+/** The other one of a reusable pair went to be cleaned and is not back. */
+export function pairInCleaning(hoursAgo: number): Happening {
+  return bedside => {
+    const { at } = momentOf(bedside, hoursAgo)
+    const note = 'In the cleaning room. No other one of this size on the ward.'
+    return [draft(innerCannulaActs, at, { act: 'other only', other: 'cleaning', spare: 'no', note })]
+  }
+}
+
+/** A change of the tube planned through its gate, so many days from the end of the story. */
+export function changePlanned(hoursAgo: number, inDays: number, more: Partial<TubePlanData> = {}): Happening {
+  return bedside => {
+    const { at, tube } = momentOf(bedside, hoursAgo)
+    const { ward, bed } = placeAt(bedside, at)
+    const plan: TubePlanData = {
+      step: 'plan',
+      plannedOn: addDays(localDay(bedside.now, bedside.zone), inDays),
+      indication: 'routine',
+      newTube: `${tube.line} ${tube.size}`,
+      contraindications: ['none'],
+      operator: bedside.rota.lead(ward, 'tracheostomy specialist').name,
+      helper: bedside.rota.nurse(ward, bed, at).name,
+      equipment: 'yes',
+      spareSame: 'yes',
+      spareSmaller: 'yes',
+      fasted: 'arranged',
+      capnography: 'yes',
+      consent: 'given',
+      ifItFails: 'Oxygen to face and stoma, airway team called, then the tube one size smaller over a guide',
+      ...more,
+    }
+    return [draft(tubePlans, at, plan, { by: 'tracheostomy specialist' })]
   }
 }
 

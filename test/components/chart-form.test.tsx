@@ -27,6 +27,7 @@ const view: ChartFormProps['view'] = {
   calendar: { zone: 'Europe/London', now, beganAt: new Date('2026-03-01T08:00:00.000Z'), endedAt: null },
   typed: { 'care.unit': ['cmH2O'] },
   gauges: [],
+  notOffered: {},
   lists: { task: {}, setting: {} },
   units: {},
   witnesses: {},

@@ -20,6 +20,7 @@ const rows: readonly Row[] = [
   ['inner-cannula-reusable-interval', 24, 'M', 'At least once a day'],
   ['inner-cannula-recheck', 2, 'P', 'as a recheck a proposal'],
   ['inner-cannula-repeat-block-window', 24, 'P', 'without a number'],
+  ['inner-cannula-cleaning-within', 60, 'P', 'the minutes are a proposal'],
   // Cuff (3.2, 4.1)
   ['cuff-pressure-lower-limit', 20, 'V', 'Lizy 2014'],
   ['cuff-pressure-upper-limit', 30, 'V', 'BMJ 1984'],

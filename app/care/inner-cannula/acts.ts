@@ -4,10 +4,10 @@ import { type InnerCannulaData, innerCannulaActs } from './schema.ts'
 
 export type InnerCannulaEntry = Entry<InnerCannulaData>
 
-/** Acts on the inner cannula of the tube in place, latest first; none after a tube was taken out for good. */
+/** Acts on the inner cannula that is in the tube in place, latest first; none while no tube is in. */
 export function actsOnTube(record: PatientRecord): readonly InnerCannulaEntry[] {
   const tube = tubeInPlace(record)
-  return tube ? record.since(innerCannulaActs, tube.performedAt) : []
+  return tube ? record.since(innerCannulaActs, tube.performedAt).filter(({ data }) => data.act !== 'other only') : []
 }
 
 /** Half of the lumen or more was gone. */
@@ -22,7 +22,7 @@ export function isPartlyBlocked(data: InnerCannulaData): boolean {
 
 /** Whether the act says how the cannula looked: only then does it follow or lift an earlier finding. */
 export function wasSeen({ condition }: InnerCannulaData): boolean {
-  return condition !== 'not seen'
+  return condition !== undefined && condition !== 'not seen'
 }
 
 /** Taken out, looked at, and a patent cannula is back in. A narrowed one that was put back as it was does not count. */

@@ -58,4 +58,15 @@ export const innerCannulaExamples: readonly InnerCannulaData[] = [
     tolerance: 'cough',
     note: 'Specialist called.',
   },
+  { act: 'other only', spare: 'yes', other: 'ready', note: 'Dried and closed in its box.' },
+  {
+    act: 'replaced',
+    condition: 'light',
+    line: 'Corvane Dual',
+    size: '8.0',
+    locked: 'yes',
+    spare: 'yes',
+    foundReused: 'yes',
+    tolerance: 'well',
+  },
 ]

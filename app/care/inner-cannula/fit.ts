@@ -14,7 +14,7 @@ export interface FitRule {
   readonly isSettledBy: (data: InnerCannulaData) => boolean
 }
 
-const putsBack = ({ act }: InnerCannulaData) => act !== 'unable'
+const putsBack = ({ act }: InnerCannulaData) => act !== 'unable' && act !== 'other only'
 
 /** A tube left without its inner cannula. */
 export const absence: FitRule = {
@@ -77,18 +77,25 @@ function plain(words: string): string {
   return /^\d+([.,]\d+)?$/.test(text) ? String(Number(text.replace(',', '.'))) : text
 }
 
-const reused: Rule = (data, { record }) =>
-  (data.act === 'cleaned' || data.act === 'swapped') && tubeInPlace(record)?.data.innerCannula === 'disposable'
-    ? [
-        {
-          name: 'inner-cannula-reused',
-          level: 'amber',
-          action: 'This is single use. Replace it with a new one.',
-          cause: `Charted as ${data.act === 'cleaned' ? 'cleaned and put back' : 'swapped for the clean spare'}; this tube takes a disposable inner cannula.`,
-          source: 'Device labelling',
-        },
-      ]
-    : []
+/** A single-use cannula that went back in, by this act or before it was found; silent once it was thrown away. */
+const reused: Rule = (data, { record }) => {
+  const isSingleUse = tubeInPlace(record)?.data.innerCannula === 'disposable'
+  const goesBack = data.act === 'cleaned' || data.act === 'swapped'
+  const isFound = data.foundReused === 'yes' && data.act !== 'replaced'
+  if (!isFound && !(isSingleUse && goesBack)) return []
+  const charted = goesBack
+    ? `Charted as ${data.act === 'cleaned' ? 'cleaned and put back' : 'swapped for the clean spare'}`
+    : 'Found cleaned and used again'
+  return [
+    {
+      name: 'inner-cannula-reused',
+      level: 'amber',
+      action: 'This is single use. Replace it with a new one.',
+      cause: `${charted}; this tube takes a disposable inner cannula.`,
+      source: 'Device labelling',
+    },
+  ]
+}
 
 const notLocked: Rule = data =>
   data.locked === 'no'

@@ -18,12 +18,12 @@ test('the form starts with line and size of a dual tube, and with nothing else',
   expect(innerCannula.startsWith?.(aContext([], '12:00'))).toEqual({})
 })
 
-test.each<[TubeData['innerCannula'], string]>([
-  ['disposable', 'replaced'],
-  ['reusable', 'swapped'],
-])('the usual act for a %s one is %s, without its condition', (type, act) => {
+test.each<[TubeData['innerCannula'], object]>([
+  ['disposable', { act: 'replaced' }],
+  ['reusable', { act: 'swapped', other: 'cleaning' }],
+])('the usual act for a %s one is %j, without its condition', (type, act) => {
   expect(innerCannula.usual?.(withTube({ innerCannula: type }))?.answers).toEqual({
-    act,
+    ...act,
     line: 'Alder',
     size: '8.0',
     locked: 'yes',
@@ -78,6 +78,8 @@ test('the sentence says what was done, found and left', () => {
     'Inner cannula swapped for the clean spare. Found half blocked or more. Halden, 6. Locked. Spare at the bedside. SpO2 fell to 90%. Secretions moderate, yellow, thick. Oxygen given before. With T. Okafor. Nebuliser given before.',
     'Inner cannula cleaned and put back. Found less than half blocked. Halden, 6, lot H26-0192, expires 31-Jan-2029. Locked. No spare at the bedside. Tolerated well.',
     'Inner cannula care could not be done: it would not come out. Condition not seen. Spare at the bedside. Coughed. Specialist called.',
+    'Inner cannula left in; the other one of the pair seen to. Spare at the bedside. Other one of the pair: clean and ready. Dried and closed in its box.',
+    'Inner cannula replaced with new. Found with a light coating. Found cleaned and used again, though single use. Corvane Dual, 8.0. Locked. Spare at the bedside. Tolerated well.',
   ])
 })
 

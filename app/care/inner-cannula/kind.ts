@@ -5,7 +5,7 @@ import { innerCannulaExamples } from './examples.ts'
 import { innerCannulaActs } from './schema.ts'
 import { innerCannulaSentence } from './sentence.ts'
 import { innerCannulaSettings } from './settings.ts'
-import { innerCannulaStart, usualInnerCannula } from './start.ts'
+import { innerCannulaStart, notOfferedOfCannula, usualInnerCannula } from './start.ts'
 import { innerCannulaUse, plannedInnerCannulas } from './supplies.ts'
 import { innerCannulaTasks } from './tasks.ts'
 import { innerCannulaWarnings, standingInnerCannulaWarnings } from './warnings.ts'
@@ -24,6 +24,7 @@ export const innerCannula = careKind({
   tasks: innerCannulaTasks,
   startsWith: innerCannulaStart,
   usual: usualInnerCannula,
+  notOffered: notOfferedOfCannula,
   uses: innerCannulaUse,
   plannedUse: plannedInnerCannulas,
   warnings: innerCannulaWarnings,

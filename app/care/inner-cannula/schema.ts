@@ -6,6 +6,15 @@ import { amountField, bloodField, colourField, consistencyField } from '../sucti
 
 const backIn = { field: 'act', is: ['inspected', 'cleaned', 'replaced', 'swapped'] }
 
+/** The cannula in place was taken out, or somebody tried to. */
+const touched = {
+  when: { field: 'act', is: ['inspected', 'cleaned', 'replaced', 'swapped', 'unable'] },
+  neededThen: true,
+}
+
+/** Where the cannula of a reusable pair is that is not in the tube. */
+export const otherPlaces = { ready: 'Clean and ready', cleaning: 'Being cleaned', lost: 'Lost or broken' } as const
+
 const fields = careFields({
   act: choice({
     label: 'Care given',
@@ -14,6 +23,7 @@ const fields = careFields({
       cleaned: 'Cleaned and put back',
       replaced: 'Replaced with new',
       swapped: 'Swapped for the clean spare',
+      'other only': 'Left in; only the other of the pair',
       unable: 'Could not be done',
     },
   }),
@@ -41,7 +51,8 @@ const fields = careFields({
       none: 'None was in place',
       'not seen': 'Not seen',
     },
-  }),
+    ...touched,
+  }).optional(),
   line: text({
     label: 'Line of the inner cannula',
     section: 'In place now',
@@ -55,11 +66,22 @@ const fields = careFields({
     neededThen: true,
   }).optional(),
   spare: choice({ label: 'Matching spare at the bedside', options: yesNo }),
+  other: choice({
+    label: 'Other one of the pair',
+    hint: 'Of a reusable pair: the one that is not in',
+    options: otherPlaces,
+  }).optional(),
+  foundReused: choice({
+    label: 'Single-use cannula found cleaned and used again',
+    options: yesNo,
+    more: true,
+  }).optional(),
   tolerance: choice({
     label: 'Tolerance',
     section: 'The patient',
     options: { well: 'Well', cough: 'Cough', desaturation: 'SpO2 fell', distress: 'Distress' },
-  }),
+    ...touched,
+  }).optional(),
   spo2Low: quantity({
     label: 'Lowest SpO2',
     unit: '%',
@@ -95,6 +117,9 @@ export const innerCannulaSchema = fields.superRefine((data, context) => {
       path: ['act'],
       message: 'None was in place: choose what was fitted, or why not',
     })
+  }
+  if (data.act === 'other only' && data.other === undefined) {
+    context.addIssue({ code: 'custom', path: ['other'], message: 'Choose where the other one of the pair is' })
   }
   if (data.act !== 'replaced' && data.act !== 'swapped') return
   for (const name of ['line', 'size'] as const) {

@@ -2,9 +2,10 @@ import { showDay } from '../../time/display.ts'
 import { sentence } from '../sentence.ts'
 import { secretionSentences } from '../suction/secretions.ts'
 import { isLeftOut } from './acts.ts'
-import type { InnerCannulaData } from './schema.ts'
+import { type InnerCannulaData, otherPlaces } from './schema.ts'
 
 const done: Readonly<Record<InnerCannulaData['act'], string>> = {
+  'other only': 'Inner cannula left in; the other one of the pair seen to',
   inspected: 'Inner cannula looked at and put back',
   cleaned: 'Inner cannula cleaned and put back',
   replaced: 'Inner cannula replaced with new',
@@ -20,7 +21,7 @@ const why: Readonly<Record<NonNullable<InnerCannulaData['whyUnable']>, string>> 
   other: 'other reason',
 }
 
-const found: Readonly<Record<InnerCannulaData['condition'], string>> = {
+const found: Readonly<Record<NonNullable<InnerCannulaData['condition']>, string>> = {
   clear: 'Found clear.',
   light: 'Found with a light coating.',
   moderate: 'Found less than half blocked.',
@@ -30,7 +31,7 @@ const found: Readonly<Record<InnerCannulaData['condition'], string>> = {
   'not seen': 'Condition not seen.',
 }
 
-const borne: Readonly<Record<InnerCannulaData['tolerance'], string>> = {
+const borne: Readonly<Record<NonNullable<InnerCannulaData['tolerance']>, string>> = {
   well: 'Tolerated well.',
   cough: 'Coughed.',
   desaturation: 'SpO2 fell',
@@ -41,14 +42,20 @@ const borne: Readonly<Record<InnerCannulaData['tolerance'], string>> = {
 export function innerCannulaSentence(data: InnerCannulaData): string {
   return [
     `${done[data.act]}${data.whyUnable ? `: ${why[data.whyUnable]}` : ''}.`,
-    found[data.condition],
+    ...(data.condition ? [found[data.condition]] : []),
+    ...(data.foundReused === 'yes' ? ['Found cleaned and used again, though single use.'] : []),
     ...inPlace(data),
-    data.tolerance === 'desaturation' ? `SpO2 fell to ${data.spo2Low}%.` : borne[data.tolerance],
+    ...borneWords(data),
     ...secretionSentences(data),
     ...(data.preOxygenated === 'yes' ? ['Oxygen given before.'] : []),
     ...(data.assistant ? [`With ${data.assistant}.`] : []),
     ...(data.note ? [sentence(data.note)] : []),
   ].join(' ')
+}
+
+function borneWords({ tolerance, spo2Low }: InnerCannulaData): readonly string[] {
+  if (tolerance === undefined) return []
+  return [tolerance === 'desaturation' ? `SpO2 fell to ${spo2Low}%.` : borne[tolerance]]
 }
 
 function inPlace(data: InnerCannulaData): readonly string[] {
@@ -63,5 +70,6 @@ function inPlace(data: InnerCannulaData): readonly string[] {
     ...(isLeftOut(data) ? ['None in place now.'] : cannula ? [`${cannula}.`] : []),
     ...(data.locked ? [data.locked === 'yes' ? 'Locked.' : 'Not locked.'] : []),
     data.spare === 'yes' ? 'Spare at the bedside.' : 'No spare at the bedside.',
+    ...(data.other ? [`Other one of the pair: ${otherPlaces[data.other].toLowerCase()}.`] : []),
   ]
 }

@@ -94,6 +94,17 @@ export const repeatBlockWindow = numberSetting({
   },
 })
 
+export const cleaningWithin = numberSetting({
+  name: 'inner-cannula-cleaning-within',
+  label: 'The other one of a reusable pair is clean and ready again within',
+  unit: 'min',
+  default: 60,
+  min: 10,
+  max: 240,
+  affects: 'Inner cannula: when the note that there is no clean spare becomes a warning.',
+  source: { says: 'Two in rotation, a clean one ready; the minutes are a proposal', standing: 'product proposal' },
+})
+
 export const innerCannulaSettings = [
   inspectionInterval,
   earlyInterval,
@@ -102,4 +113,5 @@ export const innerCannulaSettings = [
   reusableInterval,
   recheckWithin,
   repeatBlockWindow,
+  cleaningWithin,
 ]

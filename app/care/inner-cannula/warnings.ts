@@ -9,7 +9,8 @@ import type { Warning } from '../warning.ts'
 import { actsOnTube, wasSeen } from './acts.ts'
 import { absence, absentWarning, fitRules, noSpare } from './fit.ts'
 import { narrowed, repeatedBlock, shorterInterval, standingBlocks, stillNarrowed } from './narrowing.ts'
-import type { InnerCannulaData } from './schema.ts'
+import { pairState, standingPair } from './pair.ts'
+import { type InnerCannulaData, innerCannulaActs } from './schema.ts'
 
 /** What an act on the inner cannula asks people to notice as it is charted. */
 export function innerCannulaWarnings(data: InnerCannulaData, context: CareContext): readonly Warning[] {
@@ -50,6 +51,7 @@ export function standingInnerCannulaWarnings(context: CareContext): readonly War
     ...neverFitted(context),
     ...fitRules.flatMap(rule => standsSince(acts, rule, context)),
     ...spareMissing(context),
+    ...standingPair(context),
     ...stillNarrowed(context),
     ...standingBlocks(context),
     ...shorterInterval(context),
@@ -58,8 +60,12 @@ export function standingInnerCannulaWarnings(context: CareContext): readonly War
 
 /** No spare at the last act stands until an act found one, or a check of the kit found everything there. */
 function spareMissing(context: CareContext): readonly Warning[] {
-  const whole = lastComplete(context.record)?.performedAt
-  const acts = actsOnTube(context.record).filter(({ performedAt }) => !whole || performedAt >= whole)
+  const { record } = context
+  const whole = lastComplete(record)?.performedAt
+  const from = tubeInPlace(record)?.performedAt
+  // Of a pair whose other one is not ready, the warning of the pair says it.
+  if (from === undefined || (pairState(record)?.other ?? 'ready') !== 'ready') return []
+  const acts = record.since(innerCannulaActs, from).filter(({ performedAt }) => !whole || performedAt >= whole)
   return standsSince(acts, { isSettledBy: () => true, warns: noSpare }, context)
 }
 

@@ -176,5 +176,5 @@ test('the rules are said with the numbers in force', () => {
   expect(says([first('not known')])?.[0]).toContain(
     'from day 7, by day 10 after insertion. How the opening was made is not known',
   )
-  expect(says([tube(undefined, single), ...heavy])?.[1]).toContain('with heavy secretions: 7 days')
+  expect(says([tube(undefined, single), ...heavy])?.[2]).toContain('with heavy secretions: 7 days')
 })
