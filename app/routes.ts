@@ -24,11 +24,13 @@ export default [
     route('patients/:patientId', 'routes/patient.tsx', [
       index('routes/timeline.tsx'),
       route('emergency', 'routes/emergency.tsx'),
+      route('sign', 'routes/sign.tsx'),
       route('chart/:kind', 'routes/chart.tsx'),
       route('details', 'routes/patient-details.tsx'),
       route('move', 'routes/move.tsx'),
       route('discharge', 'routes/discharge.tsx'),
     ]),
+    route('patients/:patientId/sign.pdf', 'routes/sign-pdf.ts'),
     route('entries/:entryId', 'routes/entry.tsx'),
     route('entries/:entryId/correct', 'routes/correct.tsx'),
     route('entries/:entryId/retract', 'routes/retract.tsx'),

@@ -210,6 +210,8 @@ CREATE TABLE `patients` (
   `sex` varchar(16) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
   `allergies` varchar(500) DEFAULT NULL COMMENT 'null: nobody has asked; that there are none is written in words',
   `upper_airway` varchar(16) CHARACTER SET ascii COLLATE ascii_bin NOT NULL COMMENT 'not open: after laryngectomy',
+  `laryngoscopy` char(1) CHARACTER SET ascii COLLATE ascii_bin DEFAULT NULL COMMENT 'view at laryngoscopy, by its grade',
+  `airway_notes` varchar(500) DEFAULT NULL,
   `ventilated` tinyint(1) NOT NULL,
   `oxygen` varchar(120) DEFAULT NULL COMMENT 'as prescribed, in words',
   `spo2_low` tinyint(3) unsigned DEFAULT NULL COMMENT 'prescribed target in %',
@@ -224,7 +226,8 @@ CREATE TABLE `patients` (
   CONSTRAINT `patients_have_a_number` CHECK (char_length(trim(`record_number`)) > 0),
   CONSTRAINT `patients_sex_is_known` CHECK (`sex` in ('female','male','other','not known')),
   CONSTRAINT `patients_upper_airway_is_known` CHECK (`upper_airway` in ('open','not open','not known')),
-  CONSTRAINT `patients_spo2_target` CHECK (`spo2_low` is null and `spo2_high` is null or `spo2_low` is not null and `spo2_high` is not null and `spo2_low` between 50 and `spo2_high` and `spo2_high` <= 100)
+  CONSTRAINT `patients_spo2_target` CHECK (`spo2_low` is null and `spo2_high` is null or `spo2_low` is not null and `spo2_high` is not null and `spo2_low` between 50 and `spo2_high` and `spo2_high` <= 100),
+  CONSTRAINT `patients_laryngoscopy_is_a_grade` CHECK (`laryngoscopy` in ('1','2','3','4'))
 ) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
 
 CREATE TABLE `policies` (
@@ -431,6 +434,7 @@ CREATE TABLE `wards` (
   `shift_times` longtext CHARACTER SET utf8mb4 COLLATE utf8mb4_bin NOT NULL COMMENT 'starts in local time, in order: ["07:00","15:00","23:00"]' CHECK (json_valid(`shift_times`)),
   `pressure_unit` varchar(8) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
   `retired` tinyint(1) NOT NULL DEFAULT 0,
+  `emergency_numbers` longtext CHARACTER SET utf8mb4 COLLATE utf8mb4_bin NOT NULL DEFAULT '[]' COMMENT 'whom to call, as printed on bed-head signs' CHECK (json_valid(`emergency_numbers`)),
   PRIMARY KEY (`id`),
   UNIQUE KEY `wards_name` (`name`),
   CONSTRAINT `wards_are_named` CHECK (char_length(trim(`name`)) > 0),

@@ -42,7 +42,7 @@ type Flat = Omit<Patient, 'id' | 'ventilated' | 'demo'> &
 
 /** The columns of a patient under the alias `p`, apart from the id. */
 const patientColumns = `p.record_number AS recordNumber, p.family_name AS familyName, p.given_name AS givenName,
-  p.born_on AS bornOn, p.sex, p.allergies, p.upper_airway AS upperAirway, p.ventilated, p.oxygen, p.spo2_low AS spo2Low,
+  p.born_on AS bornOn, p.sex, p.allergies, p.upper_airway AS upperAirway, p.laryngoscopy, p.airway_notes AS airwayNotes, p.ventilated, p.oxygen, p.spo2_low AS spo2Low,
   p.spo2_high AS spo2High, p.demo, p.version`
 
 /** Stays with their patients, by what stands after FROM stays s JOIN patients p, wards w, beds b. */
@@ -95,6 +95,8 @@ function patientOf(row: PatientColumns): Patient {
     sex: row.sex,
     allergies: row.allergies,
     upperAirway: row.upperAirway,
+    laryngoscopy: row.laryngoscopy ?? null,
+    airwayNotes: row.airwayNotes ?? null,
     ventilated: Boolean(row.ventilated),
     oxygen: row.oxygen,
     spo2Low: row.spo2Low,

@@ -1,4 +1,5 @@
 import type { Transaction } from 'sequelize'
+import type { EmergencyNumber } from '#app/care/emergency.ts'
 import type { PressureUnit } from '#app/clinical/units.ts'
 import type { ShiftTimes } from '#app/time/shift.ts'
 import { isUniqueViolation } from './errors.server.ts'
@@ -14,7 +15,12 @@ export type Ward = {
   readonly shiftTimes: ShiftTimes
   readonly pressureUnit: PressureUnit
   readonly retired: boolean
+  /** Whom the ward calls, in the order of its bed-head signs. */
+  readonly emergencyNumbers: readonly EmergencyNumber[]
 }
+
+/** A ward as a form describes it; without numbers it keeps those that it has. */
+export type NewWard = Omit<Ward, 'retired' | 'emergencyNumbers'> & Partial<Pick<Ward, 'emergencyNumbers'>>
 
 export type WardChange =
   | { readonly outcome: 'saved' }
@@ -22,7 +28,8 @@ export type WardChange =
 
 type Columns = Omit<Ward, 'retired'> & { retired: number }
 
-const COLUMNS = 'id, name, shift_times AS shiftTimes, pressure_unit AS pressureUnit, retired'
+const COLUMNS =
+  'id, name, shift_times AS shiftTimes, pressure_unit AS pressureUnit, retired, emergency_numbers AS emergencyNumbers'
 
 const wardOf = (row: Columns): Ward => ({ ...row, retired: Boolean(row.retired) })
 
@@ -43,7 +50,7 @@ export async function wardById(id: string): Promise<Ward | undefined> {
 }
 
 /** Adds a ward under an id that was minted when the form was opened: the same form twice adds one. */
-export async function addWard(ward: Omit<Ward, 'retired'>, by: string): Promise<WardChange> {
+export async function addWard(ward: NewWard, by: string): Promise<WardChange> {
   try {
     return await transact(async transaction => {
       await WardRow.create({ ...ward }, { transaction })
@@ -63,13 +70,13 @@ export async function addWard(ward: Omit<Ward, 'retired'>, by: string): Promise<
   }
 }
 
-async function isSameWard(ward: Omit<Ward, 'retired'>) {
+async function isSameWard(ward: NewWard) {
   const found = await wardById(ward.id)
   return found?.name === ward.name
 }
 
 /** Changes a ward. One that has patients cannot be retired. */
-export async function changeWard(ward: Ward, by: string): Promise<WardChange> {
+export async function changeWard(ward: NewWard & Pick<Ward, 'retired'>, by: string): Promise<WardChange> {
   try {
     return await transact(async transaction => {
       const row = await WardRow.findByPk(ward.id, { transaction, lock: true })

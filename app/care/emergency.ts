@@ -1,6 +1,12 @@
 import type { PatientFacts } from './kind.ts'
 import { LOCAL_PLAN } from './warning.ts'
 
+/** Whom to call: `Airway team`, `2222`. */
+export interface EmergencyNumber {
+  readonly who: string
+  readonly number: string
+}
+
 /**
  * What to do when breathing fails or a catheter will not pass (domain 5.2). Only a closed upper airway takes the face out of it:
  * where it is not known, oxygen goes to face and stoma.

@@ -49,6 +49,9 @@ export interface PatientFacts {
   /** Prescribed SpO2 target in %, null when none is recorded. */
   readonly spo2Low: number | null
   readonly spo2High: number | null
+  /** View at laryngoscopy by its grade, and what is known to be difficult; absent or null when nobody has said. */
+  readonly laryngoscopy?: '1' | '2' | '3' | '4' | null
+  readonly airwayNotes?: string | null
 }
 
 /** One patient's effective entries, asked by kind object: a kind that is not imported cannot be asked for. */
@@ -133,6 +136,8 @@ export interface CareKind<Slug extends string, Schema extends z.ZodObject> exten
   readonly needsCompetence?: Skill
   /** Whether this is an act of two people: the form then asks for the second one, who signs on the same screen. */
   twoPeople?(data: z.output<Schema>): boolean
+  /** Charted by doing it on a page of its own, at this address below the patient's, and not on a form. */
+  readonly page?: string
   /** What must be read wherever this is charted. Short sentences. */
   readonly cautions?: readonly string[]
   readonly settings?: readonly AnySetting[]

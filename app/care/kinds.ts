@@ -1,6 +1,7 @@
 import { aboveCuffSuction } from './above-cuff-suction/kind.ts'
 import { adverseEvent } from './adverse-event/kind.ts'
 import { afterRemoval } from './after-removal/kind.ts'
+import { bedHeadSign } from './bed-head-sign/kind.ts'
 import { bedsideKit } from './bedside-kit/kind.ts'
 import { carePlan } from './care-plan/kind.ts'
 import { coughStrength } from './cough-strength/kind.ts'
@@ -53,6 +54,7 @@ export const careKinds = [
   decannulation,
   afterRemoval,
   transferChecklist,
+  bedHeadSign,
   adverseEvent,
   freeNote,
   deferral,

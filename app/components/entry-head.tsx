@@ -18,7 +18,14 @@ export function EntryHead({ head, title, children }: EntryHeadProps) {
     <>
       <PatientBanner
         patient={head.banner}
-        actions={<LinkButton href={`/patients/${head.patientId}`}>All entries</LinkButton>}
+        actions={
+          <>
+            <LinkButton href={`/patients/${head.patientId}`}>All entries</LinkButton>
+            <LinkButton variant="danger" href={`/patients/${head.patientId}/emergency`}>
+              Airway emergency steps
+            </LinkButton>
+          </>
+        }
       >
         {head.discharged && <p className="mt-2 font-semibold">{head.discharged}</p>}
       </PatientBanner>

@@ -1,3 +1,5 @@
+import { firstLineOf, mm, PLATE, radiiOf, SLOTS, wingsOf } from './flange-shape.ts'
+
 export interface FlangeProps {
   /** Inner diameter with the inner cannula in place. */
   readonly idMm: number
@@ -13,19 +15,10 @@ export interface FlangeProps {
   readonly className?: string
 }
 
-const PX_PER_MM = 4
-/** The connector of every such tube is 15 mm wide (ISO 5356-1). */
-const CONNECTOR_MM = 15
-const LINE_CHARACTERS = 13
-
-const mm = (value: number): string => value.toFixed(1)
-
 /** The neck plate as it looks at the bedside, drawn from the tube's own numbers and with what is printed on it. */
 export function Flange(props: FlangeProps) {
-  const { idMm, odMm, lengthMm, label, cuff, className = 'max-w-90' } = props
-  const left = [`ID ${mm(idMm)}`, `OD ${mm(odMm)}`, ...(lengthMm === undefined ? [] : [`${lengthMm} mm long`])]
-  const right = [...linesOf(label), ...linesOf(cuff)]
-  const bold = linesOf(label).length
+  const { idMm, odMm, className = 'max-w-90' } = props
+  const { left, right, bold } = wingsOf(props)
   return (
     <svg
       role="img"
@@ -33,13 +26,10 @@ export function Flange(props: FlangeProps) {
       viewBox="0 0 340 150"
       className={`mx-auto block w-full ${className}`}
     >
-      <path
-        d="M126 34C98 26 66 20 42 23 15 27 8 52 8 75s7 48 34 52c24 3 56-3 84-11 26 12 62 12 88 0 28 8 60 14 84 11 27-4 34-29 34-52s-7-48-34-52c-24-3-56 3-84 11-26-12-62-12-88 0z"
-        className="fill-sunk stroke-ink2 stroke-2"
-        strokeLinejoin="round"
-      />
-      <rect x="20" y="56" width="10" height="38" rx="5" className="fill-surface stroke-ink2 stroke-2" />
-      <rect x="310" y="56" width="10" height="38" rx="5" className="fill-surface stroke-ink2 stroke-2" />
+      <path d={PLATE} className="fill-sunk stroke-ink2 stroke-2" strokeLinejoin="round" />
+      {SLOTS.map(x => (
+        <rect key={x} x={x} y="56" width="10" height="38" rx="5" className="fill-surface stroke-ink2 stroke-2" />
+      ))}
       <Tube idMm={idMm} odMm={odMm} />
       <Lines lines={left} x={40} bold={2} anchor="start" />
       <Lines lines={right} x={300} bold={bold} anchor="end" />
@@ -61,17 +51,12 @@ export function flangeWords({ idMm, idWithoutInnerMm, odMm, lengthMm, label, cuf
 }
 
 function Tube({ idMm, odMm }: Pick<FlangeProps, 'idMm' | 'odMm'>) {
-  const radius = (diameterMm: number) => Math.round(diameterMm * PX_PER_MM * 5) / 10
+  const { ring, outer, inner } = radiiOf({ idMm, odMm })
   return (
     <>
-      <circle cx="170" cy="75" r={radius(CONNECTOR_MM) + 6} className="fill-surface stroke-ink2 stroke-2" />
-      <circle
-        cx="170"
-        cy="75"
-        r={Math.min(radius(odMm), radius(CONNECTOR_MM))}
-        className="fill-hair stroke-ink2 stroke-2"
-      />
-      <circle cx="170" cy="75" r={radius(idMm)} className="fill-surface stroke-ink2 stroke-2" />
+      <circle cx="170" cy="75" r={ring} className="fill-surface stroke-ink2 stroke-2" />
+      <circle cx="170" cy="75" r={outer} className="fill-hair stroke-ink2 stroke-2" />
+      <circle cx="170" cy="75" r={inner} className="fill-surface stroke-ink2 stroke-2" />
     </>
   )
 }
@@ -85,7 +70,7 @@ interface LinesProps {
 }
 
 function Lines({ lines, x, bold, anchor }: LinesProps) {
-  const first = 75 - (lines.length - 1) * 9 + 5
+  const first = firstLineOf(lines)
   return lines.map((line, index) => (
     <text
       key={line}
@@ -97,15 +82,4 @@ function Lines({ lines, x, bold, anchor }: LinesProps) {
       {line}
     </text>
   ))
-}
-
-/** Words broken into lines short enough for a wing of the plate. */
-function linesOf(words: string): readonly string[] {
-  const lines: string[] = []
-  for (const word of words.split(' ')) {
-    const last = lines.at(-1)
-    if (last !== undefined && `${last} ${word}`.length <= LINE_CHARACTERS) lines[lines.length - 1] = `${last} ${word}`
-    else lines.push(word)
-  }
-  return lines
 }

@@ -35,7 +35,10 @@ export function PatientBanner({ patient, isTitle = false, actions, children }: P
   const Name = isTitle ? 'h1' : 'p'
   const { bed, family, given, sex, born, age, recordNo, allergies, laryngectomy } = patient
   return (
-    <section aria-label="Patient" className="border-b border-line bg-surface px-4 py-3 md:px-6">
+    <section
+      aria-label="Patient"
+      className="group-has-[[data-sheet]]/page:print:hidden border-b border-line bg-surface px-4 py-3 md:px-6"
+    >
       {laryngectomy && <LaryngectomyMark />}
       <div className="flex flex-wrap items-center gap-x-6 gap-y-3">
         <div className="flex items-center gap-4">

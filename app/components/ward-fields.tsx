@@ -1,15 +1,15 @@
 import type { FieldMetadata } from '@conform-to/react'
 import { pressureUnits } from '#app/clinical/units.ts'
 import { ChoiceField } from './choice-field.tsx'
-import { TextField } from './text-field.tsx'
+import { TextArea, TextField } from './text-field.tsx'
 import { chosenOf, textOf } from './text-of.ts'
 
 export interface WardFieldsProps {
-  readonly fields: Readonly<Record<'name' | 'shiftTimes' | 'pressureUnit', FieldMetadata<unknown>>>
+  readonly fields: Readonly<Record<'name' | 'shiftTimes' | 'pressureUnit' | 'emergencyNumbers', FieldMetadata<unknown>>>
 }
 
 /** Name, shifts and pressure unit, as for a new ward and for one that changes. */
-export function WardFields({ fields: { name, shiftTimes, pressureUnit } }: WardFieldsProps) {
+export function WardFields({ fields: { name, shiftTimes, pressureUnit, emergencyNumbers } }: WardFieldsProps) {
   return (
     <>
       <TextField key={name.key} {...textOf(name)} label="Name of the ward" autoComplete="off" maxLength={80} />
@@ -24,6 +24,14 @@ export function WardFields({ fields: { name, shiftTimes, pressureUnit } }: WardF
         {...chosenOf(pressureUnit)}
         label="Unit that the manometers show"
         options={Object.fromEntries(pressureUnits.map(unit => [unit, unit]))}
+      />
+      <TextArea
+        key={emergencyNumbers.key}
+        {...textOf(emergencyNumbers)}
+        required={false}
+        label="Emergency numbers"
+        hint="One a line, such as Airway team: 2222. They are printed on bed-head signs."
+        optional
       />
     </>
   )

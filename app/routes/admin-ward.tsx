@@ -13,6 +13,7 @@ import { FieldErrors } from '#app/components/field-parts.tsx'
 import { errorsOf } from '#app/components/text-of.ts'
 import { WardFields } from '#app/components/ward-fields.tsx'
 import { sentForm } from '#app/sent-form.server.ts'
+import { numbersText } from '#app/wards/emergency-numbers.ts'
 import { wardChangedBy } from '#app/wards/ward-forms.server.ts'
 import { wardSchema } from '#app/wards/ward-schema.ts'
 import { logAccess } from '#database/access-log.server.ts'
@@ -28,8 +29,9 @@ export async function loader({ params: { wardId }, context }: Route.LoaderArgs) 
   if (!can(signedIn(context), 'manage wards')) throw data('Wards are kept by the administrators.', 403)
   const ward = await wardById(wardId)
   if (!ward) throw data('There is no such ward.', 404)
-  const { name, shiftTimes, pressureUnit } = ward
-  const form = { name, shiftTimes: shiftTimes.join(', '), pressureUnit }
+  const { name, shiftTimes, pressureUnit, emergencyNumbers } = ward
+  const numbers = numbersText(emergencyNumbers)
+  const form = { name, shiftTimes: shiftTimes.join(', '), pressureUnit, emergencyNumbers: numbers }
   return { ward, form, beds: await bedsOf(wardId), newBedId: uuidv7() }
 }
 

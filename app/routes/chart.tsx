@@ -13,9 +13,10 @@ import { patientCare } from '#app/views/patient-context.server.ts'
 import { addEntry } from '#database/entries.server.ts'
 import type { Route } from './+types/chart.ts'
 
-function kindOr404(slug: string) {
+function kindOr404({ kind: slug, patientId }: { readonly kind: string; readonly patientId: string }) {
   const kind = findKind(slug)
   if (!kind) throw data('There is no such kind of care.', 404)
+  if (kind.page !== undefined) throw redirect(`/patients/${patientId}/${kind.page}`)
   return kind
 }
 
@@ -23,7 +24,7 @@ export const meta: Route.MetaFunction = ({ params }) => [{ title: `${findKind(pa
 
 export async function loader({ params, context, request, url }: Route.LoaderArgs) {
   const user = signedIn(context)
-  const kind = kindOr404(params.kind)
+  const kind = kindOr404(params)
   const { stayId } = await patientGate(user, params.patientId, askOf({ kind, context, request, url }))
   const now = new Date()
   const care = await patientCare(stayId, now)
@@ -32,7 +33,7 @@ export async function loader({ params, context, request, url }: Route.LoaderArgs
 
 export async function action({ params, context, request, url }: Route.ActionArgs) {
   const user = signedIn(context)
-  const kind = kindOr404(params.kind)
+  const kind = kindOr404(params)
   const { stayId } = await patientGate(user, params.patientId, askOf({ kind, context, request, url }))
   const now = new Date()
   const from = { signedInAt: ownSession(context).startedAt, by: traceOf({ request, url, context }) }

@@ -27,9 +27,12 @@ export default function Patient({ loaderData: { banner, patientId, discharged, v
         patient={banner}
         isTitle={isTitle}
         actions={
-          <LinkButton variant="danger" href={`/patients/${patientId}/emergency`}>
-            Airway emergency steps
-          </LinkButton>
+          <>
+            <LinkButton href={`/patients/${patientId}/sign`}>Bed-head sign</LinkButton>
+            <LinkButton variant="danger" href={`/patients/${patientId}/emergency`}>
+              Airway emergency steps
+            </LinkButton>
+          </>
         }
       >
         {discharged && <p className="mt-2 font-semibold">{discharged} Earlier care stays readable.</p>}

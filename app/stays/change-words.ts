@@ -18,6 +18,8 @@ const labels: Readonly<Record<string, string>> = {
   sex: 'Sex',
   allergies: 'Allergies',
   upperAirway: 'Upper airway',
+  laryngoscopy: 'View at laryngoscopy',
+  airwayNotes: 'Known problems of the airway',
   ventilated: 'Ventilation through the tube',
   oxygen: 'Oxygen',
   spo2Low: 'SpO2 target from',

@@ -1,4 +1,5 @@
 import { z } from 'zod'
+import { laryngoscopyGrades } from '../care/bed-head-sign/schema.ts'
 import { careFields, choice, date, fieldsOf, quantity, text } from '../care/field.ts'
 
 const identifiers = {
@@ -24,6 +25,16 @@ export const person = careFields({
     hint: 'Not open after a laryngectomy: they breathe only through the neck',
     options: { open: 'Open', 'not open': 'Not open: laryngectomy', 'not known': 'Not known' },
   }),
+  laryngoscopy: choice({
+    label: 'View at laryngoscopy',
+    hint: 'As the anaesthetist graded it: 1 all of the opening seen, 4 none of it',
+    options: laryngoscopyGrades,
+  }).optional(),
+  airwayNotes: text({
+    label: 'Known problems of the airway',
+    hint: 'Printed on the bed-head sign: what makes intubation, oxygen or a tube change difficult',
+    maxLength: 500,
+  }).optional(),
   ventilated: choice({ label: 'Ventilation', options: { yes: 'Through the tube', no: 'None' } }),
   allergies: text({
     label: 'Allergies',
@@ -73,13 +84,19 @@ export function personProblem(
 /** The answers as they are stored: what was left empty is null. */
 export function detailsOf(answers: PersonAnswers) {
   const { allergies = null, oxygen = null, spo2Low = null, spo2High = null, ventilated, ...rest } = answers
-  return { ...rest, allergies, oxygen, spo2Low, spo2High, ventilated: ventilated === 'yes' }
+  const airway = { laryngoscopy: answers.laryngoscopy ?? null, airwayNotes: answers.airwayNotes ?? null }
+  return { ...rest, ...airway, allergies, oxygen, spo2Low, spo2High, ventilated: ventilated === 'yes' }
 }
 
+/** A patient as they are stored; who was stored before a question was asked has no answer to it. */
+type PatientAnswers = Omit<ReturnType<typeof detailsOf>, 'laryngoscopy' | 'airwayNotes'> &
+  Partial<Pick<ReturnType<typeof detailsOf>, 'laryngoscopy' | 'airwayNotes'>>
+
 /** A patient as the form shows them: what is null is left empty. */
-export function answersOf(patient: ReturnType<typeof detailsOf>) {
+export function answersOf(patient: PatientAnswers) {
   const { recordNumber, bornOn, familyName, givenName, sex, upperAirway, allergies, oxygen, spo2Low, spo2High } =
     patient
-  const who = { recordNumber, bornOn, familyName, givenName, sex, upperAirway }
+  const airway = { laryngoscopy: patient.laryngoscopy, airwayNotes: patient.airwayNotes }
+  const who = { recordNumber, bornOn, familyName, givenName, sex, upperAirway, ...airway }
   return { ...who, ventilated: patient.ventilated ? 'yes' : 'no', allergies, oxygen, spo2Low, spo2High }
 }

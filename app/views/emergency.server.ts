@@ -22,7 +22,8 @@ export function emergencyOf(
   }
 }
 
-function tubeFacts(context: CareContext): TubeFacts {
+/** What of the tube in place changes a step; every caution where no tube is charted. */
+export function tubeFacts(context: CareContext): TubeFacts {
   const tube = tubeInPlace(context.record)?.data
   const tract = tubeTract(context)
   if (!tube) return ANY_TUBE

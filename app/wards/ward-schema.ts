@@ -2,6 +2,7 @@ import { z } from 'zod'
 import { choice, text } from '../care/field.ts'
 import { pressureUnits } from '../clinical/units.ts'
 import { shiftTimesProblem } from '../time/shift.ts'
+import { emergencyNumbers } from './emergency-numbers.ts'
 
 const lost = 'This form has lost a part of itself. Open it again.'
 
@@ -27,6 +28,7 @@ export const wardSchema = z.object({
       string
     >,
   }),
+  emergencyNumbers,
 })
 
 /** Takes a ward out of use, or back into it. */

@@ -17,6 +17,8 @@ import { tubeLines } from './0040-tube-lines.ts'
 import { tubes } from './0041-tubes.ts'
 import { innerCannulas } from './0042-inner-cannulas.ts'
 import { catalogueChanges } from './0043-catalogue-changes.ts'
+import { emergencyNumbers } from './0055-emergency-numbers.ts'
+import { airwayDetails } from './0056-airway-details.ts'
 import { entrySignatures } from './0070-entry-signatures.ts'
 import { policyRuleSets } from './0080-policy-rule-sets.ts'
 import { policyWithdrawals } from './0081-policy-withdrawals.ts'
@@ -44,6 +46,8 @@ export const migrations: Record<string, Migration> = {
   '0041-tubes': tubes,
   '0042-inner-cannulas': innerCannulas,
   '0043-catalogue-changes': catalogueChanges,
+  '0055-emergency-numbers': emergencyNumbers,
+  '0056-airway-details': airwayDetails,
   '0070-entry-signatures': entrySignatures,
   '0080-policy-rule-sets': policyRuleSets,
   '0081-policy-withdrawals': policyWithdrawals,

@@ -12,6 +12,8 @@ export class PatientRow extends Model<InferAttributes<PatientRow>, InferCreation
   declare sex: 'female' | 'male' | 'other' | 'not known'
   declare allergies: string | null
   declare upperAirway: PatientFacts['upperAirway']
+  declare laryngoscopy: CreationOptional<'1' | '2' | '3' | '4' | null>
+  declare airwayNotes: CreationOptional<string | null>
   declare ventilated: boolean
   declare oxygen: string | null
   declare spo2Low: number | null
@@ -30,6 +32,8 @@ PatientRow.init(
     sex: { type: DataTypes.STRING(16), allowNull: false },
     allergies: { type: DataTypes.STRING(500), allowNull: true },
     upperAirway: { type: DataTypes.STRING(16), allowNull: false },
+    laryngoscopy: { type: DataTypes.CHAR(1), allowNull: true },
+    airwayNotes: { type: DataTypes.STRING(500), allowNull: true },
     ventilated: { type: DataTypes.BOOLEAN, allowNull: false },
     oxygen: { type: DataTypes.STRING(120), allowNull: true },
     spo2Low: { type: DataTypes.TINYINT.UNSIGNED, allowNull: true, field: 'spo2_low' },

@@ -79,6 +79,8 @@ export const alderStories: readonly BedStory[] = [
   {
     bed: 'A7',
     patient: patient('2876 0345', 'Featheringay-Castellanos', 'Bartholomew Ignatius', 'male', '1955-12-12', {
+      laryngoscopy: '3',
+      airwayNotes: 'Mouth opens 25 mm; intubated over a bougie',
       allergies: 'Iodine contrast; morphine (itching); chlorhexidine',
     }),
     admittedHoursAgo: 116,

@@ -12,6 +12,8 @@ export interface Draft {
   /** Minutes from the act to its being written; left out, as it comes. */
   readonly writtenAfter?: number
   readonly reason?: string
+  /** Another act whose id this one's payload names, under that field. */
+  readonly names?: { readonly field: string; readonly act: Draft }
   readonly supersedes?: Draft
   readonly status?: 'retracted'
 }

@@ -10,6 +10,7 @@ import { innerCannulaCare } from './chart-inner-cannula.ts'
 import { kitCare } from './chart-kit.ts'
 import { observationCare } from './chart-observations.ts'
 import { oralCare } from './chart-oral-care.ts'
+import { signCare } from './chart-sign.ts'
 import { stomaCare } from './chart-stoma.ts'
 import { suctionCare } from './chart-suction.ts'
 import { tieCare } from './chart-ties.ts'
@@ -52,9 +53,13 @@ export function entriesOf(bedside: Bedside, stayId: string): readonly DemoEntry[
       supersedesId: (draft.supersedes && written.get(draft.supersedes)?.id) ?? null,
       reason: draft.reason ?? null,
       status: draft.status ?? 'final',
-      raw: draft.kind.schema.parse(draft.data),
+      raw: draft.kind.schema.parse(dataOf(draft, act => written.get(act)?.id)),
     }
   }
+}
+
+function dataOf({ data, names }: Draft, idOf: (act: Draft) => string | undefined): unknown {
+  return names ? { ...(data as object), [names.field]: idOf(names.act) } : data
 }
 
 function draftsOf(bedside: Bedside): readonly Draft[] {
@@ -69,6 +74,7 @@ function draftsOf(bedside: Bedside): readonly Draft[] {
   ]
   return [
     ...usual,
+    ...signCare(bedside, usual),
     ...tieCare(bedside, usual),
     ...humidificationCare(bedside),
     ...kitCare(bedside),

@@ -1,4 +1,5 @@
 import type { Role } from '#app/auth/permissions.ts'
+import type { EmergencyNumber } from '#app/care/emergency.ts'
 import type { PatientFacts, StoredEntry } from '#app/care/kind.ts'
 import type { Policy } from '#app/care/policy.ts'
 import type { PressureUnit } from '#app/clinical/units.ts'
@@ -26,6 +27,7 @@ export interface DemoWard {
   readonly name: string
   readonly shiftTimes: readonly string[]
   readonly pressureUnit: PressureUnit
+  readonly emergencyNumbers: readonly EmergencyNumber[]
 }
 
 export interface DemoBed {

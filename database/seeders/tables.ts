@@ -23,8 +23,10 @@ export function demoTables(hospital: DemoHospital, passwordHash: string): readon
 }
 
 function peopleTables({ people, wards, beds, seededAt }: DemoHospital, passwordHash: string): readonly TableRows[] {
-  const wardRows = wards.map(({ id, name, shiftTimes, pressureUnit }) => {
-    return { id, name, shift_times: JSON.stringify(shiftTimes), pressure_unit: pressureUnit }
+  const wardRows = wards.map(({ id, name, shiftTimes, pressureUnit, emergencyNumbers }) => {
+    const numbers = JSON.stringify(emergencyNumbers)
+    const shifts = JSON.stringify(shiftTimes)
+    return { id, name, shift_times: shifts, pressure_unit: pressureUnit, emergency_numbers: numbers }
   })
   const users = people.map(({ id, name, email, role, addedAt }) => {
     return { id, name, email, role, password_hash: passwordHash, password_set_at: seededAt, added_at: addedAt }
@@ -100,7 +102,9 @@ function innerCannulaRow({
 function patientRow(patient: DemoPatient) {
   const { id, recordNumber, familyName, givenName, bornOn, sex, allergies, oxygen } = patient
   const names = { record_number: recordNumber, family_name: familyName, given_name: givenName }
-  const airway = { upper_airway: patient.upperAirway, ventilated: patient.ventilated, oxygen }
+  const { upperAirway, laryngoscopy = null, airwayNotes = null, ventilated } = patient
+  const known = { laryngoscopy, airway_notes: airwayNotes }
+  const airway = { upper_airway: upperAirway, ...known, ventilated, oxygen }
   const target = { spo2_low: patient.spo2Low, spo2_high: patient.spo2High }
   return { id, ...names, born_on: bornOn, sex, allergies, ...airway, ...target, demo: true }
 }

@@ -12,6 +12,12 @@ interface WardPlan extends Omit<DemoWard, 'id'> {
   readonly cuffUpperLimit?: number
 }
 
+const emergencyNumbers = [
+  { who: 'Airway team', number: '2222' },
+  { who: 'Anaesthetist on call', number: '405 by bleep' },
+  { who: 'Intensive care', number: '4410' },
+]
+
 const plans: readonly WardPlan[] = [
   {
     name: 'Alder ward',
@@ -19,14 +25,16 @@ const plans: readonly WardPlan[] = [
     beds: 14,
     shiftTimes: ['07:00', '15:00', '23:00'],
     pressureUnit: 'cmH2O',
+    emergencyNumbers,
   },
-  { name: 'Birch ward', letter: 'B', beds: 12, shiftTimes: ['07:30', '19:30'], pressureUnit: 'mmHg' },
+  { name: 'Birch ward', letter: 'B', beds: 12, shiftTimes: ['07:30', '19:30'], pressureUnit: 'mmHg', emergencyNumbers },
   {
     name: 'Cedar ward',
     letter: 'C',
     beds: 10,
     shiftTimes: ['07:00', '15:00', '23:00'],
     pressureUnit: 'cmH2O',
+    emergencyNumbers,
     cuffUpperLimit: 25,
   },
 ]

@@ -47,6 +47,9 @@ POST /patients/:patientId/move         400 403 400 403 404 404 403   why why why
 GET  /patients/:patientId/discharge    200 403 200 403 404 404 403   why why why why 404 404 404   403 403   own  in
 POST /patients/:patientId/discharge    400 403 400 403 404 404 403   why why why why 404 404 404   403 403   own  in
 GET  /patients/:patientId/emergency    200 200 200 200 404 404 200   why why why why 404 404 404   200 200   own  in
+GET  /patients/:patientId/sign         200 200 200 200 404 404 200   why why why why 404 404 404   200 200   own  in
+POST /patients/:patientId/sign         400 400 400 400 404 404 403   why why why why 404 404 404   400 400   own  in
+GET  /patients/:patientId/sign.pdf     go  go  go  go  404 404 go    why why why why 404 404 404   go  go    own  in
 GET  /entries/:entryId                 200 200 200 200 404 404 200   why why why why 404 404 404   200 200   own  in
 GET  /entries/:entryId/correct         200 403 200 200 404 404 403   why why why why 404 404 404   403 403   own  in
 POST /entries/:entryId/correct         400 403 400 400 404 404 403   why why why why 404 404 404   403 403   own  in

@@ -89,7 +89,7 @@ function ward(number: number, openedAt: Date): WardWithBeds {
     return { id: idAt(openedAt, random), wardId: id, label: `${index + 1}`, position: index + 1 }
   })
   return {
-    row: { id, name, shiftTimes: ['07:00', '15:00', '23:00'], pressureUnit: 'cmH2O' },
+    row: { id, name, shiftTimes: ['07:00', '15:00', '23:00'], pressureUnit: 'cmH2O', emergencyNumbers: [] },
     beds,
     cuffUpperLimit: undefined,
   }

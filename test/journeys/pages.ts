@@ -30,6 +30,7 @@ export const notPages: Readonly<Record<string, string>> = {
   theme: 'a form is sent to it',
   draft: 'the idle watch sends to it',
   'still-here': 'the idle watch sends to it',
+  'patients/:patientId/sign.pdf': 'a PDF',
   'api/patients/:patientId/timeline': 'JSON',
   'api/wards/:wardId/board': 'JSON',
 }
@@ -62,6 +63,7 @@ export const pages: readonly PageEntry[] = [
     as: 'nurse.alder',
     path: ({ patient }) => `/patients/${patient}/emergency`,
   },
+  { route: 'patients/:patientId/sign', as: 'nurse.alder', path: ({ patient }) => `/patients/${patient}/sign` },
   { route: 'patients/:patientId/access', as: 'nurse.alder', path: ({ elsewhere }) => `/patients/${elsewhere}/access` },
   { route: 'entries/:entryId', as: charge, path: ({ entry }) => `/entries/${entry}` },
   { route: 'entries/:entryId/correct', as: charge, path: ({ entry }) => `/entries/${entry}/correct` },

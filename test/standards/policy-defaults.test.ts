@@ -44,6 +44,7 @@ const rows: readonly Row[] = [
   ['suction-catheter-share', 50, 'V', 'Vanner and Bick 2008'],
   ['suction-catheter-strictly-below', false, 'V', 'AARC 2010'],
   ['suction-catheter-sizes', [5, 6, 8, 10, 12, 14, 16, 18], 'M', 'common use'],
+  ['suction-depth-past-tip', 5, 'V', 'length of the tube and 0.5 cm'],
   ['suction-vacuum-low', 80, 'V', '80 to 150 mmHg'],
   ['suction-vacuum-warn', 150, 'V', '80 to 150 mmHg'],
   ['suction-vacuum-very-high', 200, 'V', 'below 200 mmHg'],
