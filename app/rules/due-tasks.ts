@@ -52,12 +52,22 @@ function running(rule: TaskRule, clock: Clock & { state: 'running' }, context: C
     ...(clock.because === undefined ? {} : { because: clock.because }),
     ...(clock.byDay === undefined ? {} : { byDay: clock.byDay }),
   }
+  const { window, deferral } = windowWithDeferral(rule, clock, context)
+  if (!deferral) return { ...known, window, status: statusOf(window, context.now) }
+  const status: TaskStatus = context.now < deferral.until ? 'deferred' : statusOf(window, context.now)
+  return { ...known, window, status, deferral }
+}
+
+/** The window of a clock that runs, moved by a deferral that stands. */
+export function windowWithDeferral(
+  rule: TaskRule,
+  clock: Clock & { state: 'running' },
+  context: CareContext,
+): { readonly window: DueWindow; readonly deferral?: { readonly entry: Entry; readonly until: Date } } {
   const entry = deferralOf(rule.name, clock, context)
-  if (!entry) return { ...known, window: clock.window, status: statusOf(clock.window, context.now) }
+  if (!entry) return { window: clock.window }
   const until = deferredUntil(entry)
-  const window = movedTo(until, clock)
-  const status: TaskStatus = context.now < until ? 'deferred' : statusOf(window, context.now)
-  return { ...known, window, status, deferral: { entry, until } }
+  return { window: movedTo(until, clock), deferral: { entry, until } }
 }
 
 /** The latest deferral of a task, unless the care was done after it, or something asked for it anew. */

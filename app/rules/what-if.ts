@@ -1,0 +1,133 @@
+import { carePlans } from '../care/care-plan/schema.ts'
+import type { CareContext, PatientRecord, WardFacts } from '../care/kind.ts'
+import { wordsOf } from '../care/kind.ts'
+import { careTasks, type KindTask } from '../care/kinds.ts'
+import type { Policy } from '../care/policy.ts'
+import { shiftAt } from '../time/shift.ts'
+import { localDay } from '../time/zone.ts'
+import { careContext } from './context.ts'
+import { isTooYoung } from './due-tasks.ts'
+import { type RecordOverTime, recordOverTime } from './record-over-time.ts'
+import { type Found, taskWalk } from './task-walk.ts'
+
+/** A stay on the ward: its record, and when it was here (`until`: the end of the stay, or of the time looked at). */
+export interface StayOnWard {
+  readonly record: PatientRecord
+  readonly from: Date
+  readonly until: Date
+}
+
+export interface Load {
+  readonly tasks: number
+  readonly late: number
+}
+
+/** What a policy would have asked for: in all, by the shifts of a day, and by task. */
+export interface WardLoad {
+  readonly total: Load
+  readonly byShift: ReadonlyMap<string, Load>
+  readonly byTask: ReadonlyMap<string, Load>
+  /** Patients that nothing is computed for, as there is no rule set for children. */
+  readonly withoutRules: number
+  /** Clocks that were read: the work done. */
+  readonly clocksRead: number
+}
+
+interface Asked {
+  readonly stays: readonly StayOnWard[]
+  readonly policy: Policy
+  readonly ward: WardFacts
+  readonly from: Date
+  readonly to: Date
+  readonly tasks?: readonly KindTask[]
+}
+
+/**
+ * How many tasks a policy would have made due between two moments, and how many of them the care that was charted would have met
+ * late. Pure. Clocks are read again only when an entry that they asked for comes, and at the start of each shift: of what follows
+ * from time alone, a change may be seen up to a shift late.
+ */
+export function wardLoad({ stays, policy, ward, from, to, tasks = careTasks }: Asked): WardLoad {
+  const tally = newTally(ward)
+  let withoutRules = 0
+  for (const stay of stays) {
+    const span = {
+      from: Math.max(from.getTime(), stay.from.getTime()),
+      to: Math.min(to.getTime(), stay.until.getTime()),
+    }
+    const asking = askerOf(recordOverTime(stay.record), policy, ward)
+    if (asking.at(span.to).isOutside) withoutRules += 1
+    else for (const { rule } of tasks) walk(rule, span, asking, one => tally.add(rule.name, one))
+  }
+  return { ...tally.sums(), withoutRules, clocksRead: tally.read() }
+
+  function walk(
+    rule: KindTask['rule'],
+    span: { from: number; to: number },
+    asking: Asker,
+    found: (one: Found) => void,
+  ) {
+    const steps = taskWalk(rule, span, found)
+    asking.over.forget()
+    for (let at = span.from; at < span.to; ) {
+      const { context, isOutside } = asking.at(at)
+      const clock = isOutside ? ({ state: 'none' } as const) : rule.clock(context)
+      tally.noteRead()
+      const next = Math.min(asking.over.nextChange(at), shiftAfter(at), span.to)
+      steps.step(clock, context, next)
+      at = next
+    }
+    steps.end()
+  }
+
+  function shiftAfter(at: number): number {
+    return shiftAt(new Date(at), ward.shiftTimes, ward.zone).endsAt.getTime()
+  }
+}
+
+interface Asker {
+  readonly over: RecordOverTime
+  at(ms: number): { readonly context: CareContext; readonly isOutside: boolean }
+}
+
+/** Contexts of one patient at any moment. Own values and age change with the care plan and the day, so those are kept by both. */
+function askerOf(over: RecordOverTime, policy: Policy, ward: WardFacts): Asker {
+  const kept = new Map<string, { readonly values: CareContext['values']; readonly isOutside: boolean }>()
+  return {
+    over,
+    at(ms) {
+      const now = new Date(ms)
+      const record = over.at(now)
+      const key = `${record.of(carePlans).length} ${localDay(now, ward.zone)}`
+      const known = kept.get(key) ?? judged(record, now)
+      kept.set(key, known)
+      return { context: { record, values: known.values, ward, now }, isOutside: known.isOutside }
+    },
+  }
+
+  function judged(record: PatientRecord, now: Date) {
+    const context = careContext({ record, policy, ward, now })
+    return { values: context.values, isOutside: isTooYoung(context) }
+  }
+}
+
+function newTally(ward: WardFacts) {
+  const byShift = new Map(ward.shiftTimes.map(time => [`Shift from ${time}`, { tasks: 0, late: 0 }]))
+  const byTask = new Map<string, { tasks: number; late: number }>()
+  const total = { tasks: 0, late: 0 }
+  let read = 0
+  return {
+    noteRead: () => {
+      read += 1
+    },
+    read: () => read,
+    add(name: string, { what, at }: Found) {
+      const count = what === 'task' ? 'tasks' : 'late'
+      const task = byTask.get(wordsOf(name)) ?? { tasks: 0, late: 0 }
+      byTask.set(wordsOf(name), task)
+      const shift = byShift.get(shiftAt(new Date(at), ward.shiftTimes, ward.zone).label)
+      for (const load of [total, task, shift]) if (load) load[count] += 1
+    },
+    sums: () => ({ total, byShift, byTask }),
+  }
+}
