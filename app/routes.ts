@@ -46,6 +46,11 @@ export default [
     route('patients/:patientId/access', 'routes/patient-access.tsx'),
     route('wards/:wardId/access', 'routes/ward-access.tsx'),
     route('policy', 'routes/policy.tsx'),
+    route('policy/draft', 'routes/policy-draft.tsx'),
+    route('policy/review', 'routes/policy-review.tsx'),
+    route('policy/compare', 'routes/policy-compare.tsx'),
+    route('policy/versions/:policyId/withdraw', 'routes/policy-withdraw.tsx'),
+    route('wards/:wardId/care-plans', 'routes/ward-care-plans.tsx'),
   ]),
 
   // data for live pages

@@ -1,4 +1,5 @@
 import type { StoredEntry } from '#app/care/kind.ts'
+import { select } from './sequelize.server.ts'
 import { entriesOfStays } from './stay-entries.server.ts'
 import { type StayWithPatient, stayRows } from './stay-rows.server.ts'
 import { wardRev } from './ward-revs.server.ts'
@@ -46,4 +47,28 @@ async function wardRows(wardId: string, rev: number) {
 async function withEntries(rows: readonly StayWithPatient[]): Promise<readonly StayRecord[]> {
   const entries = await entriesOfStays(rows.map(({ stay }) => stay))
   return rows.map(row => ({ ...row, entries: entries.get(row.stay.id) ?? [] }))
+}
+
+/** A stay that was on a ward, with the moment from which it was there. */
+export type StayOnWardRecord = { readonly record: StayRecord; readonly arrivedAt: Date }
+
+/**
+ * The stays of a ward since a moment: those there now, and those discharged from it since. Who was moved to another ward is that
+ * ward's; who came from one counts from the move. An admission is the first move of a stay.
+ */
+export async function wardRecordsSince(wardId: string, since: Date): Promise<readonly StayOnWardRecord[]> {
+  const there = 's.ward_id = :wardId AND (s.discharged_at IS NULL OR s.discharged_at > :since)'
+  const [rows, arrivals] = await Promise.all([
+    stayRows(`WHERE ${there} ORDER BY s.admitted_at, s.id`, { wardId, since }),
+    select<{ stayId: string; arrivedAt: Date }>(
+      `SELECT s.id AS stayId, MIN(m.moved_at) AS arrivedAt FROM stays s JOIN bed_moves m ON m.stay_id = s.id
+       WHERE ${there} AND m.ward_id = s.ward_id AND m.moved_at > COALESCE(
+         (SELECT MAX(o.moved_at) FROM bed_moves o WHERE o.stay_id = s.id AND o.ward_id <> s.ward_id), '1000-01-01')
+       GROUP BY s.id`,
+      { wardId, since },
+    ),
+  ])
+  const arrived = new Map(arrivals.map(({ stayId, arrivedAt }) => [stayId, arrivedAt]))
+  const records = await withEntries(rows)
+  return records.map(record => ({ record, arrivedAt: arrived.get(record.stay.id) ?? record.stay.admittedAt }))
 }

@@ -18,6 +18,8 @@ export interface LinkButtonProps extends Look {
   readonly reload?: boolean
   /** Read instead of the words on it, which it must begin with. */
   readonly label?: string
+  /** It leads to what is shown. */
+  readonly current?: boolean
 }
 
 const BASE =
@@ -45,9 +47,24 @@ export function Button({ variant, size, className, type = 'submit', children, ..
 }
 
 /** A link that looks like a button: it goes somewhere, and changes nothing. */
-export function LinkButton({ variant, size, className, href, reload = false, label, children }: LinkButtonProps) {
+export function LinkButton({
+  variant,
+  size,
+  className,
+  href,
+  reload = false,
+  label,
+  current,
+  children,
+}: LinkButtonProps) {
   return (
-    <Link to={href} reloadDocument={reload} aria-label={label} className={look(variant, size, className)}>
+    <Link
+      to={href}
+      reloadDocument={reload}
+      aria-label={label}
+      aria-current={current ? 'page' : undefined}
+      className={look(variant, size, className)}
+    >
       {children}
     </Link>
   )

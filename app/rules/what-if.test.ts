@@ -142,9 +142,7 @@ test('a child on a ward without rules for children is counted apart', () => {
 })
 
 test('clocks are read by entries and shifts, not by minutes', () => {
-  const entries = Array.from({ length: 14 * 6 }, (_, i) =>
-    note(`2026-03-${10 + Math.floor(i / 6)} 0${i % 6}:30`),
-  )
+  const entries = Array.from({ length: 14 * 6 }, (_, i) => note(`2026-03-${10 + Math.floor(i / 6)} 0${i % 6}:30`))
   const { record } = aContext(entries, '2026-03-24 07:00', { admittedAt: '2026-03-10 00:00' })
   const { clocksRead } = wardLoad({
     stays: [{ record, from: record.admittedAt, until: at('2026-03-24 07:00') }],

@@ -4,6 +4,7 @@ import { type Role, roles } from '#app/auth/permissions.ts'
 import { signIn } from '#app/auth/session.server.ts'
 import { grantAccess } from '#database/access-grants.server.ts'
 import { addEntry } from '#database/entries.server.ts'
+import { addPolicy } from '#database/policies.server.ts'
 import { application, browserRequest } from '#test/application.ts'
 import { cleared, owner } from '#test/database.ts'
 import { aPerson, site, traceOfTest } from '#test/people.ts'
@@ -69,6 +70,14 @@ POST /admin/wards                      403 403 403 403 403 400 403   403 403 403
 GET  /admin/wards/:wardId              403 403 403 403 403 200 403   403 403 403 403 403 200 403   403 403   own  in
 POST /admin/wards/:wardId              403 403 403 403 403 400 403   403 403 403 403 403 400 403   403 403   own  in
 GET  /policy                           200 200 200 200 200 200 200   200 200 200 200 200 200 200   200 200   own  in
+GET  /policy/draft                     403 403 200 200 403 403 403   403 403 200 200 403 403 403   403 200   own  in
+POST /policy/draft                     403 403 400 400 403 403 403   403 403 400 400 403 403 403   403 400   own  in
+GET  /policy/review                    403 403 200 200 403 403 403   403 403 200 200 403 403 403   403 200   own  in
+POST /policy/review                    403 403 400 400 403 403 403   403 403 400 400 403 403 403   403 400   own  in
+GET  /policy/compare                   404 404 404 404 404 404 404   404 404 404 404 404 404 404   404 404   own  in
+GET  /policy/versions/:policyId/withdraw 403 403 200 200 403 403 403   403 403 404 404 403 403 403   403 404   own  in
+POST /policy/versions/:policyId/withdraw 403 403 400 400 403 403 403   403 403 404 404 403 403 403   403 404   own  in
+GET  /wards/:wardId/care-plans         200 200 200 200 404 404 200   404 404 404 404 404 404 404   404 404   own  in
 GET  /api/patients/:patientId/timeline 200 200 200 200 404 404 200   404 404 404 404 404 404 404   200 200   401  401
 GET  /api/wards/:wardId/board          200 200 200 200 404 404 200   404 404 404 404 404 404 404   404 404   401  401
 `
@@ -104,11 +113,18 @@ beforeAll(async () => {
     replacements: { id: fresh.id },
   })
   cookies = [...(await Promise.all([...here, ...away, ...visiting, fresh].map(cookieOf))), null]
-  params = { wardId: ward.id, patientId, entryId, userId: author.id, kind: 'cuff-pressure' }
+  const policyId = uuidv7()
+  await addPolicy(aComingPolicy(policyId, ward.id), author.id)
+  params = { policyId, wardId: ward.id, patientId, entryId, userId: author.id, kind: 'cuff-pressure' }
 })
 
 // Everybody is signed in again, whatever the row before has done.
 beforeEach(() => owner.query('UPDATE sessions SET ended_at = NULL, ended_because = NULL'))
+
+function aComingPolicy(id: string, wardId: string) {
+  const review = { reviewedBy: 'Dr E. Osei, clinical lead', reviewedOn: '2026-10-20', reason: 'First policy' }
+  return { id, wardId, name: 'Tracheostomy care', ...review, startsAt: new Date(Date.now() + 86_400_000), values: {} }
+}
 
 async function everyRole(wardId: string, where: string) {
   const people = []

@@ -32,7 +32,8 @@ function pageOf(who: string | null): Promise<OpenedPage> {
 async function knownIn(on: StartedApp): Promise<Known> {
   const [here] = await rowsOf<Omit<Known, 'elsewhere'>>(
     on,
-    `SELECT w.id AS ward, s.patient_id AS patient, e.id AS entry, u.id AS person
+    `SELECT w.id AS ward, s.patient_id AS patient, e.id AS entry, u.id AS person,
+       (SELECT p.id FROM policies p WHERE p.ward_id = w.id AND p.starts_at > UTC_TIMESTAMP() LIMIT 1) AS policy
      FROM wards w JOIN stays s ON s.ward_id = w.id JOIN entries e ON e.stay_id = s.id JOIN users u ON u.id = e.recorded_by
      WHERE w.name = 'Alder ward' AND s.discharged_at IS NULL AND e.kind = 'inner-cannula' AND e.status = 'final'
        AND NOT EXISTS (SELECT 1 FROM entries n WHERE n.supersedes_id = e.id)
@@ -53,7 +54,14 @@ test('every route is a page that is looked at here, or says why it is none', () 
   expect([...listed].toSorted()).toEqual([...new Set(routesOf(routes))].toSorted())
 })
 
-const named = { ward: ':ward', patient: ':patient', entry: ':entry', elsewhere: ':elsewhere', person: ':person' }
+const named = {
+  ward: ':ward',
+  patient: ':patient',
+  entry: ':entry',
+  elsewhere: ':elsewhere',
+  person: ':person',
+  policy: ':policy',
+}
 const cases = pages.map(page => ({ ...page, says: page.path(named) }))
 
 test.each(cases)('$says is whole by day and by night, for $as', async ({ as, path }) => {

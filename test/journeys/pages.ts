@@ -10,6 +10,8 @@ export interface Known {
   /** A patient of a ward that `nurse.birch` belongs to and `nurse.alder` does not. */
   readonly elsewhere: string
   readonly person: string
+  /** A version of the policy of `ward` that has not started. */
+  readonly policy: string
 }
 
 export interface PageEntry {
@@ -70,6 +72,21 @@ export const pages: readonly PageEntry[] = [
   { route: 'entries/:entryId/retract', as: charge, path: ({ entry }) => `/entries/${entry}/retract` },
   { route: 'account', as: 'observer.alder', path: () => '/account' },
   { route: 'policy', as: 'educator', path: () => '/policy' },
+  { route: 'policy', as: specialist, path: ({ ward }) => `/policy?ward=${ward}&set=children` },
+  { route: 'policy/draft', as: specialist, path: ({ ward }) => `/policy/draft?ward=${ward}` },
+  { route: 'policy/draft', as: charge, path: ({ ward }) => `/policy/draft?ward=${ward}&set=children&changed=on` },
+  { route: 'policy/review', as: specialist, path: ({ ward }) => `/policy/review?ward=${ward}` },
+  {
+    route: 'policy/compare',
+    as: charge,
+    path: ({ ward, policy }) => `/policy/compare?ward=${ward}&from=${policy}&to=${policy}`,
+  },
+  {
+    route: 'policy/versions/:policyId/withdraw',
+    as: charge,
+    path: ({ policy }) => `/policy/versions/${policy}/withdraw`,
+  },
+  { route: 'wards/:wardId/care-plans', as: charge, path: ({ ward }) => `/wards/${ward}/care-plans` },
   { route: 'admin/people', as: administrator, path: () => '/admin/people' },
   { route: 'admin/people/new', as: administrator, path: () => '/admin/people/new' },
   { route: 'admin/people/:userId', as: administrator, path: ({ person }) => `/admin/people/${person}` },
