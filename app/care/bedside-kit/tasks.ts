@@ -2,6 +2,7 @@ import { minutes } from '../../time/duration.ts'
 import { type Clock, promptClock, shiftClock, sooner } from '../clock.ts'
 import { cuffChecks } from '../cuff-pressure/schema.ts'
 import type { CareContext, TaskRule } from '../kind.ts'
+import { isArrival, transfers } from '../transfer-checklist/schema.ts'
 import { tubeCareFrom } from '../tube-care.ts'
 import { tubeChanges } from '../tube-change/schema.ts'
 import { withoutTube } from '../tube-change/tasks.ts'
@@ -37,7 +38,7 @@ function afterEvent(done: KitEntry | undefined, context: CareContext): Clock | u
   return promptClock({ event: first.at, within, last: done, because: first.words })
 }
 
-/** Moves between beds are not part of the record: a cuff checked for a transfer tells of one. */
+/** Moves between beds are not part of the record: an arrival charted on the transfer checklist, or a cuff checked for one, tells of them. */
 function events(context: CareContext): readonly { readonly at: Date; readonly words: string }[] {
   const { record } = context
   const from = tubeCareFrom(context)
@@ -45,11 +46,14 @@ function events(context: CareContext): readonly { readonly at: Date; readonly wo
   const changes = record
     .since(tubeChanges, from)
     .filter(({ data }) => data.reason !== 'on arrival' && data.difficulty !== 'failed')
-  const transfers = record.since(cuffChecks, from).filter(({ data }) => data.reason === 'transfer')
+  const moves = [
+    ...record.since(cuffChecks, from).filter(({ data }) => data.reason === 'transfer'),
+    ...record.since(transfers, from).filter(isArrival),
+  ]
   return [
     { at: from, words: came ? 'the patient came to the ward' : 'the tube was put in' },
     ...changes.filter(({ performedAt }) => performedAt > from).map(tube => eventOf(tube, 'the tube was changed')),
-    ...transfers.map(move => eventOf(move, 'the patient was moved')),
+    ...moves.map(move => eventOf(move, 'the patient was moved')),
   ]
 }
 
