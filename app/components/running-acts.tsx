@@ -72,7 +72,7 @@ function RunningCard({ act, patientId, tasks, now, zone, charts }: RunningCardPr
 
 function untilWords(since: number, until: number, now: number, zone: Zone): string {
   const target = showDuration(until - since)
-  return now >= until ? `Its ${target} are reached.` : `${target} are reached at ${momentWords(until, now, zone)}.`
+  return `Target ${target}${now >= until ? ' is reached' : `: ${momentWords(until, now, zone)}`}.`
 }
 
 /** How much of its time has passed; the words above say the same. */

@@ -32,7 +32,7 @@ export function runningViews(context: CareContext, kinds: readonly AnyCareKind[]
     .toSorted((a, b) => b.since - a.since)
 }
 
-/** `One-way valve trial 1 h 12 min`: what runs and for how long, for one line of a board. */
+/** `Valve trial 1 h 12 min`: what runs and for how long, for one line of a board. */
 export function runningWords({ title, since }: Pick<RunningView, 'title' | 'since'>, now: number): string {
   return `${title} ${showDuration(Math.max(0, now - since))}`
 }

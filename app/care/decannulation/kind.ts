@@ -12,6 +12,7 @@ export const decannulation = careKind({
   chartWords: 'Chart removal',
   lane: 'Tube',
   needsFreshSignIn: true,
+  needsCompetence: 'decannulation',
   twoPeople: () => true,
   settings: decannulationSettings,
   warnings: removalWarnings,

@@ -93,7 +93,7 @@ test('it shows itself while it runs, with its target and the answers that stop i
   expect(weaningTrial.running?.(aContext([tube, start('09:00')], '12:00'))).toEqual([
     {
       name: 'valve',
-      title: 'One-way valve trial',
+      title: 'Valve trial',
       since: at('09:00'),
       until: at('21:00'),
       watchedBy: 'observations',

@@ -5,7 +5,7 @@ import { observationTaskName } from '../observations/task-name.ts'
 import type { RunningAct } from '../running-act.ts'
 import { plannedTrial } from '../weaning-plan/tasks.ts'
 import { weaningTrialExamples } from './examples.ts'
-import { trialNames, weaningTrials } from './schema.ts'
+import { weaningTrials } from './schema.ts'
 import { weaningTrialSentence } from './sentence.ts'
 import { weaningTrialSettings } from './settings.ts'
 import { onTheHub, runningTrials } from './trials.ts'
@@ -18,6 +18,7 @@ export const weaningTrial = careKind({
   title: 'Weaning trial',
   chartWords: 'Chart trial',
   lane: 'Tube',
+  needsCompetence: 'valve and cap',
   cautions: [
     'Cuff must be fully deflated before any valve or cap. Never use a valve with a foam cuff.',
     'With distress, stridor or falling SpO2 a valve or cap comes off at once.',
@@ -32,10 +33,12 @@ export const weaningTrial = careKind({
   outOfRange: (data, context) => weaningTrialWarnings(data, context).some(({ level }) => level !== 'blue'),
 })
 
+const runningTitles = { cuff: 'Cuff trial', valve: 'Valve trial', cap: 'Cap trial' } as const
+
 function runningActs({ record, values }: CareContext): readonly RunningAct[] {
   return runningTrials(record).map(({ name, startedAt }) => ({
     name,
-    title: `${trialNames[name]} trial`,
+    title: runningTitles[name],
     since: startedAt,
     until: later(startedAt, targetOf(name, values)),
     watchedBy: observationTaskName,
