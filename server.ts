@@ -14,6 +14,8 @@ import { env } from './app/env.server.ts'
 import type { RequestFacts } from './app/request-context.server.ts'
 
 const MOST_BODY_BYTES = 64 * 1024 // the longest form has about 4 kB
+const MOST_UPLOAD_BYTES = 48 * 1024 * 1024 // four photographs of 8 MB, and some more, so that one too many is said at its field
+const takesUploads = /^\/(patients\/[\w-]+\/chart\/[\w-]+|entries\/[\w-]+\/correct)(\.data)?$/
 const DRAIN_MS = 2000 // npm start promises an end within three seconds, database included
 const LONGEST_END_MS = 2400 // then npm start kills the process
 
@@ -169,11 +171,13 @@ function bodyLimited(...[request, response, next]: Parameters<RequestHandler>) {
     response.set('Connection', 'close').status(413).type('text').send('The form is too long. Nothing was charted.')
     response.once('finish', () => request.destroy())
   }
-  if (Number(request.headers['content-length'] ?? 0) > MOST_BODY_BYTES) return refuse()
+  const isUpload = takesUploads.test(request.path) && request.is('multipart/form-data') !== false
+  const most = isUpload ? MOST_UPLOAD_BYTES : MOST_BODY_BYTES
+  if (Number(request.headers['content-length'] ?? 0) > most) return refuse()
   let bytes = 0
   request.on('data', (chunk: Buffer) => {
     bytes += chunk.length
-    if (bytes > MOST_BODY_BYTES) refuse()
+    if (bytes > most) refuse()
   })
   request.pause() // counting must not start the flow before a route reads
   next()

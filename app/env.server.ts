@@ -1,3 +1,4 @@
+import { resolve } from 'node:path'
 import { z } from 'zod'
 
 const schema = z.object({
@@ -9,6 +10,8 @@ const schema = z.object({
   HOSPITAL_TIME_ZONE: z.string().refine(isTimeZone, 'is no IANA time zone').default('Europe/London'),
   /** Signs cookies. At least 32 characters. */
   SESSION_SECRET: z.string().min(32),
+  /** Folder of what is kept in files, such as photographs. */
+  CANNULARY_DATA: z.string().min(1).default('.data'),
   HOST: z.string().min(1).default('127.0.0.1'),
   PORT: z.coerce.number().int().min(0).max(65_535).default(3000),
   /** `when told`: npm start brings the database up to date while the server loads, and then sends it a message. */
@@ -33,6 +36,7 @@ function settings(from: NodeJS.ProcessEnv) {
     databaseOwnerUrl: data.DATABASE_OWNER_URL ?? data.DATABASE_URL,
     hospitalTimeZone: data.HOSPITAL_TIME_ZONE,
     sessionSecret: data.SESSION_SECRET,
+    dataFolder: resolve(data.CANNULARY_DATA),
     host: data.HOST,
     port: data.PORT,
     listens: data.LISTEN,

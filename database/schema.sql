@@ -230,6 +230,25 @@ CREATE TABLE `patients` (
   CONSTRAINT `patients_laryngoscopy_is_a_grade` CHECK (`laryngoscopy` in ('1','2','3','4'))
 ) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
 
+CREATE TABLE `photographs` (
+  `id` uuid NOT NULL COMMENT 'of the entry and the content: the same form twice is the same photograph',
+  `entry_id` uuid NOT NULL COMMENT 'with which it was added; a correction may keep it',
+  `stay_id` uuid NOT NULL,
+  `file` uuid NOT NULL COMMENT 'the name of its files in the store',
+  `width` smallint(5) unsigned NOT NULL,
+  `height` smallint(5) unsigned NOT NULL,
+  `bytes` int(10) unsigned NOT NULL,
+  `sha256` char(64) CHARACTER SET ascii COLLATE ascii_bin NOT NULL COMMENT 'of the file in the store',
+  `added_at` datetime(3) NOT NULL DEFAULT utc_timestamp(3),
+  PRIMARY KEY (`id`),
+  UNIQUE KEY `photographs_file` (`file`),
+  KEY `photographs_of_entry` (`entry_id`),
+  KEY `photographs_stay` (`stay_id`),
+  CONSTRAINT `photographs_entry` FOREIGN KEY (`entry_id`) REFERENCES `entries` (`id`),
+  CONSTRAINT `photographs_stay` FOREIGN KEY (`stay_id`) REFERENCES `stays` (`id`),
+  CONSTRAINT `photographs_have_a_size` CHECK (`width` > 0 and `height` > 0 and `bytes` > 0)
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
 CREATE TABLE `policies` (
   `id` uuid NOT NULL,
   `name` varchar(120) NOT NULL,
@@ -530,6 +549,12 @@ CREATE TRIGGER IF NOT EXISTS entry_signatures_refuse_delete BEFORE DELETE ON ent
 
 CREATE TRIGGER IF NOT EXISTS entry_signatures_refuse_update BEFORE UPDATE ON entry_signatures FOR EACH ROW
     SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'entry_signatures is append-only';
+
+CREATE TRIGGER IF NOT EXISTS photographs_refuse_delete BEFORE DELETE ON photographs FOR EACH ROW
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'photographs is append-only: correct or retract their entry';
+
+CREATE TRIGGER IF NOT EXISTS photographs_refuse_update BEFORE UPDATE ON photographs FOR EACH ROW
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'photographs is append-only: correct or retract their entry';
 
 CREATE TRIGGER IF NOT EXISTS policies_refuse_delete BEFORE DELETE ON policies FOR EACH ROW
     SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'policies is append-only: a change is a new version';

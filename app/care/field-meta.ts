@@ -58,8 +58,13 @@ export interface CodesMeta extends Shared {
 export interface DecidedMeta extends Shared {
   readonly control: 'decided'
 }
+/** Files that are sent with the form and kept as photographs; the stored answer is their ids. */
+export interface PhotographsMeta extends Shared {
+  readonly control: 'photographs'
+  readonly most: number
+}
 /** Questions that somebody answers. */
-export type AskedMeta = QuantityMeta | ChoiceMeta | TextMeta | DateMeta | NameMeta
+export type AskedMeta = QuantityMeta | ChoiceMeta | TextMeta | DateMeta | NameMeta | PhotographsMeta
 /** What comes with a scan or from the catalogue. */
 export type CarriedMeta = ItemMeta | CodesMeta | DecidedMeta
 /** What a form needs to know to draw one field: declared once, beside the value's own rules. */

@@ -27,6 +27,8 @@ export interface Situation {
   readonly known: KnownNames
   /** Who may stand as the second person. */
   readonly witnessIds: ReadonlySet<string>
+  /** What was wrong with the form's files, by field. */
+  readonly problems?: readonly FormProblem[]
   /** A correction always needs a reason; an act does when it is written down late. */
   readonly reason: 'always' | 'when late'
   /** The record, policy and ward as rules see them when the act was done; null where no policy was reviewed. */
@@ -39,7 +41,11 @@ export function assessed(kind: AnyCareKind, sent: FormData, situation: Situation
   const submission = readChart(kind, form)
   const spine = readSpine(form)
   const when = spine && performedAt(spine, situation.calendar)
-  const problems = [...formProblems(sent, unknown), ...(spine ? spineProblems(spine, when, situation) : [])]
+  const problems = [
+    ...(situation.problems ?? []),
+    ...formProblems(sent, unknown),
+    ...(spine ? spineProblems(spine, when, situation) : []),
+  ]
   const context = when?.ok ? situation.contextAt(when.at) : null
   const errors = {
     ...(submission.status === 'success' ? {} : messagesOf(submission.error)),

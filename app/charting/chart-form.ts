@@ -60,6 +60,9 @@ export function intentOf(sent: FormData): Intent | undefined {
 /** What stands in a form, by the name of the field: `care.found`, `when`. */
 export type Typed = Readonly<Record<string, readonly string[]>>
 
+/** Stands for a file that was chosen and not sent: the server puts the photograph's own id in its place. */
+const NOT_SENT_YET = 'ffffffff-ffff-4fff-8fff-ffffffffffff'
+
 /** A form as it came: what its own fields hold, and the names it should not have. */
 export interface FormRead {
   readonly form: FormData
@@ -73,7 +76,7 @@ const notFields: readonly string[] = ['intent', ...passwordFields]
 
 /**
  * Keeps the fields that a form of this kind has. Names are compared before anything takes them for paths, since
- * `care.__proto__` or `care[9999999]` would be followed. A decimal comma counts as a point; files count as unknown.
+ * `care.__proto__` or `care[9999999]` would be followed. A decimal comma counts as a point; files count as unknown, but for photographs.
  */
 export function ownFields(kind: AnyCareKind, sent: FormData): FormRead {
   const fields = fieldsOf(kind.schema).filter(({ meta }) => meta.control !== 'decided')
@@ -82,6 +85,10 @@ export function ownFields(kind: AnyCareKind, sent: FormData): FormRead {
   const unknown = new Set<string>()
   for (const [name, value] of sent) {
     const control = care.get(name)
+    if (control === 'photographs' && typeof value !== 'string') {
+      if (value.size > 0) form.append(name, NOT_SENT_YET)
+      continue
+    }
     if (typeof value !== 'string' || (control === undefined && !Object.hasOwn(spine, name))) {
       if (!notFields.includes(name)) unknown.add(name)
       continue

@@ -2,6 +2,7 @@ import type { ReactNode } from 'react'
 import { type AskedMeta, type FieldMeta, isCarried } from '#app/care/field-meta.ts'
 import { ChoiceField } from './choice-field.tsx'
 import type { FieldProps } from './field-parts.tsx'
+import { PhotographsField } from './photographs-field.tsx'
 import { type Band, QuantityField } from './quantity-field.tsx'
 import { SelectField, TextArea, TextField } from './text-field.tsx'
 
@@ -45,6 +46,7 @@ const controls: { readonly [C in Control]: (meta: MetaOf<C>, drawing: Drawing) =
   ),
   note: ({ maxLength }, { field, answers }) => <TextArea {...field} maxLength={maxLength} defaultValue={answers[0]} />,
   date: (_, { field, answers }) => <TextField {...field} type="date" defaultValue={answers[0]} />,
+  photographs: ({ most }, { field, answers }) => <PhotographsField {...field} most={most} kept={answers} />,
   task: (_, drawing) => <NameField {...drawing} />,
   setting: (_, drawing) => <NameField {...drawing} />,
 }

@@ -3,6 +3,7 @@ import { Form } from 'react-router'
 import { fieldsOf } from '#app/care/field.ts'
 import type { Gauge } from '#app/care/gauge.ts'
 import type { AnyCareKind } from '#app/care/kind.ts'
+import { photographFields } from '#app/care/photographs.ts'
 import type { FormErrors } from '#app/charting/assess.ts'
 import type { ChartAnswer, FormSigner } from '#app/charting/chart-answer.ts'
 import type { Typed } from '#app/charting/chart-form.ts'
@@ -61,6 +62,7 @@ export function ChartForm({ kind, view, answer, words, cancelHref, reasonAfterHo
     <Form
       ref={form}
       method="post"
+      {...(photographFields(kind).length > 0 ? { encType: 'multipart/form-data' } : {})}
       noValidate
       onInput={event => {
         noteChange(event)

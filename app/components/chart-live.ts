@@ -74,6 +74,13 @@ export function useChartLive(
   }
 }
 
+/** The form without its files, which no preview needs. */
+function textsOf(form: HTMLFormElement): FormData {
+  const texts = new FormData()
+  for (const [name, value] of new FormData(form)) if (typeof value === 'string') texts.append(name, value)
+  return texts
+}
+
 /** Asks the server what it would warn of, once typing rests. */
 function usePreview(form: RefObject<HTMLFormElement | null>) {
   const { data, submit } = useFetcher<ChartAnswer>()
@@ -83,7 +90,7 @@ function usePreview(form: RefObject<HTMLFormElement | null>) {
     keepQuiet()
     waiting.current = window.setTimeout(() => {
       if (!form.current) return
-      const body = new FormData(form.current)
+      const body = textsOf(form.current)
       body.set('intent', 'preview')
       for (const name of passwordFields) body.delete(name)
       void submit(body, { method: 'post', defaultShouldRevalidate: false })

@@ -1,6 +1,7 @@
 import type { ReactNode } from 'react'
 import { showDay } from '#app/time/display.ts'
 import { Empty } from './empty.tsx'
+import { Thumbnails } from './thumbnails.tsx'
 import { TimelineEntry, type TimelineEntryView } from './timeline-entry.tsx'
 
 export interface EntryListItem extends Omit<TimelineEntryView, 'href' | 'late' | 'statusSays'> {
@@ -8,6 +9,7 @@ export interface EntryListItem extends Omit<TimelineEntryView, 'href' | 'late' |
   readonly day: string
   readonly late: string | null
   readonly statusSays: string | null
+  readonly photographs: readonly string[]
 }
 
 interface EntryListProps {
@@ -30,7 +32,7 @@ export function EntryList({ entries, today, children }: EntryListProps) {
       <ul>
         {entries
           .filter(entry => entry.day === day)
-          .map(({ late, statusSays, ...entry }) => (
+          .map(({ late, statusSays, photographs, ...entry }) => (
             <TimelineEntry
               key={entry.id}
               entry={{
@@ -39,7 +41,9 @@ export function EntryList({ entries, today, children }: EntryListProps) {
                 late: late ?? undefined,
                 statusSays: statusSays ?? undefined,
               }}
-            />
+            >
+              <Thumbnails ids={photographs} of={`${entry.title} at ${entry.time}`} />
+            </TimelineEntry>
           ))}
       </ul>
     </section>

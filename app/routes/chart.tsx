@@ -6,6 +6,8 @@ import { findKind } from '#app/care/kinds.ts'
 import { ChartForm } from '#app/components/chart-form.tsx'
 import { ChartHead, UsualAct } from '#app/components/chart-head.tsx'
 import { answerOrKept } from '#app/components/kept-form.ts'
+import { chartedWith } from '#app/photographs/charted-with.server.ts'
+import { sentPhotographs } from '#app/photographs/sent-photographs.server.ts'
 import { sentForm } from '#app/sent-form.server.ts'
 import { chartForm } from '#app/views/chart-form.server.ts'
 import { checked, refusedByRecord } from '#app/views/chart-submission.server.ts'
@@ -37,12 +39,13 @@ export async function action({ params, context, request, url }: Route.ActionArgs
   const { stayId } = await patientGate(user, params.patientId, askOf({ kind, context, request, url }))
   const now = new Date()
   const from = { signedInAt: ownSession(context).startedAt, by: traceOf({ request, url, context }) }
-  const sent = { kind, user, now, ...from, form: await sentForm(request), care: await patientCare(stayId, now) }
+  const photographs = await sentPhotographs(kind, await sentForm(request), [])
+  const sent = { kind, user, now, ...from, form: photographs.form, photographs, care: await patientCare(stayId, now) }
   const check = await checked(sent)
   if (!check.ok) return data(check.answer, check.status)
   const { id, performedAt, witnessId, reason, care } = check.chart
   const entry = { id, kind, stayId, performedAt, recordedBy: user, witnessId, reason, data: care }
-  const charting = await addEntry(entry, check.alongside)
+  const charting = await chartedWith(entry, photographs.added, check.alongside, also => addEntry(entry, also))
   if (charting.outcome === 'charted' || charting.outcome === 'already charted') {
     return redirect(`/patients/${params.patientId}?charted=${charting.entry.id}`)
   }

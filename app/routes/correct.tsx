@@ -3,6 +3,9 @@ import { findKind } from '#app/care/kinds.ts'
 import { ChartForm } from '#app/components/chart-form.tsx'
 import { CorrectReason, EntryHead, Replaced } from '#app/components/entry-head.tsx'
 import { answerOrKept } from '#app/components/kept-form.ts'
+import { chartedWith } from '#app/photographs/charted-with.server.ts'
+import { sentPhotographs } from '#app/photographs/sent-photographs.server.ts'
+import { photographsOf } from '#app/rules/entry-words.ts'
 import { sentForm } from '#app/sent-form.server.ts'
 import { checked, refusedByRecord } from '#app/views/chart-submission.server.ts'
 import { correctForm } from '#app/views/correct-form.server.ts'
@@ -30,7 +33,8 @@ export async function loader({ params, context, request, url }: Route.LoaderArgs
 export async function action({ params, context, request, url }: Route.ActionArgs) {
   const { entry, patientId, ...asked } = await openedEntry({ params, context, request, url }, 'correct')
   const kind = kindOr404(entry.kind)
-  const sent = { ...asked, kind, form: await sentForm(request), corrects: entry.id }
+  const photographs = await sentPhotographs(kind, await sentForm(request), photographsOf(entry))
+  const sent = { ...asked, kind, form: photographs.form, photographs, corrects: entry.id }
   const check = await checked(sent)
   if (!check.ok) return data(check.answer, check.status)
   const { id, performedAt, witnessId, reason = '' } = check.chart
@@ -40,7 +44,9 @@ export async function action({ params, context, request, url }: Route.ActionArgs
     recordedBy: asked.user,
     supersedes: entry.id,
   }
-  const charting = await correctEntry(correction, check.alongside)
+  const charting = await chartedWith(correction, photographs.added, check.alongside, also =>
+    correctEntry(correction, also),
+  )
   if (charting.outcome === 'charted' || charting.outcome === 'already charted') {
     return redirect(`/patients/${patientId}?charted=${charting.entry.id}`)
   }

@@ -4,6 +4,7 @@ import { Card } from '#app/components/card.tsx'
 import { DataList } from '#app/components/data-list.tsx'
 import { EntryHead, Replaced } from '#app/components/entry-head.tsx'
 import { Tag } from '#app/components/tag.tsx'
+import { Thumbnails } from '#app/components/thumbnails.tsx'
 import { Warnings } from '#app/components/warnings.tsx'
 import { type EntryView, entryView } from '#app/views/entry-view.server.ts'
 import { openedEntry } from '#app/views/opened-entry.server.ts'
@@ -29,6 +30,7 @@ export default function Entry({ loaderData: entry }: Route.ComponentProps) {
             <p className={`max-w-prose text-lg ${stands ? 'line-through decoration-1' : ''}`}>{entry.sentence}</p>
             {stands && <Tag tone="due">{stands}</Tag>}
           </div>
+          <Thumbnails ids={entry.photographs} of={entry.title} struck={stands !== null} />
           <Warnings warnings={entry.warnings} />
           <EntryActs entry={entry} />
           <div className="grid items-start gap-4 md:grid-cols-2">

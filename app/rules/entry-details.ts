@@ -38,6 +38,8 @@ function inWords(meta: FieldMeta, value: unknown, data: Answers): string {
     case 'task':
     case 'setting':
       return wordsOf(String(value))
+    case 'photographs':
+      return String([value].flat().length)
     case 'codes':
       return String(value).replaceAll('\u001d', ' ')
     case 'item':

@@ -1,6 +1,7 @@
 import { lateEntryAfter } from '../care/general-settings.ts'
 import { type StoredEntry, wordsOf } from '../care/kind.ts'
 import { findKind } from '../care/kinds.ts'
+import { photographsIn } from '../care/photographs.ts'
 import type { Values } from '../care/policy.ts'
 import { readEntry } from '../care/record.ts'
 import { showDuration } from '../time/display.ts'
@@ -30,4 +31,11 @@ export function entryWords(stored: StoredEntry): EntryWords {
 export function lateWords(entry: Pick<StoredEntry, 'performedAt' | 'recordedAt'>, values: Values): string | undefined {
   const delay = since(entry.performedAt, entry.recordedAt)
   return delay > minutes(values.of(lateEntryAfter)) ? `late entry, charted ${showDuration(delay)} later` : undefined
+}
+
+/** The ids of an entry's photographs; none of one that cannot be read. */
+export function photographsOf(stored: StoredEntry): readonly string[] {
+  const kind = findKind(stored.kind)
+  const entry = kind && readEntry(kind, stored)[0]
+  return kind && entry ? photographsIn(kind, entry.data) : []
 }

@@ -6,6 +6,7 @@ import { type Assessed, assessed, type Chartable, type Situation } from '#app/ch
 import type { ChartAnswer, Otherwise, WarningView } from '#app/charting/chart-answer.ts'
 import { intentOf, typedIn } from '#app/charting/chart-form.ts'
 import { chartedSentence } from '#app/charting/sentence.ts'
+import type { SentPhotographs } from '#app/photographs/sent-photographs.server.ts'
 import { entryWarnings } from '#app/rules/warnings.ts'
 import { showDateTime } from '#app/time/display.ts'
 import type { Trace } from '#database/access-log.server.ts'
@@ -29,6 +30,8 @@ export interface Sent {
   readonly signedInAt: Date
   readonly by: Trace
   readonly corrects?: string
+  /** Its files, if it may have some. */
+  readonly photographs?: Pick<SentPhotographs, 'shownAgain' | 'problems'>
 }
 
 /** What a form may be answered with before anything is stored, or what is to be stored. */
@@ -77,16 +80,16 @@ function warningsOf(kind: AnyCareKind, { chart, context }: { chart: Chartable; c
 }
 
 /** What the page shows again: everything typed, under the same id, so that sending it again is the same act. */
-function keptOf({ kind, form, user }: Sent) {
+function keptOf({ kind, form, user, photographs }: Sent) {
   const id = form.get('id')
   return {
-    typed: typedIn(kind, form),
+    typed: typedIn(kind, photographs?.shownAgain ?? form),
     id: typeof id === 'string' && isUuid(id) ? id : uuidv7(),
     signer: signerOf(user),
   }
 }
 
-async function situationOf({ care, form, user, now, corrects }: Sent): Promise<Situation> {
+async function situationOf({ care, form, user, now, corrects, photographs }: Sent): Promise<Situation> {
   const known = await policies()
   const witness = form.get('witness')
   const people = witness ? await witnessesFor(care.ward.id, user) : {}
@@ -94,6 +97,7 @@ async function situationOf({ care, form, user, now, corrects }: Sent): Promise<S
     calendar: calendarOf(care, now),
     known: { settings: careSettings, tasks: careTasks },
     witnessIds: new Set(Object.keys(people)),
+    problems: photographs?.problems ?? [],
     reason: corrects === undefined ? 'when late' : 'always',
     contextAt: at =>
       corrects === undefined ? contextOfAct(care, known, at) : contextOfCorrection(care, known, at, corrects),

@@ -3,7 +3,7 @@ import { findKind } from '#app/care/kinds.ts'
 import { readEntry } from '#app/care/record.ts'
 import type { WarningView } from '#app/charting/chart-answer.ts'
 import { type Detail, entryDetails } from '#app/rules/entry-details.ts'
-import { entryWords, lateWords } from '#app/rules/entry-words.ts'
+import { entryWords, lateWords, photographsOf } from '#app/rules/entry-words.ts'
 import { authorWords, competenceWords, type SignatureFact, secondPersonWords } from '#app/rules/signature-words.ts'
 import { policyWords } from '#app/rules/why.ts'
 import { showDateTime, showOffset } from '#app/time/display.ts'
@@ -36,6 +36,7 @@ export interface EntryView {
   readonly details: readonly Detail[]
   /** The payload as stored, of an entry that cannot be read. */
   readonly raw: string | null
+  readonly photographs: readonly string[]
   readonly warnings: readonly WarningView[]
   readonly policy: string | null
   readonly history: readonly HistoryLine[]
@@ -65,6 +66,7 @@ export async function entryView(opened: OpenedEntry): Promise<EntryView> {
     facts: factsOf(opened, (context && lateWords(entry, context.values)) ?? null, signatures),
     details: kind && data ? entryDetails(kind, data as Readonly<Record<string, unknown>>) : [],
     raw: words.readable ? null : rawOf(entry),
+    photographs: photographsOf(entry),
     warnings: warningsOf(care, known, entry).map(shownWarning),
     policy: context && policyWords(context.values.policy),
     history: chain.length > 1 ? chain.map(link => historyLine(link, entry.id, care.ward.zone)) : [],

@@ -2,7 +2,7 @@ import type { CareContext, StoredEntry } from '#app/care/kind.ts'
 import { findKind } from '#app/care/kinds.ts'
 import { readEntry } from '#app/care/record.ts'
 import { dueTasks } from '#app/rules/due-tasks.ts'
-import { entryWords, lateWords } from '#app/rules/entry-words.ts'
+import { entryWords, lateWords, photographsOf } from '#app/rules/entry-words.ts'
 import { type TubeCardOrNone, tubeCard } from '#app/rules/tube-card.ts'
 import { type CareView, careView, isOutOfRange } from '#app/rules/views.ts'
 import { type WhyDue, whyDue } from '#app/rules/why.ts'
@@ -32,6 +32,8 @@ export interface EntryLine {
   readonly status: 'final' | 'corrected' | 'retracted'
   readonly statusSays: string | null
   readonly outOfRange: boolean
+  /** Ids of its photographs, while it counts. */
+  readonly photographs: readonly string[]
 }
 
 export interface PatientTimeline {
@@ -122,6 +124,7 @@ function entryLine(entry: StoredEntry, by: Superseding | null, { context, ward }
     status,
     statusSays: statusWords(entry, by, ward.zone),
     outOfRange: isMarked(entry, context),
+    photographs: status === 'final' ? photographsOf(entry) : [],
   }
 }
 

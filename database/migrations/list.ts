@@ -19,6 +19,7 @@ import { innerCannulas } from './0042-inner-cannulas.ts'
 import { catalogueChanges } from './0043-catalogue-changes.ts'
 import { emergencyNumbers } from './0055-emergency-numbers.ts'
 import { airwayDetails } from './0056-airway-details.ts'
+import { photographs } from './0058-photographs.ts'
 import { entrySignatures } from './0070-entry-signatures.ts'
 import { policyRuleSets } from './0080-policy-rule-sets.ts'
 import { policyWithdrawals } from './0081-policy-withdrawals.ts'
@@ -48,6 +49,7 @@ export const migrations: Record<string, Migration> = {
   '0043-catalogue-changes': catalogueChanges,
   '0055-emergency-numbers': emergencyNumbers,
   '0056-airway-details': airwayDetails,
+  '0058-photographs': photographs,
   '0070-entry-signatures': entrySignatures,
   '0080-policy-rule-sets': policyRuleSets,
   '0081-policy-withdrawals': policyWithdrawals,

@@ -21,7 +21,8 @@ beforeAll(async () => {
   user = await aPerson({ name: 'Ingrid Adeyemi', role: 'tracheostomy specialist', wardIds: [given.ward.id] })
 })
 
-const kinds: readonly AnyCareKind[] = careKinds
+// Those that have a page of their own are sent there.
+const kinds = careKinds.filter((kind: AnyCareKind) => kind.page === undefined) as readonly AnyCareKind[]
 const rows = kinds.map(kind => [kind.slug, kind] as const)
 const LONG = 'x'.repeat(20_000)
 
@@ -52,6 +53,7 @@ const ofControl: Readonly<Record<FieldMeta['control'], readonly string[]>> = {
   item: ['x', '1', '__proto__', LONG],
   codes: ['x', 'barcode', 'barcode \u0000', 'voice ]d2', 'barcode a\n', LONG],
   decided: ['019aa7c2-0000-7000-8000-000000000001'],
+  photographs: ['x', '../x', '018f0000-0000-7000-8000-000000000001', LONG],
   setting: ['', 'no-such-setting', 'constructor', LONG],
 }
 

@@ -1,5 +1,8 @@
 import { spawn } from 'node:child_process'
 import { once } from 'node:events'
+import { mkdtempSync } from 'node:fs'
+import { tmpdir } from 'node:os'
+import { join } from 'node:path'
 import { QueryTypes, type Sequelize } from 'sequelize'
 import { inject } from 'vitest'
 import { connection } from '#database/connection.server.ts'
@@ -58,6 +61,7 @@ export async function startedApp({
     DATABASE_OWNER_URL: ownerUrl,
     HOSPITAL_TIME_ZONE: timeZone,
     SESSION_SECRET: 'a secret for tests alone, 40 characters.',
+    CANNULARY_DATA: mkdtempSync(join(tmpdir(), 'cannulary-data-')),
     HOST: '127.0.0.1',
     PORT: '0',
     NODE_ENV: 'production',

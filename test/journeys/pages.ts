@@ -33,6 +33,7 @@ export const notPages: Readonly<Record<string, string>> = {
   draft: 'the idle watch sends to it',
   'still-here': 'the idle watch sends to it',
   'patients/:patientId/sign.pdf': 'a PDF',
+  'photographs/:photographId': 'a picture',
   'api/patients/:patientId/timeline': 'JSON',
   'api/wards/:wardId/board': 'JSON',
 }
@@ -66,6 +67,11 @@ export const pages: readonly PageEntry[] = [
     path: ({ patient }) => `/patients/${patient}/emergency`,
   },
   { route: 'patients/:patientId/sign', as: 'nurse.alder', path: ({ patient }) => `/patients/${patient}/sign` },
+  {
+    route: 'patients/:patientId/photographs',
+    as: 'nurse.alder',
+    path: ({ patient }) => `/patients/${patient}/photographs`,
+  },
   { route: 'patients/:patientId/access', as: 'nurse.alder', path: ({ elsewhere }) => `/patients/${elsewhere}/access` },
   { route: 'entries/:entryId', as: charge, path: ({ entry }) => `/entries/${entry}` },
   { route: 'entries/:entryId/correct', as: charge, path: ({ entry }) => `/entries/${entry}/correct` },

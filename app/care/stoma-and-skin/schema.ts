@@ -2,6 +2,7 @@ import type { z } from 'zod'
 import { type PressureInjuryStage, pressureInjuryTexts } from '../../clinical/pressure-injury.ts'
 import { careFields, choice, choices, note, quantity, text, yesNo } from '../field.ts'
 import { charted } from '../kind.ts'
+import { photographs } from '../photographs.ts'
 
 export const openingFindings = {
   clean: 'Clean and healthy',
@@ -138,6 +139,7 @@ const fields = careFields({
     label: 'Second person',
     hint: 'Holds the tube while dressing or ties are changed; write "alone" if nobody did',
   }).optional(),
+  photographs: photographs({ label: 'Photographs of the opening and the skin', section: 'Photographs' }).optional(),
   note: note({ label: 'Note', more: true }).optional(),
 })
 

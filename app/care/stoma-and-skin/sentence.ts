@@ -1,3 +1,4 @@
+import { photographWords } from '../photographs.ts'
 import { sentence } from '../sentence.ts'
 import {
   dressingTypes,
@@ -26,6 +27,9 @@ export function stomaSentence(data: StomaData): string {
       ? [sentence(data.secondPerson === 'alone' ? 'Done alone' : `With ${data.secondPerson}`)]
       : []),
     ...(data.swab === 'yes' ? ['Swab sent.'] : []),
+    ...(data.photographs
+      ? [`${photographWords(data.photographs.length)}.`.replace(/^./, one => one.toUpperCase())]
+      : []),
     ...(data.note ? [sentence(data.note)] : []),
   ].join(' ')
 }
