@@ -37,6 +37,8 @@ export interface BoardPatient {
   readonly running?: readonly string[]
   /** Red and amber warnings that stand. */
   readonly warnings?: number
+  /** Why nothing is computed. */
+  readonly statement?: string | undefined
   /** One of them asks to act now. */
   readonly isUrgent?: boolean
 }
@@ -91,6 +93,7 @@ export function BoardRow({ patient, changed = false, children }: BoardRowProps) 
     running = [],
     warnings = 0,
     isUrgent = false,
+    statement,
   } = patient
   return (
     <li
@@ -124,18 +127,19 @@ export function BoardRow({ patient, changed = false, children }: BoardRowProps) 
         {tube && <DwellBar day={tube.day} limit={tube.limit} status={tube.status} />}
       </div>
       <div className="min-w-0 max-xl:col-span-full">{children}</div>
-      <NextCareList next={next} />
+      <NextCareList next={next} statement={statement} />
     </li>
   )
 }
 
 interface NextCareListProps {
   readonly next: readonly NextCare[]
+  readonly statement: string | undefined
 }
 
 const pressing: readonly TaskStatus[] = ['due', 'overdue', 'seriously overdue']
 
-function NextCareList({ next }: NextCareListProps) {
+function NextCareList({ next, statement }: NextCareListProps) {
   const more = next.slice(SHOWN).filter(({ status }) => pressing.includes(status)).length
   return (
     <ul aria-label="Next care" className="grid max-xl:col-span-full">
@@ -143,7 +147,7 @@ function NextCareList({ next }: NextCareListProps) {
         <NextCareItem key={care.name} care={care} />
       ))}
       {more > 0 && <li className="text-sm font-semibold text-due">{`and ${more} more due`}</li>}
-      {next.length === 0 && <li className="text-ink2">Nothing due</li>}
+      {next.length === 0 && <li className="text-ink2">{statement ?? 'Nothing due'}</li>}
     </ul>
   )
 }

@@ -2,6 +2,7 @@ import { type Lane, lanes } from '#app/care/lanes.ts'
 import { type Board, boardCounts, type LiveBoardTask, type LivePatient } from '#app/rules/board.ts'
 import type { LaneMarks } from '#app/rules/board-care.ts'
 import { runningWords } from '#app/rules/running.ts'
+import { NO_CHILD_RULES_NAME } from '#app/rules/warnings.ts'
 import { standingWords } from '#app/rules/words.ts'
 import { showTime } from '#app/time/display.ts'
 import type { Zone } from '#app/time/zone.ts'
@@ -127,6 +128,7 @@ function rowOf(patient: LivePatient, { now, zone, charts }: Seen): BoardPatient 
     worst: worst ?? 'upcoming',
     running: care.running.map(act => runningWords(act, now)),
     warnings: care.warnings.filter(({ level }) => level !== 'blue').length,
+    statement: care.warnings.find(({ name }) => name === NO_CHILD_RULES_NAME)?.action,
     isUrgent: care.warnings.some(({ level }) => level === 'red'),
   }
 }

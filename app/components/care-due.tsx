@@ -8,7 +8,7 @@ import { LinkButton } from './button.tsx'
 import { Card } from './card.tsx'
 import { chartHref } from './chart-href.ts'
 import { DueTask, type DueTaskView } from './due-task.tsx'
-import { Tag } from './tag.tsx'
+import { WhyValues } from './why-values.tsx'
 
 interface CareDueProps {
   readonly patientId: string
@@ -84,16 +84,7 @@ function Why({ why, defer }: WhyProps) {
       <p>{why.rule}</p>
       {why.because && <p>{why.because}</p>}
       {why.deferral && <p>{why.deferral}</p>}
-      <ul className="grid gap-1">
-        {why.values.map(({ label, value, origin, source, standing }) => (
-          <li key={label}>
-            <b className="font-semibold text-ink">
-              {label}: {value}.
-            </b>{' '}
-            {origin}. {source}. <Tag>{standing}</Tag>
-          </li>
-        ))}
-      </ul>
+      <WhyValues values={why.values} />
       <p>{why.policy}</p>
       {defer && (
         <p>

@@ -16,11 +16,13 @@ export interface AppPageProps {
   /** What this person may open, most used first: a phone shows the first four at its foot. */
   readonly sections: readonly SectionLink[]
   readonly theme: Theme
+  /** Who reviewed the policy of the ward, and when. */
+  readonly reviewed?: string | null
   readonly children: ReactNode
 }
 
 /** A page inside the application: bar, content, safety line. The content brings its own `h1`. */
-export function AppPage({ person, ward, now, zone, sections, theme, children }: AppPageProps) {
+export function AppPage({ person, ward, now, zone, sections, theme, reviewed = null, children }: AppPageProps) {
   return (
     <div className="group/page flex min-h-dvh flex-col pb-18 has-[[data-final-bar]]:pb-0 md:pb-0 print:block print:pb-0">
       <header className="border-b border-line bg-surface print:hidden">
@@ -48,7 +50,7 @@ export function AppPage({ person, ward, now, zone, sections, theme, children }: 
       <main id="main" tabIndex={-1} className="mx-auto w-full max-w-360 flex-1 outline-none">
         {children}
       </main>
-      <SafetyLine />
+      <SafetyLine reviewed={reviewed} />
       <BottomSections sections={sections} />
     </div>
   )

@@ -1,5 +1,5 @@
 /** What the program is not, at the foot of every page. */
-export function SafetyLine() {
+export function SafetyLine({ reviewed }: { readonly reviewed?: string | null }) {
   return (
     <footer className="group-has-[[data-sheet]]/page:print:hidden mx-auto mt-8 w-full max-w-360 px-4 pb-4 md:px-6 text-sm text-ink3">
       <p>
@@ -7,6 +7,7 @@ export function SafetyLine() {
         plan.
       </p>
       <p>Not an alarm. Keep monitors and call bell on.</p>
+      {reviewed && <p>Intervals and limits are set by your hospital. {reviewed}</p>}
     </footer>
   )
 }

@@ -1,5 +1,7 @@
 import type { WarningLevel } from '#app/care/warning.ts'
+import type { WhyWarning } from '#app/rules/why-warnings.ts'
 import { Notice } from './notice.tsx'
+import { WhyValues } from './why-values.tsx'
 
 interface WarningsProps {
   readonly title?: string
@@ -8,6 +10,7 @@ interface WarningsProps {
     readonly level: WarningLevel
     readonly action: string
     readonly cause: string
+    readonly why?: WhyWarning | undefined
   }[]
 }
 
@@ -19,11 +22,32 @@ export function Warnings({ title, warnings }: WarningsProps) {
       {title && (
         <p className="rounded-card border border-line bg-brand-tint px-4 py-3 font-semibold text-brand">{title}</p>
       )}
-      {warnings.map(({ name, level, action, cause }) => (
-        <Notice key={name} tone={level} action={action}>
+      {warnings.map(({ name, level, action, cause, why }) => (
+        <Notice key={name} tone={level} action={action} answer={why && <Why why={why} about={action} />}>
           {cause}
         </Notice>
       ))}
     </section>
+  )
+}
+
+interface WhyProps {
+  readonly why: WhyWarning
+  readonly about: string
+}
+
+/** "Why?" of a warning: its source, the policy, and the numbers that this care was judged by. */
+function Why({ why: { source, policy, values }, about }: WhyProps) {
+  return (
+    <details className="w-full text-sm">
+      <summary className="inline-flex min-h-11 min-w-11 items-center font-semibold text-ink2 underline underline-offset-3">
+        Why? <span className="sr-only">{about}</span>
+      </summary>
+      <div className="grid max-w-prose gap-1.5 text-ink2">
+        <p>{source}.</p>
+        <WhyValues values={values} />
+        <p>{policy}</p>
+      </div>
+    </details>
   )
 }

@@ -3,9 +3,11 @@ import { IDLE_LIMIT_MINUTES, WARNING_MINUTES } from '#app/auth/limits.ts'
 import { type Act, can } from '#app/auth/permissions.ts'
 import { ownSession, signedIn, signedInOnly } from '#app/auth/signed-in.server.ts'
 import { IdleWatch } from '#app/components/idle-watch.tsx'
+import { Notice } from '#app/components/notice.tsx'
 import { AppPage } from '#app/components/page.tsx'
 import { themeOf } from '#app/components/theme.ts'
 import { env } from '#app/env.server.ts'
+import { reviewOfWards } from '#app/views/policy-overview.server.ts'
 import type { Route } from './+types/signed-in.ts'
 
 export const middleware: Route.MiddlewareFunction[] = [signedInOnly]
@@ -17,13 +19,14 @@ interface Section {
   readonly under: string
 }
 
-export function loader({ context, request }: Route.LoaderArgs) {
+export async function loader({ context, request }: Route.LoaderArgs) {
   const user = signedIn(context)
   const { wards, endsAt } = ownSession(context)
   const ward = wards[0] ?? null
   const sectionsOf = (act: Act, sections: readonly Section[]) => (can(user, act) ? sections : [])
   return {
     person: { name: user.name, role: user.role },
+    ...(await reviewOfWards(wards, new Date())),
     ward: ward && { name: ward.name },
     now: Date.now(),
     endsAt,
@@ -45,7 +48,7 @@ export function loader({ context, request }: Route.LoaderArgs) {
 /** Everything behind the sign-in: bar, sections, safety line. */
 export default function SignedIn({ loaderData }: Route.ComponentProps) {
   const { pathname } = useLocation()
-  const { sections, now, endsAt, person, zone, theme, ward } = loaderData
+  const { sections, now, endsAt, person, zone, theme, ward, reviewed, unreviewed } = loaderData
   return (
     <AppPage
       person={person}
@@ -53,8 +56,16 @@ export default function SignedIn({ loaderData }: Route.ComponentProps) {
       now={new Date(now)}
       zone={zone}
       theme={theme}
+      reviewed={reviewed}
       sections={sections.map(({ label, href, under }) => ({ label, href, current: pathname.startsWith(under) }))}
     >
+      {unreviewed.length > 0 && (
+        <div className="px-4 pt-3 md:px-6">
+          <Notice tone="amber" action={`No reviewed policy: ${unreviewed.join(', ')}.`}>
+            Nothing is computed there, no due care and no warnings, until the clinical lead has reviewed one.
+          </Notice>
+        </div>
+      )}
       <Outlet />
       <IdleWatch
         idleMinutes={IDLE_LIMIT_MINUTES}

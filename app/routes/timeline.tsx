@@ -67,7 +67,11 @@ export default function Timeline({ loaderData }: Route.ComponentProps) {
       <div className="grid grid-cols-[minmax(0,1fr)] gap-5 lg:grid-cols-[21rem_minmax(0,1fr)] lg:grid-rows-[auto_1fr]">
         <div className="grid content-start gap-4 lg:col-start-2">
           {charted && <Warnings title={charted.says} warnings={charted.warnings} />}
-          <Warnings warnings={care.warnings.filter(({ name }) => !charted?.warnings.some(own => own.name === name))} />
+          <Warnings
+            warnings={care.warnings
+              .filter(({ name }) => !charted?.warnings.some(own => own.name === name))
+              .map(warning => ({ ...warning, why: shown.whyWarned[warning.name] }))}
+          />
           <RunningActs {...{ patientId, now, zone, charts, tasks }} running={care.running} />
           <CareDue
             {...{ patientId, now, zone, charts }}

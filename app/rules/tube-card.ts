@@ -17,6 +17,7 @@ import { openPlan } from '../care/tube-change-plan/open-plan.ts'
 import { largestCatheter } from '../clinical/suction-catheter.ts'
 import { isNewStoma, tractState } from '../clinical/tract.ts'
 import { showDateTime, showDay } from '../time/display.ts'
+import { isTooYoung } from './due-tasks.ts'
 import { type TubeView, tubeView } from './views.ts'
 
 /** The tube in place as a card shows it: the plate to compare with, the facts in words, dwell, and what to beware of. */
@@ -121,7 +122,7 @@ function timeFacts(context: CareContext) {
       value: tube.data.insertedOn ? showDay(insertedOn(tube, context)) : showDateTime(tube.performedAt, zone),
     },
     ...(tract ? [{ term: 'Stoma made', value: `${showDay(tract.madeOn)}${state ? `, ${state}` : ''}` }] : []),
-    { term: 'Change by', value: `${showDay(limit.changeBy)} (${limit.because})` },
+    ...(isTooYoung(context) ? [] : [{ term: 'Change by', value: `${showDay(limit.changeBy)} (${limit.because})` }]),
     ...plannedFact(context),
   ]
 }

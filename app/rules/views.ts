@@ -15,7 +15,7 @@ import type { WarningLevel } from '../care/warning.ts'
 import { type DwellStage, daysLeft, dwellDay, dwellStage } from '../clinical/dwell.ts'
 import { localDay } from '../time/zone.ts'
 import { contextBefore } from './context.ts'
-import { type DueTask, dueTasks } from './due-tasks.ts'
+import { type DueTask, dueTasks, isTooYoung } from './due-tasks.ts'
 import { type RunningView, runningViews } from './running.ts'
 import { statusOf, type TaskStatus } from './status.ts'
 import { standingWarnings } from './warnings.ts'
@@ -55,8 +55,9 @@ export interface MarkView {
 export interface TubeView {
   readonly words: string
   readonly day: number
-  readonly limit: number
-  readonly daysLeft: number
+  /** Null, like the days left, where no rule is for this patient. */
+  readonly limit: number | null
+  readonly daysLeft: number | null
   readonly stage: DwellStage
   /** The task that its limit makes due. */
   readonly task: string
@@ -126,20 +127,15 @@ export function liveStatus(task: Pick<TaskView, 'window' | 'deferredUntil'>, now
 
 /** How long a tube has been in, against its limit. */
 export function tubeView(tube: TubeEntry, context: CareContext): TubeView {
-  const { days } = dwellLimit(tube, context)
   const on = insertedOn(tube, context)
   const today = localDay(context.now, context.ward.zone)
+  const about = { words: tubeWords(tube.data), day: dwellDay(on, today), task: byDate.name }
+  if (isTooYoung(context)) return { ...about, limit: null, daysLeft: null, stage: 'quiet' }
+  const { days } = dwellLimit(tube, context)
   const left = daysLeft(on, days, today)
   const { values } = context
   const stage = dwellStage(left, { noticeDays: values.of(dwellNotice), strongDays: values.of(dwellStrongNotice) })
-  return {
-    words: tubeWords(tube.data),
-    day: dwellDay(on, today),
-    limit: days,
-    daysLeft: left,
-    stage,
-    task: byDate.name,
-  }
+  return { ...about, limit: days, daysLeft: left, stage }
 }
 
 /** What was charted since `from`, oldest first, as marks on a strip. */
@@ -165,7 +161,8 @@ function mark(kind: AnyCareKind, entry: Entry, context: CareContext): MarkView {
 
 /** Whether an act on record is drawn as out of range: judged by tube, cuff and own values of its time. */
 export function isOutOfRange(kind: AnyCareKind, entry: Entry, context: CareContext): boolean {
-  return kind.outOfRange?.(entry.data, contextBefore(entry, context)) === true
+  const before = contextBefore(entry, context)
+  return !isTooYoung(before) && kind.outOfRange?.(entry.data, before) === true
 }
 
 /** `Cuff pressure`: the title of a kind by its stored name, or that name in words. */

@@ -18,6 +18,10 @@ export function entryWarnings(kind: AnyCareKind, data: unknown, context: CareCon
   return onceEach(forAge(kind.warnings?.(data, context) ?? [], context)).toSorted(byUrgency)
 }
 
+/** What stands wherever care would be due of somebody whom no rule of the ward is for. */
+export const NO_CHILD_RULES_NAME = 'no-rules-for-children'
+export const NO_CHILD_RULES = 'No rule set for children here: follow the written plan of the tracheostomy team.'
+
 /** Limits for adults say nothing of a child; what is an emergency is one at any age. */
 function forAge(warnings: readonly Warning[], context: CareContext): readonly Warning[] {
   return isTooYoung(context) ? warnings.filter(({ level }) => level === 'red') : warnings
@@ -28,10 +32,10 @@ function noRules(context: CareContext): readonly Warning[] {
   const from = context.values.of(adultAge)
   return [
     {
-      name: 'no-rules-for-children',
+      name: NO_CHILD_RULES_NAME,
       level: 'amber',
-      action: 'Follow the written plan of the tracheostomy team; no times and limits are computed here.',
-      cause: `Rules of this ward apply from the age of ${from}.`,
+      action: NO_CHILD_RULES,
+      cause: `Nothing is computed: the rules of this ward apply from the age of ${from}. Charting stays possible.`,
       source: adultAge.source.says,
     },
   ]

@@ -47,15 +47,18 @@ function lastWords({ byDay, last }: DueTask, zone: Zone): string {
 
 /** Which policy is in force, who reviewed it and when. */
 export function policyWords(policy: Policy): string {
-  return `${policy.name}, version ${policy.version}, reviewed by ${policy.reviewedBy} on ${showDay(policy.reviewedOn)}.`
+  const whom = policy.ruleSet === 'children' ? ' (rule set for children)' : ''
+  return `${policy.name}${whom}, version ${policy.version}, reviewed by ${policy.reviewedBy} on ${showDay(policy.reviewedOn)}.`
 }
 
-function whyValue(setting: AnySetting, { values }: CareContext): WhyValue {
-  const personal = values.personal(setting)
+/** One number as it is in force for a patient, with where it came from. */
+export function whyValue(asked: AnySetting, { values }: CareContext): WhyValue {
+  const personal = values.personal(asked)
+  const setting = values.judged(asked)
   return {
     label: setting.label,
-    value: showValue(values.shown(setting), setting.unit),
-    origin: personal ? personalWords(personal) : values.originOf(setting) === 'policy' ? 'Policy' : 'Product default',
+    value: showValue(values.shown(asked), setting.unit),
+    origin: personal ? personalWords(personal) : values.originOf(asked) === 'policy' ? 'Policy' : 'Product default',
     source: setting.source.says,
     standing: setting.source.standing,
   }

@@ -9,7 +9,7 @@ import { type Typed, typedFrom } from '#app/charting/chart-form.ts'
 import { restored } from '#app/charting/drafts.ts'
 import type { Calendar } from '#app/charting/performed-at.ts'
 import { liveTasks } from '#app/rules/board.ts'
-import { dueTasks } from '#app/rules/due-tasks.ts'
+import { dueTasks, isTooYoung } from '#app/rules/due-tasks.ts'
 import type { TaskStatus } from '#app/rules/status.ts'
 import { taskView } from '#app/rules/views.ts'
 import { standingWarnings } from '#app/rules/warnings.ts'
@@ -93,7 +93,7 @@ export function frameOf(kind: AnyCareKind, { care, user, now, signedInAt }: Omit
     signer: signerOf(user),
     signing: signingAsk(kind, { user, context, now, signedInAt }),
     calendar: calendarOf(care, now),
-    gauges: context ? (kind.gauges?.(context) ?? []) : [],
+    gauges: context && !isTooYoung(context) ? (kind.gauges?.(context) ?? []) : [],
     notOffered: context ? (kind.notOffered?.(context) ?? {}) : {},
     lists: { task: context ? deferrable(context) : {}, setting: label },
     units,

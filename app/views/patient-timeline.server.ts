@@ -6,6 +6,7 @@ import { entryWords, lateWords, photographsOf } from '#app/rules/entry-words.ts'
 import { type TubeCardOrNone, tubeCard } from '#app/rules/tube-card.ts'
 import { type CareView, careView, isOutOfRange } from '#app/rules/views.ts'
 import { type WhyDue, whyDue } from '#app/rules/why.ts'
+import { type WhyWarning, whyStanding } from '#app/rules/why-warnings.ts'
 import { showDateTime, showTime } from '#app/time/display.ts'
 import { type Duration, earlier, hours } from '#app/time/duration.ts'
 import { type LocalDay, localDay } from '#app/time/zone.ts'
@@ -41,6 +42,7 @@ export interface PatientTimeline {
   readonly zone: string
   readonly care: CareView
   readonly why: Readonly<Record<string, WhyDue>>
+  readonly whyWarned: Readonly<Record<string, WhyWarning>>
   readonly tube: TubeCardOrNone
   readonly entries: readonly EntryLine[]
   readonly next: string | null
@@ -100,11 +102,17 @@ export async function patientTimeline(patient: PatientCare, url: URL, now: Date)
 
 function careOf({ context, nothingDue }: PatientCare, back: Duration) {
   if (!context)
-    return { care: { tasks: [], marks: [], running: [], warnings: [] }, why: {}, tube: { none: 'Not computed.' } }
+    return {
+      care: { tasks: [], marks: [], running: [], warnings: [] },
+      why: {},
+      whyWarned: {},
+      tube: { none: 'Not computed.' },
+    }
   const care = careView(context, earlier(context.now, back))
   return {
     care: nothingDue === null ? care : { ...care, tasks: [], running: [], warnings: [] },
     why: Object.fromEntries(dueTasks(context).map(task => [task.rule.name, whyDue(task, context)])),
+    whyWarned: whyStanding(context),
     tube: tubeCard(context),
   }
 }

@@ -105,8 +105,16 @@ function lineOf(setting: AnySetting, policy: Policy, values: Policy['values']): 
   }
 }
 
-/** Whether a ward may compute anything: the words of its policy for the foot of pages, or null where none was reviewed. */
-export async function reviewWords(wardId: string, now: Date): Promise<string | null> {
-  const policy = policyInForce(await policies(), wardId, now)
-  return policy ? `Last reviewed by ${policy.reviewedBy}, ${showDay(policy.reviewedOn)}.` : null
+/** Who reviewed the policy of the first of these wards, in words, and the names of wards that have none that was reviewed. */
+export async function reviewOfWards(
+  wards: readonly { readonly id: string; readonly name: string }[],
+  now: Date,
+): Promise<{ readonly reviewed: string | null; readonly unreviewed: readonly string[] }> {
+  const known = wards.length === 0 ? [] : await policies()
+  const inForce = wards.map(ward => ({ ward, policy: policyInForce(known, ward.id, now) }))
+  const first = inForce[0]?.policy
+  return {
+    reviewed: first ? `Last reviewed by ${first.reviewedBy}, ${showDay(first.reviewedOn)}.` : null,
+    unreviewed: inForce.flatMap(({ ward, policy }) => (policy ? [] : [ward.name])),
+  }
 }

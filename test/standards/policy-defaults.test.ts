@@ -1,6 +1,8 @@
 import { expect, test } from 'vitest'
+import { settingsOf } from '#app/care/children.ts'
 import { careSettings } from '#app/care/kinds.ts'
 import type { Standing } from '#app/care/policy.ts'
+import { policyDifferences, policyProblems } from '#app/rules/policy-values.ts'
 
 /*
  * Every number of a policy as the clinical reference gives it: its default, how far that was checked, and words of its source.
@@ -148,4 +150,62 @@ test.each(rows)('%s is %s (%s), by a source that says "%s"', (name, value, mark,
   expect(setting?.default).toEqual(value)
   expect(standings[mark]).toContain(setting?.source.standing)
   expect(setting?.source.says).toContain(words)
+})
+
+/* The rule set for children: what differs from that for adults (reference R-301, R-306, R-411, R-416; observations from memory). */
+const forChildren: readonly Row[] = [
+  ['suction-vacuum-low.neonate', 60, 'V', 'newborn 60 to 80'],
+  ['suction-vacuum-warn.neonate', 80, 'V', 'newborn 60 to 80'],
+  ['suction-vacuum-low.infant', 80, 'V', 'infant 80 to 100'],
+  ['suction-vacuum-warn.infant', 100, 'V', 'infant 80 to 100'],
+  ['suction-vacuum-low.child', 80, 'V', 'child 80 to 100'],
+  ['suction-vacuum-warn.child', 100, 'V', 'child 80 to 100'],
+  ['suction-vacuum-low.adolescent', 80, 'V', 'adolescent 80 to 120'],
+  ['suction-vacuum-warn.adolescent', 120, 'V', 'adolescent 80 to 120'],
+  ['suction-vacuum-very-high.child', 120, 'V', 'below 120 mmHg'],
+  ['suction-catheter-share.neonate', 70, 'V', 'below 70% in infants'],
+  ['suction-catheter-share.child', 50, 'V', 'below 50% in children'],
+  ['dwell-limit-dual-cannula', 7, 'V', 'every 1 to 2 weeks'],
+  ['dwell-limit-single-cannula', 7, 'V', 'every 1 to 2 weeks'],
+  ['first-change-surgical-earliest', 3, 'V', 'day 3'],
+  ['observations-respiratory-rate-high.infant', 60, 'M', 'paediatric life support'],
+  ['observations-systolic-low.child', 80, 'M', 'paediatric advanced life support'],
+]
+
+const childSettings = settingsOf('children', careSettings)
+
+test.each(forChildren)('for children %s is %s (%s), by a source that says "%s"', (name, value, mark, words) => {
+  const setting = childSettings.find(one => one.name === name)
+  expect(setting?.default).toEqual(value)
+  expect(standings[mark]).toContain(setting?.source.standing)
+  expect(setting?.source.says).toContain(words)
+})
+
+test('a number carried over from adults says so, and is a proposal', () => {
+  const adults = new Map(careSettings.map(setting => [setting.name, setting]))
+  const own = careSettings.filter(({ children }) => children !== undefined).map(({ name }) => name)
+  for (const { name, source } of childSettings) {
+    const plain = adults.get(name.split('.')[0] ?? '')
+    if (plain && own.includes(plain.name)) continue
+    expect(source.says).toMatch(/^Carried over from the rules for adults: /)
+    expect(source.standing).toBe('product proposal')
+  }
+})
+
+test('the defaults of both rule sets fit together', () => {
+  expect(policyProblems('adults', {})).toEqual([])
+  expect(policyProblems('children', {})).toEqual([])
+})
+
+test('every difference reads in words', () => {
+  const says = policyDifferences('adults', {}, { 'cuff-pressure-interval': 6 }).map(
+    ({ label, says }) => `${label} ${says}`,
+  )
+  expect(says).toEqual(['Cuff pressure check every from 8 h to 6 h'])
+  expect(policyProblems('adults', { 'cuff-pressure-lower-limit': 25, 'cuff-pressure-upper-limit': 25 })).toEqual([
+    '"Cuff pressure, lower limit" (25 cmH2O) must be below "Cuff pressure, upper limit" (25 cmH2O)',
+  ])
+  expect(policyProblems('adults', { 'cuff-pressure-interval': 24 })).toEqual([
+    'Cuff pressure check every: Enter a number from 4 to 12 h',
+  ])
 })
