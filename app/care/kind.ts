@@ -3,6 +3,7 @@ import type { PressureUnit } from '../clinical/units.ts'
 import type { ShiftTimes } from '../time/shift.ts'
 import type { LocalDay, Zone } from '../time/zone.ts'
 import type { Clock } from './clock.ts'
+import type { FormProblem, KnownNames } from './form-problem.ts'
 import type { Gauge } from './gauge.ts'
 import type { Lane } from './lanes.ts'
 import type { AnySetting, Values } from './policy.ts'
@@ -106,18 +107,6 @@ export interface Charted<Slug extends string, Schema extends z.ZodObject> {
   readonly schema: Schema
   /** upgrades[n] turns payload version n+1 into n+2. */
   readonly upgrades?: readonly ((old: never) => unknown)[]
-}
-
-/** What the names of settings and tasks stand for. Handed in, since a kind cannot import the list that it is on. */
-export interface KnownNames {
-  readonly settings: readonly AnySetting[]
-  readonly tasks: readonly { readonly rule: TaskRule }[]
-}
-
-/** A mistake of the form, said at its field. */
-export interface FormProblem {
-  readonly field: string
-  readonly message: string
 }
 
 export interface CareKind<Slug extends string, Schema extends z.ZodObject> extends Charted<Slug, Schema> {

@@ -1,5 +1,6 @@
+import type { FormProblem, KnownNames } from '../care/form-problem.ts'
 import { lateReasonAfter } from '../care/general-settings.ts'
-import type { AnyCareKind, CareContext, FormProblem, KnownNames } from '../care/kind.ts'
+import type { AnyCareKind, CareContext } from '../care/kind.ts'
 import { hours, since } from '../time/duration.ts'
 import { type ChartSpine, intentOf, ownFields, readChart, readSpine } from './chart-form.ts'
 import { type Calendar, type PerformedAt, performedAt } from './performed-at.ts'

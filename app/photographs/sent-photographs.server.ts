@@ -1,6 +1,7 @@
 import { createHash } from 'node:crypto'
 import { validate as isUuid, NIL, v4 as uuidv4, v5 as uuidv5 } from 'uuid'
-import type { AnyCareKind, FormProblem } from '#app/care/kind.ts'
+import type { FormProblem } from '#app/care/form-problem.ts'
+import type { AnyCareKind } from '#app/care/kind.ts'
 import { PHOTOGRAPH_LIMITS, photographFields } from '#app/care/photographs.ts'
 import { intentOf } from '#app/charting/chart-form.ts'
 import type { NewPhotograph } from '#database/photographs.server.ts'

@@ -1,5 +1,5 @@
 import { expect, test } from 'vitest'
-import type { KnownNames } from '../kind.ts'
+import type { KnownNames } from '../form-problem.ts'
 import { aContext, anEntry } from '../make.ts'
 import { numberSetting, switchSetting } from '../policy.ts'
 import { carePlan } from './kind.ts'

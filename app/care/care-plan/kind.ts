@@ -1,6 +1,7 @@
 import { showDay } from '../../time/display.ts'
 import { localDay } from '../../time/zone.ts'
-import { type CareContext, careKind, type FormProblem, type KnownNames, wordsOf } from '../kind.ts'
+import type { FormProblem, KnownNames } from '../form-problem.ts'
+import { type CareContext, careKind, wordsOf } from '../kind.ts'
 import type { AnySetting, SettingValue } from '../policy.ts'
 import { sentence } from '../sentence.ts'
 import type { Warning } from '../warning.ts'

@@ -34,14 +34,14 @@ test('each criterion stands by its latest answer, with its time and reason', () 
 test('what was never asked is not assessed, and has no time', () => {
   const criteria = readinessOf(aContext([], '12:00').record)
   expect(criteria).toHaveLength(14)
-  expect(new Set(criteria.map(({ answer, at: when }) => `${answer} ${when}`))).toEqual(
+  expect(new Set(criteria.map(({ answer, at: when }) => `${answer} ${String(when)}`))).toEqual(
     new Set(['not assessed undefined']),
   )
 })
 
 test('what was not assessed needs its reason', () => {
   const issues = readinessSchema.safeParse({ ...ready, swallow: 'not assessed' }).error?.issues
-  expect(issues?.map(({ path, message }) => `${path}: ${message}`)).toEqual([
+  expect(issues?.map(({ path, message }) => `${path.join('.')}: ${message}`)).toEqual([
     'whyNotSwallow: Enter the reason: swallow not assessed',
   ])
 })

@@ -1,4 +1,5 @@
-import { type CareContext, careKind, type FormProblem, type KnownNames, wordsOf } from '../kind.ts'
+import type { FormProblem, KnownNames } from '../form-problem.ts'
+import { type CareContext, careKind, wordsOf } from '../kind.ts'
 import { sentence } from '../sentence.ts'
 import { type DeferralData, deferralReasons, deferrals, delays } from './schema.ts'
 

@@ -1,6 +1,7 @@
 import { localDay } from '../../time/zone.ts'
 import { type CuffState, cuffState } from '../cuff-pressure/cuff.ts'
-import type { CareContext, FormProblem } from '../kind.ts'
+import type { FormProblem } from '../form-problem.ts'
+import type { CareContext } from '../kind.ts'
 import { trialNames } from '../weaning-trial/schema.ts'
 import { runningTrials } from '../weaning-trial/trials.ts'
 import { unmetCriteria } from './criteria.ts'
