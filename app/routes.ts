@@ -37,6 +37,14 @@ export default [
     route('entries/:entryId/correct', 'routes/correct.tsx'),
     route('entries/:entryId/retract', 'routes/retract.tsx'),
 
+    // catalogue
+    route('catalogue', 'routes/catalogue.tsx'),
+    route('catalogue/import', 'routes/catalogue-import.tsx'),
+    route('catalogue/compare', 'routes/catalogue-compare.tsx'),
+    route('catalogue/:items/new', 'routes/catalogue-item-new.tsx'),
+    route('catalogue/:items/:itemId', 'routes/catalogue-item.tsx'),
+    route('catalogue/:items/:itemId/edit', 'routes/catalogue-item-edit.tsx'),
+
     // people and rules
     route('account', 'routes/account.tsx'),
     route('sign-out-everywhere', 'routes/sign-out-everywhere.ts'),
@@ -54,6 +62,9 @@ export default [
     route('policy/versions/:policyId/withdraw', 'routes/policy-withdraw.tsx'),
     route('wards/:wardId/care-plans', 'routes/ward-care-plans.tsx'),
   ]),
+
+  // files
+  route('catalogue/export', 'routes/catalogue-export.ts'),
 
   // data for live pages
   route('api/patients/:patientId/timeline', 'routes/api-timeline.ts'),

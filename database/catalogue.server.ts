@@ -1,4 +1,6 @@
+import type { Transaction } from 'sequelize'
 import type { CatalogueInnerCannula, CatalogueTube, TubeLine } from '#app/catalogue/item.ts'
+import type { Catalogue } from '#app/catalogue/known-items.ts'
 import { type Replacements, select } from './sequelize.server.ts'
 
 export type { CatalogueInnerCannula, CatalogueTube, TubeLine } from '#app/catalogue/item.ts'
@@ -24,10 +26,12 @@ export async function tubesWhere(
   condition: string,
   replacements: Replacements = {},
   order = `${bySize}, i.cuff, i.id`,
+  transaction: Transaction | null = null,
 ): Promise<readonly CatalogueTube[]> {
   const rows = await select<Omit<CatalogueTube, 'insertionAid'> & { insertionAid: number }>(
     `${tubeRows} WHERE ${condition} ORDER BY ${order}`,
     replacements,
+    transaction,
   )
   return rows.map(row => ({ ...row, insertionAid: Boolean(row.insertionAid) }))
 }
@@ -37,8 +41,13 @@ export async function innerCannulasWhere(
   condition: string,
   replacements: Replacements = {},
   order = `${bySize}, i.fenestrated, i.used_as, i.id`,
+  transaction: Transaction | null = null,
 ): Promise<readonly CatalogueInnerCannula[]> {
-  return select<CatalogueInnerCannula>(`${innerCannulaRows} WHERE ${condition} ORDER BY ${order}`, replacements)
+  return select<CatalogueInnerCannula>(
+    `${innerCannulaRows} WHERE ${condition} ORDER BY ${order}`,
+    replacements,
+    transaction,
+  )
 }
 
 /** A tube by its id, retired or not. */
@@ -82,4 +91,17 @@ export async function tubesFitting(innerCannulaId: string): Promise<readonly Cat
 /** Every line by name. */
 export async function tubeLines(): Promise<readonly TubeLine[]> {
   return select<TubeLine>('SELECT id, name AS line, maker FROM tube_lines ORDER BY name')
+}
+
+/** The whole catalogue, retired items too: what an export writes and an import is compared with. */
+export async function wholeCatalogue(): Promise<Catalogue> {
+  const [lines, tubes, innerCannulas, fits] = await Promise.all([
+    tubeLines(),
+    tubesWhere('TRUE'),
+    innerCannulasWhere('TRUE'),
+    select<Catalogue['fits'][number]>(
+      'SELECT tube_id AS tubeId, inner_cannula_id AS innerCannulaId FROM inner_cannula_fits',
+    ),
+  ])
+  return { lines, tubes, innerCannulas, fits }
 }

@@ -1,15 +1,8 @@
-import { type CatalogueInnerCannula, type CatalogueTube, innerCannulaName, tubeName } from '#app/catalogue/item.ts'
+import type { CatalogueInnerCannula, CatalogueTube } from '#app/catalogue/item.ts'
+import { type Catalogue, catalogueCells } from '#app/catalogue/known-items.ts'
 import { checkDigit } from '#app/clinical/gs1-gtin.ts'
 import { corvane, halden, type LineSeed, linnet, marrow, type TubeSeed } from './catalogue-lines.ts'
 import { idAt, randomFrom } from './random.ts'
-
-/** The catalogue of the demo hospital as it is stored. Ids and GTINs are the same in every demo hospital. */
-export interface DemoCatalogue {
-  readonly lines: readonly { readonly id: string; readonly name: string; readonly maker: string }[]
-  readonly tubes: readonly CatalogueTube[]
-  readonly innerCannulas: readonly CatalogueInnerCannula[]
-  readonly fits: readonly { readonly tubeId: string; readonly innerCannulaId: string }[]
-}
 
 const ADDED_AT = new Date('2026-01-05T09:00:00Z')
 const RETIRED_AT = new Date('2026-02-16T08:20:00Z')
@@ -44,9 +37,9 @@ function itemOf({ line, maker }: LineSeed, name: string, retired: boolean) {
   return { id: idOf(name), lineId: idOf(line), line, maker, retiredAt, version: retired ? 2 : 1 }
 }
 
-/** The catalogue of the demo hospital: four invented lines that hold every kind of tube. */
-export const demoCatalogue: DemoCatalogue = {
-  lines: lines.map(({ line, maker }) => ({ id: idOf(line), name: line, maker })),
+/** The catalogue of the demo hospital: four invented lines that hold every kind of tube. Ids and GTINs are always the same. */
+export const demoCatalogue: Catalogue = {
+  lines: lines.map(({ line, maker }) => ({ id: idOf(line), line, maker })),
   tubes: lines.flatMap(tubesOf),
   innerCannulas: lines.flatMap(innerCannulasOf),
   fits: lines.flatMap((seed, line) => {
@@ -70,23 +63,17 @@ export function demoTube(description: Partial<TubeSeed> & { readonly line: strin
   return tube
 }
 
-/** Who put what into the catalogue and took it out again, as stored. The names in it are those that the lists show. */
-export function demoCatalogueChanges({ tubes, innerCannulas }: DemoCatalogue, changedBy: string) {
-  const all = [
-    ...tubes.map(tube => ({ ...tube, subject: 'tube', name: tubeName(tube) })),
-    ...innerCannulas.map(cannula => ({ ...cannula, subject: 'inner cannula', name: innerCannulaName(cannula) })),
-  ]
-  return all.flatMap(({ subject, id, name, retiredAt }) => {
-    const by = { subject, subject_id: id, changed_by: changedBy }
-    const added = {
-      ...by,
-      what: `${subject} added`,
-      changed_at: ADDED_AT,
-      old_values: null,
-      new_values: JSON.stringify({ name }),
-    }
-    if (retiredAt === null) return [added]
-    const values = { old_values: JSON.stringify({ retired: 'no' }), new_values: JSON.stringify({ retired: 'yes' }) }
-    return [added, { ...by, what: `${subject} retired`, changed_at: retiredAt, ...values }]
+/** Who put what into the catalogue and took it out again, as stored. */
+export function demoCatalogueChanges(catalogue: Catalogue, changedBy: string) {
+  return catalogueCells(catalogue).flatMap(cells => {
+    const { item, id } = cells
+    const by = { subject: item, subject_id: id, changed_by: changedBy }
+    const told = Object.entries({ ...cells, retired: 'no' }).filter(([, cell]) => cell !== '')
+    const values = { old_values: null, new_values: JSON.stringify(Object.fromEntries(told)) }
+    const added = { ...by, what: `${item} added`, changed_at: ADDED_AT, ...values }
+    if (cells.retired === 'no') return [added]
+    const no = JSON.stringify({ retired: 'no' })
+    const yes = JSON.stringify({ retired: 'yes' })
+    return [added, { ...by, what: `${item} retired`, changed_at: RETIRED_AT, old_values: no, new_values: yes }]
   })
 }

@@ -2,9 +2,9 @@ import type { Role } from '#app/auth/permissions.ts'
 import type { EmergencyNumber } from '#app/care/emergency.ts'
 import type { PatientFacts, StoredEntry } from '#app/care/kind.ts'
 import type { Policy } from '#app/care/policy.ts'
+import type { Catalogue } from '#app/catalogue/known-items.ts'
 import type { PressureUnit } from '#app/clinical/units.ts'
 import type { LocalDay, Zone } from '#app/time/zone.ts'
-import type { DemoCatalogue } from './catalogue.ts'
 
 /** The demo hospital as plain rows: what is loaded, and what tests run the rules over. Moments are UTC. */
 export interface DemoHospital {
@@ -18,7 +18,7 @@ export interface DemoHospital {
   readonly moves: readonly DemoMove[]
   readonly changes: readonly DemoChange[]
   readonly policies: readonly DemoPolicy[]
-  readonly catalogue: DemoCatalogue
+  readonly catalogue: Catalogue
   readonly entries: readonly DemoEntry[]
 }
 

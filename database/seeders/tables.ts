@@ -1,4 +1,5 @@
-import { type DemoCatalogue, demoCatalogueChanges } from './catalogue.ts'
+import type { Catalogue } from '#app/catalogue/known-items.ts'
+import { demoCatalogueChanges } from './catalogue.ts'
 import type { DemoChange, DemoEntry, DemoHospital, DemoPatient, DemoPolicy } from './rows.ts'
 
 /** Rows of one table by the names of its columns. */
@@ -48,7 +49,7 @@ function catalogueTables({ catalogue, people }: DemoHospital): readonly TableRow
   const specialist = people.find(({ role }) => role === 'tracheostomy specialist')
   const fitRows = fits.map(({ tubeId, innerCannulaId }) => ({ tube_id: tubeId, inner_cannula_id: innerCannulaId }))
   return [
-    { table: 'tube_lines', rows: lines },
+    { table: 'tube_lines', rows: lines.map(({ id, line, maker }) => ({ id, name: line, maker })) },
     { table: 'tubes', rows: tubes.map(tubeRow) },
     { table: 'inner_cannulas', rows: innerCannulas.map(innerCannulaRow) },
     { table: 'inner_cannula_fits', rows: fitRows },
@@ -56,7 +57,7 @@ function catalogueTables({ catalogue, people }: DemoHospital): readonly TableRow
   ]
 }
 
-function tubeRow(tube: DemoCatalogue['tubes'][number]) {
+function tubeRow(tube: Catalogue['tubes'][number]) {
   const { id, lineId, size, construction, od, cuff, connector, flange, gtin, version } = tube
   const numbers = {
     id_with_inner: tube.idWithInner,
@@ -94,7 +95,7 @@ function innerCannulaRow({
   gtin,
   retiredAt,
   version,
-}: DemoCatalogue['innerCannulas'][number]) {
+}: Catalogue['innerCannulas'][number]) {
   const kind = { size, used_as: use, fenestrated: fenestrated === 'yes', pack_size: packSize }
   return { id, line_id: lineId, ...kind, gtin, retired_at: retiredAt, version }
 }

@@ -127,8 +127,14 @@ const fields = careFields({
   note: note({ label: 'Note', more: true }).optional(),
 })
 
+interface Walls {
+  readonly idWithInner?: number | undefined
+  readonly idWithoutInner: number
+  readonly od: number
+}
+
 /** The walls nest: inner cannula inside outer tube inside outside diameter. Anything else is a slip of the keys. */
-export const tubeChangeSchema = fields.superRefine((tube, context) => {
+export function wallsNest(tube: Walls, context: Pick<z.core.$RefinementCtx<unknown>, 'addIssue'>): void {
   if (tube.idWithInner !== undefined && tube.idWithInner >= tube.idWithoutInner) {
     context.addIssue({
       code: 'custom',
@@ -143,7 +149,9 @@ export const tubeChangeSchema = fields.superRefine((tube, context) => {
       message: 'Outside diameter must be larger than the inside diameter',
     })
   }
-})
+}
+
+export const tubeChangeSchema = fields.superRefine(wallsNest)
 
 /** Tubes put in: ask a record with this. */
 export const tubeChanges = charted({ slug: 'tube-change', schema: tubeChangeSchema })
