@@ -43,7 +43,8 @@ async function saved(items: readonly ItemToSave[], by: string, transaction: Tran
   const before = await storedItems(ids, transaction)
   if (items.some(({ id, version }) => version !== null && version !== before.get(id)?.stored.version))
     return { outcome: 'changed meanwhile' }
-  if (items.some(({ id, values: { line } }) => isOther(before.get(id)?.stored.line, line))) return { outcome: 'other line' }
+  if (items.some(({ id, values: { line } }) => isOther(before.get(id)?.stored.line, line)))
+    return { outcome: 'other line' }
   if (await isGtinTaken(items, transaction)) return { outcome: 'gtin taken' }
   const lines = await linesOf(items, transaction)
   if (!lines) return { outcome: 'other maker' }

@@ -23,9 +23,9 @@ const rules: IForbiddenRuleType[] = [
   })),
   { name: 'pure code needs no platform', from: { path: pure }, to: { dependencyTypes: ['core'] } },
   {
-    name: 'pure code needs no package but zod and dayjs',
+    name: 'pure code needs no package but zod, dayjs and CSV',
     from: { path: pure },
-    to: { path: 'node_modules/', pathNot: 'node_modules/(zod|dayjs)/' },
+    to: { path: 'node_modules/', pathNot: 'node_modules/(zod|dayjs|csv-parse|csv-stringify)/' },
   },
   { name: 'nothing imports a route', from: {}, to: { path: '^app/routes/', pathNot: '\\+types' } },
   {

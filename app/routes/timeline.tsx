@@ -82,7 +82,11 @@ export default function Timeline({ loaderData }: Route.ComponentProps) {
           {charts && <ChartOther patientId={patientId} kinds={kinds} stayLinks={stayLinks} />}
         </div>
         <aside className="grid content-start gap-4 lg:col-start-1 lg:row-span-2 lg:row-start-1">
-          <TubeCard tube={tube} status={tubeTask?.status ?? 'upcoming'} />
+          <TubeCard
+            tube={tube}
+            status={tubeTask?.status ?? 'upcoming'}
+            compareHref={`/catalogue/compare?patient=${patientId}`}
+          />
         </aside>
         <div className="grid grid-cols-[minmax(0,1fr)] content-start gap-4 lg:col-start-2">
           <Card

@@ -26,25 +26,26 @@ export class TubeRow extends Model<InferAttributes<TubeRow>, InferCreationAttrib
   declare version: CreationOptional<number>
 }
 
-const word = { type: DataTypes.STRING(16), allowNull: false } as const
-const mm = { type: DataTypes.DECIMAL(4, 1), allowNull: false } as const
+// Sequelize writes the column's name into what it is given, so each column gets its own.
+const word = () => ({ type: DataTypes.STRING(16), allowNull: false })
+const mm = () => ({ type: DataTypes.DECIMAL(4, 1), allowNull: false })
 
 TubeRow.init(
   {
     id: { type: DataTypes.UUID, primaryKey: true },
     lineId: { type: DataTypes.UUID, allowNull: false },
     size: { type: DataTypes.STRING(12), allowNull: false },
-    sizeSystem: word,
-    construction: word,
-    innerCannula: { ...word, allowNull: true },
-    idWithInner: { ...mm, allowNull: true },
-    idWithoutInner: mm,
-    od: mm,
-    lengthMm: mm,
-    cuff: word,
+    sizeSystem: word(),
+    construction: word(),
+    innerCannula: { ...word(), allowNull: true },
+    idWithInner: { ...mm(), allowNull: true },
+    idWithoutInner: mm(),
+    od: mm(),
+    lengthMm: mm(),
+    cuff: word(),
     fenestrated: { type: DataTypes.BOOLEAN, allowNull: false },
-    connector: word,
-    flange: word,
+    connector: word(),
+    flange: word(),
     longestUseDays: { type: DataTypes.SMALLINT.UNSIGNED, allowNull: true },
     gtin: { type: DataTypes.CHAR(14), allowNull: true },
     insertionAid: { type: DataTypes.BOOLEAN, allowNull: false },

@@ -6,6 +6,7 @@ import { grantAccess } from '#database/access-grants.server.ts'
 import { addEntry } from '#database/entries.server.ts'
 import { addPolicy } from '#database/policies.server.ts'
 import { application, browserRequest } from '#test/application.ts'
+import { aCatalogueTube } from '#test/catalogue.ts'
 import { cleared, owner } from '#test/database.ts'
 import { aPerson, site, traceOfTest } from '#test/people.ts'
 import { aCuffPressure, aStay, aWardOf } from '#test/stays.ts'
@@ -58,6 +59,17 @@ GET  /entries/:entryId/correct         200 403 200 200 404 404 403   why why why
 POST /entries/:entryId/correct         400 403 400 400 404 404 403   why why why why 404 404 404   403 403   own  in
 GET  /entries/:entryId/retract         200 403 200 200 404 404 403   why why why why 404 404 404   403 403   own  in
 POST /entries/:entryId/retract         400 403 400 400 404 404 403   why why why why 404 404 404   403 403   own  in
+GET  /catalogue                        200 200 200 200 200 200 200   200 200 200 200 200 200 200   200 200   own  in
+GET  /catalogue/import                 403 403 403 200 403 200 403   403 403 403 200 403 200 403   403 403   own  in
+POST /catalogue/import                 403 403 403 400 403 400 403   403 403 403 400 403 400 403   403 403   own  in
+GET  /catalogue/compare                200 200 200 200 200 200 200   200 200 200 200 200 200 200   200 200   own  in
+GET  /catalogue/:items/new             403 403 403 200 403 200 403   403 403 403 200 403 200 403   403 403   own  in
+POST /catalogue/:items/new             403 403 403 400 403 400 403   403 403 403 400 403 400 403   403 403   own  in
+GET  /catalogue/:items/:itemId         200 200 200 200 200 200 200   200 200 200 200 200 200 200   200 200   own  in
+POST /catalogue/:items/:itemId         403 403 403 400 403 400 403   403 403 403 400 403 400 403   403 403   own  in
+GET  /catalogue/:items/:itemId/edit    403 403 403 200 403 200 403   403 403 403 200 403 200 403   403 403   own  in
+POST /catalogue/:items/:itemId/edit    403 403 403 400 403 400 403   403 403 403 400 403 400 403   403 403   own  in
+GET  /catalogue/export                 200 200 200 200 200 200 200   200 200 200 200 200 200 200   200 200   401  401
 GET  /account                          200 200 200 200 200 200 200   200 200 200 200 200 200 200   200 200   200  in
 POST /account                          400 400 400 400 400 400 400   400 400 400 400 400 400 400   400 400   400  in
 GET  /sign-out-everywhere              go  go  go  go  go  go  go    go  go  go  go  go  go  go    go  go    own  in
@@ -117,7 +129,9 @@ beforeAll(async () => {
   cookies = [...(await Promise.all([...here, ...away, ...visiting, fresh].map(cookieOf))), null]
   const policyId = uuidv7()
   await addPolicy(aComingPolicy(policyId, ward.id), author.id)
-  params = { policyId, wardId: ward.id, patientId, entryId, userId: author.id, kind: 'cuff-pressure' }
+  const itemId = await aCatalogueTube(author.id)
+  const ids = { policyId, wardId: ward.id, patientId, entryId, userId: author.id, itemId }
+  params = { ...ids, kind: 'cuff-pressure', items: 'tubes' }
 })
 
 // Everybody is signed in again, whatever the row before has done.

@@ -1,5 +1,6 @@
 import type { RouteConfigEntry } from '@react-router/dev/routes'
 import { careKinds } from '#app/care/kinds.ts'
+import { demoCatalogue, demoTube } from '#database/seeders/catalogue.ts'
 
 /** Ids that stand in addresses. */
 export interface Known {
@@ -36,11 +37,14 @@ export const notPages: Readonly<Record<string, string>> = {
   'photographs/:photographId': 'a picture',
   'api/patients/:patientId/timeline': 'JSON',
   'api/wards/:wardId/board': 'JSON',
+  'catalogue/export': 'CSV',
 }
 
 const specialist = 'specialist'
 const charge = 'charge.alder'
 const administrator = 'administrator'
+const tube = demoTube({ line: 'Halden', size: '6', cuff: 'none', fenestrated: 'no' }).id
+const innerCannula = demoCatalogue.innerCannulas[0]?.id
 
 /** Every page there is, each with an address or more. */
 export const pages: readonly PageEntry[] = [
@@ -76,6 +80,15 @@ export const pages: readonly PageEntry[] = [
   { route: 'entries/:entryId', as: charge, path: ({ entry }) => `/entries/${entry}` },
   { route: 'entries/:entryId/correct', as: charge, path: ({ entry }) => `/entries/${entry}/correct` },
   { route: 'entries/:entryId/retract', as: charge, path: ({ entry }) => `/entries/${entry}/retract` },
+  { route: 'catalogue', as: 'nurse.alder', path: () => '/catalogue?retired=yes&order=od' },
+  { route: 'catalogue', as: administrator, path: () => '/catalogue?items=inner-cannulas' },
+  { route: 'catalogue/import', as: administrator, path: () => '/catalogue/import' },
+  { route: 'catalogue/compare', as: 'nurse.alder', path: () => `/catalogue/compare?tube=${tube}` },
+  { route: 'catalogue/compare', as: 'nurse.alder', path: ({ patient }) => `/catalogue/compare?patient=${patient}` },
+  { route: 'catalogue/:items/new', as: specialist, path: () => '/catalogue/tubes/new' },
+  { route: 'catalogue/:items/:itemId', as: specialist, path: () => `/catalogue/tubes/${tube}` },
+  { route: 'catalogue/:items/:itemId', as: 'nurse.alder', path: () => `/catalogue/inner-cannulas/${innerCannula}` },
+  { route: 'catalogue/:items/:itemId/edit', as: specialist, path: () => `/catalogue/tubes/${tube}/edit` },
   { route: 'account', as: 'observer.alder', path: () => '/account' },
   { route: 'policy', as: 'educator', path: () => '/policy' },
   { route: 'policy', as: specialist, path: ({ ward }) => `/policy?ward=${ward}&set=children` },
