@@ -26,6 +26,7 @@ export default [
       route('emergency', 'routes/emergency.tsx'),
       route('sign', 'routes/sign.tsx'),
       route('photographs', 'routes/patient-photographs.tsx'),
+      route('act-now/:entryId', 'routes/act-now.tsx'),
       route('chart/:kind', 'routes/chart.tsx'),
       route('details', 'routes/patient-details.tsx'),
       route('move', 'routes/move.tsx'),

@@ -39,10 +39,12 @@ export interface TextMeta extends Shared {
 export interface DateMeta extends Shared {
   readonly control: 'date'
 }
-/** A name chosen from a list that the page supplies: a due task, or a policy setting. */
+/** A name chosen from a list that the page supplies: a due task, a policy setting, or a warning that stands. */
 export interface NameMeta extends Shared {
-  readonly control: 'task' | 'setting'
+  readonly control: 'task' | 'setting' | 'warning'
 }
+/** The lists that a page supplies, by the control that chooses from them. */
+export type NameLists = Readonly<Record<NameMeta['control'], Readonly<Record<string, string>>>>
 /** An item of the catalogue, filled in by a scan and carried by the form; nobody types it. */
 export interface ItemMeta extends Shared {
   readonly control: 'item'

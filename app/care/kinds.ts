@@ -26,6 +26,7 @@ import { ties } from './ties/kind.ts'
 import { transferChecklist } from './transfer-checklist/kind.ts'
 import { tubeChange } from './tube-change/kind.ts'
 import { tubeChangePlan } from './tube-change-plan/kind.ts'
+import { warningAnswer } from './warning-answer/kind.ts'
 import { waterCuff } from './water-cuff/kind.ts'
 import { weaningPlan } from './weaning-plan/kind.ts'
 import { weaningTrial } from './weaning-trial/kind.ts'
@@ -58,6 +59,7 @@ export const careKinds = [
   adverseEvent,
   freeNote,
   deferral,
+  warningAnswer,
   carePlan,
 ] as const satisfies readonly AnyCareKind[]
 

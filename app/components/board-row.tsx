@@ -41,6 +41,8 @@ export interface BoardPatient {
   readonly statement?: string | undefined
   /** One of them asks to act now. */
   readonly isUrgent?: boolean
+  /** How many nobody has seen in time. */
+  readonly unseen?: number
 }
 
 /** Shown at once: more would push the eighth patient off the screen. What else is late or due is counted below. */
@@ -94,6 +96,7 @@ export function BoardRow({ patient, changed = false, children }: BoardRowProps) 
     warnings = 0,
     isUrgent = false,
     statement,
+    unseen = 0,
   } = patient
   return (
     <li
@@ -118,9 +121,7 @@ export function BoardRow({ patient, changed = false, children }: BoardRowProps) 
             <Tag tone="ok">{words}</Tag>
           </p>
         ))}
-        {warnings > 0 && (
-          <Tag tone={isUrgent ? 'late' : 'due'}>{warnings === 1 ? '1 warning' : `${warnings} warnings`}</Tag>
-        )}
+        {warnings > 0 && <Tag tone={isUrgent ? 'late' : 'due'}>{warningWords(warnings, unseen)}</Tag>}
       </div>
       <div className="min-w-0 max-md:col-start-2">
         <p className="text-sm font-semibold">{tube ? tube.says : 'No tube charted'}</p>
@@ -130,6 +131,13 @@ export function BoardRow({ patient, changed = false, children }: BoardRowProps) 
       <NextCareList next={next} statement={statement} />
     </li>
   )
+}
+
+/** `2 warnings, 1 not seen yet` */
+function warningWords(warnings: number, unseen: number): string {
+  const words = warnings === 1 ? '1 warning' : `${warnings} warnings`
+  if (unseen === 0) return words
+  return `${words}, ${unseen === warnings ? '' : `${unseen} `}not seen yet`
 }
 
 interface NextCareListProps {

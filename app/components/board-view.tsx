@@ -104,7 +104,7 @@ interface Seen {
 }
 
 function rowOf(patient: LivePatient, { now, zone, charts }: Seen): BoardPatient {
-  const { patientId, bed, familyName, givenName, age, recordNumber, care, tasks, worst } = patient
+  const { patientId, bed, familyName, givenName, age, recordNumber, care, tasks, worst, unseen } = patient
   const tubeTask = tasks.find(task => task.byDay !== undefined && task.name === care.tube?.task)
   return {
     href: `/patients/${patientId}`,
@@ -130,6 +130,7 @@ function rowOf(patient: LivePatient, { now, zone, charts }: Seen): BoardPatient 
     warnings: care.warnings.filter(({ level }) => level !== 'blue').length,
     statement: care.warnings.find(({ name }) => name === NO_CHILD_RULES_NAME)?.action,
     isUrgent: care.warnings.some(({ level }) => level === 'red'),
+    unseen: unseen.length,
   }
 }
 

@@ -19,7 +19,7 @@ export interface Drawing {
   readonly answers: readonly string[]
   readonly unit: string
   readonly band: Band | undefined
-  /** Names to choose from, for `task` and `setting`. */
+  /** Names to choose from, for the controls that choose a name. */
   readonly list: Readonly<Record<string, string>>
 }
 
@@ -49,6 +49,7 @@ const controls: { readonly [C in Control]: (meta: MetaOf<C>, drawing: Drawing) =
   photographs: ({ most }, { field, answers }) => <PhotographsField {...field} most={most} kept={answers} />,
   task: (_, drawing) => <NameField {...drawing} />,
   setting: (_, drawing) => <NameField {...drawing} />,
+  warning: (_, drawing) => <NameField {...drawing} />,
 }
 
 export function CareControl({ meta, drawing }: { readonly meta: FieldMeta; readonly drawing: Drawing }) {

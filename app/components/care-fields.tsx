@@ -1,6 +1,6 @@
 import { Fragment, type ReactNode, useRef } from 'react'
 import { isShown } from '#app/care/field.ts'
-import { type FieldMeta, isCarried } from '#app/care/field-meta.ts'
+import { type FieldMeta, isCarried, type NameLists } from '#app/care/field-meta.ts'
 import type { Gauge } from '#app/care/gauge.ts'
 import { type Answers, useAnswers } from './answers.ts'
 import { CareControl } from './care-controls.tsx'
@@ -11,8 +11,8 @@ import { useHydrated } from './hydrated.ts'
 export interface CareFieldsProps {
   readonly fields: readonly DrawnField[]
   readonly gauges?: readonly Gauge[]
-  /** Names that the record offers for the controls `task` and `setting`. */
-  readonly lists?: Readonly<Partial<Record<'task' | 'setting', Readonly<Record<string, string>>>>>
+  /** Names that the record offers for the controls that choose one. */
+  readonly lists?: Partial<NameLists>
   /** Units by the answer that decides them, where the answer is not the unit itself. */
   readonly units?: Readonly<Record<string, string>>
   /** What the answers ask people to notice: under the large number, or where there is none after the questions. */
@@ -96,7 +96,7 @@ function Question({ field, all, answers, gauges, lists, units }: QuestionProps) 
     answers: field.answers,
     unit,
     band: gauges.find(gauge => gauge.field === name),
-    list: (meta.control === 'task' || meta.control === 'setting' ? lists[meta.control] : undefined) ?? {},
+    list: listOf(meta, lists),
   }
   return (
     <div
@@ -129,4 +129,8 @@ function unitOf(meta: FieldMeta, answers: Answers, units: Readonly<Record<string
   if (meta.control !== 'quantity') return ''
   const answer = meta.unitField === undefined ? undefined : answers[meta.unitField]?.[0]
   return meta.unit ?? (answer === undefined ? '' : (units[answer] ?? answer))
+}
+
+function listOf({ control }: FieldMeta, lists: Partial<NameLists>): Readonly<Record<string, string>> {
+  return (control === 'task' || control === 'setting' || control === 'warning' ? lists[control] : undefined) ?? {}
 }

@@ -1,6 +1,7 @@
 import { type FormEvent, type ReactNode, useEffect, useRef, useState } from 'react'
 import { Form } from 'react-router'
 import { fieldsOf } from '#app/care/field.ts'
+import type { NameLists } from '#app/care/field-meta.ts'
 import type { Gauge } from '#app/care/gauge.ts'
 import type { AnyCareKind } from '#app/care/kind.ts'
 import { photographFields } from '#app/care/photographs.ts'
@@ -32,7 +33,7 @@ export interface ChartFormProps {
     readonly typed: Typed
     readonly gauges: readonly Gauge[]
     readonly notOffered: Readonly<Record<string, readonly string[]>>
-    readonly lists: Readonly<Record<'task' | 'setting', Readonly<Record<string, string>>>>
+    readonly lists: NameLists
     readonly units: Readonly<Record<string, string>>
     readonly witnesses: Readonly<Record<string, string>>
     readonly daysBack: number

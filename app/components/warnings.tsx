@@ -23,7 +23,7 @@ export function Warnings({ title, warnings }: WarningsProps) {
         <p className="rounded-card border border-line bg-brand-tint px-4 py-3 font-semibold text-brand">{title}</p>
       )}
       {warnings.map(({ name, level, action, cause, why }) => (
-        <Notice key={name} tone={level} action={action} answer={why && <Why why={why} about={action} />}>
+        <Notice key={name} tone={level} action={action} answer={why && <WhyWarned why={why} about={action} />}>
           {cause}
         </Notice>
       ))}
@@ -37,7 +37,7 @@ interface WhyProps {
 }
 
 /** "Why?" of a warning: its source, the policy, and the numbers that this care was judged by. */
-function Why({ why: { source, policy, values }, about }: WhyProps) {
+export function WhyWarned({ why: { source, policy, values }, about }: WhyProps) {
   return (
     <details className="w-full text-sm">
       <summary className="inline-flex min-h-11 min-w-11 items-center font-semibold text-ink2 underline underline-offset-3">

@@ -10,7 +10,7 @@ import { chartedWith } from '#app/photographs/charted-with.server.ts'
 import { sentPhotographs } from '#app/photographs/sent-photographs.server.ts'
 import { sentForm } from '#app/sent-form.server.ts'
 import { chartForm } from '#app/views/chart-form.server.ts'
-import { checked, refusedByRecord } from '#app/views/chart-submission.server.ts'
+import { afterCharting, checked, refusedByRecord } from '#app/views/chart-submission.server.ts'
 import { patientCare } from '#app/views/patient-context.server.ts'
 import { addEntry } from '#database/entries.server.ts'
 import type { Route } from './+types/chart.ts'
@@ -47,7 +47,7 @@ export async function action({ params, context, request, url }: Route.ActionArgs
   const entry = { id, kind, stayId, performedAt, recordedBy: user, witnessId, reason, data: care }
   const charting = await chartedWith(entry, photographs.added, check.alongside, also => addEntry(entry, also))
   if (charting.outcome === 'charted' || charting.outcome === 'already charted') {
-    return redirect(`/patients/${params.patientId}?charted=${charting.entry.id}`)
+    return redirect(afterCharting(params.patientId, charting.entry.id, check.isUrgent))
   }
   const { answer, status } = refusedByRecord(sent, charting)
   return data(answer, status)

@@ -7,7 +7,7 @@ import { chartedWith } from '#app/photographs/charted-with.server.ts'
 import { sentPhotographs } from '#app/photographs/sent-photographs.server.ts'
 import { photographsOf } from '#app/rules/entry-words.ts'
 import { sentForm } from '#app/sent-form.server.ts'
-import { checked, refusedByRecord } from '#app/views/chart-submission.server.ts'
+import { afterCharting, checked, refusedByRecord } from '#app/views/chart-submission.server.ts'
 import { correctForm } from '#app/views/correct-form.server.ts'
 import { entryView } from '#app/views/entry-view.server.ts'
 import { openedEntry } from '#app/views/opened-entry.server.ts'
@@ -48,7 +48,7 @@ export async function action({ params, context, request, url }: Route.ActionArgs
     correctEntry(correction, also),
   )
   if (charting.outcome === 'charted' || charting.outcome === 'already charted') {
-    return redirect(`/patients/${patientId}?charted=${charting.entry.id}`)
+    return redirect(afterCharting(patientId, charting.entry.id, check.isUrgent))
   }
   const { answer, status } = refusedByRecord(sent, charting)
   return data(answer, status)

@@ -12,11 +12,13 @@ import { useLive } from '#app/components/live.ts'
 import { Pager } from '#app/components/pager.tsx'
 import { RunningActs } from '#app/components/running-acts.tsx'
 import { Stale } from '#app/components/stale.tsx'
+import { StandingWarnings } from '#app/components/standing-warnings.tsx'
 import { TubeCard } from '#app/components/tube-card.tsx'
 import { Warnings } from '#app/components/warnings.tsx'
 import { liveTasks } from '#app/rules/board.ts'
 import { chartableKinds } from '#app/rules/views.ts'
 import { localDay } from '#app/time/zone.ts'
+import { answeringOf } from '#app/views/answering.server.ts'
 import { chartedNow } from '#app/views/charted-now.server.ts'
 import { patientCare } from '#app/views/patient-context.server.ts'
 import { patientTimeline, spans, timelineQuery } from '#app/views/patient-timeline.server.ts'
@@ -29,8 +31,10 @@ export async function loader({ context, url }: Route.LoaderArgs) {
   const patient = await patientCare(opened.stayId, now)
   const may = opened.via === 'ward' ? can(user, 'chart care', opened.wardId) : canByGrant(user, 'chart care')
   const { span, kind } = timelineQuery(url)
+  const served = await patientTimeline(patient, url, now)
   return {
-    served: await patientTimeline(patient, url, now),
+    served,
+    answering: answeringOf(served.data.care.warnings, { patientId: opened.patientId, user, now }),
     charted: await chartedNow(patient, url.searchParams.get('charted')),
     span,
     spanHours: spans[span],
@@ -53,7 +57,7 @@ const stayPages = [
 
 /** One patient: the tube, what is due, the hours, and everything that was charted. */
 export default function Timeline({ loaderData }: Route.ComponentProps) {
-  const { served, charted, span, spanHours, spanNames, kind, charts, kinds, stayLinks, search } = loaderData
+  const { served, answering, charted, span, spanHours, spanNames, kind, charts, kinds, stayLinks, search } = loaderData
   const { patientId } = served.data
   const live = useLive(`/api/patients/${patientId}/timeline${search}`, served)
   const { data: shown, now } = live
@@ -66,11 +70,18 @@ export default function Timeline({ loaderData }: Route.ComponentProps) {
       <Stale since={live.staleSince === null ? null : new Date(live.staleSince)} zone={zone} />
       <div className="grid grid-cols-[minmax(0,1fr)] gap-5 lg:grid-cols-[21rem_minmax(0,1fr)] lg:grid-rows-[auto_1fr]">
         <div className="grid content-start gap-4 lg:col-start-2">
-          {charted && <Warnings title={charted.says} warnings={charted.warnings} />}
-          <Warnings
-            warnings={care.warnings
-              .filter(({ name }) => !charted?.warnings.some(own => own.name === name))
-              .map(warning => ({ ...warning, why: shown.whyWarned[warning.name] }))}
+          {charted && (
+            <Warnings
+              title={charted.says}
+              warnings={charted.warnings.filter(own => !care.warnings.some(({ name }) => name === own.name))}
+            />
+          )}
+          <StandingWarnings
+            warnings={care.warnings}
+            why={shown.whyWarned}
+            now={now}
+            zone={zone}
+            answering={charts ? answering : null}
           />
           <RunningActs {...{ patientId, now, zone, charts, tasks }} running={care.running} />
           <CareDue

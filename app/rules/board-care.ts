@@ -1,4 +1,5 @@
 import { type Lane, lanes } from '../care/lanes.ts'
+import type { WarningLevel } from '../care/warning.ts'
 import type { RunningView } from './running.ts'
 import type { CareView, TaskView, TubeView } from './views.ts'
 
@@ -16,12 +17,21 @@ export interface LaneMarks {
   readonly deferred: readonly number[]
 }
 
+/** A warning that needs something, as a board shows it. */
+export interface BoardWarning {
+  readonly level: WarningLevel
+  readonly name: string
+  readonly action: string
+  /** From when (ms) it rises because nobody has seen it; null once somebody has. */
+  readonly risesAt: number | null
+}
+
 /** One patient's care on a board or a round: what these show and no more, since forty of them make one page. */
 export interface BoardCare {
   readonly tasks: readonly BoardTask[]
   readonly marks: readonly LaneMarks[]
   readonly running: readonly BoardRunning[]
-  readonly warnings: readonly Omit<CareView['warnings'][number], 'cause'>[]
+  readonly warnings: readonly BoardWarning[]
   readonly tube?: TubeView
 }
 
@@ -38,7 +48,9 @@ export function boardCare({ tasks, marks, running, warnings, tube }: CareView): 
       deferred: momentsOf(lane, 'deferred'),
     })),
     running: running.map(({ name, title, since }) => ({ name, title, since })),
-    warnings: warnings.map(({ cause: _cause, ...warning }) => warning),
+    warnings: warnings
+      .filter(({ settled }) => settled === null)
+      .map(({ level, name, action, risesAt }) => ({ level, name, action, risesAt })),
     ...(tube ? { tube } : {}),
   }
 }

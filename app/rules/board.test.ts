@@ -56,9 +56,28 @@ test('a red warning stands before any lateness', () => {
   const board = aBoard({ A1: [aTask('late', '08:00')], B1: [] })
   const [first, second] = board.patients
   if (!first || !second) throw new Error('two patients were made')
-  const red = { level: 'red', name: 'bleeding', action: 'Call for help now.', cause: 'Blood.' } as const
+  const red = { level: 'red', name: 'bleeding', action: 'Call for help now.', risesAt: null } as const
   const patients = [first, { ...second, care: { ...second.care, warnings: [red] } }]
   expect(livePatients({ ...board, patients }, ms('14:00'), 'pressing')[0]?.bed).toBe('B1')
+})
+
+test('a warning that nobody has seen in time rises, amber above late care and red above everything', () => {
+  const board = aBoard({ A1: [aTask('late', '08:00')], B1: [], C1: [], D1: [] })
+  const [late, amber, red, seen] = board.patients
+  if (!late || !amber || !red || !seen) throw new Error('four patients were made')
+  const warned = (patient: typeof late, level: 'red' | 'amber', risesAt: number | null) => ({
+    ...patient,
+    care: { ...patient.care, warnings: [{ level, name: 'w', action: 'Act.', risesAt }] },
+  })
+  const patients = [
+    late,
+    warned(amber, 'amber', ms('14:00')),
+    warned(red, 'red', ms('14:00')),
+    warned(seen, 'red', null),
+  ]
+  const order = (time: string) => livePatients({ ...board, patients }, ms(time), 'pressing').map(({ bed }) => bed)
+  expect(order('13:59')).toEqual(['C1', 'D1', 'A1', 'B1'])
+  expect(order('14:00')).toEqual(['C1', 'D1', 'B1', 'A1'])
 })
 
 test('the same board at a later moment is late without being served again', () => {

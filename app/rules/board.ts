@@ -1,4 +1,4 @@
-import type { BoardCare, BoardTask } from './board-care.ts'
+import type { BoardCare, BoardTask, BoardWarning } from './board-care.ts'
 import { pressOf } from './due-tasks.ts'
 import type { TaskStatus } from './status.ts'
 import { liveStatus, type TaskView } from './views.ts'
@@ -60,18 +60,22 @@ export interface LivePatient extends Omit<BoardPatient, 'care'> {
   readonly tasks: readonly LiveBoardTask[]
   /** The status of the most pressing task; undefined when nothing is due at all. */
   readonly worst: TaskStatus | undefined
+  /** Warnings that nobody has seen in time, most urgent first. */
+  readonly unseen: readonly BoardWarning[]
 }
 
 export type BoardOrder = 'pressing' | 'bed'
 
 /**
- * Patients in the order of a board: a red warning first, then by the most pressing task, then the longest late;
+ * Patients in the order of a board: red warnings first, then warnings that nobody has seen in time, then by the most pressing
+ * task, then the longest late;
  * or by bed.
  */
 export function livePatients(board: Board, now: number, order: BoardOrder): readonly LivePatient[] {
   const patients = board.patients.map(patient => {
     const tasks = liveTasks(patient.care.tasks, now)
-    return { ...patient, tasks, worst: tasks[0]?.status }
+    const unseen = patient.care.warnings.filter(({ risesAt }) => risesAt !== null && risesAt <= now)
+    return { ...patient, tasks, worst: tasks[0]?.status, unseen }
   })
   return patients.toSorted((a, b) => (order === 'bed' ? 0 : byRisk(a, b)) || byBed(a, b))
 }
@@ -80,8 +84,11 @@ function byRisk(a: LivePatient, b: LivePatient): number {
   return risk(a) - risk(b) || (b.tasks[0]?.lateBy ?? 0) - (a.tasks[0]?.lateBy ?? 0) || firstDue(a) - firstDue(b)
 }
 
-function risk({ care, tasks }: LivePatient): number {
-  if (care.warnings.some(warning => warning.level === 'red')) return -1
+/** A red warning that nobody has seen, a red one, an amber one that nobody has seen in time, then the care that is late. */
+function risk({ care, tasks, unseen }: LivePatient): number {
+  if (unseen.some(({ level }) => level === 'red')) return -3
+  if (care.warnings.some(({ level }) => level === 'red')) return -2
+  if (unseen.length > 0) return -1
   const first = tasks[0]
   return first ? pressOf(first.status, first.airway) : 9
 }

@@ -37,6 +37,7 @@ function inWords(meta: FieldMeta, value: unknown, data: Answers): string {
       return showDay(String(value))
     case 'task':
     case 'setting':
+    case 'warning':
       return wordsOf(String(value))
     case 'photographs':
       return String([value].flat().length)

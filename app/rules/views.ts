@@ -11,14 +11,13 @@ import type { Lane } from '../care/lanes.ts'
 import { dwellNotice, dwellStrongNotice } from '../care/tube-change/dwell-settings.ts'
 import { byDate } from '../care/tube-change/tasks.ts'
 import { dwellLimit, insertedOn, type TubeEntry, tubeInPlace, tubeWords } from '../care/tube-change/tube.ts'
-import type { WarningLevel } from '../care/warning.ts'
 import { type DwellStage, daysLeft, dwellDay, dwellStage } from '../clinical/dwell.ts'
 import { localDay } from '../time/zone.ts'
 import { contextBefore } from './context.ts'
 import { type DueTask, dueTasks, isTooYoung } from './due-tasks.ts'
 import { type RunningView, runningViews } from './running.ts'
+import { type StandingView, standingViews } from './standing-views.ts'
 import { statusOf, type TaskStatus } from './status.ts'
-import { standingWarnings } from './warnings.ts'
 
 /*
  * What boards show, as plain data: moments are milliseconds, so that a page and its data refresh carry the same
@@ -69,12 +68,7 @@ export interface CareView {
   readonly marks: readonly MarkView[]
   /** Trials and the like that have begun and not ended. */
   readonly running: readonly RunningView[]
-  readonly warnings: readonly {
-    readonly level: WarningLevel
-    readonly name: string
-    readonly action: string
-    readonly cause: string
-  }[]
+  readonly warnings: readonly StandingView[]
   readonly tube?: TubeView
 }
 
@@ -85,7 +79,7 @@ export function careView(context: CareContext, marksFrom: Date): CareView {
     tasks: dueTasks(context).map(taskView),
     marks: marksSince(context, marksFrom),
     running: runningViews(context),
-    warnings: standingWarnings(context).map(({ level, name, action, cause }) => ({ level, name, action, cause })),
+    warnings: standingViews(context),
     ...(tube ? { tube: tubeView(tube, context) } : {}),
   }
 }

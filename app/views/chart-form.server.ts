@@ -1,6 +1,7 @@
 import { v7 as uuidv7 } from 'uuid'
 import { takeDraft } from '#app/auth/draft.server.ts'
 import type { CurrentUser } from '#app/auth/permissions.ts'
+import type { NameLists } from '#app/care/field-meta.ts'
 import type { Gauge } from '#app/care/gauge.ts'
 import { lateReasonAfter } from '#app/care/general-settings.ts'
 import type { AnyCareKind, CareContext } from '#app/care/kind.ts'
@@ -12,6 +13,7 @@ import { liveTasks } from '#app/rules/board.ts'
 import { dueTasks, isTooYoung } from '#app/rules/due-tasks.ts'
 import type { TaskStatus } from '#app/rules/status.ts'
 import { taskView } from '#app/rules/views.ts'
+import { answerableWarnings } from '#app/rules/warning-lives.ts'
 import { standingWarnings } from '#app/rules/warnings.ts'
 import { standingWords } from '#app/rules/words.ts'
 import { showDuration } from '#app/time/display.ts'
@@ -34,7 +36,7 @@ export interface ChartFormView {
   readonly usual: { readonly words: string; readonly answers: Typed } | null
   readonly gauges: readonly Gauge[]
   readonly notOffered: Readonly<Record<string, readonly string[]>>
-  readonly lists: Readonly<Record<'task' | 'setting', Readonly<Record<string, string>>>>
+  readonly lists: NameLists
   readonly units: Readonly<Record<string, string>>
   readonly witnesses: Readonly<Record<string, string>>
   readonly warnings: readonly WarningView[]
@@ -95,7 +97,11 @@ export function frameOf(kind: AnyCareKind, { care, user, now, signedInAt }: Omit
     calendar: calendarOf(care, now),
     gauges: context && !isTooYoung(context) ? (kind.gauges?.(context) ?? []) : [],
     notOffered: context ? (kind.notOffered?.(context) ?? {}) : {},
-    lists: { task: context ? deferrable(context) : {}, setting: label },
+    lists: {
+      task: context ? deferrable(context) : {},
+      setting: label,
+      warning: context ? answerableWarnings(context) : {},
+    },
     units,
     reasonAfterHours: context?.values.of(lateReasonAfter) ?? lateReasonAfter.default,
     daysBack: Math.min(MOST_DAYS_BACK, Math.max(1, daysBetween(began, localDay(now, ward.zone)))),
@@ -123,11 +129,14 @@ function openingAnswers(kind: AnyCareKind, context: CareContext | null, url: URL
   const rule = kind.tasks?.find(task => task.name === name)
   const running = context && kind.running?.(context).find(act => act.name === url.searchParams.get('running'))
   const named = context && Object.hasOwn(deferrable(context), name) ? fieldsWith(kind, 'task') : []
+  const warning = url.searchParams.get('warning') ?? ''
+  const warned = context && Object.hasOwn(answerableWarnings(context), warning) ? fieldsWith(kind, 'warning') : []
   return {
     ...(context ? typedFrom(kind.startsWith?.(context) ?? {}) : {}),
     ...typedFrom(rule?.opensWith ?? {}),
     ...typedFrom(running?.stopsWith ?? {}),
     ...Object.fromEntries(named.map(field => [`care.${field}`, [name]])),
+    ...Object.fromEntries(warned.map(field => [`care.${field}`, [warning]])),
   }
 }
 

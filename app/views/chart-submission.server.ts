@@ -36,7 +36,12 @@ export interface Sent {
 
 /** What a form may be answered with before anything is stored, or what is to be stored. */
 export type Checked =
-  | { readonly ok: true; readonly chart: Chartable; readonly alongside: Alongside | undefined }
+  | {
+      readonly ok: true
+      readonly chart: Chartable
+      readonly alongside: Alongside | undefined
+      readonly isUrgent: boolean
+    }
   | { readonly ok: false; readonly answer: ChartAnswer; readonly status: number }
 
 /** Checks a form and does what its button says, short of charting it. Stores nothing. */
@@ -58,13 +63,15 @@ export async function checked(sent: Sent): Promise<Checked> {
 }
 
 /** What is to be charted, with the signatures that go with it; a password that is not right is said at its field. */
-async function signedChart(sent: Sent, { chart, context }: Assessed & { ok: true }): Promise<Checked> {
+async function signedChart(sent: Sent, answer: Assessed & { ok: true }): Promise<Checked> {
+  const { chart, context } = answer
   const signing = await signed(sent, chart, context)
   if (!signing.ok) {
     const { errors, status } = signing
     return refused({ ...keptOf(sent), title: 'Not charted yet. Please check:', errors, asks: false }, status)
   }
-  return { ok: true, chart, alongside: signing.alongside }
+  const isUrgent = warningsOf(sent.kind, answer).some(({ level }) => level === 'red')
+  return { ok: true, chart, alongside: signing.alongside, isUrgent }
 }
 
 function looked(answer: ChartAnswer): Checked {
@@ -108,6 +115,11 @@ async function bySomebodyElse(sent: Sent, openedBy: string): Promise<Checked> {
   const owner = (await person(openedBy))?.name ?? 'somebody else'
   const says = `You are signed in as ${sent.user.name}; this form was opened by ${owner}. If you did this yourself, chart it under your name.`
   return refused({ ...keptOf(sent), title: 'Not charted.', errors: { '': [says] }, asks: false }, 409)
+}
+
+/** Where charting leads: to the patient, who by then shows it; or first to what the act asks to do now. */
+export function afterCharting(patientId: string, entryId: string, isUrgent: boolean): string {
+  return isUrgent ? `/patients/${patientId}/act-now/${entryId}` : `/patients/${patientId}?charted=${entryId}`
 }
 
 /** The answer to a form that the record did not take; for the other outcomes the form is done. */

@@ -1,6 +1,7 @@
 import type { Role } from '#app/auth/permissions.ts'
 import { versionOf } from '#app/care/payload.ts'
 import { later, minutes } from '#app/time/duration.ts'
+import { answersTo } from './answers.ts'
 import { type Bedside, placeAt } from './bedside.ts'
 import { aboveCuffCare } from './chart-above-cuff.ts'
 import { removalCare } from './chart-after-removal.ts'
@@ -30,9 +31,14 @@ interface Written {
 export function entriesOf(bedside: Bedside, stayId: string): readonly DemoEntry[] {
   const written = new Map<Draft, Written>()
   for (const draft of draftsOf(bedside)) written.set(draft, write(draft, bedside))
-  return [...written.values()]
-    .toSorted((a, b) => a.recordedAt.getTime() - b.recordedAt.getTime() || (a.id < b.id ? -1 : 1))
-    .map((one, index) => entryOf(one, index + 1))
+  for (const draft of answersTo(numbered(), bedside)) written.set(draft, write(draft, bedside))
+  return numbered()
+
+  function numbered() {
+    return [...written.values()]
+      .toSorted((a, b) => a.recordedAt.getTime() - b.recordedAt.getTime() || (a.id < b.id ? -1 : 1))
+      .map((one, index) => entryOf(one, index + 1))
+  }
 
   function entryOf({ draft, id, recordedAt }: Written, number: number): DemoEntry {
     const author = authorOf(draft, bedside)

@@ -54,6 +54,7 @@ POST /patients/:patientId/sign         400 400 400 400 404 404 403   why why why
 GET  /patients/:patientId/sign.pdf     go  go  go  go  404 404 go    why why why why 404 404 404   go  go    own  in
 GET  /patients/:patientId/photographs  200 200 200 200 404 404 200   why why why why 404 404 404   200 200   own  in
 GET  /photographs/:photographId        404 404 404 404 404 404 404   404 404 404 404 404 404 404   404 404   own  in
+GET  /patients/:patientId/act-now/:entryId 200 200 200 200 404 404 200 why why why why 404 404 404 200 200 own in
 GET  /entries/:entryId                 200 200 200 200 404 404 200   why why why why 404 404 404   200 200   own  in
 GET  /entries/:entryId/correct         200 403 200 200 404 404 403   why why why why 404 404 404   403 403   own  in
 POST /entries/:entryId/correct         400 403 400 400 404 404 403   why why why why 404 404 404   403 403   own  in

@@ -28,7 +28,7 @@ const view: ChartFormProps['view'] = {
   typed: { 'care.unit': ['cmH2O'] },
   gauges: [],
   notOffered: {},
-  lists: { task: {}, setting: {} },
+  lists: { task: {}, setting: {}, warning: {} },
   units: {},
   witnesses: {},
   daysBack: 9,

@@ -76,6 +76,11 @@ export const pages: readonly PageEntry[] = [
     as: 'nurse.alder',
     path: ({ patient }) => `/patients/${patient}/photographs`,
   },
+  {
+    route: 'patients/:patientId/act-now/:entryId',
+    as: 'nurse.alder',
+    path: ({ patient, entry }) => `/patients/${patient}/act-now/${entry}`,
+  },
   { route: 'patients/:patientId/access', as: 'nurse.alder', path: ({ elsewhere }) => `/patients/${elsewhere}/access` },
   { route: 'entries/:entryId', as: charge, path: ({ entry }) => `/entries/${entry}` },
   { route: 'entries/:entryId/correct', as: charge, path: ({ entry }) => `/entries/${entry}/correct` },

@@ -132,6 +132,10 @@ const rows: readonly Row[] = [
   ['supply-horizon', 28, 'P', '28 days is a proposal'],
   ['supply-rate-days', 14, 'P', 'No published number'],
   ['supply-least-days', 3, 'P', 'No published number'],
+  // Life of warnings (5.1)
+  ['red-warning-seen-within', 1, 'P', 'no published number'],
+  ['amber-warning-seen-within', 15, 'P', 'no published number'],
+  ['warning-answer-holds', 24, 'P', 'Once a day'],
 ]
 
 const standings: Readonly<Record<Mark, readonly Standing[]>> = {
