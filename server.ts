@@ -7,17 +7,18 @@ import { fileURLToPath } from 'node:url'
 import { constants } from 'node:zlib'
 import { createRequestHandler } from '@react-router/express'
 import compression from 'compression'
-import express, { type ErrorRequestHandler, type Request, type RequestHandler, type Response } from 'express'
+import express, { type ErrorRequestHandler, type RequestHandler, type Response } from 'express'
 import { RouterContextProvider, type ServerBuild } from 'react-router'
 import type * as entry from './app/entry.server.tsx'
 import { env } from './app/env.server.ts'
 import type { RequestFacts } from './app/request-context.server.ts'
 
 const MOST_BODY_BYTES = 64 * 1024 // the longest form has about 4 kB
-const MOST_UPLOAD_BYTES = 48 * 1024 * 1024 // four photographs of 8 MB, and some more, so that one too many is said at its field
-const takesUploads = /^\/(patients\/[\w-]+\/chart\/[\w-]+|entries\/[\w-]+\/correct)(\.data)?$/
-const MOST_FILE_BYTES = 2.2 * 1024 * 1024 // a catalogue of some ten thousand items
-const takesFile = /^\/catalogue\/import(\.data)?$/
+const uploads = [
+  // four photographs of 8 MB, and some more, so that one too many is said at its field
+  { path: /^\/(patients\/[\w-]+\/chart\/[\w-]+|entries\/[\w-]+\/correct)(\.data)?$/, most: 48 * 1024 * 1024 },
+  { path: /^\/catalogue\/import(\.data)?$/, most: 2.2 * 1024 * 1024 }, // a catalogue of some ten thousand items
+]
 const DRAIN_MS = 2000 // npm start promises an end within three seconds, database included
 const LONGEST_END_MS = 2400 // then npm start kills the process
 
@@ -173,7 +174,8 @@ function bodyLimited(...[request, response, next]: Parameters<RequestHandler>) {
     response.set('Connection', 'close').status(413).type('text').send('The form is too long. Nothing was charted.')
     response.once('finish', () => request.destroy())
   }
-  const most = mostBytes(request)
+  const isUpload = request.is('multipart/form-data') !== false
+  const most = (isUpload && uploads.find(({ path }) => path.test(request.path))?.most) || MOST_BODY_BYTES
   if (Number(request.headers['content-length'] ?? 0) > most) return refuse()
   let bytes = 0
   request.on('data', (chunk: Buffer) => {
@@ -182,12 +184,6 @@ function bodyLimited(...[request, response, next]: Parameters<RequestHandler>) {
   })
   request.pause() // counting must not start the flow before a route reads
   next()
-}
-
-function mostBytes(request: Request): number {
-  if (request.is('multipart/form-data') === false) return MOST_BODY_BYTES
-  if (takesUploads.test(request.path)) return MOST_UPLOAD_BYTES
-  return takesFile.test(request.path) ? MOST_FILE_BYTES : MOST_BODY_BYTES
 }
 
 function notFound(...[, response]: Parameters<RequestHandler>) {
