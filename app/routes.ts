@@ -10,12 +10,14 @@ export default [
   route('theme', 'routes/theme.ts'),
   route('draft', 'routes/draft.ts'),
   route('still-here', 'routes/still-here.ts'),
+  route('calendar/:secret/tubes.ics', 'routes/calendar.ts'),
 
   layout('routes/signed-in.tsx', [
     index('routes/home.ts'),
 
     // wards
     route('round', 'routes/round.tsx'),
+    route('tubes', 'routes/tubes.tsx'),
     route('wards/:wardId/board', 'routes/board.tsx'),
     route('wards/:wardId/admit', 'routes/admit.tsx'),
 

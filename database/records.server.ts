@@ -26,6 +26,13 @@ export async function wardRecords(wardId: string, rev?: number): Promise<WardRec
   return { rev: counted, stays: await withEntries(await wardRows(wardId, counted)) }
 }
 
+/** The records of the present patients of several wards, by ward and bed: one query for all of them, and one for new entries. */
+export async function recordsOfWards(wardIds: readonly string[]): Promise<readonly StayRecord[]> {
+  if (wardIds.length === 0) return []
+  const rest = 'WHERE s.ward_id IN (:wardIds) AND s.discharged_at IS NULL ORDER BY w.name, b.position, b.label'
+  return withEntries(await stayRows(rest, { wardIds: [...wardIds] }))
+}
+
 /** One stay's record, also after discharge; undefined when there is no such stay. */
 export async function stayRecord(stayId: string): Promise<StayRecord | undefined> {
   const [record] = await withEntries(await stayRows('WHERE s.id = :stayId', { stayId }))

@@ -82,6 +82,16 @@ CREATE TABLE `bed_moves` (
   CONSTRAINT `bed_moves_stay` FOREIGN KEY (`stay_id`) REFERENCES `stays` (`id`)
 ) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
 
+CREATE TABLE `calendar_feeds` (
+  `secret_hash` char(64) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  `user_id` uuid NOT NULL,
+  `made_at` datetime(3) NOT NULL,
+  `revoked_at` datetime(3) DEFAULT NULL,
+  PRIMARY KEY (`secret_hash`),
+  KEY `calendar_feeds_of_user` (`user_id`,`revoked_at`),
+  CONSTRAINT `calendar_feeds_user` FOREIGN KEY (`user_id`) REFERENCES `users` (`id`)
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
 CREATE TABLE `catalogue_changes` (
   `id` bigint(20) unsigned NOT NULL AUTO_INCREMENT,
   `subject` varchar(16) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,

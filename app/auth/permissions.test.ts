@@ -19,6 +19,7 @@ const expected: Record<Act, string> = {
   'discharge patients': 'w-w----',
   'edit patient details': 'w-ww---',
   'set care plans': '--ww---',
+  'see tubes of wards': '--ww---',
   'assign patients': '--w----',
   'see policy': 'wwwweew',
   'manage policy': '--ww---',

@@ -63,6 +63,7 @@ const permissions = {
   'discharge patients': nursing,
   'edit patient details': { ...nursing, 'tracheostomy specialist': 'own wards' },
   'set care plans': leading,
+  'see tubes of wards': leading,
   'assign patients': { 'charge nurse': 'own wards' },
   'see policy': {
     ...bedside,

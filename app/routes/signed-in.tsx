@@ -38,6 +38,7 @@ export async function loader({ context, request }: Route.LoaderArgs) {
         ...(ward ? [{ label: 'Ward board', href: `/wards/${ward.id}/board`, under: '/wards/' }] : []),
         { label: 'Patients', href: '/patients', under: '/patients' },
       ]),
+      ...sectionsOf('see tubes of wards', [{ label: 'Tubes', href: '/tubes', under: '/tubes' }]),
       ...sectionsOf('see catalogue', [{ label: 'Catalogue', href: '/catalogue', under: '/catalogue' }]),
       ...sectionsOf('see policy', [{ label: 'Policy', href: '/policy', under: '/policy' }]),
       ...sectionsOf('manage people', [{ label: 'People', href: '/admin/people', under: '/admin/people' }]),

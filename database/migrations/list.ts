@@ -17,6 +17,7 @@ import { tubeLines } from './0040-tube-lines.ts'
 import { tubes } from './0041-tubes.ts'
 import { innerCannulas } from './0042-inner-cannulas.ts'
 import { catalogueChanges } from './0043-catalogue-changes.ts'
+import { calendarFeeds } from './0050-calendar-feeds.ts'
 import { emergencyNumbers } from './0055-emergency-numbers.ts'
 import { airwayDetails } from './0056-airway-details.ts'
 import { photographs } from './0058-photographs.ts'
@@ -47,6 +48,7 @@ export const migrations: Record<string, Migration> = {
   '0041-tubes': tubes,
   '0042-inner-cannulas': innerCannulas,
   '0043-catalogue-changes': catalogueChanges,
+  '0050-calendar-feeds': calendarFeeds,
   '0055-emergency-numbers': emergencyNumbers,
   '0056-airway-details': airwayDetails,
   '0058-photographs': photographs,

@@ -33,6 +33,7 @@ export const notPages: Readonly<Record<string, string>> = {
   theme: 'a form is sent to it',
   draft: 'the idle watch sends to it',
   'still-here': 'the idle watch sends to it',
+  'calendar/:secret/tubes.ics': 'a calendar file',
   'patients/:patientId/sign.pdf': 'a PDF',
   'photographs/:photographId': 'a picture',
   'api/patients/:patientId/timeline': 'JSON',
@@ -49,6 +50,7 @@ const innerCannula = demoCatalogue.innerCannulas[0]?.id
 /** Every page there is, each with an address or more. */
 export const pages: readonly PageEntry[] = [
   { route: 'sign-in', as: null, path: () => '/sign-in' },
+  { route: 'tubes', as: specialist, path: () => '/tubes' },
   { route: 'round', as: 'nurse.alder', path: () => '/round' },
   { route: 'wards/:wardId/board', as: charge, path: ({ ward }) => `/wards/${ward}/board` },
   { route: 'wards/:wardId/admit', as: charge, path: ({ ward }) => `/wards/${ward}/admit` },
