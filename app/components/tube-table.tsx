@@ -35,7 +35,7 @@ export function TubeTable({ tubes }: TubeTableProps) {
         cells: [
           <Whose key="whose" {...tube} />,
           `${tube.line} ${tube.words}`,
-          `Day ${tube.day} of ${tube.limit}`,
+          `Day ${tube.day}${tube.limit === null ? '' : ` of ${tube.limit}`}`,
           <ChangeBy key="by" {...tube} />,
           tube.plannedOn === null
             ? 'Not planned'
@@ -61,6 +61,7 @@ function Whose({ patientId, bed, wardName, familyName, givenName }: Row) {
 }
 
 function ChangeBy({ changeBy, stage, daysLeft }: Row) {
+  if (changeBy === null || daysLeft === null) return 'No rule for this patient'
   const left = daysLeft < 0 ? `${-daysLeft} d past` : daysLeft === 0 ? 'today' : `${daysLeft} d left`
   return (
     <span className="whitespace-nowrap">

@@ -13,17 +13,18 @@ export type CalendarTube = TubeRow & {
 /** Two days of each tube: the one it is to be changed by, and the one its change is planned for. */
 export function tubeDays(tubes: readonly CalendarTube[]): readonly CalendarDay[] {
   return tubes.flatMap(tube => {
+    const { tubeId, plannedOn, changeBy } = tube
     const who = `${tube.bed} ${initials(tube)}`
-    const text = `${tube.wardName}. ${tube.words}. Day ${tube.day} of ${tube.limit}; change by ${showDay(tube.changeBy)}.`
-    const limit = {
-      uid: `${tube.tubeId}-change-by@cannulary`,
-      on: tube.changeBy,
-      title: `${who}: tube change by`,
-      text,
-    }
-    if (tube.plannedOn === null) return [limit]
-    const planned = `${who}: tube change planned`
-    return [{ uid: `${tube.tubeId}-planned@cannulary`, on: tube.plannedOn, title: planned, text }, limit]
+    const by = changeBy === null ? '' : ` of ${tube.limit}; change by ${showDay(changeBy)}`
+    const text = `${tube.wardName}. ${tube.words}. Day ${tube.day}${by}.`
+    return [
+      ...(plannedOn === null
+        ? []
+        : [{ uid: `${tubeId}-planned@cannulary`, on: plannedOn, title: `${who}: tube change planned`, text }]),
+      ...(changeBy === null
+        ? []
+        : [{ uid: `${tubeId}-change-by@cannulary`, on: changeBy, title: `${who}: tube change by`, text }]),
+    ]
   })
 }
 

@@ -10,7 +10,8 @@ import { type TubeView, tubeView } from './views.ts'
 /** One tube in place in a list of tubes: how long it is in, by when it is changed, for when that is planned, what it warns of. */
 export interface TubeRow extends TubeView {
   readonly line: string
-  readonly changeBy: string
+  /** Null where no rule is for this patient. */
+  readonly changeBy: string | null
   readonly because: string
   readonly plannedOn: string | null
   readonly operator: string | null
@@ -24,13 +25,14 @@ export function tubeRow(context: CareContext): TubeRow | undefined {
   const tube = tubeInPlace(context.record)
   if (!tube) return undefined
   const limit = dwellLimit(tube, context)
+  const view = tubeView(tube, context)
   const plan = openPlan(context.record)
   const warnings = [...(tubeChange.standing?.(context) ?? []), ...(tubeChangePlan.standing?.(context) ?? [])]
   return {
-    ...tubeView(tube, context),
+    ...view,
     tubeId: tube.id,
     line: tube.data.line,
-    changeBy: limit.changeBy,
+    changeBy: view.limit === null ? null : limit.changeBy,
     because: limit.because,
     plannedOn: plan?.plannedOn ?? null,
     operator: plan?.entry.data.operator ?? null,

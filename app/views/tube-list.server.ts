@@ -40,5 +40,12 @@ export async function tubesOfWards(wardIds: readonly string[], now: Date): Promi
         },
       ]
     })
-    .toSorted((a, b) => (a.changeBy < b.changeBy ? -1 : a.changeBy > b.changeBy ? 1 : 0))
+    .toSorted((a, b) => byDay(a.changeBy, b.changeBy))
+}
+
+/** The earlier day first, and tubes without a day last. */
+function byDay(a: string | null, b: string | null): number {
+  if (a === b) return 0
+  if (a === null || b === null) return a === null ? 1 : -1
+  return a < b ? -1 : 1
 }
