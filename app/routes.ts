@@ -48,6 +48,12 @@ export default [
     route('catalogue/:items/:itemId', 'routes/catalogue-item.tsx'),
     route('catalogue/:items/:itemId/edit', 'routes/catalogue-item-edit.tsx'),
 
+    // devices
+    route('scan', 'routes/scan.tsx'),
+    route('scan/set-up', 'routes/scan-set-up.tsx'),
+    route('lots', 'routes/lots.tsx'),
+    route('lots/export', 'routes/lots-export.ts'),
+
     // people and rules
     route('account', 'routes/account.tsx'),
     route('sign-out-everywhere', 'routes/sign-out-everywhere.ts'),

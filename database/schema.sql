@@ -134,6 +134,7 @@ CREATE TABLE `entries` (
   `status` varchar(16) CHARACTER SET ascii COLLATE ascii_bin NOT NULL DEFAULT 'final',
   `data` longtext CHARACTER SET utf8mb4 COLLATE utf8mb4_bin NOT NULL CHECK (json_valid(`data`)),
   `hash` char(64) CHARACTER SET ascii COLLATE ascii_bin NOT NULL COMMENT 'SHA-256 of the hash before it and this row; set by trigger',
+  `lot` varchar(20) GENERATED ALWAYS AS (json_value(`data`,'$.lot')) VIRTUAL COMMENT 'of the device that was charted, for recalls',
   PRIMARY KEY (`id`),
   UNIQUE KEY `entries_number` (`stay_id`,`number`),
   UNIQUE KEY `entries_supersedes` (`supersedes_id`),
@@ -141,6 +142,7 @@ CREATE TABLE `entries` (
   KEY `entries_by_kind` (`stay_id`,`kind`,`performed_at`,`id`),
   KEY `entries_recorded_by` (`recorded_by`),
   KEY `entries_witness` (`witness_id`),
+  KEY `entries_by_lot` (`lot`),
   CONSTRAINT `entries_recorded_by` FOREIGN KEY (`recorded_by`) REFERENCES `users` (`id`),
   CONSTRAINT `entries_stay` FOREIGN KEY (`stay_id`) REFERENCES `stays` (`id`),
   CONSTRAINT `entries_supersede` FOREIGN KEY (`supersedes_id`) REFERENCES `entries` (`id`),
@@ -209,6 +211,23 @@ CREATE TABLE `installation` (
   `value` longtext CHARACTER SET utf8mb4 COLLATE utf8mb4_bin NOT NULL CHECK (json_valid(`value`)),
   `set_at` datetime(3) NOT NULL DEFAULT utc_timestamp(3),
   PRIMARY KEY (`name`)
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
+CREATE TABLE `lot_recalls` (
+  `id` uuid NOT NULL,
+  `lot` varchar(20) NOT NULL,
+  `line` varchar(120) DEFAULT NULL COMMENT 'null: whatever the line',
+  `is_recalled` tinyint(1) NOT NULL COMMENT 'false: the recall before it is lifted',
+  `reason` varchar(500) NOT NULL,
+  `decided_by` uuid NOT NULL,
+  `decided_at` datetime(3) NOT NULL DEFAULT utc_timestamp(3),
+  `number` bigint(20) unsigned NOT NULL AUTO_INCREMENT COMMENT 'the order of the decisions',
+  PRIMARY KEY (`id`),
+  UNIQUE KEY `lot_recalls_number` (`number`),
+  KEY `lot_recalls_by_lot` (`lot`,`number`),
+  KEY `lot_recalls_decided_by` (`decided_by`),
+  CONSTRAINT `lot_recalls_decided_by` FOREIGN KEY (`decided_by`) REFERENCES `users` (`id`),
+  CONSTRAINT `lot_recalls_say_why` CHECK (char_length(trim(`reason`)) > 0 and char_length(trim(`lot`)) > 0)
 ) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
 
 CREATE TABLE `patients` (
@@ -559,6 +578,12 @@ CREATE TRIGGER IF NOT EXISTS entry_signatures_refuse_delete BEFORE DELETE ON ent
 
 CREATE TRIGGER IF NOT EXISTS entry_signatures_refuse_update BEFORE UPDATE ON entry_signatures FOR EACH ROW
     SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'entry_signatures is append-only';
+
+CREATE TRIGGER IF NOT EXISTS lot_recalls_refuse_delete BEFORE DELETE ON lot_recalls
+    FOR EACH ROW SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'lot_recalls is append-only';
+
+CREATE TRIGGER IF NOT EXISTS lot_recalls_refuse_update BEFORE UPDATE ON lot_recalls
+    FOR EACH ROW SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'lot_recalls is append-only';
 
 CREATE TRIGGER IF NOT EXISTS photographs_refuse_delete BEFORE DELETE ON photographs FOR EACH ROW
     SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'photographs is append-only: correct or retract their entry';

@@ -30,6 +30,8 @@ const expected: Record<Act, string> = {
   'manage wards': '-----e-',
   'see catalogue': 'eeeeeee',
   'manage catalogue': '---e-e-',
+  'trace lots': 'wwww-e-',
+  'recall lots': '---e-e-',
 }
 
 const rows = acts.flatMap(act => roles.map((role, at) => [role, act, expected[act][at]] as const))

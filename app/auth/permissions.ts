@@ -84,6 +84,9 @@ const permissions = {
   'manage wards': { administrator: 'everywhere' },
   'see catalogue': everybody,
   'manage catalogue': { administrator: 'everywhere', 'tracheostomy specialist': 'everywhere' },
+  // An administrator learns how many patients of which ward had a lot, and who goes to them; not which patients.
+  'trace lots': { ...bedside, administrator: 'everywhere' },
+  'recall lots': { administrator: 'everywhere', 'tracheostomy specialist': 'everywhere' },
 } as const satisfies Record<string, Allowance>
 
 /** Something a person may or may not do, in words. */

@@ -2,18 +2,20 @@ import type { z } from 'zod'
 import type { PressureUnit } from '../clinical/units.ts'
 import type { ShiftTimes } from '../time/shift.ts'
 import type { LocalDay, Zone } from '../time/zone.ts'
+import type { CataloguedItem } from './catalogued-item.ts'
 import type { Clock } from './clock.ts'
 import type { FormProblem, KnownNames } from './form-problem.ts'
 import type { Gauge } from './gauge.ts'
 import type { Lane } from './lanes.ts'
 import type { AnySetting, Values } from './policy.ts'
 import type { PolicyCheck } from './policy-check.ts'
+import type { Recall } from './recall.ts'
 import type { RunningAct } from './running-act.ts'
 import type { Skill } from './skills.ts'
 import type { PlannedUse, Used } from './supply.ts'
 import type { Warning } from './warning.ts'
 
-/** What the act needs beyond charting care in general; `can()` decides. */
+/** What the act needs beyond charting care in general. */
 export type ChartingAct = 'chart care' | 'set care plans'
 
 /** One charted act. Never changed: a correction or a retraction is a new entry that supersedes this one. */
@@ -74,6 +76,8 @@ export interface WardFacts {
   readonly zone: Zone
   readonly shiftTimes: ShiftTimes
   readonly pressureUnit: PressureUnit
+  /** Lots that nobody is to use any more. */
+  readonly recalls?: readonly Recall[]
 }
 
 /** Everything a rule decides from. The same context gives the same answer. */
@@ -156,6 +160,8 @@ export interface CareKind<Slug extends string, Schema extends z.ZodObject> exten
    * For plans and orders; never clinical judgement, and never a refusal to record care that was given.
    */
   problems?(data: z.output<Schema>, context: CareContext, known: KnownNames): readonly FormProblem[]
+  /** What the catalogue answers as an act with a scanned item is charted; `context`: the moment before it. */
+  catalogued?(data: z.output<Schema>, context: CareContext, item: CataloguedItem): Partial<z.output<Schema>>
   /** What the act takes from the stock; `context` is that of the moment before the act, as for `warnings`. */
   uses?(data: z.output<Schema>, context: CareContext): readonly Used[]
   /** What this patient is going to take, by the intervals in force. */

@@ -7,6 +7,7 @@ import { assessed, type Situation } from './assess.ts'
 const situation: Situation = {
   calendar: { zone: 'Europe/London', now: at('14:06'), beganAt: at('2026-03-01 08:00'), endedAt: null },
   known: { settings: [], tasks: [] },
+  item: null,
   reason: 'when late',
   witnessIds: new Set(),
   contextAt: when => aContext([anEntry(tubeChange, '2026-03-02 09:00', aTube())], when),

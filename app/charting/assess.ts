@@ -1,8 +1,11 @@
+import type { CataloguedItem } from '../care/catalogued-item.ts'
+import { fieldsOf } from '../care/field.ts'
 import type { FormProblem, KnownNames } from '../care/form-problem.ts'
 import { lateReasonAfter } from '../care/general-settings.ts'
 import type { AnyCareKind, CareContext } from '../care/kind.ts'
 import { hours, since } from '../time/duration.ts'
 import { type ChartSpine, intentOf, ownFields, readChart, readSpine } from './chart-form.ts'
+import { itemProblems } from './item-problems.ts'
 import { type Calendar, type PerformedAt, performedAt } from './performed-at.ts'
 
 /** A form that may be charted: what the record needs of it. */
@@ -32,6 +35,8 @@ export interface Situation {
   readonly problems?: readonly FormProblem[]
   /** A correction always needs a reason; an act does when it is written down late. */
   readonly reason: 'always' | 'when late'
+  /** The item of the catalogue that the form names; null when it names none, or none that the catalogue has. */
+  readonly item: CataloguedItem | null
   /** The record, policy and ward as rules see them when the act was done; null where no policy was reviewed. */
   contextAt(at: Date): CareContext | null
 }
@@ -52,17 +57,39 @@ export function assessed(kind: AnyCareKind, sent: FormData, situation: Situation
     ...(submission.status === 'success' ? {} : messagesOf(submission.error)),
     ...byField([
       ...problems,
-      ...(submission.status === 'success' ? kindProblems(kind, submission.value.care, context, situation) : []),
+      ...(submission.status === 'success'
+        ? [
+            ...itemProblems(kind, submission.value.care, situation.item),
+            ...kindProblems(kind, submission.value.care, context, situation),
+          ]
+        : []),
     ]),
   }
   if (submission.status === 'success' && spine && when?.ok && Object.keys(errors).length === 0) {
-    return { ok: true, chart: chartOf(spine, when.at, submission.value.care), context }
+    const care = withCatalogue(kind, submission.value.care, context, situation.item)
+    return { ok: true, chart: chartOf(spine, when.at, care), context }
   }
   return { ok: false, errors, asks: when !== undefined && !when.ok && when.field === 'occurrence' }
 }
 
 function chartOf({ id, reason, witness }: ChartSpine, at: Date, care: Chartable['care']): Chartable {
   return { id, performedAt: at, reason: reason || undefined, witnessId: witness, care }
+}
+
+function withCatalogue(
+  kind: AnyCareKind,
+  care: Chartable['care'],
+  context: CareContext | null,
+  item: CataloguedItem | null,
+): Chartable['care'] {
+  if (!item) return withoutCodes(kind, care)
+  return context ? { ...care, ...kind.catalogued?.(care, context, item) } : care
+}
+
+/** Codes stay with the item they were read from: a scan that was taken out leaves none. */
+function withoutCodes(kind: AnyCareKind, care: Chartable['care']): Chartable['care'] {
+  const codes = fieldsOf(kind.schema).flatMap(({ name, meta }) => (meta.control === 'codes' ? [name] : []))
+  return Object.fromEntries(Object.entries(care).filter(([name]) => !codes.includes(name)))
 }
 
 function formProblems(sent: FormData, unknown: readonly string[]): readonly FormProblem[] {

@@ -61,12 +61,25 @@ export function CareFields({ fields, gauges = [], lists = {}, units = {}, notice
   )
 }
 
-/** Filled in by a scan: nothing to look at but what is wrong with it. What the catalogue decides is not sent at all. */
+/** Filled in by a scan. The item can be taken out again; what the catalogue decides is not sent at all. */
 function CarriedAnswer({ field: { id, meta, fullName, answers, errors } }: { readonly field: DrawnField }) {
   if (meta.control === 'decided') return null
+  if (meta.control === 'codes') return <input type="hidden" id={id} name={fullName} defaultValue={answers[0]} />
+  const [item = ''] = answers
   return (
-    <div id={id} tabIndex={-1} className={errors?.length ? '' : 'contents'}>
-      <input type="hidden" name={fullName} defaultValue={answers[0]} />
+    <div className="grid gap-1.5 has-[input:not(:checked)]:hidden has-[p]:grid">
+      <label className="inline-flex min-h-12 items-center gap-3">
+        <input
+          type="checkbox"
+          id={id}
+          name={fullName}
+          value={item}
+          defaultChecked={item !== ''}
+          data-carried=""
+          className="size-6 accent-brand"
+        />
+        {`${meta.label}, as in the catalogue`}
+      </label>
       <FieldErrors id={id} errors={errors} />
     </div>
   )

@@ -7,7 +7,8 @@ export function fillForm(form: HTMLFormElement, answers: Typed): void {
     if (!(element instanceof HTMLInputElement)) continue
     const values = answers[element.name]
     if (!values) continue
-    if (element.type === 'radio' || element.type === 'checkbox') tap(element, values.includes(element.value))
+    if (element.dataset.carried !== undefined) carry(element, values[0] ?? '')
+    else if (element.type === 'radio' || element.type === 'checkbox') tap(element, values.includes(element.value))
     else typeInto(element, values[0] ?? '')
   }
 }
@@ -15,5 +16,12 @@ export function fillForm(form: HTMLFormElement, answers: Typed): void {
 function tap(box: HTMLInputElement, isChosen: boolean): void {
   if (box.checked === isChosen) return
   box.checked = isChosen
+  box.dispatchEvent(new Event('input', { bubbles: true }))
+}
+
+/** A box that carries what a scan found stands for it, and is there as long as it does. */
+function carry(box: HTMLInputElement, value: string): void {
+  box.value = value
+  box.checked = value !== ''
   box.dispatchEvent(new Event('input', { bubbles: true }))
 }

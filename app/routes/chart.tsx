@@ -3,11 +3,14 @@ import { patientGate } from '#app/auth/patient-access.server.ts'
 import { ownSession, signedIn } from '#app/auth/signed-in.server.ts'
 import { traceOf } from '#app/auth/trace.server.ts'
 import { findKind } from '#app/care/kinds.ts'
+import { itemField } from '#app/charting/item-problems.ts'
 import { ChartForm } from '#app/components/chart-form.tsx'
 import { ChartHead, UsualAct } from '#app/components/chart-head.tsx'
 import { answerOrKept } from '#app/components/kept-form.ts'
+import { ScanPanel } from '#app/components/scan-panel.tsx'
 import { chartedWith } from '#app/photographs/charted-with.server.ts'
 import { sentPhotographs } from '#app/photographs/sent-photographs.server.ts'
+import { scannerOf } from '#app/scanning/scanner.server.ts'
 import { sentForm } from '#app/sent-form.server.ts'
 import { chartForm } from '#app/views/chart-form.server.ts'
 import { afterCharting, checked, refusedByRecord } from '#app/views/chart-submission.server.ts'
@@ -30,7 +33,9 @@ export async function loader({ params, context, request, url }: Route.LoaderArgs
   const { stayId } = await patientGate(user, params.patientId, askOf({ kind, context, request, url }))
   const now = new Date()
   const care = await patientCare(stayId, now)
-  return chartForm(kind, { care, user, url, now, signedInAt: ownSession(context).startedAt })
+  const { separatorKey } = await scannerOf(request)
+  const form = await chartForm(kind, { care, user, url, now, signedInAt: ownSession(context).startedAt })
+  return { ...form, separatorKey }
 }
 
 export async function action({ params, context, request, url }: Route.ActionArgs) {
@@ -66,6 +71,8 @@ function askOf({ kind, ...arrived }: Asking) {
 export default function Chart({ loaderData: view, actionData, params }: Route.ComponentProps) {
   const kind = findKind(view.kind)
   if (!kind) return null
+  const item = itemField(kind)
+  const path = `/patients/${params.patientId}/chart/${kind.slug}`
   return (
     <div className="mx-auto max-w-5xl pt-5">
       <ChartHead
@@ -85,9 +92,12 @@ export default function Chart({ loaderData: view, actionData, params }: Route.Co
         cancelHref={`/patients/${params.patientId}`}
         reasonAfterHours={view.reasonAfterHours}
       >
-        {fill =>
-          view.usual && <UsualAct words={view.usual.words} onFill={() => view.usual && fill(view.usual.answers)} />
-        }
+        {fill => (
+          <>
+            {item && <ScanPanel what={item.meta.of} path={path} separatorKey={view.separatorKey} onFill={fill} />}
+            {view.usual && <UsualAct words={view.usual.words} onFill={() => view.usual && fill(view.usual.answers)} />}
+          </>
+        )}
       </ChartForm>
     </div>
   )

@@ -40,6 +40,8 @@ export async function loader({ context, request }: Route.LoaderArgs) {
       ]),
       ...sectionsOf('see tubes of wards', [{ label: 'Tubes', href: '/tubes', under: '/tubes' }]),
       ...sectionsOf('see catalogue', [{ label: 'Catalogue', href: '/catalogue', under: '/catalogue' }]),
+      { label: 'Scan', href: '/scan', under: '/scan' },
+      ...sectionsOf('trace lots', [{ label: 'Lots', href: '/lots', under: '/lots' }]),
       ...sectionsOf('see policy', [{ label: 'Policy', href: '/policy', under: '/policy' }]),
       ...sectionsOf('manage people', [{ label: 'People', href: '/admin/people', under: '/admin/people' }]),
       ...sectionsOf('manage wards', [{ label: 'Wards', href: '/admin/wards', under: '/admin/wards' }]),

@@ -6,7 +6,7 @@ import type { Gauge } from '#app/care/gauge.ts'
 import { lateReasonAfter } from '#app/care/general-settings.ts'
 import type { AnyCareKind, CareContext } from '#app/care/kind.ts'
 import type { FormSigner, WarningView } from '#app/charting/chart-answer.ts'
-import { type Typed, typedFrom } from '#app/charting/chart-form.ts'
+import { type Typed, typedFrom, typedIn } from '#app/charting/chart-form.ts'
 import { restored } from '#app/charting/drafts.ts'
 import type { Calendar } from '#app/charting/performed-at.ts'
 import { liveTasks } from '#app/rules/board.ts'
@@ -71,6 +71,7 @@ export async function chartForm(kind: AnyCareKind, opening: Opening): Promise<Ch
     ...openingAnswers(kind, context, url),
     ...(url.searchParams.has('usual') ? usualTyped?.answers : {}),
     ...lastMoment(care),
+    ...scannedAnswers(kind, url),
   }
   return {
     ...frameOf(kind, opening),
@@ -116,6 +117,13 @@ export function signerOf({ id, name, role }: CurrentUser): FormSigner {
 /** What the answer to "when" is held against. */
 export function calendarOf({ record: { stay }, ward }: PatientCare, now: Date): Calendar {
   return { zone: ward.zone, now, beganAt: stay.admittedAt, endedAt: stay.dischargedAt }
+}
+
+/** What the scan page found, where it leads here; checked like everything else once the form is sent. */
+function scannedAnswers(kind: AnyCareKind, url: URL): Typed {
+  const sent = new FormData()
+  for (const [name, value] of url.searchParams) if (name.startsWith('care.')) sent.append(name, value)
+  return typedIn(kind, sent)
 }
 
 /** Nothing is done "now" for a patient who has left. */

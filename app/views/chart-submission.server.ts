@@ -14,6 +14,7 @@ import type { Alongside } from '#database/entries.server.ts'
 import type { Charting } from '#database/entry-outcome.server.ts'
 import { policies } from '#database/policies.server.ts'
 import { person } from '#database/users.server.ts'
+import { cataloguedItem } from './catalogued-item.server.ts'
 import { calendarOf, shownWarning, signerOf } from './chart-form.server.ts'
 import { witnessesFor } from './chart-lists.server.ts'
 import { signed } from './chart-signing.server.ts'
@@ -96,7 +97,7 @@ function keptOf({ kind, form, user, photographs }: Sent) {
   }
 }
 
-async function situationOf({ care, form, user, now, corrects, photographs }: Sent): Promise<Situation> {
+async function situationOf({ kind, care, form, user, now, corrects, photographs }: Sent): Promise<Situation> {
   const known = await policies()
   const witness = form.get('witness')
   const people = witness ? await witnessesFor(care.ward.id, user) : {}
@@ -105,6 +106,7 @@ async function situationOf({ care, form, user, now, corrects, photographs }: Sen
     known: { settings: careSettings, tasks: careTasks },
     witnessIds: new Set(Object.keys(people)),
     problems: photographs?.problems ?? [],
+    item: await cataloguedItem(kind, form),
     reason: corrects === undefined ? 'when late' : 'always',
     contextAt: at =>
       corrects === undefined ? contextOfAct(care, known, at) : contextOfCorrection(care, known, at, corrects),

@@ -3,6 +3,7 @@ import type { CareContext, WardFacts } from '#app/care/kind.ts'
 import { policyInForce } from '#app/care/policy.ts'
 import { env } from '#app/env.server.ts'
 import { showDateTime } from '#app/time/display.ts'
+import { recalls } from '#database/lot-recalls.server.ts'
 import { policies } from '#database/policies.server.ts'
 import { type StayRecord, stayRecord } from '#database/records.server.ts'
 import { wardById } from '#database/wards.server.ts'
@@ -22,7 +23,7 @@ export async function patientCare(stayId: string, now: Date): Promise<PatientCar
   const found = record && (await wardById(record.stay.wardId))
   if (!record || !found) throw data('There is no such patient.', 404)
   const { id, name, shiftTimes, pressureUnit } = found
-  const ward = { id, name, shiftTimes, pressureUnit, zone: env.hospitalTimeZone }
+  const ward = { id, name, shiftTimes, pressureUnit, zone: env.hospitalTimeZone, recalls: await recalls() }
   const policy = policyInForce(await policies(), id, now)
   const discharged = record.stay.dischargedAt
   if (!policy)

@@ -9,6 +9,7 @@ import { ageOn } from '#app/time/display.ts'
 import { earlier, hours } from '#app/time/duration.ts'
 import { shiftAt } from '#app/time/shift.ts'
 import { localDay } from '#app/time/zone.ts'
+import { recalls } from '#database/lot-recalls.server.ts'
 import { policies } from '#database/policies.server.ts'
 import { type StayRecord, wardRecords } from '#database/records.server.ts'
 import { wardRev } from '#database/ward-revs.server.ts'
@@ -64,9 +65,15 @@ export function boardJson({ data, at }: ServedBoard): Uint8Array<ArrayBuffer> {
 }
 
 async function computedBoard(wardId: string, now: Date, rev: number): Promise<Board | undefined> {
-  const [ward, known, records] = await Promise.all([wardById(wardId), policies(), wardRecords(wardId, rev)])
+  const [ward, known, records, recalled] = await Promise.all([
+    wardById(wardId),
+    policies(),
+    wardRecords(wardId, rev),
+    recalls(),
+  ])
   if (!ward) return undefined
-  const facts: WardFacts = { zone: env.hospitalTimeZone, shiftTimes: ward.shiftTimes, pressureUnit: ward.pressureUnit }
+  const { shiftTimes, pressureUnit } = ward
+  const facts: WardFacts = { zone: env.hospitalTimeZone, shiftTimes, pressureUnit, recalls: recalled }
   const policy = policyInForce(known, wardId, now)
   return {
     wardId,

@@ -21,6 +21,8 @@ import { calendarFeeds } from './0050-calendar-feeds.ts'
 import { emergencyNumbers } from './0055-emergency-numbers.ts'
 import { airwayDetails } from './0056-airway-details.ts'
 import { photographs } from './0058-photographs.ts'
+import { entryLots } from './0060-entry-lots.ts'
+import { lotRecalls } from './0061-lot-recalls.ts'
 import { entrySignatures } from './0070-entry-signatures.ts'
 import { policyRuleSets } from './0080-policy-rule-sets.ts'
 import { policyWithdrawals } from './0081-policy-withdrawals.ts'
@@ -52,6 +54,8 @@ export const migrations: Record<string, Migration> = {
   '0055-emergency-numbers': emergencyNumbers,
   '0056-airway-details': airwayDetails,
   '0058-photographs': photographs,
+  '0060-entry-lots': entryLots,
+  '0061-lot-recalls': lotRecalls,
   '0070-entry-signatures': entrySignatures,
   '0080-policy-rule-sets': policyRuleSets,
   '0081-policy-withdrawals': policyWithdrawals,

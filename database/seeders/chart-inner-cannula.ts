@@ -9,6 +9,7 @@ import {
 import { hours, since } from '#app/time/duration.ts'
 import { type Bedside, pacedTimes, tubeAt } from './bedside.ts'
 import { type Draft, draft } from './draft.ts'
+import { packOf } from './tubes.ts'
 
 /** Looks at the inner cannula and its renewals over the stay. A renewal is a look as well. */
 export function innerCannulaCare(bedside: Bedside): readonly Draft[] {
@@ -56,6 +57,7 @@ function actAt(bedside: Bedside, at: Date, renews: boolean, index: number): read
     condition: renews && index % 2 === 1 ? coated(bedside) : random.pick(['clear', 'light']),
     line: tube.line,
     size: tube.size,
+    ...(act === 'replaced' ? packOf(tube, at) : {}),
     locked: 'yes',
     spare: 'yes',
     tolerance: random.pick(['well', 'well', 'well', 'cough']),

@@ -7,6 +7,7 @@ import type { Bedside, TubePeriod } from './bedside.ts'
 import { settledReading } from './chart-cuff.ts'
 import { type Draft, draft } from './draft.ts'
 import type { FirstTube, TubeSwap } from './story.ts'
+import { packOf } from './tubes.ts'
 
 /** The tubes of a stay as they went in, each cuff checked after it, and the removal for good. */
 export function tubeCare(bedside: Bedside): readonly Draft[] {
@@ -46,7 +47,7 @@ function firstTube(bedside: Bedside, { from, tube, sutures }: TubePeriod, story:
 function changed(bedside: Bedside, { from, tube, sutures }: TubePeriod, { reason }: TubeSwap): readonly Draft[] {
   const specialist = bedside.rota.lead(bedside.place.ward, 'tracheostomy specialist')
   const helper = bedside.rota.nurse(bedside.place.ward, bedside.place.bed, from).name
-  const data = { ...tube, reason, sutures, operator: specialist.name, helper } as const
+  const data = { ...tube, ...packOf(tube, from), reason, sutures, operator: specialist.name, helper } as const
   return [
     draft(
       tubeChanges,

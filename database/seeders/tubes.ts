@@ -8,7 +8,10 @@ export type PrintedTube = Omit<
   'reason' | 'insertedOn' | 'stomaMadeOn' | 'technique' | 'sutures' | 'operator' | 'helper' | 'difficulty' | 'position'
 >
 
-const printed = (description: Parameters<typeof demoTube>[0]): PrintedTube => printedAnswers(demoTube(description))
+const printed = (description: Parameters<typeof demoTube>[0]): PrintedTube => {
+  const tube = demoTube(description)
+  return { ...printedAnswers(tube), item: tube.id }
+}
 
 const corvane = { line: 'Corvane Dual', cuff: 'air', fenestrated: 'no' } as const
 const halden = { line: 'Halden', size: '6', fenestrated: 'no' } as const
@@ -28,3 +31,10 @@ export const printedTubes = {
 } as const satisfies Readonly<Record<string, PrintedTube>>
 
 export type TubeName = keyof typeof printedTubes
+
+/** Lot and expiry of a device that was unpacked at a moment: a ward takes one delivery of each a month, and all of it is one lot. */
+export function packOf({ line, size }: Pick<PrintedTube, 'line' | 'size'>, at: Date) {
+  const month = at.toISOString().slice(0, 7)
+  const lot = `${line.charAt(0)}${size}-${month.slice(2).replace('-', '')}`
+  return { lot, expiresOn: `${Number(month.slice(0, 4)) + 3}${month.slice(4)}-28` }
+}

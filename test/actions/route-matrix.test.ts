@@ -74,6 +74,13 @@ POST /catalogue/:items/:itemId         403 403 403 400 403 400 403   403 403 403
 GET  /catalogue/:items/:itemId/edit    403 403 403 200 403 200 403   403 403 403 200 403 200 403   403 403   own  in
 POST /catalogue/:items/:itemId/edit    403 403 403 400 403 400 403   403 403 403 400 403 400 403   403 403   own  in
 GET  /catalogue/export                 200 200 200 200 200 200 200   200 200 200 200 200 200 200   200 200   401  401
+GET  /scan                             200 200 200 200 200 200 200   200 200 200 200 200 200 200   200 200   own  in
+POST /scan                             400 400 400 400 400 400 400   400 400 400 400 400 400 400   400 400   own  in
+GET  /scan/set-up                      200 200 200 200 200 200 200   200 200 200 200 200 200 200   200 200   own  in
+POST /scan/set-up                      200 200 200 200 200 200 200   200 200 200 200 200 200 200   200 200   own  in
+GET  /lots                             200 200 200 200 403 200 403   200 200 200 200 403 200 403   200 200   own  in
+POST /lots                             403 403 403 400 403 400 403   403 403 403 400 403 400 403   403 403   own  in
+GET  /lots/export                      400 400 400 400 403 400 403   400 400 400 400 403 400 403   400 400   own  in
 GET  /account                          200 200 200 200 200 200 200   200 200 200 200 200 200 200   200 200   200  in
 POST /account                          400 400 400 400 400 400 400   400 400 400 400 400 400 400   400 400   400  in
 GET  /sign-out-everywhere              go  go  go  go  go  go  go    go  go  go  go  go  go  go    go  go    own  in

@@ -1,4 +1,7 @@
+import type { CataloguedItem } from '../catalogued-item.ts'
 import type { CareContext } from '../kind.ts'
+import { isPrintedAlike } from '../printed.ts'
+import type { TubeData } from '../tube-change/schema.ts'
 import { tubeInPlace } from '../tube-change/tube.ts'
 import { LOCAL_PLAN, type Warning } from '../warning.ts'
 import { isLeftOut } from './acts.ts'
@@ -52,29 +55,46 @@ const notChecked: Rule = data =>
       ]
     : []
 
-/** Told apart by line and size as printed. Recorded all the same: it was found so. */
+/** What is said of a cannula that is not made for the tube: before it goes in and when it is found in place. */
+export const OTHER_TUBE_ACTION = `This cannula is not made for this tube. Change it now for the matching one. ${LOCAL_PLAN}`
+
+/**
+ * Whether an inner cannula is made for a tube: as the catalogue said when it was charted, as long as that was of this tube;
+ * otherwise by line and size as printed.
+ */
+export function isMadeFor(
+  tube: Pick<TubeData, 'item' | 'line' | 'size'>,
+  cannula: Pick<InnerCannulaData, 'line' | 'size' | 'madeFor' | 'notMadeFor'>,
+): boolean {
+  if (tube.item !== undefined && tube.item === cannula.madeFor) return true
+  if (tube.item !== undefined && tube.item === cannula.notMadeFor) return false
+  return (['line', 'size'] as const).every(name => isPrintedAlike(cannula[name] ?? tube[name], tube[name]))
+}
+
+/** What the catalogue settles as an act is charted: whether the scanned cannula is made for the tube in place. */
+export function fitByCatalogue(
+  { item }: Pick<InnerCannulaData, 'item'>,
+  { record }: Pick<CareContext, 'record'>,
+  catalogued: CataloguedItem,
+): Pick<InnerCannulaData, 'madeFor' | 'notMadeFor'> {
+  const tube = tubeInPlace(record)?.data.item
+  if (item === undefined || tube === undefined) return {}
+  return catalogued.fits.includes(tube) ? { madeFor: tube } : { notMadeFor: tube }
+}
+
+/** Recorded all the same: it was found so. */
 const otherTube: Rule = (data, { record }) => {
   const tube = tubeInPlace(record)?.data
-  if (!tube || (matches(data.line, tube.line) && matches(data.size, tube.size))) return []
+  if (!tube || isMadeFor(tube, data)) return []
   return [
     {
       name: 'inner-cannula-other-tube',
       level: 'red',
-      action: `This cannula is not made for this tube. Change it now for the matching one. ${LOCAL_PLAN}`,
+      action: OTHER_TUBE_ACTION,
       cause: `Charted as ${[data.line, data.size].filter(Boolean).join(' ')}; the tube is ${tube.line} ${tube.size}.`,
       source: MADE_FOR,
     },
   ]
-}
-
-/** As printed, but for case, spaces and a trailing zero: `8` is the size that another label prints as `8.0`. */
-function matches(charted: string | undefined, ofTube: string): boolean {
-  return charted === undefined || plain(charted) === plain(ofTube)
-}
-
-function plain(words: string): string {
-  const text = words.trim().replaceAll(/\s+/g, ' ').toLowerCase()
-  return /^\d+([.,]\d+)?$/.test(text) ? String(Number(text.replace(',', '.'))) : text
 }
 
 /** A single-use cannula that went back in, by this act or before it was found; silent once it was thrown away. */

@@ -2,6 +2,7 @@ import { careKind } from '../kind.ts'
 import { isNarrowed } from './acts.ts'
 import { innerCannulaChecks } from './checks.ts'
 import { innerCannulaExamples } from './examples.ts'
+import { fitByCatalogue } from './fit.ts'
 import { innerCannulaActs } from './schema.ts'
 import { innerCannulaSentence } from './sentence.ts'
 import { innerCannulaSettings } from './settings.ts'
@@ -22,6 +23,7 @@ export const innerCannula = careKind({
   settings: innerCannulaSettings,
   checks: innerCannulaChecks,
   tasks: innerCannulaTasks,
+  catalogued: fitByCatalogue,
   startsWith: innerCannulaStart,
   usual: usualInnerCannula,
   notOffered: notOfferedOfCannula,

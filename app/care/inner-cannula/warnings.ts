@@ -1,12 +1,13 @@
 import { lastComplete } from '../bedside-kit/gaps.ts'
 import { BREATHING_SOURCE, breathingAction } from '../emergency.ts'
 import type { CareContext } from '../kind.ts'
+import { recalledInPlace } from '../recall.ts'
 import { standsSince } from '../standing.ts'
 import { bleedWarnings } from '../suction/bleeding.ts'
 import { lowSaturation } from '../suction/saturation.ts'
 import { tubeInPlace } from '../tube-change/tube.ts'
 import type { Warning } from '../warning.ts'
-import { actsOnTube, wasSeen } from './acts.ts'
+import { actsOnTube, isLeftOut, wasSeen } from './acts.ts'
 import { absence, absentWarning, fitRules, noSpare } from './fit.ts'
 import { narrowed, repeatedBlock, shorterInterval, standingBlocks, stillNarrowed } from './narrowing.ts'
 import { pairState, standingPair } from './pair.ts'
@@ -55,6 +56,7 @@ export function standingInnerCannulaWarnings(context: CareContext): readonly War
     ...stillNarrowed(context),
     ...standingBlocks(context),
     ...shorterInterval(context),
+    ...recalledCannula(context),
   ]
 }
 
@@ -67,6 +69,14 @@ function spareMissing(context: CareContext): readonly Warning[] {
   if (from === undefined || (pairState(record)?.other ?? 'ready') !== 'ready') return []
   const acts = record.since(innerCannulaActs, from).filter(({ performedAt }) => !whole || performedAt >= whole)
   return standsSince(acts, { isSettledBy: () => true, warns: noSpare }, context)
+}
+
+/** The cannula in place is the one that was put in last; of one that came with the tube the lot is not known. */
+function recalledCannula({ record, ward }: CareContext): readonly Warning[] {
+  const last = actsOnTube(record).find(
+    ({ data }) => data.act === 'replaced' || data.act === 'swapped' || isLeftOut(data),
+  )
+  return last && !isLeftOut(last.data) ? recalledInPlace('inner cannula', last.data, ward) : []
 }
 
 /** A dual tube that went in without an inner cannula, where no act says that one was fitted or tried. */

@@ -1,6 +1,7 @@
 import { daysLeft, dwellDay, dwellStage } from '../../clinical/dwell.ts'
 import { localDay } from '../../time/zone.ts'
 import type { CareContext } from '../kind.ts'
+import { recalledInPlace } from '../recall.ts'
 import type { Warning } from '../warning.ts'
 import { dwellNotice, dwellStrongNotice } from './dwell-settings.ts'
 import { suturesOutBy } from './settings.ts'
@@ -16,6 +17,7 @@ export function standingTubeWarnings(context: CareContext): readonly Warning[] {
     ...standingTubeOut(context),
     ...(tube ? [...dwell(tube, context), ...sutures(tube, context)] : notCharted(context)),
     ...standingDisplacements(context),
+    ...(tube ? recalledInPlace('tube', tube.data, context.ward) : []),
   ]
 }
 

@@ -1,0 +1,7 @@
+/** An item of the catalogue as an act refers to it. `fits`: the tubes that an inner cannula is made for, by their ids. */
+export interface CataloguedItem {
+  readonly id: string
+  readonly line: string
+  readonly size: string
+  readonly fits: readonly string[]
+}

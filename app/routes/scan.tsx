@@ -1,0 +1,157 @@
+import { useState } from 'react'
+import { data, Form, Link, useNavigation, useSubmit } from 'react-router'
+import { signedIn } from '#app/auth/signed-in.server.ts'
+import { traceOf } from '#app/auth/trace.server.ts'
+import { Button, LinkButton } from '#app/components/button.tsx'
+import { Card } from '#app/components/card.tsx'
+import { ChoiceField } from '#app/components/choice-field.tsx'
+import { useHydrated } from '#app/components/hydrated.ts'
+import { ScanCamera } from '#app/components/scan-camera.tsx'
+import { ScanResult } from '#app/components/scan-result.tsx'
+import { TextField } from '#app/components/text-field.tsx'
+import { useWedge } from '#app/components/use-wedge.ts'
+import { type ScanSource, scanForm } from '#app/scanning/scan-form.ts'
+import { NO_SCAN, type ScanView } from '#app/scanning/scan-view.ts'
+import { scannerOf } from '#app/scanning/scanner.server.ts'
+import { sentForm } from '#app/sent-form.server.ts'
+import { scanResult } from '#app/views/scan-result.server.ts'
+import { scanTarget } from '#app/views/scan-target.server.ts'
+import type { Route } from './+types/scan.ts'
+
+export const meta: Route.MetaFunction = () => [{ title: 'Scan | Cannulary' }]
+
+export async function loader({ context, request, url }: Route.LoaderArgs) {
+  const asking = { user: signedIn(context), now: new Date(), by: traceOf({ request, url, context }) }
+  const target = await scanTarget(url.searchParams.get('for'), asking)
+  const where = target && { path: target.path, what: target.what, bed: target.care.record.stay.bedLabel }
+  return { target: where, scanner: await scannerOf(request) }
+}
+
+export async function action({ context, request, url }: Route.ActionArgs) {
+  const asking = { user: signedIn(context), now: new Date(), by: traceOf({ request, url, context }) }
+  const form = await sentForm(request)
+  const target = await scanTarget(form.get('for'), asking)
+  const { isTrusted } = await scannerOf(request)
+  const wanted = target && { kind: target.kind, context: target.care.context }
+  const view = await scanResult(scanForm(form), { ...asking, isTrusted, form: wanted })
+  return view.error === null ? view : data(view, 400)
+}
+
+/** Scan, see what it is, and take it to the form that asked for it. */
+export default function Scan({ loaderData: { target, scanner }, actionData }: Route.ComponentProps) {
+  const view = actionData ?? NO_SCAN
+  const path = target?.path ?? ''
+  const submit = useSubmit()
+  const isBusy = useNavigation().state !== 'idle'
+  const before = view.next === null && view.readBack.length === 0 && view.error === null ? [] : view.codes
+  const send = (source: ScanSource) => (code: string) => {
+    const body = new FormData()
+    body.set('for', path)
+    for (const text of before) body.append('before', text)
+    body.set('source', source)
+    body.set('code', code)
+    void submit(body, { method: 'post' })
+  }
+  useWedge(send('scanner'), scanner.separatorKey)
+  return (
+    <Form method="post" noValidate className="mx-auto grid max-w-3xl gap-4 px-4 py-5 md:px-6">
+      <h1 className="text-2xl">{target ? `Scan the ${target.what} for bed ${target.bed}` : 'Scan'}</h1>
+      <input type="hidden" name="for" value={path} />
+      {before.map(text => (
+        <input key={text} type="hidden" name="before" value={text} />
+      ))}
+      <Outcome view={view} path={path} />
+      <Sources view={view} isBusy={isBusy} onCamera={send('camera')} />
+      <p className="text-sm text-ink2">
+        {scanner.isTrusted
+          ? 'The scanner of this workstation has proved to send whole codes.'
+          : 'The scanner of this workstation has not been tested: lot and expiry may have to be read back.'}{' '}
+        <Link to="/scan/set-up" className="inline-flex min-h-11 items-center underline underline-offset-3">
+          Set up the scanner
+        </Link>
+      </p>
+    </Form>
+  )
+}
+
+interface OutcomeProps {
+  readonly view: ScanView
+  readonly path: string
+}
+
+function Outcome({ view, path }: OutcomeProps) {
+  if (view === NO_SCAN || (view.error !== null && view.codes.length === 0)) return null
+  const options = Object.fromEntries(view.readBack.map(({ value, words }) => [value, words]))
+  const readBack = (
+    <div className="grid gap-3">
+      <ChoiceField
+        id="readBack"
+        name="readBack"
+        label="Which of these is on the label?"
+        hint="The scanner may have left out a separator."
+        options={options}
+      />
+      <Button className="justify-self-start">That is on the label</Button>
+    </div>
+  )
+  const filled =
+    view.fill &&
+    `${path}?${new URLSearchParams(Object.entries(view.fill).map(([name, [value = '']]) => [name, value]))}`
+  return (
+    <Card>
+      <ScanResult view={view} readBack={readBack}>
+        <div className="flex flex-wrap gap-2">
+          {filled && (
+            <LinkButton href={filled} variant={view.stops ? 'plain' : 'primary'} size={48}>
+              {view.stops ? 'It is in place already: fill it in' : 'Fill it into the form'}
+            </LinkButton>
+          )}
+          <LinkButton href={path === '' ? '/scan' : `/scan?for=${encodeURIComponent(path)}`} size={48} reload>
+            Scan another
+          </LinkButton>
+        </div>
+      </ScanResult>
+    </Card>
+  )
+}
+
+interface SourcesProps {
+  readonly view: ScanView
+  readonly isBusy: boolean
+  readonly onCamera: (raw: string) => void
+}
+
+/** The scanner needs nothing on the page; the camera opens; a code can be typed, without scripts too. */
+function Sources({ view, isBusy, onCamera }: SourcesProps) {
+  const [isOpen, setOpen] = useState(false)
+  const isHydrated = useHydrated()
+  const read = (raw: string) => {
+    setOpen(false)
+    onCamera(raw)
+  }
+  return (
+    <div className="grid gap-3">
+      <TextField
+        key={view.typed}
+        id="code"
+        name="code"
+        label="Code"
+        hint="Scan it, or type what is printed below it with its brackets: (01)09521234543213(10)AB12"
+        errors={view.error ? [view.error] : undefined}
+        defaultValue={view.typed}
+        autoComplete="off"
+      />
+      <div className="flex flex-wrap gap-2">
+        <Button variant="primary" size={48} aria-disabled={isBusy || undefined}>
+          Look it up
+        </Button>
+        {isHydrated && (
+          <Button type="button" size={48} onClick={() => setOpen(true)}>
+            Use the camera
+          </Button>
+        )}
+      </div>
+      {isOpen && <ScanCamera onRead={read} onClose={() => setOpen(false)} />}
+    </div>
+  )
+}
