@@ -1,19 +1,18 @@
 import type { z } from 'zod'
-import type { PressureUnit } from '../clinical/units.ts'
-import type { ShiftTimes } from '../time/shift.ts'
-import type { LocalDay, Zone } from '../time/zone.ts'
 import type { CataloguedItem } from './catalogued-item.ts'
 import type { Clock } from './clock.ts'
+import type { PatientFacts, WardFacts } from './facts.ts'
 import type { FormProblem, KnownNames } from './form-problem.ts'
 import type { Gauge } from './gauge.ts'
 import type { Lane } from './lanes.ts'
 import type { AnySetting, Values } from './policy.ts'
 import type { PolicyCheck } from './policy-check.ts'
-import type { Recall } from './recall.ts'
 import type { RunningAct } from './running-act.ts'
 import type { Skill } from './skills.ts'
 import type { PlannedUse, Used } from './supply.ts'
 import type { Warning } from './warning.ts'
+
+export type { PatientFacts, WardFacts } from './facts.ts'
 
 /** What the act needs beyond charting care in general. */
 export type ChartingAct = 'chart care' | 'set care plans'
@@ -44,19 +43,6 @@ export interface Entry<Data = unknown> {
 /** An entry as stored: payload not read yet. */
 export type StoredEntry = Omit<Entry, 'data'> & { readonly version: number; readonly raw: unknown }
 
-/** What rules may know of the person, apart from entries. */
-export interface PatientFacts {
-  readonly bornOn: LocalDay
-  readonly upperAirway: 'open' | 'not open' | 'not known'
-  readonly ventilated: boolean
-  /** Prescribed SpO2 target in %, null when none is recorded. */
-  readonly spo2Low: number | null
-  readonly spo2High: number | null
-  /** View at laryngoscopy by its grade, and what is known to be difficult; absent or null when nobody has said. */
-  readonly laryngoscopy?: '1' | '2' | '3' | '4' | null
-  readonly airwayNotes?: string | null
-}
-
 /** One patient's effective entries, asked by kind object: a kind that is not imported cannot be asked for. */
 export interface PatientRecord {
   readonly admittedAt: Date
@@ -70,14 +56,6 @@ export interface PatientRecord {
   ): Entry<DataOf<K>> | undefined
   /** Effective entries performed at or after `from`, latest first. */
   since<K extends AnyCharted>(kind: K, from: Date): readonly Entry<DataOf<K>>[]
-}
-
-export interface WardFacts {
-  readonly zone: Zone
-  readonly shiftTimes: ShiftTimes
-  readonly pressureUnit: PressureUnit
-  /** Lots that nobody is to use any more. */
-  readonly recalls?: readonly Recall[]
 }
 
 /** Everything a rule decides from. The same context gives the same answer. */
