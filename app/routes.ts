@@ -55,6 +55,9 @@ export default [
     route('lots/export', 'routes/lots-export.ts'),
 
     // people and rules
+    route('countersign', 'routes/countersign.tsx'),
+    route('competence', 'routes/competence.tsx'),
+    route('competence/:userId', 'routes/competence-person.tsx'),
     route('account', 'routes/account.tsx'),
     route('sign-out-everywhere', 'routes/sign-out-everywhere.ts'),
     route('admin/people', 'routes/admin-people.tsx'),

@@ -1,11 +1,9 @@
+import type { CompetenceStanding } from '#app/care/skills.ts'
 import type { Alongside } from './entries.server.ts'
 import { change, select } from './sequelize.server.ts'
 
 /** How somebody showed that it was them. `session`: nothing was asked for. `not given`: it was, and they charted without. */
 export type Proof = 'password' | 'recent sign-in' | 'session' | 'not given'
-
-/** How the author stood in the skill that the act asks for, when it was charted. `supervised`: signed off under supervision only. */
-export type CompetenceThen = 'held' | 'supervised' | 'out of date' | 'missing'
 
 /** A signature that is written with an entry. That of the second person exists only if they gave their own password. */
 export interface Signature {
@@ -14,7 +12,8 @@ export interface Signature {
   /** At that moment. */
   readonly role: string
   readonly proof: Proof
-  readonly competence: CompetenceThen | null
+  /** How the author stood in the skill that the act asks for, when it was charted. */
+  readonly competence: CompetenceStanding | null
 }
 
 /** Writes signatures in the transaction of the entry they belong to; undefined when there is none to write. */

@@ -108,6 +108,50 @@ CREATE TABLE `catalogue_changes` (
   CONSTRAINT `catalogue_changes_subject_is_known` CHECK (`subject` in ('line','tube','inner cannula'))
 ) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
 
+CREATE TABLE `competences` (
+  `id` uuid NOT NULL COMMENT 'minted when the form was opened: the same id twice is the same sign-off',
+  `user_id` uuid NOT NULL,
+  `skill` varchar(48) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  `level` varchar(16) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  `assessed_on` date NOT NULL,
+  `expires_on` date NOT NULL,
+  `assessed_by` uuid NOT NULL,
+  `assessed_role` varchar(64) CHARACTER SET ascii COLLATE ascii_bin NOT NULL COMMENT 'at that moment',
+  `signed_at` datetime(3) NOT NULL DEFAULT utc_timestamp(3),
+  PRIMARY KEY (`id`),
+  KEY `competences_of_user` (`user_id`,`skill`,`signed_at`),
+  KEY `competences_assessed_by` (`assessed_by`),
+  CONSTRAINT `competences_assessed_by` FOREIGN KEY (`assessed_by`) REFERENCES `users` (`id`),
+  CONSTRAINT `competences_user` FOREIGN KEY (`user_id`) REFERENCES `users` (`id`),
+  CONSTRAINT `competences_level_is_known` CHECK (`level` in ('supervised','independent','assessor')),
+  CONSTRAINT `competences_are_assessed_by_another` CHECK (`assessed_by` <> `user_id`),
+  CONSTRAINT `competences_expire` CHECK (`expires_on` > `assessed_on`)
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
+CREATE TABLE `competence_withdrawals` (
+  `competence_id` uuid NOT NULL,
+  `withdrawn_by` uuid NOT NULL,
+  `reason` varchar(500) NOT NULL,
+  `withdrawn_at` datetime(3) NOT NULL DEFAULT utc_timestamp(3),
+  PRIMARY KEY (`competence_id`),
+  KEY `competence_withdrawals_withdrawn_by` (`withdrawn_by`),
+  CONSTRAINT `competence_withdrawals_competence` FOREIGN KEY (`competence_id`) REFERENCES `competences` (`id`),
+  CONSTRAINT `competence_withdrawals_withdrawn_by` FOREIGN KEY (`withdrawn_by`) REFERENCES `users` (`id`),
+  CONSTRAINT `competence_withdrawals_have_a_reason` CHECK (char_length(trim(`reason`)) > 0)
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
+CREATE TABLE `countersignatures` (
+  `entry_id` uuid NOT NULL,
+  `signed_by` uuid NOT NULL,
+  `signed_role` varchar(64) CHARACTER SET ascii COLLATE ascii_bin NOT NULL COMMENT 'at that moment',
+  `signed_at` datetime(3) NOT NULL DEFAULT utc_timestamp(3),
+  `hash` char(64) CHARACTER SET ascii COLLATE ascii_bin NOT NULL COMMENT 'SHA-256 of the hash of the entry and this row; set by trigger',
+  PRIMARY KEY (`entry_id`),
+  KEY `countersignatures_signed_by` (`signed_by`),
+  CONSTRAINT `countersignatures_entry` FOREIGN KEY (`entry_id`) REFERENCES `entries` (`id`),
+  CONSTRAINT `countersignatures_signed_by` FOREIGN KEY (`signed_by`) REFERENCES `users` (`id`)
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
 CREATE TABLE `drafts` (
   `user_id` uuid NOT NULL,
   `path` varchar(200) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
@@ -127,7 +171,7 @@ CREATE TABLE `entries` (
   `performed_at` datetime(3) NOT NULL,
   `recorded_at` datetime(3) NOT NULL DEFAULT utc_timestamp(3),
   `recorded_by` uuid NOT NULL,
-  `recorded_role` varchar(32) CHARACTER SET ascii COLLATE ascii_bin NOT NULL COMMENT 'at that moment',
+  `recorded_role` varchar(64) CHARACTER SET ascii COLLATE ascii_bin NOT NULL COMMENT 'at that moment',
   `witness_id` uuid DEFAULT NULL,
   `supersedes_id` uuid DEFAULT NULL,
   `reason` varchar(500) DEFAULT NULL,
@@ -135,6 +179,7 @@ CREATE TABLE `entries` (
   `data` longtext CHARACTER SET utf8mb4 COLLATE utf8mb4_bin NOT NULL CHECK (json_valid(`data`)),
   `hash` char(64) CHARACTER SET ascii COLLATE ascii_bin NOT NULL COMMENT 'SHA-256 of the hash before it and this row; set by trigger',
   `lot` varchar(20) GENERATED ALWAYS AS (json_value(`data`,'$.lot')) VIRTUAL COMMENT 'of the device that was charted, for recalls',
+  `under_supervision` tinyint(1) GENERATED ALWAYS AS (right(`recorded_role`,18) = ' under supervision') VIRTUAL,
   PRIMARY KEY (`id`),
   UNIQUE KEY `entries_number` (`stay_id`,`number`),
   UNIQUE KEY `entries_supersedes` (`supersedes_id`),
@@ -143,6 +188,7 @@ CREATE TABLE `entries` (
   KEY `entries_recorded_by` (`recorded_by`),
   KEY `entries_witness` (`witness_id`),
   KEY `entries_by_lot` (`lot`),
+  KEY `entries_under_supervision` (`under_supervision`,`stay_id`),
   CONSTRAINT `entries_recorded_by` FOREIGN KEY (`recorded_by`) REFERENCES `users` (`id`),
   CONSTRAINT `entries_stay` FOREIGN KEY (`stay_id`) REFERENCES `stays` (`id`),
   CONSTRAINT `entries_supersede` FOREIGN KEY (`supersedes_id`) REFERENCES `entries` (`id`),
@@ -396,6 +442,7 @@ CREATE TABLE `stays` (
   `last_entry_hash` char(64) CHARACTER SET ascii COLLATE ascii_bin NOT NULL DEFAULT '' COMMENT 'likewise',
   `occupied_bed_id` uuid GENERATED ALWAYS AS (if(`discharged_at` is null,`bed_id`,NULL)) VIRTUAL,
   `open_patient_id` uuid GENERATED ALWAYS AS (if(`discharged_at` is null,`patient_id`,NULL)) VIRTUAL,
+  `countersign_count` int(10) unsigned NOT NULL DEFAULT 0 COMMENT 'raised by trigger, so that open pages notice',
   PRIMARY KEY (`id`),
   UNIQUE KEY `stays_one_to_a_bed` (`occupied_bed_id`),
   UNIQUE KEY `stays_one_to_a_patient` (`open_patient_id`),
@@ -462,6 +509,7 @@ CREATE TABLE `users` (
   `name` varchar(120) NOT NULL,
   `email` varchar(254) CHARACTER SET utf8mb4 COLLATE utf8mb4_uca1400_as_ci NOT NULL,
   `role` varchar(32) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  `supervised` tinyint(1) NOT NULL DEFAULT 0 COMMENT 'what they chart waits for a countersignature',
   `password_hash` varchar(200) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
   `password_set_at` datetime(3) NOT NULL,
   `one_time_until` datetime(3) DEFAULT NULL COMMENT 'the password works once, until then; null: it is the person''s own',
@@ -527,6 +575,50 @@ CREATE TRIGGER IF NOT EXISTS catalogue_changes_refuse_delete BEFORE DELETE ON ca
 
 CREATE TRIGGER IF NOT EXISTS catalogue_changes_refuse_update BEFORE UPDATE ON catalogue_changes
     FOR EACH ROW SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'catalogue_changes is append-only';
+
+CREATE TRIGGER IF NOT EXISTS competences_refuse_delete BEFORE DELETE ON competences FOR EACH ROW
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'competences is append-only: sign off anew, or withdraw';
+
+CREATE TRIGGER IF NOT EXISTS competences_refuse_update BEFORE UPDATE ON competences FOR EACH ROW
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'competences is append-only: sign off anew, or withdraw';
+
+CREATE TRIGGER IF NOT EXISTS competence_withdrawals_refuse_delete BEFORE DELETE ON competence_withdrawals FOR EACH ROW
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'competence_withdrawals is append-only: sign off anew, or withdraw';
+
+CREATE TRIGGER IF NOT EXISTS competence_withdrawals_refuse_update BEFORE UPDATE ON competence_withdrawals FOR EACH ROW
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'competence_withdrawals is append-only: sign off anew, or withdraw';
+
+CREATE TRIGGER IF NOT EXISTS countersignatures_are_bound BEFORE INSERT ON countersignatures FOR EACH ROW
+BEGIN
+  DECLARE author, stay UUID;
+  DECLARE supervised BOOLEAN;
+  DECLARE stands VARCHAR(16) CHARACTER SET ascii;
+  DECLARE head CHAR(64) CHARACTER SET ascii;
+  SELECT recorded_by, stay_id, under_supervision, status, hash INTO author, stay, supervised, stands, head
+    FROM entries WHERE id = NEW.entry_id;
+  UPDATE stays SET countersign_count = countersign_count + 1 WHERE id = stay;
+  IF NEW.signed_by = author OR RIGHT(NEW.signed_role, 18) = ' under supervision' THEN
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'countersignatures are by a registered colleague of the author';
+  END IF;
+  IF NOT (supervised <=> TRUE) OR stands <> 'final' THEN
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'countersignatures are of entries charted under supervision';
+  END IF;
+  IF EXISTS (SELECT 1 FROM entries WHERE supersedes_id = NEW.entry_id LOCK IN SHARE MODE) THEN
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'countersignatures are of entries that count';
+  END IF;
+  SET NEW.hash = SHA2(CONCAT_WS('\n', head, NEW.entry_id, NEW.signed_by, NEW.signed_role, NEW.signed_at), 256);
+END;
+
+CREATE TRIGGER IF NOT EXISTS countersignatures_raise_the_ward AFTER INSERT ON countersignatures FOR EACH ROW
+  INSERT INTO ward_revs (ward_id)
+    SELECT s.ward_id FROM entries e JOIN stays s ON s.id = e.stay_id WHERE e.id = NEW.entry_id
+    ON DUPLICATE KEY UPDATE rev = rev + 1;
+
+CREATE TRIGGER IF NOT EXISTS countersignatures_refuse_delete BEFORE DELETE ON countersignatures FOR EACH ROW
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'countersignatures is append-only';
+
+CREATE TRIGGER IF NOT EXISTS countersignatures_refuse_update BEFORE UPDATE ON countersignatures FOR EACH ROW
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'countersignatures is append-only';
 
 CREATE TRIGGER IF NOT EXISTS entries_are_numbered BEFORE INSERT ON entries FOR EACH ROW
 BEGIN

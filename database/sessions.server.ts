@@ -7,7 +7,13 @@ export type OwnWard = { readonly id: string; readonly name: string; readonly rev
 
 /** A session that nobody ended, with its person. Past a limit it is `over`, and good for one thing: keeping a draft. */
 export type KnownSession = {
-  readonly user: { readonly id: string; readonly name: string; readonly email: string; readonly role: Role }
+  readonly user: {
+    readonly id: string
+    readonly name: string
+    readonly email: string
+    readonly role: Role
+    readonly isSupervised: boolean
+  }
   readonly wards: readonly OwnWard[]
   readonly startedAt: Date
   readonly endsAt: Date
@@ -33,6 +39,7 @@ type SessionRow = {
   name: string
   email: string
   role: Role
+  supervised: number
   startedAt: Date
   endsAt: Date
   isOver: number
@@ -49,7 +56,7 @@ type SessionRow = {
  */
 export async function knownSession(idHash: string, idleMinutes: number): Promise<KnownSession | null> {
   const rows = await select<SessionRow>(
-    `SELECT u.id AS userId, u.name, u.email, u.role, s.started_at AS startedAt, s.ends_at AS endsAt,
+    `SELECT u.id AS userId, u.name, u.email, u.role, u.supervised, s.started_at AS startedAt, s.ends_at AS endsAt,
        (s.ends_at <= UTC_TIMESTAMP(3) OR s.seen_at <= UTC_TIMESTAMP(3) - INTERVAL :idleMinutes MINUTE) AS isOver,
        s.seen_at > UTC_TIMESTAMP(3) - INTERVAL 1 MINUTE AS isFresh, u.one_time_until IS NOT NULL AS owesPassword,
        w.id AS wardId, w.name AS wardName, r.rev
@@ -64,7 +71,13 @@ export async function knownSession(idHash: string, idleMinutes: number): Promise
   const [first] = rows
   if (first === undefined) return null
   return {
-    user: { id: first.userId, name: first.name, email: first.email, role: first.role },
+    user: {
+      id: first.userId,
+      name: first.name,
+      email: first.email,
+      role: first.role,
+      isSupervised: first.supervised === 1,
+    },
     wards: rows.flatMap(({ wardId, wardName, rev }) =>
       wardId ? [{ id: wardId, name: wardName ?? '', rev: rev ?? 0 }] : [],
     ),

@@ -33,6 +33,8 @@ export type Stay = {
   readonly dischargeReason: string | null
   readonly dischargeNote: string | null
   readonly entryCount: number
+  /** How many countersignatures its entries have had. */
+  readonly countersignCount: number
 }
 
 export type StayWithPatient = { readonly stay: Stay; readonly patient: Patient }
@@ -54,7 +56,8 @@ export async function stayRows(
   const rows = await select<Flat>(
     `SELECT s.id AS stayId, s.patient_id AS patientId, s.ward_id AS wardId, w.name AS wardName, s.bed_id AS bedId,
        b.label AS bedLabel, s.admitted_at AS admittedAt, s.discharged_at AS dischargedAt,
-       s.discharge_reason AS dischargeReason, s.discharge_note AS dischargeNote, s.entry_count AS entryCount, ${patientColumns}
+       s.discharge_reason AS dischargeReason, s.discharge_note AS dischargeNote, s.entry_count AS entryCount,
+       s.countersign_count AS countersignCount, ${patientColumns}
      FROM stays s JOIN patients p ON p.id = s.patient_id JOIN wards w ON w.id = s.ward_id JOIN beds b ON b.id = s.bed_id
      ${rest}`,
     replacements,
@@ -76,6 +79,7 @@ function stayOf(row: Flat): Stay {
     dischargeReason: row.dischargeReason,
     dischargeNote: row.dischargeNote,
     entryCount: row.entryCount,
+    countersignCount: row.countersignCount,
   }
 }
 

@@ -16,6 +16,8 @@ export type PersonDetails = {
   readonly email: string
   readonly role: Role
   readonly wardIds: readonly string[]
+  /** What they chart waits for a countersignature. */
+  readonly supervised: boolean
 }
 
 /** A password that somebody else made: it works for this many hours and opens only the page that replaces it. */
@@ -33,14 +35,14 @@ export class LastAdministrator extends Error {
 
 /** Adds somebody with a one-time password and returns their id. Throws `EmailTaken`. */
 export async function addPerson(details: PersonDetails, { passwordHash, hours }: OneTime, by: Trace): Promise<string> {
-  const { name, email, role, wardIds } = details
+  const { wardIds, ...columns } = details
   const id = uuidv7()
   const addedBy = by.actor?.id ?? null
   await withOwnEmail(() =>
     transact(async transaction => {
       const addedAt = await databaseNow(transaction)
       const fresh = { passwordHash, passwordSetAt: addedAt, oneTimeUntil: hoursAfter(addedAt, hours) }
-      await UserRow.create({ id, name, email, role, ...fresh, addedAt, addedBy }, { transaction })
+      await UserRow.create({ id, ...columns, ...fresh, addedAt, addedBy }, { transaction })
       await addToWards(id, wardIds, addedBy, addedAt, transaction)
       await logAccess(aboutPerson('added person', id, by), transaction)
     }),

@@ -11,6 +11,7 @@ export type Person = {
   name: string
   email: string
   role: Role
+  supervised: boolean
   addedAt: Date
   disabledAt: Date | null
   oneTimeUntil: Date | null
@@ -18,10 +19,14 @@ export type Person = {
   wards: readonly { id: string; name: string }[]
 }
 
-type PersonRow = Omit<Person, 'wards'> & { wardId: string | null; wardName: string | null }
+type PersonRow = Omit<Person, 'wards' | 'supervised'> & {
+  supervised: number
+  wardId: string | null
+  wardName: string | null
+}
 
 const selectPeople = (where: string) => `
-  SELECT u.id, u.name, u.email, u.role, u.added_at AS addedAt, u.disabled_at AS disabledAt,
+  SELECT u.id, u.name, u.email, u.role, u.supervised, u.added_at AS addedAt, u.disabled_at AS disabledAt,
     u.one_time_until AS oneTimeUntil, (SELECT MAX(s.seen_at) FROM sessions s WHERE s.user_id = u.id) AS lastSeenAt,
     w.id AS wardId, w.name AS wardName
   FROM users u LEFT JOIN ward_members m ON m.user_id = u.id LEFT JOIN wards w ON w.id = m.ward_id
@@ -51,8 +56,8 @@ export async function person(id: string): Promise<Person | null> {
 
 function gathered(rows: readonly PersonRow[]): readonly Person[] {
   const byId = new Map<string, Person>()
-  for (const { wardId, wardName, ...one } of rows) {
-    const known = byId.get(one.id) ?? { ...one, wards: [] }
+  for (const { wardId, wardName, supervised, ...one } of rows) {
+    const known = byId.get(one.id) ?? { ...one, supervised: supervised === 1, wards: [] }
     const wards = wardId === null ? known.wards : [...known.wards, { id: wardId, name: wardName ?? '' }]
     byId.set(one.id, { ...known, wards })
   }

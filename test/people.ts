@@ -46,23 +46,29 @@ export async function aPatientOn(wardId: string, familyName = 'Okafor'): Promise
 }
 
 /** What a test may say about somebody; the rest is a nurse of no ward who has chosen their password. */
-export type Somebody = { readonly name?: string; readonly role?: Role; readonly wardIds?: readonly string[] }
+export type Somebody = {
+  readonly name?: string
+  readonly role?: Role
+  readonly wardIds?: readonly string[]
+  readonly isSupervised?: boolean
+}
 
 /** Adds somebody who may sign in with `password`, and returns them as if they had. */
-export async function aPerson({ name = 'Ngozi Adeyemi', role = 'nurse', wardIds = [] }: Somebody = {}) {
+export async function aPerson(somebody: Somebody = {}) {
+  const { name = 'Ngozi Adeyemi', role = 'nurse', wardIds = [], isSupervised = false } = somebody
   const id = uuidv7()
   const email = `${name.toLowerCase().replaceAll(' ', '.')}@ward.example`
   await owner.query(
-    `INSERT INTO users (id, name, email, role, password_hash, password_set_at, added_at)
-     VALUES (:id, :name, :email, :role, :passwordHash, UTC_TIMESTAMP(3), UTC_TIMESTAMP(3))`,
-    { replacements: { id, name, email, role, passwordHash } },
+    `INSERT INTO users (id, name, email, role, supervised, password_hash, password_set_at, added_at)
+     VALUES (:id, :name, :email, :role, :isSupervised, :passwordHash, UTC_TIMESTAMP(3), UTC_TIMESTAMP(3))`,
+    { replacements: { id, name, email, role, isSupervised, passwordHash } },
   )
   for (const wardId of wardIds) {
     await owner.query('INSERT INTO ward_members (user_id, ward_id, added_at) VALUES (:id, :wardId, UTC_TIMESTAMP(3))', {
       replacements: { id, wardId },
     })
   }
-  const user: CurrentUser = { id, name, email, role, wardIds, sessionHash: hashOf(id) }
+  const user: CurrentUser = { id, name, email, role, wardIds, sessionHash: hashOf(id), isSupervised }
   return user
 }
 

@@ -1,5 +1,5 @@
 import { expect, test } from 'vitest'
-import { type Act, acts, can, canByGrant, type Role, roles } from './permissions.ts'
+import { type Act, acts, authorOf, can, canByGrant, type Role, roles } from './permissions.ts'
 
 const inside = 'ward-inside'
 const outside = 'ward-outside'
@@ -20,6 +20,9 @@ const expected: Record<Act, string> = {
   'edit patient details': 'w-ww---',
   'set care plans': '--ww---',
   'see tubes of wards': '--ww---',
+  countersign: 'wwww---',
+  'see competence gaps': '--wwe--',
+  'sign off competence': '----e--',
   'assign patients': '--w----',
   'see policy': 'wwwweew',
   'manage policy': '--ww---',
@@ -67,4 +70,26 @@ test('a grant opens nothing for somebody who may not look elsewhere', () => {
   for (const role of ['educator', 'administrator', 'observer'] as const) {
     expect(acts.filter(act => canByGrant({ role, wardIds: [inside] }, act))).toEqual([])
   }
+})
+
+test('somebody under supervision charts and puts right their own, and decides nothing', () => {
+  for (const role of ['nurse', 'charge nurse', 'tracheostomy specialist'] as const) {
+    const student = { role, wardIds: [inside], isSupervised: true }
+    expect(acts.filter(act => can(student, act, inside))).toEqual([
+      'see ward',
+      'see patients',
+      'chart care',
+      'correct own entries',
+      'retract own entries',
+      'see policy',
+      'see measures',
+      'see catalogue',
+    ])
+    expect(acts.filter(act => canByGrant(student, act))).toEqual([])
+  }
+})
+
+test('the record keeps that somebody charted under supervision', () => {
+  expect(authorOf({ id: '1', role: 'nurse', isSupervised: true })).toEqual({ id: '1', role: 'nurse under supervision' })
+  expect(authorOf({ id: '1', role: 'nurse', isSupervised: false })).toEqual({ id: '1', role: 'nurse' })
 })

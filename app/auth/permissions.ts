@@ -1,3 +1,5 @@
+import { supervisedRole } from '../care/supervision.ts'
+
 /** What somebody is at work. It is stored with every act, as it was at that moment. */
 export const roles = [
   'nurse',
@@ -18,6 +20,8 @@ export type CurrentUser = {
   readonly role: Role
   readonly wardIds: readonly string[]
   readonly sessionHash: string
+  /** Charts under supervision, such as a student: what they chart waits for a countersignature. */
+  readonly isSupervised: boolean
 }
 
 /** `own wards`: only where the person is a member. `everywhere`: no ward is asked. */
@@ -64,6 +68,9 @@ const permissions = {
   'edit patient details': { ...nursing, 'tracheostomy specialist': 'own wards' },
   'set care plans': leading,
   'see tubes of wards': leading,
+  countersign: bedside,
+  'see competence gaps': { ...leading, educator: 'everywhere' },
+  'sign off competence': { educator: 'everywhere' },
   'assign patients': { 'charge nurse': 'own wards' },
   'see policy': {
     ...bedside,
@@ -97,11 +104,27 @@ export const acts = Object.keys(permissions) as readonly Act[]
 /** What a reason opens on another ward's patient: the bedside, not that ward's decisions. */
 const actsByGrant: readonly Act[] = ['see patients', 'chart care', 'correct own entries', 'retract own entries']
 
+/** What is left to somebody under supervision of all that their role may do. */
+const actsUnderSupervision: readonly Act[] = [
+  'see ward',
+  'see patients',
+  'chart care',
+  'correct own entries',
+  'retract own entries',
+  'see policy',
+  'see measures',
+  'see catalogue',
+]
+
+/** Whoever asks; without `isSupervised` the answer is that of a registered colleague in the role. */
+type Asker = Pick<CurrentUser, 'role' | 'wardIds'> & { readonly isSupervised?: boolean }
+
 /**
  * Whether the person may do this, in this ward. Without a ward it answers for at least one of their wards, which is
  * enough to show a link and never enough to let an action through.
  */
-export function can(user: Pick<CurrentUser, 'role' | 'wardIds'>, act: Act, wardId?: string): boolean {
+export function can(user: Asker, act: Act, wardId?: string): boolean {
+  if (user.isSupervised && !actsUnderSupervision.includes(act)) return false
   const allowance: Allowance = permissions[act]
   const reach = allowance[user.role]
   if (reach === undefined) return false
@@ -110,6 +133,14 @@ export function can(user: Pick<CurrentUser, 'role' | 'wardIds'>, act: Act, wardI
 }
 
 /** Whether the person may do this for a patient of a ward that is not theirs, once they have given a reason. */
-export function canByGrant(user: Pick<CurrentUser, 'role' | 'wardIds'>, act: Act): boolean {
+export function canByGrant(user: Asker, act: Act): boolean {
   return can(user, 'open patients elsewhere') && actsByGrant.includes(act)
+}
+
+/** Who signs, in the role that the record keeps of them: under supervision it says so for good. */
+export function authorOf({ id, role, isSupervised }: Pick<CurrentUser, 'id' | 'role' | 'isSupervised'>): {
+  readonly id: string
+  readonly role: string
+} {
+  return { id, role: isSupervised ? supervisedRole(role) : role }
 }

@@ -12,4 +12,5 @@ export const personSchema = z.object({
   email: emailField,
   role: z.enum(roles, { error: 'Choose a role' }),
   wardIds: z.array(z.uuid()).default([]),
+  supervised: z.boolean().default(false),
 })

@@ -8,7 +8,7 @@ import type { Lane } from './lanes.ts'
 import type { AnySetting, Values } from './policy.ts'
 import type { PolicyCheck } from './policy-check.ts'
 import type { RunningAct } from './running-act.ts'
-import type { Skill } from './skills.ts'
+import type { SigningNeeds } from './signing-needs.ts'
 import type { PlannedUse, Used } from './supply.ts'
 import type { Warning } from './warning.ts'
 
@@ -91,7 +91,9 @@ export interface Charted<Slug extends string, Schema extends z.ZodObject> {
   readonly upgrades?: readonly ((old: never) => unknown)[]
 }
 
-export interface CareKind<Slug extends string, Schema extends z.ZodObject> extends Charted<Slug, Schema> {
+export interface CareKind<Slug extends string, Schema extends z.ZodObject>
+  extends Charted<Slug, Schema>,
+    SigningNeeds<z.output<Schema>> {
   readonly title: string
   /** The words on the button: "Chart pressure". */
   readonly chartWords: string
@@ -101,12 +103,6 @@ export interface CareKind<Slug extends string, Schema extends z.ZodObject> exten
   /** The sentence on the timeline and before charting. */
   summary(data: z.output<Schema>): string
   readonly act?: ChartingAct
-  /** A final act, such as taking a tube out: the form asks for the signer's own password again. */
-  readonly needsFreshSignIn?: boolean
-  /** The skill that whoever does this is signed off for. Its lack warns and is kept with the entry; it never refuses. */
-  readonly needsCompetence?: Skill
-  /** Whether this is an act of two people: the form then asks for the second one, who signs on the same screen. */
-  twoPeople?(data: z.output<Schema>): boolean
   /** Charted by doing it on a page of its own, at this address below the patient's, and not on a form. */
   readonly page?: string
   /** What must be read wherever this is charted. Short sentences. */

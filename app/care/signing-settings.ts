@@ -24,4 +24,26 @@ export const secondPersonSigns = switchSetting({
   },
 })
 
-export const signingSettings = [freshSignIn, secondPersonSigns]
+export const competenceMonths = numberSetting({
+  name: 'competence-months',
+  label: 'A sign-off of a skill holds for',
+  unit: 'months',
+  default: 12,
+  min: 3,
+  max: 36,
+  affects: 'Staff competence: the day on which a new sign-off runs out.',
+  source: { says: 'Yearly in many hospitals; no published number found', standing: 'product proposal' },
+})
+
+export const competenceNotice = numberSetting({
+  name: 'competence-notice',
+  label: 'A sign-off that runs out is listed ahead by',
+  unit: 'days',
+  default: 30,
+  min: 7,
+  max: 120,
+  affects: 'Staff competence: the list of what runs out soon.',
+  source: { says: 'Time to arrange an assessment; no published number found', standing: 'product proposal' },
+})
+
+export const signingSettings = [freshSignIn, secondPersonSigns, competenceMonths, competenceNotice]

@@ -19,3 +19,21 @@ export const skills = {
 
 /** A skill by its stored name. */
 export type Skill = keyof typeof skills
+
+/** Levels of a sign-off: works under supervision, works alone, or works alone and assesses others. */
+export const levels = {
+  supervised: 'Under supervision',
+  independent: 'Independent',
+  assessor: 'Independent, and assesses others',
+} as const
+export type Level = keyof typeof levels
+
+/** How somebody stands in a skill: `supervised` is signed off, but not to work alone. */
+export type CompetenceStanding = 'held' | 'supervised' | 'out of date' | 'missing'
+
+export const standingWords = {
+  held: 'signed off',
+  supervised: 'signed off under supervision only',
+  'out of date': 'sign-off out of date',
+  missing: 'no sign-off',
+} as const satisfies Readonly<Record<CompetenceStanding, string>>

@@ -17,6 +17,7 @@ import { useChartLive } from './chart-live.ts'
 import { OwnSignature, SecondPerson } from './chart-signing.tsx'
 import { drawnOf } from './drawn-fields.ts'
 import { fillForm } from './fill-form.ts'
+import { Notice } from './notice.tsx'
 import { Warnings } from './warnings.tsx'
 
 export interface ChartFormProps {
@@ -28,6 +29,7 @@ export interface ChartFormProps {
       readonly password: boolean
       readonly email: string
       readonly second: 'offered' | 'asked' | 'expected'
+      readonly lacks: string | null
     }
     readonly calendar: Calendar
     readonly typed: Typed
@@ -76,6 +78,11 @@ export function ChartForm({ kind, view, answer, words, cancelHref, reasonAfterHo
       <input type="hidden" name="at" value={new Date(live.shownAt).toISOString()} />
       <div className="grid gap-5 px-4 md:px-6">
         <ChartErrors kind={kind} answer={answer} />
+        {view.signing.lacks && (
+          <Notice tone="amber" action="Have a colleague with this skill beside you.">
+            {`${view.signing.lacks} What was done is charted all the same, and the entry says so.`}
+          </Notice>
+        )}
         {children?.(answers => form.current && fillForm(form.current, answers))}
         <CareFields
           fields={drawnOf(kind, { typed, errors, notOffered: view.notOffered })}

@@ -3,7 +3,7 @@ import { ChoiceField } from './choice-field.tsx'
 import { TextField } from './text-field.tsx'
 import { chosenOf, textOf } from './text-of.ts'
 
-type PersonFieldName = 'name' | 'email' | 'role' | 'wardIds'
+type PersonFieldName = 'name' | 'email' | 'role' | 'wardIds' | 'supervised'
 
 export interface PersonFieldsProps {
   readonly fields: Readonly<Record<PersonFieldName, FieldMetadata<unknown>>>
@@ -12,7 +12,7 @@ export interface PersonFieldsProps {
 }
 
 /** Name, address, role and wards, as for a new person and for one who changes. */
-export function PersonFields({ fields: { name, email, role, wardIds }, roles, wards }: PersonFieldsProps) {
+export function PersonFields({ fields: { name, email, role, wardIds, supervised }, roles, wards }: PersonFieldsProps) {
   return (
     <>
       <TextField key={name.key} {...textOf(name)} label="Name" hint="As colleagues know them" autoComplete="off" />
@@ -29,6 +29,22 @@ export function PersonFields({ fields: { name, email, role, wardIds }, roles, wa
         options={Object.fromEntries(wards.map(ward => [ward.id, ward.name]))}
         several
       />
+      <div>
+        <label className="flex min-h-11 items-center gap-3 font-semibold">
+          <input
+            key={supervised.key}
+            type="checkbox"
+            name={supervised.name}
+            defaultChecked={supervised.defaultChecked}
+            aria-describedby={`${supervised.id}-description`}
+            className="size-5 flex-none"
+          />
+          Charts under supervision
+        </label>
+        <p id={`${supervised.id}-description`} className="text-sm text-ink2">
+          For students and assistants: what they chart counts, and waits for a registered colleague to countersign it.
+        </p>
+      </div>
     </>
   )
 }

@@ -16,6 +16,8 @@ export interface TimelineEntryView {
   /** Who corrected or retracted it, when and why. */
   readonly statusSays?: string | undefined
   readonly outOfRange?: boolean
+  readonly countersign?: { readonly says: string; readonly waits: boolean } | null
+  readonly second?: string | null
   readonly href?: string | undefined
 }
 
@@ -27,7 +29,20 @@ export interface TimelineEntryProps {
 
 /** One charted act, as an item of a list. What was corrected or retracted stays readable, struck through. */
 export function TimelineEntry({ entry, children }: TimelineEntryProps) {
-  const { time, title, sentence, author, role, late, status, statusSays, outOfRange = false, href } = entry
+  const {
+    time,
+    title,
+    sentence,
+    author,
+    role,
+    late,
+    status,
+    statusSays,
+    outOfRange = false,
+    countersign,
+    second,
+    href,
+  } = entry
   const struck = status === 'final' ? '' : 'line-through decoration-1'
   return (
     <li className="grid grid-cols-[3.5rem_1rem_1fr] gap-x-2 gap-y-0.5 border-t border-hair px-4 py-2.5 first:border-0 md:grid-cols-[3.5rem_1rem_1fr_12rem]">
@@ -40,6 +55,12 @@ export function TimelineEntry({ entry, children }: TimelineEntryProps) {
           </span>{' '}
           {late && <Tag>{late}</Tag>} {status !== 'final' && <Tag tone="due">{status}</Tag>}
         </p>
+        {countersign && (
+          <p className="text-sm text-ink2">
+            {countersign.waits ? <Tag tone="due">{countersign.says}</Tag> : countersign.says}
+          </p>
+        )}
+        {second && <p className="text-sm text-ink2">{`Second person: ${second}`}</p>}
         {statusSays && <p className="text-sm text-ink2">{statusSays}</p>}
         {children}
       </div>

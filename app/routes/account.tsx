@@ -7,7 +7,7 @@ import { replacedPassword } from '#app/auth/new-password.server.ts'
 import { newPasswordSchema } from '#app/auth/new-password.ts'
 import { ownSession, signedIn } from '#app/auth/signed-in.server.ts'
 import { traceOf } from '#app/auth/trace.server.ts'
-import { Button } from '#app/components/button.tsx'
+import { Button, LinkButton } from '#app/components/button.tsx'
 import { Card } from '#app/components/card.tsx'
 import { ErrorSummary } from '#app/components/error-summary.tsx'
 import { Notice } from '#app/components/notice.tsx'
@@ -62,6 +62,11 @@ export default function Account({ loaderData, actionData }: Route.ComponentProps
         <PasswordForm email={person.email} lastResult={actionData ?? null} />
       </Card>
       {!owesPassword && <Sessions {...loaderData} />}
+      {!owesPassword && (
+        <div>
+          <LinkButton href="/competence">Competence</LinkButton>
+        </div>
+      )}
     </div>
   )
 }

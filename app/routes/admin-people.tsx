@@ -1,5 +1,5 @@
 import { data, Link } from 'react-router'
-import { can } from '#app/auth/permissions.ts'
+import { authorOf, can } from '#app/auth/permissions.ts'
 import { signedIn } from '#app/auth/signed-in.server.ts'
 import { LinkButton } from '#app/components/button.tsx'
 import { Card } from '#app/components/card.tsx'
@@ -17,8 +17,8 @@ export async function loader({ context }: Route.LoaderArgs) {
   const everybody = await people()
   return {
     zone: env.hospitalTimeZone,
-    people: everybody.map(({ id, name, email, role, wards, lastSeenAt, disabledAt, oneTimeUntil }) => ({
-      ...{ id, name, email, role, lastSeenAt },
+    people: everybody.map(({ id, name, email, role, supervised, wards, lastSeenAt, disabledAt, oneTimeUntil }) => ({
+      ...{ id, name, email, lastSeenAt, role: authorOf({ id, role, isSupervised: supervised }).role },
       wards: wards.map(ward => ward.name).join(', '),
       state: stateOf(disabledAt, oneTimeUntil),
     })),

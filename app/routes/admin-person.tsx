@@ -27,10 +27,10 @@ export async function loader({ params: { userId }, context }: Route.LoaderArgs) 
   if (!can(signedIn(context), 'manage people')) throw data('People are kept by the administrators.', 403)
   const [found, wards] = await Promise.all([person(userId), allWards()])
   if (found === null) throw data('There is no such person.', 404)
-  const { name, email, role, disabledAt, oneTimeUntil } = found
+  const { name, email, role, supervised, disabledAt, oneTimeUntil } = found
   const wardIds = found.wards.map(ward => ward.id)
   return {
-    person: { name, email, role, wardIds },
+    person: { name, email, role, wardIds, supervised },
     isDisabled: disabledAt !== null,
     owesPassword: oneTimeUntil !== null,
     wards: wards

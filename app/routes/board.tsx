@@ -30,12 +30,13 @@ export async function loader({ params: { wardId }, context, request, url }: Rout
     charts: can(user, 'chart care', wardId),
     admits: can(user, 'admit patients', wardId),
     seesAccess: can(user, 'see access log', wardId),
+    countersigns: can(user, 'countersign', wardId),
   }
 }
 
 /** The ward at a glance: who is late, how late, and what is due next. */
 export default function WardBoard({ loaderData }: Route.ComponentProps) {
-  const { served, order, wards, charts, admits, seesAccess } = loaderData
+  const { served, order, wards, charts, admits, seesAccess, countersigns } = loaderData
   const { data: board, now, staleSince } = useLive(`/api/wards/${served.data.wardId}/board`, served)
   const patients = livePatients(board, now, order)
   const here = `/wards/${board.wardId}`
@@ -49,6 +50,9 @@ export default function WardBoard({ loaderData }: Route.ComponentProps) {
           <LinkButton href={order === 'bed' ? `${here}/board` : `${here}/board?sort=bed`}>
             {order === 'bed' ? 'Sort by lateness' : 'Sort by bed'}
           </LinkButton>
+          {countersigns && board.toCountersign > 0 && (
+            <LinkButton href="/countersign">{`${board.toCountersign} to countersign`}</LinkButton>
+          )}
           {admits && <LinkButton href={`${here}/admit`}>Admit</LinkButton>}
           {seesAccess && <LinkButton href={`${here}/access`}>Who looked</LinkButton>}
         </div>

@@ -1,5 +1,6 @@
 import { data, redirect } from 'react-router'
 import { patientGate } from '#app/auth/patient-access.server.ts'
+import { authorOf } from '#app/auth/permissions.ts'
 import { ownSession, signedIn } from '#app/auth/signed-in.server.ts'
 import { traceOf } from '#app/auth/trace.server.ts'
 import { findKind } from '#app/care/kinds.ts'
@@ -49,7 +50,7 @@ export async function action({ params, context, request, url }: Route.ActionArgs
   const check = await checked(sent)
   if (!check.ok) return data(check.answer, check.status)
   const { id, performedAt, witnessId, reason, care } = check.chart
-  const entry = { id, kind, stayId, performedAt, recordedBy: user, witnessId, reason, data: care }
+  const entry = { id, kind, stayId, performedAt, recordedBy: authorOf(user), witnessId, reason, data: care }
   const charting = await chartedWith(entry, photographs.added, check.alongside, also => addEntry(entry, also))
   if (charting.outcome === 'charted' || charting.outcome === 'already charted') {
     return redirect(afterCharting(params.patientId, charting.entry.id, check.isUrgent))

@@ -1,4 +1,5 @@
 import { data, redirect } from 'react-router'
+import { authorOf } from '#app/auth/permissions.ts'
 import { findKind } from '#app/care/kinds.ts'
 import { ChartForm } from '#app/components/chart-form.tsx'
 import { CorrectReason, EntryHead, Replaced } from '#app/components/entry-head.tsx'
@@ -41,7 +42,7 @@ export async function action({ params, context, request, url }: Route.ActionArgs
   const correction = {
     ...{ id, kind, performedAt, witnessId, reason, data: check.chart.care },
     stayId: entry.stayId,
-    recordedBy: asked.user,
+    recordedBy: authorOf(asked.user),
     supersedes: entry.id,
   }
   const charting = await chartedWith(correction, photographs.added, check.alongside, also =>

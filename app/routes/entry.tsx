@@ -31,6 +31,12 @@ export default function Entry({ loaderData: entry }: Route.ComponentProps) {
             {stands && <Tag tone="due">{stands}</Tag>}
           </div>
           <Thumbnails ids={entry.photographs} of={entry.title} struck={stands !== null} />
+          {entry.countersign && (
+            <p className="flex flex-wrap items-center gap-3">
+              {entry.countersign.waits ? <Tag tone="due">{entry.countersign.says}</Tag> : entry.countersign.says}
+              {entry.countersign.mayDo && <LinkButton href="/countersign">Countersign</LinkButton>}
+            </p>
+          )}
           <Warnings warnings={entry.warnings} />
           <EntryActs entry={entry} />
           <div className="grid items-start gap-4 md:grid-cols-2">

@@ -1,6 +1,6 @@
 import { Outlet, useLocation } from 'react-router'
 import { IDLE_LIMIT_MINUTES, WARNING_MINUTES } from '#app/auth/limits.ts'
-import { type Act, can } from '#app/auth/permissions.ts'
+import { type Act, authorOf, can } from '#app/auth/permissions.ts'
 import { ownSession, signedIn, signedInOnly } from '#app/auth/signed-in.server.ts'
 import { IdleWatch } from '#app/components/idle-watch.tsx'
 import { Notice } from '#app/components/notice.tsx'
@@ -25,7 +25,7 @@ export async function loader({ context, request }: Route.LoaderArgs) {
   const ward = wards[0] ?? null
   const sectionsOf = (act: Act, sections: readonly Section[]) => (can(user, act) ? sections : [])
   return {
-    person: { name: user.name, role: user.role },
+    person: { name: user.name, role: authorOf(user).role },
     ...(await reviewOfWards(wards, new Date())),
     ward: ward && { name: ward.name },
     now: Date.now(),
@@ -42,6 +42,7 @@ export async function loader({ context, request }: Route.LoaderArgs) {
       ...sectionsOf('see catalogue', [{ label: 'Catalogue', href: '/catalogue', under: '/catalogue' }]),
       { label: 'Scan', href: '/scan', under: '/scan' },
       ...sectionsOf('trace lots', [{ label: 'Lots', href: '/lots', under: '/lots' }]),
+      ...sectionsOf('see competence gaps', [{ label: 'Competence', href: '/competence', under: '/competence' }]),
       ...sectionsOf('see policy', [{ label: 'Policy', href: '/policy', under: '/policy' }]),
       ...sectionsOf('manage people', [{ label: 'People', href: '/admin/people', under: '/admin/people' }]),
       ...sectionsOf('manage wards', [{ label: 'Wards', href: '/admin/wards', under: '/admin/wards' }]),

@@ -23,6 +23,7 @@ function aBoard(beds: Readonly<Record<string, readonly TaskView[]>>): Board {
     zone: 'Europe/London',
     shiftEndsAt: ms('15:00'),
     policy: 'Policy',
+    toCountersign: 0,
     patients: Object.entries(beds).map(([bed, tasks]) => ({
       patientId: bed,
       bed,

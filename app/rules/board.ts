@@ -23,6 +23,8 @@ export interface Board {
   readonly shiftEndsAt: number
   /** Which policy is in force, in words; null when the ward has none that was reviewed. */
   readonly policy: string | null
+  /** Entries charted under supervision that nobody has countersigned. */
+  readonly toCountersign: number
   readonly patients: readonly BoardPatient[]
 }
 

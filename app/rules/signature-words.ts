@@ -1,12 +1,12 @@
 import type { AnyCareKind } from '../care/kind.ts'
-import { type Skill, skills } from '../care/skills.ts'
+import { type CompetenceStanding, type Skill, skills, standingWords } from '../care/skills.ts'
 
 /** How an entry was signed, as it is stored beside it. */
 export interface SignatureFact {
   readonly part: 'author' | 'second person'
   readonly role: string
   readonly proof: 'password' | 'recent sign-in' | 'session' | 'not given'
-  readonly competence: 'held' | 'supervised' | 'out of date' | 'missing' | null
+  readonly competence: CompetenceStanding | null
 }
 
 const proofs = {
@@ -33,17 +33,10 @@ export function secondPersonWords(
   return `${entry.witnessName}, named by ${entry.recordedByName}, not signed`
 }
 
-const standings = {
-  held: 'signed off',
-  supervised: 'signed off under supervision only',
-  'out of date': 'sign-off out of date',
-  missing: 'no sign-off',
-} as const
-
 /** `Tube change, performing: sign-off out of date`, as it was when the act was charted; null where the act asks for none. */
 export function competenceWords(kind: AnyCareKind | undefined, signatures: readonly SignatureFact[]): string | null {
   const stood = signatures.find(({ part }) => part === 'author')?.competence
   const skill: Skill | undefined = kind?.needsCompetence
   if (!stood) return null
-  return `${skill ? `${skills[skill]}: ` : ''}${standings[stood]}`
+  return `${skill ? `${skills[skill]}: ` : ''}${standingWords[stood]}`
 }

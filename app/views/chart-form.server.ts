@@ -1,6 +1,6 @@
 import { v7 as uuidv7 } from 'uuid'
 import { takeDraft } from '#app/auth/draft.server.ts'
-import type { CurrentUser } from '#app/auth/permissions.ts'
+import { authorOf, type CurrentUser } from '#app/auth/permissions.ts'
 import type { NameLists } from '#app/care/field-meta.ts'
 import type { Gauge } from '#app/care/gauge.ts'
 import { lateReasonAfter } from '#app/care/general-settings.ts'
@@ -74,7 +74,7 @@ export async function chartForm(kind: AnyCareKind, opening: Opening): Promise<Ch
     ...scannedAnswers(kind, url),
   }
   return {
-    ...frameOf(kind, opening),
+    ...(await frameOf(kind, opening)),
     id: uuidv7(),
     typed: draft ? restored(kind, draft, care.ward.zone) : opened,
     isRestored: draft !== null,
@@ -87,14 +87,14 @@ export async function chartForm(kind: AnyCareKind, opening: Opening): Promise<Ch
 }
 
 /** What every form of a kind is drawn with, whatever it opens with. */
-export function frameOf(kind: AnyCareKind, { care, user, now, signedInAt }: Omit<Opening, 'url'>) {
+export async function frameOf(kind: AnyCareKind, { care, user, now, signedInAt }: Omit<Opening, 'url'>) {
   const { context, ward } = care
   const { label, units } = personalSettings(context)
   const began = localDay(care.record.stay.admittedAt, ward.zone)
   return {
     kind: kind.slug,
     signer: signerOf(user),
-    signing: signingAsk(kind, { user, context, now, signedInAt }),
+    signing: await signingAsk(kind, { user, context, now, signedInAt, zone: ward.zone }),
     calendar: calendarOf(care, now),
     gauges: context && !isTooYoung(context) ? (kind.gauges?.(context) ?? []) : [],
     notOffered: context ? (kind.notOffered?.(context) ?? {}) : {},
@@ -110,8 +110,8 @@ export function frameOf(kind: AnyCareKind, { care, user, now, signedInAt }: Omit
 }
 
 /** Who signs, as a form carries it. */
-export function signerOf({ id, name, role }: CurrentUser): FormSigner {
-  return { id, name, role }
+export function signerOf(user: CurrentUser): FormSigner {
+  return { ...authorOf(user), name: user.name }
 }
 
 /** What the answer to "when" is held against. */

@@ -1,12 +1,16 @@
 import { type Confirmation, confirmed } from '#app/auth/own-sign-in.server.ts'
-import type { CurrentUser } from '#app/auth/permissions.ts'
+import { authorOf, type CurrentUser } from '#app/auth/permissions.ts'
 import type { AnyCareKind, CareContext } from '#app/care/kind.ts'
 import { freshSignIn, secondPersonSigns } from '#app/care/signing-settings.ts'
+import { type CompetenceStanding, skills, standingWords } from '#app/care/skills.ts'
 import type { Chartable, FormErrors } from '#app/charting/assess.ts'
+import { standingIn } from '#app/rules/competence.ts'
 import { minutes, since } from '#app/time/duration.ts'
+import { type LocalDay, localDay, type Zone } from '#app/time/zone.ts'
 import type { Trace } from '#database/access-log.server.ts'
+import { signOffsOf } from '#database/competences.server.ts'
 import type { Alongside } from '#database/entries.server.ts'
-import { type Proof, type Signature, withSignatures } from '#database/entry-signatures.server.ts'
+import { type Signature, withSignatures } from '#database/entry-signatures.server.ts'
 import { person } from '#database/users.server.ts'
 
 /** What a form asks of those who sign it. */
@@ -17,9 +21,12 @@ export interface SigningAsk {
   readonly email: string
   /** The second person: asked for where the kind is an act of two people; expected where the policy says so. */
   readonly second: 'offered' | 'asked' | 'expected'
+  /** What the signer lacks for this act, in words; it never refuses. */
+  readonly lacks: string | null
 }
 
-interface Asking {
+export interface Asking {
+  readonly zone: Zone
   readonly user: CurrentUser
   readonly context: CareContext | null
   readonly now: Date
@@ -27,13 +34,28 @@ interface Asking {
 }
 
 /** What the form of a kind asks of those who sign it. */
-export function signingAsk(kind: AnyCareKind, { user, context, now, signedInAt }: Asking): SigningAsk {
+export async function signingAsk(
+  kind: AnyCareKind,
+  { user, context, now, signedInAt, zone }: Asking,
+): Promise<SigningAsk> {
   const expected = context?.values.of(secondPersonSigns) ?? secondPersonSigns.default
   return {
     password: kind.needsFreshSignIn === true && !isFresh(signedInAt, context, now),
     email: user.email,
     second: kind.twoPeople === undefined ? 'offered' : expected ? 'expected' : 'asked',
+    lacks: lackWords(kind, await competenceFor(kind, user.id, localDay(now, zone))),
   }
+}
+
+/** How somebody stands in the skill that a kind asks for; null when it asks for none. */
+async function competenceFor(kind: AnyCareKind, userId: string, today: LocalDay): Promise<CompetenceStanding | null> {
+  if (!kind.needsCompetence) return null
+  return standingIn(await signOffsOf([userId]), kind.needsCompetence, today)
+}
+
+function lackWords(kind: AnyCareKind, standing: CompetenceStanding | null): string | null {
+  if (!kind.needsCompetence || standing === null || standing === 'held') return null
+  return `${skills[kind.needsCompetence]}: ${standingWords[standing]}.`
 }
 
 function isFresh(signedInAt: Date, context: CareContext | null, now: Date): boolean {
@@ -54,6 +76,7 @@ export interface Signing {
   readonly now: Date
   readonly signedInAt: Date
   readonly by: Trace
+  readonly care: { readonly ward: { readonly zone: Zone } }
 }
 
 interface Part {
@@ -74,19 +97,24 @@ export async function signed(signing: Signing, chart: Chartable, context: CareCo
 }
 
 async function authorPart(signing: Signing, context: CareContext | null): Promise<Part> {
-  const { kind, user, form, now, signedInAt, by } = signing
-  if (!kind.needsFreshSignIn) return {}
-  const signature = (proof: Proof): Part => ({
-    signature: { part: 'author', userId: user.id, role: user.role, proof, competence: null },
-  })
-  if (form.get('unsigned') === 'yes') return signature('not given')
+  const { kind, user, now, care } = signing
+  if (!kind.needsFreshSignIn && !kind.needsCompetence) return {}
+  const proven = kind.needsFreshSignIn ? await ownProof(signing, context) : 'session'
+  if (typeof proven !== 'string') return proven
+  const competence = await competenceFor(kind, user.id, localDay(now, care.ward.zone))
+  return {
+    signature: { part: 'author', userId: user.id, role: authorOf(user).role, proof: proven, competence },
+  }
+}
+
+async function ownProof({ user, form, now, signedInAt, by }: Signing, context: CareContext | null) {
+  if (form.get('unsigned') === 'yes') return 'not given'
   const password = passwordIn(form, 'signerPassword')
   if (password !== '') {
     const answer = await confirmed(user.id, password, by)
-    if (answer.is === 'right') return signature('password')
-    return refused('signerPassword', answer, 'This is not your password')
+    return answer.is === 'right' ? 'password' : refused('signerPassword', answer, 'This is not your password')
   }
-  if (isFresh(signedInAt, context, now)) return signature('recent sign-in')
+  if (isFresh(signedInAt, context, now)) return 'recent sign-in'
   return { errors: { signerPassword: ['Enter your password, to sign this act'] } }
 }
 
@@ -99,7 +127,7 @@ async function secondPart({ form, by }: Signing, { witnessId }: Chartable): Prom
   if (answer.is !== 'right' || second === null) {
     return refused('witnessPassword', answer, `This is not the password of ${second?.name ?? 'that person'}`)
   }
-  const { role } = second
+  const { role } = authorOf({ ...second, isSupervised: second.supervised })
   return { signature: { part: 'second person', userId: witnessId, role, proof: 'password', competence: null } }
 }
 

@@ -59,7 +59,7 @@ export async function checked(sent: Sent): Promise<Checked> {
   }
   if (intent !== 'review') return signedChart(sent, answer)
   const { care, performedAt } = answer.chart
-  const sentence = chartedSentence(kind, care, performedAt, user, calendarOf(sent.care, sent.now))
+  const sentence = chartedSentence(kind, care, performedAt, signerOf(user), calendarOf(sent.care, sent.now))
   return looked({ is: 'reviewed', sentence, warnings: warningsOf(kind, answer), ...keptOf(sent) })
 }
 

@@ -18,7 +18,7 @@ export async function correctForm(
 ) {
   const { zone } = care.ward
   const witnesses = await witnessesFor(care.ward.id, user)
-  const frame = frameOf(kind, { care, user, now, signedInAt })
+  const frame = await frameOf(kind, { care, user, now, signedInAt })
   const draft = await takeDraft(user.id, path)
   const data = readEntry(kind, entry)[0]?.data as Readonly<Record<string, unknown>> | undefined
   const asCharted = { ...typedFrom(data ?? {}), ...momentOf(entry.performedAt, zone), ...witnessOf(entry, witnesses) }

@@ -1,3 +1,4 @@
+import { can } from '#app/auth/permissions.ts'
 import type { StoredEntry } from '#app/care/kind.ts'
 import { findKind } from '#app/care/kinds.ts'
 import { readEntry } from '#app/care/record.ts'
@@ -7,10 +8,10 @@ import { entryWords, lateWords, photographsOf } from '#app/rules/entry-words.ts'
 import { authorWords, competenceWords, type SignatureFact, secondPersonWords } from '#app/rules/signature-words.ts'
 import { policyWords } from '#app/rules/why.ts'
 import { showDateTime, showOffset } from '#app/time/display.ts'
-import { signaturesOf } from '#database/entry-signatures.server.ts'
 import { policies } from '#database/policies.server.ts'
 import { shownWarning } from './chart-form.server.ts'
 import { warningsOf } from './charted-now.server.ts'
+import { signingOf } from './entry-signing.server.ts'
 import { mayDo, type OpenedEntry } from './opened-entry.server.ts'
 import { contextOfAct, type PatientHead, patientHead } from './patient-care.server.ts'
 
@@ -33,6 +34,8 @@ export interface EntryView {
   /** Who corrected or retracted it, when, and where that is. */
   readonly replacedBy: { readonly says: string; readonly href: string } | null
   readonly facts: readonly Detail[]
+  /** Whether it waits for a countersignature, who gave it, and whether this person may. */
+  readonly countersign: { readonly says: string; readonly waits: boolean; readonly mayDo: boolean } | null
   readonly details: readonly Detail[]
   /** The payload as stored, of an entry that cannot be read. */
   readonly raw: string | null
@@ -53,7 +56,9 @@ export async function entryView(opened: OpenedEntry): Promise<EntryView> {
   const data = kind && readEntry(kind, entry)[0]?.data
   const counts = entry.id === latest.id && entry.status === 'final'
   const context = contextOfAct(care, known, entry.performedAt, entry)
-  const signatures = (await signaturesOf([entry.id])).get(entry.id) ?? []
+  const signing = await signingOf([entry])
+  const signatures = signing.signatures(entry)
+  const countersign = counts ? signing.countersign(entry, care.ward.zone) : null
   return {
     id: entry.id,
     head: patientHead(care, now),
@@ -64,6 +69,7 @@ export async function entryView(opened: OpenedEntry): Promise<EntryView> {
     standing: standingOf(opened),
     replacedBy: replacedBy(opened),
     facts: factsOf(opened, (context && lateWords(entry, context.values)) ?? null, signatures),
+    countersign: countersign && { ...countersign, mayDo: countersign.waits && mayCountersign(opened) },
     details: kind && data ? entryDetails(kind, data as Readonly<Record<string, unknown>>) : [],
     raw: words.readable ? null : rawOf(entry),
     photographs: photographsOf(entry),
@@ -73,6 +79,11 @@ export async function entryView(opened: OpenedEntry): Promise<EntryView> {
     mayCorrect: counts && kind !== undefined && mayDo('correct', opened),
     mayRetract: counts && mayDo('retract', opened),
   }
+}
+
+/** A registered colleague of the ward who did not chart it. */
+function mayCountersign({ entry, user, care }: OpenedEntry): boolean {
+  return entry.recordedById !== user.id && can(user, 'countersign', care.ward.id)
 }
 
 function standingOf({ entry, latest }: OpenedEntry): EntryView['standing'] {

@@ -11,6 +11,7 @@ import { showDateTime, showTime } from '#app/time/display.ts'
 import { type Duration, earlier, hours } from '#app/time/duration.ts'
 import { type LocalDay, localDay } from '#app/time/zone.ts'
 import { cursorText, readCursor, type Superseding, timeline } from '#database/timeline.server.ts'
+import { signingOf } from './entry-signing.server.ts'
 import type { PatientCare } from './patient-context.server.ts'
 
 /** Spans of the hour strip by name: hours back, and hours ahead. */
@@ -35,6 +36,10 @@ export interface EntryLine {
   readonly outOfRange: boolean
   /** Ids of its photographs, while it counts. */
   readonly photographs: readonly string[]
+  /** Whether it waits for a countersignature, and who gave it. */
+  readonly countersign: { readonly says: string; readonly waits: boolean } | null
+  /** The second person, and whether they signed. */
+  readonly second: string | null
 }
 
 export interface PatientTimeline {
@@ -76,7 +81,7 @@ export function timelineTag({ stay, patient }: PatientCare['record'], url: URL, 
   const view = `${asked.span}.${asked.kind ?? ''}.${asked.before?.id ?? ''}`.replaceAll(' ', '')
   // A discharge or a move charts nothing, and ends or changes what is due.
   const place = `${stay.bedId.slice(-8)}${stay.dischargedAt === null ? '' : '.left'}`
-  return `"${stay.id.slice(0, 8)}.${place}.${stay.entryCount}.${patient.version}.${Math.floor(now.getTime() / SLOT_MS)}.${view}"`
+  return `"${stay.id.slice(0, 8)}.${place}.${stay.entryCount}.${stay.countersignCount}.${patient.version}.${Math.floor(now.getTime() / SLOT_MS)}.${view}"`
 }
 
 /** One patient's page: due care with its reasons, the tube, marks for the strip, and a page of entries. */
@@ -85,7 +90,12 @@ export async function patientTimeline(patient: PatientCare, url: URL, now: Date)
   const { record } = patient
   const page = await timeline(record.stay.id, { limit: PAGE, kind, before })
   const zone = patient.ward.zone
-  const entries = page.entries.map(({ entry, supersededBy }) => entryLine(entry, supersededBy, patient))
+  const signing = await signingOf(page.entries.map(({ entry }) => entry))
+  const entries = page.entries.map(({ entry, supersededBy }) => ({
+    ...entryLine(entry, supersededBy, patient),
+    countersign: supersededBy ? null : signing.countersign(entry, zone),
+    second: signing.second(entry),
+  }))
   return {
     etag: timelineTag(record, url, now),
     at: now.getTime(),
@@ -117,9 +127,10 @@ function careOf({ context, nothingDue }: PatientCare, back: Duration) {
   }
 }
 
-function entryLine(entry: StoredEntry, by: Superseding | null, { context, ward }: PatientCare): EntryLine {
+function entryLine(entry: StoredEntry, by: Superseding | null, { context, ward }: PatientCare) {
   const words = entryWords(entry)
-  const status = entry.status === 'retracted' || by?.status === 'retracted' ? 'retracted' : by ? 'corrected' : 'final'
+  const status: EntryLine['status'] =
+    entry.status === 'retracted' || by?.status === 'retracted' ? 'retracted' : by ? 'corrected' : 'final'
   return {
     id: entry.id,
     day: localDay(entry.performedAt, ward.zone),

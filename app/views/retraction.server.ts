@@ -1,4 +1,5 @@
 import { validate as isUuid, v7 as uuidv7 } from 'uuid'
+import { authorOf } from '#app/auth/permissions.ts'
 import { readRetraction } from '#app/charting/retract-form.ts'
 import { showDateTime } from '#app/time/display.ts'
 import { retractEntry } from '#database/entries.server.ts'
@@ -35,7 +36,7 @@ export async function retracted(opened: OpenedEntry, sent: FormData): Promise<'r
     const says = `You are signed in as ${user.name}; this form was opened by ${owner}. If you mean to retract the entry, send it again.`
     return { ...kept, status: 409, problems: [{ says }] }
   }
-  const charting = await retractEntry({ id, recordedBy: user, reason }, entry)
+  const charting = await retractEntry({ id, recordedBy: authorOf(user), reason }, entry)
   if (charting.outcome === 'charted' || charting.outcome === 'already charted') return 'retracted'
   return { ...kept, ...refusal(charting, opened) }
 }

@@ -9,6 +9,7 @@ import { ageOn } from '#app/time/display.ts'
 import { earlier, hours } from '#app/time/duration.ts'
 import { shiftAt } from '#app/time/shift.ts'
 import { localDay } from '#app/time/zone.ts'
+import { countToCountersign } from '#database/countersignatures.server.ts'
 import { recalls } from '#database/lot-recalls.server.ts'
 import { policies } from '#database/policies.server.ts'
 import { type StayRecord, wardRecords } from '#database/records.server.ts'
@@ -65,11 +66,12 @@ export function boardJson({ data, at }: ServedBoard): Uint8Array<ArrayBuffer> {
 }
 
 async function computedBoard(wardId: string, now: Date, rev: number): Promise<Board | undefined> {
-  const [ward, known, records, recalled] = await Promise.all([
+  const [ward, known, records, recalled, toCountersign] = await Promise.all([
     wardById(wardId),
     policies(),
     wardRecords(wardId, rev),
     recalls(),
+    countToCountersign(wardId),
   ])
   if (!ward) return undefined
   const { shiftTimes, pressureUnit } = ward
@@ -81,6 +83,7 @@ async function computedBoard(wardId: string, now: Date, rev: number): Promise<Bo
     zone: facts.zone,
     shiftEndsAt: shiftAt(now, ward.shiftTimes, facts.zone).endsAt.getTime(),
     policy: policy ? policyWords(policy) : null,
+    toCountersign,
     patients: records.stays.map(stay => boardPatient(stay, policy, facts, now)),
   }
 }

@@ -30,9 +30,11 @@ async function answer(words: readonly string[]): Promise<string> {
   const password = oneTimePassword()
   const oneTime = { passwordHash: await passwordHash(password), hours: ONE_TIME_PASSWORD_HOURS }
   const nobody = { actor: null, path: null, address: null, userAgent: 'npm run admin', requestId: null }
-  await addPerson({ name, email, role: 'administrator', wardIds: [] }, oneTime, nobody).catch(error => {
-    throw error instanceof EmailTaken ? new Error(`${email} has an account already.`) : error
-  })
+  await addPerson({ name, email, role: 'administrator', wardIds: [], supervised: false }, oneTime, nobody).catch(
+    error => {
+      throw error instanceof EmailTaken ? new Error(`${email} has an account already.`) : error
+    },
+  )
   return [
     `${name} is an administrator. Sign in with ${email} and this one-time password, within ${ONE_TIME_PASSWORD_HOURS} hours:`,
     password,

@@ -24,6 +24,9 @@ import { photographs } from './0058-photographs.ts'
 import { entryLots } from './0060-entry-lots.ts'
 import { lotRecalls } from './0061-lot-recalls.ts'
 import { entrySignatures } from './0070-entry-signatures.ts'
+import { supervision } from './0071-supervision.ts'
+import { countersignatures } from './0072-countersignatures.ts'
+import { competences } from './0073-competences.ts'
 import { policyRuleSets } from './0080-policy-rule-sets.ts'
 import { policyWithdrawals } from './0081-policy-withdrawals.ts'
 import { policyDrafts } from './0082-policy-drafts.ts'
@@ -57,6 +60,9 @@ export const migrations: Record<string, Migration> = {
   '0060-entry-lots': entryLots,
   '0061-lot-recalls': lotRecalls,
   '0070-entry-signatures': entrySignatures,
+  '0071-supervision': supervision,
+  '0072-countersignatures': countersignatures,
+  '0073-competences': competences,
   '0080-policy-rule-sets': policyRuleSets,
   '0081-policy-withdrawals': policyWithdrawals,
   '0082-policy-drafts': policyDrafts,

@@ -8,6 +8,7 @@ export class UserRow extends Model<InferAttributes<UserRow>, InferCreationAttrib
   declare name: string
   declare email: string
   declare role: Role
+  declare supervised: CreationOptional<boolean>
   declare passwordHash: string
   declare passwordSetAt: Date
   declare oneTimeUntil: Date | null
@@ -22,6 +23,7 @@ UserRow.init(
     name: { type: DataTypes.STRING(120), allowNull: false },
     email: { type: DataTypes.STRING(254), allowNull: false },
     role: { type: DataTypes.STRING(32), allowNull: false },
+    supervised: { type: DataTypes.BOOLEAN, allowNull: false, defaultValue: false },
     passwordHash: { type: DataTypes.STRING(200), allowNull: false },
     passwordSetAt: { type: DataTypes.DATE(3), allowNull: false },
     oneTimeUntil: { type: DataTypes.DATE(3) },

@@ -5,12 +5,14 @@ import { birchStories } from './birch.ts'
 import { demoCatalogue } from './catalogue.ts'
 import { cedarStories } from './cedar.ts'
 import { changesOf, onDuty } from './changes.ts'
+import { demoSignOffs } from './competences.ts'
 import { entriesOf } from './entries.ts'
 import { demoPeople, rotaOf } from './people.ts'
 import { demoPolicies } from './policies.ts'
 import { idAt, type Random, randomFrom } from './random.ts'
 import type { DemoHospital, DemoMove, DemoPatient, DemoPerson, DemoStay } from './rows.ts'
 import type { BedStory } from './story.ts'
+import { withStudents } from './students.ts'
 import { bedLabelled, demoWards, type WardWithBeds } from './wards.ts'
 
 const stories: readonly BedStory[] = [...alderStories, ...birchStories, ...cedarStories]
@@ -34,13 +36,19 @@ export function demoHospital(now: Date, zone: Zone): DemoHospital {
     wards: wards.map(ward => ward.row),
     beds: wards.flatMap(ward => ward.beds),
     people,
+    signOffs: demoSignOffs(people, now, zone),
     patients: stays.map(({ patient }) => patient),
     stays: stays.map(({ stay }) => stay),
     moves: stays.flatMap(({ moves }) => moves),
     changes: stays.flatMap(({ changes }) => changes).toSorted((a, b) => a.changedAt.getTime() - b.changedAt.getTime()),
     catalogue: demoCatalogue,
     policies: demoPolicies(now, zone, wards, specialistOf(people)),
-    entries: stays.flatMap(({ entries }) => entries),
+    entries: withStudents(
+      stays.flatMap(({ entries }) => entries),
+      people,
+      stays.map(({ stay }) => stay),
+      now,
+    ),
   }
 }
 

@@ -38,23 +38,26 @@ const plans: readonly Plan[] = [
   ['Saoirse Vandeputten', 'observer', 'Alder ward'],
 ]
 
-/** Everybody with an account: all roles, and six nurses a ward. */
+const students: readonly Plan[] = [['Elodie Varnhagen', 'nurse', 'Alder ward']]
+
+/** Everybody with an account: all roles, six nurses a ward, and a student nurse. */
 export function demoPeople(now: Date, wards: readonly WardWithBeds[]): readonly DemoPerson[] {
   const random = randomFrom(`people ${now.getTime()}`)
   const addedAt = earlier(now, hours(45 * 24))
   const taken = new Map<string, number>()
-  return plans.map(([name, role, ...wardNames]) => ({
+  return [...plans, ...students].map(([name, role, ...wardNames], index) => ({
     id: idAt(addedAt, random),
     name,
-    email: `${addressOf(role, wardNames, taken)}@example.org`,
+    email: `${addressOf(index < plans.length ? role : 'student', wardNames, taken)}@example.org`,
     role,
+    supervised: index >= plans.length,
     wardIds: wards.filter(ward => wardNames.includes(ward.row.name)).map(ward => ward.row.id),
     addedAt,
   }))
 }
 
 /** `nurse.alder`, then `nurse2.alder`; without a single ward only `specialist`. */
-function addressOf(role: Role, wardNames: readonly WardName[], taken: Map<string, number>): string {
+function addressOf(role: Role | 'student', wardNames: readonly WardName[], taken: Map<string, number>): string {
   const word = role === 'charge nurse' ? 'charge' : (role.split(' ').at(-1) ?? role)
   const [first, ...others] = wardNames
   const ward = first && others.length < 2 ? `.${first.split(' ')[0]?.toLowerCase()}` : ''
@@ -76,7 +79,7 @@ const NURSES_ON_DUTY = 2
 /** Two nurses a shift in turn: one has the first beds of the ward, the other the rest. */
 export function rotaOf(people: readonly DemoPerson[], zone: Zone): Rota {
   function members(ward: WardWithBeds, role: Role): readonly DemoPerson[] {
-    return people.filter(person => person.role === role && person.wardIds.includes(ward.row.id))
+    return people.filter(person => person.role === role && !person.supervised && person.wardIds.includes(ward.row.id))
   }
   function one(found: DemoPerson | undefined, role: Role, ward: WardWithBeds): DemoPerson {
     if (!found) throw new RangeError(`${ward.row.name} has no ${role}`)

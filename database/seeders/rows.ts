@@ -5,6 +5,7 @@ import type { Policy } from '#app/care/policy.ts'
 import type { Catalogue } from '#app/catalogue/known-items.ts'
 import type { PressureUnit } from '#app/clinical/units.ts'
 import type { LocalDay, Zone } from '#app/time/zone.ts'
+import type { DemoSignOff } from './competences.ts'
 
 /** The demo hospital as plain rows: what is loaded, and what tests run the rules over. Moments are UTC. */
 export interface DemoHospital {
@@ -13,6 +14,7 @@ export interface DemoHospital {
   readonly wards: readonly DemoWard[]
   readonly beds: readonly DemoBed[]
   readonly people: readonly DemoPerson[]
+  readonly signOffs: readonly DemoSignOff[]
   readonly patients: readonly DemoPatient[]
   readonly stays: readonly DemoStay[]
   readonly moves: readonly DemoMove[]
@@ -42,6 +44,7 @@ export interface DemoPerson {
   readonly name: string
   readonly email: string
   readonly role: Role
+  readonly supervised: boolean
   readonly wardIds: readonly string[]
   readonly addedAt: Date
 }

@@ -1,5 +1,6 @@
 import type { Catalogue } from '#app/catalogue/known-items.ts'
 import { demoCatalogueChanges } from './catalogue.ts'
+import { competenceRows } from './competences.ts'
 import type { DemoChange, DemoEntry, DemoHospital, DemoPatient, DemoPolicy } from './rows.ts'
 
 /** Rows of one table by the names of its columns. */
@@ -20,6 +21,7 @@ export function demoTables(hospital: DemoHospital, passwordHash: string): readon
     { table: 'policies', rows: policies.map(policyRow) },
     ...catalogueTables(hospital),
     { table: 'entries', rows: entries.map(entryRow) },
+    { table: 'competences', rows: competenceRows(hospital.signOffs) },
   ]
 }
 
@@ -29,8 +31,17 @@ function peopleTables({ people, wards, beds, seededAt }: DemoHospital, passwordH
     const shifts = JSON.stringify(shiftTimes)
     return { id, name, shift_times: shifts, pressure_unit: pressureUnit, emergency_numbers: numbers }
   })
-  const users = people.map(({ id, name, email, role, addedAt }) => {
-    return { id, name, email, role, password_hash: passwordHash, password_set_at: seededAt, added_at: addedAt }
+  const users = people.map(({ id, name, email, role, supervised, addedAt }) => {
+    return {
+      id,
+      name,
+      email,
+      role,
+      supervised,
+      password_hash: passwordHash,
+      password_set_at: seededAt,
+      added_at: addedAt,
+    }
   })
   const members = people.flatMap(({ id, wardIds, addedAt }) =>
     wardIds.map(wardId => ({ user_id: id, ward_id: wardId, added_at: addedAt })),

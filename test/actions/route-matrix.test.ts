@@ -85,6 +85,11 @@ GET  /account                          200 200 200 200 200 200 200   200 200 200
 POST /account                          400 400 400 400 400 400 400   400 400 400 400 400 400 400   400 400   400  in
 GET  /sign-out-everywhere              go  go  go  go  go  go  go    go  go  go  go  go  go  go    go  go    own  in
 POST /sign-out-everywhere              in  in  in  in  in  in  in    in  in  in  in  in  in  in    in  in    own  in
+GET  /countersign                      200 200 200 200 403 403 403   200 200 200 200 403 403 403   200 200   own  in
+POST /countersign                      400 400 400 400 403 403 403   400 400 400 400 403 403 403   400 400   own  in
+GET  /competence                       go  go  200 200 200 go  go    go  go  200 200 200 go  go    go  200   own  in
+GET  /competence/:userId               200 404 200 200 200 404 404   404 404 404 404 200 404 404   404 404   own  in
+POST /competence/:userId               403 404 403 403 400 404 404   404 404 404 404 400 404 404   404 404   own  in
 GET  /admin/people                     403 403 403 403 403 200 403   403 403 403 403 403 200 403   403 403   own  in
 GET  /admin/people/new                 403 403 403 403 403 200 403   403 403 403 403 403 200 403   403 403   own  in
 POST /admin/people/new                 403 403 403 403 403 400 403   403 403 403 403 403 400 403   403 403   own  in

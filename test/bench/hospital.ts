@@ -44,6 +44,7 @@ export function largeHospital(now: Date): BenchHospital {
       wards: wards.map(({ row }) => row),
       beds: wards.flatMap(({ beds }) => beds),
       people,
+      signOffs: [],
       patients: [...charts, ...others].map(({ patient }) => patient),
       stays: [...charts, ...others].map(({ stay }) => stay),
       moves: [],
@@ -111,6 +112,7 @@ function staff({ row }: WardWithBeds, addedAt: Date): readonly DemoPerson[] {
       name,
       email: `person${index + 1}@ward.example`,
       role,
+      supervised: false,
       wardIds: [row.id],
       addedAt,
     }

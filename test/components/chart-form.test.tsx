@@ -23,7 +23,7 @@ const signer = { id: '01939d4e-0000-7000-8000-000000000002', name: 'R. Osei', ro
 const view: ChartFormProps['view'] = {
   id: '01939d4e-0000-7000-8000-000000000001',
   signer,
-  signing: { password: false, email: 'r.osei@ward.example', second: 'offered' },
+  signing: { password: false, email: 'r.osei@ward.example', second: 'offered', lacks: null },
   calendar: { zone: 'Europe/London', now, beganAt: new Date('2026-03-01T08:00:00.000Z'), endedAt: null },
   typed: { 'care.unit': ['cmH2O'] },
   gauges: [],

@@ -125,6 +125,9 @@ const rows: readonly Row[] = [
   ['late-entry-reason-after', 24, 'P', 'no number given'],
   ['fresh-sign-in', 10, 'P', 'no number given'],
   ['second-person-signs', true, 'P', 'local rule'],
+  // Staff competence (7.4)
+  ['competence-months', 12, 'P', 'no published number'],
+  ['competence-notice', 30, 'P', 'no published number'],
   // Supplies (7.2)
   ['supply-wastage', 20, 'P', 'no published share'],
   ['supply-lead-days', 3, 'P', 'those of the own store'],

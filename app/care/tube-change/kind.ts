@@ -18,6 +18,7 @@ export const tubeChange = careKind({
   chartWords: 'Chart tube change',
   lane: 'Tube',
   needsFreshSignIn: true,
+  needsCompetence: 'tube change, performing',
   twoPeople: () => true,
   cautions: tubeCautions,
   examples: tubeExamples,

@@ -1,0 +1,75 @@
+import { Link, redirect } from 'react-router'
+import { can } from '#app/auth/permissions.ts'
+import { signedIn } from '#app/auth/signed-in.server.ts'
+import { Card } from '#app/components/card.tsx'
+import { Table } from '#app/components/table.tsx'
+import { type GapLine, wardGaps } from '#app/views/competence.server.ts'
+import type { Route } from './+types/competence.ts'
+
+export const meta: Route.MetaFunction = () => [{ title: 'Staff competence | Cannulary' }]
+
+export async function loader({ context }: Route.LoaderArgs) {
+  const user = signedIn(context)
+  if (!can(user, 'see competence gaps')) return redirect(`/competence/${user.id}`)
+  return { wards: await wardGaps(user, new Date()), ownHref: `/competence/${user.id}` }
+}
+
+/** Who on a ward lacks a skill that some act asks for, and what runs out soon. */
+export default function Competence({ loaderData: { wards, ownHref } }: Route.ComponentProps) {
+  return (
+    <div className="grid gap-4 px-4 py-5 md:px-6">
+      <header className="flex flex-wrap items-baseline justify-between gap-3">
+        <h1 className="text-2xl font-bold">Staff competence</h1>
+        <Link to={ownHref} className="inline-flex min-h-11 items-center font-semibold underline underline-offset-3">
+          Your own sign-offs
+        </Link>
+      </header>
+      <p className="max-w-prose text-ink2">
+        Registered staff who chart, and the skills that an act asks for. Listed by ward: who works which shift is not
+        kept here. Nobody is kept from charting by a gap; the entry says so.
+      </p>
+      {wards.map(ward => (
+        <section key={ward.id} aria-label={ward.name} className="grid gap-4">
+          <h2 className="text-xl font-bold">{`${ward.name}: ${ward.people} people`}</h2>
+          <Card title={`${ward.gaps.length} gaps`} flush>
+            <Lines caption={`Gaps on ${ward.name}`} lines={ward.gaps} none="Everybody is signed off." />
+          </Card>
+          <Card title={`Runs out within ${ward.noticeDays} days: ${ward.expiring.length}`} flush>
+            <Lines caption={`Runs out soon on ${ward.name}`} lines={ward.expiring} none="Nothing runs out." />
+          </Card>
+        </section>
+      ))}
+    </div>
+  )
+}
+
+interface LinesProps {
+  readonly caption: string
+  readonly lines: readonly GapLine[]
+  readonly none: string
+}
+
+function Lines({ caption, lines, none }: LinesProps) {
+  if (lines.length === 0) return <p className="p-4 text-ink2">{none}</p>
+  return (
+    <Table
+      caption={caption}
+      columns={[{ label: 'Name' }, { label: 'Role' }, { label: 'Skill' }, { label: 'Standing' }]}
+      rows={lines.map(line => ({
+        key: line.key,
+        cells: [
+          <Link
+            key="name"
+            to={`/competence/${line.userId}`}
+            className="inline-flex min-h-11 items-center underline underline-offset-3"
+          >
+            {line.name}
+          </Link>,
+          line.role,
+          line.skill,
+          line.stands,
+        ],
+      }))}
+    />
+  )
+}
