@@ -154,9 +154,7 @@ export type AnyCharted = Charted<string, z.ZodObject>
 export type DataOf<K extends AnyCharted> = z.output<K['schema']>
 
 /** Declares what is stored of a kind. */
-export function charted<const Slug extends string, Schema extends z.ZodObject>(
-  what: Charted<Slug, Schema>,
-): Charted<Slug, Schema> {
+export function charted<const Slug extends string, S extends z.ZodObject>(what: Charted<Slug, S>): Charted<Slug, S> {
   return what
 }
 

@@ -1,7 +1,7 @@
 import { isDeepStrictEqual } from 'node:util'
 import { validate as isUuid } from 'uuid'
 import { z } from 'zod'
-import type { CurrentUser } from '#app/auth/permissions.ts'
+import { authorOf, type CurrentUser } from '#app/auth/permissions.ts'
 import { bedHeadSigns, type SignData } from '#app/care/bed-head-sign/schema.ts'
 import { readForm } from '#app/sent-form.server.ts'
 import { addEntry } from '#database/entries.server.ts'
@@ -36,7 +36,14 @@ export async function signNoted(
   if (act !== 'taken down' && sign === null) return { problem: none, status: 409 }
   if (shows !== shownBy(facts)) return { problem: CHANGED, status: 409 }
   const stayId = care.record.stay.id
-  const entry = { id, kind: bedHeadSigns, stayId, performedAt: now, recordedBy: user, data: { act, ...facts } }
+  const entry = {
+    id,
+    kind: bedHeadSigns,
+    stayId,
+    performedAt: now,
+    recordedBy: authorOf(user),
+    data: { act, ...facts },
+  }
   const charting = await addEntry(entry)
   if (charting.outcome === 'charted' || charting.outcome === 'already charted') return { done: act, entryId: id }
   if (charting.outcome !== 'other body under this id') return { problem: GONE, status: 409 }
