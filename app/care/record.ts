@@ -47,8 +47,17 @@ export function patientRecord(
     return entries
   }
 
+  return recordAsking(about, of)
+}
+
+/** A record whose questions all come down to one: the entries of a kind, latest performed first. */
+export function recordAsking(
+  { admittedAt, patient }: Pick<PatientRecord, 'admittedAt' | 'patient'>,
+  of: PatientRecord['of'],
+): PatientRecord {
   return {
-    ...about,
+    admittedAt,
+    patient,
     of,
     latest: (kind, where) => (where ? of(kind).find(entry => where(entry.data, entry)) : of(kind)[0]),
     since: (kind, from) => {

@@ -1,4 +1,5 @@
 import type { AnyCharted, DataOf, Entry, PatientRecord } from '../care/kind.ts'
+import { recordAsking } from '../care/record.ts'
 
 /** A record that can be asked as it was at any moment, and that notes which kinds it was asked for. */
 export interface RecordOverTime {
@@ -10,45 +11,21 @@ export interface RecordOverTime {
   nextChange(after: number): number
 }
 
-/** One record over time. It reads each kind once: asking for a moment is a search, not a filter. */
+/** One record over time. It reads each kind once: asking for a moment is a search, and entries are copied only when one came. */
 export function recordOverTime(record: PatientRecord): RecordOverTime {
-  const times = new Map<string, readonly number[]>()
-  const slices = new Map<string, { readonly count: number; readonly entries: readonly Entry[] }>()
+  const timelines = new Map<string, Timeline>()
   let asked = new Set<string>()
   let moment = 0
 
-  function timesOf(kind: AnyCharted): readonly number[] {
-    const known = times.get(kind.slug)
-    if (known) return known
-    const ascending = record.of(kind).map(entry => entry.performedAt.getTime())
-    ascending.reverse()
-    times.set(kind.slug, ascending)
-    return ascending
-  }
-
   function of<K extends AnyCharted>(kind: K): readonly Entry<DataOf<K>>[] {
     asked.add(kind.slug)
-    const count = countUntil(timesOf(kind), moment)
-    const known = slices.get(kind.slug)
-    if (known?.count === count) return known.entries as readonly Entry<DataOf<K>>[]
-    const all = record.of(kind)
-    const entries = all.slice(all.length - count)
-    slices.set(kind.slug, { count, entries })
-    return entries
+    const known = timelines.get(kind.slug)
+    const timeline = known ?? timelineOf(record.of(kind))
+    if (!known) timelines.set(kind.slug, timeline)
+    return timeline.until(moment) as readonly Entry<DataOf<K>>[]
   }
 
-  const view: PatientRecord = {
-    admittedAt: record.admittedAt,
-    patient: record.patient,
-    of,
-    latest: (kind, where) => (where ? of(kind).find(entry => where(entry.data, entry)) : of(kind)[0]),
-    since: (kind, from) => {
-      const entries = of(kind)
-      const end = entries.findIndex(entry => entry.performedAt < from)
-      return end === -1 ? entries : entries.slice(0, end)
-    },
-  }
-
+  const view = recordAsking(record, of)
   return {
     at(at) {
       moment = at.getTime()
@@ -58,13 +35,27 @@ export function recordOverTime(record: PatientRecord): RecordOverTime {
       asked = new Set()
     },
     nextChange(after) {
-      let next = Number.POSITIVE_INFINITY
-      for (const slug of asked) {
-        const known = times.get(slug) ?? []
-        next = Math.min(next, known[countUntil(known, after)] ?? next)
-      }
-      return next
+      return Math.min(...[...asked].map(slug => timelines.get(slug)?.firstAfter(after) ?? Number.POSITIVE_INFINITY))
     },
+  }
+}
+
+/** The entries of one kind, to be asked for up to a moment (ms). */
+interface Timeline {
+  until(moment: number): readonly Entry[]
+  firstAfter(moment: number): number
+}
+
+function timelineOf(latestFirst: readonly Entry[]): Timeline {
+  const times = latestFirst.map(entry => entry.performedAt.getTime()).toReversed()
+  let kept: readonly Entry[] = latestFirst
+  return {
+    until(moment) {
+      const count = countUntil(times, moment)
+      if (kept.length !== count) kept = latestFirst.slice(latestFirst.length - count)
+      return kept
+    },
+    firstAfter: moment => times[countUntil(times, moment)] ?? Number.POSITIVE_INFINITY,
   }
 }
 

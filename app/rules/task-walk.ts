@@ -14,68 +14,80 @@ export interface Span {
   readonly to: number
 }
 
-interface Occurrence {
-  readonly from: number
-  window: DueWindow
-  readonly byInterval: boolean
-  isLate: boolean
-  isCounted: boolean
-}
-
 /**
  * Follows one task of one patient through time. Late: the care that was charted came after its window, each time by the act before
  * it. Tasks by an interval are counted as they would fall due were each done on its due time, so that an interval that is longer than
  * what was done shows fewer; all others are counted by their windows.
  */
 export function taskWalk(rule: TaskRule, span: Span, found: (one: Found) => void) {
-  let open: Occurrence | undefined
-  let anchor: number | undefined
-
-  const isWithin = (at: number) => at >= span.from && at < span.to
-  function report(what: Found['what'], moment: Date) {
+  const report: Report = (what, moment) => {
     // What is due as a shift ends belongs to that shift.
     const at = moment.getTime() - 1
-    if (isWithin(at)) found({ what, at })
+    if (at >= span.from && at < span.to) found({ what, at })
   }
-
-  function close(at: number) {
-    if (!open) return
-    const { window, byInterval, isCounted } = open
-    const wasAskedFor = at >= window.opensAt.getTime()
-    if (!byInterval && !isCounted && wasAskedFor) report('task', earlierOf(window.dueAt, at))
-    open = undefined
-  }
-
-  function countByInterval(from: number, every: number, until: number) {
-    anchor ??= from
-    if (anchor + every < span.from) anchor += Math.floor((span.from - anchor) / every) * every
-    for (; anchor + every <= until; anchor += every) report('task', new Date(anchor + every))
-  }
+  const windows = windowCount(report)
+  const intervals = intervalCount(report, span.from)
 
   return {
     /** What the clock said at a moment, and goes on saying until the next one (ms). */
     step(clock: Clock, context: CareContext, until: number) {
       const now = context.now.getTime()
       if (clock.state !== 'running') {
-        close(now)
-        anchor = undefined
+        windows.close(now)
+        intervals.stop()
         return
       }
-      const from = clock.from.getTime()
-      if (open && open.from !== from) close(now)
-      const { window } = windowWithDeferral(rule, clock, context)
-      open ??= { from, window, byInterval: clock.every !== undefined, isLate: false, isCounted: false }
-      open.window = window
-      if (!open.isLate && window.closesAt.getTime() < until) {
-        open.isLate = true
-        if (window.closesAt.getTime() >= now) report('late', window.closesAt)
-      }
-      if (clock.every === undefined) anchor = undefined
-      else countByInterval(from, clock.every, until)
+      windows.step(clock, windowWithDeferral(rule, clock, context).window, { from: now, to: until })
+      if (clock.every === undefined) intervals.stop()
+      else intervals.step(clock.from.getTime(), clock.every, until)
     },
     /** The end of the walk: what fell due by then counts, what is still open does not. */
-    end() {
-      if (open && open.window.dueAt.getTime() <= span.to) close(span.to)
+    end: () => windows.end(span.to),
+  }
+}
+
+type Report = (what: Found['what'], moment: Date) => void
+
+/** One act after another: late once when its window closed without it, and a task when it has no interval to be counted by. */
+function windowCount(report: Report) {
+  let open: { readonly from: number; window: DueWindow; readonly byInterval: boolean; isLate: boolean } | undefined
+
+  function close(at: number) {
+    if (!open) return
+    const { window, byInterval } = open
+    const wasAskedFor = at >= window.opensAt.getTime()
+    if (!byInterval && wasAskedFor) report('task', earlierOf(window.dueAt, at))
+    open = undefined
+  }
+
+  return {
+    close,
+    step(clock: Clock & { state: 'running' }, window: DueWindow, { from: now, to: until }: Span) {
+      const from = clock.from.getTime()
+      if (open && open.from !== from) close(now)
+      open ??= { from, window, byInterval: clock.every !== undefined, isLate: false }
+      open.window = window
+      if (open.isLate || window.closesAt.getTime() >= until) return
+      open.isLate = true
+      if (window.closesAt.getTime() >= now) report('late', window.closesAt)
+    },
+    end(at: number) {
+      if (open && open.window.dueAt.getTime() <= at) close(at)
+    },
+  }
+}
+
+/** Counts due times an interval apart, from the moment a clock began to run. */
+function intervalCount(report: Report, start: number) {
+  let anchor: number | undefined
+  return {
+    stop() {
+      anchor = undefined
+    },
+    step(from: number, every: number, until: number) {
+      anchor ??= from
+      if (anchor + every < start) anchor += Math.floor((start - anchor) / every) * every
+      for (; anchor + every <= until; anchor += every) report('task', new Date(anchor + every))
     },
   }
 }

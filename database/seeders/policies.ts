@@ -1,7 +1,7 @@
 import { cuffUpper } from '#app/care/cuff-pressure/settings.ts'
 import { inspectionInterval } from '#app/care/inner-cannula/settings.ts'
 import { careSettings } from '#app/care/kinds.ts'
-import { addDays, localDay, startOfDay, type Zone } from '#app/time/zone.ts'
+import { addDays, type LocalDay, localDay, startOfDay, type Zone } from '#app/time/zone.ts'
 import { idAt, randomFrom } from './random.ts'
 import type { DemoPerson, DemoPolicy } from './rows.ts'
 import type { WardWithBeds } from './wards.ts'
@@ -20,35 +20,48 @@ export function demoPolicies(
   const random = randomFrom(`policies ${now.getTime()}`)
   const startsOn = addDays(localDay(now, zone), -IN_FORCE_FOR_DAYS)
   const startsAt = startOfDay(startsOn, zone)
-  const defaults = Object.fromEntries(careSettings.map(setting => [setting.name, setting.default]))
-  const common = { version: 1, reviewedBy: REVIEWER, reviewedOn: addDays(startsOn, -3), startsAt, createdBy: author.id }
+  const first = {
+    ...{ version: 1, reviewedBy: REVIEWER, reviewedOn: addDays(startsOn, -3), startsAt, createdBy: author.id },
+    values: Object.fromEntries(careSettings.map(setting => [setting.name, setting.default])),
+  }
   const hospital: DemoPolicy = {
-    ...common,
+    ...first,
     id: idAt(startsAt, random),
     name: 'Tracheostomy care of adults',
     wardId: null,
-    values: defaults,
     reason: 'First reviewed set: every number at its default',
   }
-  return [hospital, ...wards.flatMap(own), ...wards.slice(0, 1).map(coming)]
+  return [
+    hospital,
+    ...wards.flatMap(ward => ownOf(ward, first, idAt(startsAt, random))),
+    ...wards
+      .slice(0, 1)
+      .map(ward => comingOf(ward, first, { id: idAt(now, random), today: localDay(now, zone), zone })),
+  ]
+}
 
-  function own({ row, cuffUpperLimit }: WardWithBeds): readonly DemoPolicy[] {
-    if (cuffUpperLimit === undefined) return []
-    const about = { name: `Tracheostomy care, ${row.name}`, wardId: row.id }
-    const values = { ...defaults, [cuffUpper.name]: cuffUpperLimit }
-    const reason = `Cuff pressure at most ${cuffUpperLimit} cmH2O, as the ward has long kept it`
-    return [{ ...common, id: idAt(startsAt, random), ...about, values, reason }]
-  }
+type Reviewed = Omit<DemoPolicy, 'id' | 'name' | 'wardId' | 'reason'>
 
-  /** The first ward takes a version of its own into use in a few days. */
-  function coming({ row }: WardWithBeds): DemoPolicy {
-    const start = startOfDay(addDays(localDay(now, zone), COMES_IN_DAYS), zone)
-    return {
-      ...hospital,
-      ...{ id: idAt(now, random), name: `Tracheostomy care, ${row.name}`, wardId: row.id, startsAt: start },
-      reviewedOn: addDays(localDay(now, zone), -1),
-      values: { ...defaults, [inspectionInterval.name]: 6 },
-      reason: 'Two blocked inner cannulas in October: inspected every 6 hours on this ward',
-    }
+function ownOf({ row, cuffUpperLimit }: WardWithBeds, first: Reviewed, id: string): readonly DemoPolicy[] {
+  if (cuffUpperLimit === undefined) return []
+  const about = { id, name: `Tracheostomy care, ${row.name}`, wardId: row.id }
+  const values = { ...first.values, [cuffUpper.name]: cuffUpperLimit }
+  const reason = `Cuff pressure at most ${cuffUpperLimit} cmH2O, as the ward has long kept it`
+  return [{ ...first, ...about, values, reason }]
+}
+
+/** The first ward takes a version of its own into use in a few days. */
+function comingOf(
+  { row }: WardWithBeds,
+  first: Reviewed,
+  { id, today, zone }: { readonly id: string; readonly today: LocalDay; readonly zone: Zone },
+): DemoPolicy {
+  return {
+    ...first,
+    ...{ id, name: `Tracheostomy care, ${row.name}`, wardId: row.id },
+    startsAt: startOfDay(addDays(today, COMES_IN_DAYS), zone),
+    reviewedOn: addDays(today, -1),
+    values: { ...first.values, [inspectionInterval.name]: 6 },
+    reason: 'Two blocked inner cannulas in October: inspected every 6 hours on this ward',
   }
 }
