@@ -48,19 +48,20 @@ interface Timeline {
 
 function timelineOf(latestFirst: readonly Entry[]): Timeline {
   const times = latestFirst.map(entry => entry.performedAt.getTime()).toReversed()
-  let kept: readonly Entry[] = latestFirst
+  // Every task asks for the same moments: what was cut for one is there for the next.
+  const cuts: (readonly Entry[])[] = []
   return {
     until(moment) {
       const count = countUntil(times, moment)
-      if (kept.length !== count) kept = latestFirst.slice(latestFirst.length - count)
-      return kept
+      cuts[count] ??= latestFirst.slice(latestFirst.length - count)
+      return cuts[count]
     },
     firstAfter: moment => times[countUntil(times, moment)] ?? Number.POSITIVE_INFINITY,
   }
 }
 
 /** How many of these ascending times are at or before a moment. */
-function countUntil(times: readonly number[], moment: number): number {
+export function countUntil(times: readonly number[], moment: number): number {
   let [from, to] = [0, times.length]
   while (from < to) {
     const middle = (from + to) >> 1

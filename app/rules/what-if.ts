@@ -3,11 +3,10 @@ import type { CareContext, PatientRecord, WardFacts } from '../care/kind.ts'
 import { wordsOf } from '../care/kind.ts'
 import { careTasks, type KindTask } from '../care/kinds.ts'
 import type { Policy } from '../care/policy.ts'
-import { shiftAt } from '../time/shift.ts'
-import { localDay } from '../time/zone.ts'
+import { nextShift, type Shift, shiftAt } from '../time/shift.ts'
 import { careContext } from './context.ts'
 import { isTooYoung } from './due-tasks.ts'
-import { type RecordOverTime, recordOverTime } from './record-over-time.ts'
+import { countUntil, type RecordOverTime, recordOverTime } from './record-over-time.ts'
 import { type Found, taskWalk } from './task-walk.ts'
 
 /** A stay on the ward: its record, and when it was here (`until`: the end of the stay, or of the time looked at). */
@@ -48,14 +47,15 @@ interface Asked {
  * from time alone, a change may be seen up to a shift late.
  */
 export function wardLoad({ stays, policy, ward, from, to, tasks = careTasks }: Asked): WardLoad {
-  const tally = newTally(ward)
+  const roster = rosterOf(ward, from, to)
+  const tally = newTally(ward, roster)
   let withoutRules = 0
   for (const stay of stays) {
     const span = {
       from: Math.max(from.getTime(), stay.from.getTime()),
       to: Math.min(to.getTime(), stay.until.getTime()),
     }
-    const asking = askerOf(recordOverTime(stay.record), policy, ward)
+    const asking = askerOf(recordOverTime(stay.record), { policy, ward, roster })
     if (asking.at(span.to).isOutside) withoutRules += 1
     else for (const { rule } of tasks) walk(rule, span, asking, one => tally.add(rule.name, one))
   }
@@ -73,15 +73,11 @@ export function wardLoad({ stays, policy, ward, from, to, tasks = careTasks }: A
       const { context, isOutside } = asking.at(at)
       const clock = isOutside ? ({ state: 'none' } as const) : rule.clock(context)
       tally.noteRead()
-      const next = Math.min(asking.over.nextChange(at), shiftAfter(at), span.to)
+      const next = Math.min(asking.over.nextChange(at), roster.at(at).endsAt.getTime(), span.to)
       steps.step(clock, context, next)
       at = next
     }
     steps.end()
-  }
-
-  function shiftAfter(at: number): number {
-    return shiftAt(new Date(at), ward.shiftTimes, ward.zone).endsAt.getTime()
   }
 }
 
@@ -90,28 +86,54 @@ interface Asker {
   at(ms: number): { readonly context: CareContext; readonly isOutside: boolean }
 }
 
-/** Contexts of one patient at any moment. Own values and age change with the care plan and the day, so those are kept by both. */
-function askerOf(over: RecordOverTime, policy: Policy, ward: WardFacts): Asker {
-  const kept = new Map<string, { readonly values: CareContext['values']; readonly isOutside: boolean }>()
+interface Judged {
+  readonly values: CareContext['values']
+  readonly isOutside: boolean
+}
+
+/** Contexts of one patient at any moment. Own values and age change with the care plan and with time, so those are kept by plan and shift. */
+function askerOf(
+  over: RecordOverTime,
+  { policy, ward, roster }: { readonly policy: Policy; readonly ward: WardFacts; readonly roster: Roster },
+): Asker {
+  const kept = new Map<Shift, Map<number, Judged>>()
   return {
     over,
     at(ms) {
       const now = new Date(ms)
       const record = over.at(now)
-      const key = `${record.of(carePlans).length} ${localDay(now, ward.zone)}`
-      const known = kept.get(key) ?? judged(record, now)
-      kept.set(key, known)
-      return { context: { record, values: known.values, ward, now }, isOutside: known.isOutside }
+      const { values, isOutside } = known(roster.at(ms), record, now)
+      return { context: { record, values, ward, now }, isOutside }
     },
   }
 
-  function judged(record: PatientRecord, now: Date) {
+  function known(shift: Shift, record: PatientRecord, now: Date): Judged {
+    const ofShift = kept.get(shift) ?? new Map<number, Judged>()
+    const plans = record.of(carePlans).length
+    const judged = ofShift.get(plans) ?? judge(record, now)
+    kept.set(shift, ofShift.set(plans, judged))
+    return judged
+  }
+
+  function judge(record: PatientRecord, now: Date): Judged {
     const context = careContext({ record, policy, ward, now })
     return { values: context.values, isOutside: isTooYoung(context) }
   }
 }
 
-function newTally(ward: WardFacts) {
+/** The shifts of a ward, looked up without asking the calendar again. */
+interface Roster {
+  at(ms: number): Shift
+}
+
+function rosterOf({ shiftTimes, zone }: WardFacts, from: Date, to: Date): Roster {
+  const shifts = [shiftAt(from, shiftTimes, zone)]
+  for (let last = shifts[0]; last && last.endsAt <= to; shifts.push(last)) last = nextShift(last, shiftTimes, zone)
+  const starts = shifts.map(shift => shift.startsAt.getTime())
+  return { at: ms => shifts[countUntil(starts, ms) - 1] ?? shiftAt(new Date(ms), shiftTimes, zone) }
+}
+
+function newTally(ward: WardFacts, roster: Roster) {
   const byShift = new Map(ward.shiftTimes.map(time => [`Shift from ${time}`, { tasks: 0, late: 0 }]))
   const byTask = new Map<string, { tasks: number; late: number }>()
   const total = { tasks: 0, late: 0 }
@@ -125,7 +147,7 @@ function newTally(ward: WardFacts) {
       const count = what === 'task' ? 'tasks' : 'late'
       const task = byTask.get(wordsOf(name)) ?? { tasks: 0, late: 0 }
       byTask.set(wordsOf(name), task)
-      const shift = byShift.get(shiftAt(new Date(at), ward.shiftTimes, ward.zone).label)
+      const shift = byShift.get(roster.at(at).label)
       for (const load of [total, task, shift]) if (load) load[count] += 1
     },
     sums: () => ({ total, byShift, byTask }),
