@@ -2,6 +2,7 @@ import { data, redirect } from 'react-router'
 import { v7 as uuidv7 } from 'uuid'
 import { can } from '#app/auth/permissions.ts'
 import { signedIn } from '#app/auth/signed-in.server.ts'
+import { gtin14 } from '#app/clinical/gs1-gtin.ts'
 import { ItemForm } from '#app/components/item-form.tsx'
 import { sentForm } from '#app/sent-form.server.ts'
 import { idIn, savedFrom } from '#app/views/catalogue-form.server.ts'
@@ -11,10 +12,12 @@ import type { Route } from './+types/catalogue-item-new.ts'
 
 export const meta: Route.MetaFunction = () => [{ title: 'Add to the catalogue | Cannulary' }]
 
-export async function loader({ params: { items }, context }: Route.LoaderArgs) {
+export async function loader({ params: { items }, context, url }: Route.LoaderArgs) {
   const kind = itemKindOr404(items)
   if (!can(signedIn(context), 'manage catalogue')) throw data(KEPT_BY, 403)
-  return { kind, id: uuidv7(), lines: await tubeLines() }
+  // From a scan of what nobody has described yet.
+  const gtin = gtin14(url.searchParams.get('gtin') ?? '') ?? ''
+  return { kind, id: uuidv7(), gtin, lines: await tubeLines() }
 }
 
 export async function action({ params: { items }, request, context }: Route.ActionArgs) {
@@ -29,7 +32,7 @@ export async function action({ params: { items }, request, context }: Route.Acti
 
 const KEPT_BY = 'The catalogue is kept by the tracheostomy specialist and the administrators.'
 
-export default function NewItem({ loaderData: { kind, id, lines }, actionData }: Route.ComponentProps) {
+export default function NewItem({ loaderData: { kind, id, gtin, lines }, actionData }: Route.ComponentProps) {
   return (
     <div className="grid gap-4 px-4 py-5 md:px-6">
       <h1 className="text-2xl font-bold">{kind === 'tube' ? 'Add a tube' : 'Add an inner cannula'}</h1>
@@ -42,7 +45,7 @@ export default function NewItem({ loaderData: { kind, id, lines }, actionData }:
         kind={kind}
         id={actionData?.id ?? id}
         version={null}
-        typed={actionData?.typed ?? {}}
+        typed={actionData?.typed ?? { gtin: [gtin] }}
         errors={actionData?.errors ?? {}}
         fitting={{}}
         words="Add to the catalogue"

@@ -1,18 +1,15 @@
-import { useState } from 'react'
 import { data, Form, Link, useNavigation, useSubmit } from 'react-router'
+import { scannerOf } from '#app/auth/scanner.server.ts'
 import { signedIn } from '#app/auth/signed-in.server.ts'
 import { traceOf } from '#app/auth/trace.server.ts'
 import { Button, LinkButton } from '#app/components/button.tsx'
 import { Card } from '#app/components/card.tsx'
 import { ChoiceField } from '#app/components/choice-field.tsx'
-import { useHydrated } from '#app/components/hydrated.ts'
-import { ScanCamera } from '#app/components/scan-camera.tsx'
 import { ScanResult } from '#app/components/scan-result.tsx'
-import { TextField } from '#app/components/text-field.tsx'
+import { ScanSources } from '#app/components/scan-sources.tsx'
 import { useWedge } from '#app/components/use-wedge.ts'
 import { type ScanSource, scanForm } from '#app/scanning/scan-form.ts'
 import { NO_SCAN, type ScanView } from '#app/scanning/scan-view.ts'
-import { scannerOf } from '#app/scanning/scanner.server.ts'
 import { sentForm } from '#app/sent-form.server.ts'
 import { scanResult } from '#app/views/scan-result.server.ts'
 import { scanTarget } from '#app/views/scan-target.server.ts'
@@ -61,7 +58,7 @@ export default function Scan({ loaderData: { target, scanner }, actionData }: Ro
         <input key={text} type="hidden" name="before" value={text} />
       ))}
       <Outcome view={view} path={path} />
-      <Sources view={view} isBusy={isBusy} onCamera={send('camera')} />
+      <ScanSources view={view} isBusy={isBusy} onCamera={send('camera')} />
       <p className="text-sm text-ink2">
         {scanner.isTrusted
           ? 'The scanner of this workstation has proved to send whole codes.'
@@ -112,46 +109,5 @@ function Outcome({ view, path }: OutcomeProps) {
         </div>
       </ScanResult>
     </Card>
-  )
-}
-
-interface SourcesProps {
-  readonly view: ScanView
-  readonly isBusy: boolean
-  readonly onCamera: (raw: string) => void
-}
-
-/** The scanner needs nothing on the page; the camera opens; a code can be typed, without scripts too. */
-function Sources({ view, isBusy, onCamera }: SourcesProps) {
-  const [isOpen, setOpen] = useState(false)
-  const isHydrated = useHydrated()
-  const read = (raw: string) => {
-    setOpen(false)
-    onCamera(raw)
-  }
-  return (
-    <div className="grid gap-3">
-      <TextField
-        key={view.typed}
-        id="code"
-        name="code"
-        label="Code"
-        hint="Scan it, or type what is printed below it with its brackets: (01)09521234543213(10)AB12"
-        errors={view.error ? [view.error] : undefined}
-        defaultValue={view.typed}
-        autoComplete="off"
-      />
-      <div className="flex flex-wrap gap-2">
-        <Button variant="primary" size={48} aria-disabled={isBusy || undefined}>
-          Look it up
-        </Button>
-        {isHydrated && (
-          <Button type="button" size={48} onClick={() => setOpen(true)}>
-            Use the camera
-          </Button>
-        )}
-      </div>
-      {isOpen && <ScanCamera onRead={read} onClose={() => setOpen(false)} />}
-    </div>
   )
 }
