@@ -12,6 +12,7 @@ import { RouterContextProvider, type ServerBuild } from 'react-router'
 import type * as entry from './app/entry.server.tsx'
 import { env } from './app/env.server.ts'
 import type { RequestFacts } from './app/request-context.server.ts'
+import { securityHeaders, strictTransport } from './app/security-headers.ts'
 
 const MOST_BODY_BYTES = 64 * 1024 // the longest form has about 4 kB
 const uploads = [
@@ -19,6 +20,8 @@ const uploads = [
   { path: /^\/(patients\/[\w-]+\/chart\/[\w-]+|entries\/[\w-]+\/correct)(\.data)?$/, most: 48 * 1024 * 1024 },
   { path: /^\/catalogue\/import(\.data)?$/, most: 2.2 * 1024 * 1024 }, // a catalogue of some ten thousand items
 ]
+/** The address of a calendar is its password. */
+const SECRET_IN_PATH = /^(\/calendar\/)[^/]+/
 const DRAIN_MS = 2000 // npm start promises an end within three seconds, database included
 const LONGEST_END_MS = 2400 // then npm start kills the process
 
@@ -121,7 +124,8 @@ function contextOf(_request: unknown, response: Response) {
 
 function logged(...[request, response, next]: Parameters<RequestHandler>) {
   const startedAt = performance.now()
-  const { method, path } = request
+  const { method } = request
+  const path = request.path.replace(SECRET_IN_PATH, '$1…')
   response.once('close', () => {
     if (path.startsWith('/assets/') && response.statusCode < 400) return
     const { requestId, logged: facts } = factsOf(response)
@@ -141,29 +145,6 @@ function headersSet(...[request, response, next]: Parameters<RequestHandler>) {
     return writeHead(...values)
   }) as typeof writeHead
   next()
-}
-
-const strictTransport = { 'Strict-Transport-Security': 'max-age=31536000; includeSubDomains' }
-
-function securityHeaders({ nonce, requestId }: RequestFacts) {
-  const policy = [
-    `default-src 'none'`,
-    `script-src 'nonce-${nonce}' 'strict-dynamic' 'wasm-unsafe-eval'`,
-    `style-src 'self' 'nonce-${nonce}'`,
-    `font-src 'self'; img-src 'self' blob:; connect-src 'self'; worker-src 'self'; manifest-src 'self'`,
-    `form-action 'self'; base-uri 'none'; frame-ancestors 'none'; object-src 'none'`,
-  ]
-  return {
-    'Content-Security-Policy': policy.join('; '),
-    'Cache-Control': 'no-store',
-    'Cross-Origin-Opener-Policy': 'same-origin',
-    'Cross-Origin-Resource-Policy': 'same-origin',
-    'Permissions-Policy': 'camera=(self), geolocation=(), microphone=()',
-    // Not 'no-referrer': a form sent without scripts would say 'Origin: null', and React Router refuses that.
-    'Referrer-Policy': 'same-origin',
-    'X-Content-Type-Options': 'nosniff',
-    'X-Request-Id': requestId,
-  }
 }
 
 /** Refuses a body past the limit, by what it says of itself and, where it says nothing, by counting as it arrives. */

@@ -87,7 +87,7 @@ test.each(rules.map(({ name }) => name ?? ''))('%s', name => {
 test('every import is found', () => {
   const lost = cruised.modules.flatMap(({ source, dependencies }) =>
     dependencies
-      .filter(({ couldNotResolve, module }) => couldNotResolve && !/\+types|virtual:|\.css$/.test(module))
+      .filter(({ couldNotResolve, module }) => couldNotResolve && !/\+types|virtual:|\.css$|\?url$/.test(module))
       .map(({ module }) => `${source} imports ${module}`),
   )
   expect(lost).toEqual([])

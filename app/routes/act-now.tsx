@@ -36,11 +36,7 @@ export default function ActNow({ loaderData: { patientId, entryId, says, urgent,
     <div className="mx-auto grid max-w-4xl gap-4 px-4 py-5 md:px-6">
       <h1 className="text-2xl font-bold">{urgent.length > 0 ? 'Act now' : 'Nothing here asks to act now'}</h1>
       {urgent.map(({ name, action, cause }) => (
-        <section
-          key={name}
-          aria-label={action}
-          className="grid gap-3 rounded-card border-2 border-late bg-late-tint p-5"
-        >
+        <div key={name} className="grid gap-3 rounded-card border-2 border-late bg-late-tint p-5">
           <p className="text-2xl font-bold">{action}</p>
           <p className="text-lg">{cause}</p>
           {answering && (
@@ -55,7 +51,7 @@ export default function ActNow({ loaderData: { patientId, entryId, says, urgent,
               </LinkButton>
             </div>
           )}
-        </section>
+        </div>
       ))}
       <p className="text-ink2">{says}</p>
       <p>

@@ -1,11 +1,10 @@
-import { Link } from 'react-router'
 import { patientContext } from '#app/auth/patient-access.server.ts'
 import { can, canByGrant } from '#app/auth/permissions.ts'
 import { signedIn } from '#app/auth/signed-in.server.ts'
-import { LinkButton } from '#app/components/button.tsx'
 import { Card } from '#app/components/card.tsx'
 import { CareDue } from '#app/components/care-due.tsx'
 import { CareStrip, SpanChoice } from '#app/components/care-strip.tsx'
+import { ChartOther } from '#app/components/chart-other.tsx'
 import { EntryList } from '#app/components/entry-list.tsx'
 import { KindFilter } from '#app/components/kind-filter.tsx'
 import { useLive } from '#app/components/live.ts'
@@ -124,33 +123,4 @@ function linkWith(search: string, name: string, value: string): string {
   if (value === '') params.delete(name)
   else params.set(name, value)
   return `?${params}`
-}
-
-interface ChartOtherProps {
-  readonly patientId: string
-  readonly kinds: readonly { readonly slug: string; readonly title: string }[]
-  readonly stayLinks: readonly { readonly href: string; readonly words: string }[]
-}
-
-function ChartOther({ patientId, kinds, stayLinks }: ChartOtherProps) {
-  return (
-    <Card title="Chart something else">
-      <ul className="flex flex-wrap gap-2">
-        {kinds.map(({ slug, title }) => (
-          <li key={slug}>
-            <LinkButton href={`/patients/${patientId}/chart/${slug}`}>{title}</LinkButton>
-          </li>
-        ))}
-      </ul>
-      {stayLinks.length > 0 && (
-        <p className="mt-3 flex flex-wrap gap-x-6">
-          {stayLinks.map(({ href, words }) => (
-            <Link key={href} to={href} className="inline-flex min-h-11 items-center font-semibold underline">
-              {words}
-            </Link>
-          ))}
-        </p>
-      )}
-    </Card>
-  )
 }

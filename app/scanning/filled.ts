@@ -22,7 +22,7 @@ export interface ScannedItem {
 export function filledFrom(kind: AnyCareKind, scanned: ScannedItem): Typed | null {
   const field = itemField(kind)
   if (field?.meta.of !== scanned.of) return null
-  const known: Readonly<Record<string, unknown>> = {
+  const known: Readonly<Record<string, string | number | boolean | null | undefined>> = {
     ...scanned.item,
     lot: scanned.lot,
     expiresOn: scanned.expiresOn,

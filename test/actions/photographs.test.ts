@@ -114,11 +114,18 @@ test('the same form sent twice is charted once, with one photograph', async () =
   expect(filesLeft()).toBe(2)
 })
 
+/** The id under which the form is charted. */
+function idOf(form: FormData): string {
+  const id = form.get('id')
+  if (typeof id !== 'string') throw new Error('The form has no id')
+  return id
+}
+
 test('a correction keeps what it names, and can name no photograph of another entry', async () => {
   const first = formWith([['a.png', await solid(60, 40).png().toBuffer()]])
   await send(first)
   const [kept] = await rows()
-  const entryId = String(first.get('id'))
+  const entryId = idOf(first)
   const correction = (photograph: string) => [
     ...wholeForm(stomaAndSkin, given.nurse),
     ['reason', 'Wrong place'] as const,
