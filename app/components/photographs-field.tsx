@@ -73,7 +73,12 @@ export function PhotographsField({ most, kept, ...field }: PhotographsFieldProps
 function useChosen() {
   const [chosen, setChosen] = useState<readonly Chosen[]>([])
   const [tooLarge, setTooLarge] = useState<readonly string[]>([])
-  useEffect(() => () => chosen.forEach(({ address }) => URL.revokeObjectURL(address)), [chosen])
+  useEffect(
+    () => () => {
+      for (const { address } of chosen) URL.revokeObjectURL(address)
+    },
+    [chosen],
+  )
   const choose = ({ target }: ChangeEvent<HTMLInputElement>) => {
     const files = [...(target.files ?? [])]
     const large = files.filter(({ size }) => size > PHOTOGRAPH_LIMITS.bytes)
