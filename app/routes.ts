@@ -20,6 +20,10 @@ export default [
     route('tubes', 'routes/tubes.tsx'),
     route('wards/:wardId/board', 'routes/board.tsx'),
     route('wards/:wardId/admit', 'routes/admit.tsx'),
+    route('wards/:wardId/supplies', 'routes/supplies.tsx'),
+    route('wards/:wardId/supplies/order.csv', 'routes/supplies-order.ts'),
+    route('wards/:wardId/supplies/history', 'routes/supplies-history.tsx'),
+    route('wards/:wardId/supplies/:act', 'routes/supplies-act.tsx'),
 
     // patients
     route('patients', 'routes/patients.tsx'),

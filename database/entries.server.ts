@@ -1,9 +1,10 @@
 import type { Transaction } from 'sequelize'
-import type { AnyCharted, DataOf, StoredEntry } from '#app/care/kind.ts'
+import type { AnyCharted, DataOf, PatientRecord, StoredEntry } from '#app/care/kind.ts'
 import { versionOf } from '#app/care/payload.ts'
 import { type Charting, type EntryRow, explained } from './entry-outcome.server.ts'
 import { isWorthARetry } from './errors.server.ts'
 import { select, transact } from './sequelize.server.ts'
+import { type StockUse, takeFromStock } from './stock-use.server.ts'
 
 /** Who charts, in the role they have at this moment. */
 export type Author = { readonly id: string; readonly role: string }
@@ -22,6 +23,8 @@ export interface NewEntry<K extends AnyCharted> extends Act {
   readonly stayId: string
   readonly data: DataOf<K>
   readonly reason?: string | undefined
+  /** The record before the act, where the caller has it: it tells which of two like things was used. */
+  readonly before?: PatientRecord | null | undefined
 }
 
 /** An act as it should have been charted, and why. */
@@ -42,7 +45,7 @@ export type Alongside = (transaction: Transaction) => Promise<void>
 
 /** Charts one act. Safe to repeat. Throws `DatabaseUnavailable`; anything else thrown is a mistake of the caller. */
 export async function addEntry<K extends AnyCharted>(entry: NewEntry<K>, alongside?: Alongside): Promise<Charting> {
-  return chart(rowOf(entry, null), alongside)
+  return chart(rowOf(entry, null), withStock(usageOf(entry), alongside))
 }
 
 /** Charts an act anew in the place of an earlier entry of the same stay and kind. */
@@ -50,7 +53,8 @@ export async function correctEntry<K extends AnyCharted>(
   correction: Correction<K>,
   alongside?: Alongside,
 ): Promise<Charting> {
-  return chart(rowOf(correction, correction.supersedes), alongside)
+  const use = { ...usageOf(correction), supersedes: correction.supersedes }
+  return chart(rowOf(correction, correction.supersedes), withStock(use, alongside))
 }
 
 /** Retracts an entry: a row of its own, with the payload of the one that no longer counts. */
@@ -73,7 +77,29 @@ export async function retractEntry(
     status: 'retracted',
     data: JSON.stringify(entry.raw),
   }
-  return chart(row, alongside)
+  const use = { ...row, used: [], supersedes: entry.id }
+  return chart(row, withStock(use, alongside))
+}
+
+function usageOf<K extends AnyCharted>({
+  id,
+  stayId,
+  performedAt,
+  recordedBy,
+  kind,
+  data,
+  before,
+}: NewEntry<K>): StockUse {
+  return { id, stayId, performedAt, recordedBy: recordedBy.id, used: kind.uses?.(data, before ?? null) ?? [] }
+}
+
+/** Whoever charts what takes from the stock takes it: it is not for a page to think of. */
+function withStock(use: StockUse, alongside?: Alongside): Alongside | undefined {
+  if (use.used.length === 0 && use.supersedes === undefined) return alongside
+  return async transaction => {
+    await takeFromStock(use, transaction)
+    await alongside?.(transaction)
+  }
 }
 
 function rowOf<K extends AnyCharted>(entry: NewEntry<K>, supersedesId: string | null): EntryRow {

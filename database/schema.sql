@@ -456,6 +456,50 @@ CREATE TABLE `stays` (
   CONSTRAINT `stays_end_after_they_start` CHECK (`discharged_at` is null or `discharged_at` >= `admitted_at`)
 ) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
 
+CREATE TABLE `stock_moves` (
+  `act_id` uuid NOT NULL COMMENT 'minted when the form was opened, or the entry: the same id twice is the same act',
+  `part` tinyint(3) unsigned NOT NULL COMMENT 'an act may move several things, or one from place to place',
+  `act` varchar(16) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  `ward_id` uuid NOT NULL,
+  `bed_id` uuid DEFAULT NULL COMMENT 'null: the store of the ward',
+  `supply` varchar(32) CHARACTER SET ascii COLLATE ascii_bin DEFAULT NULL COMMENT 'by name, as the program lists them',
+  `tube_id` uuid DEFAULT NULL,
+  `inner_cannula_id` uuid DEFAULT NULL,
+  `item` varchar(36) CHARACTER SET ascii COLLATE ascii_bin GENERATED ALWAYS AS (coalesce(convert(`supply` using utf8mb4),cast(`tube_id` as char(36) charset utf8mb4),cast(`inner_cannula_id` as char(36) charset utf8mb4))) STORED,
+  `quantity` int(11) NOT NULL COMMENT 'pieces; negative: they left the place',
+  `counted` int(10) unsigned DEFAULT NULL COMMENT 'what lay there by a count; quantity is the difference',
+  `entry_id` uuid DEFAULT NULL COMMENT 'whose use it is; of a give-back: the entry that no longer counts',
+  `stay_id` uuid DEFAULT NULL COMMENT 'whose patient used it',
+  `moved_at` datetime(3) NOT NULL COMMENT 'when it was done; of a use: when the care was',
+  `recorded_at` datetime(3) NOT NULL DEFAULT utc_timestamp(3),
+  `recorded_by` uuid NOT NULL,
+  `reason` varchar(500) DEFAULT NULL,
+  PRIMARY KEY (`act_id`,`part`),
+  KEY `stock_moves_of_place` (`ward_id`,`item`,`bed_id`,`quantity`),
+  KEY `stock_moves_of_bed` (`bed_id`,`item`,`quantity`),
+  KEY `stock_moves_of_ward` (`ward_id`,`recorded_at`,`act_id`,`part`),
+  KEY `stock_moves_of_use` (`stay_id`,`moved_at`,`item`,`quantity`),
+  KEY `stock_moves_of_entry` (`entry_id`),
+  KEY `stock_moves_bed` (`bed_id`,`ward_id`),
+  KEY `stock_moves_tube` (`tube_id`),
+  KEY `stock_moves_inner_cannula` (`inner_cannula_id`),
+  KEY `stock_moves_recorded_by` (`recorded_by`),
+  CONSTRAINT `stock_moves_bed` FOREIGN KEY (`bed_id`, `ward_id`) REFERENCES `beds` (`id`, `ward_id`),
+  CONSTRAINT `stock_moves_entry` FOREIGN KEY (`entry_id`) REFERENCES `entries` (`id`),
+  CONSTRAINT `stock_moves_inner_cannula` FOREIGN KEY (`inner_cannula_id`) REFERENCES `inner_cannulas` (`id`),
+  CONSTRAINT `stock_moves_recorded_by` FOREIGN KEY (`recorded_by`) REFERENCES `users` (`id`),
+  CONSTRAINT `stock_moves_stay` FOREIGN KEY (`stay_id`) REFERENCES `stays` (`id`),
+  CONSTRAINT `stock_moves_tube` FOREIGN KEY (`tube_id`) REFERENCES `tubes` (`id`),
+  CONSTRAINT `stock_moves_ward` FOREIGN KEY (`ward_id`) REFERENCES `wards` (`id`),
+  CONSTRAINT `stock_moves_are_of_one_item` CHECK ((`supply` is not null) + (`tube_id` is not null) + (`inner_cannula_id` is not null) = 1),
+  CONSTRAINT `stock_moves_act_is_known` CHECK (`act` in ('received','moved','used','given back','counted','wasted')),
+  CONSTRAINT `stock_moves_go_one_way` CHECK (`act` = 'received' and `quantity` > 0 or `act` = 'moved' and `quantity` <> 0 or `act` in ('used','wasted') and `quantity` < 0 or `act` = 'given back' and `quantity` > 0 or `act` = 'counted'),
+  CONSTRAINT `stock_moves_count_what_they_found` CHECK (`act` = 'counted' = (`counted` is not null)),
+  CONSTRAINT `stock_moves_of_care_name_it` CHECK (`act` in ('used','given back') = (`entry_id` is not null) and `entry_id` is null = (`stay_id` is null)),
+  CONSTRAINT `stock_moves_waste_with_a_reason` CHECK (`act` <> 'wasted' or `reason` is not null and char_length(trim(`reason`)) > 0),
+  CONSTRAINT `stock_moves_have_happened` CHECK (`moved_at` <= `recorded_at` + interval 2 minute)
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_uca1400_ai_ci;
+
 CREATE TABLE `tubes` (
   `id` uuid NOT NULL,
   `line_id` uuid NOT NULL,
@@ -705,3 +749,9 @@ CREATE TRIGGER IF NOT EXISTS record_changes_refuse_delete BEFORE DELETE ON recor
 
 CREATE TRIGGER IF NOT EXISTS record_changes_refuse_update BEFORE UPDATE ON record_changes FOR EACH ROW
     SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'record_changes is append-only';
+
+CREATE TRIGGER IF NOT EXISTS stock_moves_refuse_delete BEFORE DELETE ON stock_moves FOR EACH ROW
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'stock_moves is append-only: count, or give back with a new move';
+
+CREATE TRIGGER IF NOT EXISTS stock_moves_refuse_update BEFORE UPDATE ON stock_moves FOR EACH ROW
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'stock_moves is append-only: count, or give back with a new move';

@@ -12,9 +12,10 @@ const mayImport: Readonly<Record<string, readonly string[]>> = {
   rules: ['care', 'clinical', 'time'],
   charting: ['rules', 'care', 'clinical', 'time'],
   scanning: ['charting', 'catalogue', 'rules', 'care', 'clinical', 'time'],
-  components: ['scanning', 'charting', 'catalogue', 'rules', 'care', 'clinical', 'time'],
+  supplies: ['charting', 'care', 'clinical', 'time'],
+  components: ['supplies', 'scanning', 'charting', 'catalogue', 'rules', 'care', 'clinical', 'time'],
 }
-const pure = '^app/(time|clinical|care|catalogue|rules)/'
+const pure = '^app/(time|clinical|care|catalogue|rules|supplies)/'
 
 const rules: IForbiddenRuleType[] = [
   ...Object.entries(mayImport).map(([folder, others]) => ({

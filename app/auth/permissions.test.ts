@@ -14,6 +14,7 @@ const expected: Record<Act, string> = {
   'retract own entries': 'wwww---',
   'correct entries': '--ww---',
   'retract entries': '--ww---',
+  'keep supplies': 'wwww---',
   'admit patients': 'w-ww---',
   'move patients': 'w-w----',
   'discharge patients': 'w-w----',

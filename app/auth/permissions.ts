@@ -62,6 +62,7 @@ const permissions = {
   'retract own entries': bedside,
   'correct entries': leading,
   'retract entries': leading,
+  'keep supplies': bedside,
   'admit patients': { ...nursing, 'tracheostomy specialist': 'own wards' },
   'move patients': nursing,
   'discharge patients': nursing,

@@ -89,6 +89,8 @@ export interface Charted<Slug extends string, Schema extends z.ZodObject> {
   readonly schema: Schema
   /** upgrades[n] turns payload version n+1 into n+2. */
   readonly upgrades?: readonly ((old: never) => unknown)[]
+  /** What the act takes from the stock. `before`: the record before the act, where it is known; without it less is identified. */
+  uses?(data: z.output<Schema>, before: PatientRecord | null): readonly Used[]
 }
 
 export interface CareKind<Slug extends string, Schema extends z.ZodObject>
@@ -136,8 +138,6 @@ export interface CareKind<Slug extends string, Schema extends z.ZodObject>
   problems?(data: z.output<Schema>, context: CareContext, known: KnownNames): readonly FormProblem[]
   /** What the catalogue answers as an act with a scanned item is charted; `context`: the moment before it. */
   catalogued?(data: z.output<Schema>, context: CareContext, item: CataloguedItem): Partial<z.output<Schema>>
-  /** What the act takes from the stock; `context` is that of the moment before the act, as for `warnings`. */
-  uses?(data: z.output<Schema>, context: CareContext): readonly Used[]
   /** What this patient is going to take, by the intervals in force. */
   plannedUse?(context: CareContext): readonly PlannedUse[]
   /** A deferral is not care done: the strip shows it with a note instead of a dot. */

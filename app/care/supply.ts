@@ -19,19 +19,46 @@ export const supplyItems = {
 
 export type SupplyName = keyof typeof supplyItems
 
-/**
- * A tube or an inner cannula as somebody charted it: by its id in the catalogue, else by line and size as printed.
- * `inner cannula of a tube`: the disposable one that went in with the tube of that id, line and size.
- */
-export interface Device {
-  readonly device: 'tube' | 'inner cannula' | 'inner cannula of a tube'
+/** What was charted as used, and could not be told from the catalogue: counted all the same, and shown as what it is. */
+export const unidentified = {
+  tube: 'tube-not-identified',
+  innerCannula: 'inner-cannula-not-identified',
+} as const
+
+const unidentifiedWords: Readonly<Record<string, string>> = {
+  [unidentified.tube]: 'Tube, not identified',
+  [unidentified.innerCannula]: 'Inner cannula, not identified',
+}
+
+/** What a thing kept by name is called; undefined for any other name. */
+export function supplyWords(name: string): string | undefined {
+  return Object.hasOwn(supplyItems, name) ? supplyItems[name as SupplyName] : unidentifiedWords[name]
+}
+
+/** A tube as it was charted: by its id in the catalogue, else by what is printed on it. */
+export interface UsedTube {
+  readonly device: 'tube'
   readonly id?: string | undefined
   readonly line: string
   readonly size: string
+  readonly cuff: string
+  readonly fenestrated: string
+}
+
+/**
+ * An inner cannula as it was charted: by its id in the catalogue, else by line and size as printed, else as the disposable one
+ * of its tube. `ofTube`: what it went into, which tells a plain one from a fenestrated one of the same size.
+ */
+export interface UsedCannula {
+  readonly device: 'inner cannula'
+  readonly id?: string | undefined
+  readonly line: string
+  readonly size: string
+  readonly ofTube?: UsedTube | undefined
 }
 
 /** Something that can lie in a store or at a bed. */
-export type UsedItem = { readonly supply: SupplyName } | Device
+export type UsedItem = { readonly supply: SupplyName } | UsedTube | UsedCannula
 
 /** What an act took from the stock. */
 export interface Used {
@@ -43,6 +70,8 @@ export interface Used {
 export interface PlannedUse {
   readonly item: UsedItem
   readonly perDay: number
+  /** When the need for this very item began, such as with the tube in place; left out: with the stay. */
+  readonly since?: Date
 }
 
 /** One of a named item. */

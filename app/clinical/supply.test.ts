@@ -10,7 +10,7 @@ test.each([
   [0.1, 30, 0, 3],
   [0.7, 10, 10, 8],
   [2.5, 7, 20, 21],
-])('%f a day over %i days with %i %% wastage need %i', (perDay, horizon, wastage, need) => {
+])('%f a day over %i days with a wastage of %i in a hundred need %i', (perDay, horizon, wastage, need) => {
   expect(needOver(perDay, horizon, wastage)).toBe(need)
 })
 

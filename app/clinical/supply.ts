@@ -50,5 +50,5 @@ export function rateOf(
 const HAIR = 1e-9
 
 function wholeUp(pieces: number): number {
-  return Math.ceil(pieces - HAIR)
+  return Math.max(0, Math.ceil(pieces - HAIR))
 }

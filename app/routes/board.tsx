@@ -29,6 +29,7 @@ export async function loader({ params: { wardId }, context, request, url }: Rout
     wards: wards.map(({ id, name }) => ({ id, name })),
     charts: can(user, 'chart care', wardId),
     admits: can(user, 'admit patients', wardId),
+    keepsSupplies: can(user, 'keep supplies', wardId),
     seesAccess: can(user, 'see access log', wardId),
     countersigns: can(user, 'countersign', wardId),
   }
@@ -36,7 +37,7 @@ export async function loader({ params: { wardId }, context, request, url }: Rout
 
 /** The ward at a glance: who is late, how late, and what is due next. */
 export default function WardBoard({ loaderData }: Route.ComponentProps) {
-  const { served, order, wards, charts, admits, seesAccess, countersigns } = loaderData
+  const { served, order, wards, charts, admits, keepsSupplies, seesAccess, countersigns } = loaderData
   const { data: board, now, staleSince } = useLive(`/api/wards/${served.data.wardId}/board`, served)
   const patients = livePatients(board, now, order)
   const here = `/wards/${board.wardId}`
@@ -54,6 +55,7 @@ export default function WardBoard({ loaderData }: Route.ComponentProps) {
             <LinkButton href="/countersign">{`${board.toCountersign} to countersign`}</LinkButton>
           )}
           {admits && <LinkButton href={`${here}/admit`}>Admit</LinkButton>}
+          {keepsSupplies && <LinkButton href={`${here}/supplies`}>Supplies</LinkButton>}
           {seesAccess && <LinkButton href={`${here}/access`}>Who looked</LinkButton>}
         </div>
       </header>

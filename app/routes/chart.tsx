@@ -50,7 +50,8 @@ export async function action({ params, context, request, url }: Route.ActionArgs
   const check = await checked(sent)
   if (!check.ok) return data(check.answer, check.status)
   const { id, performedAt, witnessId, reason, care } = check.chart
-  const entry = { id, kind, stayId, performedAt, recordedBy: authorOf(user), witnessId, reason, data: care }
+  const before = sent.care.context?.record
+  const entry = { id, kind, stayId, performedAt, recordedBy: authorOf(user), witnessId, reason, data: care, before }
   const charting = await chartedWith(entry, photographs.added, check.alongside, also => addEntry(entry, also))
   if (charting.outcome === 'charted' || charting.outcome === 'already charted') {
     return redirect(afterCharting(params.patientId, charting.entry.id, check.isUrgent))

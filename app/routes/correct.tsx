@@ -44,6 +44,7 @@ export async function action({ params, context, request, url }: Route.ActionArgs
     stayId: entry.stayId,
     recordedBy: authorOf(asked.user),
     supersedes: entry.id,
+    before: asked.care.context?.record,
   }
   const charting = await chartedWith(correction, photographs.added, check.alongside, also =>
     correctEntry(correction, also),

@@ -23,6 +23,7 @@ import { airwayDetails } from './0056-airway-details.ts'
 import { photographs } from './0058-photographs.ts'
 import { entryLots } from './0060-entry-lots.ts'
 import { lotRecalls } from './0061-lot-recalls.ts'
+import { stockMoves } from './0062-stock-moves.ts'
 import { entrySignatures } from './0070-entry-signatures.ts'
 import { supervision } from './0071-supervision.ts'
 import { countersignatures } from './0072-countersignatures.ts'
@@ -59,6 +60,7 @@ export const migrations: Record<string, Migration> = {
   '0058-photographs': photographs,
   '0060-entry-lots': entryLots,
   '0061-lot-recalls': lotRecalls,
+  '0062-stock-moves': stockMoves,
   '0070-entry-signatures': entrySignatures,
   '0071-supervision': supervision,
   '0072-countersignatures': countersignatures,

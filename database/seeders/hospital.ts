@@ -13,6 +13,7 @@ import { idAt, type Random, randomFrom } from './random.ts'
 import type { DemoHospital, DemoMove, DemoPatient, DemoPerson, DemoStay } from './rows.ts'
 import type { BedStory } from './story.ts'
 import { withStudents } from './students.ts'
+import { demoStock } from './supplies.ts'
 import { bedLabelled, demoWards, type WardWithBeds } from './wards.ts'
 
 const stories: readonly BedStory[] = [...alderStories, ...birchStories, ...cedarStories]
@@ -30,7 +31,7 @@ export function demoHospital(now: Date, zone: Zone): DemoHospital {
     const random = randomFrom(`${story.bed} ${story.patient.recordNumber} ${now.getTime()}`)
     return stayOf(bedsideOf(story, { now, zone, random, rota, placeOf }), random)
   })
-  return {
+  const hospital = {
     seededAt: now,
     zone,
     wards: wards.map(ward => ward.row),
@@ -50,6 +51,7 @@ export function demoHospital(now: Date, zone: Zone): DemoHospital {
       now,
     ),
   }
+  return { ...hospital, stockMoves: demoStock(hospital) }
 }
 
 function stayOf(bedside: Bedside, random: Random) {

@@ -2,6 +2,7 @@ import type { Role } from '#app/auth/permissions.ts'
 import type { EmergencyNumber } from '#app/care/emergency.ts'
 import type { PatientFacts, StoredEntry } from '#app/care/kind.ts'
 import type { Policy } from '#app/care/policy.ts'
+import type { StockItem } from '#app/catalogue/identify.ts'
 import type { Catalogue } from '#app/catalogue/known-items.ts'
 import type { PressureUnit } from '#app/clinical/units.ts'
 import type { LocalDay, Zone } from '#app/time/zone.ts'
@@ -22,6 +23,7 @@ export interface DemoHospital {
   readonly policies: readonly DemoPolicy[]
   readonly catalogue: Catalogue
   readonly entries: readonly DemoEntry[]
+  readonly stockMoves: readonly DemoStockMove[]
 }
 
 export interface DemoWard {
@@ -100,4 +102,22 @@ export interface DemoPolicy extends Policy {
 /** An entry as it is read back, with the id of its witness, by which it is written. */
 export interface DemoEntry extends StoredEntry {
   readonly witnessId: string | null
+}
+
+/** What came to a place of a ward or left it; the stock is the sum. */
+export interface DemoStockMove {
+  readonly actId: string
+  readonly part: number
+  readonly act: string
+  readonly wardId: string
+  readonly bedId: string | null
+  readonly item: StockItem
+  readonly quantity: number
+  readonly counted: number | null
+  readonly entryId: string | null
+  readonly stayId: string | null
+  readonly movedAt: Date
+  readonly recordedAt: Date
+  readonly recordedBy: string
+  readonly reason: string | null
 }

@@ -1,7 +1,7 @@
 import type { Catalogue } from '#app/catalogue/known-items.ts'
 import { demoCatalogueChanges } from './catalogue.ts'
 import { competenceRows } from './competences.ts'
-import type { DemoChange, DemoEntry, DemoHospital, DemoPatient, DemoPolicy } from './rows.ts'
+import type { DemoChange, DemoEntry, DemoHospital, DemoPatient, DemoPolicy, DemoStockMove } from './rows.ts'
 
 /** Rows of one table by the names of its columns. */
 export interface TableRows {
@@ -22,6 +22,7 @@ export function demoTables(hospital: DemoHospital, passwordHash: string): readon
     ...catalogueTables(hospital),
     { table: 'entries', rows: entries.map(entryRow) },
     { table: 'competences', rows: competenceRows(hospital.signOffs) },
+    { table: 'stock_moves', rows: hospital.stockMoves.map(stockMoveRow) },
   ]
 }
 
@@ -169,4 +170,19 @@ function entryRow(entry: DemoEntry) {
   const people = { recorded_by: entry.recordedById, recorded_role: entry.recordedRole, witness_id: entry.witnessId }
   const rest = { supersedes_id: entry.supersedesId, reason, status, data: JSON.stringify(entry.raw) }
   return { id, stay_id: entry.stayId, kind, version, ...times, ...people, ...rest }
+}
+
+function stockMoveRow(move: DemoStockMove) {
+  const { part, act, quantity, counted, reason, item } = move
+  const named = { supply: null, tube_id: null, inner_cannula_id: null }
+  const kept =
+    'supply' in item
+      ? { supply: item.supply }
+      : 'tubeId' in item
+        ? { tube_id: item.tubeId }
+        : { inner_cannula_id: item.innerCannulaId }
+  const place = { ward_id: move.wardId, bed_id: move.bedId }
+  const whose = { entry_id: move.entryId, stay_id: move.stayId, recorded_by: move.recordedBy }
+  const times = { moved_at: move.movedAt, recorded_at: move.recordedAt }
+  return { act_id: move.actId, part, act, ...place, ...named, ...kept, quantity, counted, ...whose, ...times, reason }
 }

@@ -37,6 +37,11 @@ POST /tubes                            403 403 400 400 403 403 403   403 403 400
 GET  /wards/:wardId/board              200 200 200 200 404 404 200   404 404 404 404 404 404 404   404 404   own  in
 GET  /wards/:wardId/admit              200 403 200 200 404 404 403   404 404 404 404 404 404 404   404 404   own  in
 POST /wards/:wardId/admit              400 403 400 400 404 404 403   404 404 404 404 404 404 404   404 404   own  in
+GET  /wards/:wardId/supplies           200 200 200 200 404 404 403   404 404 404 404 404 404 404   404 404   own  in
+GET  /wards/:wardId/supplies/order.csv 200 200 200 200 404 404 403   404 404 404 404 404 404 404   404 404   own  in
+GET  /wards/:wardId/supplies/history   200 200 200 200 404 404 403   404 404 404 404 404 404 404   404 404   own  in
+GET  /wards/:wardId/supplies/:act      200 200 200 200 404 404 403   404 404 404 404 404 404 404   404 404   own  in
+POST /wards/:wardId/supplies/:act      400 400 400 400 404 404 403   404 404 404 404 404 404 404   404 404   own  in
 GET  /wards/:wardId/access             403 403 200 403 404 404 403   404 404 404 404 404 404 404   404 404   own  in
 GET  /patients                         200 200 200 200 403 403 200   200 200 200 200 403 403 200   200 200   own  in
 POST /patients                         200 200 200 200 403 403 200   200 200 200 200 403 403 200   200 200   own  in
@@ -147,7 +152,7 @@ beforeAll(async () => {
   await addPolicy(aComingPolicy(policyId, ward.id), author.id)
   const itemId = await aCatalogueTube(author.id)
   const ids = { policyId, wardId: ward.id, patientId, entryId, userId: author.id, itemId }
-  params = { ...ids, kind: 'cuff-pressure', items: 'tubes' }
+  params = { ...ids, kind: 'cuff-pressure', items: 'tubes', act: 'receive' }
 })
 
 // Everybody is signed in again, whatever the row before has done.

@@ -52,6 +52,7 @@ export function largeHospital(now: Date): BenchHospital {
       catalogue: demoCatalogue,
       policies: demoPolicies(now, ZONE, [first], author),
       entries: charts.flatMap(({ entries }) => latest(entries, ENTRIES_EACH)),
+      stockMoves: [],
     },
     nurse,
     copies: others.map(({ original, stay }) => ({ original, stayId: stay.id })),

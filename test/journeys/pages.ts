@@ -40,6 +40,7 @@ export const notPages: Readonly<Record<string, string>> = {
   'api/patients/:patientId/timeline': 'JSON',
   'api/wards/:wardId/board': 'JSON',
   'catalogue/export': 'CSV',
+  'wards/:wardId/supplies/order.csv': 'a file',
 }
 
 const specialist = 'specialist'
@@ -60,6 +61,13 @@ export const pages: readonly PageEntry[] = [
   { route: 'competence/:userId', as: 'educator', path: ({ person }) => `/competence/${person}` },
   { route: 'wards/:wardId/admit', as: charge, path: ({ ward }) => `/wards/${ward}/admit` },
   { route: 'wards/:wardId/admit', as: charge, path: ({ ward }) => `/wards/${ward}/admit?known` },
+  { route: 'wards/:wardId/supplies', as: 'nurse.alder', path: ({ ward }) => `/wards/${ward}/supplies` },
+  { route: 'wards/:wardId/supplies/history', as: 'nurse.alder', path: ({ ward }) => `/wards/${ward}/supplies/history` },
+  ...['receive', 'move', 'count', 'waste'].map(act => ({
+    route: 'wards/:wardId/supplies/:act',
+    as: 'nurse.alder',
+    path: ({ ward }: Known) => `/wards/${ward}/supplies/${act}?find=corvane`,
+  })),
   { route: 'wards/:wardId/access', as: charge, path: ({ ward }) => `/wards/${ward}/access` },
   { route: 'patients', as: 'nurse.alder', path: () => '/patients' },
   { route: 'patients/:patientId', as: 'nurse.alder', path: ({ patient }) => `/patients/${patient}` },

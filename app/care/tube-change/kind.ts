@@ -7,7 +7,7 @@ import { tubeChanges } from './schema.ts'
 import { tubeSentence } from './sentence.ts'
 import { tubeChangeSettings } from './settings.ts'
 import { standingTubeWarnings } from './standing.ts'
-import { tubeUse } from './supplies.ts'
+import { plannedTubes, tubeUse } from './supplies.ts'
 import { tubeTasks } from './tasks.ts'
 import { sameTubeAgain, tubeWarnings } from './warnings.ts'
 
@@ -29,6 +29,7 @@ export const tubeChange = careKind({
   startsWith: plannedAnswers,
   usual: sameTubeAgain,
   uses: tubeUse,
+  plannedUse: plannedTubes,
   warnings: tubeWarnings,
   standing: standingTubeWarnings,
 })
