@@ -1,7 +1,7 @@
 import { data } from 'react-router'
 import type { AnyCareKind, CareContext } from '#app/care/kind.ts'
 import { careKinds } from '#app/care/kinds.ts'
-import { policyInForce, type Values, valuesFor } from '#app/care/policy.ts'
+import { type Policy, policyInForce, type Values, valuesFor } from '#app/care/policy.ts'
 import type { PlannedUse } from '#app/care/supply.ts'
 import {
   supplyHorizon,
@@ -20,7 +20,7 @@ import { policies } from '#database/policies.server.ts'
 import { type StayRecord, wardRecords } from '#database/records.server.ts'
 import { type StayUse, type Stock, stockKeptSince, stockOfWard, usedByStays } from '#database/stock.server.ts'
 import { type Identify, type ItemWords, identified, itemKey, wordsOfItems } from '#database/stock-items.server.ts'
-import { wardById } from '#database/wards.server.ts'
+import { type Ward, wardById } from '#database/wards.server.ts'
 import { contextOf } from './care-of.server.ts'
 
 /** The rule orders are reckoned by, on a ward; without a reviewed policy the product's own numbers. */
@@ -63,25 +63,7 @@ export async function wardSupplies(wardId: string, now: Date): Promise<WardSuppl
   if (!ward) throw data('There is no such ward.', 404)
   const policy = policyInForce(known, wardId, now)
   const values = policy ? valuesFor(policy) : null
-  const facts = { zone: env.hospitalTimeZone, shiftTimes: ward.shiftTimes, pressureUnit: ward.pressureUnit }
-  const contexts = records.stays.map(stay => ({ stay, context: policy ? contextOf(stay, policy, facts, now) : null }))
-  const window = values?.of(supplyRateDays) ?? supplyRateDays.default
-  const uses = await usedByStays(
-    records.stays.map(({ stay }) => stay.id),
-    now,
-    window,
-  )
-  const plans = contexts.map(({ stay, context }) => ({ stay, planned: context ? plannedUse(context) : [] }))
-  const itemOf = await identified(
-    plans.flatMap(({ planned }) => planned.map(({ item }) => item)),
-    null,
-  )
-  const began = latest(earlier(now, days(window)), keptSince ?? now)
-  const leastDays = values?.of(supplyLeastDays) ?? supplyLeastDays.default
-  const patients = plans.map(({ stay, planned }) => {
-    const counting = { from: latest(began, stay.stay.admittedAt), now, leastDays }
-    return { stay, rates: patientRates(plannedOf(planned, itemOf), usesOf(uses, stay), counting) }
-  })
+  const patients = await patientSupplies(records.stays, { policy, ward, keptSince, now })
   const rates = wardRates(patients.map(patient => patient.rates))
   const keys = [...new Set([...stock.map(({ item }) => item), ...rates.keys()])]
   const words = await wordsOfItems(keys)
@@ -99,6 +81,40 @@ export async function wardSupplies(wardId: string, now: Date): Promise<WardSuppl
     words,
     hasPolicy: policy !== undefined,
   }
+}
+
+interface Kept {
+  readonly policy: Policy | undefined
+  readonly ward: Ward
+  readonly keptSince: Date | undefined
+  readonly now: Date
+}
+
+/** What each of some present patients uses: counted since the stock was kept and they came, or planned. */
+async function patientSupplies(
+  stays: readonly StayRecord[],
+  { policy, ward, keptSince, now }: Kept,
+): Promise<readonly PatientSupply[]> {
+  const values = policy ? valuesFor(policy) : null
+  const facts = { zone: env.hospitalTimeZone, shiftTimes: ward.shiftTimes, pressureUnit: ward.pressureUnit }
+  const contexts = stays.map(stay => ({ stay, context: policy ? contextOf(stay, policy, facts, now) : null }))
+  const window = values?.of(supplyRateDays) ?? supplyRateDays.default
+  const uses = await usedByStays(
+    stays.map(({ stay }) => stay.id),
+    now,
+    window,
+  )
+  const plans = contexts.map(({ stay, context }) => ({ stay, planned: context ? plannedUse(context) : [] }))
+  const itemOf = await identified(
+    plans.flatMap(({ planned }) => planned.map(({ item }) => item)),
+    null,
+  )
+  const began = latest(earlier(now, days(window)), keptSince ?? now)
+  const leastDays = values?.of(supplyLeastDays) ?? supplyLeastDays.default
+  return plans.map(({ stay, planned }) => {
+    const counting = { from: latest(began, stay.stay.admittedAt), now, leastDays }
+    return { stay, rates: patientRates(plannedOf(planned, itemOf), usesOf(uses, stay), counting) }
+  })
 }
 
 /** What a patient is going to need by the intervals in force, from every kind of care. */
