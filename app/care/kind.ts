@@ -165,8 +165,8 @@ export function careKind<const Slug extends string, Schema extends z.ZodObject>(
   return kind
 }
 
-/** `inner-cannula-change` -> `Inner cannula change`: names of tasks and settings are their titles. */
+/** `inner-cannula-change` -> `Inner cannula change`, `hme-change` -> `HME change`: names of tasks and settings are their titles. */
 export function wordsOf(name: string): string {
-  const words = name.replaceAll('-', ' ')
+  const words = name.replaceAll('-', ' ').replace(/\bhme\b/, 'HME')
   return words.charAt(0).toUpperCase() + words.slice(1)
 }

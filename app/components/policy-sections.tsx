@@ -82,7 +82,7 @@ export function JumpLinks({
   readonly sections: readonly { readonly id: string; readonly title: string }[]
 }) {
   return (
-    <nav aria-label="Sections" className="flex flex-wrap gap-x-5 print:hidden">
+    <nav aria-label="Parts of the policy" className="flex flex-wrap gap-x-5 print:hidden">
       {sections.map(({ id, title }) => (
         <a key={id} href={`#${id}`} className="inline-flex min-h-11 items-center font-semibold text-brand underline">
           {title}

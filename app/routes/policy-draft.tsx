@@ -69,7 +69,10 @@ export default function PolicyDraft({ loaderData, actionData }: Route.ComponentP
         <ErrorSummary title="Not saved yet. Please check:" errors={errors} />
         {stale && <StaleNotice stale={stale} />}
         <PolicyFields key={draft.rev} sections={sections} find={find} changedOnly={changedOnly} />
-        <div className="sticky bottom-0 flex flex-wrap gap-3 border-t border-line bg-paper py-3 print:hidden">
+        <div
+          data-final-bar
+          className="sticky bottom-0 z-10 flex flex-wrap gap-3 border-t border-line bg-paper py-3 print:hidden"
+        >
           <Button name="intent" value="save" size={48} variant="primary">
             Save draft
           </Button>
