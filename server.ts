@@ -11,15 +11,10 @@ import express, { type ErrorRequestHandler, type RequestHandler, type Response }
 import { RouterContextProvider, type ServerBuild } from 'react-router'
 import type * as entry from './app/entry.server.tsx'
 import { env } from './app/env.server.ts'
+import { bodyInTime, bodyLimited, LONGEST_UPLOAD_MS } from './app/request-body.server.ts'
 import type { RequestFacts } from './app/request-context.server.ts'
 import { securityHeaders, strictTransport } from './app/security-headers.ts'
 
-const MOST_BODY_BYTES = 64 * 1024 // the longest form has about 4 kB
-const uploads = [
-  // four photographs of 8 MB, and some more, so that one too many is said at its field
-  { path: /^\/(patients\/[\w-]+\/chart\/[\w-]+|entries\/[\w-]+\/correct)(\.data)?$/, most: 48 * 1024 * 1024 },
-  { path: /^\/catalogue\/import(\.data)?$/, most: 2.2 * 1024 * 1024 }, // a catalogue of some ten thousand items
-]
 /** The address of a calendar is its password. */
 const SECRET_IN_PATH = /^(\/calendar\/)[^/]+/
 const DRAIN_MS = 2000 // npm start promises an end within three seconds, database included
@@ -33,7 +28,7 @@ const clientFiles = fileURLToPath(new URL('./build/client/', import.meta.url))
 const app = express()
 app.disable('x-powered-by')
 app.set('trust proxy', 'loopback')
-app.use(identified, logged, headersSet)
+app.use(identified, logged, headersSet, bodyInTime)
 app.use(compression({ level: 1, brotli: { params: { [constants.BROTLI_PARAM_QUALITY]: 0 } } }))
 app.use('/assets', express.static(`${clientFiles}assets`, { immutable: true, maxAge: '1y', index: false }), notFound)
 app.use(openFiles(express.static(clientFiles, { maxAge: '1h', index: false, redirect: false })))
@@ -43,7 +38,13 @@ app.use(failed)
 
 const server = createServer(
   // The checker's default of 30 s would let slow senders hold connections far past these limits.
-  { headersTimeout: 8000, requestTimeout: 15_000, connectionsCheckingInterval: 2000, keepAliveTimeout: 10_000 },
+  // The time for a whole request is that of an upload; `bodyInTime` holds every other one to less.
+  {
+    headersTimeout: 8000,
+    requestTimeout: LONGEST_UPLOAD_MS,
+    connectionsCheckingInterval: 2000,
+    keepAliveTimeout: 10_000,
+  },
   app,
 )
 if (env.listens === 'when told') await once(process, 'message')
@@ -144,26 +145,6 @@ function headersSet(...[request, response, next]: Parameters<RequestHandler>) {
     for (const [name, value] of Object.entries(defaults)) if (!response.hasHeader(name)) response.setHeader(name, value)
     return writeHead(...values)
   }) as typeof writeHead
-  next()
-}
-
-/** Refuses a body past the limit, by what it says of itself and, where it says nothing, by counting as it arrives. */
-function bodyLimited(...[request, response, next]: Parameters<RequestHandler>) {
-  const refuse = () => {
-    if (response.headersSent) return
-    // The rest of the body is still on its way: a connection kept open would take it for the next request.
-    response.set('Connection', 'close').status(413).type('text').send('The form is too long. Nothing was charted.')
-    response.once('finish', () => request.destroy())
-  }
-  const isUpload = request.is('multipart/form-data') !== false
-  const most = (isUpload && uploads.find(({ path }) => path.test(request.path))?.most) || MOST_BODY_BYTES
-  if (Number(request.headers['content-length'] ?? 0) > most) return refuse()
-  let bytes = 0
-  request.on('data', (chunk: Buffer) => {
-    bytes += chunk.length
-    if (bytes > most) refuse()
-  })
-  request.pause() // counting must not start the flow before a route reads
   next()
 }
 

@@ -13,6 +13,8 @@ export interface EntryListItem extends Omit<TimelineEntryView, 'href' | 'late' |
 }
 
 interface EntryListProps {
+  /** Where photographs are seen beside those of another day. */
+  readonly photographsHref: string
   readonly entries: readonly EntryListItem[]
   /** Local day, to say "today". */
   readonly today: string
@@ -21,7 +23,7 @@ interface EntryListProps {
 }
 
 /** What was charted, latest first, under a heading for each day. */
-export function EntryList({ entries, today, children }: EntryListProps) {
+export function EntryList({ entries, today, photographsHref, children }: EntryListProps) {
   if (entries.length === 0) return <Empty title="Nothing charted">{children}</Empty>
   const days = [...new Set(entries.map(({ day }) => day))]
   return days.map(day => (
@@ -42,7 +44,11 @@ export function EntryList({ entries, today, children }: EntryListProps) {
                 statusSays: statusSays ?? undefined,
               }}
             >
-              <Thumbnails ids={photographs} of={`${entry.title} at ${entry.time}`} />
+              <Thumbnails
+                ids={photographs}
+                of={`${entry.title} at ${entry.time}`}
+                compareHref={`${photographsHref}?later=${entry.id}`}
+              />
             </TimelineEntry>
           ))}
       </ul>

@@ -18,7 +18,7 @@ interface Chosen {
 /** Photographs to send with the form: files, with what they show once scripts run, and those that the entry has already. */
 export function PhotographsField({ most, kept, ...field }: PhotographsFieldProps) {
   const hydrated = useHydrated()
-  const { chosen, tooLarge, choose } = useChosen()
+  const { chosen, leftOut, choose } = useChosen(most)
   const isSending = useNavigation().state === 'submitting' && chosen.length > 0
   return (
     <div className="grid gap-3">
@@ -43,9 +43,9 @@ export function PhotographsField({ most, kept, ...field }: PhotographsFieldProps
           {`JPEG, PNG or WebP, at most ${most}, 8 MB each. What the camera noted in the file, such as the place, is not kept.`}
           {!hydrated && ' Choose them last: after a message, or after Check first, they have to be chosen again.'}
         </p>
-        {tooLarge.length > 0 && (
+        {leftOut.length > 0 && (
           <p role="alert" className="font-semibold text-late">
-            {`Not chosen, larger than 8 MB: ${tooLarge.join(', ')}.`}
+            {`Not chosen, larger than 8 MB or more than ${most}: ${leftOut.join(', ')}.`}
           </p>
         )}
         <HintAndErrors field={field} />
@@ -69,10 +69,10 @@ export function PhotographsField({ most, kept, ...field }: PhotographsFieldProps
   )
 }
 
-/** What was chosen, as the browser can show it. A file that is too large is not sent at all, and said at once. */
-function useChosen() {
+/** What was chosen, as the browser can show it. A file too large or too many is not sent at all, and said at once. */
+function useChosen(most: number) {
   const [chosen, setChosen] = useState<readonly Chosen[]>([])
-  const [tooLarge, setTooLarge] = useState<readonly string[]>([])
+  const [leftOut, setLeftOut] = useState<readonly string[]>([])
   useEffect(
     () => () => {
       for (const { address } of chosen) URL.revokeObjectURL(address)
@@ -81,16 +81,17 @@ function useChosen() {
   )
   const choose = ({ target }: ChangeEvent<HTMLInputElement>) => {
     const files = [...(target.files ?? [])]
-    const large = files.filter(({ size }) => size > PHOTOGRAPH_LIMITS.bytes)
-    if (large.length > 0) {
-      const rest = new DataTransfer()
-      for (const file of files) if (!large.includes(file)) rest.items.add(file)
-      target.files = rest.files
+    const taken = files.filter(({ size }) => size <= PHOTOGRAPH_LIMITS.bytes).slice(0, most)
+    const rest = files.filter(file => !taken.includes(file))
+    if (rest.length > 0) {
+      const transfer = new DataTransfer()
+      for (const file of taken) transfer.items.add(file)
+      target.files = transfer.files
     }
-    setTooLarge(large.map(({ name }) => name))
+    setLeftOut(rest.map(({ name }) => name))
     setChosen([...(target.files ?? [])].map(file => ({ name: file.name, address: URL.createObjectURL(file) })))
   }
-  return { chosen, tooLarge, choose }
+  return { chosen, leftOut, choose }
 }
 
 interface KeptProps {

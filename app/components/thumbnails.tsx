@@ -1,13 +1,17 @@
+import { Link } from 'react-router'
+
 interface ThumbnailsProps {
   readonly ids: readonly string[]
   /** Of what, when: the words before the number in each one's description. */
   readonly of: string
   /** Of an entry that no longer counts: shown crossed out. */
   readonly struck?: boolean
+  /** Where they are seen beside those of another day. */
+  readonly compareHref?: string
 }
 
 /** Photographs of an entry, small, each a link to the whole picture. */
-export function Thumbnails({ ids, of, struck = false }: ThumbnailsProps) {
+export function Thumbnails({ ids, of, struck = false, compareHref }: ThumbnailsProps) {
   if (ids.length === 0) return null
   return (
     <ul className="mt-1.5 flex flex-wrap gap-2">
@@ -28,6 +32,13 @@ export function Thumbnails({ ids, of, struck = false }: ThumbnailsProps) {
           </a>
         </li>
       ))}
+      {compareHref && (
+        <li>
+          <Link to={compareHref} className="inline-flex min-h-11 items-center font-semibold underline">
+            Compare with another day
+          </Link>
+        </li>
+      )}
     </ul>
   )
 }

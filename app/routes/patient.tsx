@@ -4,6 +4,7 @@ import { LinkButton } from '#app/components/button.tsx'
 import { PatientBanner } from '#app/components/patient-banner.tsx'
 import { patientHead } from '#app/views/patient-care.server.ts'
 import { patientCare } from '#app/views/patient-context.server.ts'
+import { photographedLooks } from '#app/views/patient-photographs.server.ts'
 import type { Route } from './+types/patient.ts'
 
 // Of the patient's own page. By bed, not by name: titles stay in the browser's history.
@@ -14,11 +15,14 @@ export const middleware: Route.MiddlewareFunction[] = [patientOnly]
 export async function loader({ context }: Route.LoaderArgs) {
   const { stayId, via } = context.get(patientContext)
   const now = new Date()
-  return { ...patientHead(await patientCare(stayId, now), now), via }
+  const care = await patientCare(stayId, now)
+  return { ...patientHead(care, now), via, isPhotographed: photographedLooks(care).length > 0 }
 }
 
 /** Every page of a patient stands under who they are. */
-export default function Patient({ loaderData: { banner, patientId, discharged, via } }: Route.ComponentProps) {
+export default function Patient({
+  loaderData: { banner, patientId, discharged, via, isPhotographed },
+}: Route.ComponentProps) {
   // The patient's own page has no other heading than whose it is.
   const isTitle = useLocation().pathname.replace(/\/$/, '').endsWith(patientId)
   return (
@@ -28,6 +32,7 @@ export default function Patient({ loaderData: { banner, patientId, discharged, v
         isTitle={isTitle}
         actions={
           <>
+            {isPhotographed && <LinkButton href={`/patients/${patientId}/photographs`}>Photographs</LinkButton>}
             <LinkButton href={`/patients/${patientId}/sign`}>Bed-head sign</LinkButton>
             <LinkButton variant="danger" href={`/patients/${patientId}/emergency`}>
               Airway emergency steps

@@ -106,7 +106,11 @@ export default function Timeline({ loaderData }: Route.ComponentProps) {
             <CareStrip care={care} now={now} zone={zone} span={spanHours} />
           </Card>
           <Card title="Charted" flush id="charted" aside={<KindFilter kinds={kinds} current={kind} href={withParam} />}>
-            <EntryList entries={shown.entries} today={localDay(new Date(now), zone)} />
+            <EntryList
+              entries={shown.entries}
+              today={localDay(new Date(now), zone)}
+              photographsHref={`/patients/${patientId}/photographs`}
+            />
             <Pager label="Charted" {...(shown.next ? { older: withParam('before', shown.next) } : {})} />
           </Card>
         </div>

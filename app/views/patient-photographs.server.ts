@@ -1,6 +1,6 @@
 import type { AnyCareKind, Entry } from '#app/care/kind.ts'
 import { careKinds } from '#app/care/kinds.ts'
-import { photographsIn } from '#app/care/photographs.ts'
+import { photographFields, photographsIn } from '#app/care/photographs.ts'
 import { patientRecord } from '#app/care/record.ts'
 import { showDateTime } from '#app/time/display.ts'
 import type { PatientCare } from './patient-context.server.ts'
@@ -14,10 +14,12 @@ export interface PhotographedLook {
   readonly photographs: readonly string[]
 }
 
+const photographedKinds = careKinds.filter(kind => photographFields(kind).length > 0)
+
 /** Every look of this stay that counts and has photographs, latest first. */
 export function photographedLooks({ record, ward }: PatientCare): readonly PhotographedLook[] {
   const asked = patientRecord(record.entries, { admittedAt: record.stay.admittedAt, patient: record.patient })
-  return careKinds
+  return photographedKinds
     .flatMap((kind: AnyCareKind) => asked.of(kind).map((entry: Entry) => ({ kind, entry })))
     .flatMap(({ kind, entry }) => {
       const photographs = photographsIn(kind, entry.data)

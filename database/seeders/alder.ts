@@ -7,6 +7,7 @@ import {
   noted,
   ownValue,
   pairInCleaning,
+  photographed,
   putOff,
   writtenLate,
   wrongPatient,
@@ -164,6 +165,6 @@ export const alderStories: readonly BedStory[] = [
         sizeMm: 8,
       },
     },
-    extra: [heavyCoating(1.2), blockCleared(52.4)],
+    extra: [heavyCoating(1.2), blockCleared(52.4), photographed(28.6, 2), photographed(3.7, 2, { sizeMm: 6 })],
   },
 ]

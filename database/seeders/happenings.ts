@@ -6,6 +6,7 @@ import { type DeferralData, deferrals } from '#app/care/deferral/schema.ts'
 import { freeNotes } from '#app/care/free-note/schema.ts'
 import { innerCannulaActs } from '#app/care/inner-cannula/schema.ts'
 import { observationSets } from '#app/care/observations/schema.ts'
+import type { StomaData } from '#app/care/stoma-and-skin/schema.ts'
 import { suctions } from '#app/care/suction/schema.ts'
 import { type TubePlanData, tubePlans } from '#app/care/tube-change-plan/schema.ts'
 import { addDays, localDay } from '#app/time/zone.ts'
@@ -16,6 +17,7 @@ import { calmSet } from './chart-observations.ts'
 import { checkAt } from './chart-stoma.ts'
 import { episode } from './chart-suction.ts'
 import { draft } from './draft.ts'
+import { idAt } from './random.ts'
 import type { Happening } from './story.ts'
 
 /** The inner cannula was found half blocked and replaced: it is looked at again within hours. */
@@ -203,6 +205,15 @@ export function closingOpening(hoursAgo: number, note: string): Happening {
   return bedside => {
     const more = { dressing: 'left in place', sites: ['around opening'], note } as const
     return [checkAt(bedside, hoursBefore(bedside.now, hoursAgo), false, { ...more, sites: [...more.sites] })]
+  }
+}
+
+/** A look with photographs of what it found. */
+export function photographed(hoursAgo: number, count: number, more: Partial<StomaData> = {}): Happening {
+  return bedside => {
+    const at = hoursBefore(bedside.now, hoursAgo)
+    const photographs = Array.from({ length: count }, () => idAt(at, bedside.random))
+    return [checkAt(bedside, at, false, { ...more, photographs })]
   }
 }
 

@@ -1,9 +1,10 @@
-import { v7 as uuidv7 } from 'uuid'
+import { v4 as uuidv4, v7 as uuidv7 } from 'uuid'
 import { beforeAll, beforeEach, expect, test } from 'vitest'
 import { type Role, roles } from '#app/auth/permissions.ts'
 import { signIn } from '#app/auth/session.server.ts'
 import { grantAccess } from '#database/access-grants.server.ts'
 import { addEntry } from '#database/entries.server.ts'
+import { photographsAlongside, writeFiles } from '#database/photographs.server.ts'
 import { addPolicy } from '#database/policies.server.ts'
 import { application, browserRequest } from '#test/application.ts'
 import { aCatalogueTube } from '#test/catalogue.ts'
@@ -61,7 +62,7 @@ GET  /patients/:patientId/sign         200 200 200 200 404 404 200   why why why
 POST /patients/:patientId/sign         400 400 400 400 404 404 403   why why why why 404 404 404   400 400   own  in
 GET  /patients/:patientId/sign.pdf     go  go  go  go  404 404 go    why why why why 404 404 404   go  go    own  in
 GET  /patients/:patientId/photographs  200 200 200 200 404 404 200   why why why why 404 404 404   200 200   own  in
-GET  /photographs/:photographId        404 404 404 404 404 404 404   404 404 404 404 404 404 404   404 404   own  in
+GET  /photographs/:photographId        200 200 200 200 404 404 200   404 404 404 404 404 404 404   200 200   own  in
 GET  /patients/:patientId/act-now/:entryId 200 200 200 200 404 404 200 why why why why 404 404 404 200 200 own in
 GET  /entries/:entryId                 200 200 200 200 404 404 200   why why why why 404 404 404   200 200   own  in
 GET  /entries/:entryId/correct         200 403 200 200 404 404 403   why why why why 404 404 404   403 403   own  in
@@ -151,7 +152,8 @@ beforeAll(async () => {
   const policyId = uuidv7()
   await addPolicy(aComingPolicy(policyId, ward.id), author.id)
   const itemId = await aCatalogueTube(author.id)
-  const ids = { policyId, wardId: ward.id, patientId, entryId, userId: author.id, itemId }
+  const photographId = await aPhotograph(entryId, stayId)
+  const ids = { photographId, policyId, wardId: ward.id, patientId, entryId, userId: author.id, itemId }
   params = { ...ids, kind: 'cuff-pressure', items: 'tubes', act: 'receive' }
 })
 
@@ -161,6 +163,14 @@ beforeEach(() => owner.query('UPDATE sessions SET ended_at = NULL, ended_because
 function aComingPolicy(id: string, wardId: string) {
   const review = { reviewedBy: 'Dr E. Osei, clinical lead', reviewedOn: '2026-10-20', reason: 'First policy' }
   return { id, wardId, name: 'Tracheostomy care', ...review, startsAt: new Date(Date.now() + 86_400_000), values: {} }
+}
+
+async function aPhotograph(entryId: string, stayId: string) {
+  const [id, bytes] = [uuidv4(), Buffer.from('a picture')]
+  const added = [{ id, file: id, large: bytes, small: bytes, width: 1, height: 1, sha256: '0'.repeat(64) }]
+  await writeFiles(added)
+  await owner.transaction(photographsAlongside({ id: entryId, stayId }, added))
+  return id
 }
 
 async function everyRole(wardId: string, where: string) {

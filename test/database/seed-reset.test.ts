@@ -1,9 +1,12 @@
 import { afterAll, beforeEach, expect, test, vi } from 'vitest'
 import { closePasswords } from '#app/auth/password.server.ts'
 import { demoAccounts, demoSeededAt, population } from '#database/demo.server.ts'
+import { photographStore } from '#database/photograph-store.server.ts'
+import { fileNames } from '#database/photographs.server.ts'
 import { demoHospital } from '#database/seeders/hospital.ts'
 import { loadDemo } from '#database/seeders/load.server.ts'
 import { emptyDemo } from '#database/seeders/reset.server.ts'
+import { select } from '#database/sequelize.server.ts'
 import { verifyEntries } from '#database/verify-entries.server.ts'
 import { cleared, owner } from '#test/database.ts'
 import { aPerson } from '#test/people.ts'
@@ -14,6 +17,8 @@ const hospital = demoHospital(new Date('2026-12-01T14:06:00Z'), 'Europe/London')
 vi.setConfig({ testTimeout: 120_000, hookTimeout: 60_000 })
 beforeEach(cleared)
 afterAll(closePasswords)
+
+const hasFile = async (name: string) => (await photographStore.read(name)) !== undefined
 
 test('an account that was disabled or given another password is not listed', async () => {
   await loadDemo(owner, hospital)
@@ -27,7 +32,12 @@ test('an account that was disabled or given another password is not listed', asy
 
 test('a demo hospital alone is emptied, and another one takes its place', async () => {
   await loadDemo(owner, hospital)
+  const pictures = (await select<{ file: string }>('SELECT file FROM photographs')).map(
+    ({ file }) => fileNames(file).small,
+  )
+  expect(await Promise.all(pictures.map(hasFile))).toEqual([true, true, true, true])
   await emptyDemo(owner)
+  expect(await Promise.all(pictures.map(hasFile))).toEqual([false, false, false, false])
   expect(await population()).toEqual({ patients: 0, accounts: 0, otherPatients: 0, otherAccounts: 0 })
   const next = demoHospital(new Date('2026-12-03T09:30:00Z'), 'Europe/London')
   await loadDemo(owner, next)
