@@ -14,6 +14,9 @@ export interface PatientFacts {
   /** View at laryngoscopy by its grade, and what is known to be difficult; absent or null when nobody has said. */
   readonly laryngoscopy?: '1' | '2' | '3' | '4' | null
   readonly airwayNotes?: string | null
+  /** Bed, and name, birth and number, as the sign over the bed gives them; absent where the stay is not at hand. */
+  readonly bed?: string
+  readonly identity?: string
 }
 
 /** What rules may know of the ward. */

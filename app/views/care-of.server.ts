@@ -4,14 +4,23 @@ import { patientRecord } from '#app/care/record.ts'
 import { careContext } from '#app/rules/context.ts'
 import type { StayRecord } from '#database/records.server.ts'
 
-const records = new WeakMap<StayRecord['entries'], { readonly version: number; readonly record: PatientRecord }>()
+interface Known {
+  readonly version: number
+  readonly bed: string
+  readonly record: PatientRecord
+}
 
-/** The record of a stay: the same object until something is charted or the patient's facts are edited. */
+const records = new WeakMap<StayRecord['entries'], Known>()
+
+/** The record of a stay: the same object until something is charted, the patient's facts are edited, or the bed is another. */
 export function recordOf({ entries, patient, stay }: StayRecord): PatientRecord {
   const known = records.get(entries)
-  if (known?.version === patient.version && entries.length > 0) return known.record
-  const record = patientRecord(entries, { admittedAt: stay.admittedAt, patient })
-  records.set(entries, { version: patient.version, record })
+  const { version } = patient
+  const bed = stay.bedLabel
+  if (known?.version === version && known.bed === bed && entries.length > 0) return known.record
+  const identity = `${patient.familyName}, ${patient.givenName}; ${patient.bornOn}; ${patient.recordNumber}`
+  const record = patientRecord(entries, { admittedAt: stay.admittedAt, patient: { ...patient, bed, identity } })
+  records.set(entries, { version, bed, record })
   return record
 }
 

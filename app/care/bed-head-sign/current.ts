@@ -13,13 +13,15 @@ export function needsSign(record: PatientRecord): boolean {
 
 /** What a sign that is printed now would show. Every change of it ends the sign that hangs at the bed. */
 export function signFacts({ record }: Pick<CareContext, 'record'>): SignFacts {
-  const { upperAirway, laryngoscopy, airwayNotes } = record.patient
+  const { upperAirway, laryngoscopy, airwayNotes, bed, identity } = record.patient
   const tube = tubeInPlace(record)
   return {
     form: upperAirway,
     ...(tube ? { tube: tube.id, sutures: suturesIn({ record }) ? 'yes' : 'no' } : {}),
     ...(laryngoscopy ? { laryngoscopy } : {}),
     ...(airwayNotes ? { airwayNotes } : {}),
+    ...(bed ? { bed } : {}),
+    ...(identity ? { identity } : {}),
   }
 }
 
@@ -40,5 +42,12 @@ export function changedSince(sign: SignData, context: Pick<CareContext, 'record'
     ...(sign.tube === now.tube && sign.sutures !== now.sutures ? ['the flange sutures'] : []),
     ...(sign.laryngoscopy === now.laryngoscopy ? [] : ['the view at laryngoscopy']),
     ...(sign.airwayNotes === now.airwayNotes ? [] : ['the known problems of the airway']),
+    ...(isOther(sign.bed, now.bed) ? ['the bed'] : []),
+    ...(isOther(sign.identity, now.identity) ? ['the name, birth or record number'] : []),
   ]
+}
+
+/** Signs of before these were kept say nothing of them. */
+function isOther(shown: string | undefined, now: string | undefined): boolean {
+  return shown !== undefined && now !== undefined && shown !== now
 }

@@ -53,6 +53,15 @@ test.each<[string, Partial<PatientFacts>]>([
   expect(changes([tube, sign([tube], '2026-03-08 10:30')], patient)).toEqual([words])
 })
 
+test.each<[string, Partial<PatientFacts>]>([
+  ['the bed', { bed: 'A9', identity: 'Merrin, Tobias' }],
+  ['the name, birth or record number', { bed: 'A4', identity: 'Merrin, Tobin' }],
+])('another one of %s ends the sign, unless the sign does not know it', (words, patient) => {
+  const known = sign([tube], '2026-03-08 10:30', 'printed', { bed: 'A4', identity: 'Merrin, Tobias' })
+  expect(changes([tube, known], patient)).toEqual([words])
+  expect(changes([tube, sign([tube], '2026-03-08 10:30')], patient)).toEqual([])
+})
+
 test('a new sign settles it', () => {
   const second = anEntry(tubeChanges, '2026-03-09 11:00', aTube())
   const entries = [tube, sign([tube], '2026-03-08 10:30'), second]

@@ -27,6 +27,8 @@ const fields = careFields({
   sutures: choice({ label: 'Flange sutures', options: yesNo }).optional(),
   laryngoscopy: choice({ label: 'View at laryngoscopy', options: laryngoscopyGrades }).optional(),
   airwayNotes: text({ label: 'Known problems of the airway', maxLength: 500 }).optional(),
+  bed: text({ label: 'Bed' }).optional(),
+  identity: text({ label: 'Name, birth and record number', maxLength: 300 }).optional(),
 })
 
 /** Bed-head signs printed or taken down: ask a record with this. */
