@@ -1,0 +1,86 @@
+import { v7 as uuidv7 } from 'uuid'
+import { beforeEach, expect, test } from 'vitest'
+import type { CurrentUser } from '#app/auth/permissions.ts'
+import { innerCannula } from '#app/care/inner-cannula/kind.ts'
+import { action as scan } from '#app/routes/scan.tsx'
+import type { ScanView } from '#app/scanning/scan-view.ts'
+import { saveItems } from '#database/catalogue-writes.server.ts'
+import { decideLot } from '#database/lot-recalls.server.ts'
+import { aCannulaToSave, someInnerCannula } from '#test/catalogue.ts'
+import { aCharting } from '#test/charting.ts'
+import { cleared } from '#test/database.ts'
+import { answerOf, aPerson, contextOf, formRequest } from '#test/people.ts'
+
+const GTIN = '09521234543213'
+let given: Awaited<ReturnType<typeof aCharting>>
+let specialist: CurrentUser
+let path: string
+
+beforeEach(async () => {
+  await cleared()
+  given = await aCharting()
+  specialist = await aPerson({ name: 'Mads Larsen', role: 'tracheostomy specialist', wardIds: [given.ward.id] })
+  path = `/patients/${given.patientId}/chart/${innerCannula.slug}`
+})
+
+/** What a scan of these codes says, typed with its brackets so that nothing has to be read back. */
+async function scanned(code: string, user: CurrentUser = given.nurse, target = path): Promise<ScanView> {
+  const request = formRequest('/scan', { for: target, source: 'typed', code })
+  const args = { request, params: {}, url: new URL(request.url), context: contextOf(user) }
+  const answer = await answerOf(() => scan({ ...args, pattern: '/scan' }))
+  return (answer.says ?? answer) as ScanView
+}
+
+async function catalogued(line: string) {
+  const cannula = aCannulaToSave(someInnerCannula({ line, gtin: GTIN }))
+  await saveItems([cannula], specialist.id)
+  return cannula.id
+}
+
+test('an inner cannula of the line in place is filled in with its lot and expiry', async () => {
+  const item = await catalogued('Alder')
+  const view = await scanned(`(01)${GTIN}(17)491231(10)7B`)
+  expect(view).toMatchObject({
+    findings: [],
+    stops: false,
+    name: 'Alder 8.0, disposable',
+    fill: { 'care.item': [item], 'care.lot': ['7B'] },
+  })
+})
+
+test.each([
+  ['one of another line', 'Corvane', '(17)491231(10)7B', ['other-tube']],
+  ['one that has expired', 'Alder', '(17)240101(10)7B', ['expired']],
+  ['one of a recalled lot', 'Alder', '(17)491231(10)9X', ['recalled']],
+  ['one that is all of these', 'Corvane', '(17)240101(10)9X', ['other-tube', 'recalled', 'expired']],
+])('%s is said first and stops, and can be recorded where it is found in place', async (_, line, rest, expected) => {
+  await catalogued(line)
+  const recall = { id: uuidv7(), lot: '9X', line: null, reason: 'Leaks', isRecalled: true, decidedBy: specialist.id }
+  await decideLot(recall)
+  const view = await scanned(`(01)${GTIN}${rest}`)
+  expect(view.findings.map(({ name }) => name)).toEqual(expected)
+  expect(view.stops).toBe(true)
+  expect(view.fill).not.toBeNull()
+})
+
+test('an item that is not in the catalogue is described by a specialist, and by nobody else', async () => {
+  const code = `(01)${GTIN}(10)7B`
+  expect(await scanned(code)).toMatchObject({ unknown: { gtin: GTIN, mayDescribe: false }, fill: null })
+  expect(await scanned(code, specialist)).toMatchObject({ unknown: { gtin: GTIN, mayDescribe: true } })
+})
+
+test.each(['', 'x', '(01)09521234543214', '\u0000', '(10)', '%'.repeat(600), '(01)__proto__'])(
+  'of %j the page says what is wrong, and keeps nothing of it as a code',
+  async code => {
+    const view = await scanned(code)
+    expect(view.error).toMatch(/\.$/)
+    expect(view).toMatchObject({ codes: [], fill: null, name: null })
+  },
+)
+
+test('for a patient of another ward nothing is said', async () => {
+  await catalogued('Alder')
+  const stranger = await aPerson({ name: 'Per Holm' })
+  const view = await scanned(`(01)${GTIN}(10)7B`, stranger)
+  expect(view.findings).toBeUndefined()
+})
