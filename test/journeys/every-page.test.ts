@@ -33,9 +33,11 @@ async function knownIn(on: StartedApp): Promise<Known> {
   const [here] = await rowsOf<Omit<Known, 'elsewhere'>>(
     on,
     `SELECT w.id AS ward, s.patient_id AS patient, e.id AS entry, u.id AS person,
+       (SELECT l.lot FROM entries l WHERE l.stay_id = s.id AND l.lot IS NOT NULL LIMIT 1) AS lot,
        (SELECT p.id FROM policies p WHERE p.ward_id = w.id AND p.starts_at > UTC_TIMESTAMP() LIMIT 1) AS policy
      FROM wards w JOIN stays s ON s.ward_id = w.id JOIN entries e ON e.stay_id = s.id JOIN users u ON u.id = e.recorded_by
      WHERE w.name = 'Alder ward' AND s.discharged_at IS NULL AND e.kind = 'inner-cannula' AND e.status = 'final'
+       AND EXISTS (SELECT 1 FROM entries l WHERE l.stay_id = s.id AND l.lot IS NOT NULL)
        AND NOT EXISTS (SELECT 1 FROM entries n WHERE n.supersedes_id = e.id)
      ORDER BY e.performed_at DESC LIMIT 1`,
   )
@@ -61,6 +63,7 @@ const named = {
   elsewhere: ':elsewhere',
   person: ':person',
   policy: ':policy',
+  lot: ':lot',
 }
 const cases = pages.map(page => ({ ...page, says: page.path(named) }))
 

@@ -13,6 +13,8 @@ export interface Known {
   readonly person: string
   /** A version of the policy of `ward` that has not started. */
   readonly policy: string
+  /** A lot that patients had. */
+  readonly lot: string
 }
 
 export interface PageEntry {
@@ -112,7 +114,7 @@ export const pages: readonly PageEntry[] = [
   { route: 'scan', as: 'nurse.alder', path: () => '/scan' },
   { route: 'scan', as: 'nurse.alder', path: ({ patient }) => `/scan?for=/patients/${patient}/chart/inner-cannula` },
   { route: 'scan/set-up', as: 'nurse.alder', path: () => '/scan/set-up' },
-  { route: 'lots', as: specialist, path: () => '/lots?lot=H26-0417' },
+  { route: 'lots', as: specialist, path: ({ lot }) => `/lots?lot=${lot}` },
   { route: 'account', as: 'observer.alder', path: () => '/account' },
   { route: 'policy', as: 'educator', path: () => '/policy' },
   { route: 'policy', as: specialist, path: ({ ward }) => `/policy?ward=${ward}&set=children` },
