@@ -14,7 +14,7 @@ afterAll(closePasswords)
 
 test('an empty database gets a demo hospital, and a line says what is in it', async () => {
   expect(await seeded('if empty', '2026-12-01T14:06:00Z')).toMatch(
-    /^Demo hospital as of 01-Dec-2026 14:06: 3 wards, 33 patients, 27 accounts, \d+ entries, in [\d.]+ s\.$/,
+    /^Demo hospital as of 01-Dec-2026 14:06: 3 wards, 33 patients, 28 accounts, \d+ entries, in [\d.]+ s\.$/,
   )
 })
 

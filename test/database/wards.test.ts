@@ -33,7 +33,7 @@ test('a ward is added once, under a name that no other has', async () => {
   expect(await addWard(eight, ward.admin.id)).toEqual({ outcome: 'saved' })
   expect(await addWard(eight, ward.admin.id)).toEqual({ outcome: 'saved' })
   expect(await addWard(another('ward 8'), ward.admin.id)).toEqual({ outcome: 'name taken' })
-  expect(await wardById(eight.id)).toEqual({ ...eight, retired: false })
+  expect(await wardById(eight.id)).toEqual({ ...eight, emergencyNumbers: [], retired: false })
   expect((await allWards()).map(({ name, beds }) => [name, beds])).toEqual([
     ['Ward 7', 2],
     ['Ward 8', 0],
