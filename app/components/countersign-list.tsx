@@ -23,19 +23,21 @@ export function CountersignList({ entries, chosen }: CountersignListProps) {
       <legend className="sr-only">Entries to countersign</legend>
       <ul>
         {entries.map(entry => (
-          <li key={entry.id} className="flex gap-3 border-t border-hair px-4 py-3 first:border-0">
-            <input
-              id={`entry-${entry.id}`}
-              type="checkbox"
-              name="entry"
-              value={entry.id}
-              defaultChecked={chosen.includes(entry.id)}
-              className="mt-3 size-5 flex-none"
-            />
-            <div className="min-w-0 flex-1">
-              <label htmlFor={`entry-${entry.id}`} className="block min-h-11 py-2">
+          <li key={entry.id} className="border-t border-hair px-4 py-3 first:border-0">
+            <label className="flex min-h-11 gap-3 py-2">
+              <input
+                id={`entry-${entry.id}`}
+                type="checkbox"
+                name="entry"
+                value={entry.id}
+                defaultChecked={chosen.includes(entry.id)}
+                className="mt-0.5 size-5 flex-none"
+              />
+              <span className="min-w-0">
                 <b className="font-semibold">{entry.title}.</b> {entry.sentence}
-              </label>
+              </span>
+            </label>
+            <div className="ml-8">
               <p className="text-sm text-ink2">
                 {entry.done}. {entry.author}.{entry.second && ` Second person: ${entry.second}.`}
               </p>
@@ -48,7 +50,7 @@ export function CountersignList({ entries, chosen }: CountersignListProps) {
                 </Link>
                 <Link
                   to={`/entries/${entry.id}`}
-                  className="inline-flex min-h-11 items-center font-semibold underline underline-offset-3"
+                  className="inline-flex min-h-11 min-w-11 items-center font-semibold underline underline-offset-3"
                 >
                   Open<span className="sr-only">{` ${entry.title} of ${entry.done}`}</span>
                 </Link>

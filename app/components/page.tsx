@@ -26,7 +26,7 @@ export function AppPage({ person, ward, now, zone, sections, theme, reviewed = n
   return (
     <div className="group/page flex min-h-dvh flex-col pb-18 has-[[data-final-bar]]:pb-0 md:pb-0 print:block print:pb-0">
       <header className="border-b border-line bg-surface print:hidden">
-        <div className="mx-auto flex min-h-15 max-w-360 items-center gap-3 px-4 md:px-6 lg:gap-5">
+        <div className="mx-auto flex min-h-15 max-w-360 items-center gap-3 px-4 md:max-lg:gap-2 lg:gap-5 lg:px-6">
           <Link
             to="/"
             className="inline-flex min-h-11 items-center gap-2.5 text-xl font-bold tracking-tight text-brand"
@@ -35,7 +35,7 @@ export function AppPage({ person, ward, now, zone, sections, theme, reviewed = n
             <span className="max-[22rem]:sr-only md:max-lg:sr-only">Cannulary</span>
           </Link>
           <TopSections sections={sections} />
-          <div className="ml-auto flex items-center gap-3">
+          <div className="ml-auto flex items-center gap-3 md:max-lg:gap-2">
             {ward && (
               <span className="hidden rounded-tag border border-line px-2 py-0.5 text-sm font-semibold xl:inline">
                 {ward.name}

@@ -1,3 +1,4 @@
+import { Fragment } from 'react'
 import { Link, redirect } from 'react-router'
 import { can } from '#app/auth/permissions.ts'
 import { signedIn } from '#app/auth/signed-in.server.ts'
@@ -54,18 +55,19 @@ function Lines({ caption, lines, none }: LinesProps) {
   return (
     <Table
       caption={caption}
-      columns={[{ label: 'Name' }, { label: 'Role' }, { label: 'Skill' }, { label: 'Standing' }]}
+      columns={[{ label: 'Name and role' }, { label: 'Skill' }, { label: 'Standing' }]}
       rows={lines.map(line => ({
         key: line.key,
         cells: [
-          <Link
-            key="name"
-            to={`/competence/${line.userId}`}
-            className="inline-flex min-h-11 items-center underline underline-offset-3"
-          >
-            {line.name}
-          </Link>,
-          line.role,
+          <Fragment key="name">
+            <Link
+              to={`/competence/${line.userId}`}
+              className="inline-flex min-h-11 items-center underline underline-offset-3"
+            >
+              {line.name}
+            </Link>
+            <span className="block text-sm font-normal text-ink2">{line.role}</span>
+          </Fragment>,
           line.skill,
           line.stands,
         ],
