@@ -84,7 +84,11 @@ export function JumpLinks({
   return (
     <nav aria-label="Parts of the policy" className="flex flex-wrap gap-x-5 print:hidden">
       {sections.map(({ id, title }) => (
-        <a key={id} href={`#${id}`} className="inline-flex min-h-11 items-center font-semibold text-brand underline">
+        <a
+          key={id}
+          href={`#${id}`}
+          className="inline-flex min-h-11 min-w-11 items-center font-semibold text-brand underline"
+        >
           {title}
         </a>
       ))}

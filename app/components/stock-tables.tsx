@@ -12,7 +12,7 @@ const tones: Readonly<Record<Standing, TagTone>> = {
   'not used': 'plain',
 }
 
-const LINK = 'inline-flex min-h-11 items-center underline underline-offset-3'
+const LINK = 'inline-flex min-h-11 min-w-11 items-center underline underline-offset-3'
 
 export interface StockTableProps {
   readonly items: readonly ItemRow[]

@@ -56,7 +56,7 @@ type Move = Route.ComponentProps['loaderData']['moves'][number]
 function cellsOf({ done, what, href, item, pieces, place, by, reason }: Move) {
   const whole = (text: string) => <span className="whitespace-nowrap">{text}</span>
   const act = href ? (
-    <Link to={href} className="inline-flex min-h-11 items-center underline underline-offset-3">
+    <Link to={href} className="inline-flex min-h-11 min-w-11 items-center underline underline-offset-3">
       {what}
     </Link>
   ) : (

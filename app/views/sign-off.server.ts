@@ -46,7 +46,9 @@ const names = ['id', 'skill', 'level', 'assessedOn', 'reason']
 
 /** Signs a skill off for somebody, or withdraws a sign-off, with the assessor's own password; or says what is wrong. */
 export async function signedOff(opened: OpenedCompetence, sent: Sent): Promise<NotSigned | null> {
-  const typed = Object.fromEntries([...onlyFields(sent.form, names)].map(([name, value]) => [name, String(value)]))
+  const typed = Object.fromEntries(
+    [...onlyFields(sent.form, names)].flatMap(([name, value]) => (typeof value === 'string' ? [[name, value]] : [])),
+  )
   const isWithdrawal = sent.form.get('intent') === 'withdraw'
   const kept = { intent: isWithdrawal ? ('withdraw' as const) : ('sign off' as const), typed }
   const work = isWithdrawal ? withdrawal(opened, sent, typed) : assessment(opened, sent, typed)

@@ -44,7 +44,7 @@ test('a form with everything folded out is whole, and so is a menu that is open'
   await go(page, `${patient}/chart/inner-cannula`)
   await formReady(page)
   await page.getByText('More details').click()
-  await page.getByText('Second person').click()
+  await page.getByText('Second person', { exact: true }).click()
   await page.getByRole('radio', { name: 'Other time' }).check()
   await page.getByRole('radio', { name: 'Could not be done' }).check()
   expect(await pageProblems(page)).toEqual([])

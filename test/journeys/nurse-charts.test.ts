@@ -92,15 +92,21 @@ test('a normal cuff pressure is charted from the board with three taps and its d
   expect(await latest.textContent()).toMatch(/26 cmH2O by manometer, not adjusted\..*Imani Brathwaite, nurse/s)
 })
 
-test('the charge nurse starts on the board, where the patient with the latest care stands first', async () => {
+test('the charge nurse starts on the board: warnings that wait for an answer, then the patient with the latest care', async () => {
   const { page, problems } = await signedIn(browser, app, 'charge.alder')
   await page.getByRole('list', { name: 'Patients' }).waitFor()
   expect(new URL(page.url()).pathname).toMatch(/^\/wards\/[^/]+\/board$/)
-  const late = await page
-    .locator('ul[aria-label=Patients] > li')
-    .evaluateAll(rows => rows.map(row => row.querySelectorAll('[fill="url(#strip-late)"]').length > 0))
-  expect(late[0]).toBe(true)
-  expect(late.at(-1)).toBe(false)
+  const late = await page.locator('ul[aria-label=Patients] > li').evaluateAll(rows =>
+    rows.map(row => ({
+      warned: /\d warnings?/.test(row.textContent ?? ''),
+      isUnseen: /not seen yet/.test(row.textContent ?? ''),
+      isLate: row.querySelectorAll('[fill="url(#strip-late)"]').length > 0,
+    })),
+  )
+  const lastUnseen = late.findLastIndex(({ isUnseen }) => isUnseen)
+  expect(late.slice(0, lastUnseen + 1).every(({ warned }) => warned)).toBe(true)
+  expect(late.slice(lastUnseen + 1).find(({ warned }) => !warned)?.isLate).toBe(true)
+  expect(late.at(-1)?.isLate).toBe(false)
   const counts = await page.getByRole('list', { name: 'Summary' }).getByRole('listitem').allInnerTexts()
   expect(counts[0]).toMatch(/^[1-9]\d*\s*overdue$/)
   await page.getByRole('link', { name: 'Sort by bed' }).click()

@@ -52,6 +52,8 @@ function widths(page: Page, alt: RegExp): Promise<readonly number[]> {
   const pictures = page.getByAltText(alt)
   return pictures.evaluateAll(async all => {
     const images = all.filter(one => one instanceof HTMLImageElement)
+    // One that waits to be scrolled to would never come.
+    for (const image of images) image.loading = 'eager'
     await Promise.all(images.map(image => image.decode().catch(() => undefined)))
     return images.map(({ naturalWidth }) => naturalWidth)
   })
