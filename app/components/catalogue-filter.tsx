@@ -25,7 +25,7 @@ export function CatalogueFilter({ ask, lines }: CatalogueFilterProps) {
   const isTubes = ask.items === 'tubes'
   return (
     <Form role="search" className="grid gap-4 rounded-card border border-line bg-surface p-4">
-      <div className="grid gap-4 sm:grid-cols-2 lg:grid-cols-4">
+      <div className="grid items-start gap-4 sm:grid-cols-2 lg:grid-cols-4">
         <SelectField {...of('items')} label="List" options={kinds} />
         <TextField {...of('find')} label="Find" hint="Line, maker, size or GTIN" maxLength={100} autoComplete="off" />
         <SelectField {...of('line')} label="Line" options={byLine} nothing="All" />

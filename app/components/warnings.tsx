@@ -39,7 +39,7 @@ interface WhyProps {
 /** "Why?" of a warning: its source, the policy, and the numbers that this care was judged by. */
 export function WhyWarned({ why: { source, policy, values }, about }: WhyProps) {
   return (
-    <details className="w-full text-sm">
+    <details className="text-sm open:w-full">
       <summary className="inline-flex min-h-11 min-w-11 items-center font-semibold text-ink2 underline underline-offset-3">
         Why? <span className="sr-only">{about}</span>
       </summary>

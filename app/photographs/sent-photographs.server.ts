@@ -5,7 +5,6 @@ import type { AnyCareKind } from '#app/care/kind.ts'
 import { PHOTOGRAPH_LIMITS, photographFields } from '#app/care/photographs.ts'
 import { intentOf } from '#app/charting/chart-form.ts'
 import type { NewPhotograph } from '#database/photographs.server.ts'
-import { readPicture } from './picture.server.ts'
 
 /** A form whose files have become ids: what to chart, what to show again, and the photographs behind the ids. */
 export interface SentPhotographs {
@@ -59,6 +58,8 @@ export async function sentPhotographs(
 async function readSent(file: File, entryId: string): Promise<NewPhotograph | { readonly why: string }> {
   if (file.size > PHOTOGRAPH_LIMITS.bytes) return { why: 'is larger than 8 MB' }
   const bytes = new Uint8Array(await file.arrayBuffer())
+  // Loaded with the first photograph: what reads pictures would make every start wait.
+  const { readPicture } = await import('./picture.server.ts')
   const reading = await readPicture(bytes)
   if (!reading.ok) return { why: reading.why }
   // Of entry and content, so that the same form sent twice says the same; the files' own name is of this sending alone.

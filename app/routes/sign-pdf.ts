@@ -2,7 +2,6 @@ import { redirect } from 'react-router'
 import { logPatientLook, patientGate } from '#app/auth/patient-access.server.ts'
 import { signedIn } from '#app/auth/signed-in.server.ts'
 import { traceOf } from '#app/auth/trace.server.ts'
-import { signPdf } from '#app/print/sign-pdf.server.ts'
 import { hangingSign, signOf } from '#app/views/bed-head-sign.server.ts'
 import { patientCare } from '#app/views/patient-context.server.ts'
 import type { Route } from './+types/sign-pdf.ts'
@@ -20,6 +19,8 @@ export async function loader({ params, context, request, url }: Route.LoaderArgs
   if (!hanging || hanging.changed.length > 0) throw redirect(page)
   const { sign } = await signOf(care, hanging.printedAt)
   if (!sign) throw redirect(page)
+  // Read with the first sheet: what draws it would make every start wait.
+  const { signPdf } = await import('#app/print/sign-pdf.server.ts')
   const pdf = await signPdf(sign, `${url.origin}/patients/${params.patientId}`)
   return new Response(new Uint8Array(pdf), {
     headers: {
