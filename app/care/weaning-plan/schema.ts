@@ -11,26 +11,31 @@ export const plannedSteps = {
 } as const
 export type PlannedStep = keyof typeof plannedSteps
 
-const any = { field: 'step', is: ['cuff', 'valve', 'cap', 'removal'] }
+const aStepIsPlanned = { field: 'step', is: ['cuff', 'valve', 'cap', 'removal'] }
 
 /** The next step of weaning as the team orders it. What is contraindicated is refused here, before it is done. */
 export const weaningPlanSchema = careFields({
   step: choice({ label: 'Next step', options: plannedSteps }),
-  plannedOn: date({ label: 'Planned day', when: any, neededThen: true }).optional(),
+  plannedOn: date({ label: 'Planned day', when: aStepIsPlanned, neededThen: true }).optional(),
   cuffThen: choice({
     label: 'Cuff during it',
     options: { down: 'Fully down', none: 'No cuff', up: 'Up' },
-    when: any,
+    when: aStepIsPlanned,
     neededThen: true,
   }).optional(),
-  agreedWith: text({ label: 'Agreed with', hint: 'Names and roles', when: any, neededThen: true }).optional(),
+  agreedWith: text({
+    label: 'Agreed with',
+    hint: 'Names and roles',
+    when: aStepIsPlanned,
+    neededThen: true,
+  }).optional(),
   seniorName: text({
     label: 'Senior who decides against a criterion',
     section: 'Only when a criterion is not met',
     hint: 'Name and role; leave empty otherwise',
-    when: any,
+    when: aStepIsPlanned,
   }).optional(),
-  seniorReason: note({ label: 'Reason for that', maxLength: 500, when: any }).optional(),
+  seniorReason: note({ label: 'Reason for that', maxLength: 500, when: aStepIsPlanned }).optional(),
   note: note({ label: 'Note', more: true }).optional(),
 })
 
