@@ -1,24 +1,9 @@
 import { laminarResistanceRatio } from '../clinical/sizes.ts'
 import { type CatheterRule, largestCatheter, quickRuleFr } from '../clinical/suction-catheter.ts'
-import type { CatalogueTube } from './item.ts'
+import type { CatalogueTube, PrintedName } from './item.ts'
 
 /** The numbers that two tubes are compared by. A tube that is not of the catalogue has them too. */
-export type ComparedTube = Pick<
-  CatalogueTube,
-  | 'line'
-  | 'size'
-  | 'sizeSystem'
-  | 'construction'
-  | 'innerCannula'
-  | 'idWithInner'
-  | 'idWithoutInner'
-  | 'od'
-  | 'lengthMm'
-  | 'cuff'
-  | 'fenestrated'
-  | 'connector'
-  | 'flange'
->
+export type ComparedTube = Pick<CatalogueTube, PrintedName>
 
 /** The inside diameter that breath and a suction catheter meet, in mm: with the inner cannula in, where the tube has one. */
 export function breathedIdMm({ idWithInner, idWithoutInner }: ComparedTube): number {

@@ -59,12 +59,11 @@ export interface CatalogueInnerCannula extends Item {
   readonly packSize: number
 }
 
-/** What a tube-change form asks of the tube itself, from the catalogue: what is read on this one tube, such as lot and flange mark, is left out. */
-export type PrintedAnswers = Pick<
-  TubeData,
+/** What tells one tube from another, as a form and the catalogue both name it. */
+export type PrintedName =
   | 'line'
-  | 'sizeSystem'
   | 'size'
+  | 'sizeSystem'
   | 'construction'
   | 'innerCannula'
   | 'idWithInner'
@@ -75,8 +74,9 @@ export type PrintedAnswers = Pick<
   | 'fenestrated'
   | 'connector'
   | 'flange'
-  | 'longestUseDays'
->
+
+/** What a tube-change form asks of the tube itself, from the catalogue: what is read on this one tube, such as lot and flange mark, is left out. */
+export type PrintedAnswers = Pick<TubeData, PrintedName | 'longestUseDays'>
 
 /** The answers of a tube-change form that follow from which tube it is. */
 export function printedAnswers(tube: CatalogueTube): PrintedAnswers {
