@@ -1,4 +1,4 @@
-import type { CareContext } from '#app/care/kind.ts'
+import type { BedMove, CareContext } from '#app/care/kind.ts'
 import { policyInForce } from '#app/care/policy.ts'
 import { patientRecord } from '#app/care/record.ts'
 import { careContext } from '#app/rules/context.ts'
@@ -14,8 +14,19 @@ export function contextOf(hospital: DemoHospital, stay: DemoStay): CareContext {
   if (!policy) throw new Error(`${ward.name} has no policy`)
   const entries = hospital.entries.filter(entry => entry.stayId === stay.id)
   const patient = found(hospital.patients, stay.patientId)
-  const record = patientRecord(entries, { admittedAt: stay.admittedAt, patient })
+  const moves = movesOf(hospital, stay)
+  const record = patientRecord(entries, { admittedAt: stay.admittedAt, moves, patient })
   return careContext({ record, policy, ward: { ...ward, zone }, now })
+}
+
+/** The moves of a stay after its admission. */
+function movesOf({ moves, wards, beds }: DemoHospital, { id }: DemoStay): readonly BedMove[] {
+  const places = moves.filter(({ stayId }) => stayId === id)
+  return places.slice(1).map(({ wardId, bedId, movedAt }, before) => ({
+    at: movedAt,
+    bed: found(beds, bedId).label,
+    ward: wardId === places[before]?.wardId ? null : found(wards, wardId).name,
+  }))
 }
 
 /** The stays that show on the board of a ward. */

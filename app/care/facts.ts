@@ -19,6 +19,14 @@ export interface PatientFacts {
   readonly identity?: string
 }
 
+/** The patient came to another bed. */
+export interface BedMove {
+  readonly at: Date
+  readonly bed: string
+  /** The ward, where it led to another one; null within a ward. */
+  readonly ward: string | null
+}
+
 /** What rules may know of the ward. */
 export interface WardFacts {
   readonly zone: Zone

@@ -1,7 +1,7 @@
 import type { z } from 'zod'
 import type { CataloguedItem } from './catalogued-item.ts'
 import type { Clock } from './clock.ts'
-import type { PatientFacts, WardFacts } from './facts.ts'
+import type { BedMove, PatientFacts, WardFacts } from './facts.ts'
 import type { FormProblem, KnownNames } from './form-problem.ts'
 import type { Gauge } from './gauge.ts'
 import type { Lane } from './lanes.ts'
@@ -12,7 +12,7 @@ import type { SigningNeeds } from './signing-needs.ts'
 import type { PlannedUse, Used } from './supply.ts'
 import type { Warning } from './warning.ts'
 
-export type { PatientFacts, WardFacts } from './facts.ts'
+export type { BedMove, PatientFacts, WardFacts } from './facts.ts'
 
 /** What the act needs beyond charting care in general. */
 export type ChartingAct = 'chart care' | 'set care plans'
@@ -46,6 +46,8 @@ export type StoredEntry = Omit<Entry, 'data'> & { readonly version: number; read
 /** One patient's effective entries, asked by kind object: a kind that is not imported cannot be asked for. */
 export interface PatientRecord {
   readonly admittedAt: Date
+  /** From bed to bed after the first one, oldest first. */
+  readonly moves: readonly BedMove[]
   readonly patient: PatientFacts
   /** Effective entries of one kind, latest performed first. */
   of<K extends AnyCharted>(kind: K): readonly Entry<DataOf<K>>[]

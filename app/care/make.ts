@@ -1,7 +1,16 @@
 import { instantsOf } from '../time/zone.ts'
 import type { Clock, DueWindow } from './clock.ts'
 import { decannulations } from './decannulation/schema.ts'
-import type { AnyCareKind, AnyCharted, CareContext, DataOf, PatientFacts, StoredEntry, WardFacts } from './kind.ts'
+import type {
+  AnyCareKind,
+  AnyCharted,
+  BedMove,
+  CareContext,
+  DataOf,
+  PatientFacts,
+  StoredEntry,
+  WardFacts,
+} from './kind.ts'
 import { versionOf } from './payload.ts'
 import { type PersonalValue, type Policy, type SettingValue, valuesFor } from './policy.ts'
 import { patientRecord } from './record.ts'
@@ -84,6 +93,8 @@ export function aRemoval(when: string): StoredEntry {
 /** What a context says apart from its entries and its moment. */
 export interface AboutContext {
   readonly admittedAt?: string
+  /** Moves to another bed. */
+  readonly moves?: readonly BedMove[]
   readonly patient?: Partial<PatientFacts>
   readonly ward?: Partial<WardFacts>
   /** Values of the ward's policy by setting name. */
@@ -97,6 +108,7 @@ export function aContext(entries: readonly StoredEntry[], now: string | Date, ab
   return {
     record: patientRecord(entries, {
       admittedAt: at(about.admittedAt ?? '2026-03-01 08:00'),
+      moves: about.moves ?? [],
       patient: { ...patient, ...about.patient },
     }),
     values: valuesFor(aPolicy(about.policy), Object.entries(about.personal ?? {}).map(aPersonalValue)),

@@ -122,3 +122,10 @@ test('the record before an act holds what had been done by then, and not the act
   expect(before.latest(water, ({ ml }) => ml > 100)).toBeUndefined()
   expect(before.since(tank, at('10:00')).map(entry => entry.data.ml)).toEqual([5])
 })
+
+test('the record before an act holds the moves up to then', () => {
+  const moves = ['09:00', '10:00', '10:01'].map(when => ({ at: at(when), bed: 'A4', ward: null }))
+  const { record } = aContext([early, late], '12:00', { moves })
+  expect(record.moves).toEqual(moves)
+  expect(recordBefore(record, late).moves).toEqual(moves.slice(0, 2))
+})

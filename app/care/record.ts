@@ -1,4 +1,4 @@
-import type { AnyCharted, DataOf, Entry, PatientFacts, PatientRecord, StoredEntry } from './kind.ts'
+import type { AnyCharted, BedMove, DataOf, Entry, PatientFacts, PatientRecord, StoredEntry } from './kind.ts'
 import { readPayload } from './payload.ts'
 
 /**
@@ -34,7 +34,7 @@ const NOTHING: readonly never[] = []
  */
 export function patientRecord(
   stored: readonly StoredEntry[],
-  about: { readonly admittedAt: Date; readonly patient: PatientFacts },
+  about: { readonly admittedAt: Date; readonly moves?: readonly BedMove[]; readonly patient: PatientFacts },
 ): PatientRecord {
   const byKind = groupedByKind(effectiveEntries(stored))
   const read = new Map<string, readonly Entry[]>()
@@ -47,16 +47,17 @@ export function patientRecord(
     return entries
   }
 
-  return recordAsking(about, of)
+  return recordAsking({ moves: [], ...about }, of)
 }
 
 /** A record whose questions all come down to one: the entries of a kind, latest performed first. */
 export function recordAsking(
-  { admittedAt, patient }: Pick<PatientRecord, 'admittedAt' | 'patient'>,
+  { admittedAt, moves, patient }: Pick<PatientRecord, 'admittedAt' | 'moves' | 'patient'>,
   of: PatientRecord['of'],
 ): PatientRecord {
   return {
     admittedAt,
+    moves,
     patient,
     of,
     latest: (kind, where) => (where ? of(kind).find(entry => where(entry.data, entry)) : of(kind)[0]),
@@ -83,17 +84,19 @@ function groupedByKind(entries: readonly StoredEntry[]): ReadonlyMap<string, rea
  * tube and the cuff of its own time.
  */
 export function recordBefore(record: PatientRecord, act: Pick<Entry, 'id' | 'performedAt'>): PatientRecord {
-  return recordWhere(record, entry => entry.performedAt <= act.performedAt && entry.id !== act.id)
+  return recordWhere(record, act.performedAt, entry => entry.id !== act.id)
 }
 
 /** The record as it was at a moment: what had been done by then, that moment included. */
 export function recordUpTo(record: PatientRecord, at: Date): PatientRecord {
-  return recordWhere(record, entry => entry.performedAt <= at)
+  return recordWhere(record, at, () => true)
 }
 
-function recordWhere(record: PatientRecord, holds: (entry: Entry) => boolean): PatientRecord {
+function recordWhere(record: PatientRecord, at: Date, counts: (entry: Entry) => boolean): PatientRecord {
+  const holds = (entry: Entry) => entry.performedAt <= at && counts(entry)
   return {
     admittedAt: record.admittedAt,
+    moves: record.moves.filter(move => move.at <= at),
     patient: record.patient,
     of: kind => record.of(kind).filter(holds),
     latest: (kind, where) =>

@@ -34,3 +34,12 @@ test('going over the same time again cuts nothing anew', () => {
   const second = ['08:59', '10:59', '23:00'].map(when => record.at(at(when)).of(freeNote))
   expect(second.map((entries, i) => entries === first[i])).toEqual([true, true, true])
 })
+
+test('a move is a change, and no part of the record before it', () => {
+  const moves = [{ at: at('09:30'), bed: 'A4', ward: null }]
+  const record = recordOverTime(aContext([note('08:00')], '12:00', { moves }).record)
+  expect(record.nextChange(at('08:30').getTime())).toBe(at('09:30').getTime())
+  expect(record.at(at('09:29')).moves).toEqual([])
+  expect(record.at(at('09:30')).moves).toEqual(moves)
+  expect(record.nextChange(at('09:30').getTime())).toBe(Number.POSITIVE_INFINITY)
+})

@@ -7,7 +7,7 @@ export interface RecordOverTime {
   at(moment: Date): PatientRecord
   /** Begins to note anew which kinds are asked for. */
   forget(): void
-  /** The first moment after this one (ms) at which an entry of a kind that was asked for was performed; Infinity when none was. */
+  /** The first moment after this one (ms) at which the patient was moved, or an entry of a kind that was asked for was performed; else Infinity. */
   nextChange(after: number): number
 }
 
@@ -25,7 +25,13 @@ export function recordOverTime(record: PatientRecord): RecordOverTime {
     return timeline.until(moment) as readonly Entry<DataOf<K>>[]
   }
 
-  const view = recordAsking(record, of)
+  const moveTimes = record.moves.map(move => move.at.getTime())
+  const view: PatientRecord = {
+    ...recordAsking(record, of),
+    get moves() {
+      return record.moves.slice(0, countUntil(moveTimes, moment))
+    },
+  }
   return {
     at(at) {
       moment = at.getTime()
@@ -35,7 +41,8 @@ export function recordOverTime(record: PatientRecord): RecordOverTime {
       asked = new Set()
     },
     nextChange(after) {
-      return Math.min(...[...asked].map(slug => timelines.get(slug)?.firstAfter(after) ?? Number.POSITIVE_INFINITY))
+      const entries = [...asked].map(slug => timelines.get(slug)?.firstAfter(after) ?? Number.POSITIVE_INFINITY)
+      return Math.min(...entries, firstAfter(moveTimes, after))
     },
   }
 }
@@ -56,8 +63,12 @@ function timelineOf(latestFirst: readonly Entry[]): Timeline {
       cuts[count] ??= latestFirst.slice(latestFirst.length - count)
       return cuts[count]
     },
-    firstAfter: moment => times[countUntil(times, moment)] ?? Number.POSITIVE_INFINITY,
+    firstAfter: moment => firstAfter(times, moment),
   }
+}
+
+function firstAfter(times: readonly number[], moment: number): number {
+  return times[countUntil(times, moment)] ?? Number.POSITIVE_INFINITY
 }
 
 /** How many of these ascending times are at or before a moment. */

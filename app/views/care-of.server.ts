@@ -7,20 +7,22 @@ import type { StayRecord } from '#database/records.server.ts'
 interface Known {
   readonly version: number
   readonly bed: string
+  readonly moves: number
   readonly record: PatientRecord
 }
 
 const records = new WeakMap<StayRecord['entries'], Known>()
 
-/** The record of a stay: the same object until something is charted, the patient's facts are edited, or the bed is another. */
+/** The record of a stay: the same object until something is charted, the patient's facts are edited, or they are moved. */
 export function recordOf({ entries, patient, stay }: StayRecord): PatientRecord {
   const known = records.get(entries)
   const { version } = patient
-  const bed = stay.bedLabel
-  if (known?.version === version && known.bed === bed && entries.length > 0) return known.record
+  const { bedLabel: bed, admittedAt, moves } = stay
+  const isSame = known?.version === version && known.bed === bed && known.moves === moves.length
+  if (known && isSame && entries.length > 0) return known.record
   const identity = `${patient.familyName}, ${patient.givenName}; ${patient.bornOn}; ${patient.recordNumber}`
-  const record = patientRecord(entries, { admittedAt: stay.admittedAt, patient: { ...patient, bed, identity } })
-  records.set(entries, { version, bed, record })
+  const record = patientRecord(entries, { admittedAt, moves, patient: { ...patient, bed, identity } })
+  records.set(entries, { version, bed, moves: moves.length, record })
   return record
 }
 

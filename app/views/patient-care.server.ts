@@ -97,8 +97,10 @@ function recordAfter(
   without: string | null,
 ) {
   const { stay, patient, entries } = record
-  const isWhole = known === entries && without === null && known.every(({ performedAt }) => performedAt <= at)
+  const isDoneBy = known.every(({ performedAt }) => performedAt <= at) && stay.moves.every(move => move.at <= at)
+  const isWhole = known === entries && without === null && isDoneBy
   if (isWhole && context) return context.record
   const done = effectiveEntries(known).filter(({ performedAt, id }) => performedAt <= at && id !== without)
-  return patientRecord(done, { admittedAt: stay.admittedAt, patient })
+  const moves = stay.moves.filter(move => move.at <= at)
+  return patientRecord(done, { admittedAt: stay.admittedAt, moves, patient })
 }

@@ -80,7 +80,7 @@ export function timelineTag({ stay, patient }: PatientCare['record'], url: URL, 
   const asked = timelineQuery(url)
   const view = `${asked.span}.${asked.kind ?? ''}.${asked.before?.id ?? ''}`.replaceAll(' ', '')
   // A discharge or a move charts nothing, and ends or changes what is due.
-  const place = `${stay.bedId.slice(-8)}${stay.dischargedAt === null ? '' : '.left'}`
+  const place = `${stay.bedId.slice(-8)}.${stay.moves.length}${stay.dischargedAt === null ? '' : '.left'}`
   return `"${stay.id.slice(0, 8)}.${place}.${stay.entryCount}.${stay.countersignCount}.${patient.version}.${Math.floor(now.getTime() / SLOT_MS)}.${view}"`
 }
 

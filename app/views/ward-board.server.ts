@@ -108,7 +108,8 @@ const cares = new WeakMap<StayRecord['entries'], { readonly of: string; readonly
 
 /** One patient's care, computed once for each state of the patient and five minutes: what is charted for one is one's own. */
 function careOf(record: StayRecord, policy: Policy, ward: WardFacts, now: Date): BoardCare {
-  const of = JSON.stringify([slotOf(now), policy.id, policy.children?.id, record.patient.version, ward])
+  const { patient, stay } = record
+  const of = JSON.stringify([slotOf(now), policy.id, policy.children?.id, patient.version, stay.moves.length, ward])
   const known = cares.get(record.entries)
   if (known?.of === of) return known.care
   const care = boardCare(careView(contextOf(record, policy, ward, now), earlier(now, MARKS_BACK)))

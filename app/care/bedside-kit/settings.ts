@@ -5,14 +5,14 @@ export const KIT_SOURCE = "St George's NHS, emergency equipment: stays with the 
 
 export const kitAfterEvent = numberSetting({
   name: 'bedside-kit-after-event',
-  label: 'Bedside kit checked after a tube change, admission or transfer within',
+  label: 'Bedside kit checked after admission, a tube change, a move or an emergency within',
   unit: 'min',
   default: 30,
   min: 5,
   max: 120,
   affects: 'Bedside kit check: when it is due after an event.',
   source: {
-    says: 'NHS Greater Glasgow and Clyde: ready before the handover, and stay until it is; the minutes are a proposal',
+    says: 'NHS Greater Glasgow and Clyde: ready before the handover, and stay until it is; after use by common practice; the minutes are a proposal',
     standing: 'product proposal',
   },
 })
