@@ -12,7 +12,7 @@ const mayImport: Readonly<Record<string, readonly string[]>> = {
   rules: ['care', 'clinical', 'time'],
   charting: ['rules', 'care', 'clinical', 'time'],
   scanning: ['charting', 'catalogue', 'rules', 'care', 'clinical', 'time'],
-  supplies: ['charting', 'care', 'clinical', 'time'],
+  supplies: ['charting', 'catalogue', 'care', 'clinical', 'time'],
   components: ['supplies', 'scanning', 'charting', 'catalogue', 'rules', 'care', 'clinical', 'time'],
 }
 const pure = '^app/(time|clinical|care|catalogue|rules|supplies)/'

@@ -40,6 +40,10 @@ test.each(['=HYPERLINK("http://x.example")', '+1', '-1', '@SUM(A1)', '\tx', '＝
   },
 )
 
+test('a number below nothing stays a number', () => {
+  expect(csvText([[-4, 0.5, '-4']])).toBe("\uFEFF-4,0.5,'-4\r\n")
+})
+
 test('a file says that it is UTF-8 and ends its lines as table programs do', () => {
   expect(
     csvText([

@@ -22,10 +22,10 @@ const FORMULA = /^'*[=+\-@\t\r＝＋－＠]/
 const disarmed = (cell: string): string => (FORMULA.test(cell) ? `'${cell}` : cell)
 const armed = (cell: string): string => (cell.startsWith("'") && FORMULA.test(cell) ? cell.slice(1) : cell)
 
-/** Rows as a CSV file that programs of tables open as they should: marked as UTF-8, lines ended by CR LF. */
-export function csvText(rows: readonly (readonly string[])[]): string {
+/** Rows as a CSV file that programs of tables open as they should: marked as UTF-8, lines ended by CR LF. A number stays one. */
+export function csvText(rows: readonly (readonly (string | number)[])[]): string {
   return stringify(
-    rows.map(cells => cells.map(disarmed)),
+    rows.map(cells => cells.map(cell => (typeof cell === 'number' ? cell : disarmed(cell)))),
     { bom: true, record_delimiter: '\r\n', quoted_match: /[\r\n]|^\uFEFF/ },
   )
 }

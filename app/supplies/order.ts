@@ -1,3 +1,4 @@
+import { csvText } from '../catalogue/csv-text.ts'
 import type { ItemRow } from './ward-stock.ts'
 
 /** The items that have to be ordered, the most pressing first. */
@@ -8,23 +9,14 @@ export function orderList(items: readonly ItemRow[]): readonly ItemRow[] {
 const COLUMNS = ['Item', 'Pieces to order', 'Boxes', 'Pieces in a box', 'Stock', 'Use a day', 'Need over the horizon']
 
 /** The order list as rows of cells, its headings first. */
-export function orderTable(items: readonly ItemRow[]): readonly (readonly string[])[] {
+function orderTable(items: readonly ItemRow[]): readonly (readonly (string | number)[])[] {
   const rows = orderList(items).map(({ words, order, boxes, packSize, stock, perDay, need }) => {
-    return [words, order, boxes ?? '', packSize ?? '', stock, perDay, need].map(String)
+    return [words, order, boxes ?? '', packSize ?? '', stock, Number(perDay), need]
   })
   return [COLUMNS, ...rows]
 }
 
-// Programs of tables take a cell that begins so for a formula and run it; a number may begin with its sign.
-const FORMULA = /^[=+\-@\t\r]/
-
-/** The order list as a CSV file: marked as UTF-8, lines ended by CR LF, every cell that is no number in quotes. */
+/** The order list as a CSV file. */
 export function orderCsv(items: readonly ItemRow[]): string {
-  const cell = (text: string) => {
-    if (/^-?\d+(\.\d+)?$/.test(text)) return text
-    return `"${(FORMULA.test(text) ? `'${text}` : text).replaceAll('"', '""')}"`
-  }
-  return `\ufeff${orderTable(items)
-    .map(cells => `${cells.map(cell).join(',')}\r\n`)
-    .join('')}`
+  return csvText(orderTable(items))
 }
