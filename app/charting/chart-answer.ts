@@ -1,9 +1,6 @@
-import type { Warning } from '../care/warning.ts'
+import type { ExplainedWarning } from '../rules/why-warnings.ts'
 import type { FormErrors } from './assess.ts'
 import type { Typed } from './chart-form.ts'
-
-/** A warning as it is shown. */
-export type WarningView = Pick<Warning, 'name' | 'level' | 'action' | 'cause'>
 
 /** Who signs the form. */
 export interface FormSigner {
@@ -34,6 +31,6 @@ export type ChartAnswer =
       readonly asks: boolean
       readonly see?: Otherwise | undefined
     } & Kept)
-  | ({ readonly is: 'reviewed'; readonly sentence: string; readonly warnings: readonly WarningView[] } & Kept)
-  | { readonly is: 'previewed'; readonly warnings: readonly WarningView[] }
+  | ({ readonly is: 'reviewed'; readonly sentence: string; readonly warnings: readonly ExplainedWarning[] } & Kept)
+  | { readonly is: 'previewed'; readonly warnings: readonly ExplainedWarning[] }
   | { readonly is: 'unavailable'; readonly says: string }

@@ -8,7 +8,7 @@ import { LinkButton } from './button.tsx'
 import { Card } from './card.tsx'
 import { chartHref } from './chart-href.ts'
 import { DueTask, type DueTaskView } from './due-task.tsx'
-import { WhyValues } from './why-values.tsx'
+import { WhyDetails } from './why.tsx'
 
 interface CareDueProps {
   readonly patientId: string
@@ -36,7 +36,11 @@ export function CareDue({ patientId, tasks, why, now, zone, charts, nothingDue }
             <DueTask
               key={task.name}
               task={taskRow(task, { patientId, now, zone, charts, reasons })}
-              why={reasons && <Why why={reasons} defer={charts ? deferHref(patientId, task) : null} />}
+              why={
+                reasons && (
+                  <WhyTask why={reasons} about={task.title} defer={charts ? deferHref(patientId, task) : null} />
+                )
+              }
             />
           )
         })}
@@ -72,25 +76,20 @@ function taskRow(task: LiveTask, { patientId, now, zone, charts, reasons }: Seen
 
 const deferHref = (patientId: string, { name }: LiveTask) => chartHref(patientId, { kind: deferrals.slug, name })
 
-interface WhyProps {
+interface WhyTaskProps {
   readonly why: WhyDue
+  readonly about: string
   readonly defer: string | null
 }
 
-/** "Why is this due?": last act, rule, reasons, policy, and every number with its source. */
-function Why({ why, defer }: WhyProps) {
+function WhyTask({ why, about, defer }: WhyTaskProps) {
   return (
-    <div className="grid gap-1.5">
-      <p>{why.rule}</p>
-      {why.because && <p>{why.because}</p>}
-      {why.deferral && <p>{why.deferral}</p>}
-      <WhyValues values={why.values} />
-      <p>{why.policy}</p>
+    <WhyDetails why={why} about={about}>
       {defer && (
         <p>
           <LinkButton href={defer}>Defer this</LinkButton>
         </p>
       )}
-    </div>
+    </WhyDetails>
   )
 }

@@ -1,7 +1,7 @@
 import { Fragment, type ReactNode, useRef } from 'react'
 import { isShown } from '#app/care/field.ts'
 import { type FieldMeta, isCarried, type NameLists } from '#app/care/field-meta.ts'
-import type { Gauge } from '#app/care/gauge.ts'
+import type { ExplainedGauge } from '#app/rules/why-warnings.ts'
 import { type Answers, useAnswers } from './answers.ts'
 import { CareControl } from './care-controls.tsx'
 import type { DrawnField } from './conform-fields.ts'
@@ -10,7 +10,7 @@ import { useHydrated } from './hydrated.ts'
 
 export interface CareFieldsProps {
   readonly fields: readonly DrawnField[]
-  readonly gauges?: readonly Gauge[]
+  readonly gauges?: readonly ExplainedGauge[]
   /** Names that the record offers for the controls that choose one. */
   readonly lists?: Partial<NameLists>
   /** Units by the answer that decides them, where the answer is not the unit itself. */

@@ -1,6 +1,7 @@
 import { useNavigation } from 'react-router'
-import type { FormSigner, WarningView } from '#app/charting/chart-answer.ts'
+import type { FormSigner } from '#app/charting/chart-answer.ts'
 import type { LiveSentence } from '#app/charting/sentence.ts'
+import type { ExplainedWarning } from '#app/rules/why-warnings.ts'
 import { Button } from './button.tsx'
 import { FinalBar } from './final-bar.tsx'
 import { useHydrated } from './hydrated.ts'
@@ -10,7 +11,7 @@ interface ChartBarProps {
   readonly words: string
   readonly cancelHref: string
   readonly signer: FormSigner
-  readonly warnings: readonly WarningView[]
+  readonly warnings: readonly ExplainedWarning[]
   readonly live: LiveSentence | null
   readonly reviewed: string | undefined
 }
@@ -36,7 +37,7 @@ export function ChartBar({ words, cancelHref, signer, warnings, live, reviewed }
 }
 
 /** The most urgent act, in sight whatever part of the form is; the whole warning is a tap away. */
-function BarNotice({ warnings }: { readonly warnings: readonly WarningView[] }) {
+function BarNotice({ warnings }: { readonly warnings: readonly ExplainedWarning[] }) {
   const [first, ...others] = warnings.filter(({ level }) => level !== 'blue')
   if (!first) return null
   const more = others.length > 0 ? ` And ${others.length} more.` : ''

@@ -2,13 +2,13 @@ import { type FormEvent, type ReactNode, useEffect, useRef, useState } from 'rea
 import { Form } from 'react-router'
 import { fieldsOf } from '#app/care/field.ts'
 import type { NameLists } from '#app/care/field-meta.ts'
-import type { Gauge } from '#app/care/gauge.ts'
 import type { AnyCareKind } from '#app/care/kind.ts'
 import { photographFields } from '#app/care/photographs.ts'
 import type { FormErrors } from '#app/charting/assess.ts'
 import type { ChartAnswer, FormSigner } from '#app/charting/chart-answer.ts'
 import type { Typed } from '#app/charting/chart-form.ts'
 import type { Calendar } from '#app/charting/performed-at.ts'
+import type { ExplainedGauge } from '#app/rules/why-warnings.ts'
 import { CareFields } from './care-fields.tsx'
 import { ChartBar } from './chart-bar.tsx'
 import { ChartErrors, fieldId } from './chart-errors.tsx'
@@ -33,7 +33,7 @@ export interface ChartFormProps {
     }
     readonly calendar: Calendar
     readonly typed: Typed
-    readonly gauges: readonly Gauge[]
+    readonly gauges: readonly ExplainedGauge[]
     readonly notOffered: Readonly<Record<string, readonly string[]>>
     readonly lists: NameLists
     readonly units: Readonly<Record<string, string>>

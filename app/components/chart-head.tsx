@@ -1,5 +1,5 @@
-import type { WarningView } from '#app/charting/chart-answer.ts'
 import type { TaskStatus } from '#app/rules/status.ts'
+import type { ExplainedWarning } from '#app/rules/why-warnings.ts'
 import { Button, LinkButton } from './button.tsx'
 import { useHydrated } from './hydrated.ts'
 import { toneOf } from './status-look.ts'
@@ -10,7 +10,7 @@ interface ChartHeadProps {
   readonly title: string
   readonly due: { readonly says: string; readonly status: TaskStatus } | null
   readonly recently: string | null
-  readonly warnings: readonly WarningView[]
+  readonly warnings: readonly ExplainedWarning[]
   readonly isRestored: boolean
 }
 

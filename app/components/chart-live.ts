@@ -1,10 +1,11 @@
 import { type FormEvent, type RefObject, useCallback, useEffect, useRef, useState } from 'react'
 import { useFetcher } from 'react-router'
 import type { AnyCareKind } from '#app/care/kind.ts'
-import type { ChartAnswer, FormSigner, WarningView } from '#app/charting/chart-answer.ts'
+import type { ChartAnswer, FormSigner } from '#app/charting/chart-answer.ts'
 import { passwordFields } from '#app/charting/chart-form.ts'
 import type { Calendar } from '#app/charting/performed-at.ts'
 import { type LiveSentence, liveSentence } from '#app/charting/sentence.ts'
+import type { ExplainedWarning } from '#app/rules/why-warnings.ts'
 
 const WAIT_MS = 400 // until typing rests: long enough for two digits, short enough to see the warning before charting
 const TICK_MS = 5000
@@ -17,7 +18,7 @@ export interface ChartLive {
   /** The sentence as it stands; null until scripts run. */
   readonly sentence: LiveSentence | null
   /** What the server warns of, while the sentence is whole; null before it was asked. */
-  readonly warnings: readonly WarningView[] | null
+  readonly warnings: readonly ExplainedWarning[] | null
   /** The moment (ms) that the form shows as "Now". */
   readonly shownAt: number
   readonly onInput: (event: FormEvent<HTMLFormElement>) => void

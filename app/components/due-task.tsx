@@ -34,14 +34,7 @@ export function DueTask({ task, why }: DueTaskProps) {
       <div className="min-w-0 max-md:col-span-2">
         <h3 className="text-base font-semibold">{title}</h3>
         <p className="text-sm text-ink2">{detail}</p>
-        {why && (
-          <details className="text-sm">
-            <summary className="-mb-2.5 inline-flex min-h-11 min-w-11 items-center font-semibold text-ink2 underline underline-offset-3">
-              Why? <span className="sr-only">{title}</span>
-            </summary>
-            <div className="mt-1 max-w-prose text-ink2">{why}</div>
-          </details>
-        )}
+        {why && <div className="-mb-2.5">{why}</div>}
       </div>
       <div>
         <Tag tone={toneOf[status]}>{says}</Tag>

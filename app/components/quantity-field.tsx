@@ -1,10 +1,12 @@
 import { type FocusEvent, useRef, useState } from 'react'
 import { convertPressure, type PressureUnit, pressureUnits } from '#app/clinical/units.ts'
+import type { Why } from '#app/rules/why.ts'
 import { describedBy, type FieldProps, HintAndErrors, INPUT, isInvalid, LabelWords } from './field-parts.tsx'
 import { bandWords, Gauge } from './gauge.tsx'
 import { Keypad } from './keypad.tsx'
 import { Tag } from './tag.tsx'
 import { typeInto } from './type-into.ts'
+import { WhyDetails } from './why.tsx'
 
 /** The band that a number is read against, in its own unit. */
 export interface Band {
@@ -12,6 +14,7 @@ export interface Band {
   readonly upper: number
   readonly max: number
   readonly unit: string
+  readonly why?: Why | undefined
 }
 
 export interface QuantityFieldProps extends FieldProps {
@@ -65,6 +68,7 @@ export function QuantityField(props: QuantityFieldProps) {
         {band && (
           <div className="mt-1 max-w-105">
             <Gauge {...band} value={value} title={field.label} />
+            {band.why && <WhyDetails why={band.why} about={`The band of: ${field.label}`} />}
           </div>
         )}
         <HintAndErrors field={field} />

@@ -1,12 +1,13 @@
 import { Form } from 'react-router'
+import { wordsOf } from '#app/care/kind.ts'
 import { warningAnswers } from '#app/care/warning-answer/schema.ts'
 import type { AnswerView, StandingView } from '#app/rules/standing-views.ts'
-import type { WhyWarning } from '#app/rules/why-warnings.ts'
+import type { WhyByName } from '#app/rules/why-warnings.ts'
 import { momentWords } from '#app/rules/words.ts'
 import type { Zone } from '#app/time/zone.ts'
 import { Button, LinkButton } from './button.tsx'
 import { Notice } from './notice.tsx'
-import { WhyWarned } from './warnings.tsx'
+import { WhyDetails } from './why.tsx'
 
 /** Who may answer, and under which ids: one for each warning, so that a button pressed twice is one answer. */
 export interface Answering {
@@ -20,7 +21,7 @@ export interface Answering {
 interface StandingWarningsProps {
   readonly warnings: readonly StandingView[]
   /** Why each stands, by its name. */
-  readonly why: Readonly<Record<string, WhyWarning>>
+  readonly why: WhyByName
   /** The server's clock (ms). */
   readonly now: number
   readonly zone: Zone
@@ -44,7 +45,7 @@ export function StandingWarnings({ warnings, why, now, zone, answering }: Standi
             <>
               <p className="w-full text-sm">{lifeWords(warning, now, zone)}</p>
               {answering && <AnswerButtons warning={warning} answering={answering} />}
-              <Reasons why={why[warning.name]} about={warning.action} />
+              <Reasons why={why[warning.name]} about={wordsOf(warning.name)} />
             </>
           }
         >
@@ -60,8 +61,8 @@ export function StandingWarnings({ warnings, why, now, zone, answering }: Standi
   )
 }
 
-function Reasons({ why, about }: { readonly why: WhyWarning | undefined; readonly about: string }) {
-  return why ? <WhyWarned why={why} about={about} /> : null
+function Reasons({ why, about }: { readonly why: WhyByName[string] | undefined; readonly about: string }) {
+  return why ? <WhyDetails why={why} about={about} /> : null
 }
 
 /** `Raised 10:04 by R. Osei. Seen by N. Adeyemi, 10:06.` */
@@ -86,7 +87,7 @@ function AnswerButtons({ warning: { name, action, seen }, answering }: AnswerBut
   const form = `/patients/${answering.patientId}/chart/${warningAnswers.slug}?warning=${name}`
   return (
     <>
-      {!seen && <SeenButton name={name} action={action} answering={answering} />}
+      {!seen && <SeenButton name={name} about={action} answering={answering} />}
       <LinkButton href={form} label={`Chart what was done: ${action}`}>
         Chart what was done
       </LinkButton>
@@ -96,13 +97,14 @@ function AnswerButtons({ warning: { name, action, seen }, answering }: AnswerBut
 
 interface SeenButtonProps {
   readonly name: string
-  readonly action: string
+  /** The warning in words, for those who hear the button alone. */
+  readonly about: string
   readonly answering: Answering
   readonly size?: 44 | 56
 }
 
 /** Charts in one tap that this person has seen the warning. Nothing while the page holds no id for it, as for one that has just come. */
-export function SeenButton({ name, action, answering, size = 44 }: SeenButtonProps) {
+export function SeenButton({ name, about, answering, size = 44 }: SeenButtonProps) {
   const id = answering.ids[name]
   if (id === undefined) return null
   const fields = {
@@ -118,7 +120,7 @@ export function SeenButton({ name, action, answering, size = 44 }: SeenButtonPro
       {Object.entries(fields).map(([field, value]) => (
         <input key={field} type="hidden" name={field} value={value} />
       ))}
-      <Button variant="primary" size={size} aria-label={`Seen: ${action}`}>
+      <Button variant="primary" size={size} aria-label={`Seen: ${about}`}>
         Seen
       </Button>
     </Form>

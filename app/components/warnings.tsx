@@ -1,17 +1,11 @@
-import type { WarningLevel } from '#app/care/warning.ts'
-import type { WhyWarning } from '#app/rules/why-warnings.ts'
+import { wordsOf } from '#app/care/kind.ts'
+import type { ExplainedWarning } from '#app/rules/why-warnings.ts'
 import { Notice } from './notice.tsx'
-import { WhyValues } from './why-values.tsx'
+import { WhyDetails } from './why.tsx'
 
 interface WarningsProps {
   readonly title?: string
-  readonly warnings: readonly {
-    readonly name: string
-    readonly level: WarningLevel
-    readonly action: string
-    readonly cause: string
-    readonly why?: WhyWarning | undefined
-  }[]
+  readonly warnings: readonly ExplainedWarning[]
 }
 
 /** Warnings, most urgent first: what to do, then why. */
@@ -23,31 +17,10 @@ export function Warnings({ title, warnings }: WarningsProps) {
         <p className="rounded-card border border-line bg-brand-tint px-4 py-3 font-semibold text-brand">{title}</p>
       )}
       {warnings.map(({ name, level, action, cause, why }) => (
-        <Notice key={name} tone={level} action={action} answer={why && <WhyWarned why={why} about={action} />}>
+        <Notice key={name} tone={level} action={action} answer={why && <WhyDetails why={why} about={wordsOf(name)} />}>
           {cause}
         </Notice>
       ))}
     </section>
-  )
-}
-
-interface WhyProps {
-  readonly why: WhyWarning
-  readonly about: string
-}
-
-/** "Why?" of a warning: its source, the policy, and the numbers that this care was judged by. */
-export function WhyWarned({ why: { source, policy, values }, about }: WhyProps) {
-  return (
-    <details className="text-sm open:w-full">
-      <summary className="inline-flex min-h-11 min-w-11 items-center font-semibold text-ink2 underline underline-offset-3">
-        Why? <span className="sr-only">{about}</span>
-      </summary>
-      <div className="grid max-w-prose gap-1.5 text-ink2">
-        <p>{source}.</p>
-        <WhyValues values={values} />
-        <p>{policy}</p>
-      </div>
-    </details>
   )
 }

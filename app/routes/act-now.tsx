@@ -2,9 +2,12 @@ import { data } from 'react-router'
 import { patientContext } from '#app/auth/patient-access.server.ts'
 import { can, canByGrant } from '#app/auth/permissions.ts'
 import { signedIn } from '#app/auth/signed-in.server.ts'
+import { wordsOf } from '#app/care/kind.ts'
 import { warningAnswers } from '#app/care/warning-answer/schema.ts'
 import { LinkButton } from '#app/components/button.tsx'
-import { SeenButton } from '#app/components/standing-warnings.tsx'
+import { type Answering, SeenButton } from '#app/components/standing-warnings.tsx'
+import { WhyDetails } from '#app/components/why.tsx'
+import { type UrgentStep, urgentSteps } from '#app/rules/act-now.ts'
 import { answeringOf } from '#app/views/answering.server.ts'
 import { chartedNow } from '#app/views/charted-now.server.ts'
 import { patientCare } from '#app/views/patient-context.server.ts'
@@ -18,7 +21,8 @@ export async function loader({ params: { entryId }, context }: Route.LoaderArgs)
   const now = new Date()
   const charted = await chartedNow(await patientCare(opened.stayId, now), entryId)
   if (!charted) throw data('There is no such entry.', 404)
-  const urgent = charted.warnings.filter(({ level }) => level === 'red')
+  const urgent = urgentSteps(charted.warnings)
+  const reasons = urgent.flatMap(step => step.reasons)
   const answers = opened.via === 'ward' ? can(user, 'chart care', opened.wardId) : canByGrant(user, 'chart care')
   const { patientId } = opened
   return {
@@ -26,7 +30,7 @@ export async function loader({ params: { entryId }, context }: Route.LoaderArgs)
     entryId,
     says: charted.says,
     urgent,
-    answering: answers ? answeringOf(urgent, { patientId, user, now }) : null,
+    answering: answers ? answeringOf(reasons, { patientId, user, now }) : null,
   }
 }
 
@@ -35,23 +39,8 @@ export default function ActNow({ loaderData: { patientId, entryId, says, urgent,
   return (
     <div className="mx-auto grid max-w-4xl gap-4 px-4 py-5 md:px-6">
       <h1 className="text-2xl font-bold">{urgent.length > 0 ? 'Act now' : 'Nothing here asks to act now'}</h1>
-      {urgent.map(({ name, action, cause }) => (
-        <div key={name} className="grid gap-3 rounded-card border-2 border-late bg-late-tint p-5">
-          <p className="text-2xl font-bold">{action}</p>
-          <p className="text-lg">{cause}</p>
-          {answering && (
-            <div className="flex flex-wrap gap-3">
-              <SeenButton name={name} action={action} answering={answering} size={56} />
-              <LinkButton
-                size={56}
-                href={`/patients/${patientId}/chart/${warningAnswers.slug}?warning=${name}`}
-                label={`Chart what was done: ${action}`}
-              >
-                Chart what was done
-              </LinkButton>
-            </div>
-          )}
-        </div>
+      {urgent.map(step => (
+        <Step key={step.action} {...{ step, patientId, answering }} />
       ))}
       <p className="text-ink2">{says}</p>
       <p>
@@ -60,5 +49,37 @@ export default function ActNow({ loaderData: { patientId, entryId, says, urgent,
         </LinkButton>
       </p>
     </div>
+  )
+}
+
+interface StepProps {
+  readonly step: UrgentStep
+  readonly patientId: string
+  readonly answering: Answering | null
+}
+
+/** One instruction, large, with what was found under it: each finding is seen and acted on by itself. */
+function Step({ step: { action, reasons }, patientId, answering }: StepProps) {
+  const href = `/patients/${patientId}/chart/${warningAnswers.slug}?warning=`
+  return (
+    <section className="rounded-card border-2 border-late bg-late-tint p-5">
+      <p className="text-2xl font-bold">{action}</p>
+      <ul>
+        {reasons.map(({ name, cause, why }) => (
+          <li key={name} className="mt-3 grid gap-3 not-first:border-t not-first:border-late not-first:pt-4">
+            <p className="text-lg">{cause}</p>
+            {answering && (
+              <div className="flex flex-wrap gap-3">
+                <SeenButton name={name} about={cause} answering={answering} size={56} />
+                <LinkButton size={56} href={href + name} label={`Chart what was done: ${cause}`}>
+                  Chart what was done
+                </LinkButton>
+              </div>
+            )}
+            {why && <WhyDetails why={why} about={wordsOf(name)} />}
+          </li>
+        ))}
+      </ul>
+    </section>
   )
 }

@@ -10,7 +10,7 @@ export function standingWarnings(context: CareContext, kinds: readonly AnyCareKi
     kinds.flatMap(kind => kind.standing?.(context) ?? []),
     context,
   )
-  return onceEach([...noRules(context), ...warnings]).toSorted(byUrgency)
+  return onceEach([...noChildRules(context), ...warnings]).toSorted(byUrgency)
 }
 
 /** Warnings about one act, as it is or was charted; `context` is that of the moment before it. */
@@ -27,7 +27,8 @@ function forAge(warnings: readonly Warning[], context: CareContext): readonly Wa
   return isTooYoung(context) ? warnings.filter(({ level }) => level === 'red') : warnings
 }
 
-function noRules(context: CareContext): readonly Warning[] {
+/** What is said in place of due care where nothing is computed for a child. */
+export function noChildRules(context: CareContext): readonly Warning[] {
   if (!isTooYoung(context)) return []
   const from = context.values.of(adultAge)
   return [

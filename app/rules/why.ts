@@ -4,7 +4,7 @@ import { showDateTime, showDay } from '../time/display.ts'
 import type { Zone } from '../time/zone.ts'
 import type { DueTask } from './due-tasks.ts'
 
-/** One number behind a task, with where it came from. */
+/** One number behind an answer, with where it came from. */
 export interface WhyValue {
   readonly label: string
   readonly value: string
@@ -13,28 +13,42 @@ export interface WhyValue {
   readonly standing: Standing
 }
 
-/** Why a task is due: the act its clock counts from, the rule in words, the policy, and every number with its source. */
-export interface WhyDue {
-  readonly last: string
-  readonly rule: string
-  readonly because?: string
-  readonly deferral?: string
-  readonly policy: string
+/** The answer to "why?" of a task, a warning or a band: the rule in sentences, the numbers that it read, and the policy in force. */
+export interface Why {
+  readonly rule: readonly string[]
   readonly values: readonly WhyValue[]
+  readonly policy: string
+}
+
+/** Why a task is due, and the act that its clock counts from. */
+export interface WhyDue extends Why {
+  readonly last: string
+}
+
+/** Why, with the numbers of these settings as they are in force. */
+export function whyOf(rule: readonly string[], settings: readonly AnySetting[], context: CareContext): Why {
+  return {
+    rule,
+    values: settings.map(setting => whyValue(setting, context)),
+    policy: policyWords(context.values.policy),
+  }
 }
 
 /** The answer to "Why is this due?", ready to read. */
 export function whyDue(task: DueTask, context: CareContext): WhyDue {
   const { zone } = context.ward
+  const { because, deferral, rule } = task
+  const deferred = deferral
+    ? `Deferred to ${showDateTime(deferral.until, zone)} by ${deferral.entry.recordedByName}.`
+    : undefined
+  const sentences = [rule.says(context), because && `${capital(because)}.`, deferred]
   return {
     last: lastWords(task, zone),
-    rule: task.rule.says(context),
-    ...(task.because === undefined ? {} : { because: `${capital(task.because)}.` }),
-    ...(task.deferral
-      ? { deferral: `Deferred to ${showDateTime(task.deferral.until, zone)} by ${task.deferral.entry.recordedByName}.` }
-      : {}),
-    policy: policyWords(context.values.policy),
-    values: task.rule.settings.map(setting => whyValue(setting, context)),
+    ...whyOf(
+      sentences.flatMap(says => says ?? []),
+      rule.settings,
+      context,
+    ),
   }
 }
 

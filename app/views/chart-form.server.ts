@@ -2,10 +2,9 @@ import { v7 as uuidv7 } from 'uuid'
 import { takeDraft } from '#app/auth/draft.server.ts'
 import { authorOf, type CurrentUser } from '#app/auth/permissions.ts'
 import type { NameLists } from '#app/care/field-meta.ts'
-import type { Gauge } from '#app/care/gauge.ts'
 import { lateReasonAfter } from '#app/care/general-settings.ts'
 import type { AnyCareKind, CareContext } from '#app/care/kind.ts'
-import type { FormSigner, WarningView } from '#app/charting/chart-answer.ts'
+import type { FormSigner } from '#app/charting/chart-answer.ts'
 import { type Typed, typedFrom, typedIn } from '#app/charting/chart-form.ts'
 import { restored } from '#app/charting/drafts.ts'
 import type { Calendar } from '#app/charting/performed-at.ts'
@@ -15,6 +14,13 @@ import type { TaskStatus } from '#app/rules/status.ts'
 import { taskView } from '#app/rules/views.ts'
 import { answerableWarnings } from '#app/rules/warning-lives.ts'
 import { standingWarnings } from '#app/rules/warnings.ts'
+import {
+  type ExplainedGauge,
+  type ExplainedWarning,
+  explained,
+  explainedGauges,
+  whyStanding,
+} from '#app/rules/why-warnings.ts'
 import { standingWords } from '#app/rules/words.ts'
 import { showDuration } from '#app/time/display.ts'
 import { hours, since } from '#app/time/duration.ts'
@@ -34,12 +40,12 @@ export interface ChartFormView {
   readonly typed: Typed
   /** The usual act in words, with its answers. */
   readonly usual: { readonly words: string; readonly answers: Typed } | null
-  readonly gauges: readonly Gauge[]
+  readonly gauges: readonly ExplainedGauge[]
   readonly notOffered: Readonly<Record<string, readonly string[]>>
   readonly lists: NameLists
   readonly units: Readonly<Record<string, string>>
   readonly witnesses: Readonly<Record<string, string>>
-  readonly warnings: readonly WarningView[]
+  readonly warnings: readonly ExplainedWarning[]
   /** Who charted the same just now. */
   readonly recently: string | null
   /** How the care stands: `36 min late`. */
@@ -96,7 +102,7 @@ export async function frameOf(kind: AnyCareKind, { care, user, now, signedInAt }
     signer: signerOf(user),
     signing: await signingAsk(kind, { user, context, now, signedInAt, zone: ward.zone }),
     calendar: calendarOf(care, now),
-    gauges: context && !isTooYoung(context) ? (kind.gauges?.(context) ?? []) : [],
+    gauges: context && !isTooYoung(context) ? explainedGauges(kind, context) : [],
     notOffered: context ? (kind.notOffered?.(context) ?? {}) : {},
     lists: {
       task: context ? deferrable(context) : {},
@@ -155,16 +161,10 @@ function deferrable(context: CareContext): Readonly<Record<string, string>> {
 }
 
 /** What stands about this kind of care, and whatever is red. */
-function warningsFor(kind: AnyCareKind, context: CareContext): readonly WarningView[] {
+function warningsFor(kind: AnyCareKind, context: CareContext): readonly ExplainedWarning[] {
   const own = new Set(kind.standing?.(context).map(({ name }) => name))
-  return standingWarnings(context)
-    .filter(({ level, name }) => level === 'red' || own.has(name))
-    .map(shownWarning)
-}
-
-/** A warning without its source, which the policy page has. */
-export function shownWarning({ name, level, action, cause }: WarningView): WarningView {
-  return { name, level, action, cause }
+  const shown = standingWarnings(context).filter(({ level, name }) => level === 'red' || own.has(name))
+  return shown.length === 0 ? [] : explained(shown, whyStanding(context))
 }
 
 const RECENT = hours(0.5)

@@ -3,11 +3,12 @@ import type { CurrentUser } from '#app/auth/permissions.ts'
 import type { AnyCareKind, CareContext } from '#app/care/kind.ts'
 import { careSettings, careTasks } from '#app/care/kinds.ts'
 import { type Assessed, assessed, type Chartable, type Situation } from '#app/charting/assess.ts'
-import type { ChartAnswer, Otherwise, WarningView } from '#app/charting/chart-answer.ts'
+import type { ChartAnswer, Otherwise } from '#app/charting/chart-answer.ts'
 import { intentOf, typedIn } from '#app/charting/chart-form.ts'
 import { chartedSentence } from '#app/charting/sentence.ts'
 import type { SentPhotographs } from '#app/photographs/sent-photographs.server.ts'
 import { entryWarnings } from '#app/rules/warnings.ts'
+import { explained, whyEntry } from '#app/rules/why-warnings.ts'
 import { showDateTime } from '#app/time/display.ts'
 import type { Trace } from '#database/access-log.server.ts'
 import type { Alongside } from '#database/entries.server.ts'
@@ -15,7 +16,7 @@ import type { Charting } from '#database/entry-outcome.server.ts'
 import { policies } from '#database/policies.server.ts'
 import { person } from '#database/users.server.ts'
 import { cataloguedItem } from './catalogued-item.server.ts'
-import { calendarOf, shownWarning, signerOf } from './chart-form.server.ts'
+import { calendarOf, signerOf } from './chart-form.server.ts'
 import { witnessesFor } from './chart-lists.server.ts'
 import { signed } from './chart-signing.server.ts'
 import { contextOfAct, contextOfCorrection } from './patient-care.server.ts'
@@ -84,7 +85,7 @@ function refused(answer: Omit<ChartAnswer & { is: 'refused' }, 'is'>, status: nu
 }
 
 function warningsOf(kind: AnyCareKind, { chart, context }: { chart: Chartable; context: CareContext | null }) {
-  return context ? entryWarnings(kind, chart.care, context).map<WarningView>(shownWarning) : []
+  return context ? explained(entryWarnings(kind, chart.care, context), whyEntry(kind, chart.care, context)) : []
 }
 
 /** What the page shows again: everything typed, under the same id, so that sending it again is the same act. */

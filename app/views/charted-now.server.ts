@@ -2,9 +2,9 @@ import type { StoredEntry } from '#app/care/kind.ts'
 import { findKind } from '#app/care/kinds.ts'
 import type { Policy } from '#app/care/policy.ts'
 import { readEntry } from '#app/care/record.ts'
-import type { Warning } from '#app/care/warning.ts'
 import { entryWords } from '#app/rules/entry-words.ts'
 import { entryWarnings } from '#app/rules/warnings.ts'
+import { type ExplainedWarning, explained, whyEntry } from '#app/rules/why-warnings.ts'
 import { showTime } from '#app/time/display.ts'
 import { policies } from '#database/policies.server.ts'
 import { contextOfAct } from './patient-care.server.ts'
@@ -13,7 +13,7 @@ import type { PatientCare } from './patient-context.server.ts'
 /** What was charted a moment ago, read back, with what it asks people to do. */
 export interface ChartedNow {
   readonly says: string
-  readonly warnings: readonly Pick<Warning, 'name' | 'level' | 'action' | 'cause'>[]
+  readonly warnings: readonly ExplainedWarning[]
 }
 
 /** The entry that the page was led to after charting; null for any other id. */
@@ -25,11 +25,15 @@ export async function chartedNow(patient: PatientCare, id: string | null): Promi
   return { says, warnings: warningsOf(patient, await policies(), stored) }
 }
 
-/** The warnings of an entry, computed as they were: with the record before it, under the policy of that moment. */
-export function warningsOf(patient: PatientCare, known: readonly Policy[], stored: StoredEntry): readonly Warning[] {
+/** The warnings of an entry with why, computed as they were: with the record before it, under the policy of that moment. */
+export function warningsOf(
+  patient: PatientCare,
+  known: readonly Policy[],
+  stored: StoredEntry,
+): readonly ExplainedWarning[] {
   const kind = findKind(stored.kind)
   const entry = kind && readEntry(kind, stored)[0]
   const context = contextOfAct(patient, known, stored.performedAt, stored)
   if (!kind || !entry || !context || stored.status === 'retracted') return []
-  return entryWarnings(kind, entry.data, context)
+  return explained(entryWarnings(kind, entry.data, context), whyEntry(kind, entry.data, context))
 }

@@ -2,14 +2,13 @@ import { can } from '#app/auth/permissions.ts'
 import type { StoredEntry } from '#app/care/kind.ts'
 import { findKind } from '#app/care/kinds.ts'
 import { readEntry } from '#app/care/record.ts'
-import type { WarningView } from '#app/charting/chart-answer.ts'
 import { type Detail, entryDetails } from '#app/rules/entry-details.ts'
 import { entryWords, lateWords, photographsOf } from '#app/rules/entry-words.ts'
 import { authorWords, competenceWords, type SignatureFact, secondPersonWords } from '#app/rules/signature-words.ts'
 import { policyWords } from '#app/rules/why.ts'
+import type { ExplainedWarning } from '#app/rules/why-warnings.ts'
 import { showDateTime, showOffset } from '#app/time/display.ts'
 import { policies } from '#database/policies.server.ts'
-import { shownWarning } from './chart-form.server.ts'
 import { warningsOf } from './charted-now.server.ts'
 import { signingOf } from './entry-signing.server.ts'
 import { mayDo, type OpenedEntry } from './opened-entry.server.ts'
@@ -40,7 +39,7 @@ export interface EntryView {
   /** The payload as stored, of an entry that cannot be read. */
   readonly raw: string | null
   readonly photographs: readonly string[]
-  readonly warnings: readonly WarningView[]
+  readonly warnings: readonly ExplainedWarning[]
   readonly policy: string | null
   readonly history: readonly HistoryLine[]
   readonly mayCorrect: boolean
@@ -73,7 +72,7 @@ export async function entryView(opened: OpenedEntry): Promise<EntryView> {
     details: kind && data ? entryDetails(kind, data as Readonly<Record<string, unknown>>) : [],
     raw: words.readable ? null : rawOf(entry),
     photographs: photographsOf(entry),
-    warnings: warningsOf(care, known, entry).map(shownWarning),
+    warnings: warningsOf(care, known, entry),
     policy: context && policyWords(context.values.policy),
     history: chain.length > 1 ? chain.map(link => historyLine(link, entry.id, care.ward.zone)) : [],
     mayCorrect: counts && kind !== undefined && mayDo('correct', opened),

@@ -6,7 +6,7 @@ import { entryWords, lateWords, photographsOf } from '#app/rules/entry-words.ts'
 import { type TubeCardOrNone, tubeCard } from '#app/rules/tube-card.ts'
 import { type CareView, careView, isOutOfRange } from '#app/rules/views.ts'
 import { type WhyDue, whyDue } from '#app/rules/why.ts'
-import { type WhyWarning, whyStanding } from '#app/rules/why-warnings.ts'
+import { type WhyByName, whyStanding } from '#app/rules/why-warnings.ts'
 import { showDateTime, showTime } from '#app/time/display.ts'
 import { type Duration, earlier, hours } from '#app/time/duration.ts'
 import { type LocalDay, localDay } from '#app/time/zone.ts'
@@ -47,7 +47,7 @@ export interface PatientTimeline {
   readonly zone: string
   readonly care: CareView
   readonly why: Readonly<Record<string, WhyDue>>
-  readonly whyWarned: Readonly<Record<string, WhyWarning>>
+  readonly whyWarned: WhyByName
   readonly tube: TubeCardOrNone
   readonly entries: readonly EntryLine[]
   readonly next: string | null

@@ -13,7 +13,15 @@ const schema = careFields({
   whyNot: text({ label: 'Why not', when: { field: 'method', is: ['none'] }, neededThen: true }).optional(),
   note: note({ label: 'Note', more: true }).optional(),
 })
-const band = { field: 'found', unitField: 'unit', lower: 20, upper: 30, max: 50, unit: 'cmH2O' }
+const upper = {
+  label: 'Upper limit',
+  value: '30 cmH2O',
+  origin: 'Policy',
+  source: 'A paper',
+  standing: 'published',
+} as const
+const why = { rule: ['In range from 20 to 30 cmH2O.'], values: [upper], policy: 'Care, version 2.' } as const
+const band = { field: 'found', unitField: 'unit', lower: 20, upper: 30, max: 50, unit: 'cmH2O', why }
 
 type Given = Readonly<Record<string, { readonly answer?: string; readonly errors?: string[] }>>
 
@@ -66,6 +74,17 @@ test('a number is read against its band while it is typed, in whatever unit', as
   expect(screen.getByRole('status')).toHaveTextContent('above 30')
   await userEvent.click(screen.getByRole('radio', { name: 'mmHg' }))
   expect(screen.getByRole('status')).toHaveTextContent('46.2 cmH2O, above 30')
+})
+
+test('a band says why it lies there: the rule, its numbers with their source, and the policy', async () => {
+  form()
+  const asked = screen.getByText('The band of: Pressure found').closest('details')
+  expect(asked).not.toHaveAttribute('open')
+  await userEvent.click(screen.getByText('The band of: Pressure found'))
+  expect(asked).toHaveAttribute('open')
+  expect(asked).toHaveTextContent(
+    'Why? The band of: Pressure foundIn range from 20 to 30 cmH2O.Upper limit: 30 cmH2O. Policy. A paper. publishedCare, version 2.',
+  )
 })
 
 test('keys type into the number', async () => {

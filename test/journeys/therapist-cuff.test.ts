@@ -31,6 +31,13 @@ test('34 cmH2O is warned of before it is charted, and left at 26 it stands in th
   await page.getByRole('radio', { name: 'Manometer' }).check()
   await warnings.getByText('Let air out slowly to 20 to 30 cmH2O and check again in 30 minutes.').waitFor()
 
+  const upper = /Cuff pressure, upper limit: 30 cmH2O\. .*BMJ 1984.*version \d/s
+  for (const about of ['The band of: Pressure found', 'Cuff high']) {
+    const why = page.locator('details', { has: page.locator('summary', { hasText: about }) })
+    await why.locator('summary').click()
+    expect(await why.textContent()).toMatch(upper)
+  }
+
   await page.getByRole('textbox', { name: 'Left at, if adjusted' }).fill('26')
   await page.getByText('in range, 20 to 30', { exact: true }).waitFor()
   await warnings.getByText('Found high, left within 20 to 30 cmH2O.').waitFor()

@@ -37,7 +37,15 @@ test('a red finding takes over, is answered, and shows on the board until then',
   await chartStuckCatheter(page, patient)
   await page.waitForURL(/\/act-now\//)
   await page.getByRole('heading', { name: 'Act now', exact: true }).waitFor()
-  await page.getByText('Follow your local emergency plan.').first().waitFor()
+  // The catheter and the distress ask for the same: it is said once, and each finding says why it is there.
+  await page.getByText(/Call for help now\..*Follow your local emergency plan\.$/).waitFor()
+  const whys = page.locator('#main details')
+  expect(await whys.count()).toBeGreaterThan(1)
+  await whys.first().locator('summary').click()
+  await page
+    .getByText(/^Source of this rule: .*RCEM/)
+    .first()
+    .waitFor()
   expect(await pageProblems(page)).toEqual([])
 
   const urgent = page.url()

@@ -1,9 +1,9 @@
 import { careKind } from '../kind.ts'
 import { cuffChecksOfPolicy } from './checks.ts'
-import { cuffBand, cuffState, foundClass } from './cuff.ts'
+import { cuffState, foundClass } from './cuff.ts'
 import { cuffChecks } from './schema.ts'
 import { cuffSentence } from './sentence.ts'
-import { cuffSettings } from './settings.ts'
+import { cuffLower, cuffSettings, cuffUpper } from './settings.ts'
 import { cuffTasks } from './tasks.ts'
 import { cuffWarnings, standingCuffWarnings } from './warnings.ts'
 
@@ -31,7 +31,7 @@ export const cuffPressure = careKind({
   startsWith: ({ ward }) => ({ unit: ward.pressureUnit }),
   gauges({ values, record }) {
     if (cuffState(record) !== 'inflated') return []
-    const { lower, upper } = cuffBand(values)
+    const [lower, upper] = [values.of(cuffLower), values.of(cuffUpper)]
     return ['found', 'leftAt'].map(field => ({ field, unitField: 'unit', lower, upper, max: 50, unit: 'cmH2O' }))
   },
   warnings: cuffWarnings,
