@@ -1,5 +1,6 @@
 import type { Recall } from '#app/care/recall.ts'
 import { isUniqueViolation } from './errors.server.ts'
+import { marks } from './marks.server.ts'
 import { change, select, transact } from './sequelize.server.ts'
 import { raiseAllWards } from './ward-revs.server.ts'
 
@@ -18,8 +19,7 @@ let kept: { readonly mark: string; readonly decisions: readonly LotDecision[] } 
 
 /** Every decision about lots, the latest first. Kept in memory: they are only ever added, so the last number tells. */
 export async function lotDecisions(): Promise<readonly LotDecision[]> {
-  const [last] = await select<{ mark: string }>(`SELECT CONCAT_WS(' ', COUNT(*), MAX(number)) AS mark FROM lot_recalls`)
-  const mark = last?.mark ?? ''
+  const { lots: mark } = await marks()
   if (mark !== kept.mark) kept = { mark, decisions: await allDecisions() }
   return kept.decisions
 }

@@ -2,6 +2,7 @@ import type { Transaction } from 'sequelize'
 import { v5 as uuidv5 } from 'uuid'
 import type { Policy, RuleSet } from '#app/care/policy.ts'
 import { isUniqueViolation } from './errors.server.ts'
+import { marks } from './marks.server.ts'
 import { PolicyRow } from './models/policy.server.ts'
 import { select, transact } from './sequelize.server.ts'
 import { raiseAllWards, raiseWards } from './ward-revs.server.ts'
@@ -37,10 +38,7 @@ let kept: { readonly mark: string; readonly policies: readonly StoredPolicy[] } 
  * time one came tell whether there are new ones.
  */
 export async function policies(): Promise<readonly StoredPolicy[]> {
-  const [counted] = await select<{ mark: string }>(
-    `SELECT CONCAT_WS(' ', COUNT(*), MAX(created_at), (SELECT COUNT(*) FROM policy_withdrawals)) AS mark FROM policies`,
-  )
-  const mark = counted?.mark ?? ''
+  const { policies: mark } = await marks()
   if (mark !== kept.mark) kept = { mark, policies: await allPolicies() }
   return kept.policies
 }

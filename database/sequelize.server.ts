@@ -1,5 +1,5 @@
 import { setTimeout as pause } from 'node:timers/promises'
-import { QueryTypes, type Sequelize, Transaction } from 'sequelize'
+import { QueryTypes, type Sequelize, type Transaction } from 'sequelize'
 import { env } from '#app/env.server.ts'
 import { connection } from './connection.server.ts'
 import { DatabaseUnavailable, isWorthARetry, translated } from './errors.server.ts'
@@ -40,7 +40,7 @@ export async function transact<T>(work: (transaction: Transaction) => Promise<T>
 }
 
 function once<T>(work: (transaction: Transaction) => Promise<T>, progress: { worked: boolean }) {
-  return sequelize.transaction({ isolationLevel: Transaction.ISOLATION_LEVELS.READ_COMMITTED }, async transaction => {
+  return sequelize.transaction(async transaction => {
     const result = await work(transaction)
     progress.worked = true
     return result

@@ -52,8 +52,7 @@ async function takenBy(use: StockUse, transaction: Transaction) {
     transaction,
   )
   const wanted = added(use.used.map(({ item, quantity }) => ({ item: itemOf(item), quantity })))
-  const place = await placeOf(use, transaction)
-  const atBed = await stockAtBed(place, wanted, transaction)
+  const { place, atBed } = await bedOf(use, wanted, transaction)
   return wanted.flatMap(({ item, quantity }) => {
     const fromBed = Math.min(quantity, Math.max(0, atBed.get(itemKey(item)) ?? 0))
     return [
@@ -81,26 +80,21 @@ function added(wanted: readonly Wanted[]): readonly Wanted[] {
   return [...sums.values()]
 }
 
-/** Where the patient was when the care was done: what is charted late was taken there. */
-async function placeOf({ stayId, performedAt }: StockUse, transaction: Transaction): Promise<Place> {
-  const [place] = await select<Place>(
-    `SELECT ward_id AS wardId, bed_id AS bedId FROM (
-       SELECT ward_id, bed_id, moved_at, recorded_at, 1 AS known FROM bed_moves WHERE stay_id = :stayId AND moved_at <= :performedAt
-       UNION ALL SELECT ward_id, bed_id, admitted_at, admitted_at, 0 FROM stays WHERE id = :stayId
-     ) places ORDER BY known DESC, moved_at DESC, recorded_at DESC LIMIT 1`,
-    { stayId, performedAt },
+/** Where the patient was when the care was done, since what is charted late was taken there; and what lay at that bed of each item. */
+async function bedOf({ stayId, performedAt }: StockUse, wanted: readonly Wanted[], transaction: Transaction) {
+  const rows = await select<Place & { item: string | null; stock: number | null }>(
+    `SELECT place.ward_id AS wardId, place.bed_id AS bedId, m.item, CAST(SUM(m.quantity) AS SIGNED) AS stock FROM (
+       SELECT ward_id, bed_id FROM (
+         SELECT ward_id, bed_id, moved_at, recorded_at, 1 AS known FROM bed_moves WHERE stay_id = :stayId AND moved_at <= :performedAt
+         UNION ALL SELECT ward_id, bed_id, admitted_at, admitted_at, 0 FROM stays WHERE id = :stayId
+       ) places ORDER BY known DESC, moved_at DESC, recorded_at DESC LIMIT 1
+     ) place LEFT JOIN stock_moves m ON m.bed_id = place.bed_id AND m.item IN (:items)
+     GROUP BY place.ward_id, place.bed_id, m.item`,
+    { stayId, performedAt, items: wanted.map(({ item }) => itemKey(item)) },
     transaction,
   )
-  if (!place) throw new Error('An entry was charted in a stay that is not there')
-  return place
-}
-
-async function stockAtBed({ bedId }: Place, wanted: readonly Wanted[], transaction: Transaction) {
-  const rows = await select<{ item: string; stock: number }>(
-    `SELECT item, CAST(SUM(quantity) AS SIGNED) AS stock FROM stock_moves
-     WHERE bed_id = :bedId AND item IN (:items) GROUP BY item`,
-    { bedId, items: wanted.map(({ item }) => itemKey(item)) },
-    transaction,
-  )
-  return new Map(rows.map(({ item, stock }) => [item, stock]))
+  const [first] = rows
+  if (!first) throw new Error('An entry was charted in a stay that is not there')
+  const atBed = new Map(rows.flatMap(({ item, stock }) => (item === null ? [] : [[item, stock ?? 0] as const])))
+  return { place: { wardId: first.wardId, bedId: first.bedId }, atBed }
 }

@@ -16,10 +16,19 @@ export type OpenedPatient = {
 }
 
 /** What is to be done, and from where: `path` is where to go on after a reason was given; null where none can be asked for. */
-export type PatientAsk = { readonly path: string | null; readonly act: Act; readonly by?: Trace }
+export type PatientAsk = {
+  readonly path: string | null
+  readonly act: Act
+  readonly by?: Trace
+  /** Where the patient is, when the layout of this request has just read it. */
+  readonly place?: PatientPlace | null
+}
 
 /** The patient of this request, set by `patientOnly`. */
 export const patientContext = createContext<OpenedPatient>()
+
+/** Where `patientOnly` found the patient of this request, so that the page's own gate need not ask again. */
+export const placeContext = createContext<PatientPlace | null>(null)
 
 const UUID = /^[0-9a-f]{8}(-[0-9a-f]{4}){3}-[0-9a-f]{12}$/i
 
@@ -28,7 +37,7 @@ const UUID = /^[0-9a-f]{8}(-[0-9a-f]{4}){3}-[0-9a-f]{12}$/i
  * for an act that is not theirs, and a redirect to the page that asks for a reason for a patient of another ward.
  */
 export async function patientGate(user: CurrentUser, patientId: string, ask: PatientAsk): Promise<OpenedPatient> {
-  const place = UUID.test(patientId) ? await placeOf(patientId, user.id) : null
+  const place = ask.place?.patientId === patientId ? ask.place : await placeIfAny(patientId, user)
   const isEver = can(user, 'see patients') || can(user, 'open patients elsewhere')
   if (place?.wardId == null || place.stayId === null || !isEver) {
     if (place !== null) await logRefusal(user, place, ask)
@@ -46,6 +55,10 @@ export async function patientGate(user: CurrentUser, patientId: string, ask: Pat
   throw data('This is not for you to do on this ward. Ask the charge nurse.', 403)
 }
 
+async function placeIfAny(patientId: string, user: CurrentUser): Promise<PatientPlace | null> {
+  return UUID.test(patientId) ? placeOf(patientId, user.id) : null
+}
+
 /** The page that asks for a reason, and then goes on to `path`. */
 export function reasonPath(patientId: string, path: string): string {
   return `/patients/${patientId}/access?${new URLSearchParams({ returnTo: path })}`
@@ -55,9 +68,12 @@ export function reasonPath(patientId: string, path: string): string {
 export const patientOnly: MiddlewareFunction<Response> = async ({ params, request, url, context }, next) => {
   const user = signedIn(context)
   const by = traceOf({ request, url, context })
-  const ask = { path: url.pathname + url.search, act: 'see patients', by } as const
-  const opened = await patientGate(user, params.patientId ?? '', ask).catch(keepingForm({ user, request, url }))
+  const { patientId = '' } = params
+  const place = await placeIfAny(patientId, user)
+  const ask = { path: url.pathname + url.search, act: 'see patients', by, place } as const
+  const opened = await patientGate(user, patientId, ask).catch(keepingForm({ user, request, url }))
   context.set(patientContext, opened)
+  context.set(placeContext, place)
   if (!isWrite(request)) await logPatientLook(opened, by)
   return next()
 }

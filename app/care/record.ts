@@ -94,11 +94,17 @@ export function recordUpTo(record: PatientRecord, at: Date): PatientRecord {
 
 function recordWhere(record: PatientRecord, at: Date, counts: (entry: Entry) => boolean): PatientRecord {
   const holds = (entry: Entry) => entry.performedAt <= at && counts(entry)
+  const held = new Map<string, readonly Entry[]>()
+  function of<K extends AnyCharted>(kind: K): readonly Entry<DataOf<K>>[] {
+    const known = held.get(kind.slug) ?? record.of(kind).filter(holds)
+    held.set(kind.slug, known)
+    return known as readonly Entry<DataOf<K>>[]
+  }
   return {
     admittedAt: record.admittedAt,
     moves: record.moves.filter(move => move.at <= at),
     patient: record.patient,
-    of: kind => record.of(kind).filter(holds),
+    of,
     latest: (kind, where) =>
       record.latest(kind, (data, entry) => holds(entry) && (where === undefined || where(data, entry))),
     since: (kind, from) => record.since(kind, from).filter(holds),

@@ -1,4 +1,4 @@
-import { parseWithZod } from '@conform-to/zod/v4'
+import { unstable_coerceFormValue as coerced, parseWithZod } from '@conform-to/zod/v4'
 import { z } from 'zod'
 import { fieldsOf } from '../care/field.ts'
 import type { AnyCareKind } from '../care/kind.ts'
@@ -43,6 +43,7 @@ const spine = {
 }
 
 const spineSchema = z.object(spine)
+const formSpine = coerced(spineSchema)
 
 /** When, by whom and why, as a chart form says it. */
 export type ChartSpine = z.output<typeof spineSchema>
@@ -106,20 +107,33 @@ export function typedIn(kind: AnyCareKind, sent: FormData): Typed {
   return Object.fromEntries(typed.filter(([, values]) => values.length > 0))
 }
 
+const schemas = new WeakMap<AnyCareKind, ReturnType<typeof schemasOf>>()
+
+/** Made once a kind: making one takes longer than reading a form with it, which a page does at every key. */
+function schemasFor(kind: AnyCareKind) {
+  const made = schemas.get(kind) ?? schemasOf(kind)
+  schemas.set(kind, made)
+  return made
+}
+
+function schemasOf({ schema: care }: AnyCareKind) {
+  return { chart: coerced(z.object({ ...spine, care })), care: coerced(z.object({ care })) }
+}
+
 /** The whole form, checked by the kind's own schema. */
 export function readChart(kind: AnyCareKind, form: FormData) {
-  return parseWithZod(form, { schema: z.object({ ...spine, care: kind.schema }) })
+  return parseWithZod(form, { schema: schemasFor(kind).chart, disableAutoCoercion: true })
 }
 
 /** When, by whom and why alone, so that a mistake there is said even while the care is not complete. */
 export function readSpine(form: FormData): ChartSpine | undefined {
-  const submission = parseWithZod(form, { schema: spineSchema })
+  const submission = parseWithZod(form, { schema: formSpine, disableAutoCoercion: true })
   return submission.status === 'success' ? submission.value : undefined
 }
 
 /** The care alone: what the live sentence is made of. */
 export function readCare(kind: AnyCareKind, form: FormData) {
-  return parseWithZod(form, { schema: z.object({ care: kind.schema }) })
+  return parseWithZod(form, { schema: schemasFor(kind).care, disableAutoCoercion: true })
 }
 
 /** Answers by field, such as an entry's payload, as they are typed into a form. */

@@ -1,5 +1,5 @@
 import { data, redirect } from 'react-router'
-import { patientGate } from '#app/auth/patient-access.server.ts'
+import { patientGate, placeContext } from '#app/auth/patient-access.server.ts'
 import { authorOf } from '#app/auth/permissions.ts'
 import { scannerOf } from '#app/auth/scanner.server.ts'
 import { ownSession, signedIn } from '#app/auth/signed-in.server.ts'
@@ -66,7 +66,8 @@ type Asking = Pick<Route.ActionArgs, 'context' | 'request' | 'url'> & { readonly
 
 function askOf({ kind, ...arrived }: Asking) {
   const { pathname, search } = arrived.url
-  return { path: pathname + search, act: kind.act ?? 'chart care', by: traceOf(arrived) } as const
+  const place = arrived.context.get(placeContext)
+  return { path: pathname + search, act: kind.act ?? 'chart care', by: traceOf(arrived), place } as const
 }
 
 /** The form of every kind of care. */

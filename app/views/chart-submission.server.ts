@@ -13,7 +13,6 @@ import { showDateTime } from '#app/time/display.ts'
 import type { Trace } from '#database/access-log.server.ts'
 import type { Alongside } from '#database/entries.server.ts'
 import type { Charting } from '#database/entry-outcome.server.ts'
-import { policies } from '#database/policies.server.ts'
 import { person } from '#database/users.server.ts'
 import { cataloguedItem } from './catalogued-item.server.ts'
 import { calendarOf, signerOf } from './chart-form.server.ts'
@@ -99,7 +98,6 @@ function keptOf({ kind, form, user, photographs }: Sent) {
 }
 
 async function situationOf({ kind, care, form, user, now, corrects, photographs }: Sent): Promise<Situation> {
-  const known = await policies()
   const witness = form.get('witness')
   const people = witness ? await witnessesFor(care.ward.id, user) : {}
   return {
@@ -110,7 +108,9 @@ async function situationOf({ kind, care, form, user, now, corrects, photographs 
     item: await cataloguedItem(kind, form),
     reason: corrects === undefined ? 'when late' : 'always',
     contextAt: at =>
-      corrects === undefined ? contextOfAct(care, known, at) : contextOfCorrection(care, known, at, corrects),
+      corrects === undefined
+        ? contextOfAct(care, care.policies, at)
+        : contextOfCorrection(care, care.policies, at, corrects),
   }
 }
 

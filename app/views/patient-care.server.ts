@@ -1,10 +1,11 @@
 import type { CareContext, StoredEntry } from '#app/care/kind.ts'
 import { type Policy, policyInForce } from '#app/care/policy.ts'
-import { effectiveEntries, patientRecord } from '#app/care/record.ts'
+import { effectiveEntries, patientRecord, recordUpTo } from '#app/care/record.ts'
 import { stomaMadeOn } from '#app/care/tube-change/tube.ts'
 import type { PatientBannerView } from '#app/components/patient-banner.tsx'
 import { careContext } from '#app/rules/context.ts'
 import { ageOn, showDateTime, showDay } from '#app/time/display.ts'
+import { earlier, minutes } from '#app/time/duration.ts'
 import { localDay } from '#app/time/zone.ts'
 import type { PatientCare } from './patient-context.server.ts'
 
@@ -89,7 +90,7 @@ function contextAfter(
   return careContext({ record: recordAfter(known, care, at, without), policy, ward: care.ward, now: at })
 }
 
-/** For care charted as it is done, the usual case, that is the record as it is kept: making another of thousands of entries takes longer than the rest. */
+/** Of the whole chart, that is the record as it is kept, up to `at`: making another of thousands of entries takes longer than the rest. */
 function recordAfter(
   known: readonly StoredEntry[],
   { record, context }: PatientCare,
@@ -97,10 +98,20 @@ function recordAfter(
   without: string | null,
 ) {
   const { stay, patient, entries } = record
-  const isDoneBy = known.every(({ performedAt }) => performedAt <= at) && stay.moves.every(move => move.at <= at)
-  const isWhole = known === entries && without === null && isDoneBy
-  if (isWhole && context) return context.record
+  if (known === entries && without === null && context) {
+    const isWhole = allBy(entries, at) && stay.moves.every(move => move.at <= at)
+    return isWhole ? context.record : recordUpTo(context.record, at)
+  }
   const done = effectiveEntries(known).filter(({ performedAt, id }) => performedAt <= at && id !== without)
   const moves = stay.moves.filter(move => move.at <= at)
   return patientRecord(done, { admittedAt: stay.admittedAt, moves, patient })
+}
+
+const MOST_AHEAD = minutes(2) // the table takes no entry that was performed later than that after it was recorded
+
+/** Whether all of them had been performed by then. They are in the order of recording, so the latest few tell. */
+function allBy(entries: readonly StoredEntry[], at: Date): boolean {
+  const from = earlier(at, MOST_AHEAD)
+  const earlierOnes = entries.findLastIndex(({ recordedAt }) => recordedAt < from)
+  return entries.slice(earlierOnes + 1).every(({ performedAt }) => performedAt <= at)
 }
