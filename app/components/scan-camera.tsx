@@ -61,20 +61,31 @@ async function watch(video: VideoRef, onRead: (raw: string) => void, ended: Abor
     for (const track of stream.getTracks()) track.stop()
   }
   ended.addEventListener('abort', stop)
-  const screen = video.current
-  if (ended.aborted || !screen) return stop()
+  try {
+    const raw = await firstCode(stream, video.current, codeIn, ended)
+    if (raw !== null) onRead(raw)
+  } finally {
+    stop()
+  }
+}
+
+/** Null when it ended before there was one. */
+async function firstCode(
+  stream: MediaStream,
+  screen: HTMLVideoElement | null,
+  codeIn: (picture: ImageData) => Promise<string | null>,
+  ended: AbortSignal,
+): Promise<string | null> {
+  if (ended.aborted || !screen) return null
   screen.srcObject = stream
   await screen.play()
   while (!ended.aborted) {
     const picture = pictureOf(screen)
     const raw = picture && (await codeIn(picture))
-    if (raw && !ended.aborted) {
-      stop()
-      onRead(raw)
-      return
-    }
+    if (raw) return ended.aborted ? null : raw
     await new Promise(resolve => setTimeout(resolve, PAUSE_MS))
   }
+  return null
 }
 
 function pictureOf(video: HTMLVideoElement): ImageData | null {

@@ -9,9 +9,9 @@ const FLAGS = [
   ...['--disable-component-update', '--disable-sync', '--disable-dev-shm-usage'],
 ]
 
-/** A browser without a window. Close it in `afterAll`. */
-export function launchedBrowser(): Promise<Browser> {
-  return chromium.launch({ executablePath: CHROMIUM.program, args: FLAGS })
+/** A browser without a window, with flags of its own besides the usual ones. Close it in `afterAll`. */
+export function launchedBrowser(flags: readonly string[] = []): Promise<Browser> {
+  return chromium.launch({ executablePath: CHROMIUM.program, args: [...FLAGS, ...flags] })
 }
 
 export interface OpenedPage {
