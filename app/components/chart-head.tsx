@@ -1,5 +1,7 @@
+import { useLocation } from 'react-router'
 import type { TaskStatus } from '#app/rules/status.ts'
 import type { ExplainedWarning } from '#app/rules/why-warnings.ts'
+import { withUsual } from '#app/scanning/form-address.ts'
 import { Button, LinkButton } from './button.tsx'
 import { useHydrated } from './hydrated.ts'
 import { toneOf } from './status-look.ts'
@@ -38,9 +40,10 @@ interface UsualActProps {
   readonly onFill: () => void
 }
 
-/** The usual act as one tap: fills what need not be looked at, and charts nothing. */
+/** The usual act as one tap: fills what need not be looked at, and charts nothing. What a scan has filled in stays. */
 export function UsualAct({ words, onFill }: UsualActProps) {
   const isHydrated = useHydrated()
+  const { search } = useLocation()
   const says = `As usual: ${words}`
   return (
     <div>
@@ -49,7 +52,7 @@ export function UsualAct({ words, onFill }: UsualActProps) {
           {says}
         </Button>
       ) : (
-        <LinkButton href="?usual=1" size={48} reload>
+        <LinkButton href={withUsual(search)} size={48} reload>
           {says}
         </LinkButton>
       )}

@@ -1,8 +1,8 @@
 import { useEffect, useRef, useState } from 'react'
-import { useFetcher } from 'react-router'
+import { useFetcher, useLocation } from 'react-router'
 import type { Typed } from '#app/charting/chart-form.ts'
 import type { ScanSource } from '#app/scanning/scan-form.ts'
-import { NO_SCAN, type ScanView } from '#app/scanning/scan-view.ts'
+import { fillWords, NO_SCAN, type ScanView } from '#app/scanning/scan-view.ts'
 import { Button, LinkButton } from './button.tsx'
 import { Card } from './card.tsx'
 import { FieldErrors } from './field-parts.tsx'
@@ -24,10 +24,11 @@ export interface ScanPanelProps {
 /** Scanning inside a chart form. An item that is in order fills the form in by itself; one that is not has to be in place already. */
 export function ScanPanel({ what, path, separatorKey, onFill }: ScanPanelProps) {
   const isHydrated = useHydrated()
+  const { search } = useLocation()
   if (!isHydrated) {
     return (
       <div>
-        <LinkButton href={`/scan?for=${encodeURIComponent(path)}`} size={48} reload>
+        <LinkButton href={`/scan?for=${encodeURIComponent(path + search)}`} size={48} reload>
           {`Scan the ${what}`}
         </LinkButton>
       </div>
@@ -94,7 +95,7 @@ function Outcome({ view, onFill, onReadBack }: OutcomeProps) {
       {fill && view.stops && (
         <div>
           <Button type="button" size={48} onClick={() => onFill(fill)}>
-            It is in place already: fill it in
+            {fillWords(view)}
           </Button>
         </div>
       )}

@@ -1,9 +1,12 @@
 import { data, redirect } from 'react-router'
 import { authorOf } from '#app/auth/permissions.ts'
+import { scannerOf } from '#app/auth/scanner.server.ts'
 import { findKind } from '#app/care/kinds.ts'
+import { itemField } from '#app/charting/item-problems.ts'
 import { ChartForm } from '#app/components/chart-form.tsx'
 import { CorrectReason, EntryHead, Replaced } from '#app/components/entry-head.tsx'
 import { answerOrKept } from '#app/components/kept-form.ts'
+import { ScanPanel } from '#app/components/scan-panel.tsx'
 import { chartedWith } from '#app/photographs/charted-with.server.ts'
 import { sentPhotographs } from '#app/photographs/sent-photographs.server.ts'
 import { photographsOf } from '#app/rules/entry-words.ts'
@@ -28,7 +31,8 @@ export const meta: Route.MetaFunction = ({ loaderData }) => [
 export async function loader({ params, context, request, url }: Route.LoaderArgs) {
   const opened = await openedEntry({ params, context, request, url }, 'correct')
   const kind = kindOr404(opened.entry.kind)
-  return { entry: await entryView(opened), form: await correctForm(kind, opened, url.pathname) }
+  const { separatorKey } = await scannerOf(request)
+  return { entry: await entryView(opened), form: await correctForm(kind, opened, url), separatorKey }
 }
 
 export async function action({ params, context, request, url }: Route.ActionArgs) {
@@ -59,9 +63,11 @@ export async function action({ params, context, request, url }: Route.ActionArgs
 export const clientAction = ({ serverAction }: Route.ClientActionArgs) => answerOrKept(serverAction)
 
 /** The form of the entry's kind, filled in with the entry; what it says now stays readable. */
-export default function Correct({ loaderData: { entry, form }, actionData }: Route.ComponentProps) {
+export default function Correct({ loaderData: { entry, form, separatorKey }, actionData }: Route.ComponentProps) {
   const kind = findKind(form.kind)
   if (!kind) return null
+  const of = itemField(kind)?.meta.of
+  const path = `/entries/${entry.id}/correct`
   const typed = actionData && 'typed' in actionData ? actionData.typed : form.typed
   const errors = actionData?.is === 'refused' ? actionData.errors : {}
   return (
@@ -77,7 +83,12 @@ export default function Correct({ loaderData: { entry, form }, actionData }: Rou
           words="Chart correction"
           cancelHref={`/entries/${entry.id}`}
         >
-          {() => <CorrectReason entry={entry} typed={typed} errors={errors} />}
+          {fill => (
+            <>
+              <CorrectReason entry={entry} typed={typed} errors={errors} />
+              {of && <ScanPanel what={of} path={path} separatorKey={separatorKey} onFill={fill} />}
+            </>
+          )}
         </ChartForm>
       )}
     </EntryHead>

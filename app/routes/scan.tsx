@@ -8,8 +8,9 @@ import { ChoiceField } from '#app/components/choice-field.tsx'
 import { ScanResult } from '#app/components/scan-result.tsx'
 import { ScanSources } from '#app/components/scan-sources.tsx'
 import { useWedge } from '#app/components/use-wedge.ts'
+import { withAnswers } from '#app/scanning/form-address.ts'
 import { type ScanSource, scanForm } from '#app/scanning/scan-form.ts'
-import { NO_SCAN, type ScanView } from '#app/scanning/scan-view.ts'
+import { fillWords, NO_SCAN, type ScanView } from '#app/scanning/scan-view.ts'
 import { sentForm } from '#app/sent-form.server.ts'
 import { scanResult } from '#app/views/scan-result.server.ts'
 import { scanTarget } from '#app/views/scan-target.server.ts'
@@ -20,7 +21,7 @@ export const meta: Route.MetaFunction = () => [{ title: 'Scan | Cannulary' }]
 export async function loader({ context, request, url }: Route.LoaderArgs) {
   const asking = { user: signedIn(context), now: new Date(), by: traceOf({ request, url, context }) }
   const target = await scanTarget(url.searchParams.get('for'), asking)
-  const where = target && { path: target.path, what: target.what, bed: target.care.record.stay.bedLabel }
+  const where = target && { path: target.path, what: target.what, bed: target.bed }
   return { target: where, scanner: await scannerOf(request) }
 }
 
@@ -29,8 +30,7 @@ export async function action({ context, request, url }: Route.ActionArgs) {
   const form = await sentForm(request)
   const target = await scanTarget(form.get('for'), asking)
   const { isTrusted } = await scannerOf(request)
-  const wanted = target && { kind: target.kind, context: target.care.context }
-  const view = await scanResult(scanForm(form), { ...asking, isTrusted, form: wanted })
+  const view = await scanResult(scanForm(form), { ...asking, isTrusted, form: target })
   return view.error === null ? view : data(view, 400)
 }
 
@@ -91,18 +91,20 @@ function Outcome({ view, path }: OutcomeProps) {
       <Button className="justify-self-start">That is on the label</Button>
     </div>
   )
-  const filled =
-    view.fill &&
-    `${path}?${new URLSearchParams(Object.entries(view.fill).map(([name, [value = '']]) => [name, value]))}`
   return (
     <Card>
       <ScanResult view={view} readBack={readBack}>
         <div className="flex flex-wrap gap-2">
-          {filled && (
-            <LinkButton href={filled} variant={view.stops ? 'plain' : 'primary'} size={48}>
-              {view.stops ? 'It is in place already: fill it in' : 'Fill it into the form'}
+          {view.fill && (
+            <LinkButton href={withAnswers(path, view.fill)} variant={view.stops ? 'plain' : 'primary'} size={48}>
+              {view.stops ? fillWords(view) : 'Fill it into the form'}
             </LinkButton>
           )}
+          {view.links.map(({ href, words }) => (
+            <LinkButton key={href} href={href} size={48}>
+              {words}
+            </LinkButton>
+          ))}
           <LinkButton href={path === '' ? '/scan' : `/scan?for=${encodeURIComponent(path)}`} size={48} reload>
             Scan another
           </LinkButton>

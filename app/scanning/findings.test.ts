@@ -12,6 +12,7 @@ const fine: InHand = {
   expiresOn: '2026-03-10',
   retiredAt: null,
   recall: undefined,
+  isUsed: false,
   wanted: { of: 'inner cannula', tube: 'Alder 8.0', fits: true },
 }
 const recall = { lot: '7B', line: null, reason: 'Leaks', recalledAt: at('09:00'), recalledByName: 'M. Osei' }
@@ -51,6 +52,14 @@ test('the wrong inner cannula is stopped in the words of the chart', () => {
 test('one that is not bought any more does not stop', () => {
   const found = scanFindings({ ...fine, retiredAt: at('08:00') }, { today: '2026-03-10', zone: 'Europe/London' })
   expect(stops(found)).toBe(false)
+})
+
+test('of an item that was used nobody is told to take another one, and it still stops', () => {
+  const used = { ...fine, isUsed: true, recall, expiresOn: '2026-01-01', retiredAt: at('08:00') }
+  const found = scanFindings(used, { today: '2026-03-10', zone: 'Europe/London' })
+  expect(found.map(({ name }) => name)).toEqual(['recalled', 'expired'])
+  for (const { action } of found) expect(action).toMatch(/^If it is still in place, ask the tracheostomy team/)
+  expect(stops(found)).toBe(true)
 })
 
 const tubeId = '019aa7c2-0000-7000-8000-000000000001'

@@ -16,14 +16,18 @@ export interface InHand {
   readonly expiresOn: LocalDay | null
   readonly retiredAt: Date | null
   readonly recall: Recall | undefined
+  /** It was used already, in an act that is corrected: nobody can take another one. */
+  readonly isUsed: boolean
   /** For whom it was scanned; null where nobody is in view. */
   readonly wanted: { readonly of: ItemKind; readonly tube: string | null; readonly fits: boolean } | null
 }
 
-/** What is wrong with an item before it goes in, the worst first. `today` is the ward's day. */
+/** What is wrong with an item, the worst first. `today` is the ward's day or, of an item that was used, the day of that. */
 export function scanFindings(item: InHand, { today, zone }: { today: LocalDay; zone: Zone }): readonly Finding[] {
   return [...wrongThing(item), ...otherTube(item), ...recalled(item, zone), ...expired(item, today), ...retired(item)]
 }
+
+const IF_IN_PLACE = 'If it is still in place, ask the tracheostomy team now whether it has to be changed.'
 
 function wrongThing({ of, name, wanted }: InHand): readonly Finding[] {
   if (!wanted || wanted.of === of) return []
@@ -31,44 +35,44 @@ function wrongThing({ of, name, wanted }: InHand): readonly Finding[] {
   return [{ name: 'other-kind', level: 'amber', action: `Scan the ${needed}.`, cause: `This is ${is}: ${name}.` }]
 }
 
-function otherTube({ of, name, wanted }: InHand): readonly Finding[] {
+function otherTube({ of, name, wanted, isUsed }: InHand): readonly Finding[] {
   if (!wanted || wanted.of !== of || wanted.fits) return []
   return [
     {
       name: 'other-tube',
       level: 'red',
       action: OTHER_TUBE_ACTION,
-      cause: `Scanned: ${name}. The tube in place is ${wanted.tube ?? 'not known'}.`,
+      cause: `Scanned: ${name}. The tube in place ${isUsed ? 'was' : 'is'} ${wanted.tube ?? 'not known'}.`,
     },
   ]
 }
 
-function recalled({ recall }: InHand, zone: Zone): readonly Finding[] {
+function recalled({ recall, isUsed }: InHand, zone: Zone): readonly Finding[] {
   if (!recall) return []
   return [
     {
       name: 'recalled',
       level: 'amber',
-      action: 'Do not use this one. Take another, and keep this one apart.',
+      action: isUsed ? IF_IN_PLACE : 'Do not use this one. Take another, and keep this one apart.',
       cause: recallWords(recall, zone),
     },
   ]
 }
 
-function expired({ expiresOn }: InHand, today: LocalDay): readonly Finding[] {
+function expired({ expiresOn, isUsed }: InHand, today: LocalDay): readonly Finding[] {
   if (expiresOn === null || expiresOn >= today) return []
   return [
     {
       name: 'expired',
       level: 'amber',
-      action: 'Do not use this one. Take another.',
-      cause: `It expired on ${showDay(expiresOn)}.`,
+      action: isUsed ? IF_IN_PLACE : 'Do not use this one. Take another.',
+      cause: `It ${isUsed ? 'had expired' : 'expired'} on ${showDay(expiresOn)}.`,
     },
   ]
 }
 
-function retired({ retiredAt }: InHand): readonly Finding[] {
-  if (!retiredAt) return []
+function retired({ retiredAt, isUsed }: InHand): readonly Finding[] {
+  if (!retiredAt || isUsed) return []
   return [
     {
       name: 'retired',

@@ -16,11 +16,20 @@ export interface ScanView {
   readonly findings: readonly Finding[]
   /** Not filled in by itself. */
   readonly stops: boolean
+  /** Of an act that is corrected: the item is not in the hand any more. */
+  readonly isUsed: boolean
   readonly name: string | null
   readonly facts: readonly { readonly term: string; readonly value: string }[]
   readonly unknown: { readonly gtin: string; readonly mayDescribe: boolean } | null
   /** Answers for the form that it was scanned for. */
   readonly fill: Typed | null
+  /** Pages about it, where it was scanned for no form. */
+  readonly links: readonly { readonly href: string; readonly words: string }[]
+}
+
+/** What somebody says who fills in an item that stops. */
+export function fillWords({ isUsed }: Pick<ScanView, 'isUsed'>): string {
+  return isUsed ? 'It is what was used: fill it in' : 'It is in place already: fill it in'
 }
 
 export const NO_SCAN: ScanView = {
@@ -31,8 +40,10 @@ export const NO_SCAN: ScanView = {
   readBack: [],
   findings: [],
   stops: false,
+  isUsed: false,
   name: null,
   facts: [],
   unknown: null,
   fill: null,
+  links: [],
 }

@@ -126,7 +126,7 @@ export function calendarOf({ record: { stay }, ward }: PatientCare, now: Date): 
 }
 
 /** What the scan page found, where it leads here; checked like everything else once the form is sent. */
-function scannedAnswers(kind: AnyCareKind, url: URL): Typed {
+export function scannedAnswers(kind: AnyCareKind, url: URL): Typed {
   const sent = new FormData()
   for (const [name, value] of url.searchParams) if (name.startsWith('care.')) sent.append(name, value)
   return typedIn(kind, sent)

@@ -42,23 +42,31 @@ export interface OpenedEntry extends EntryHistory {
 export async function openedEntry(asked: EntryRequest, act: EntryAct): Promise<OpenedEntry> {
   const { params, request, url } = asked
   const user = signedIn(asked.context)
-  const history = isUuid(params.entryId) ? await entryWithHistory(params.entryId) : undefined
-  const latest = history?.chain.at(-1)
-  if (!history || !latest) throw data('There is no such entry.', 404)
   const by = traceOf(asked)
   const path = url.pathname + url.search
+  const gated = await entryGate(user, params.entryId, { act, path, by }).catch(keepingForm({ user, request, url }))
+  if (!isWrite(request)) await logPatientLook(gated.opened, by)
+  const now = new Date()
+  const signedInAt = ownSession(asked.context).startedAt
+  return { ...gated, user, now, signedInAt, by, care: await patientCare(gated.entry.stayId, now) }
+}
+
+/** The gate of `openedEntry`, for whatever else is done with an entry; `path` is where to go on after a reason was given. */
+export async function entryGate(
+  user: CurrentUser,
+  entryId: string,
+  { act, path, by }: { readonly act: EntryAct; readonly path: string; readonly by: Trace },
+): Promise<EntryHistory & Pick<OpenedEntry, 'latest' | 'opened'>> {
+  const history = isUuid(entryId) ? await entryWithHistory(entryId) : undefined
+  const latest = history?.chain.at(-1)
+  if (!history || !latest) throw data('There is no such entry.', 404)
   // Of an entry that somebody corrected meanwhile, its own author is told so: nothing can be done to it any more.
   const [first = 'see patients', ...others] = actsFor(act, history.entry, user)
-  const opened = await patientGate(user, history.patientId, { path, act: first, by }).catch(
-    keepingForm({ user, request, url }),
-  )
+  const opened = await patientGate(user, history.patientId, { path, act: first, by })
   for (const other of others) await patientGate(user, history.patientId, { path, act: other, by })
   // What takes an entry out of the record is not itself put right: that would bring the entry back under another name.
   if (act !== 'see' && history.entry.status === 'retracted') throw data('A retraction stays. Chart the care anew.', 403)
-  if (!isWrite(request)) await logPatientLook(opened, by)
-  const now = new Date()
-  const signedInAt = ownSession(asked.context).startedAt
-  return { ...history, latest, user, opened, now, signedInAt, by, care: await patientCare(history.entry.stayId, now) }
+  return { ...history, latest, opened }
 }
 
 /** Every act that somebody must be allowed to, to do this with an entry. */

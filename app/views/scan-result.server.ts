@@ -1,7 +1,6 @@
 import type { CurrentUser } from '#app/auth/permissions.ts'
 import { can } from '#app/auth/permissions.ts'
 import { codesText } from '#app/care/carried-field.ts'
-import type { AnyCareKind, CareContext } from '#app/care/kind.ts'
 import { recallOf } from '#app/care/recall.ts'
 import { type CatalogueInnerCannula, type CatalogueTube, innerCannulaName, tubeName } from '#app/catalogue/item.ts'
 import { showLabelDate } from '#app/clinical/gs1-dates.ts'
@@ -16,13 +15,14 @@ import { wantedBy } from '#app/scanning/wanted.ts'
 import { localDay } from '#app/time/zone.ts'
 import { innerCannulaByGtin, innerCannulasFitting, tubeByGtin, tubesFitting } from '#database/catalogue.server.ts'
 import { recalls } from '#database/lot-recalls.server.ts'
+import type { ScanTarget } from './scan-target.server.ts'
 
 /** Who scans, when, for which form of which patient, and whether this workstation's scanner sends separators. */
 export interface Scanning {
   readonly user: CurrentUser
   readonly now: Date
   readonly isTrusted: boolean
-  readonly form: { readonly kind: AnyCareKind; readonly context: CareContext | null } | null
+  readonly form: Pick<ScanTarget, 'kind' | 'context' | 'usedAt'> | null
 }
 
 /** What the codes of one item say: the item with what is wrong with it first, or what is still needed to know it. */
@@ -57,13 +57,34 @@ async function itemView(
   const [tube, cannula] = await Promise.all([tubeByGtin(item.gtin), innerCannulaByGtin(item.gtin)])
   const believed = readBackOf(item, sent.readBack, scanning.today)
   if (!tube && !cannula)
-    return { ...NO_SCAN, codes, unknown: unknownItem(item, scanning.user), facts: factsOf(item, believed) }
+    return {
+      ...NO_SCAN,
+      codes,
+      unknown: unknownItem(item, scanning.user),
+      facts: factsOf(item, believed),
+      links: linksOf(null, believed, scanning),
+    }
   const known = tube ? await tubeFacts(tube) : await cannulaFacts(cannula as CatalogueInnerCannula)
   const facts = [...known.facts, ...factsOf(item, believed)]
   const shown = { ...NO_SCAN, codes, name: known.name, facts }
   if (!believed) return { ...shown, readBack: readBackChoices(item, scanning.today) }
   const judged = await judgedItem(known, believed, scanning)
-  return { ...shown, ...judged, fill: filled(known, believed, readings, scanning) }
+  const fill = filled(known, believed, readings, scanning)
+  return { ...shown, ...judged, fill, links: linksOf(known, believed, scanning) }
+}
+
+/** Where to read on about an item that is scanned to know it, and not for a form. */
+function linksOf(known: KnownItem | null, believed: Believed | undefined, { form, user }: Scanning): ScanView['links'] {
+  if (form) return []
+  const lot = believed?.lot && can(user, 'trace lots') ? believed.lot : null
+  const list = known?.of === 'tube' ? 'tubes' : 'inner-cannulas'
+  return [
+    ...(known ? [{ href: `/catalogue/${list}/${known.item.id}`, words: 'In the catalogue' }] : []),
+    ...(known?.of === 'tube'
+      ? [{ href: `/catalogue/compare?tube=${known.item.id}`, words: 'Compare with other tubes' }]
+      : []),
+    ...(lot ? [{ href: `/lots?${new URLSearchParams({ lot })}`, words: `Who had lot ${lot}` }] : []),
+  ]
 }
 
 function unknownItem({ gtin }: Gs1Item, user: CurrentUser): ScanView['unknown'] {
@@ -134,6 +155,8 @@ async function judgedItem(
   believed: Believed,
   { form, today }: Scanning & { today: string },
 ) {
+  const isUsed = form?.usedAt != null
+  const judgedOn = form?.usedAt ? localDay(form.usedAt, env.hospitalTimeZone) : today
   const findings = scanFindings(
     {
       of,
@@ -141,11 +164,12 @@ async function judgedItem(
       expiresOn: believed.expiresOn,
       retiredAt: item.retiredAt,
       recall: recallOf({ lot: believed.lot, line: item.line }, await recalls()),
+      isUsed,
       wanted: form && wantedBy(form.kind, form.context, { id: item.id, line: item.line, size: item.size, fits }),
     },
-    { today, zone: env.hospitalTimeZone },
+    { today: judgedOn, zone: env.hospitalTimeZone },
   )
-  return { findings, stops: stops(findings) }
+  return { findings, stops: stops(findings), isUsed }
 }
 
 function filled(known: KnownItem, { lot, expiresOn }: Believed, readings: readonly Reading[], { form }: Scanning) {

@@ -1,6 +1,6 @@
 import { writeFile } from 'node:fs/promises'
 import { toBuffer } from 'bwip-js/node'
-import sharp from 'sharp'
+import sharp, { type Sharp } from 'sharp'
 
 const [WIDTH, HEIGHT] = [640, 480]
 const A_SECOND = 10 // frames
@@ -25,7 +25,7 @@ export async function filmedLabel(file: string, label: string): Promise<void> {
   await writeFile(file, Buffer.concat([head, ...frames]))
 }
 
-async function frame(picture: sharp.Sharp): Promise<Buffer> {
+async function frame(picture: Sharp): Promise<Buffer> {
   const brightness = await picture.flatten().toColourspace('b-w').raw().toBuffer()
   return Buffer.concat([Buffer.from('FRAME\n'), brightness, GREY])
 }

@@ -61,7 +61,7 @@ const aboutTheAct = {
   position: 'capnography',
 }
 
-test('a tube is scanned as it goes in, a wrong inner cannula stops, the right one takes three taps, its lot is found', async () => {
+test('a tube is scanned as it goes in, a wrong inner cannula stops, the right one takes three taps, is scanned again to correct it, its lot is found', async () => {
   const { patient, line, tube, right, wrong } = await itemsOfDemo()
   const { page, problems } = await signedIn(browser, app, 'specialist', tablet)
   await page.goto(`/patients/${patient}/chart/tube-change`)
@@ -86,7 +86,15 @@ test('a tube is scanned as it goes in, a wrong inner cannula stops, the right on
   await page.getByRole('button', { name: 'Chart cannula' }).tap()
   await page.waitForURL(/\?charted=/)
 
-  await page.goto('/lots?lot=R34')
+  await page.goto(`/entries/${new URL(page.url()).searchParams.get('charted')}/correct`)
+  await formReady(page)
+  await scan(page, `]d201${right}1729123110R35`)
+  await page.getByText('Filled in below.').waitFor()
+  await page.getByLabel('Why it is corrected').fill('Another pack lay beside it')
+  await page.getByRole('button', { name: 'Chart correction' }).tap()
+  await page.waitForURL(/\?charted=/)
+
+  await page.goto('/lots?lot=R35')
   await page.locator(`a[href^="/patients/${patient}"], a[href^="/entries/"]`).first().waitFor()
   expect(problems).toEqual([])
 })
