@@ -25,14 +25,15 @@ export const unidentified = {
   innerCannula: 'inner-cannula-not-identified',
 } as const
 
-const unidentifiedWords: Readonly<Record<string, string>> = {
-  [unidentified.tube]: 'Tube, not identified',
-  [unidentified.innerCannula]: 'Inner cannula, not identified',
-}
+const words: ReadonlyMap<string, string> = new Map([
+  ...Object.entries(supplyItems),
+  [unidentified.tube, 'Tube, not identified'],
+  [unidentified.innerCannula, 'Inner cannula, not identified'],
+])
 
 /** What a thing kept by name is called; undefined for any other name. */
 export function supplyWords(name: string): string | undefined {
-  return Object.hasOwn(supplyItems, name) ? supplyItems[name as SupplyName] : unidentifiedWords[name]
+  return words.get(name)
 }
 
 /** A tube as it was charted: by its id in the catalogue, else by what is printed on it. */

@@ -49,6 +49,7 @@ test.each<[StockActName, string | readonly string[] | undefined, string | undefi
   ['receive', '0', 'Enter at least 1'],
   ['move', '-1', 'Enter at least 1'],
   ['waste', '10000', 'Enter at most 9999'],
+  ['waste', '99999999999999999999', 'Enter at most 9999'],
   ['waste', '9999', undefined],
   ['count', '0', undefined],
   ['count', '-1', 'It cannot be less than none'],

@@ -22,9 +22,9 @@ const MOST_PIECES = 9999
 const pieces = (label: string, least: number) =>
   z
     .number(`Enter the ${label.toLowerCase()} as a whole number`)
+    .min(least, { error: least === 0 ? 'It cannot be less than none' : 'Enter at least 1', abort: true })
+    .max(MOST_PIECES, { error: `Enter at most ${MOST_PIECES}`, abort: true })
     .int(`Enter the ${label.toLowerCase()} as a whole number`)
-    .min(least, least === 0 ? 'It cannot be less than none' : 'Enter at least 1')
-    .max(MOST_PIECES, `Enter at most ${MOST_PIECES}`)
 
 const place = z.string('Choose a place').max(64, 'Choose a place from the list')
 
