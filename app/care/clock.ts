@@ -1,8 +1,10 @@
-import { lateness } from '../clinical/tolerance.ts'
-import { type Duration, earlier, hours, later, since } from '../time/duration.ts'
+import { type Duration, earlier, later, minutes, since } from '../time/duration.ts'
 import { nextShift, type Shift, shiftAt } from '../time/shift.ts'
 import { addDays, type LocalDay, startOfDay } from '../time/zone.ts'
 import type { Entry, WardFacts } from './kind.ts'
+import { lateness, seriousWithin } from './lateness.ts'
+import type { Values } from './policy.ts'
+import { daySerious, eventSerious } from './tolerance-settings.ts'
 
 /** The moments of one due task (UTC): it is due from `opensAt` to `closesAt`, overdue after, seriously overdue after `seriousAt`. */
 export interface DueWindow {
@@ -44,12 +46,13 @@ export function intervalClock(options: {
   readonly last: Entry | undefined
   readonly start: Date
   readonly interval: Duration
+  readonly values: Values
   readonly because?: string
 }): Clock {
   const from = options.last && options.last.performedAt > options.start ? options.last.performedAt : options.start
   return {
     state: 'running',
-    window: windowAround(later(from, options.interval), options.interval),
+    window: windowAround(later(from, options.interval), options.interval, options.values),
     last: options.last,
     from,
     every: options.interval,
@@ -57,9 +60,9 @@ export function intervalClock(options: {
   }
 }
 
-/** The window around a due time, by the tolerance that belongs to the interval (domain 3.0). */
-export function windowAround(dueAt: Date, interval: Duration): DueWindow {
-  const { tolerance, soonBefore, seriousAfter } = lateness(interval)
+/** The window around a due time, by the tolerance that the policy gives the interval. */
+export function windowAround(dueAt: Date, interval: Duration, values: Values): DueWindow {
+  const { tolerance, soonBefore, seriousAfter } = lateness(interval, values)
   return {
     dueAt,
     soonAt: earlier(dueAt, soonBefore),
@@ -69,12 +72,13 @@ export function windowAround(dueAt: Date, interval: Duration): DueWindow {
   }
 }
 
-/** Due soon after an event: from the event until `within` has passed; seriously overdue an hour later. */
+/** Due soon after an event: from the event until `within` has passed; how long after that it is seriously overdue is the policy's. */
 export function promptClock(options: {
   readonly event: Date
   readonly within: Duration
   readonly last: Entry | undefined
   readonly because: string
+  readonly values: Values
 }): Clock {
   const closesAt = later(options.event, options.within)
   return {
@@ -84,7 +88,7 @@ export function promptClock(options: {
       soonAt: options.event,
       opensAt: options.event,
       closesAt,
-      seriousAt: later(closesAt, hours(1)),
+      seriousAt: later(closesAt, minutes(options.values.of(eventSerious))),
     },
     last: options.last,
     from: options.event,
@@ -97,37 +101,38 @@ export function shiftClock(options: {
   readonly last: Entry | undefined
   readonly start: Date
   readonly ward: WardFacts
+  readonly values: Values
 }): Clock {
-  const { last, start, ward } = options
+  const { last, start, ward, values } = options
   const done = last !== undefined && last.performedAt >= start
   const shift = done
     ? nextShift(shiftAt(last.performedAt, ward.shiftTimes, ward.zone), ward.shiftTimes, ward.zone)
     : shiftAt(start, ward.shiftTimes, ward.zone)
-  const window = shiftWindow(shift, done ? shift.startsAt : start)
+  const window = shiftWindow(shift, done ? shift.startsAt : start, values)
   return { state: 'running', window, last, from: done ? last.performedAt : start }
 }
 
-function shiftWindow(shift: Shift, opensAt: Date): DueWindow {
-  const length = since(shift.startsAt, shift.endsAt)
+function shiftWindow(shift: Shift, opensAt: Date, values: Values): DueWindow {
   return {
     dueAt: shift.endsAt,
     soonAt: opensAt,
     opensAt,
     closesAt: shift.endsAt,
-    seriousAt: later(shift.endsAt, Math.min(length, hours(4)) as Duration),
+    seriousAt: later(shift.endsAt, seriousWithin(since(shift.startsAt, shift.endsAt), values)),
   }
 }
 
-/** By calendar date: due on `dueOn`, overdue from the next local midnight, seriously a day later; `soonDays` before it is due soon. */
+/** By calendar date: due on `dueOn`, overdue from the next local midnight, seriously so by the policy's days; `soonDays` before it is due soon. */
 export function dayClock(options: {
   readonly dueOn: LocalDay
   readonly soonDays: number
   readonly ward: WardFacts
   /** The act that the days count from, such as the tube going in. */
   readonly last: Entry
+  readonly values: Values
   readonly because?: string
 }): Clock {
-  const { dueOn, ward } = options
+  const { dueOn, ward, values } = options
   const opensAt = startOfDay(dueOn, ward.zone)
   const closesAt = startOfDay(addDays(dueOn, 1), ward.zone)
   return {
@@ -137,7 +142,7 @@ export function dayClock(options: {
       soonAt: startOfDay(addDays(dueOn, -options.soonDays), ward.zone),
       opensAt,
       closesAt,
-      seriousAt: startOfDay(addDays(dueOn, 2), ward.zone),
+      seriousAt: startOfDay(addDays(dueOn, 1 + values.of(daySerious)), ward.zone),
     },
     last: options.last,
     from: options.last.performedAt,

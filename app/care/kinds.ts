@@ -23,6 +23,7 @@ import { secretionGrade } from './secretion-grade/kind.ts'
 import { stomaAndSkin } from './stoma-and-skin/kind.ts'
 import { suction } from './suction/kind.ts'
 import { ties } from './ties/kind.ts'
+import { toleranceChecks, toleranceSettings } from './tolerance-settings.ts'
 import { transferChecklist } from './transfer-checklist/kind.ts'
 import { tubeChange } from './tube-change/kind.ts'
 import { tubeChangePlan } from './tube-change-plan/kind.ts'
@@ -74,11 +75,18 @@ export function findKind(slug: string): AnyCareKind | undefined {
 
 /** Every setting that some kind reads, once each, in the order of the kinds. */
 export const careSettings: readonly AnySetting[] = [
-  ...new Set([...careKinds.flatMap((kind: AnyCareKind) => kind.settings ?? []), ...generalSettings]),
+  ...new Set([
+    ...careKinds.flatMap((kind: AnyCareKind) => kind.settings ?? []),
+    ...toleranceSettings,
+    ...generalSettings,
+  ]),
 ]
 
 /** Every check of settings that must fit together. */
-export const careChecks: readonly PolicyCheck[] = careKinds.flatMap((kind: AnyCareKind) => kind.checks ?? [])
+export const careChecks: readonly PolicyCheck[] = [
+  ...careKinds.flatMap((kind: AnyCareKind) => kind.checks ?? []),
+  ...toleranceChecks,
+]
 
 export interface KindTask {
   readonly kind: AnyCareKind

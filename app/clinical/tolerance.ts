@@ -1,4 +1,4 @@
-import { type Duration, hours, minutes } from '../time/duration.ts'
+import { type Duration, hours } from '../time/duration.ts'
 
 /** How early and how late a task may be done around its due time. */
 export interface Lateness {
@@ -10,17 +10,12 @@ export interface Lateness {
   readonly seriousAfter: Duration
 }
 
-/**
- * What counts as late for a task that is due at an interval. No tracheostomy guideline gives a grace time: adopted from ISMP 2011
- * for medicines (a quarter of the interval below 4 h, 60 min below a day, 120 min from a day on). Serious lateness is our proposal.
- * Throws RangeError unless the interval is longer than nothing.
- */
-export function lateness(interval: Duration): Lateness {
+/** Intervals that are late by the same rule: under 4 hours, under a day, and a day or longer. */
+export type IntervalClass = 'short' | 'middle' | 'long'
+
+/** The class of an interval, as ISMP 2011 divides the times of scheduled medicines. Throws RangeError unless it is longer than nothing. */
+export function intervalClass(interval: Duration): IntervalClass {
   if (!(interval > 0)) throw new RangeError(`An interval must be longer than nothing, not ${interval} ms`)
-  if (interval < hours(4)) {
-    const quarter = (interval * 0.25) as Duration
-    return { tolerance: quarter, soonBefore: quarter, seriousAfter: interval }
-  }
-  if (interval < hours(24)) return { tolerance: minutes(60), soonBefore: minutes(60), seriousAfter: hours(4) }
-  return { tolerance: minutes(120), soonBefore: hours(4), seriousAfter: hours(12) }
+  if (interval < hours(4)) return 'short'
+  return interval < hours(24) ? 'middle' : 'long'
 }

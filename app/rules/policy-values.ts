@@ -4,6 +4,7 @@ import type { AnyCareKind } from '../care/kind.ts'
 import { careChecks, careKinds } from '../care/kinds.ts'
 import { type AnySetting, type Policy, type RuleSet, type SettingValue, valuesFor } from '../care/policy.ts'
 import { isSameValue, readSettingValue, typedValue } from '../care/setting-value.ts'
+import { toleranceSettings } from '../care/tolerance-settings.ts'
 import { showValue } from './why.ts'
 
 /** The settings of one kind, under its title, in a rule set. */
@@ -13,7 +14,7 @@ export interface SettingSection {
   readonly settings: readonly AnySetting[]
 }
 
-/** Every setting of a rule set, once, under the first kind that reads it; those of charting as a whole come last. */
+/** Every setting of a rule set, once, under the first kind that reads it; those of all care alike come last. */
 export function settingSections(ruleSet: RuleSet): readonly SettingSection[] {
   const shown = new Set<AnySetting>()
   const fresh = (settings: readonly AnySetting[]) =>
@@ -25,6 +26,7 @@ export function settingSections(ruleSet: RuleSet): readonly SettingSection[] {
   const kinds: readonly AnyCareKind[] = careKinds
   const sections = [
     ...kinds.map(({ slug, title, settings }) => ({ id: slug, title, settings: fresh(settings ?? []) })),
+    { id: 'lateness', title: 'When care is late', settings: fresh(toleranceSettings) },
     { id: 'charting', title: 'Charting', settings: fresh(generalSettings) },
   ]
   return sections

@@ -26,13 +26,19 @@ const turning: TaskRule = {
   ...about,
   name: 'turning',
   clock: ({ record, values }) =>
-    intervalClock({ last: record.latest(freeNote), start: record.admittedAt, interval: hours(values.of(every)) }),
+    intervalClock({
+      values,
+      last: record.latest(freeNote),
+      start: record.admittedAt,
+      interval: hours(values.of(every)),
+    }),
 }
 
 const oncePerShift: TaskRule = {
   ...about,
   name: 'look',
-  clock: ({ record, ward }) => shiftClock({ last: record.latest(freeNote), start: record.admittedAt, ward }),
+  clock: ({ record, ward, values }) =>
+    shiftClock({ values, last: record.latest(freeNote), start: record.admittedAt, ward }),
 }
 
 const ward: WardFacts = { zone: 'Europe/London', shiftTimes: ['07:00', '15:00', '23:00'], pressureUnit: 'cmH2O' }
@@ -75,6 +81,16 @@ test.each([
   expect([...byTask.keys()]).toEqual(['Turning'])
 })
 
+test.each([
+  // 15:00 comes after 14:00 for a tolerance of an hour, not after 15:00; 23:30 after 22:00 and after 23:00
+  [60, 2],
+  [120, 1],
+  [15, 3],
+])('a draft that gives every 6 h a tolerance of %i min finds %i late, and asks for the same', (tolerance, late) => {
+  const values = { [every.name]: 6, 'lateness-middle-tolerance': tolerance }
+  expect(load({ rule: turning, entries: threeTurns, values }).total).toEqual({ tasks: 4, late })
+})
+
 test('tasks and lateness belong to the shift that they fall due in', () => {
   const { byShift } = load({ rule: turning, entries: threeTurns, values: { [every.name]: 6 } })
   // due 13:00, 19:00, 01:00 and 07:00; late after 14:00 and after 22:00
@@ -107,12 +123,12 @@ test('care that an event asks for counts once, when it is done', () => {
   const afterEvent: TaskRule = {
     ...about,
     name: 'check-after-event',
-    clock({ record }) {
+    clock({ record, values }) {
       const last = record.latest(freeNote)
       const event = at('2026-03-10 10:00')
       return last && last.performedAt > event
         ? { state: 'none' }
-        : promptClock({ event, within: minutes(15), last, because: 'the patient came' })
+        : promptClock({ values, event, within: minutes(15), last, because: 'the patient came' })
     },
   }
   expect(load({ rule: afterEvent, entries: [note('10:10')] }).total).toEqual({ tasks: 1, late: 0 })

@@ -1,8 +1,11 @@
 import type { CareContext } from '../care/kind.ts'
 import type { AnySetting, PersonalValue, Policy, SettingValue, Standing } from '../care/policy.ts'
+import { toleranceSettings } from '../care/tolerance-settings.ts'
 import { showDateTime, showDay } from '../time/display.ts'
-import type { Zone } from '../time/zone.ts'
+import { localDay, type Zone } from '../time/zone.ts'
 import type { DueTask } from './due-tasks.ts'
+import { noting } from './noting.ts'
+import { momentWords } from './words.ts'
 
 /** One number behind an answer, with where it came from. */
 export interface WhyValue {
@@ -41,15 +44,30 @@ export function whyDue(task: DueTask, context: CareContext): WhyDue {
   const deferred = deferral
     ? `Deferred to ${showDateTime(deferral.until, zone)} by ${deferral.entry.recordedByName}.`
     : undefined
-  const sentences = [rule.says(context), because && `${capital(because)}.`, deferred]
+  const known = [rule.says(context), because && `${capital(because)}.`, deferred, windowWords(task, context)]
+  const sentences = known.flatMap(words => words ?? [])
   return {
     last: lastWords(task, zone),
-    ...whyOf(
-      sentences.flatMap(says => says ?? []),
-      rule.settings,
-      context,
-    ),
+    ...whyOf(sentences, [...rule.settings, ...tolerancesOf(task, context)], context),
   }
+}
+
+/** The numbers of what is late that the clock of a task goes by. */
+function tolerancesOf({ rule }: DueTask, context: CareContext): readonly AnySetting[] {
+  const noted = noting(context)
+  rule.clock(noted.context)
+  const read = new Set(noted.read())
+  return toleranceSettings.filter(setting => read.has(setting))
+}
+
+/** `In time from 13:00 to 15:00, seriously overdue after 18:00.` */
+function windowWords({ window, byDay }: DueTask, { now, ward }: CareContext): string | undefined {
+  if (!window) return undefined
+  const { soonAt, opensAt, closesAt, seriousAt } = window
+  const day = (at: Date) => showDay(localDay(at, ward.zone))
+  if (byDay) return `Shown as due soon from ${day(soonAt)}, seriously overdue from ${day(seriousAt)}.`
+  const words = (at: Date) => momentWords(at.getTime(), now.getTime(), ward.zone)
+  return `In time from ${words(opensAt)} to ${words(closesAt)}, seriously overdue after ${words(seriousAt)}.`
 }
 
 function lastWords({ byDay, last }: DueTask, zone: Zone): string {

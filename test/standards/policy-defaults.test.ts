@@ -119,6 +119,18 @@ const rows: readonly Row[] = [
   ['no-blind-reinsertion-before', 7, 'V', 'Bontempo and Manning'],
   ['repeat-tube-out-window', 7, 'P', 'No published number'],
   ['after-removal-watch', 48, 'P', 'Stelfox 2008'],
+  // When care is late (3.0): no guideline gives grace minutes; ISMP 2011 adopted
+  ['lateness-short-tolerance', 25, 'P', 'ISMP 2011'],
+  ['lateness-short-soon', 25, 'P', 'ISMP 2011'],
+  ['lateness-short-serious', 100, 'P', 'No published number'],
+  ['lateness-middle-tolerance', 60, 'P', 'ISMP 2011'],
+  ['lateness-middle-soon', 60, 'P', 'ISMP 2011'],
+  ['lateness-middle-serious', 240, 'P', 'No published number'],
+  ['lateness-long-tolerance', 2, 'P', 'ISMP 2011'],
+  ['lateness-long-soon', 4, 'P', 'No published number'],
+  ['lateness-long-serious', 12, 'P', 'No published number'],
+  ['lateness-event-serious', 60, 'P', 'No published number'],
+  ['lateness-day-serious', 1, 'P', 'No published number'],
   // Charting (scope, 10)
   ['adult-age', 16, 'P', 'Local cut-off'],
   ['late-entry-after', 60, 'P', 'NMC Code section 10'],

@@ -21,6 +21,7 @@ const suctionAboveCuff: TaskRule = {
     if (!hasPort(context)) return noClock
     if (cuffState(record) === 'deflated') return suspended('cuff is down')
     return intervalClock({
+      values,
       last: lastEmptying(record),
       start: careOfTubeFrom(tube, context),
       interval: hours(values.of(aboveCuffInterval)),

@@ -29,7 +29,7 @@ const observations: TaskRule = {
     if (!step) return noClock
     return {
       state: 'running',
-      window: windowAround(later(out, step.after), step.gap),
+      window: windowAround(later(out, step.after), step.gap, values),
       last,
       from: last?.performedAt ?? out,
     }

@@ -18,7 +18,7 @@ const check: TaskRule = {
     const { record, ward } = context
     if (!tubeInPlace(record)) return withoutTube(context)
     const done = lastComplete(record)
-    const regular = shiftClock({ last: done, start: tubeCareFrom(context), ward })
+    const regular = shiftClock({ values: context.values, last: done, start: tubeCareFrom(context), ward })
     return [afterEvent(done, context), afterGap(done, context)].reduce<Clock>(
       (clock, prompt) => (prompt ? sooner(clock, prompt) : clock),
       regular,
@@ -33,7 +33,7 @@ function afterEvent(done: KitEntry | undefined, context: CareContext): Clock | u
     .toSorted((a, b) => a.at.getTime() - b.at.getTime())[0]
   if (!first) return undefined
   const within = minutes(context.values.of(kitAfterEvent))
-  return promptClock({ event: first.at, within, last: done, because: first.words })
+  return promptClock({ values: context.values, event: first.at, within, last: done, because: first.words })
 }
 
 function afterGap(done: KitEntry | undefined, { record, values }: CareContext): Clock | undefined {
@@ -41,6 +41,7 @@ function afterGap(done: KitEntry | undefined, { record, values }: CareContext): 
   if (!first) return undefined
   const within = minutes(values.of(kitMissingWithin))
   return promptClock({
+    values,
     event: first.performedAt,
     within,
     last: done,

@@ -39,10 +39,10 @@ function cuffClock(tube: TubeEntry, context: CareContext): Clock {
   const clock =
     read && read !== done
       ? recheckClock(read, done, context)
-      : intervalClock({ last: done, start: upSince(tube, record), interval: hours(values.of(cuffInterval)) })
+      : intervalClock({ values, last: done, start: upSince(tube, record), interval: hours(values.of(cuffInterval)) })
   const asked = eventSince(read, tube, record)
   if (!asked) return clock
-  return sooner(clock, promptClock({ ...asked, within: minutes(values.of(cuffEventCheck)), last: done }))
+  return sooner(clock, promptClock({ values, ...asked, within: minutes(values.of(cuffEventCheck)), last: done }))
 }
 
 /** Since when the cuff has been up: a cuff let down and inflated again starts anew. */
@@ -55,6 +55,7 @@ function recheckClock(read: CuffEntry, done: CuffEntry | undefined, { values }: 
   const bandSet = [values.policy.startsAt, ...[cuffLower, cuffUpper].map(limit => values.personal(limit)?.since)]
   const moments = [read.performedAt, ...bandSet].map(moment => moment?.getTime() ?? 0)
   return promptClock({
+    values,
     event: new Date(Math.max(...moments)),
     within: minutes(values.of(cuffRecheck)),
     last: done,

@@ -66,7 +66,8 @@ function known(name: string, clock: Clock): KnownNames {
   return { settings: [], tasks: [{ rule }] }
 }
 
-const running = promptClock({ event: at('12:00'), within: minutes(15), last: undefined, because: 'inflated' })
+const { values } = aContext([], '12:00')
+const running = promptClock({ values, event: at('12:00'), within: minutes(15), last: undefined, because: 'inflated' })
 
 test.each<[string, KnownNames, readonly string[]]>([
   ['is due', known('inner-cannula-change', running), []],

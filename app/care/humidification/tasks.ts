@@ -17,7 +17,7 @@ const check: TaskRule = {
   clock(context) {
     if (!breathesThroughOpening(context)) return withoutTube(context)
     const last = context.record.latest(humidifications)
-    return shiftClock({ last, start: careFrom(context), ward: context.ward })
+    return shiftClock({ values: context.values, last, start: careFrom(context), ward: context.ward })
   },
 }
 
@@ -58,7 +58,12 @@ function runClock(context: CareContext, { method, interval, counts }: RunRule): 
   const start = run.at(-1)
   if (!start || start.data.method !== method) return noClock
   const last = run.find(({ data }) => counts(data))
-  return intervalClock({ last, start: start.performedAt, interval: hours(context.values.of(interval)) })
+  return intervalClock({
+    values: context.values,
+    last,
+    start: start.performedAt,
+    interval: hours(context.values.of(interval)),
+  })
 }
 
 function breathesThroughOpening(context: CareContext): boolean {

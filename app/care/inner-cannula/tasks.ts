@@ -60,6 +60,7 @@ function careClock(
   return dualClock(context, tube =>
     cannulaType(tube, context.record) === type
       ? intervalClock({
+          values: context.values,
           last: lastAct(context, counts),
           start: startOf(tube, context),
           interval: hours(context.values.of(interval)),
@@ -77,6 +78,7 @@ function inspectionClock(tube: TubeEntry, context: CareContext): Clock {
   const early = Math.min(values.of(earlyInterval), usual)
   const isEarly = early < usual && from < later(insertedAt(tube, context), hours(values.of(earlyPeriod)))
   const regular = intervalClock({
+    values,
     last,
     start,
     interval: hours(isEarly ? early : usual),
@@ -87,6 +89,7 @@ function inspectionClock(tube: TubeEntry, context: CareContext): Clock {
   return sooner(
     regular,
     promptClock({
+      values,
       event: seen.performedAt,
       within: hours(values.of(recheckWithin)),
       last,

@@ -22,6 +22,7 @@ const observations: TaskRule = {
     if (!tubeInPlace(record)) return withoutTube(context)
     const last = record.latest(observationSets)
     const regular = intervalClock({
+      values,
       last,
       start: tubeCareFrom(context),
       interval: hours(values.of(observationInterval)),
@@ -39,7 +40,7 @@ function trialClock({ name, startedAt }: Trial, last: Entry | undefined, { value
   const isEarly = since(startedAt, from) < minutes(values.of(trialEarlyPeriod))
   const interval = minutes(values.of(isEarly ? trialObservationEarly : trialObservationInterval))
   const because = `a ${trialNames[name].toLowerCase()} trial runs`
-  return intervalClock({ last, start: startedAt, interval, because })
+  return intervalClock({ values, last, start: startedAt, interval, because })
 }
 
 const flags: TaskRule = {
@@ -51,7 +52,7 @@ const flags: TaskRule = {
     const { record, ward } = context
     if (!tubeInPlace(record)) return withoutTube(context)
     const last = record.latest(observationSets, ({ redFlags }) => redFlags !== undefined)
-    return shiftClock({ last, start: tubeCareFrom(context), ward })
+    return shiftClock({ values: context.values, last, start: tubeCareFrom(context), ward })
   },
 }
 

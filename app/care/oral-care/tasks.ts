@@ -29,6 +29,7 @@ const brushing: TaskRule = {
 function careClock(context: CareContext, counts: (data: OralCareData) => boolean, interval: Setting<number>): Clock {
   if (!tubeInPlace(context.record)) return withoutTube(context)
   return intervalClock({
+    values: context.values,
     last: context.record.latest(oralCares, counts),
     start: tubeCareFrom(context),
     interval: hours(context.values.of(interval)),

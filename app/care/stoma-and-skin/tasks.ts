@@ -22,7 +22,7 @@ const inspection: TaskRule = {
     if (!tube && !isLaryngectomy(context)) return withoutOpening(context)
     // A stoma without a tube has no flange to look under: every check of it counts.
     const last = record.latest(stomaChecks, data => !tube || sitesLeftOut(data).length === 0)
-    return shiftClock({ last, start: careFrom(context), ward })
+    return shiftClock({ values: context.values, last, start: careFrom(context), ward })
   },
 }
 
@@ -42,6 +42,7 @@ const dressingChange: TaskRule = {
     if (bare) return suspended('no dressing used at the last check')
     if (!tube && !lastCheck) return noClock
     return intervalClock({
+      values,
       last: lastDressing(context),
       start: careFrom(context),
       interval: hours(values.of(dressingInterval)),
@@ -63,7 +64,7 @@ function withoutOpening({ record, values, ward }: CareContext): Clock {
   if (last?.data.appearance.includes('closed')) {
     return suspended(`opening closed on ${showDate(last.performedAt, ward.zone)}`)
   }
-  return intervalClock({ last, start: absence.since, interval: hours(values.of(closingInterval)) })
+  return intervalClock({ values, last, start: absence.since, interval: hours(values.of(closingInterval)) })
 }
 
 /** The latest act that put on a fresh dressing. A tube that was in place on arrival is not an act. */

@@ -23,6 +23,7 @@ function needClock(tube: TubeEntry, { record, values }: CareContext): Clock {
   const usual = values.of(needInterval)
   const isCopious = last?.data.amount === 'copious' && values.of(copiousInterval) < usual
   return intervalClock({
+    values,
     last,
     start: new Date(Math.max(tube.performedAt.getTime(), record.admittedAt.getTime())),
     interval: hours(isCopious ? values.of(copiousInterval) : usual),

@@ -22,7 +22,7 @@ const check: TaskRule = {
     if (!tubeInPlace(record)) return withoutTube(context)
     if (isWithoutTies(context)) return suspended(NO_TIES)
     const last = tieLooks(record).find(({ fingers }) => fingers !== 'no ties')?.entry
-    return shiftClock({ last, start: tubeCareFrom(context), ward })
+    return shiftClock({ values: context.values, last, start: tubeCareFrom(context), ward })
   },
 }
 
@@ -37,7 +37,7 @@ const change: TaskRule = {
     if (!tubeInPlace(context.record)) return withoutTube(context)
     if (isWithoutTies(context)) return suspended(NO_TIES)
     const interval = hours(context.values.of(tieChangeInterval))
-    return intervalClock({ last: lastChange(context), start: tubeCareFrom(context), interval })
+    return intervalClock({ values: context.values, last: lastChange(context), start: tubeCareFrom(context), interval })
   },
 }
 

@@ -32,6 +32,7 @@ export const firstChange: TaskRule = {
     if (!tube || !isFirstTube(tube) || !context.values.of(routineFirstChange)) return noClock
     const { earliest, target } = firstChangeDays(context)
     return dayClock({
+      values: context.values,
       dueOn: addDays(insertedOn(tube, context), target),
       soonDays: target - earliest,
       ward: context.ward,

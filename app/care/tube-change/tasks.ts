@@ -39,6 +39,7 @@ export const byDate: TaskRule = {
     if (!tube) return withoutTube(context)
     const limit = dwellLimit(tube, context)
     return dayClock({
+      values: context.values,
       dueOn: limit.changeBy,
       soonDays: context.values.of(dwellNotice),
       ward: context.ward,
@@ -57,7 +58,13 @@ const planned: TaskRule = {
   clock(context) {
     const plan = openPlan(context.record)
     if (!plan) return noClock
-    return dayClock({ dueOn: plan.plannedOn, soonDays: 1, ward: context.ward, last: plan.entry })
+    return dayClock({
+      values: context.values,
+      dueOn: plan.plannedOn,
+      soonDays: 1,
+      ward: context.ward,
+      last: plan.entry,
+    })
   },
 }
 
@@ -74,6 +81,7 @@ export const sutureRemoval: TaskRule = {
     const tube = tubeInPlace(context.record)
     if (!tube || !suturesIn(context)) return noClock
     return dayClock({
+      values: context.values,
       dueOn: addDays(insertedOn(tube, context), context.values.of(suturesOutBy)),
       soonDays: 1,
       ward: context.ward,

@@ -18,7 +18,7 @@ const filling: TaskRule = {
     if (!tube) return withoutTube(context)
     if (tube.data.cuff !== 'water') return noClock
     const start = careOfTubeFrom(tube, context)
-    return shiftClock({ last: record.latest(waterCuffs), start, ward })
+    return shiftClock({ values: context.values, last: record.latest(waterCuffs), start, ward })
   },
 }
 

@@ -17,11 +17,11 @@ export function plannedStep(record: PatientRecord): Entry<WeaningPlanData> | und
   return isDone ? undefined : plan
 }
 
-function plannedClock({ record, ward }: CareContext, isOf: (step: WeaningPlanData['step']) => boolean): Clock {
+function plannedClock({ record, ward, values }: CareContext, isOf: (step: WeaningPlanData['step']) => boolean): Clock {
   const plan = plannedStep(record)
   if (!plan?.data.plannedOn || !isOf(plan.data.step)) return noClock
   const because = `${plannedSteps[plan.data.step].toLowerCase()}, agreed with ${plan.data.agreedWith ?? 'the team'}`
-  return dayClock({ dueOn: plan.data.plannedOn, soonDays: 1, ward, last: plan, because })
+  return dayClock({ values, dueOn: plan.data.plannedOn, soonDays: 1, ward, last: plan, because })
 }
 
 /** A trial on the day for which it was planned. Charted as a trial, which lists it among its tasks. */
