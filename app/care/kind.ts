@@ -1,5 +1,6 @@
 import type { z } from 'zod'
 import type { CataloguedItem } from './catalogued-item.ts'
+import type { Chapter } from './chapters.ts'
 import type { Clock } from './clock.ts'
 import type { BedMove, PatientFacts, WardFacts } from './facts.ts'
 import type { FormProblem, KnownNames } from './form-problem.ts'
@@ -102,6 +103,7 @@ export interface CareKind<Slug extends string, Schema extends z.ZodObject>
   /** The words on the button: "Chart pressure". */
   readonly chartWords: string
   readonly lane: Lane
+  readonly chapter: Chapter
   /** Drive tests and demo data; each must pass the schema. */
   readonly examples: readonly z.output<Schema>[]
   /** The sentence on the timeline and before charting. */

@@ -145,19 +145,27 @@ interface NextCareListProps {
   readonly statement: string | undefined
 }
 
-const pressing: readonly TaskStatus[] = ['due', 'overdue', 'seriously overdue']
+const late: readonly TaskStatus[] = ['overdue', 'seriously overdue']
 
 function NextCareList({ next, statement }: NextCareListProps) {
-  const more = next.slice(SHOWN).filter(({ status }) => pressing.includes(status)).length
+  const more = moreWords(next.slice(SHOWN))
   return (
     <ul aria-label="Next care" className="grid max-xl:col-span-full">
       {next.slice(0, SHOWN).map(care => (
         <NextCareItem key={care.name} care={care} />
       ))}
-      {more > 0 && <li className="text-sm font-semibold text-due">{`and ${more} more due`}</li>}
+      {more !== '' && <li className="text-sm font-semibold text-due">{more}</li>}
       {next.length === 0 && <li className="text-ink2">{statement ?? 'Nothing due'}</li>}
     </ul>
   )
+}
+
+/** `and 12 more late, 1 due`; nothing when the rest can wait. */
+function moreWords(rest: readonly NextCare[]): string {
+  const lateOnes = rest.filter(({ status }) => late.includes(status)).length
+  const due = rest.filter(({ status }) => status === 'due').length
+  if (lateOnes === 0) return due === 0 ? '' : `and ${due} more due`
+  return `and ${lateOnes} more late${due === 0 ? '' : `, ${due} due`}`
 }
 
 /** The whole line leads to the form: a thumb need not hit the words. */

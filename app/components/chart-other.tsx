@@ -1,24 +1,32 @@
 import { Link } from 'react-router'
+import type { ChartableKinds } from '#app/rules/views.ts'
 import { LinkButton } from './button.tsx'
 import { Card } from './card.tsx'
 
 interface ChartOtherProps {
   readonly patientId: string
-  readonly kinds: readonly { readonly slug: string; readonly title: string }[]
+  readonly chapters: readonly ChartableKinds[]
   readonly stayLinks: readonly { readonly href: string; readonly words: string }[]
 }
 
 /** What can be charted without being due, and what can be changed about the stay. */
-export function ChartOther({ patientId, kinds, stayLinks }: ChartOtherProps) {
+export function ChartOther({ patientId, chapters, stayLinks }: ChartOtherProps) {
   return (
     <Card title="Chart something else">
-      <ul className="flex flex-wrap gap-2">
-        {kinds.map(({ slug, title }) => (
-          <li key={slug}>
-            <LinkButton href={`/patients/${patientId}/chart/${slug}`}>{title}</LinkButton>
-          </li>
+      <div className="grid gap-4">
+        {chapters.map(({ chapter, kinds }) => (
+          <section key={chapter} aria-label={chapter}>
+            <h3 className="mb-2 text-sm font-semibold text-ink2">{chapter}</h3>
+            <ul className="flex flex-wrap gap-2">
+              {kinds.map(({ slug, title }) => (
+                <li key={slug}>
+                  <LinkButton href={`/patients/${patientId}/chart/${slug}`}>{title}</LinkButton>
+                </li>
+              ))}
+            </ul>
+          </section>
         ))}
-      </ul>
+      </div>
       {stayLinks.length > 0 && (
         <p className="mt-3 flex flex-wrap gap-x-6">
           {stayLinks.map(({ href, words }) => (

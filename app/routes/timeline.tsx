@@ -40,7 +40,7 @@ export async function loader({ context, url }: Route.LoaderArgs) {
     spanNames: Object.keys(spans),
     kind: kind ?? null,
     charts: may && patient.record.stay.dischargedAt === null,
-    kinds: chartableKinds(act => can(user, act, opened.wardId) || canByGrant(user, act)),
+    chapters: chartableKinds(act => can(user, act, opened.wardId) || canByGrant(user, act)),
     stayLinks: stayPages.flatMap(({ act, page, words }) =>
       can(user, act, opened.wardId) ? [{ href: `/patients/${opened.patientId}/${page}`, words }] : [],
     ),
@@ -56,7 +56,8 @@ const stayPages = [
 
 /** One patient: the tube, what is due, the hours, and everything that was charted. */
 export default function Timeline({ loaderData }: Route.ComponentProps) {
-  const { served, answering, charted, span, spanHours, spanNames, kind, charts, kinds, stayLinks, search } = loaderData
+  const { served, answering, charted, span, spanHours, spanNames, kind, charts, chapters, stayLinks, search } =
+    loaderData
   const { patientId } = served.data
   const live = useLive(`/api/patients/${patientId}/timeline${search}`, served)
   const { data: shown, now } = live
@@ -89,7 +90,7 @@ export default function Timeline({ loaderData }: Route.ComponentProps) {
             why={shown.why}
             nothingDue={shown.nothingDue}
           />
-          {charts && <ChartOther patientId={patientId} kinds={kinds} stayLinks={stayLinks} />}
+          {charts && <ChartOther patientId={patientId} chapters={chapters} stayLinks={stayLinks} />}
         </div>
         <aside className="grid content-start gap-4 lg:col-start-1 lg:row-span-2 lg:row-start-1">
           <TubeCard
@@ -105,7 +106,12 @@ export default function Timeline({ loaderData }: Route.ComponentProps) {
           >
             <CareStrip care={care} now={now} zone={zone} span={spanHours} />
           </Card>
-          <Card title="Charted" flush id="charted" aside={<KindFilter kinds={kinds} current={kind} href={withParam} />}>
+          <Card
+            title="Charted"
+            flush
+            id="charted"
+            aside={<KindFilter kinds={chapters.flatMap(({ kinds }) => kinds)} current={kind} href={withParam} />}
+          >
             <EntryList
               entries={shown.entries}
               today={localDay(new Date(now), zone)}

@@ -1,3 +1,4 @@
+import { type Chapter, chapters } from '../care/chapters.ts'
 import {
   type AnyCareKind,
   type CareContext,
@@ -164,10 +165,19 @@ export function kindTitle(slug: string): string {
   return careKinds.find(kind => kind.slug === slug)?.title ?? wordsOf(slug)
 }
 
-/** The kinds that somebody may chart, for links and filters. */
-export function chartableKinds(
-  may: (act: ChartingAct) => boolean,
-  kinds: readonly AnyCareKind[] = careKinds,
-): readonly { readonly slug: string; readonly title: string }[] {
-  return kinds.filter(kind => may(kind.act ?? 'chart care')).map(({ slug, title }) => ({ slug, title }))
+/** The kinds of a chapter that somebody may chart, for links. */
+export interface ChartableKinds {
+  readonly chapter: Chapter
+  readonly kinds: readonly { readonly slug: string; readonly title: string }[]
+}
+
+/** What somebody may chart, by chapter; without chapters of which they may chart nothing. */
+export function chartableKinds(may: (act: ChartingAct) => boolean): readonly ChartableKinds[] {
+  const own = careKinds.filter(kind => may(kind.act ?? 'chart care'))
+  return chapters
+    .map(chapter => ({
+      chapter,
+      kinds: own.filter(kind => kind.chapter === chapter).map(({ slug, title }) => ({ slug, title })),
+    }))
+    .filter(({ kinds }) => kinds.length > 0)
 }

@@ -12,6 +12,7 @@ export const aboveCuffSuction = careKind({
   title: 'Above-cuff suction',
   chartWords: 'Chart volume',
   lane: 'Suction',
+  chapter: 'At the bed',
   cautions: ['Empty the space above the cuff before every time that the cuff is let down.'],
   examples: aboveCuffExamples,
   summary: aboveCuffSentence,

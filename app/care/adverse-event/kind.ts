@@ -12,6 +12,7 @@ export const adverseEvent = careKind({
   title: 'Adverse event',
   chartWords: 'Chart event',
   lane: 'Tube',
+  chapter: 'Events and plans',
   cautions: [
     'Help first, chart after. Also report it the way your hospital asks.',
     'Chart a tube that went back in as a tube change too: care is counted from there.',

@@ -22,6 +22,7 @@ export const afterRemoval = careKind({
   title: 'Observations after removal',
   chartWords: 'Chart set after removal',
   lane: 'Tube',
+  chapter: 'Weaning and removal',
   cautions: ['Spare tubes and dilators stay at the bedside. Not an alarm: keep the monitor on.'],
   examples: [
     well,

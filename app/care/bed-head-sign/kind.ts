@@ -42,6 +42,7 @@ export const bedHeadSign = careKind({
   title: 'Bed-head sign',
   chartWords: 'Print the sign',
   lane: 'Tube',
+  chapter: 'Tube',
   page: 'sign',
   settings: [depthPastTip],
   standing: outOfDate,

@@ -13,6 +13,7 @@ export const bedsideKit = careKind({
   title: 'Bedside kit',
   chartWords: 'Chart kit',
   lane: 'Tube',
+  chapter: 'At the bed',
   cautions: ['The kit goes wherever the patient goes. The receiving ward has it ready before the handover.'],
   examples: kitExamples,
   summary: kitSentence,

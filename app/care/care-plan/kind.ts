@@ -14,6 +14,7 @@ export const carePlan = careKind({
   title: 'Care plan',
   chartWords: 'Change care plan',
   lane: 'Tube',
+  chapter: 'Events and plans',
   act: 'set care plans',
   examples: [
     {

@@ -11,6 +11,7 @@ export const coughStrength = careKind({
   title: 'Cough strength',
   chartWords: 'Chart cough',
   lane: 'Suction',
+  chapter: 'Weaning and removal',
   cautions: ['Flow at the tube is expiratory flow, not a true cough. An assisted cough counts.'],
   examples: [
     { grade: '4', route: 'not measured' },

@@ -13,6 +13,7 @@ export const cuffPressure = careKind({
   title: 'Cuff pressure',
   chartWords: 'Chart pressure',
   lane: 'Cuff',
+  chapter: 'At the bed',
   cautions: [
     'Pilot balloon feel is not a pressure.',
     'Cuff must be fully deflated before any valve or cap. Never use a valve with a foam cuff.',

@@ -9,6 +9,7 @@ export const cuffStateKind = careKind({
   title: 'Cuff down or up',
   chartWords: 'Chart cuff',
   lane: 'Cuff',
+  chapter: 'At the bed',
   cautions: [
     'Suction mouth and above the cuff before it goes down.',
     'Cuff must be fully deflated before any valve or cap. Measure the pressure within minutes of inflation.',

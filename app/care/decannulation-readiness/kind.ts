@@ -21,6 +21,7 @@ export const decannulationReadiness = careKind({
   title: 'Readiness for tube removal',
   chartWords: 'Chart readiness',
   lane: 'Tube',
+  chapter: 'Weaning and removal',
   cautions: ['It informs and does not decide. Answer what was looked at, and say why the rest was not.'],
   examples: [
     allYes,

@@ -11,6 +11,7 @@ export const decannulation = careKind({
   title: 'Tube removal for good',
   chartWords: 'Chart removal',
   lane: 'Tube',
+  chapter: 'Weaning and removal',
   needsFreshSignIn: true,
   needsCompetence: 'decannulation',
   twoPeople: () => true,

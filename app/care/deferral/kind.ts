@@ -9,6 +9,7 @@ export const deferral = careKind({
   title: 'Deferral',
   chartWords: 'Defer care',
   lane: 'Tube',
+  chapter: 'Events and plans',
   examples: [
     { task: 'inner-cannula-change', minutes: '60', reason: 'off ward', agreedWith: 'M. Larsen' },
     {

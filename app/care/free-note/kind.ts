@@ -8,6 +8,7 @@ export const freeNote = careKind({
   title: 'Note',
   chartWords: 'Chart note',
   lane: 'Tube',
+  chapter: 'Events and plans',
   cautions: ['Nothing here warns or is counted as care done: chart findings and care on their own forms.'],
   examples: [
     { words: 'Family visited; daughter shown how to clean the stoma.' },

@@ -14,6 +14,7 @@ export const humidification = careKind({
   title: 'Humidification',
   chartWords: 'Chart humidification',
   lane: 'Suction',
+  chapter: 'At the bed',
   examples: humidificationExamples,
   summary: humidificationSentence,
   settings: humidificationSettings,

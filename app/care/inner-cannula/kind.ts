@@ -17,6 +17,7 @@ export const innerCannula = careKind({
   title: 'Inner cannula',
   chartWords: 'Chart cannula',
   lane: 'Inner cannula',
+  chapter: 'At the bed',
   cautions: ['Use only the inner cannula made for this tube. Clean per device instructions.'],
   examples: innerCannulaExamples,
   summary: innerCannulaSentence,

@@ -13,6 +13,7 @@ export const observations = careKind({
   title: 'Observations',
   chartWords: 'Chart observations',
   lane: 'Tube',
+  chapter: 'At the bed',
   cautions: ['This adds up no score: use the early-warning chart of your hospital.'],
   examples: observationExamples,
   summary: observationSentence,

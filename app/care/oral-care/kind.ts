@@ -13,6 +13,7 @@ export const oralCare = careKind({
   title: 'Oral care',
   chartWords: 'Chart mouth care',
   lane: 'Suction',
+  chapter: 'At the bed',
   examples: oralCareExamples,
   summary: oralCareSentence,
   settings: oralCareSettings,

@@ -11,6 +11,7 @@ export const secretionGrade = careKind({
   title: 'Secretion grading',
   chartWords: 'Chart grading',
   lane: 'Suction',
+  chapter: 'At the bed',
   cautions: ['The sum compares days of one patient; it decides nothing.'],
   examples: [
     {

@@ -20,6 +20,7 @@ export const stomaAndSkin = careKind({
   title: 'Stoma and skin',
   chartWords: 'Chart stoma',
   lane: 'Stoma and skin',
+  chapter: 'At the bed',
   twoPeople: ({ dressing, holderChanged }) => dressing === 'changed' || holderChanged === 'yes',
   examples: stomaExamples,
   summary: stomaSentence,

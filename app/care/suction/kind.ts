@@ -14,6 +14,7 @@ export const suction = careKind({
   title: 'Suction',
   chartWords: 'Chart suction',
   lane: 'Suction',
+  chapter: 'At the bed',
   examples: suctionExamples,
   summary: suctionSentence,
   settings: suctionSettings,

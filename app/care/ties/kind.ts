@@ -14,6 +14,7 @@ export const ties = careKind({
   title: 'Ties',
   chartWords: 'Chart ties',
   lane: 'Stoma and skin',
+  chapter: 'At the bed',
   twoPeople: ({ changed }) => changed === 'yes',
   cautions: [
     'Two people: one holds the tube. If you are alone, fasten the new holder before the old one comes off.',

@@ -10,6 +10,7 @@ export const transferChecklist = careKind({
   title: 'Transfer checklist',
   chartWords: 'Chart transfer',
   lane: 'Tube',
+  chapter: 'Events and plans',
   cautions: [
     'The kit stays with the patient all the way. The new place is ready before the patient leaves the old one.',
   ],

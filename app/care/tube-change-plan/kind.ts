@@ -14,6 +14,7 @@ export const tubeChangePlan = careKind({
   title: 'Tube change plan',
   chartWords: 'Chart plan',
   lane: 'Tube',
+  chapter: 'Tube',
   cautions: [
     'Answer every question before the day. A plan that is early or contraindicated needs a named senior; a change that has happened is charted in any case.',
   ],

@@ -17,6 +17,7 @@ export const tubeChange = careKind({
   title: 'Tube change',
   chartWords: 'Chart tube change',
   lane: 'Tube',
+  chapter: 'Tube',
   needsFreshSignIn: true,
   needsCompetence: 'tube change, performing',
   twoPeople: () => true,

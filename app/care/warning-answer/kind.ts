@@ -9,6 +9,7 @@ export const warningAnswer = careKind({
   title: 'Answer to a warning',
   chartWords: 'Chart answer',
   lane: 'Tube',
+  chapter: 'Events and plans',
   settings: warningAnswerSettings,
   examples: [
     { warning: 'cuff-high', answer: 'seen' },

@@ -14,6 +14,7 @@ export const waterCuff = careKind({
   title: 'Water cuff',
   chartWords: 'Chart water',
   lane: 'Cuff',
+  chapter: 'At the bed',
   cautions: ['Sterile water, not air. Measure mL, not cmH2O.', 'Suction mouth and throat before the cuff is emptied.'],
   examples: waterCuffExamples,
   summary: waterCuffSentence,

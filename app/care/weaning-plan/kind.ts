@@ -14,6 +14,7 @@ export const weaningPlan = careKind({
   title: 'Weaning plan',
   chartWords: 'Chart weaning plan',
   lane: 'Tube',
+  chapter: 'Weaning and removal',
   act: 'set care plans',
   cautions: [
     'It informs and does not decide: criteria come from what is charted.',

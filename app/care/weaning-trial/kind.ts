@@ -18,6 +18,7 @@ export const weaningTrial = careKind({
   title: 'Weaning trial',
   chartWords: 'Chart trial',
   lane: 'Tube',
+  chapter: 'Weaning and removal',
   needsCompetence: 'valve and cap',
   cautions: [
     'Cuff must be fully deflated before any valve or cap. Never use a valve with a foam cuff.',
