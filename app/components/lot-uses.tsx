@@ -71,3 +71,25 @@ export function LotUses({ trace: { lot, uses, elsewhere, isWhole } }: LotUsesPro
     </Card>
   )
 }
+
+interface RecalledLotsProps {
+  readonly recalled: readonly { readonly lot: string; readonly says: string }[]
+}
+
+/** Every lot that is not to be used now; each leads to the patients who had it. */
+export function RecalledLots({ recalled }: RecalledLotsProps) {
+  return (
+    <Card title="Recalled now">
+      {recalled.length === 0 && <p className="text-ink2">No lot is recalled.</p>}
+      <ul>
+        {recalled.map(({ lot, says }) => (
+          <li key={says} className="break-words">
+            <Link to={`/lots?${new URLSearchParams({ lot })}`} className={LINK}>
+              {says}
+            </Link>
+          </li>
+        ))}
+      </ul>
+    </Card>
+  )
+}

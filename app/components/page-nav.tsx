@@ -19,7 +19,7 @@ export function TopSections({ sections }: SectionsProps) {
           key={section.href}
           to={section.href}
           aria-current={section.current ? 'page' : undefined}
-          className="flex min-h-11 min-w-11 items-center justify-center border-y-3 border-transparent px-1 text-center text-sm leading-tight font-semibold text-ink2 hover:text-ink aria-[current]:border-b-brand aria-[current]:text-ink lg:px-2 lg:text-base xl:px-3"
+          className="flex min-h-11 min-w-11 items-center justify-center border-y-3 border-transparent px-1 text-center text-sm leading-tight font-semibold text-ink2 hover:text-ink aria-[current]:border-b-brand aria-[current]:text-ink lg:px-2 xl:px-2.5 xl:text-base xl:whitespace-nowrap"
         >
           {section.label}
         </Link>

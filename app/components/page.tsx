@@ -37,12 +37,11 @@ export function AppPage({ person, ward, now, zone, sections, theme, reviewed = n
           <TopSections sections={sections} />
           <div className="ml-auto flex items-center gap-3 md:max-lg:gap-2">
             {ward && (
-              <span className="hidden rounded-tag border border-line px-2 py-0.5 text-sm font-semibold xl:inline">
+              <span className="hidden rounded-tag border border-line px-2 py-0.5 text-sm font-semibold whitespace-nowrap xl:inline">
                 {ward.name}
               </span>
             )}
             <Clock now={now} zone={zone} className="text-xl" />
-            <span className="hidden text-ink2 xl:inline">{person.role}</span>
             <PersonMenu person={person} theme={theme} sections={sections} />
           </div>
         </div>

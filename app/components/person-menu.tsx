@@ -26,7 +26,10 @@ export function PersonMenu({ person, theme, sections }: PersonMenuProps) {
   return (
     <details ref={menu} className="relative">
       <summary className="flex min-h-11 list-none items-center gap-2 rounded-control border border-edge px-3 font-semibold hover:bg-sunk [&::-webkit-details-marker]:hidden">
-        <span className="hidden max-w-48 lg:inline">{person.name}</span>
+        <span className="hidden max-w-44 text-sm leading-tight lg:grid">
+          <span className="truncate">{person.name}</span>
+          <span className="truncate text-xs font-normal text-ink2">{person.role}</span>
+        </span>
         <span className="lg:hidden">Menu</span>
         <svg viewBox="0 0 12 8" className="h-2 w-3 flex-none fill-none stroke-current stroke-2" aria-hidden="true">
           <path d="M1 1.5l5 5 5-5" />

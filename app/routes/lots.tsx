@@ -6,11 +6,11 @@ import { traceOf } from '#app/auth/trace.server.ts'
 import { Button, LinkButton } from '#app/components/button.tsx'
 import { Card } from '#app/components/card.tsx'
 import { LotDecision } from '#app/components/lot-decision.tsx'
-import { LotUses } from '#app/components/lot-uses.tsx'
+import { LotUses, RecalledLots } from '#app/components/lot-uses.tsx'
 import { TextField } from '#app/components/text-field.tsx'
 import { lotDecisionForm, lotName } from '#app/scanning/lot-form.ts'
 import { readForm, sentForm } from '#app/sent-form.server.ts'
-import { lotTrace } from '#app/views/lot-trace.server.ts'
+import { lotTrace, recalledLots } from '#app/views/lot-trace.server.ts'
 import { decideLot } from '#database/lot-recalls.server.ts'
 import type { Route } from './+types/lots.ts'
 
@@ -25,7 +25,14 @@ export async function loader({ context, request, url }: Route.LoaderArgs) {
   const lot = lotName.safeParse(asked)
   const error = asked !== '' && !lot.success ? (lot.error.issues[0]?.message ?? null) : null
   const trace = lot.success ? await lotTrace(lot.data, user, traceOf({ request, url, context })) : null
-  return { asked: asked.slice(0, 200), error, trace, decisionId: uuidv7(), mayRecall: can(user, 'recall lots') }
+  return {
+    asked: asked.slice(0, 200),
+    error,
+    trace,
+    recalled: await recalledLots(),
+    decisionId: uuidv7(),
+    mayRecall: can(user, 'recall lots'),
+  }
 }
 
 export async function action({ context, request }: Route.ActionArgs) {
@@ -41,7 +48,7 @@ export async function action({ context, request }: Route.ActionArgs) {
 
 /** Which patients had a lot, and whether it may still be used. */
 export default function Lots({ loaderData, actionData }: Route.ComponentProps) {
-  const { asked, error, trace, decisionId, mayRecall } = loaderData
+  const { asked, error, trace, recalled, decisionId, mayRecall } = loaderData
   return (
     <div className="grid gap-5 px-4 py-5 md:px-6">
       <h1 className="text-2xl">Lots</h1>
@@ -58,6 +65,7 @@ export default function Lots({ loaderData, actionData }: Route.ComponentProps) {
         />
         <Button className="justify-self-start">Find</Button>
       </Form>
+      {!trace && <RecalledLots recalled={recalled} />}
       {trace && (
         <>
           {trace.decisions.length > 0 && (

@@ -1,7 +1,7 @@
 import { type CurrentUser, can } from '#app/auth/permissions.ts'
 import { findKind } from '#app/care/kinds.ts'
 import { isPrintedAlike } from '#app/care/printed.ts'
-import { recallOf } from '#app/care/recall.ts'
+import { recallOf, recallWords } from '#app/care/recall.ts'
 import { env } from '#app/env.server.ts'
 import { showDateTime } from '#app/time/display.ts'
 import { logLook, type Trace } from '#database/access-log.server.ts'
@@ -53,6 +53,14 @@ export async function lotTrace(lot: string, user: CurrentUser, by: Trace): Promi
         `${isRecalled ? 'Recalled' : 'Recall lifted'}${line ? ` for ${line}` : ''} on ${showDateTime(recalledAt, env.hospitalTimeZone)} by ${recalledByName}: ${reason}`,
     ),
   }
+}
+
+/** The lots that are not to be used now, the latest first, with why in words. */
+export async function recalledLots(): Promise<readonly { readonly lot: string; readonly says: string }[]> {
+  const inForce = await recalls()
+  return inForce
+    .toSorted((a, b) => b.recalledAt.getTime() - a.recalledAt.getTime())
+    .map(recall => ({ lot: recall.lot, says: recallWords(recall, env.hospitalTimeZone) }))
 }
 
 function viewOf(use: LotUse): LotUseView {
