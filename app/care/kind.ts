@@ -6,7 +6,7 @@ import type { BedMove, PatientFacts, WardFacts } from './facts.ts'
 import type { FormProblem, KnownNames } from './form-problem.ts'
 import type { Gauge } from './gauge.ts'
 import type { Lane } from './lanes.ts'
-import type { AnySetting, Values } from './policy.ts'
+import type { AnySetting, PolicyOverTime, Values } from './policy.ts'
 import type { PolicyCheck } from './policy-check.ts'
 import type { RunningAct } from './running-act.ts'
 import type { SigningNeeds } from './signing-needs.ts'
@@ -67,6 +67,8 @@ export interface CareContext {
   readonly values: Values
   readonly ward: WardFacts
   readonly now: Date
+  /** The policy of the ward at any moment of the past, where more than one is known. */
+  readonly policyAt?: PolicyOverTime
 }
 
 /** A kind of due care: one clock, in words and in code. */

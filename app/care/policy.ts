@@ -100,6 +100,21 @@ export function policyInForce(policies: readonly Policy[], wardId: string, at: D
   return adults && (children ? { ...adults, children } : adults)
 }
 
+/** What was in force at a moment; undefined before the first version. */
+export type PolicyOverTime = (at: Date) => Policy | undefined
+
+/** The policy of a ward at any moment, each made once: what a whole record is judged by asks for it again and again. */
+export function policyOverTime(policies: readonly Policy[], wardId: string): PolicyOverTime {
+  const starts = [...new Set(policies.map(({ startsAt }) => startsAt.getTime()))].toSorted((a, b) => b - a)
+  const made = new Map<number, Policy | undefined>()
+  return at => {
+    const start = starts.find(start => start <= at.getTime())
+    if (start === undefined) return undefined
+    if (!made.has(start)) made.set(start, policyInForce(policies, wardId, new Date(start)))
+    return made.get(start)
+  }
+}
+
 /** The version of one rule set that is in force on a ward at a moment, if there is one. */
 export function ruleSetInForce<P extends Policy>(
   policies: readonly P[],

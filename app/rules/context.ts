@@ -2,7 +2,7 @@ import { personalValues } from '../care/care-plan/personal-values.ts'
 import { ageGroupOf } from '../care/children.ts'
 import { adultAge } from '../care/general-settings.ts'
 import type { CareContext, Entry, PatientRecord, WardFacts } from '../care/kind.ts'
-import { type Policy, type Values, valuesFor } from '../care/policy.ts'
+import { type Policy, type PolicyOverTime, type Values, valuesFor } from '../care/policy.ts'
 import { recordBefore } from '../care/record.ts'
 import { ageOn } from '../time/display.ts'
 import { localDay } from '../time/zone.ts'
@@ -16,9 +16,10 @@ export function careContext(given: {
   readonly policy: Policy
   readonly ward: WardFacts
   readonly now: Date
+  readonly policyAt?: PolicyOverTime | undefined
 }): CareContext {
-  const { record, policy, ward, now } = given
-  return { record, values: valuesOf(policy, record, ward, now), ward, now }
+  const { record, policy, ward, now, policyAt } = given
+  return { record, values: valuesOf(policy, record, ward, now), ward, now, ...(policyAt ? { policyAt } : {}) }
 }
 
 function valuesOf(policy: Policy, record: PatientRecord, ward: WardFacts, now: Date): Values {
@@ -33,8 +34,12 @@ function valuesOf(policy: Policy, record: PatientRecord, ward: WardFacts, now: D
     : valuesFor(policy, personal)
 }
 
-/** What an act that is on record is judged by: the record and the patient's own values of its moment, under the policy in force now. */
+/**
+ * What an act that is on record is judged by: the record, the patient's own values and the policy of its moment. One of before the
+ * first version is judged by the policy in force now.
+ */
 export function contextBefore(act: Pick<Entry, 'id' | 'performedAt'>, context: CareContext): CareContext {
-  const { record, values, ward } = context
-  return careContext({ record: recordBefore(record, act), policy: values.policy, ward, now: act.performedAt })
+  const { record, values, ward, policyAt } = context
+  const policy = policyAt?.(act.performedAt) ?? values.policy
+  return careContext({ record: recordBefore(record, act), policy, ward, now: act.performedAt, policyAt })
 }

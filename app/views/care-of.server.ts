@@ -1,5 +1,5 @@
 import type { CareContext, PatientRecord, WardFacts } from '#app/care/kind.ts'
-import type { Policy } from '#app/care/policy.ts'
+import type { Policy, PolicyOverTime } from '#app/care/policy.ts'
 import { patientRecord } from '#app/care/record.ts'
 import { careContext } from '#app/rules/context.ts'
 import type { StayRecord } from '#database/records.server.ts'
@@ -26,7 +26,15 @@ export function recordOf({ entries, patient, stay }: StayRecord): PatientRecord 
   return record
 }
 
-/** What rules decide from, for one stay on a ward under its policy. */
-export function contextOf(stay: StayRecord, policy: Policy, ward: WardFacts, now: Date): CareContext {
-  return careContext({ record: recordOf(stay), policy, ward, now })
+/** What rules decide from, for one stay on a ward under its policy; `policyAt`: that of the past, where acts on record are judged. */
+export function contextOf(
+  stay: StayRecord,
+  under: {
+    readonly policy: Policy
+    readonly policyAt?: PolicyOverTime
+    readonly ward: WardFacts
+    readonly now: Date
+  },
+): CareContext {
+  return careContext({ record: recordOf(stay), ...under })
 }

@@ -1,6 +1,6 @@
 import { data } from 'react-router'
 import type { CareContext, WardFacts } from '#app/care/kind.ts'
-import { policyInForce } from '#app/care/policy.ts'
+import { policyOverTime } from '#app/care/policy.ts'
 import { env } from '#app/env.server.ts'
 import { showDateTime } from '#app/time/display.ts'
 import { recalls } from '#database/lot-recalls.server.ts'
@@ -26,10 +26,11 @@ export async function patientCare(stayId: string, now: Date): Promise<PatientCar
   if (!record || !found) throw data('There is no such patient.', 404)
   const { id, name, shiftTimes, pressureUnit } = found
   const ward = { id, name, shiftTimes, pressureUnit, zone: env.hospitalTimeZone, recalls: recalled }
-  const policy = policyInForce(known, id, now)
+  const policyAt = policyOverTime(known, id)
+  const policy = policyAt(now)
   const about = { record, ward, policies: known }
   if (!policy) return { ...about, context: null, nothingDue: 'This ward has no reviewed policy: nothing is computed.' }
-  const context = contextOf(record, policy, ward, now)
+  const context = contextOf(record, { policy, policyAt, ward, now })
   const discharged = record.stay.dischargedAt
   return { ...about, context, nothingDue: discharged && `Discharged on ${showDateTime(discharged, ward.zone)}.` }
 }

@@ -24,7 +24,7 @@ export async function tubesOfWards(wardIds: readonly string[], now: Date): Promi
     .flatMap(record => {
       const ward = facts.get(record.stay.wardId)
       const policy = policyInForce(known, record.stay.wardId, now)
-      const row = ward && policy && tubeRow(contextOf(record, policy, ward, now))
+      const row = ward && policy && tubeRow(contextOf(record, { policy, ward, now }))
       if (!row) return []
       const { patient, stay } = record
       const { familyName, givenName } = patient

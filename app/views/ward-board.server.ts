@@ -1,5 +1,5 @@
 import type { WardFacts } from '#app/care/kind.ts'
-import { type Policy, policyInForce } from '#app/care/policy.ts'
+import { type Policy, type PolicyOverTime, policyOverTime } from '#app/care/policy.ts'
 import { env } from '#app/env.server.ts'
 import type { Board, BoardPatient } from '#app/rules/board.ts'
 import { type BoardCare, boardCare } from '#app/rules/board-care.ts'
@@ -8,7 +8,7 @@ import { policyWords } from '#app/rules/why.ts'
 import { ageOn } from '#app/time/display.ts'
 import { earlier, hours } from '#app/time/duration.ts'
 import { shiftAt } from '#app/time/shift.ts'
-import { localDay } from '#app/time/zone.ts'
+import { type LocalDay, localDay } from '#app/time/zone.ts'
 import { countToCountersign } from '#database/countersignatures.server.ts'
 import { recalls } from '#database/lot-recalls.server.ts'
 import { policies } from '#database/policies.server.ts'
@@ -76,7 +76,9 @@ async function computedBoard(wardId: string, now: Date, rev: number): Promise<Bo
   if (!ward) return undefined
   const { shiftTimes, pressureUnit } = ward
   const facts: WardFacts = { zone: env.hospitalTimeZone, shiftTimes, pressureUnit, recalls: recalled }
-  const policy = policyInForce(known, wardId, now)
+  const policyAt = policyOverTime(known, wardId)
+  const policy = policyAt(now)
+  const judging = policy && { policy, policyAt, ward: facts, now }
   return {
     wardId,
     wardName: ward.name,
@@ -84,21 +86,29 @@ async function computedBoard(wardId: string, now: Date, rev: number): Promise<Bo
     shiftEndsAt: shiftAt(now, ward.shiftTimes, facts.zone).endsAt.getTime(),
     policy: policy ? policyWords(policy) : null,
     toCountersign,
-    patients: records.stays.map(stay => boardPatient(stay, policy, facts, now)),
+    patients: records.stays.map(stay => boardPatient(stay, judging, localDay(now, facts.zone))),
   }
 }
 
-function boardPatient(record: StayRecord, policy: Policy | undefined, ward: WardFacts, now: Date): BoardPatient {
+/** What every patient of a board is judged by. */
+interface Judging {
+  readonly policy: Policy
+  readonly policyAt: PolicyOverTime
+  readonly ward: WardFacts
+  readonly now: Date
+}
+
+function boardPatient(record: StayRecord, judging: Judging | undefined, today: LocalDay): BoardPatient {
   const { patient, stay } = record
   return {
     patientId: patient.id,
     bed: stay.bedLabel,
     familyName: patient.familyName,
     givenName: patient.givenName,
-    age: ageOn(patient.bornOn, localDay(now, ward.zone)),
+    age: ageOn(patient.bornOn, today),
     recordNumber: patient.recordNumber,
     laryngectomy: patient.upperAirway === 'not open',
-    care: policy ? careOf(record, policy, ward, now) : NOTHING,
+    care: judging ? careOf(record, judging) : NOTHING,
   }
 }
 
@@ -107,12 +117,13 @@ const NOTHING = { tasks: [], marks: [], running: [], warnings: [] } as const
 const cares = new WeakMap<StayRecord['entries'], { readonly of: string; readonly care: BoardCare }>()
 
 /** One patient's care, computed once for each state of the patient and five minutes: what is charted for one is one's own. */
-function careOf(record: StayRecord, policy: Policy, ward: WardFacts, now: Date): BoardCare {
+function careOf(record: StayRecord, judging: Judging): BoardCare {
+  const { policy, ward, now } = judging
   const { patient, stay } = record
   const of = JSON.stringify([slotOf(now), policy.id, policy.children?.id, patient.version, stay.moves.length, ward])
   const known = cares.get(record.entries)
   if (known?.of === of) return known.care
-  const care = boardCare(careView(contextOf(record, policy, ward, now), earlier(now, MARKS_BACK)))
+  const care = boardCare(careView(contextOf(record, judging), earlier(now, MARKS_BACK)))
   cares.set(record.entries, { of, care })
   return care
 }

@@ -97,7 +97,7 @@ async function patientSupplies(
 ): Promise<readonly PatientSupply[]> {
   const values = policy ? valuesFor(policy) : null
   const facts = { zone: env.hospitalTimeZone, shiftTimes: ward.shiftTimes, pressureUnit: ward.pressureUnit }
-  const contexts = stays.map(stay => ({ stay, context: policy ? contextOf(stay, policy, facts, now) : null }))
+  const contexts = stays.map(stay => ({ stay, context: policy ? contextOf(stay, { policy, ward: facts, now }) : null }))
   const window = values?.of(supplyRateDays) ?? supplyRateDays.default
   const uses = await usedByStays(
     stays.map(({ stay }) => stay.id),
