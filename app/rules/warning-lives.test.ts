@@ -2,6 +2,8 @@ import { expect, test } from 'vitest'
 import { type CuffData, cuffChecks } from '../care/cuff-pressure/schema.ts'
 import type { StoredEntry } from '../care/kind.ts'
 import { aContext, aCorrection, anEntry, aTube, at } from '../care/make.ts'
+import { usualCheck } from '../care/stoma-and-skin/examples.ts'
+import { type StomaData, stomaChecks } from '../care/stoma-and-skin/schema.ts'
 import { tubeChanges } from '../care/tube-change/schema.ts'
 import { type WarningAnswerData, warningAnswers } from '../care/warning-answer/schema.ts'
 import { answerableWarnings, warningLives } from './warning-lives.ts'
@@ -94,4 +96,20 @@ test('warnings that stand can be answered, and those answered before can be corr
   const before = anEntry(warningAnswers, '09:00', { warning: 'cuff-low', answer: 'seen' })
   const names = Object.keys(answerableWarnings(aContext([tube, high, before], '10:05')))
   expect(names).toEqual(expect.arrayContaining(['cuff-high', 'cuff-low']))
+})
+
+test('a pressure injury is raised by the check that found it new: seen again at later checks, it stays answered', () => {
+  const injury = { skin: 'pressure injury', stage: 'stage-2', findingSite: 'flange left' } as const
+  const check = (when: string, skin: Partial<StomaData> = injury) =>
+    anEntry(stomaChecks, when, { ...usualCheck, ...skin })
+  const found = check('2026-03-09 21:00')
+  const seen = anEntry(warningAnswers, '2026-03-09 21:10', { warning: 'pressure-injury', answer: 'seen' })
+  const livesAt = (now: string, ...entries: readonly StoredEntry[]) =>
+    warningLives(aContext([tube, found, seen, ...entries], now)).filter(({ warning }) => warning.level === 'amber')
+  expect(livesAt('14:00', check('09:00'))).toMatchObject([
+    { warning: { name: 'pressure-injury' }, raised: { entryId: found.id }, seen: { entryId: seen.id }, risesAt: null },
+  ])
+  const worse = check('12:00', { ...injury, stage: 'stage-3' })
+  expect(livesAt('14:00', worse)).toMatchObject([{ raised: { entryId: worse.id }, seen: null, risesAt: at('12:15') }])
+  expect(livesAt('14:00', check('13:00', { skin: 'intact' }))).toEqual([])
 })

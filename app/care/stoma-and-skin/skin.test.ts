@@ -37,26 +37,26 @@ test('intact skin seen everywhere warns of nothing', () => {
 
 test.each([
   ['stage-1', 'pressure-injury-early blue'],
-  ['stage-2', 'pressure-injury-new amber'],
-  ['stage-3', 'pressure-injury-new amber'],
-  ['stage-4', 'pressure-injury-new amber'],
-  ['unstageable', 'pressure-injury-new amber'],
-  ['deep-tissue', 'pressure-injury-new amber'],
+  ['stage-2', 'pressure-injury amber'],
+  ['stage-3', 'pressure-injury amber'],
+  ['stage-4', 'pressure-injury amber'],
+  ['unstageable', 'pressure-injury amber'],
+  ['deep-tissue', 'pressure-injury amber'],
 ] as const)('a new pressure injury of %s', (stage, expected) => {
   expect(namesOf(injury(stage))).toEqual([expected])
 })
 
 test.each<[string, Partial<StomaData>, string]>([
   ['the same stage at the same place', injury('stage-2'), 'pressure-injury-known blue'],
-  ['a worse stage at the same place', injury('stage-3'), 'pressure-injury-new amber'],
-  ['the same stage at another place', injury('stage-2', 'back of neck'), 'pressure-injury-new amber'],
+  ['a worse stage at the same place', injury('stage-3'), 'pressure-injury amber'],
+  ['the same stage at another place', injury('stage-2', 'back of neck'), 'pressure-injury amber'],
 ])('after a stage 2 injury on the left, %s', (_, overrides, expected) => {
   expect(namesOf(overrides, [check('2026-03-09 09:00', injury('stage-2'))])).toEqual([expected])
 })
 
 test('an injury that had healed is new when it comes back', () => {
   const before = [check('2026-03-08 09:00', injury('stage-2')), check('2026-03-09 09:00')]
-  expect(namesOf(injury('stage-2'), before)).toEqual(['pressure-injury-new amber'])
+  expect(namesOf(injury('stage-2'), before)).toEqual(['pressure-injury amber'])
 })
 
 test('the warning names stage, place and size, and asks for referral and an incident report', () => {

@@ -29,7 +29,7 @@ function injury(data: StomaData, { record }: CareContext): readonly Warning[] {
     return [{ name: 'pressure-injury-known', level: 'blue', action, cause: `Known: ${cause}`, source: STAGES }]
   }
   const action = 'Take the pressure off, refer to wound care or ENT today, and report an incident.'
-  return [{ name: 'pressure-injury-new', level: 'amber', action, cause: `New: ${cause}`, source: STAGES }]
+  return [{ name: 'pressure-injury', level: 'amber', action, cause: `New: ${cause}`, source: STAGES }]
 }
 
 function moisture(data: StomaData): readonly Warning[] {
