@@ -16,6 +16,8 @@ export interface DueTask {
   /** Absent while suspended. Of a deferred task: the window from the new time on. */
   readonly window?: DueWindow
   readonly last?: Entry
+  /** The moment that its clock counts from; absent while suspended. */
+  readonly from?: Date
   /** Why it is due sooner than usual, or why it is suspended. */
   readonly because?: string
   readonly byDay?: LocalDay
@@ -48,6 +50,7 @@ function dueTask({ kind, rule }: KindTask, context: CareContext): readonly DueTa
 
 function running(rule: TaskRule, clock: Clock & { state: 'running' }, context: CareContext) {
   const known = {
+    from: clock.from,
     ...(clock.last ? { last: clock.last } : {}),
     ...(clock.because === undefined ? {} : { because: clock.because }),
     ...(clock.byDay === undefined ? {} : { byDay: clock.byDay }),

@@ -1,15 +1,21 @@
 import { expect, test } from 'vitest'
 import { cuffChecks } from '../care/cuff-pressure/schema.ts'
 import { deferrals } from '../care/deferral/schema.ts'
-import { aContext, anEntry, aTube } from '../care/make.ts'
+import type { StoredEntry } from '../care/kind.ts'
+import { aContext, anEntry, aRemoval, aTube } from '../care/make.ts'
 import { tubeChanges } from '../care/tube-change/schema.ts'
 import { dueTasks } from './due-tasks.ts'
 import { type WhyDue, whyDue } from './why.ts'
+import { whyStanding } from './why-warnings.ts'
 
 const tube = anEntry(tubeChanges, '2026-03-09 02:00', aTube())
 const read = anEntry(cuffChecks, '06:00', { found: 26, unit: 'cmH2O', method: 'manometer' })
 
-function whyOf(task: string, entries = [tube, read], policy: Readonly<Record<string, number>> = {}): WhyDue {
+function whyOf(
+  task: string,
+  entries: readonly StoredEntry[] = [tube, read],
+  policy: Readonly<Record<string, number>> = {},
+): WhyDue {
   const context = aContext(entries, '12:00', { policy })
   const found = dueTasks(context).find(({ rule }) => rule.name === task)
   if (!found) throw new RangeError(`${task} is not due`)
@@ -43,4 +49,30 @@ test('a deferral is named, and moves the window', () => {
     'Deferred to 10-Mar-2026 15:50 by Ama Mensah.',
     'In time from 15:50 to 16:50, seriously overdue after 19:50.',
   ])
+})
+
+test.each<[string, string, readonly StoredEntry[], string]>([
+  ['cuff-pressure-check', 'not charted', [tube], 'Not charted yet; counted from 09-Mar-2026 02:00.'],
+  [
+    'observations-after-removal',
+    'not charted after a removal',
+    [tube, read, aRemoval('11:00')],
+    'Not charted yet; counted from 10-Mar-2026 11:00.',
+  ],
+  ['cuff-pressure-check', 'suspended', [tube, read, aRemoval('11:00')], 'Its clock stands still.'],
+])('what %s counts from, %s, is said as it is', (name, _, entries, last) => {
+  expect(whyOf(name, entries).last).toBe(last)
+})
+
+test('air added twice in 12 hours is explained by both of its limits, whichever was reached', () => {
+  const topUp = (when: string) =>
+    anEntry(cuffChecks, when, { found: 15, leftAt: 24, airMl: 1, unit: 'cmH2O', method: 'manometer' })
+  const why = whyStanding(aContext([tube, topUp('06:00'), topUp('11:00')], '12:00'))['cuff-repeated-leak']
+  expect(why?.values.map(({ label, value }) => `${label}: ${value}`)).toEqual(
+    expect.arrayContaining([
+      'Air added this often asks for a review: 2 times',
+      'Air added asks for a review above, in all: 3 mL',
+      'Air added is counted over the last: 12 h',
+    ]),
+  )
 })

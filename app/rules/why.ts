@@ -70,11 +70,10 @@ function windowWords({ window, byDay }: DueTask, { now, ward }: CareContext): st
   return `In time from ${words(opensAt)} to ${words(closesAt)}, seriously overdue after ${words(seriousAt)}.`
 }
 
-function lastWords({ byDay, last }: DueTask, zone: Zone): string {
+function lastWords({ byDay, last, from }: DueTask, zone: Zone): string {
   if (byDay) return `By date: ${showDay(byDay)}.`
-  return last
-    ? `Last on ${showDateTime(last.performedAt, zone)} by ${last.recordedByName}.`
-    : 'Not charted yet; counted from when the tube went in or the patient came.'
+  if (last) return `Last on ${showDateTime(last.performedAt, zone)} by ${last.recordedByName}.`
+  return from ? `Not charted yet; counted from ${showDateTime(from, zone)}.` : 'Its clock stands still.'
 }
 
 /** Which policy is in force, who reviewed it and when. */

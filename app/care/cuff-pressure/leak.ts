@@ -82,8 +82,10 @@ function tooMuchAir(topUps: TopUps, context: CareContext): readonly Warning[] {
   ]
 }
 
+/** Both limits are looked at, whichever is reached: "why?" names what was looked at. */
 function isRepeated({ times, ml }: TopUps, { values }: CareContext): boolean {
-  return times >= values.of(cuffTopUpCount) || ml > values.of(cuffTopUpMl)
+  const [mostTimes, mostMl] = [values.of(cuffTopUpCount), values.of(cuffTopUpMl)]
+  return times >= mostTimes || ml > mostMl
 }
 
 function addedWords({ times, ml }: TopUps, { values }: CareContext): string {
