@@ -11,10 +11,10 @@ import { aPerson } from './people.ts'
 export const on = (day: string, time: string): Date => new Date(`2026-11-${day}T${time}:00.000Z`)
 
 /** A ward with its beds, by label '1' to `beds`, and a nurse of it. */
-export async function aWardOf(beds: number, name = 'Ward 7') {
+export async function aWardOf(beds: number, name = 'Ward 7', shiftTimes = ['07:00', '15:00', '23:00']) {
   const id = uuidv7()
   const admin = await aPerson({ name: `Admin of ${name}`, role: 'administrator' })
-  await addWard({ id, name, shiftTimes: ['07:00', '15:00', '23:00'], pressureUnit: 'cmH2O' }, admin.id)
+  await addWard({ id, name, shiftTimes, pressureUnit: 'cmH2O' }, admin.id)
   const bedIds: string[] = []
   for (let label = 1; label <= beds; label += 1) {
     const bedId = uuidv7()
