@@ -48,6 +48,7 @@ export default [
     route('catalogue', 'routes/catalogue.tsx'),
     route('catalogue/import', 'routes/catalogue-import.tsx'),
     route('catalogue/compare', 'routes/catalogue-compare.tsx'),
+    route('catalogue/lines/:lineId', 'routes/catalogue-line.tsx'),
     route('catalogue/:items/new', 'routes/catalogue-item-new.tsx'),
     route('catalogue/:items/:itemId', 'routes/catalogue-item.tsx'),
     route('catalogue/:items/:itemId/edit', 'routes/catalogue-item-edit.tsx'),

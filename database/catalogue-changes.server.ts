@@ -46,12 +46,12 @@ function actOf(before: Cells | null, after: Cells): string {
   return after.retired === 'yes' ? 'retired' : 'put in use again'
 }
 
-/** The latest changes of an item, newest first: at most 200. */
-export async function catalogueChangesOf(subjectId: string): Promise<readonly CatalogueChange[]> {
+/** The latest changes of an item, and of whatever else is named, newest first: at most 200. */
+export async function catalogueChangesOf(...subjectIds: readonly string[]): Promise<readonly CatalogueChange[]> {
   return select<CatalogueChange>(
     `SELECT c.id, c.what, c.changed_at AS changedAt, u.name AS changedByName, c.old_values AS oldValues, c.new_values AS newValues
      FROM catalogue_changes c JOIN users u ON u.id = c.changed_by
-     WHERE c.subject_id = :subjectId ORDER BY c.id DESC LIMIT 200`,
-    { subjectId },
+     WHERE c.subject_id IN (:subjectIds) ORDER BY c.id DESC LIMIT 200`,
+    { subjectIds },
   )
 }

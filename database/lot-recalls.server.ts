@@ -1,13 +1,9 @@
-import type { Recall } from '#app/care/recall.ts'
+import { type LotDecision, type Recall, recallsInForce } from '#app/care/recall.ts'
+import { namesOfRenamedLines } from './catalogue-lines.server.ts'
 import { isUniqueViolation } from './errors.server.ts'
 import { marks } from './marks.server.ts'
 import { change, select, transact } from './sequelize.server.ts'
 import { raiseAllWards } from './ward-revs.server.ts'
-
-/** A decision about a lot, as it is kept: recalled, or the recall before it lifted. */
-export interface LotDecision extends Recall {
-  readonly isRecalled: boolean
-}
 
 /** A decision to keep. `id` is minted when the form is opened: the same id twice is the same decision. */
 export interface NewLotDecision extends Pick<LotDecision, 'lot' | 'line' | 'reason' | 'isRecalled'> {
@@ -15,21 +11,32 @@ export interface NewLotDecision extends Pick<LotDecision, 'lot' | 'line' | 'reas
   readonly decidedBy: string
 }
 
-let kept: { readonly mark: string; readonly decisions: readonly LotDecision[] } = { mark: '', decisions: [] }
-
-/** Every decision about lots, the latest first. Kept in memory: they are only ever added, so the last number tells. */
-export async function lotDecisions(): Promise<readonly LotDecision[]> {
-  const { lots: mark } = await marks()
-  if (mark !== kept.mark) kept = { mark, decisions: await allDecisions() }
-  return kept.decisions
+interface Kept {
+  readonly mark: string
+  readonly decisions: readonly LotDecision[]
+  readonly inForce: readonly Recall[]
 }
 
-/** The recalls in force: of each lot and line the latest decision, where it was not to lift one. */
+let kept: Kept = { mark: '', decisions: [], inForce: [] }
+
+/** Kept in memory: decisions, and former names of lines, are only ever added, so their numbers tell. */
+async function known(): Promise<Kept> {
+  const { lots: mark } = await marks()
+  if (mark !== kept.mark) {
+    const [decisions, names] = await Promise.all([allDecisions(), namesOfRenamedLines()])
+    kept = { mark, decisions, inForce: recallsInForce(decisions, names) }
+  }
+  return kept
+}
+
+/** Every decision about lots, the latest first. */
+export async function lotDecisions(): Promise<readonly LotDecision[]> {
+  return (await known()).decisions
+}
+
+/** The recalls in force, each under every name of its line. */
 export async function recalls(): Promise<readonly Recall[]> {
-  const decisions = await lotDecisions()
-  const keyOf = ({ lot, line }: Recall) => JSON.stringify([lot.toLowerCase(), line?.toLowerCase()])
-  const latest = new Map(decisions.toReversed().map(decision => [keyOf(decision), decision]))
-  return [...latest.values()].filter(({ isRecalled }) => isRecalled)
+  return (await known()).inForce
 }
 
 async function allDecisions(): Promise<readonly LotDecision[]> {

@@ -1,6 +1,6 @@
 import { select } from './sequelize.server.ts'
 
-/** What changes with every policy and every decision about a lot: whoever keeps them in memory asks for it first. */
+/** What changes with every policy, and with every decision about a lot or new name of a line: whoever keeps them in memory asks for it first. */
 export interface Marks {
   readonly policies: string
   readonly lots: string
@@ -21,7 +21,7 @@ async function read(): Promise<Marks> {
   const [found] = await select<Marks>(
     `SELECT
        (SELECT CONCAT_WS(' ', COUNT(*), MAX(created_at), (SELECT COUNT(*) FROM policy_withdrawals)) FROM policies) AS policies,
-       (SELECT CONCAT_WS(' ', COUNT(*), MAX(number)) FROM lot_recalls) AS lots`,
+       (SELECT CONCAT_WS(' ', COUNT(*), MAX(number), (SELECT SUM(JSON_LENGTH(former_names)) FROM tube_lines)) FROM lot_recalls) AS lots`,
   )
   if (!found) throw new Error('A SELECT without FROM has one row')
   return found

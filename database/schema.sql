@@ -543,6 +543,7 @@ CREATE TABLE `tube_lines` (
   `id` uuid NOT NULL,
   `name` varchar(80) NOT NULL COMMENT 'as printed on the flange',
   `maker` varchar(80) NOT NULL,
+  `former_names` longtext CHARACTER SET utf8mb4 COLLATE utf8mb4_bin NOT NULL DEFAULT '[]' COMMENT 'oldest first: what was charted and recalled under them is of this line' CHECK (json_valid(`former_names`)),
   PRIMARY KEY (`id`),
   UNIQUE KEY `tube_lines_name` (`name`),
   CONSTRAINT `tube_lines_are_named` CHECK (char_length(trim(`name`)) > 0 and char_length(trim(`maker`)) > 0)

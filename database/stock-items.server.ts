@@ -43,13 +43,12 @@ export async function wordsOfItems(keys: readonly string[]): Promise<ReadonlyMap
   ])
 }
 
-/** `Tube Corvane Dual 8.0 ISO 5366, air cuff, fenestrated`. */
-export function tubeWords(tube: Parameters<typeof tubeName>[0] & { cuff: string; fenestrated: string }): string {
-  const cuff = tube.cuff === 'none' ? 'uncuffed' : `${tube.cuff} cuff`
-  return `Tube ${tubeName(tube)}, ${cuff}${tube.fenestrated === 'yes' ? ', fenestrated' : ''}`
+/** `Tube Corvane Dual 8.0 ISO 5366, dual (disposable), air cuff, 78 mm`. */
+export function tubeWords(tube: Parameters<typeof tubeName>[0]): string {
+  return `Tube ${tubeName(tube)}`
 }
 
-/** `Inner cannula Corvane Dual 8.0, disposable`. */
+/** `Inner cannula Corvane Dual 8.0, disposable, box of 10`. */
 export function cannulaWords(cannula: Parameters<typeof innerCannulaName>[0]): string {
   return `Inner cannula ${innerCannulaName(cannula)}`
 }

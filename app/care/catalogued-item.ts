@@ -2,6 +2,8 @@
 export interface CataloguedItem {
   readonly id: string
   readonly line: string
+  /** Names that the line had before: what was charted under them stays as it was. */
+  readonly formerLines: readonly string[]
   readonly size: string
   readonly fits: readonly string[]
 }

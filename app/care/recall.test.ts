@@ -3,7 +3,7 @@ import { replacedWithNew } from './inner-cannula/examples.ts'
 import { innerCannulaActs } from './inner-cannula/schema.ts'
 import { standingInnerCannulaWarnings } from './inner-cannula/warnings.ts'
 import { aContext, anEntry, aTube, at } from './make.ts'
-import { recallOf } from './recall.ts'
+import { type LotDecision, recallOf, recallsInForce } from './recall.ts'
 import { tubeChanges } from './tube-change/schema.ts'
 import { standingTubeWarnings } from './tube-change/standing.ts'
 
@@ -20,6 +20,21 @@ test.each([
   [{ line: 'Alder' }, recall, false],
 ])('%o falls under %o: %s', (device, given, falls) => {
   expect(recallOf(device, [given]) !== undefined).toBe(falls)
+})
+
+const decided = (line: string | null, isRecalled = true): LotDecision => ({ ...recall, line, isRecalled })
+const corvane = ['Corvane Dual', 'Corvne', 'Quill Dual']
+
+// Decisions are given the latest first.
+test.each<[string, readonly LotDecision[], readonly (string | null)[]]>([
+  ['of every line', [decided(null)], [null]],
+  ['of a line that was never renamed', [decided('Alder')], ['Alder']],
+  ['of a line under an earlier name', [decided('corvne')], corvane],
+  ['lifted under a later name', [decided('Corvane Dual', false), decided('Quill Dual')], []],
+  ['lifted, and recalled again', [decided('Alder'), decided('Alder', false), decided('Alder')], ['Alder']],
+  ['lifted for another line', [decided('Alder', false), decided('Corvne')], corvane],
+])('a recall %s is in force where it should be', (_, latestFirst, lines) => {
+  expect(recallsInForce(latestFirst, [corvane]).map(({ line }) => line)).toEqual(lines)
 })
 
 const tubeIn = anEntry(tubeChanges, '2026-03-09 10:00', aTube({ lot: 'H26-0192' }))

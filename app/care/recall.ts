@@ -18,6 +18,27 @@ export interface Labelled {
   readonly line?: string | null | undefined
 }
 
+/** A decision about a lot: recalled, or the recall before it lifted. */
+export interface LotDecision extends Recall {
+  readonly isRecalled: boolean
+}
+
+/**
+ * The recalls in force: of each lot and line the latest decision, where it was not to lift one. `names`: for each line that was
+ * renamed all of its names, of which a recall may have one and a charted device another.
+ */
+export function recallsInForce(
+  latestFirst: readonly LotDecision[],
+  names: readonly (readonly string[])[],
+): readonly Recall[] {
+  const namesOf = (line: string) => names.find(known => known.some(name => isPrintedAlike(name, line))) ?? [line]
+  const keyOf = ({ lot, line }: Recall) => JSON.stringify([lot, line && namesOf(line)[0]]).toLowerCase()
+  const latest = new Map(latestFirst.toReversed().map(decision => [keyOf(decision), decision]))
+  return [...latest.values()]
+    .filter(({ isRecalled }) => isRecalled)
+    .flatMap(recall => (recall.line === null ? [recall] : namesOf(recall.line).map(line => ({ ...recall, line }))))
+}
+
 /** The recall that a device falls under; undefined for none, and where its lot is not known. */
 export function recallOf({ lot, line }: Labelled, recalls: readonly Recall[]): Recall | undefined {
   if (lot == null) return undefined

@@ -1,9 +1,16 @@
+import type { TubeData } from '../care/tube-change/schema.ts'
 import { laminarResistanceRatio } from '../clinical/sizes.ts'
 import { type CatheterRule, largestCatheter, quickRuleFr } from '../clinical/suction-catheter.ts'
 import type { CatalogueTube, PrintedName } from './item.ts'
 
 /** The numbers that two tubes are compared by. A tube that is not of the catalogue has them too. */
 export type ComparedTube = Pick<CatalogueTube, PrintedName>
+
+/** A charted tube as the catalogue would describe it. */
+export function comparedOf(tube: TubeData): ComparedTube {
+  const innerCannula = tube.innerCannula === 'none' ? null : (tube.innerCannula ?? null)
+  return { ...tube, innerCannula, idWithInner: tube.idWithInner ?? null }
+}
 
 /** The inside diameter that breath and a suction catheter meet, in mm: with the inner cannula in, where the tube has one. */
 export function breathedIdMm({ idWithInner, idWithoutInner }: ComparedTube): number {

@@ -90,14 +90,35 @@ export function printedAnswers(tube: CatalogueTube): PrintedAnswers {
   }
 }
 
-/** What a tube is called in a list: `Corvane Dual 8.0 ISO 5366`. */
-export function tubeName({ line, size, sizeSystem }: Pick<CatalogueTube, 'line' | 'size' | 'sizeSystem'>): string {
-  return `${line} ${size} ${sizeSystem}`
+/** A tube as far as its name says which it is. */
+export type NamedTube = Pick<CatalogueTube, Exclude<PrintedName, 'idWithInner' | 'idWithoutInner' | 'od'>>
+
+/**
+ * What a tube is called wherever it is named: no two tubes of a catalogue are called the same. What is usual is left unsaid:
+ * `Corvane Dual 8.0 ISO 5366, dual (disposable), air cuff, 78 mm`.
+ */
+export function tubeName(tube: NamedTube): string {
+  const { line, size, sizeSystem, construction, innerCannula, cuff, fenestrated, flange, connector, lengthMm } = tube
+  return [
+    `${line} ${size} ${sizeSystem}`,
+    ...(construction === 'dual' ? [innerCannula === null ? 'dual' : `dual (${innerCannula})`] : []),
+    cuff === 'none' ? 'no cuff' : `${cuff} cuff`,
+    ...(fenestrated === 'yes' ? ['fenestrated'] : []),
+    ...(flange === 'adjustable' ? ['adjustable flange'] : []),
+    ...(connector === 'outer' ? [] : [connector === 'inner' ? 'connector on the inner cannula' : 'no connector']),
+    `${lengthMm} mm`,
+  ].join(', ')
 }
 
-/** What an inner cannula is called in a list: `Corvane Dual 8.0, disposable, fenestrated`. */
+/** What an inner cannula is called wherever it is named: `Corvane Dual 8.0, disposable, fenestrated, box of 10`. */
 export function innerCannulaName(
-  cannula: Pick<CatalogueInnerCannula, 'line' | 'size' | 'use' | 'fenestrated'>,
+  cannula: Pick<CatalogueInnerCannula, 'line' | 'size' | 'use' | 'fenestrated' | 'packSize'>,
 ): string {
-  return `${cannula.line} ${cannula.size}, ${cannula.use}${cannula.fenestrated === 'yes' ? ', fenestrated' : ''}`
+  const { line, size, use, fenestrated, packSize } = cannula
+  return [
+    `${line} ${size}`,
+    use,
+    ...(fenestrated === 'yes' ? ['fenestrated'] : []),
+    ...(packSize === 1 ? [] : [`box of ${packSize}`]),
+  ].join(', ')
 }

@@ -27,7 +27,8 @@ export function itemProblems(
   return (['line', 'size'] as const).flatMap(what => {
     const name = field.meta.prints[what]
     const typed = care[name]
-    if (typeof typed === 'string' && isPrintedAlike(typed, item[what])) return []
+    const printed = what === 'line' ? [item.line, ...item.formerLines] : [item.size]
+    if (typeof typed === 'string' && printed.some(words => isPrintedAlike(typed, words))) return []
     const message = `The scanned item has the ${what} ${item[what]}. Scan the other one, or take the scan out.`
     return [{ field: `care.${name}`, message }]
   })

@@ -50,7 +50,7 @@ function cellsOf(candidate: Candidate, present: ComparedTubesProps['present']) {
     <Link
       key="tube"
       to={`/catalogue/tubes/${tube.id}`}
-      className="inline-flex min-h-11 items-center whitespace-nowrap underline underline-offset-3"
+      className="inline-flex min-h-11 min-w-56 items-center py-1 underline underline-offset-3"
     >
       {tubeName(tube)}
     </Link>,

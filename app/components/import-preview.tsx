@@ -19,7 +19,8 @@ export interface ImportPreviewProps {
       readonly name: string
       readonly details: readonly string[]
     }[]
-    readonly more: number
+    /** What becomes of the lines that are not among them. */
+    readonly more: readonly { readonly fate: Fate; readonly lines: string }[]
   }
 }
 
@@ -38,6 +39,9 @@ export function ImportPreview({ preview: { text, digest, says, counts, rows, mor
   const errors = [
     ...(says === null ? [] : [{ says }]),
     ...wrong.map(({ line, details }) => ({ fieldId: `line-${line}`, says: `Line ${line}, ${details.join('. ')}` })),
+    ...(error > LISTED_ERRORS
+      ? [{ says: `${error - LISTED_ERRORS} more lines with errors are in the table below` }]
+      : []),
   ]
   const counted = `${error} with errors, ${changed} changed, ${added} new, ${same} as before.`
   return (
@@ -76,7 +80,11 @@ export function ImportPreview({ preview: { text, digest, says, counts, rows, mor
             ],
           }))}
         />
-        {more > 0 && <p className="p-4 text-ink2">And {more} lines more.</p>}
+        {more.map(({ fate, lines }) => (
+          <p key={fate} className="border-t border-hair p-4 break-words">
+            <Tag tone={fates[fate].tone}>{fates[fate].words}</Tag> too: lines {lines}.
+          </p>
+        ))}
       </Card>
     </>
   )

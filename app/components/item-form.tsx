@@ -17,13 +17,19 @@ export interface ItemFormProps {
   readonly errors: Readonly<Record<string, readonly string[]>>
   /** Inner cannulas of the tube's line, by id. */
   readonly fitting: Readonly<Record<string, string>>
+  /** Fields that are settled already. */
+  readonly without?: readonly string[]
   readonly words: string
   readonly cancelHref: string
 }
 
 /** What the catalogue says of an item, to fill in. */
-export function ItemForm({ kind, id, version, typed, errors, fitting, words, cancelHref }: ItemFormProps) {
-  const fields = fieldsOf(kind === 'tube' ? tubeSchema : innerCannulaSchema).map((field): DrawnField => {
+export function ItemForm(props: ItemFormProps) {
+  const { kind, id, version, typed, errors, fitting, without = [], words, cancelHref } = props
+  const asked = fieldsOf(kind === 'tube' ? tubeSchema : innerCannulaSchema).filter(
+    ({ name }) => !without.includes(name),
+  )
+  const fields = asked.map((field): DrawnField => {
     const { name } = field
     return { ...field, id: name, fullName: name, answers: typed[name] ?? [], errors: errors[name] }
   })

@@ -1,4 +1,4 @@
-import { data, redirect } from 'react-router'
+import { data, Link, redirect } from 'react-router'
 import { can } from '#app/auth/permissions.ts'
 import { signedIn } from '#app/auth/signed-in.server.ts'
 import { fitWords } from '#app/catalogue/columns.ts'
@@ -36,7 +36,16 @@ export async function action({ params: { items, itemId }, request, context }: Ro
   const item = await itemOr404(kind, itemId)
   const sent = await sentForm(request)
   const fitting = Object.keys(await fittingOf(item))
-  const form = { kind, id: itemId, version: versionIn(sent), retired: item.isRetired, fitting, by: user.id }
+  const { line, maker } = item.cells
+  const form = {
+    kind,
+    ofLine: { line, maker },
+    id: itemId,
+    version: versionIn(sent),
+    retired: item.isRetired,
+    fitting,
+    by: user.id,
+  }
   const refusal = await savedFrom(sent, form)
   return refusal ? data(refusal, 400) : redirect(`/catalogue/${items}/${itemId}`)
 }
@@ -47,8 +56,18 @@ export default function EditItem({ loaderData: { items, item, fitting }, actionD
   return (
     <div className="grid gap-4 px-4 py-5 md:px-6">
       <h1 className="text-2xl font-bold">{name}</h1>
+      <p>
+        Line {cells.line}, by {cells.maker}.{' '}
+        <Link
+          to={`/catalogue/lines/${item.lineId}`}
+          className="inline-flex min-h-11 items-center underline underline-offset-3"
+        >
+          Name the line anew
+        </Link>
+      </p>
       <ItemForm
         {...{ kind, id, version, fitting }}
+        without={['line', 'maker']}
         typed={actionData?.typed ?? { ...stored, fits: fits.map(fit => fit.id) }}
         errors={actionData?.errors ?? {}}
         words="Save"

@@ -6,11 +6,11 @@ import { columns, headings } from '#app/catalogue/columns.ts'
 import { Button, LinkButton } from '#app/components/button.tsx'
 import { Card } from '#app/components/card.tsx'
 import { DataList } from '#app/components/data-list.tsx'
-import { Table } from '#app/components/table.tsx'
+import { ItemHistory } from '#app/components/item-history.tsx'
 import { Tag } from '#app/components/tag.tsx'
 import { sentForm } from '#app/sent-form.server.ts'
 import { itemRetired } from '#app/views/catalogue-form.server.ts'
-import { itemHistory, itemKindOr404, itemOr404 } from '#app/views/catalogue-item.server.ts'
+import { catalogueHistory, itemKindOr404, itemOr404 } from '#app/views/catalogue-item.server.ts'
 import type { Route } from './+types/catalogue-item.ts'
 
 export const meta: Route.MetaFunction = ({ loaderData }) => [
@@ -21,7 +21,7 @@ export async function loader({ params: { items, itemId }, context }: Route.Loade
   const user = signedIn(context)
   if (!can(user, 'see catalogue')) throw data('The catalogue is not for your role.', 403)
   const item = await itemOr404(itemKindOr404(items), itemId)
-  return { items, item, history: await itemHistory(item.id), mayEdit: can(user, 'manage catalogue') }
+  return { items, item, history: await catalogueHistory(item.id, item.lineId), mayEdit: can(user, 'manage catalogue') }
 }
 
 export async function action({ params: { items, itemId }, request, context }: Route.ActionArgs) {
@@ -50,6 +50,7 @@ export default function Item({ loaderData: { items, item, history, mayEdit }, ac
         {kind === 'tube' && <LinkButton href={`/catalogue/compare?tube=${id}`}>Compare with other tubes</LinkButton>}
         {mayEdit && <LinkButton href={`/catalogue/${items}/${id}/edit`}>Edit</LinkButton>}
         {mayEdit && <RetireForm item={item} />}
+        <LinkButton href={`/catalogue/lines/${item.lineId}`}>Its line</LinkButton>
         <LinkButton href={kind === 'tube' ? '/catalogue' : '/catalogue?items=inner-cannulas'}>All of them</LinkButton>
       </div>
       <div className="grid items-start gap-4 lg:grid-cols-2">
@@ -61,13 +62,7 @@ export default function Item({ loaderData: { items, item, history, mayEdit }, ac
           <Fits item={item} />
         </Card>
       </div>
-      <Card title="History" flush>
-        <Table
-          caption="History"
-          columns={[{ label: 'When' }, { label: 'Who' }, { label: 'What' }]}
-          rows={history.map(({ key, when, who, what }) => ({ key, cells: [when, who, what] }))}
-        />
-      </Card>
+      <ItemHistory history={history} />
     </div>
   )
 }

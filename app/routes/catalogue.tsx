@@ -50,9 +50,7 @@ export default function Catalogue({ loaderData }: Route.ComponentProps) {
 
 type Listed = Route.ComponentProps['loaderData']
 
-const LINK = 'inline-flex min-h-11 items-center whitespace-nowrap underline underline-offset-3'
-const cuffs = { none: 'None', air: 'Air', water: 'Water', foam: 'Foam' } as const
-const connectors = { outer: 'Outer tube', inner: 'Inner cannula', none: 'None' } as const
+const LINK = 'inline-flex min-h-11 min-w-56 items-center py-1 underline underline-offset-3'
 
 function TubeTable({ tubes, total }: Pick<Listed, 'tubes' | 'total'>) {
   const numeric = (label: string) => ({ label, numeric: true })
@@ -67,9 +65,7 @@ function TubeTable({ tubes, total }: Pick<Listed, 'tubes' | 'total'>) {
         numeric('ID, inner in'),
         numeric('ID outer'),
         numeric('Length mm'),
-        { label: 'Cuff' },
-        { label: 'Construction' },
-        { label: 'Connector' },
+        { label: 'State' },
       ]}
       rows={tubes.map(tube => ({
         key: tube.id,
@@ -82,21 +78,11 @@ function TubeTable({ tubes, total }: Pick<Listed, 'tubes' | 'total'>) {
           tube.idWithInner?.toFixed(1) ?? '',
           tube.idWithoutInner.toFixed(1),
           tube.lengthMm,
-          cuffs[tube.cuff],
-          constructionWords(tube),
-          tube.retiredAt ? <Tag key="retired">Retired</Tag> : connectors[tube.connector],
+          tube.retiredAt ? <Tag key="retired">Retired</Tag> : 'In use',
         ],
       }))}
     />
   )
-}
-
-function constructionWords({ construction, innerCannula, fenestrated, flange }: Listed['tubes'][number]): string {
-  return [
-    construction === 'single' ? 'Single' : `Dual, ${innerCannula}`,
-    ...(fenestrated === 'yes' ? ['fenestrated'] : []),
-    ...(flange === 'adjustable' ? ['adjustable flange'] : []),
-  ].join(', ')
 }
 
 function InnerCannulaTable({ innerCannulas, total }: Pick<Listed, 'innerCannulas' | 'total'>) {

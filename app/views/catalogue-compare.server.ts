@@ -3,9 +3,8 @@ import { logPatientLook, patientGate } from '#app/auth/patient-access.server.ts'
 import type { CurrentUser } from '#app/auth/permissions.ts'
 import { policyInForce, type Values, valuesFor } from '#app/care/policy.ts'
 import { catheterRule } from '#app/care/suction/catheter.ts'
-import type { TubeData } from '#app/care/tube-change/schema.ts'
 import { tubeInPlace } from '#app/care/tube-change/tube.ts'
-import { breathedIdMm, type ComparedTube, nearest, tubeCatheters } from '#app/catalogue/compare.ts'
+import { breathedIdMm, type ComparedTube, comparedOf, nearest, tubeCatheters } from '#app/catalogue/compare.ts'
 import type { CatalogueTube } from '#app/catalogue/item.ts'
 import type { Trace } from '#database/access-log.server.ts'
 import { catalogueTube, tubesWhere } from '#database/catalogue.server.ts'
@@ -74,9 +73,4 @@ async function patientsTube(patientId: string, { path, user, by }: Ask, now: Dat
   const tube = context && tubeInPlace(context.record)?.data
   if (!tube) throw data('There is no tube in place to compare with.', 404)
   return { tube: comparedOf(tube), tubeId: null, patientId, values: context.values }
-}
-
-function comparedOf(tube: TubeData): ComparedTube {
-  const innerCannula = tube.innerCannula === 'none' ? null : (tube.innerCannula ?? null)
-  return { ...tube, innerCannula, idWithInner: tube.idWithInner ?? null }
 }

@@ -15,6 +15,8 @@ export interface ItemRefusal {
 
 interface FormOf {
   readonly kind: ItemKind
+  /** Line and maker of an item that is known: it stays in its line, so no form asks for them. */
+  readonly ofLine?: Pick<Cells, 'line' | 'maker'>
   readonly id: string
   readonly version: number | null
   readonly retired: boolean
@@ -29,7 +31,7 @@ export async function savedFrom(sent: FormData, item: FormOf): Promise<ItemRefus
   const cells = Object.fromEntries(
     columns.map(column => [column, plainCell(column, typed[column]?.[0] ?? '')]),
   ) as Cells
-  const read = readValues(item.kind, { ...cells, fits: '', id: '', item: item.kind, retired: '' })
+  const read = readValues(item.kind, { ...cells, ...item.ofLine, fits: '', id: '', item: item.kind, retired: '' })
   if ('faults' in read) {
     const names = [...new Set(read.faults.map(({ column }) => column))]
     const saysOf = (name: string) => read.faults.filter(({ column }) => column === name).map(({ says }) => says)

@@ -1,11 +1,13 @@
 import { createHash } from 'node:crypto'
 import { v7 as uuidv7 } from 'uuid'
 import { importPlan, type PlannedRow } from '#app/catalogue/import-plan.ts'
+import { innerCannulaName, tubeName } from '#app/catalogue/item.ts'
+import { lineRanges } from '#app/catalogue/line-ranges.ts'
 import { wholeCatalogue } from '#database/catalogue.server.ts'
 import { type ItemToSave, saveItems } from '#database/catalogue-writes.server.ts'
 
 const MOST_BYTES = 2_000_000
-const SHOWN_ROWS = 500
+const SHOWN_ROWS = 500 // besides those with errors, which are all shown
 
 /** One line of a preview. */
 export interface PreviewRow {
@@ -17,7 +19,7 @@ export interface PreviewRow {
 
 /** What came of a file: why it cannot be read, what it would do, or that it was done. `text` is what was sent. */
 export type ImportOutcome =
-  | { readonly is: 'unreadable'; readonly text: string; readonly says: string }
+  | { readonly is: 'unreadable'; readonly field: 'file' | 'text'; readonly text: string; readonly says: string }
   | {
       readonly is: 'preview'
       readonly text: string
@@ -25,7 +27,8 @@ export type ImportOutcome =
       readonly says: string | null
       readonly counts: Readonly<Record<PlannedRow['fate'], number>>
       readonly rows: readonly PreviewRow[]
-      readonly more: number
+      /** What becomes of the lines that are not among `rows`. */
+      readonly more: readonly { readonly fate: PlannedRow['fate']; readonly lines: string }[]
     }
   | { readonly is: 'imported'; readonly says: string }
 
@@ -56,7 +59,8 @@ async function fileText(file: File): Promise<{ readonly text: string } | { reado
 export async function imported(text: string, seen: string | null, by: string): Promise<ImportOutcome> {
   const catalogue = await wholeCatalogue()
   const plan = importPlan(text, catalogue, () => uuidv7())
-  if ('fault' in plan) return { is: 'unreadable', text, says: `Line ${plan.fault.line}: ${plan.fault.says}.` }
+  if ('fault' in plan)
+    return { is: 'unreadable', field: 'text', text, says: `Line ${plan.fault.line}: ${plan.fault.says}.` }
   const { rows } = plan
   const digest = digestOf(rows)
   const hasErrors = rows.some(({ fate }) => fate === 'error')
@@ -95,18 +99,30 @@ function countsOf(rows: readonly PlannedRow[]): Record<PlannedRow['fate'], numbe
 
 const order: readonly PlannedRow['fate'][] = ['error', 'changed', 'new', 'same']
 
-/** Errors first, then what changes: a long file is read from what matters. */
+/** Errors first, all of them, then what changes: a long file is read from what matters. */
 function previewOf(text: string, digest: string, rows: readonly PlannedRow[], says: string | null): ImportOutcome {
   const sorted = rows.toSorted((a, b) => order.indexOf(a.fate) - order.indexOf(b.fate) || a.line - b.line)
-  const shown = sorted.slice(0, SHOWN_ROWS).map(({ line, fate, cells, errors, changes }) => ({
-    line,
-    fate,
-    name: [cells.item, cells.line, cells.size].filter(Boolean).join(' ').slice(0, 120),
-    details: [
-      ...errors.map(error => `${error.heading}: ${error.says}`),
-      ...changes.map(({ heading, was, now }) => `${heading}: ${was || 'empty'}, now ${now || 'empty'}`),
-    ],
-  }))
-  const more = rows.length - shown.length
-  return { is: 'preview', text, digest, says, counts: countsOf(rows), rows: shown, more }
+  const counts = countsOf(rows)
+  const [shown, rest] = [sorted.slice(0, counts.error + SHOWN_ROWS), sorted.slice(counts.error + SHOWN_ROWS)]
+  const more = order.flatMap(fate => {
+    const lines = lineRanges(rest.filter(row => row.fate === fate).map(({ line }) => line))
+    return lines === '' ? [] : [{ fate, lines }]
+  })
+  return { is: 'preview', text, digest, says, counts, rows: shown.map(previewRow), more }
+}
+
+function previewRow({ line, fate, cells, values, errors, changes }: PlannedRow): PreviewRow {
+  const details = [
+    ...errors.map(error => `${error.heading}: ${error.says}`),
+    ...changes.map(({ heading, was, now }) => `${heading}: ${was || 'empty'}, now ${now || 'empty'}`),
+  ]
+  return { line, fate, name: nameOf(values, cells), details }
+}
+
+/** As far as it can be read. */
+function nameOf(read: PlannedRow['values'], { item, line, size }: PlannedRow['cells']): string {
+  if (read?.item === 'tube')
+    return `Tube ${tubeName({ ...read.values, innerCannula: read.values.innerCannula ?? null })}`
+  if (read) return `Inner cannula ${innerCannulaName(read.values)}`
+  return [item, line, size].filter(Boolean).join(' ').slice(0, 120)
 }

@@ -61,7 +61,7 @@ async function innerCannulaView(id: string): Promise<ItemView | undefined> {
   const { lineId, version } = cannula
   const fits = tubes.map(tube => ({
     id: tube.id,
-    name: fittingTubeName(tubeCells(tube, [])),
+    name: tubeName(tube),
     isRetired: tube.retiredAt !== null,
   }))
   const told = {
@@ -72,12 +72,9 @@ async function innerCannulaView(id: string): Promise<ItemView | undefined> {
   return { kind: 'inner cannula', id, version, lineId, fits, ...told }
 }
 
-const fittingTubeName = ({ line, size, sizeSystem, cuff, fenestrated }: Cells): string =>
-  `${line} ${size} ${sizeSystem}, ${cuff === 'none' ? 'no cuff' : `${cuff} cuff`}${fenestrated === 'yes' ? ', fenestrated' : ''}`
-
-/** What was changed of an item, newest first, in words. */
-export async function itemHistory(id: string) {
-  const changes = await catalogueChangesOf(id)
+/** What was changed of an item, of its line or of both, newest first, in words. */
+export async function catalogueHistory(...ids: readonly string[]) {
+  const changes = await catalogueChangesOf(...ids)
   return changes.map(change => ({
     key: String(change.id),
     when: showDateTime(change.changedAt, env.hospitalTimeZone),

@@ -31,6 +31,7 @@ import { competences } from './0073-competences.ts'
 import { policyRuleSets } from './0080-policy-rule-sets.ts'
 import { policyWithdrawals } from './0081-policy-withdrawals.ts'
 import { policyDrafts } from './0082-policy-drafts.ts'
+import { lineNames } from './0090-line-names.ts'
 import type { Migration } from './migration.ts'
 
 /** Every migration under its name, in the order in which they are applied. */
@@ -68,4 +69,5 @@ export const migrations: Record<string, Migration> = {
   '0080-policy-rule-sets': policyRuleSets,
   '0081-policy-withdrawals': policyWithdrawals,
   '0082-policy-drafts': policyDrafts,
+  '0090-line-names': lineNames,
 }

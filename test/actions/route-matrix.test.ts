@@ -3,6 +3,7 @@ import { beforeAll, beforeEach, expect, test } from 'vitest'
 import { type Role, roles } from '#app/auth/permissions.ts'
 import { signIn } from '#app/auth/session.server.ts'
 import { grantAccess } from '#database/access-grants.server.ts'
+import { catalogueTube } from '#database/catalogue.server.ts'
 import { addEntry } from '#database/entries.server.ts'
 import { photographsAlongside, writeFiles } from '#database/photographs.server.ts'
 import { addPolicy } from '#database/policies.server.ts'
@@ -73,6 +74,8 @@ GET  /catalogue                        200 200 200 200 200 200 200   200 200 200
 GET  /catalogue/import                 403 403 403 200 403 200 403   403 403 403 200 403 200 403   403 403   own  in
 POST /catalogue/import                 403 403 403 400 403 400 403   403 403 403 400 403 400 403   403 403   own  in
 GET  /catalogue/compare                200 200 200 200 200 200 200   200 200 200 200 200 200 200   200 200   own  in
+GET  /catalogue/lines/:lineId          200 200 200 200 200 200 200   200 200 200 200 200 200 200   200 200   own  in
+POST /catalogue/lines/:lineId          403 403 403 400 403 400 403   403 403 403 400 403 400 403   403 403   own  in
 GET  /catalogue/:items/new             403 403 403 200 403 200 403   403 403 403 200 403 200 403   403 403   own  in
 POST /catalogue/:items/new             403 403 403 400 403 400 403   403 403 403 400 403 400 403   403 403   own  in
 GET  /catalogue/:items/:itemId         200 200 200 200 200 200 200   200 200 200 200 200 200 200   200 200   own  in
@@ -152,8 +155,9 @@ beforeAll(async () => {
   const policyId = uuidv7()
   await addPolicy(aComingPolicy(policyId, ward.id), author.id)
   const itemId = await aCatalogueTube(author.id)
+  const lineId = (await catalogueTube(itemId))?.lineId ?? ''
   const photographId = await aPhotograph(entryId, stayId)
-  const ids = { photographId, policyId, wardId: ward.id, patientId, entryId, userId: author.id, itemId }
+  const ids = { photographId, policyId, wardId: ward.id, patientId, entryId, userId: author.id, itemId, lineId }
   params = { ...ids, kind: 'cuff-pressure', items: 'tubes', act: 'receive' }
 })
 

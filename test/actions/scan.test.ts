@@ -48,7 +48,7 @@ test('an inner cannula of the line in place is filled in with its lot and expiry
   expect(view).toMatchObject({
     findings: [],
     stops: false,
-    name: 'Alder 8.0, disposable',
+    name: 'Alder 8.0, disposable, box of 10',
     fill: { 'care.item': [item], 'care.lot': ['7B'] },
   })
 })

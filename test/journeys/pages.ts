@@ -49,7 +49,7 @@ const specialist = 'specialist'
 const charge = 'charge.alder'
 const administrator = 'administrator'
 const tube = demoTube({ line: 'Halden', size: '6', cuff: 'none', fenestrated: 'no' }).id
-const innerCannula = demoCatalogue.innerCannulas[0]?.id
+const [innerCannula] = demoCatalogue.innerCannulas
 
 /** Every page there is, each with an address or more. */
 export const pages: readonly PageEntry[] = [
@@ -107,10 +107,17 @@ export const pages: readonly PageEntry[] = [
   { route: 'catalogue/import', as: administrator, path: () => '/catalogue/import' },
   { route: 'catalogue/compare', as: 'nurse.alder', path: () => `/catalogue/compare?tube=${tube}` },
   { route: 'catalogue/compare', as: 'nurse.alder', path: ({ patient }) => `/catalogue/compare?patient=${patient}` },
+  { route: 'catalogue/lines/:lineId', as: specialist, path: () => `/catalogue/lines/${innerCannula?.lineId}` },
   { route: 'catalogue/:items/new', as: specialist, path: () => '/catalogue/tubes/new' },
+  { route: 'catalogue/:items/new', as: administrator, path: () => '/catalogue/inner-cannulas/new' },
   { route: 'catalogue/:items/:itemId', as: specialist, path: () => `/catalogue/tubes/${tube}` },
-  { route: 'catalogue/:items/:itemId', as: 'nurse.alder', path: () => `/catalogue/inner-cannulas/${innerCannula}` },
+  { route: 'catalogue/:items/:itemId', as: 'nurse.alder', path: () => `/catalogue/inner-cannulas/${innerCannula?.id}` },
   { route: 'catalogue/:items/:itemId/edit', as: specialist, path: () => `/catalogue/tubes/${tube}/edit` },
+  {
+    route: 'catalogue/:items/:itemId/edit',
+    as: administrator,
+    path: () => `/catalogue/inner-cannulas/${innerCannula?.id}/edit`,
+  },
   { route: 'scan', as: 'nurse.alder', path: () => '/scan' },
   { route: 'scan', as: 'nurse.alder', path: ({ patient }) => `/scan?for=/patients/${patient}/chart/inner-cannula` },
   { route: 'scan/set-up', as: 'nurse.alder', path: () => '/scan/set-up' },

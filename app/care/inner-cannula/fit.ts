@@ -75,7 +75,7 @@ export function isMadeFor(
 export function fitByCatalogue(
   { item }: Pick<InnerCannulaData, 'item'>,
   { record }: Pick<CareContext, 'record'>,
-  catalogued: CataloguedItem,
+  catalogued: Pick<CataloguedItem, 'fits'>,
 ): Pick<InnerCannulaData, 'madeFor' | 'notMadeFor'> {
   const tube = tubeInPlace(record)?.data.item
   if (item === undefined || tube === undefined) return {}
