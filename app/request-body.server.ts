@@ -1,29 +1,28 @@
 import type { Request, RequestHandler } from 'express'
 
 const MOST_BODY_BYTES = 64 * 1024 // the longest form has about 4 kB
-const uploads = [
-  // four photographs of 8 MB, and some more, so that one too many is said at its field
-  { path: /^\/(patients\/[\w-]+\/chart\/[\w-]+|entries\/[\w-]+\/correct)(\.data)?$/, most: 48 * 1024 * 1024 },
-  { path: /^\/catalogue\/import(\.data)?$/, most: 2.2 * 1024 * 1024 }, // a catalogue of some ten thousand items
-]
+// Far more than is kept of an upload: what is too large is read and let go, so that it can be said at its field (`multipartForm`).
+const MOST_UPLOAD_BYTES = 256 * 1024 * 1024
+const UPLOADS = /^\/(patients\/[\w-]+\/chart\/[\w-]+|entries\/[\w-]+\/correct|catalogue\/import)(\.data)?$/
 const LONGEST_BODY_MS = 15_000
 
 /** How long an upload may take to arrive: four photographs of 8 MB over 1.5 Mbit/s, as in a far corner of a ward. */
 export const LONGEST_UPLOAD_MS = 180_000
 
-const uploadOf = (request: Request) =>
-  request.is('multipart/form-data') ? uploads.find(({ path }) => path.test(request.path)) : undefined
+const isUpload = (request: Request): boolean =>
+  request.is('multipart/form-data') !== false && UPLOADS.test(request.path)
 
 /** Ends a connection whose body has not arrived in time: only an upload may take as long as the server lets a request take. */
 export function bodyInTime(...[request, response, next]: Parameters<RequestHandler>) {
-  if (!uploadOf(request)) {
+  if (!isUpload(request)) {
     const late = setTimeout(() => {
       if (request.complete) return
       if (response.headersSent) return void request.destroy()
       response.set('Connection', 'close').status(408).type('text').send('Sent too slowly. Nothing was charted.')
       response.once('finish', () => request.destroy())
     }, LONGEST_BODY_MS)
-    response.once('close', () => clearTimeout(late))
+    // Not with the answer: after one that came early, as to a stranger, the body goes on arriving.
+    request.once('close', () => clearTimeout(late))
   }
   next()
 }
@@ -36,7 +35,7 @@ export function bodyLimited(...[request, response, next]: Parameters<RequestHand
     response.set('Connection', 'close').status(413).type('text').send('The form is too long. Nothing was charted.')
     response.once('finish', () => request.destroy())
   }
-  const most = uploadOf(request)?.most ?? MOST_BODY_BYTES
+  const most = isUpload(request) ? MOST_UPLOAD_BYTES : MOST_BODY_BYTES
   if (Number(request.headers['content-length'] ?? 0) > most) return refuse()
   let bytes = 0
   request.on('data', (chunk: Buffer) => {

@@ -1,13 +1,24 @@
 import { parseWithZod } from '@conform-to/zod/v4'
 import { data } from 'react-router'
 import type { z } from 'zod'
+import { PHOTOGRAPH_LIMITS } from './care/photographs.ts'
+import { type FormLimits, multipartForm, TooMuchText } from './multipart.server.ts'
 
-/** The form in a request. Throws a 400 for a body that is no form. */
+/** As much as any form with files may hold; what is too large is said at its field, beside everything that was typed. */
+const MOST: FormLimits = {
+  fileBytes: PHOTOGRAPH_LIMITS.bytes,
+  files: PHOTOGRAPH_LIMITS.each + 1,
+  textBytes: 2.2 * 1024 * 1024, // the lines of a catalogue
+}
+
+/** The form in a request. Throws a 400 for a body that is no form, and a 413 for one with more text than any form has. */
 export async function sentForm(request: Request): Promise<FormData> {
+  const hasParts = /^multipart\/form-data/i.test(request.headers.get('Content-Type') ?? '')
   try {
-    return await request.formData()
+    return hasParts ? await multipartForm(request, MOST) : await request.formData()
   } catch (error) {
     if (error instanceof TypeError) throw data('This is not a form. Nothing was charted.', 400)
+    if (error instanceof TooMuchText) throw data('More was typed than a form may hold. Nothing was kept.', 413)
     throw error
   }
 }

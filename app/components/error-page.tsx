@@ -21,6 +21,7 @@ const wordsByStatus: Readonly<Record<number, Words>> = {
   400: { title: 'This could not be read', says: 'Nothing was charted. Go back, and try again from the form.' },
   403: { title: 'This is not open to you', says: 'Your role or your ward does not include it. Nothing was changed.' },
   404: { title: 'There is nothing here', says: 'The address may be mistyped, or what it showed may have been closed.' },
+  413: { title: 'This is too long', says: 'Nothing was kept. Go back, and send less at once.' },
   503: {
     title: 'The database cannot be reached. Nothing was charted.',
     says: 'Chart on paper until this page opens again, then enter the care with the time it was done.',

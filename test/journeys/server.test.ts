@@ -1,5 +1,6 @@
 import { connect } from 'node:net'
 import { text } from 'node:stream/consumers'
+import { setTimeout as pause } from 'node:timers/promises'
 import { beforeAll, expect, test } from 'vitest'
 import { connection } from '#database/connection.server.ts'
 import { type StartedApp, startedApp } from './app.ts'
@@ -72,6 +73,40 @@ test('a request that never ends its headers is dropped', { timeout: 20_000 }, as
   const socket = connect(Number(port), hostname)
   socket.write('GET / HTTP/1.1\r\nHost: x\r\n')
   expect(await text(socket)).toContain('408 Request Timeout')
+})
+
+/** A form whose body comes a byte at a time, and everything that is answered until the connection ends. */
+async function trickled(origin: string): Promise<string> {
+  const { hostname, port, host } = new URL(app.url)
+  const socket = connect(Number(port), hostname)
+  socket.on('error', () => {}) // cut off in the middle of a byte: what came before it counts
+  socket.write(
+    `POST /sign-in HTTP/1.1\r\nHost: ${host}\r\nOrigin: ${origin}\r\nContent-Type: application/x-www-form-urlencoded\r\nContent-Length: 5000\r\n\r\n`,
+  )
+  const drip = setInterval(() => socket.write('a'), 300)
+  const answer: Buffer[] = []
+  socket.on('data', chunk => answer.push(chunk))
+  await new Promise(resolve => socket.once('close', resolve))
+  clearInterval(drip)
+  return Buffer.concat(answer).toString()
+}
+
+test('forms that trickle are ended, those that were refused at once too, and keep nobody else waiting', async () => {
+  let [ended, answered] = [false, 0]
+  const origins = Array.from({ length: 30 }, (_, i) => (i % 2 === 0 ? app.url : 'http://elsewhere.example'))
+  const slow = Promise.all(origins.map(trickled)).finally(() => {
+    ended = true
+  })
+  while (!ended) {
+    expect((await fetch(`${app.url}/sign-in`)).status).toBe(200)
+    answered += 1
+    await pause(500)
+  }
+  expect(answered).toBeGreaterThan(5)
+  for (const [i, answer] of (await slow).entries()) {
+    if (i % 2 === 0) expect(answer).toContain('Sent too slowly. Nothing was charted.')
+    expect(answer).toMatch(i % 2 === 0 ? /^HTTP\/1\.1 408 / : /^HTTP\/1\.1 400 /)
+  }
 })
 
 test('a line of the log names neither the query nor what the client calls the request', async () => {
