@@ -18,20 +18,31 @@ const orders = {
   length: 'Length',
 }
 
+const narrowing = ['line', 'sizeSystem', 'cuff', 'construction'] as const
+const COLUMNS = 'grid items-start gap-4 sm:grid-cols-2 lg:grid-cols-4'
+
 /** What is looked for in the catalogue. Sent as an address, so that a list can be kept and passed on. */
 export function CatalogueFilter({ ask, lines }: CatalogueFilterProps) {
   const of = (name: keyof typeof ask) => ({ id: name, name, defaultValue: ask[name] })
   const byLine = Object.fromEntries(lines.map(({ id, line }) => [id, line]))
   const isTubes = ask.items === 'tubes'
+  const isNarrowed = ask.retired === 'yes' || ask.order !== 'line' || narrowing.some(name => ask[name] !== '')
   return (
-    <Form role="search" className="grid gap-4 rounded-card border border-line bg-surface p-4">
-      <div className="grid items-start gap-4 sm:grid-cols-2 lg:grid-cols-4">
+    <Form role="search" className="grid gap-3 rounded-card border border-line bg-surface p-4">
+      <div className={COLUMNS}>
         <SelectField {...of('items')} label="List" options={kinds} />
         <TextField {...of('find')} label="Find" hint="Line, maker, size or GTIN" maxLength={100} autoComplete="off" />
-        <SelectField {...of('line')} label="Line" options={byLine} nothing="All" />
-        {isTubes && <TubeFilters of={of} />}
-        <SelectField {...of('retired')} label="Retired" options={{ no: 'Left out', yes: 'Shown too' }} />
       </div>
+      <details open={isNarrowed}>
+        <summary className="inline-flex min-h-11 items-center font-semibold text-brand underline underline-offset-3">
+          Filter and sort
+        </summary>
+        <div className={`${COLUMNS} mt-2`}>
+          <SelectField {...of('line')} label="Line" options={byLine} nothing="All" />
+          {isTubes && <TubeFilters of={of} />}
+          <SelectField {...of('retired')} label="Retired" options={{ no: 'Left out', yes: 'Shown too' }} />
+        </div>
+      </details>
       <Button className="justify-self-start">Show</Button>
     </Form>
   )

@@ -57,7 +57,7 @@ function cellsOf(candidate: Candidate, present: ComparedTubesProps['present']) {
     <Measure key="od" value={tube.od} by={odMm} />,
     <Measure key="id" value={tube.idWithInner ?? tube.idWithoutInner} by={idMm} />,
     <Measure key="length" value={tube.lengthMm} by={lengthMm} />,
-    `${resistance.toFixed(2)} times`,
+    <span key="resistance" className="whitespace-nowrap">{`${resistance.toFixed(2)} times`}</span>,
     `${cuffs[tube.cuff]}${candidate.isSameCuff ? '' : ' (other)'}`,
     `${connectors[tube.connector]}${candidate.isSameConnector ? '' : ' (other)'}`,
     changesOf(candidate, present).join('. '),
@@ -93,6 +93,9 @@ function changesOf(
       ? [fr === undefined ? 'No suction catheter in stock fits' : `Suction catheter ${fr} Fr at most`]
       : []),
     ...(isSameSize ? [] : [`Spare tubes of ${tube.line}, same and one size smaller`]),
+    ...(tube.fenestrated === present.tube.fenestrated
+      ? []
+      : [tube.fenestrated === 'yes' ? 'Fenestrated' : 'Not fenestrated']),
     ...(tube.flange === present.tube.flange ? [] : [`${tube.flange === 'fixed' ? 'Fixed' : 'Adjustable'} flange`]),
   ]
 }

@@ -65,18 +65,21 @@ export function ImportPreview({ preview: { text, digest, says, counts, rows, mor
         </div>
         <Table
           caption="What each line would do"
-          columns={[{ label: 'Line', numeric: true }, { label: 'Fate' }, { label: 'Item' }, { label: 'What' }]}
+          columns={[
+            { label: 'Line', numeric: true },
+            { label: 'Fate' },
+            { label: 'Item, and what is wrong or changes' },
+          ]}
           rows={rows.map(({ line, fate, name, details }) => ({
             key: String(line),
             cells: [
               <span key="line" id={`line-${line}`} tabIndex={-1}>
                 {line}
               </span>,
-              <Tag key="fate" tone={fates[fate].tone}>
-                {fates[fate].words}
-              </Tag>,
-              name,
-              details.join('. '),
+              <span key="fate" className="whitespace-nowrap">
+                <Tag tone={fates[fate].tone}>{fates[fate].words}</Tag>
+              </span>,
+              <ItemAndDetails key="item" name={name} details={details} />,
             ],
           }))}
         />
@@ -86,6 +89,28 @@ export function ImportPreview({ preview: { text, digest, says, counts, rows, mor
           </p>
         ))}
       </Card>
+    </>
+  )
+}
+
+interface ItemAndDetailsProps {
+  readonly name: string
+  readonly details: readonly string[]
+}
+
+function ItemAndDetails({ name, details }: ItemAndDetailsProps) {
+  return (
+    <>
+      <p className="break-words">{name}</p>
+      {details.length > 0 && (
+        <ul className="mt-1 grid gap-1 text-sm text-ink2">
+          {details.map(says => (
+            <li key={says} className="break-words">
+              {says}
+            </li>
+          ))}
+        </ul>
+      )}
     </>
   )
 }

@@ -80,7 +80,7 @@ function Fits({ item: { kind, cells, fits } }: Shown) {
   if (fits.length === 0) return <p>None is noted. Ask the tracheostomy specialist.</p>
   const list = kind === 'tube' ? 'inner-cannulas' : 'tubes'
   return (
-    <ul className="grid">
+    <ul className="grid gap-2">
       {fits.map(fit => (
         <li key={fit.id} className="flex flex-wrap items-center gap-x-3">
           <Link
