@@ -4,11 +4,11 @@ import { data, Form, redirect } from 'react-router'
 import { v7 as uuidv7 } from 'uuid'
 import type { z } from 'zod'
 import { signedIn } from '#app/auth/signed-in.server.ts'
-import { Button, LinkButton } from '#app/components/button.tsx'
 import { Card } from '#app/components/card.tsx'
 import { ChoiceField } from '#app/components/choice-field.tsx'
 import { Empty } from '#app/components/empty.tsx'
 import { ErrorSummary } from '#app/components/error-summary.tsx'
+import { FormFoot } from '#app/components/form-foot.tsx'
 import { MomentFields, momentErrorsOf } from '#app/components/stay-fields.tsx'
 import { TextArea } from '#app/components/text-field.tsx'
 import { chosenOf, textOf } from '#app/components/text-of.ts'
@@ -89,14 +89,7 @@ function DischargeForm({ shown, reply, back }: DischargeFormProps) {
         />
       )}
       <TextArea key={note.key} {...textOf(note)} label="Note" maxLength={500} rows={2} optional />
-      <div className="flex flex-wrap gap-3">
-        <Button variant="primary" size={56}>
-          Discharge
-        </Button>
-        <LinkButton href={back} size={56}>
-          Cancel
-        </LinkButton>
-      </div>
+      <FormFoot words="Discharge" back={back} />
     </Form>
   )
 }

@@ -4,10 +4,10 @@ import { data, Form, redirect } from 'react-router'
 import { v7 as uuidv7 } from 'uuid'
 import type { z } from 'zod'
 import { signedIn } from '#app/auth/signed-in.server.ts'
-import { Button, LinkButton } from '#app/components/button.tsx'
 import { Card } from '#app/components/card.tsx'
 import { Empty } from '#app/components/empty.tsx'
 import { ErrorSummary } from '#app/components/error-summary.tsx'
+import { FormFoot } from '#app/components/form-foot.tsx'
 import { BedField, MomentFields, momentErrorsOf } from '#app/components/stay-fields.tsx'
 import { env } from '#app/env.server.ts'
 import { sentForm } from '#app/sent-form.server.ts'
@@ -81,14 +81,7 @@ function MoveForm({ shown, reply, back }: MoveFormProps) {
       <ErrorSummary title="Not moved yet. Please check:" errors={momentErrorsOf(form)} />
       <BedField field={fields.bedId} beds={shown.beds} />
       <MomentFields fields={fields} zone={shown.zone} label="Moved" daysBack={DAYS_BACK} />
-      <div className="flex flex-wrap gap-3">
-        <Button variant="primary" size={56}>
-          Move
-        </Button>
-        <LinkButton href={back} size={56}>
-          Cancel
-        </LinkButton>
-      </div>
+      <FormFoot words="Move" back={back} />
     </Form>
   )
 }

@@ -4,9 +4,10 @@ import { data, Form, redirect } from 'react-router'
 import { can } from '#app/auth/permissions.ts'
 import { signedIn } from '#app/auth/signed-in.server.ts'
 import { traceOf } from '#app/auth/trace.server.ts'
-import { Button, LinkButton } from '#app/components/button.tsx'
+import { LinkButton } from '#app/components/button.tsx'
 import { Card } from '#app/components/card.tsx'
 import { ErrorSummary } from '#app/components/error-summary.tsx'
+import { FormFoot } from '#app/components/form-foot.tsx'
 import { TextArea } from '#app/components/text-field.tsx'
 import { errorsOf, textOf } from '#app/components/text-of.ts'
 import { policyHref } from '#app/policies/policy-place.server.ts'
@@ -67,14 +68,7 @@ export default function PolicyWithdraw({ loaderData: { version, back }, actionDa
           <Form method="post" {...getFormProps(form)} className="grid gap-5">
             <ErrorSummary title="Not withdrawn yet. Please check:" errors={errorsOf(form)} />
             <TextArea {...textOf(fields.reason)} label="Reason" />
-            <div className="flex flex-wrap gap-3">
-              <Button variant="danger" size={56}>
-                Withdraw
-              </Button>
-              <LinkButton href={back} size={56}>
-                Cancel
-              </LinkButton>
-            </div>
+            <FormFoot words="Withdraw" back={back} variant="danger" />
           </Form>
         </Card>
       ) : (

@@ -4,9 +4,9 @@ import { data, Form, redirect } from 'react-router'
 import { v7 as uuidv7 } from 'uuid'
 import type { z } from 'zod'
 import { signedIn } from '#app/auth/signed-in.server.ts'
-import { Button, LinkButton } from '#app/components/button.tsx'
 import { Card } from '#app/components/card.tsx'
 import { ErrorSummary } from '#app/components/error-summary.tsx'
+import { FormFoot } from '#app/components/form-foot.tsx'
 import { MomentFields, momentErrorsOf } from '#app/components/stay-fields.tsx'
 import { FindItem } from '#app/components/stock-fields.tsx'
 import { SelectField, TextField } from '#app/components/text-field.tsx'
@@ -116,14 +116,7 @@ function ActForm({ shown, reply }: ActFormProps) {
       />
       <MomentFields fields={fields} zone={zone} label="When" daysBack={daysBack} />
       <TextField key={reason.key} {...textOf(reason)} label="Reason" optional={act !== 'waste'} autoComplete="off" />
-      <div className="flex flex-wrap gap-3">
-        <Button variant="primary" size={56}>
-          {says.button}
-        </Button>
-        <LinkButton href={`/wards/${ward.id}/supplies`} size={56}>
-          Cancel
-        </LinkButton>
-      </div>
+      <FormFoot words={says.button} back={`/wards/${ward.id}/supplies`} />
     </Form>
   )
 }

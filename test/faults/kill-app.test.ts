@@ -1,7 +1,6 @@
-import { afterAll, beforeAll, expect, test } from 'vitest'
+import { afterAll, beforeAll, test } from 'vitest'
 import { type StartedApp, startedApp } from '#test/journeys/app.ts'
-import { until } from '../../database/run/processes.mjs'
-import { bedsideClient, entryCount, patientIdsOn, timesCharted, writing } from './bedside-client.ts'
+import { killedWhileCharting } from './killed-while-charting.ts'
 
 let app: StartedApp
 
@@ -12,21 +11,5 @@ beforeAll(async () => {
 afterAll(() => app.stop())
 
 test('the application is killed four times while six people chart: all that was acknowledged is there, once', async () => {
-  const before = await entryCount(app)
-  const patientIds = await patientIdsOn(app, 'Alder ward')
-  const nurses = ['nurse.alder', 'nurse2.alder', 'nurse3.alder', 'nurse4.alder', 'nurse5.alder', 'therapist.alder']
-  const clients = await Promise.all(nurses.map(who => bedsideClient(app, who)))
-  const work = writing(clients, patientIds)
-  for (let round = 1; round <= 4; round += 1) {
-    const reached = work.acknowledged.size + 10
-    expect(await until(() => work.acknowledged.size >= reached, 60_000)).toBe(true)
-    await app.kill()
-    await app.restart()
-  }
-  await work.finish()
-  expect(work.repeated.size).toBeGreaterThan(0)
-  const times = await timesCharted(app, [...work.acknowledged])
-  expect([...work.acknowledged].filter(id => times.get(id) !== 1)).toEqual([])
-  expect(await entryCount(app)).toBe(before + work.acknowledged.size)
-  await app.verify()
+  await killedWhileCharting(app, app)
 })
