@@ -38,11 +38,22 @@ export async function usedByStays(stayIds: readonly string[], until: Date, days:
   )
 }
 
-/** When a ward's stock was first kept; undefined before that. Nothing was counted earlier. */
+/** What lies in the store of a ward of some items. */
+export async function stockOfStore(wardId: string, items: readonly string[]): Promise<ReadonlyMap<string, number>> {
+  if (items.length === 0) return new Map()
+  const rows = await select<Stock>(
+    `SELECT item, CAST(SUM(quantity) AS SIGNED) AS stock FROM stock_moves
+     WHERE ward_id = :wardId AND bed_id IS NULL AND item IN (:items) GROUP BY item`,
+    { wardId, items },
+  )
+  return new Map(rows.map(({ item, stock }) => [item, stock]))
+}
+
+/** When a ward's stock was first kept: the time of the move that was recorded first; undefined before that. */
 export async function stockKeptSince(wardId: string): Promise<Date | undefined> {
-  const [row] = await select<{ at: Date | null }>(
-    'SELECT MIN(moved_at) AS at FROM stock_moves WHERE ward_id = :wardId',
+  const [row] = await select<{ at: Date }>(
+    'SELECT moved_at AS at FROM stock_moves WHERE ward_id = :wardId ORDER BY recorded_at, act_id, part LIMIT 1',
     { wardId },
   )
-  return row?.at ?? undefined
+  return row?.at
 }

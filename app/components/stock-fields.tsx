@@ -4,11 +4,13 @@ import { TextField } from './text-field.tsx'
 
 interface FindItemProps {
   readonly find: string
+  /** How many the words found; null where nothing was looked for. */
+  readonly found: number | null
   readonly longest: number
 }
 
 /** Adds tubes and inner cannulas of the catalogue to the list to choose from: it has too many to list them all. */
-export function FindItem({ find, longest }: FindItemProps) {
+export function FindItem({ find, found, longest }: FindItemProps) {
   return (
     <Form method="get" role="search" className="grid gap-3">
       <TextField
@@ -20,7 +22,15 @@ export function FindItem({ find, longest }: FindItemProps) {
         maxLength={longest}
         autoComplete="off"
       />
-      <Button className="justify-self-start">Find</Button>
+      <div className="flex flex-wrap items-center gap-x-4 gap-y-2">
+        <Button>Find</Button>
+        {found !== null && <p role="status">{foundWords(found)}</p>}
+      </div>
     </Form>
   )
+}
+
+function foundWords(found: number): string {
+  if (found === 0) return 'Nothing of the catalogue is called so.'
+  return `${found} found: choose ${found === 1 ? 'it' : 'one'} under Item.`
 }

@@ -26,34 +26,45 @@ export function StockTable({ items, here }: StockTableProps) {
     <Table
       caption="Stock"
       columns={[
-        { label: 'Item' },
-        { label: 'Standing' },
+        { label: 'Item and standing' },
+        { label: 'Lasts' },
         { label: 'Store', numeric: true },
         { label: 'At beds', numeric: true },
         { label: 'Use a day', numeric: true },
-        { label: 'Lasts' },
         { label: 'Reorder at', numeric: true },
       ]}
       rows={items.map(row => ({
         key: row.item,
         cells: [
-          <Link key="item" to={`${here}/history?item=${row.item}`} className={`min-w-44 ${LINK}`}>
-            {row.words}
-          </Link>,
-          <span key="standing" className="whitespace-nowrap">
-            <Tag tone={tones[row.standing]}>{sentence(row.standing)}</Tag>
+          <ItemStanding key="item" row={row} here={here} />,
+          <span key="lasts">
+            {sentence(row.lasts)}
+            {row.basis !== '' && <span className="block min-w-32 text-sm text-ink2">{row.basis}</span>}
           </span>,
           <Pieces key="store" pieces={row.store} />,
           <Pieces key="beds" pieces={row.atBeds} />,
           row.perDay,
-          <span key="lasts">
-            {sentence(row.lasts)}
-            {row.basis !== '' && <span className="block min-w-40 text-sm text-ink2">{row.basis}</span>}
-          </span>,
           row.reorderAt,
         ],
       }))}
     />
+  )
+}
+
+interface ItemStandingProps {
+  readonly row: ItemRow
+  readonly here: string
+}
+
+/** What it is and how it stands, together: on a phone the columns after the second are beyond the edge. */
+function ItemStanding({ row: { item, words, standing }, here }: ItemStandingProps) {
+  return (
+    <span className="flex min-w-36 flex-wrap items-center justify-between gap-x-6 gap-y-1">
+      <Link to={`${here}/history?item=${item}`} className={`wrap-anywhere ${LINK}`}>
+        {words}
+      </Link>
+      <Tag tone={tones[standing]}>{sentence(standing)}</Tag>
+    </span>
   )
 }
 
@@ -88,9 +99,13 @@ export function OrderTable({ items, days }: OrderTableProps) {
       rows={items.map(({ item, words, order, boxes, packSize, stock, need }) => ({
         key: item,
         cells: [
-          words,
+          <span key="item" className="block min-w-44 wrap-anywhere">
+            {words}
+          </span>,
           order,
-          boxes === null ? '' : `${boxes} of ${packSize}`,
+          <span key="boxes" className="whitespace-nowrap">
+            {boxes === null ? '' : `${boxes} of ${packSize}`}
+          </span>,
           <Pieces key="stock" pieces={stock} />,
           need,
         ],
@@ -132,7 +147,7 @@ export function BedStock({ beds, here }: BedStockProps) {
                 </Link>
               )}
             </div>
-            <BedItems items={items} here={here} />
+            <BedItems items={items} moveHref={`${here}/move?to=${id}`} />
           </li>
         ))}
       </ul>
@@ -142,10 +157,11 @@ export function BedStock({ beds, here }: BedStockProps) {
 
 interface BedItemsProps {
   readonly items: readonly BedItem[]
-  readonly here: string
+  /** Where something is moved to this bed. */
+  readonly moveHref: string
 }
 
-function BedItems({ items, here }: BedItemsProps) {
+function BedItems({ items, moveHref }: BedItemsProps) {
   if (items.length === 0) return <p className="self-center text-ink2">Nothing lies here</p>
   return (
     <ul className="grid gap-1 self-center">
@@ -157,7 +173,7 @@ function BedItems({ items, here }: BedItemsProps) {
             <>
               {' '}
               <Tag tone={stock < 0 ? 'late' : 'due'}>{stock < 0 ? 'Below nothing' : 'Less than a day'}</Tag>{' '}
-              <Link to={`${here}/move?item=${item}`} className={LINK}>
+              <Link to={`${moveHref}&item=${item}`} className={LINK}>
                 Move some here<span className="sr-only">: {words}</span>
               </Link>
             </>

@@ -28,7 +28,11 @@ export function Table({ caption, captionShown = false, columns, rows }: TablePro
         <thead>
           <tr className="border-b border-line text-sm text-ink2">
             {columns.map(column => (
-              <th key={column.label} scope="col" className={`px-4 py-2 font-semibold ${aligned(column)}`}>
+              <th
+                key={column.label}
+                scope="col"
+                className={`px-4 py-2 font-semibold ${column.numeric ? 'whitespace-nowrap' : ''} ${aligned(column)}`}
+              >
                 {column.label}
               </th>
             ))}

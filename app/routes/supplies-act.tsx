@@ -14,7 +14,7 @@ import { textOf } from '#app/components/text-of.ts'
 import { env } from '#app/env.server.ts'
 import { sentForm } from '#app/sent-form.server.ts'
 import { stockActOf, stockActSchema, stockActs } from '#app/supplies/act-form.ts'
-import { itemIn, STOCK_DAYS_BACK, stockActedBy, stockChoices } from '#app/views/stock-act.server.ts'
+import { itemIn, placeIn, STOCK_DAYS_BACK, stockActedBy, stockChoices } from '#app/views/stock-act.server.ts'
 import { suppliesGate } from '#app/views/supplies-gate.server.ts'
 import type { Route } from './+types/supplies-act.ts'
 
@@ -35,7 +35,8 @@ export async function loader({ params, context, url }: Route.LoaderArgs) {
   const ward = await suppliesGate(user, params.wardId)
   const act = actOr404(params.act)
   const find = (url.searchParams.get('find') ?? '').trim().slice(0, LONGEST_SEARCH)
-  const choices = await stockChoices(ward.id, find)
+  const item = itemIn(url)
+  const choices = await stockChoices(ward.id, { find, item })
   return {
     act,
     ward,
@@ -43,7 +44,10 @@ export async function loader({ params, context, url }: Route.LoaderArgs) {
     choices,
     zone: env.hospitalTimeZone,
     daysBack: STOCK_DAYS_BACK,
-    form: { id: uuidv7(), openedBy: user.id, at: new Date().toISOString(), item: itemIn(url) },
+    form: {
+      ...{ id: uuidv7(), openedBy: user.id, at: new Date().toISOString() },
+      ...{ item, from: placeIn(url, 'from', choices), to: placeIn(url, 'to', choices) },
+    },
   }
 }
 
@@ -64,7 +68,7 @@ export default function SuppliesAct({ loaderData, actionData }: Route.ComponentP
       <h1 className="text-2xl font-bold">
         {stockActs[act].title}: {ward.name}
       </h1>
-      <FindItem find={find} longest={LONGEST_SEARCH} />
+      <FindItem find={find} found={loaderData.choices.found} longest={LONGEST_SEARCH} />
       <Card>
         <ActForm key={`${act} ${find}`} shown={loaderData} reply={actionData?.reply} />
       </Card>

@@ -62,5 +62,6 @@ function cellsOf({ done, what, href, item, pieces, place, by, reason }: Move) {
   ) : (
     what
   )
-  return [whole(done), act, item, whole(pieces), place, by, reason]
+  const roomy = (text: string, room = 'min-w-28') => <span className={`block wrap-anywhere ${room}`}>{text}</span>
+  return [whole(done), act, roomy(item, 'min-w-56'), whole(pieces), roomy(place), roomy(by), roomy(reason, 'min-w-48')]
 }

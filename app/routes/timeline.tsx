@@ -1,6 +1,7 @@
 import { patientContext } from '#app/auth/patient-access.server.ts'
 import { can, canByGrant } from '#app/auth/permissions.ts'
 import { signedIn } from '#app/auth/signed-in.server.ts'
+import { BedSupplies } from '#app/components/bed-supplies.tsx'
 import { Card } from '#app/components/card.tsx'
 import { CareDue } from '#app/components/care-due.tsx'
 import { CareStrip, SpanChoice } from '#app/components/care-strip.tsx'
@@ -20,6 +21,7 @@ import { localDay } from '#app/time/zone.ts'
 import { answeringOf } from '#app/views/answering.server.ts'
 import { chartedNow } from '#app/views/charted-now.server.ts'
 import { patientCare } from '#app/views/patient-context.server.ts'
+import { suppliesAtBed } from '#app/views/patient-supplies.server.ts'
 import { patientTimeline, spans, timelineQuery } from '#app/views/patient-timeline.server.ts'
 import type { Route } from './+types/timeline.ts'
 
@@ -30,19 +32,24 @@ export async function loader({ context, url }: Route.LoaderArgs) {
   const patient = await patientCare(opened.stayId, now)
   const may = opened.via === 'ward' ? can(user, 'chart care', opened.wardId) : canByGrant(user, 'chart care')
   const { span, kind } = timelineQuery(url)
-  const served = await patientTimeline(patient, url, now)
+  const [served, supplies] = await Promise.all([patientTimeline(patient, url, now), suppliesAtBed(patient, now)])
+  const { patientId, wardId } = opened
   return {
     served,
-    answering: answeringOf(served.data.care.warnings, { patientId: opened.patientId, user, now }),
+    supplies: supplies && {
+      ...supplies,
+      wardHref: can(user, 'keep supplies', wardId) ? `/wards/${wardId}/supplies` : null,
+    },
+    answering: answeringOf(served.data.care.warnings, { patientId, user, now }),
     charted: await chartedNow(patient, url.searchParams.get('charted')),
     span,
     spanHours: spans[span],
     spanNames: Object.keys(spans),
     kind: kind ?? null,
     charts: may && patient.record.stay.dischargedAt === null,
-    chapters: chartableKinds(act => can(user, act, opened.wardId) || canByGrant(user, act)),
+    chapters: chartableKinds(act => can(user, act, wardId) || canByGrant(user, act)),
     stayLinks: stayPages.flatMap(({ act, page, words }) =>
-      can(user, act, opened.wardId) ? [{ href: `/patients/${opened.patientId}/${page}`, words }] : [],
+      can(user, act, wardId) ? [{ href: `/patients/${patientId}/${page}`, words }] : [],
     ),
     search: url.search,
   }
@@ -56,8 +63,20 @@ const stayPages = [
 
 /** One patient: the tube, what is due, the hours, and everything that was charted. */
 export default function Timeline({ loaderData }: Route.ComponentProps) {
-  const { served, answering, charted, span, spanHours, spanNames, kind, charts, chapters, stayLinks, search } =
-    loaderData
+  const {
+    served,
+    supplies,
+    answering,
+    charted,
+    span,
+    spanHours,
+    spanNames,
+    kind,
+    charts,
+    chapters,
+    stayLinks,
+    search,
+  } = loaderData
   const { patientId } = served.data
   const live = useLive(`/api/patients/${patientId}/timeline${search}`, served)
   const { data: shown, now } = live
@@ -98,6 +117,7 @@ export default function Timeline({ loaderData }: Route.ComponentProps) {
             status={tubeTask?.status ?? 'upcoming'}
             compareHref={`/catalogue/compare?patient=${patientId}`}
           />
+          {supplies && <BedSupplies {...supplies} />}
         </aside>
         <div className="grid grid-cols-[minmax(0,1fr)] content-start gap-4 lg:col-start-2">
           <Card

@@ -40,6 +40,10 @@ test('an item that belongs at the bed is shown when none lies there, another onl
   expect(items([['gel', 1]], [])).toMatchObject([{ item: 'gel', use: '', lasts: 'not used now' }])
 })
 
+test('what the patient needs is shown where none lies there, though none was counted as used', () => {
+  expect(items([], [['cannula', counted(0)]])).toMatchObject([{ stock: 0, use: '', lasts: 'not used now' }])
+})
+
 test('below nothing is shown, and what is short stands first, then by name', () => {
   const shown = items(
     [

@@ -26,7 +26,7 @@ export function bedItems(
   const items = [...new Set([...stock.keys(), ...rates.keys()])]
   return items
     .map(item => ({ item, pieces: stock.get(item) ?? 0, rate: rates.get(item) ?? { perDay: 0, daysOfData: 0 } }))
-    .filter(({ item, pieces, rate }) => pieces !== 0 || (rate.perDay > 0 && about.belongsAtBed(item)))
+    .filter(({ item, pieces }) => pieces !== 0 || (rates.has(item) && about.belongsAtBed(item)))
     .map(({ item, pieces, rate }) => {
       const time = lasting(pieces, rate.perDay)
       return {

@@ -15,8 +15,8 @@ import { allWards } from '#database/wards.server.ts'
 export const STOCK_DAYS_BACK = 30
 const MOST_FOUND = 50
 
-/** What a form about the stock of a ward chooses from. `find`: words to look for in the catalogue. */
-export async function stockChoices(wardId: string, find: string) {
+/** What a form about the stock of a ward chooses from. `find`: words to look for in the catalogue; `item`: one that is named already. */
+export async function stockChoices(wardId: string, { find, item }: { readonly find: string; readonly item: string }) {
   const search = { words: find, page: 1, pageSize: MOST_FOUND }
   const [stock, beds, wards, tubes, cannulas] = await Promise.all([
     stockOfWard(wardId),
@@ -25,7 +25,7 @@ export async function stockChoices(wardId: string, find: string) {
     find === '' ? { tubes: [] } : searchTubes(search),
     find === '' ? { innerCannulas: [] } : searchInnerCannulas(search),
   ])
-  const kept = await wordsOfItems([...new Set(stock.map(({ item }) => item))])
+  const kept = await wordsOfItems([...new Set([...stock.map(one => one.item), ...(item === '' ? [] : [item])])])
   const items = new Map<string, string>([
     ...cannulas.innerCannulas.map(one => [one.id, cannulaWords(one)] as const),
     ...tubes.tubes.map(one => [one.id, tubeWords(one)] as const),
@@ -33,6 +33,7 @@ export async function stockChoices(wardId: string, find: string) {
     ...Object.entries(supplyItems),
   ])
   return {
+    found: find === '' ? null : tubes.tubes.length + cannulas.innerCannulas.length,
     items: Object.fromEntries([...items].toSorted(([, a], [, b]) => a.localeCompare(b, 'en'))),
     places: Object.fromEntries([
       [STORE, 'Store of the ward'] as const,
@@ -121,4 +122,14 @@ function afterAct({ outcome }: StockActed, wardId: string, submission: Sent): Fo
 export function itemIn(url: URL): string {
   const item = url.searchParams.get('item') ?? ''
   return isUuid(item) || Object.hasOwn(supplyItems, item) ? item : ''
+}
+
+/** A place of the ward that an address names; empty for anything else. */
+export function placeIn(
+  url: URL,
+  name: 'from' | 'to',
+  { places }: Pick<Awaited<ReturnType<typeof stockChoices>>, 'places'>,
+): string {
+  const place = url.searchParams.get(name) ?? ''
+  return Object.hasOwn(places, place) ? place : ''
 }

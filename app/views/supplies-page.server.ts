@@ -3,6 +3,7 @@ import { bedItems } from '#app/supplies/bed-stock.ts'
 import { orderList } from '#app/supplies/order.ts'
 import { bedsOf } from '#database/beds.server.ts'
 import type { Stock } from '#database/stock.server.ts'
+import type { ItemWords } from '#database/stock-items.server.ts'
 import { type WardSupplies, wardSupplies } from './ward-supplies.server.ts'
 
 /** The page of a ward's supplies: the stock, the order list, and what lies at each bed. */
@@ -27,11 +28,16 @@ function bedView({ id, label }: { readonly id: string; readonly label: string },
     label,
     patient: patient ? `${patient.familyName.toUpperCase()}, ${patient.givenName}` : null,
     patientId: patient?.id ?? null,
-    items: bedItems(stockAt(supplies.stock, id), present?.rates ?? new Map(), {
-      wordsOf: item => supplies.words.get(item)?.words ?? 'An item that is not in the catalogue any more',
-      // A tube, an inner cannula: made for this patient's tube alone, so a spare has to lie here.
-      belongsAtBed: isUuid,
-    }),
+    items: bedItems(stockAt(supplies.stock, id), present?.rates ?? new Map(), aboutItems(supplies.words)),
+  }
+}
+
+/** What a bed's list has to know of items, beside their numbers. */
+export function aboutItems(words: ReadonlyMap<string, ItemWords>): Parameters<typeof bedItems>[2] {
+  return {
+    wordsOf: item => words.get(item)?.words ?? 'An item that is not in the catalogue any more',
+    // A tube, an inner cannula: made for this patient's tube alone, so a spare has to lie here.
+    belongsAtBed: isUuid,
   }
 }
 

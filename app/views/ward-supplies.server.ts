@@ -85,13 +85,13 @@ export async function wardSupplies(wardId: string, now: Date): Promise<WardSuppl
 
 interface Kept {
   readonly policy: Policy | undefined
-  readonly ward: Ward
+  readonly ward: Pick<Ward, 'shiftTimes' | 'pressureUnit'>
   readonly keptSince: Date | undefined
   readonly now: Date
 }
 
 /** What each of some present patients uses: counted since the stock was kept and they came, or planned. */
-async function patientSupplies(
+export async function patientSupplies(
   stays: readonly StayRecord[],
   { policy, ward, keptSince, now }: Kept,
 ): Promise<readonly PatientSupply[]> {

@@ -62,9 +62,21 @@ test.each(['?item=toString', '?item=%00', '?before=x', '?before=2026-13-45T00:00
 test('a form offers what lies on the ward, and finds the rest in the catalogue', async () => {
   const tubeId = await aCatalogueTube(given.nurse.id)
   const found = await suppliesPages.open(given.nurse, given.ward.id, 'receive', '?find=ferrin')
-  expect(found.choices?.items).toHaveProperty(tubeId, 'Tube Ferrin 8.0 ISO 5366, air cuff')
+  expect(found.choices).toMatchObject({ found: 1, items: { [tubeId]: 'Tube Ferrin 8.0 ISO 5366, air cuff' } })
+  const none = await suppliesPages.open(given.nurse, given.ward.id, 'receive', '?find=nothing+such')
+  expect(none.choices?.found).toBe(0)
+  const named = await suppliesPages.open(given.nurse, given.ward.id, 'move', `?item=${tubeId}`)
+  expect(named.choices?.items).toHaveProperty(tubeId)
   const plain = await suppliesPages.open(given.nurse, given.ward.id, 'receive', '?item=exchanger&find=')
   expect(plain.choices?.items).not.toHaveProperty(tubeId)
-  expect(plain.form?.item).toBe('exchanger')
+  expect([plain.form?.item, plain.choices?.found]).toEqual(['exchanger', null])
   expect((await suppliesPages.open(given.nurse, given.ward.id, 'receive', '?item=x%27')).form?.item).toBe('')
+})
+
+test('an address names the places of a move, where the ward has them', async () => {
+  const bed = given.ward.bedIds[0] ?? ''
+  const { form } = await suppliesPages.open(given.nurse, given.ward.id, 'move', `?from=store&to=${bed}`)
+  expect(form).toMatchObject({ from: 'store', to: bed })
+  const { form: other } = await suppliesPages.open(given.nurse, given.ward.id, 'move', '?from=toString&to=x%00')
+  expect(other).toMatchObject({ from: '', to: '' })
 })
