@@ -1,6 +1,6 @@
 import type { Browser, BrowserContextOptions, Locator, Page } from 'playwright-core'
 import type { StartedApp } from './app.ts'
-import { type OpenedPage, openedPage } from './browser.ts'
+import { type OpenedPage, openedPage, rowsOf } from './browser.ts'
 
 /** Opens every account of the demo hospital; the sign-in page shows it. */
 export const passphrase = 'kettle lantern orchard rain'
@@ -56,6 +56,17 @@ export async function patientOf(row: Locator): Promise<string> {
   const path = await row.locator('a[href^="/patients/"]').first().getAttribute('href')
   if (path === null) throw new Error('The row leads to no patient')
   return path
+}
+
+/** Where the patient in a bed is: `/patients/…`. */
+export async function patientIn(app: StartedApp, bed: string): Promise<string> {
+  const [row] = await rowsOf<{ id: string }>(
+    app,
+    'SELECT s.patient_id AS id FROM stays s JOIN beds b ON b.id = s.bed_id WHERE b.label = :bed AND s.discharged_at IS NULL',
+    { bed },
+  )
+  if (!row) throw new Error(`Nobody is in bed ${bed}`)
+  return `/patients/${row.id}`
 }
 
 /** How many bars of lateness the strip of a row has. */

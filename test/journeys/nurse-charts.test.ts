@@ -1,4 +1,4 @@
-import type { Browser, Page } from 'playwright-core'
+import type { Browser } from 'playwright-core'
 import { afterAll, beforeAll, expect, test } from 'vitest'
 import {
   barsOf,
@@ -12,6 +12,7 @@ import {
   tablet,
 } from './bedside.ts'
 import { launchedBrowser, type StartedApp, startedApp } from './browser.ts'
+import { countedTaps } from './taps.ts'
 
 let app: StartedApp
 let browser: Browser
@@ -25,23 +26,6 @@ afterAll(async () => {
   await browser.close()
   await app.stop()
 })
-
-/** Counts what a thumb does on the page, whatever it hits. Digits of a number are counted by themselves. */
-async function countedTaps(page: Page) {
-  const taps = { all: 0, digits: 0 }
-  await page.exposeFunction('tapped', (isDigit: boolean) => {
-    taps[isDigit ? 'digits' : 'all'] += 1
-  })
-  await page.evaluate(() => {
-    const { tapped } = window as unknown as { tapped: (isDigit: boolean) => void }
-    addEventListener(
-      'pointerup',
-      ({ target }) => tapped(target instanceof Element && target.closest('[aria-label^="Keys for"]') !== null),
-      { capture: true },
-    )
-  })
-  return taps
-}
 
 test('a late inner cannula is charted as usual with four taps from the board, and its bar goes', async () => {
   const { page, problems } = await signedIn(browser, app, 'nurse.alder', tablet)

@@ -1,8 +1,8 @@
 import type { Browser, Page } from 'playwright-core'
 import sharp from 'sharp'
 import { afterAll, beforeAll, expect, test } from 'vitest'
-import { signedIn } from './bedside.ts'
-import { launchedBrowser, rowsOf, type StartedApp, startedApp } from './browser.ts'
+import { patientIn, signedIn } from './bedside.ts'
+import { launchedBrowser, type StartedApp, startedApp } from './browser.ts'
 import { answered } from './filling.ts'
 
 let app: StartedApp
@@ -12,11 +12,7 @@ let patient: string
 beforeAll(async () => {
   browser = await launchedBrowser()
   app = await startedApp()
-  const [row] = await rowsOf<{ id: string }>(
-    app,
-    `SELECT s.patient_id AS id FROM stays s JOIN beds b ON b.id = s.bed_id WHERE b.label = 'A13' AND s.discharged_at IS NULL`,
-  )
-  patient = `/patients/${row?.id}`
+  patient = await patientIn(app, 'A13')
 })
 
 afterAll(async () => {

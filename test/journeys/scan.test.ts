@@ -1,8 +1,11 @@
+import { readFile } from 'node:fs/promises'
 import type { Browser, Page } from 'playwright-core'
 import { afterAll, beforeAll, expect, test } from 'vitest'
-import { formReady, signedIn, tablet } from './bedside.ts'
+import { formReady, patientIn, signedIn, tablet } from './bedside.ts'
 import { launchedBrowser, rowsOf, type StartedApp, startedApp } from './browser.ts'
 import { answered } from './filling.ts'
+import { expectSheet, sheetTexts } from './sheet.ts'
+import { countedTaps } from './taps.ts'
 
 let app: StartedApp
 let browser: Browser
@@ -18,24 +21,22 @@ afterAll(async () => {
 })
 
 interface Items {
-  readonly patient: string
   readonly line: string
   readonly tube: string
   readonly right: string
   readonly wrong: string
 }
 
-/** A patient with a tube, a catalogue tube with a disposable inner cannula made for it, and one of another line. */
+/** A tube of the catalogue with a disposable inner cannula made for it, and one of another line. */
 async function itemsOfDemo(): Promise<Items> {
   const [found] = await rowsOf<Items>(
     app,
-    `SELECT s.patient_id AS patient, l.name AS line, t.gtin AS tube, c.gtin AS \`right\`,
+    `SELECT l.name AS line, t.gtin AS tube, c.gtin AS \`right\`,
        (SELECT o.gtin FROM inner_cannulas o WHERE o.line_id <> t.line_id AND o.gtin IS NOT NULL AND o.retired_at IS NULL LIMIT 1) AS wrong
      FROM tubes t JOIN tube_lines l ON l.id = t.line_id
        JOIN inner_cannula_fits f ON f.tube_id = t.id
-       JOIN inner_cannulas c ON c.id = f.inner_cannula_id AND c.used_as = 'disposable' AND c.fenestrated = t.fenestrated,
-       stays s JOIN beds b ON b.id = s.bed_id
-     WHERE b.label = 'A1' AND s.discharged_at IS NULL AND t.retired_at IS NULL AND t.construction = 'dual'
+       JOIN inner_cannulas c ON c.id = f.inner_cannula_id AND c.used_as = 'disposable' AND c.fenestrated = t.fenestrated
+     WHERE t.retired_at IS NULL AND t.construction = 'dual'
        AND t.inner_cannula = 'disposable' AND t.flange = 'fixed' AND t.cuff = 'air' LIMIT 1`,
   )
   if (!found) throw new Error('The demo catalogue has no such tube')
@@ -61,40 +62,78 @@ const aboutTheAct = {
   position: 'capnography',
 }
 
-test('a tube is scanned as it goes in, a wrong inner cannula stops, the right one takes three taps, is scanned again to correct it, its lot is found', async () => {
-  const { patient, line, tube, right, wrong } = await itemsOfDemo()
+test('from the scan of a tube to the search for a lot', async () => {
+  const { line, tube, right, wrong } = await itemsOfDemo()
   const { page, problems } = await signedIn(browser, app, 'specialist', tablet)
-  await page.goto(`/patients/${patient}/chart/tube-change`)
+  const patient = await patientIn(app, 'A1')
+
+  // A tube is scanned as it goes in, and is on the card.
+  await page.goto(`${patient}/chart/tube-change`)
   await formReady(page)
   await scan(page, `]d201${tube}1729123110T77`)
   await page.getByText('Filled in below.').waitFor()
   await answered(page, aboutTheAct)
   await page.getByRole('button', { name: 'Chart tube change' }).click()
   await page.waitForURL(/\?charted=|\/act-now\//)
-  await page.goto(`/patients/${patient}`)
+  await page.goto(patient)
   await page.locator('aside').getByText(line).first().waitFor()
 
-  await page.goto(`/patients/${patient}/chart/inner-cannula`)
+  // An inner cannula of another line is stopped before it goes in.
+  await page.goto(`${patient}/chart/inner-cannula`)
   await formReady(page)
   await scan(page, `]d201${wrong}1729123110W12`)
   await page.getByText('This cannula is not made for this tube').first().waitFor()
   expect(await page.locator('[name="care.lot"]').inputValue()).toBe('')
+
+  // The right one is charted with three taps.
+  const taps = await countedTaps(page)
   await scan(page, `]d201${right}1729123110R34`)
   await page.getByText('Filled in below.').waitFor()
   await page.getByRole('button', { name: /^As usual: / }).tap()
   await page.getByRole('radio', { name: 'Light coating' }).tap()
   await page.getByRole('button', { name: 'Chart cannula' }).tap()
   await page.waitForURL(/\?charted=/)
+  expect(taps).toEqual({ all: 3, digits: 0 })
 
-  await page.goto(`/entries/${new URL(page.url()).searchParams.get('charted')}/correct`)
-  await formReady(page)
-  await scan(page, `]d201${right}1729123110R35`)
-  await page.getByText('Filled in below.').waitFor()
-  await page.getByLabel('Why it is corrected').fill('Another pack lay beside it')
-  await page.getByRole('button', { name: 'Chart correction' }).tap()
+  // The sign for the new tube is printed, and its file says the same.
+  await page.goto(`${patient}/sign`)
+  const texts = await sheetTexts(page)
+  expect(texts.join()).toContain(line)
+  const downloading = page.waitForEvent('download')
+  await page.getByRole('button', { name: 'Download as PDF' }).click()
+  const file = await (await downloading).path()
+  expect(await expectSheet(await readFile(file), texts)).toBe('Bed-head sign, bed A1')
+
+  // A lot leads to the patient who has it.
+  await page.goto('/lots?lot=R34')
+  await page.locator(`a[href^="${patient}"], a[href^="/entries/"]`).first().waitFor()
+  expect(problems).toEqual([])
+})
+
+test('a reusable pair that runs out of clean spares warns until one is laid ready', async () => {
+  const { page, problems } = await signedIn(browser, app, 'nurse.alder', tablet)
+  const patient = await patientIn(app, 'A5')
+  const warning = page.getByText('No clean spare of the pair: the other one has been in cleaning since')
+  const swapped = {
+    act: 'swapped',
+    condition: 'light',
+    locked: 'yes',
+    spare: 'no',
+    other: 'cleaning',
+    tolerance: 'well',
+  }
+  await page.goto(`${patient}/chart/inner-cannula`)
+  await answered(page, swapped)
+  await page.getByRole('button', { name: 'Chart cannula' }).tap()
   await page.waitForURL(/\?charted=/)
+  await warning.first().waitFor()
+  await page.locator('aside').getByText('the other being cleaned').waitFor()
 
-  await page.goto('/lots?lot=R35')
-  await page.locator(`a[href^="/patients/${patient}"], a[href^="/entries/"]`).first().waitFor()
+  await page.goto(`${patient}/chart/inner-cannula`)
+  await answered(page, { act: 'other only', spare: 'yes', other: 'ready' })
+  await page.getByRole('button', { name: 'Chart cannula' }).tap()
+  await page.waitForURL(/\?charted=/)
+  await page.locator('aside').getByText('the other clean and ready').waitFor()
+  expect(await warning.count()).toBe(0)
   expect(problems).toEqual([])
 })
