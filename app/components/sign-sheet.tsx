@@ -112,9 +112,11 @@ function Foot({ sign: { numbersTitle, numbers, ends, aid }, qr }: SignSheetProps
         role="img"
         aria-label="QR symbol that leads to the patient’s page"
         viewBox={`-4 -4 ${qr.size + 8} ${qr.size + 8}`}
-        className="size-28 flex-none bg-white print:size-[26mm]"
+        className="size-28 flex-none print:size-[26mm]"
         shapeRendering="crispEdges"
       >
+        {/* Black on white in every theme: cameras read no other. */}
+        <rect x={-4} y={-4} width={qr.size + 8} height={qr.size + 8} fill="#ffffff" />
         <path d={qr.path} fill="#000000" />
       </svg>
     </div>

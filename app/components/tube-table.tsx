@@ -29,14 +29,16 @@ export function TubeTable({ tubes }: TubeTableProps) {
   return (
     <Table
       caption="Tubes in place"
-      columns={['Bed', 'Tube', 'In for', 'Change by', 'Planned for', 'To notice'].map(label => ({ label }))}
+      columns={['Bed', 'Change by', 'Tube', 'In for', 'Planned for', 'To notice'].map(label => ({ label }))}
       rows={tubes.map(tube => ({
         key: tube.tubeId,
         cells: [
           <Whose key="whose" {...tube} />,
-          `${tube.line} ${tube.words}`,
-          `Day ${tube.day}${tube.limit === null ? '' : ` of ${tube.limit}`}`,
           <ChangeBy key="by" {...tube} />,
+          <span key="tube" className="block min-w-44 wrap-anywhere">{`${tube.line} ${tube.words}`}</span>,
+          <span key="day" className="whitespace-nowrap">
+            {`Day ${tube.day}${tube.limit === null ? '' : ` of ${tube.limit}`}`}
+          </span>,
           tube.plannedOn === null
             ? 'Not planned'
             : `${showDay(tube.plannedOn)}${tube.operator ? `, ${tube.operator}` : ''}`,
@@ -51,12 +53,12 @@ type Row = TubeTableProps['tubes'][number]
 
 function Whose({ patientId, bed, wardName, familyName, givenName }: Row) {
   return (
-    <>
+    <span className="block min-w-32 wrap-anywhere">
       <Link to={`/patients/${patientId}`} className="inline-flex min-h-11 items-center underline underline-offset-3">
         {bed} {familyName}, {givenName}
       </Link>
       <span className="block text-sm font-normal text-ink2">{wardName}</span>
-    </>
+    </span>
   )
 }
 
@@ -64,7 +66,7 @@ function ChangeBy({ changeBy, stage, daysLeft }: Row) {
   if (changeBy === null || daysLeft === null) return 'No rule for this patient'
   const left = daysLeft < 0 ? `${-daysLeft} d past` : daysLeft === 0 ? 'today' : `${daysLeft} d left`
   return (
-    <span className="whitespace-nowrap">
+    <span className="flex flex-wrap items-center gap-x-2 gap-y-1 whitespace-nowrap">
       {showDay(changeBy)} <Tag tone={toneOfStage[stage]}>{left}</Tag>
     </span>
   )
