@@ -63,20 +63,8 @@ const stayPages = [
 
 /** One patient: the tube, what is due, the hours, and everything that was charted. */
 export default function Timeline({ loaderData }: Route.ComponentProps) {
-  const {
-    served,
-    supplies,
-    answering,
-    charted,
-    span,
-    spanHours,
-    spanNames,
-    kind,
-    charts,
-    chapters,
-    stayLinks,
-    search,
-  } = loaderData
+  const { served, supplies, answering, charted, charts, chapters, stayLinks, search } = loaderData
+  const { span, spanHours, spanNames, kind } = loaderData
   const { patientId } = served.data
   const live = useLive(`/api/patients/${patientId}/timeline${search}`, served)
   const { data: shown, now } = live
