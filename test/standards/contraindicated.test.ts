@@ -4,6 +4,7 @@ import { adverseEvent } from '#app/care/adverse-event/kind.ts'
 import { cuffPressure } from '#app/care/cuff-pressure/kind.ts'
 import { cuffStateKind } from '#app/care/cuff-state/kind.ts'
 import { cuffStates } from '#app/care/cuff-state/schema.ts'
+import type { StoredEntry } from '#app/care/kind.ts'
 import { type AboutContext, aContext, anEntry, aTube } from '#app/care/make.ts'
 import { calm } from '#app/care/observations/examples.ts'
 import { observations } from '#app/care/observations/kind.ts'
@@ -13,6 +14,11 @@ import { stomaAndSkin } from '#app/care/stoma-and-skin/kind.ts'
 import { plainSuction } from '#app/care/suction/examples.ts'
 import { suction } from '#app/care/suction/kind.ts'
 import { tubeChange } from '#app/care/tube-change/kind.ts'
+import { routinePlan } from '#app/care/tube-change-plan/examples.ts'
+import { tubeChangePlan } from '#app/care/tube-change-plan/kind.ts'
+import { contraindications, type TubePlanData } from '#app/care/tube-change-plan/schema.ts'
+import { weaningPlan } from '#app/care/weaning-plan/kind.ts'
+import type { WeaningPlanData } from '#app/care/weaning-plan/schema.ts'
 import { valveStart } from '#app/care/weaning-trial/examples.ts'
 import { weaningTrial } from '#app/care/weaning-trial/kind.ts'
 import { weaningTrials } from '#app/care/weaning-trial/schema.ts'
@@ -20,8 +26,8 @@ import { entryWarnings } from '#app/rules/warnings.ts'
 import { expectFound, type Found, fresh, gauge, grade, PLAN, topUp, tube, withTube } from './found.ts'
 
 /*
- * Every row of the clinical reference 5.2 (red, with its words): what was found is taken by the form and
- * warned of at that level. Sources of the rules stand in the reference; the words are its suggestions.
+ * Every row of the clinical reference 5.2 (red, with its words): what was found is taken by the form and warned of at that level; what
+ * is contraindicated is refused as a plan. Sources of the rules stand in the reference; the words are its suggestions.
  */
 
 const BREATHE = `Call for help now. Give oxygen to the face and the stoma. Take off any valve or cap, remove the inner cannula, then try a suction catheter. ${PLAN}`
@@ -47,6 +53,8 @@ const found: readonly Found[] = [
   ['SpO2 91, target 94 to 98', observations, { ...calm, spo2: 91 }, 'red', BREATHE, [tube], spo2(94, 98)],
   ['SpO2 83, target 88 to 92', observations, { ...calm, spo2: 83 }, 'red', BREATHE, [tube], spo2(88, 92)],
   ['SpO2 3 below target', observations, { ...calm, spo2: 85 }, 'red', BREATHE, [tube], spo2(88, 92)],
+  ['SpO2 91 after suction', suction, { ...plainSuction, spo2After: 91 }, 'red', BREATHE, [tube], spo2(94, 98)],
+  ['SpO2 83 after suction', suction, { ...plainSuction, spo2After: 83 }, 'red', BREATHE, [tube], spo2(88, 92)],
   [
     'the same after laryngectomy',
     observations,
@@ -67,6 +75,7 @@ const found: readonly Found[] = [
     BLEED,
   ],
   ['fresh blood as a red flag', observations, { ...calm, redFlags: ['blood'] }, 'red', BLEED],
+  ['a tube that moves with the pulse', observations, { ...calm, redFlags: ['pulse'] }, 'red', BLEED],
   ['fresh blood at a grading', secretionGrade, { ...grade, flags: ['fresh'] }, 'red', BLEED],
   ['a bleed as an event', adverseEvent, { ...clearedBlock, event: 'bleeding' }, 'red', BLEED],
   [
@@ -92,6 +101,21 @@ const found: readonly Found[] = [
   ['cap seen, cuff charted as up', observations, { ...calm, onTube: 'cap' }, 'red', VALVE.replace('valve', 'cap')],
   ['cuff inflated under a valve', cuffStateKind, { act: 'seen up', leak: 'no' }, 'red', VALVE, [tube, valveOn]],
   ['the same as an event', adverseEvent, { ...clearedBlock, event: 'valve with cuff up' }, 'red', VALVE],
+  [
+    'valve seen, water cuff up',
+    observations,
+    { ...calm, onTube: 'valve' },
+    'red',
+    VALVE,
+    [withTube({ cuff: 'water' })],
+  ],
+  [
+    'cap found on a foam cuff',
+    weaningTrial,
+    { step: 'found', trial: 'cap', cuffNow: 'foam' },
+    'red',
+    FOAM.replace('valve', 'cap'),
+  ],
   ['valve on a foam cuff', weaningTrial, { ...valveStart, cuffNow: 'foam' }, 'red', FOAM],
   ['valve started, tube has a foam cuff', weaningTrial, valveStart, 'red', FOAM, [foam]],
   ['valve seen on a foam cuff', observations, { ...calm, onTube: 'valve' }, 'red', FOAM, [foam]],
@@ -138,3 +162,36 @@ test('a valve on with the cuff down, or on a tube without one, is no finding', (
     expect(entryWarnings(observations, seen, aContext(record, '12:00'))).toEqual([])
   }
 })
+
+const planned = { plannedOn: '2026-03-11', cuffThen: 'down', agreedWith: 'Team' } as const
+const senior = { seniorName: 'Dr N. Abara', seniorReason: 'Seen by scope' }
+const known = { settings: [], tasks: [] }
+
+// Never, whoever decides: the same pairs as found above, and removal with the cuff up.
+test.each<[string, Partial<WeaningPlanData>, readonly StoredEntry[], AboutContext?]>([
+  ['valve, cuff up then', { step: 'valve', cuffThen: 'up' }, [tube]],
+  ['cap, cuff up then', { step: 'cap', cuffThen: 'up' }, [tube]],
+  ['valve, a cuff that is not there', { step: 'valve', cuffThen: 'none' }, [tube]],
+  ['valve, foam cuff', { step: 'valve' }, [foam]],
+  ['cap, foam cuff', { step: 'cap' }, [foam]],
+  ['valve after laryngectomy', { step: 'valve' }, [tube], laryngectomy],
+  ['cap after laryngectomy', { step: 'cap' }, [tube], laryngectomy],
+  ['removal after laryngectomy', { step: 'removal' }, [tube], laryngectomy],
+  ['removal, cuff up now', { step: 'removal' }, [tube]],
+  ['cap today, valve on', { step: 'cap', plannedOn: '2026-03-10' }, [tube, valveOn]],
+])('refused as a plan, a senior or not: %s', (_, plan, record, about = {}) => {
+  const data = { ...planned, ...senior, ...plan } as WeaningPlanData
+  expect(weaningPlan.schema.safeParse(data).success).toBe(true)
+  expect(weaningPlan.problems?.(data, aContext(record, '12:00', about), known).length).toBeGreaterThan(0)
+})
+
+// Royal Marsden Manual, ch. 12: what speaks against a change of tube; a senior may decide for it, by name and with a reason.
+test.each(Object.keys(contraindications).filter(one => one !== 'none'))(
+  'a tube change is not planned with: %s',
+  one => {
+    const plan = { ...routinePlan, plannedOn: '2026-03-11', contraindications: [one] } as TubePlanData
+    const problems = (data: TubePlanData) => tubeChangePlan.problems?.(data, aContext([tube], '12:00'), known)
+    expect(problems(plan)).toMatchObject([{ field: 'contraindications' }])
+    expect(problems({ ...plan, senior: 'Dr N. Abara', seniorReason: 'Cuff torn' })).toEqual([])
+  },
+)

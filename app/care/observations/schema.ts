@@ -48,6 +48,7 @@ export const redFlags = {
   cannula: 'Inner cannula changed more often than before',
   moved: 'Tube displaced, or its mark at the flange moved',
   blood: 'Fresh blood',
+  pulse: 'Tube moves with the pulse',
   swelling: 'New swelling of the neck, or air under the skin',
   pain: 'Pain at tube or neck',
   agitation: 'Agitation',
