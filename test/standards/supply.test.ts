@@ -7,6 +7,6 @@ test.each([
   [30, 0, 60],
   [31, 0, 62],
   [30, 20, 72],
-])('two changes a day over %i days with a wastage of %i in a hundred need %i', (horizon, wastage, need) => {
+])('C-42 two changes a day over %i days with a wastage of %i in a hundred need %i', (horizon, wastage, need) => {
   expect(needOver(2, horizon, wastage)).toBe(need)
 })
