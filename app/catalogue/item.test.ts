@@ -1,7 +1,7 @@
 import fc from 'fast-check'
 import { expect, test } from 'vitest'
 import { demoCatalogue } from '#database/seeders/catalogue.ts'
-import { innerCannulaName, type NamedTube, tubeName } from './item.ts'
+import { innerCannulaName, type NamedTube, tubeName, tubesInWords } from './item.ts'
 
 const tube: NamedTube = {
   line: 'Corvane Dual',
@@ -53,6 +53,13 @@ test('two tubes that differ in anything that the catalogue keeps apart are calle
     }),
     { numRuns: 500 },
   )
+})
+
+test('several tubes are told by line and size, with the number of their kinds', () => {
+  expect(tubesInWords([tube, { ...tube, size: '9.0' }, { ...tube, cuff: 'none' }])).toBe(
+    'Corvane Dual 8.0 ISO 5366, 2 kinds; Corvane Dual 9.0 ISO 5366, dual (disposable), air cuff, 78 mm',
+  )
+  expect(tubesInWords([])).toBe('')
 })
 
 test('no two items of the demo catalogue are called the same', () => {

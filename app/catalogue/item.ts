@@ -110,6 +110,16 @@ export function tubeName(tube: NamedTube): string {
   ].join(', ')
 }
 
+/** Several tubes in few words: those of one line and size together, with how many kinds there are. */
+export function tubesInWords(tubes: readonly NamedTube[]): string {
+  const sizeOf = ({ line, size, sizeSystem }: NamedTube) => `${line} ${size} ${sizeSystem}`
+  const sizes = [...new Set(tubes.map(sizeOf))].map(size => {
+    const [first, ...others] = tubes.filter(tube => sizeOf(tube) === size)
+    return first && others.length === 0 ? tubeName(first) : `${size}, ${others.length + 1} kinds`
+  })
+  return sizes.join('; ')
+}
+
 /** What an inner cannula is called wherever it is named: `Corvane Dual 8.0, disposable, fenestrated, box of 10`. */
 export function innerCannulaName(
   cannula: Pick<CatalogueInnerCannula, 'line' | 'size' | 'use' | 'fenestrated' | 'packSize'>,

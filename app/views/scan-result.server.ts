@@ -2,7 +2,13 @@ import type { CurrentUser } from '#app/auth/permissions.ts'
 import { can } from '#app/auth/permissions.ts'
 import { codesText } from '#app/care/carried-field.ts'
 import { recallOf } from '#app/care/recall.ts'
-import { type CatalogueInnerCannula, type CatalogueTube, innerCannulaName, tubeName } from '#app/catalogue/item.ts'
+import {
+  type CatalogueInnerCannula,
+  type CatalogueTube,
+  innerCannulaName,
+  tubeName,
+  tubesInWords,
+} from '#app/catalogue/item.ts'
 import { showLabelDate } from '#app/clinical/gs1-dates.ts'
 import { type Gs1Item, itemOf } from '#app/clinical/gs1-scan.ts'
 import { env } from '#app/env.server.ts'
@@ -115,7 +121,7 @@ async function tubeFacts(item: CatalogueTube): Promise<KnownItem> {
       { term: 'Line', value: `${item.line}, ${item.maker}` },
       { term: 'Size', value: `${item.size} ${item.sizeSystem}` },
       ...(item.construction === 'dual'
-        ? [{ term: 'Inner cannulas', value: listed(cannulas.map(innerCannulaName)) }]
+        ? [{ term: 'Inner cannulas', value: cannulas.map(innerCannulaName).join('; ') || NOT_DESCRIBED }]
         : []),
     ],
   }
@@ -132,12 +138,12 @@ async function cannulaFacts(item: CatalogueInnerCannula): Promise<KnownItem> {
       { term: 'What', value: `Inner cannula, ${item.use}${item.fenestrated === 'yes' ? ', fenestrated' : ''}` },
       { term: 'Line', value: `${item.line}, ${item.maker}` },
       { term: 'Size', value: item.size },
-      { term: 'Made for', value: listed(tubes.map(tubeName)) },
+      { term: 'Made for', value: tubesInWords(tubes) || NOT_DESCRIBED },
     ],
   }
 }
 
-const listed = (names: readonly string[]): string => [...new Set(names)].join('; ') || 'Not described yet'
+const NOT_DESCRIBED = 'Not described yet'
 
 function factsOf(item: Gs1Item, believed: Believed | undefined): ScanView['facts'] {
   const expiry = believed?.expiresOn && showLabelDate({ on: believed.expiresOn, monthOnly: believed.expiryMonthOnly })
