@@ -36,9 +36,9 @@ export async function searchTubes(
   search: TubeSearch,
 ): Promise<{ readonly tubes: readonly CatalogueTube[]; readonly total: number }> {
   const { sizeSystem, cuff, construction, order = 'line' } = search
-  const { where, values } = conditions(search, { size_system: sizeSystem, cuff, construction })
+  const { where, values, looksAtLine } = conditions(search, { size_system: sizeSystem, cuff, construction })
   const [total, tubes] = await Promise.all([
-    counted('tubes', where, values),
+    counted(looksAtLine ? `tubes i ${LINE}` : 'tubes i', where, values),
     tubesWhere(where, values, `${orders[order]} LIMIT :limit OFFSET :offset`),
   ])
   return { tubes, total }
@@ -48,20 +48,19 @@ export async function searchTubes(
 export async function searchInnerCannulas(
   search: InnerCannulaSearch,
 ): Promise<{ readonly innerCannulas: readonly CatalogueInnerCannula[]; readonly total: number }> {
-  const { where, values } = conditions(search, {})
+  const { where, values, looksAtLine } = conditions(search, {})
   const order = 'l.name, LENGTH(i.size), i.size, i.fenestrated, i.id LIMIT :limit OFFSET :offset'
   const [total, innerCannulas] = await Promise.all([
-    counted('inner_cannulas', where, values),
+    counted(looksAtLine ? `inner_cannulas i ${LINE}` : 'inner_cannulas i', where, values),
     innerCannulasWhere(where, values, order),
   ])
   return { innerCannulas, total }
 }
 
-async function counted(table: 'tubes' | 'inner_cannulas', where: string, values: Replacements): Promise<number> {
-  const [row] = await select<{ total: number }>(
-    `SELECT COUNT(*) AS total FROM ${table} i JOIN tube_lines l ON l.id = i.line_id WHERE ${where}`,
-    values,
-  )
+const LINE = 'JOIN tube_lines l ON l.id = i.line_id'
+
+async function counted(from: string, where: string, values: Replacements): Promise<number> {
+  const [row] = await select<{ total: number }>(`SELECT COUNT(*) AS total FROM ${from} WHERE ${where}`, values)
   return row?.total ?? 0
 }
 
@@ -90,5 +89,5 @@ function conditions(search: InnerCannulaSearch, columns: Readonly<Record<string,
     ['limit', pageSize] as const,
     ['offset', (page - 1) * pageSize] as const,
   ])
-  return { where: parts.join(' AND ') || 'TRUE', values }
+  return { where: parts.join(' AND ') || 'TRUE', values, looksAtLine: words.length > 0 }
 }

@@ -2,6 +2,7 @@ import { v7 as uuidv7 } from 'uuid'
 import { suction } from '#app/care/suction/kind.ts'
 import { typedFrom } from '#app/charting/chart-form.ts'
 import { connection } from '#database/connection.server.ts'
+import { catalogueComparisons } from './catalogue-figures.ts'
 import type { FilledDatabase } from './databases.ts'
 import { type Answer, type Ask, ask } from './requests.ts'
 import type { Served } from './servers.ts'
@@ -47,6 +48,7 @@ export function comparisons({ large, small, application, applicationOnSmall, bar
     { name: 'Refresh of its data', target: 2.5, ours: boardData(application, large), floor: bareData },
     { name: 'Refresh when unchanged (304)', target: 1, ours: unchanged(application, large), floor: bareData },
     { name: 'Board, 1.5 M entries against 10 k', target: 1.2, ours: page, floor: boardPage(applicationOnSmall, small) },
+    ...catalogueComparisons({ large, small, application, applicationOnSmall, bare }),
     {
       name: 'The same, each after an entry',
       target: 1.2,

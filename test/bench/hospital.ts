@@ -12,6 +12,7 @@ import { idAt, randomFrom } from '#database/seeders/random.ts'
 import type { DemoBed, DemoEntry, DemoHospital, DemoPatient, DemoPerson, DemoStay } from '#database/seeders/rows.ts'
 import type { BedStory, FirstTube } from '#database/seeders/story.ts'
 import type { WardWithBeds } from '#database/seeders/wards.ts'
+import { largeCatalogue } from './catalogue.ts'
 
 const ZONE = 'Europe/London'
 const PATIENTS_A_WARD = 40
@@ -49,7 +50,7 @@ export function largeHospital(now: Date): BenchHospital {
       stays: [...charts, ...others].map(({ stay }) => stay),
       moves: [],
       changes: [],
-      catalogue: demoCatalogue,
+      catalogue: largeCatalogue(),
       policies: demoPolicies(now, ZONE, [first], author),
       entries: charts.flatMap(({ entries }) => latest(entries, ENTRIES_EACH)),
       stockMoves: [],
@@ -69,6 +70,7 @@ export function smallHospital({ hospital, nurse }: BenchHospital): BenchHospital
       ...hospital,
       wards,
       stays,
+      catalogue: demoCatalogue,
       beds: hospital.beds.filter(isThere),
       patients: hospital.patients.slice(0, stays.length),
       entries: stays.flatMap(({ id }) =>
