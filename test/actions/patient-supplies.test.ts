@@ -48,7 +48,12 @@ test('what the tube in place needs is shown though none lies there, with the sto
   expect(await ofCannula()).toMatchObject({ stock: 0, store: 30, lasts: 'not used now', notice: null })
   for (let ago = 0.5; ago < 14; ago += 0.9) await fitted(ago)
   expect(await ofCannula()).toMatchObject({
-    ...{ words: 'Inner cannula Alder 8.0, disposable', stock: 0, store: 15, use: '1.1 a day, 14 days of data' },
+    ...{
+      words: 'Inner cannula Alder 8.0, disposable, box of 10',
+      stock: 0,
+      store: 15,
+      use: '1.1 a day, 14 days of data',
+    },
     ...{ lasts: 'nothing left', isLow: true, notice: 'Less than a day: bring some from the store.' },
   })
 })

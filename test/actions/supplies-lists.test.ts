@@ -30,7 +30,7 @@ test('what is below nothing is on the order list as a number, and a name is only
   await send('waste', { item: tubeId, quantity: '2' })
   const rows = await orderRows()
   expect(rows.slice(1).find(([item]) => item?.includes('=cmd'))).toEqual([
-    ...['Tube =cmd 8.0 ISO 5366, air cuff', '2', '', '', '-2', '0', '0'],
+    ...['Tube =cmd 8.0 ISO 5366, air cuff, 80 mm', '2', '', '', '-2', '0', '0'],
   ])
 })
 
@@ -62,7 +62,7 @@ test.each(['?item=toString', '?item=%00', '?before=x', '?before=2026-13-45T00:00
 test('a form offers what lies on the ward, and finds the rest in the catalogue', async () => {
   const tubeId = await aCatalogueTube(given.nurse.id)
   const found = await suppliesPages.open(given.nurse, given.ward.id, 'receive', '?find=ferrin')
-  expect(found.choices).toMatchObject({ found: 1, items: { [tubeId]: 'Tube Ferrin 8.0 ISO 5366, air cuff' } })
+  expect(found.choices).toMatchObject({ found: 1, items: { [tubeId]: 'Tube Ferrin 8.0 ISO 5366, air cuff, 80 mm' } })
   const none = await suppliesPages.open(given.nurse, given.ward.id, 'receive', '?find=nothing+such')
   expect(none.choices?.found).toBe(0)
   const named = await suppliesPages.open(given.nurse, given.ward.id, 'move', `?item=${tubeId}`)

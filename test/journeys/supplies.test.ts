@@ -19,7 +19,7 @@ afterAll(async () => {
   await app.stop()
 })
 
-const cannula = 'Inner cannula Corvane Dual 8.0, disposable'
+const cannula = 'Inner cannula Corvane Dual 8.0, disposable, box of 10'
 
 /** What lies at a bed, on the page of its patient. */
 const cardOf = (page: Page, bed: string) =>
