@@ -204,7 +204,7 @@ test.each<[string, readonly StoredEntry[], 'amber' | 'blue', RegExp, RegExp?]>([
   ['sutures on day 8', [since('2026-03-02', { sutures: 'in place' })], 'amber', /flange sutures today/],
   [
     'a second block within 24 h',
-    [tube, blocked('2026-03-09 11:30'), blocked('11:00')],
+    [tube, blocked('2026-03-09 11:00'), blocked('11:00')],
     'amber',
     /^Ask the tracheostomy/,
   ],

@@ -1,5 +1,6 @@
 import { days, earlier } from '../../time/duration.ts'
 import type { CareContext } from '../kind.ts'
+import { cameAgain } from '../standing.ts'
 import { repeatTubeOutWindow } from '../tube-change/settings.ts'
 import type { Warning } from '../warning.ts'
 import { type AdverseEventData, adverseEvents } from './schema.ts'
@@ -11,7 +12,8 @@ export function outAgain(data: AdverseEventData, context: CareContext): readonly
 
 /** The same, from what is charted. */
 export function standingOutAgain(context: CareContext): readonly Warning[] {
-  return again(outSoFar(context), context)
+  const out = context.record.of(adverseEvents).filter(({ data }) => data.event === 'unplanned removal')
+  return again(cameAgain(out, days(context.values.of(repeatTubeOutWindow)), context).length, context)
 }
 
 function outSoFar({ record, values, now }: CareContext): number {

@@ -83,5 +83,5 @@ test('a second tube that came out stands for its days, each event counted once',
   const back = (when: string) => event(when, { event: 'unplanned removal', tubeNow: 'in' })
   expect(standingOf(back('2026-03-09 12:00'))).toEqual([])
   expect(standingOf(back('2026-03-04 12:00'), back('2026-03-09 12:00'))).toEqual(['tube-out-again'])
-  expect(standingOf(back('2026-03-02 12:00'), back('2026-03-09 12:00'))).toEqual([])
+  expect(standingOf(back('2026-03-02 11:59'), back('2026-03-09 12:00'))).toEqual([])
 })

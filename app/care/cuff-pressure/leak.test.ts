@@ -78,10 +78,13 @@ test.each<[TubeData['cuff'], number]>([
   expect(cuffWarnings(data, aContext([tube(cuff)], '12:00'))).toHaveLength(warnings)
 })
 
-test('air added twice stands until it is 12 hours ago, and a leak then is red', () => {
+test('air added twice stands for 12 hours after the second time, and a leak then is red for as long as it is heard', () => {
   const standing = (now: string, ...more: readonly StoredEntry[]) =>
     standingCuffWarnings(aContext([tube(), topUp('09:00'), topUp('11:00'), ...more], now)).map(({ name }) => name)
-  expect(standing('21:00')).toEqual(['cuff-repeated-leak'])
-  expect(standing('21:01')).toEqual([])
-  expect(standing('12:00', check('11:30', { leak: 'yes' }))).toEqual(['cuff-leak-displacement', 'cuff-repeated-leak'])
+  expect(standing('23:00')).toEqual(['cuff-repeated-leak'])
+  expect(standing('23:01')).toEqual([])
+  const heard = check('11:30', { leak: 'yes' })
+  expect(standing('12:00', heard)).toEqual(['cuff-leak-displacement', 'cuff-repeated-leak'])
+  expect(standing('23:30', heard)).toEqual(['cuff-leak-displacement'])
+  expect(standing('12:00', heard, check('11:50', { leak: 'no' }))).toEqual(['cuff-repeated-leak'])
 })

@@ -1,8 +1,9 @@
 import { earlier, hours } from '../../time/duration.ts'
 import type { CareContext } from '../kind.ts'
+import { cameAgain } from '../standing.ts'
 import { tubeInPlace } from '../tube-change/tube.ts'
 import { LOCAL_PLAN, type Warning } from '../warning.ts'
-import { cuffState } from './cuff.ts'
+import { type CuffEntry, cuffState } from './cuff.ts'
 import { type CuffData, cuffChecks, foundCmH2O, leftCmH2O } from './schema.ts'
 import { cuffTopUpCount, cuffTopUpMl, cuffTopUpWindow, cuffUpper } from './settings.ts'
 
@@ -22,10 +23,14 @@ export function leakWarnings(data: CuffData, context: CareContext): readonly War
   return [...leak(data, all, context), ...(isTopUp(data) ? tooMuchAir(all, context) : [])]
 }
 
-/** The same from what is charted; `look` is the last one at the cuff. */
-export function standingLeakWarnings(look: CuffData | undefined, context: CareContext): readonly Warning[] {
-  const all = topUpsSoFar(context)
-  return [...(look ? leak(look, all, context) : []), ...tooMuchAir(all, context)]
+/** The same from what is charted; `look` is the last one at the cuff, and a leak then is judged as of then. */
+export function standingLeakWarnings(look: CuffEntry | undefined, context: CareContext): readonly Warning[] {
+  const window = hours(context.values.of(cuffTopUpWindow))
+  const then = look && topUpsSoFar({ ...context, now: look.performedAt })
+  return [
+    ...(look && then ? leak(look.data, then, context) : []),
+    ...tooMuchAir(sumOf(cameAgain(topUpsOnTube(context), window, context)), context),
+  ]
 }
 
 function leak(data: CuffData, topUps: TopUps, context: CareContext): readonly Warning[] {
@@ -105,12 +110,17 @@ function addedMl({ airMl }: CuffData): number {
   return Math.max(0, airMl ?? 0)
 }
 
-function topUpsSoFar({ record, values, now }: CareContext): TopUps {
+function topUpsSoFar(context: CareContext): TopUps {
+  const from = earlier(context.now, hours(context.values.of(cuffTopUpWindow)))
+  return sumOf(topUpsOnTube(context).filter(({ performedAt }) => performedAt >= from && performedAt <= context.now))
+}
+
+function topUpsOnTube({ record }: CareContext): readonly CuffEntry[] {
   const tube = tubeInPlace(record)
-  const added = record
-    .since(cuffChecks, earlier(now, hours(values.of(cuffTopUpWindow))))
-    .filter(
-      ({ data, performedAt }) => performedAt <= now && (!tube || performedAt >= tube.performedAt) && isTopUp(data),
-    )
+  const checks = tube ? record.since(cuffChecks, tube.performedAt) : record.of(cuffChecks)
+  return checks.filter(({ data }) => isTopUp(data))
+}
+
+function sumOf(added: readonly CuffEntry[]): TopUps {
   return { times: added.length, ml: added.reduce((sum, { data }) => sum + addedMl(data), 0) }
 }

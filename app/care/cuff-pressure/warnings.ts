@@ -99,7 +99,7 @@ export function standingCuffWarnings(context: CareContext): readonly Warning[] {
   const onTube = context.record.since(cuffChecks, tube.performedAt)
   const reading = onTube.find(({ data }) => data.found !== undefined)
   const look = onTube.find(({ data }) => data.found !== undefined || data.leak !== undefined)
-  const leaks = standingLeakWarnings(look?.data, context)
+  const leaks = standingLeakWarnings(look, context)
   const outside = reading ? outOfBand(reading.data, context).filter(({ level }) => level !== 'blue') : []
   return [...leaks, ...besides(leaks, outside)]
 }

@@ -1,6 +1,7 @@
 import { showTime } from '../../time/display.ts'
 import { earlier, hours, later } from '../../time/duration.ts'
 import type { CareContext } from '../kind.ts'
+import { cameAgain } from '../standing.ts'
 import type { Warning } from '../warning.ts'
 import { actsOnTube, type InnerCannulaEntry, isNarrowed, isPartlyBlocked, wasSeen } from './acts.ts'
 import { type InnerCannulaData, innerCannulaActs } from './schema.ts'
@@ -43,7 +44,8 @@ export function repeatedBlock(data: InnerCannulaData, context: CareContext): rea
 
 /** The same, from what is charted. */
 export function standingBlocks(context: CareContext): readonly Warning[] {
-  return blocksWarning(blocksBefore(context), context)
+  const blocked = context.record.of(innerCannulaActs).filter(({ data }) => data.condition === 'blocked')
+  return blocksWarning(cameAgain(blocked, hours(context.values.of(repeatBlockWindow)), context).length, context)
 }
 
 function blocksBefore({ record, values, now }: CareContext): number {

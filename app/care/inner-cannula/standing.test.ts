@@ -86,7 +86,7 @@ test('two blocks within a day call the specialist, also across a change of tube'
   const second = anAct('13:00', { condition: 'blocked' })
   expect(names([aTubeIn(), first, second])).toContain('inner-cannula-repeat-block')
   expect(names([aTubeIn(), first, aTubeIn({}, '02:00'), second])).toContain('inner-cannula-repeat-block')
-  expect(names([aTubeIn(), anAct('2026-03-09 13:59', { condition: 'blocked' }), second])).not.toContain(
+  expect(names([aTubeIn(), anAct('2026-03-09 12:59', { condition: 'blocked' }), second])).not.toContain(
     'inner-cannula-repeat-block',
   )
 })

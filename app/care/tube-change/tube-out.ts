@@ -3,7 +3,7 @@ import { days, earlier } from '../../time/duration.ts'
 import { daysBetween, localDay } from '../../time/zone.ts'
 import { decannulations } from '../decannulation/schema.ts'
 import type { CareContext } from '../kind.ts'
-import { standsSince } from '../standing.ts'
+import { cameAgain, standsSince } from '../standing.ts'
 import { LOCAL_PLAN, type Warning } from '../warning.ts'
 import { type TubeData, tubeChanges } from './schema.ts'
 import { blindReinsertionBefore, repeatTubeOutWindow } from './settings.ts'
@@ -80,7 +80,8 @@ export function displacedAgain(data: TubeData, context: CareContext): readonly W
 
 /** The same, from what is charted. */
 export function standingDisplacements(context: CareContext): readonly Warning[] {
-  return displacements(displacedSoFar(context), context)
+  const displaced = context.record.of(tubeChanges).filter(({ data }) => data.reason === 'displaced')
+  return displacements(cameAgain(displaced, days(context.values.of(repeatTubeOutWindow)), context).length, context)
 }
 
 function displacedSoFar({ record, values, now }: CareContext): number {
