@@ -1,3 +1,8 @@
+import { Readable } from 'node:stream'
+import { pipeline } from 'node:stream/promises'
+import type { ReadableStream } from 'node:stream/web'
+import busboy from 'busboy'
+
 /** How much of a form is kept while it arrives. What is past it is read and let go, so that no form fills the memory. */
 export interface FormLimits {
   /** Of each file; one byte more is kept, which tells that it was longer. */
@@ -13,8 +18,7 @@ export class TooMuchText extends Error {
   override readonly name = 'TooMuchText'
 }
 
-const LONGEST_HEAD = 8192
-const END_OF_HEAD = Buffer.from('\r\n\r\n')
+const MOST_PARTS = 1000 // the longest form has about a hundred fields
 
 /**
  * Reads a form of several parts as it arrives (RFC 7578). Unlike the platform's own reader it never holds more than the limits
@@ -22,119 +26,63 @@ const END_OF_HEAD = Buffer.from('\r\n\r\n')
  * is no such form, or ends too early.
  */
 export async function multipartForm(request: Request, limits: FormLimits): Promise<FormData> {
-  const boundary = /;\s*boundary=(?:"([^"]+)"|([^;\s]+))/i.exec(request.headers.get('Content-Type') ?? '')
-  if (!boundary || !request.body) throw new TypeError('A form without a boundary')
-  const delimiter = Buffer.from(`\r\n--${boundary[1] ?? boundary[2]}`)
-  const parts = new Parts(limits)
-  let rest: Buffer = Buffer.from('\r\n') // before the first boundary there may be nothing
-  let inHead = false
-  for await (const chunk of chunksOf(request.body)) {
-    rest = Buffer.concat([rest, chunk])
-    for (let isGoingOn = !parts.isWhole; isGoingOn; ) {
-      const step: Step = inHead ? headStep(rest, parts) : bodyStep(rest, delimiter, parts)
-      ;({ rest, inHead, isGoingOn } = step)
-    }
-    if (parts.isWhole) rest = Buffer.alloc(0)
+  const parser = parserOf(request, limits)
+  const parts = partsOf(parser, limits)
+  try {
+    await pipeline(Readable.fromWeb((request.body ?? emptyBody()) as ReadableStream), parser)
+  } catch (cause) {
+    throw cause instanceof TooMuchText ? cause : new TypeError('A form that cannot be read', { cause })
   }
-  if (!parts.isWhole) throw new TypeError('A form that ends too early')
-  return parts.form
+  const form = new FormData()
+  for (const part of parts) form.append(part.name, 'value' in part ? part.value : fileOf(part))
+  return form
 }
 
-interface Step {
-  readonly rest: Buffer
-  readonly inHead: boolean
-  readonly isGoingOn: boolean
-}
+const emptyBody = () => new Blob([]).stream()
 
-/** A part's body up to the next boundary, or as much of it as surely is none. */
-function bodyStep(rest: Buffer, delimiter: Buffer, parts: Parts): Step {
-  const at = rest.indexOf(delimiter)
-  if (at < 0) {
-    const sure = Math.max(0, rest.length - delimiter.length)
-    parts.take(rest.subarray(0, sure))
-    return { rest: rest.subarray(sure), inHead: false, isGoingOn: false }
-  }
-  const after = rest.subarray(at + delimiter.length)
-  if (after.length < 2) return { rest, inHead: false, isGoingOn: false }
-  parts.take(rest.subarray(0, at))
-  parts.end()
-  const mark = after.toString('latin1', 0, 2)
-  if (mark === '--') parts.isWhole = true
-  else if (mark !== '\r\n') throw new TypeError('A boundary that does not end')
-  return { rest: after.subarray(2), inHead: true, isGoingOn: mark !== '--' }
-}
-
-function headStep(rest: Buffer, parts: Parts): Step {
-  const end = rest.indexOf(END_OF_HEAD)
-  if (end < 0) {
-    if (rest.length > LONGEST_HEAD) throw new TypeError('A part whose head does not end')
-    return { rest, inHead: true, isGoingOn: false }
-  }
-  parts.begin(rest.toString('utf8', 0, end))
-  return { rest: rest.subarray(end + END_OF_HEAD.length), inHead: false, isGoingOn: true }
-}
-
-/** The parts of a form so far. */
-class Parts {
-  readonly form = new FormData()
-  isWhole = false
-  private part: {
-    name: string
-    file: string | undefined
-    type: string
-    kept: Uint8Array<ArrayBuffer>[]
-    bytes: number
-  } | null = null
-  private files = 0
-  private textBytes = 0
-
-  constructor(private readonly limits: FormLimits) {}
-
-  begin(head: string): void {
-    const name = parameterOf(head, 'name')
-    if (name === undefined) throw new TypeError('A part without a name')
-    const [, type = 'application/octet-stream'] = /^content-type:\s*([^\r\n]+)/im.exec(head) ?? []
-    this.part = { name, file: parameterOf(head, 'filename'), type: type.trim(), kept: [], bytes: 0 }
-    if (this.part.file !== undefined && this.part.file !== '') this.files += 1
-  }
-
-  take(bytes: Buffer): void {
-    const { part, limits } = this
-    if (!part || bytes.length === 0) return
-    const isText = part.file === undefined
-    if (isText) this.textBytes += bytes.length
-    if (this.textBytes > limits.textBytes) throw new TooMuchText()
-    const most = isText ? limits.textBytes : this.files > limits.files ? 0 : limits.fileBytes + 1
-    const kept = bytes.subarray(0, most - part.bytes)
-    part.bytes += kept.length
-    // Copied: a part of a chunk would keep the whole chunk in memory.
-    if (kept.length > 0) part.kept.push(new Uint8Array(kept))
-  }
-
-  end(): void {
-    if (!this.part) return
-    const { name, file, type, kept } = this.part
-    if (file === undefined) this.form.append(name, Buffer.concat(kept).toString('utf8'))
-    else this.form.append(name, new File(kept, file, { type }))
-    this.part = null
-  }
-}
-
-/** A parameter of `Content-Disposition`; browsers write quotation marks and line breaks in it as %22, %0D and %0A. */
-function parameterOf(head: string, name: string): string | undefined {
-  const line = /^content-disposition:[^\r\n]*/im.exec(head)?.[0] ?? ''
-  const value = new RegExp(`;\\s*${name}="([^"]*)"`, 'i').exec(line)?.[1]
-  return value?.replace(/%(22|0D|0A)/gi, code => decodeURIComponent(code))
-}
-
-/** A body that breaks off is a form that breaks off, whatever the platform calls it. */
-async function* chunksOf(body: ReadableStream<Uint8Array>): AsyncGenerator<Uint8Array> {
-  const reader = body.getReader()
-  for (;;) {
-    const { done, value } = await reader.read().catch((cause: unknown) => {
-      throw new TypeError('A form that did not arrive', { cause })
+function parserOf(request: Request, { fileBytes, textBytes }: FormLimits): busboy.Busboy {
+  try {
+    return busboy({
+      headers: { 'content-type': request.headers.get('Content-Type') ?? '' },
+      defParamCharset: 'utf8',
+      preservePath: true,
+      limits: { fileSize: fileBytes + 1, fieldSize: textBytes + 1, parts: MOST_PARTS },
     })
-    if (done) return
-    yield value
+  } catch (cause) {
+    throw new TypeError('A form without a boundary', { cause })
   }
+}
+
+type Part =
+  | { readonly name: string; readonly value: string }
+  | { readonly name: string; readonly file: string; readonly type: string; readonly kept: Uint8Array<ArrayBuffer>[] }
+
+/** The parts as they come, in their order. */
+function partsOf(parser: busboy.Busboy, limits: FormLimits): readonly Part[] {
+  const parts: Part[] = []
+  let [files, textBytes] = [0, 0]
+  parser.on('field', (name, value) => {
+    textBytes += Buffer.byteLength(value)
+    if (textBytes > limits.textBytes) parser.destroy(new TooMuchText())
+    parts.push({ name: written(name), value })
+  })
+  parser.on('file', (name, stream, { filename, mimeType }) => {
+    const part = { name: written(name), file: written(filename), type: mimeType, kept: [] as Uint8Array<ArrayBuffer>[] }
+    if (part.file !== '') files += 1
+    const isKept = files <= limits.files
+    // Copied: a part of a chunk would keep the whole chunk in memory.
+    stream.on('data', (bytes: Buffer) => isKept && part.kept.push(new Uint8Array(bytes)))
+    parts.push(part)
+  })
+  parser.on('partsLimit', () => parser.destroy(new TooMuchText()))
+  return parts
+}
+
+function fileOf({ file, type, kept }: Extract<Part, { readonly file: string }>): File {
+  return new File(kept, file, { type })
+}
+
+/** Browsers write quotation marks and line breaks in a name as %22, %0D and %0A. */
+function written(name: string | undefined): string {
+  return (name ?? '').replace(/%(22|0D|0A)/gi, code => decodeURIComponent(code))
 }
