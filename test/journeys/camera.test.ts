@@ -14,6 +14,8 @@ const cannula = demoCatalogue.innerCannulas.find(
 const folder = mkdtempSync(join(tmpdir(), 'cannulary-film-'))
 const film = join(folder, 'label.y4m')
 
+const A_WHILE = { timeout: 30_000 } // a busy machine is no defect
+
 // The usual fake device shows no code.
 const DEVICE = '--use-fake-device-for-media-stream'
 const ALLOWED = '--use-fake-ui-for-media-stream'
@@ -118,14 +120,14 @@ test('a camera that is closed, or left for another page, is let go', async () =>
   await page.goto('/scan', { waitUntil: 'networkidle' })
   await camera(page).tap()
   await view(page).waitFor()
-  await expect.poll(() => tracks(page)).toEqual(['live'])
+  await expect.poll(() => tracks(page), A_WHILE).toEqual(['live'])
   await page.getByRole('button', { name: 'Close the camera' }).tap()
-  await expect.poll(() => tracks(page)).toEqual(['ended'])
+  await expect.poll(() => tracks(page), A_WHILE).toEqual(['ended'])
   await camera(page).tap()
-  await expect.poll(() => tracks(page)).toEqual(['ended', 'live'])
+  await expect.poll(() => tracks(page), A_WHILE).toEqual(['ended', 'live'])
   await page.getByRole('link', { name: 'Set up the scanner' }).tap()
   await page.getByRole('heading', { name: 'Set up the scanner of this workstation' }).waitFor()
-  await expect.poll(() => tracks(page)).toEqual(['ended', 'ended'])
+  await expect.poll(() => tracks(page), A_WHILE).toEqual(['ended', 'ended'])
 })
 
 test('a camera whose pictures cannot be read is let go, and said in words', async () => {
