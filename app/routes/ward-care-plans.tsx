@@ -47,7 +47,7 @@ export default function WardCarePlans({ loaderData: { ward, plans } }: Route.Com
   )
 }
 
-function cellsOf({ patientId, bed, family, given, setting, value, reason, by, reviewOn, daysLeft }: Plan) {
+function cellsOf({ patientId, bed, family, given, setting, value, reason, by, reviewOn, daysLeft, isSoon }: Plan) {
   return [
     <Link key="patient" to={`/patients/${patientId}`} className="inline-flex min-h-11 items-center underline">
       {`Bed ${bed}, ${family.toUpperCase()}, ${given}`}
@@ -56,7 +56,7 @@ function cellsOf({ patientId, bed, family, given, setting, value, reason, by, re
     reason,
     by,
     <span key="review">
-      {reviewOn} <Tag tone={daysLeft < 0 ? 'late' : daysLeft <= 1 ? 'due' : 'plain'}>{daysWords(daysLeft)}</Tag>
+      {reviewOn} <Tag tone={daysLeft < 0 ? 'late' : isSoon ? 'due' : 'plain'}>{daysWords(daysLeft)}</Tag>
     </span>,
   ]
 }

@@ -157,7 +157,7 @@ test('a child on a ward without rules for children is counted apart', () => {
   expect(result).toMatchObject({ total: { tasks: 0, late: 0 }, withoutRules: 1, clocksRead: 0 })
 })
 
-test('clocks are read by entries and shifts, not by minutes', () => {
+test('clocks are read by entries, not by minutes', () => {
   const entries = Array.from({ length: 14 * 6 }, (_, i) => note(`2026-03-${10 + Math.floor(i / 6)} 0${i % 6}:30`))
   const { record } = aContext(entries, '2026-03-24 07:00', { admittedAt: '2026-03-10 00:00' })
   const { clocksRead } = wardLoad({
@@ -167,7 +167,19 @@ test('clocks are read by entries and shifts, not by minutes', () => {
     from: at('2026-03-10 07:00'),
     to: at('2026-03-24 07:00'),
   })
-  // 14 days have 42 shifts; nothing but the engine's own rules would read a note.
-  expect(clocksRead).toBeLessThanOrEqual(careTasks.length * (42 + entries.length))
-  expect(load({ rule: turning, entries: threeTurns }).clocksRead).toBe(5)
+  // None of the rules asks for a note: once each, and what asks for the time in each of 42 shifts.
+  expect(clocksRead).toBeLessThanOrEqual(careTasks.length * (42 + 1))
+  // From 07:00 and at each of three turns.
+  expect(load({ rule: turning, entries: threeTurns }).clocksRead).toBe(4)
+})
+
+test('a clock that asks for the time is read at the start of each shift as well', () => {
+  const onlyLater: TaskRule = {
+    ...about,
+    name: 'later',
+    clock: context => (context.now < at('2026-03-10 20:00') ? { state: 'none' } : turning.clock(context)),
+  }
+  // At 07:00, 15:00, 23:00; the last read finds what fell due at 15:00 late.
+  expect(load({ rule: onlyLater, entries: [] })).toMatchObject({ clocksRead: 3, total: { late: 0 } })
+  expect(load({ rule: onlyLater, entries: [note('08:00')] }).clocksRead).toBe(3)
 })

@@ -43,8 +43,8 @@ interface Asked {
 
 /**
  * How many tasks a policy would have made due between two moments, and how many of them the care that was charted would have met
- * late. Pure. Clocks are read again only when an entry that they asked for comes, and at the start of each shift: of what follows
- * from time alone, a change may be seen up to a shift late.
+ * late. Pure. Clocks are read again only when an entry that they asked for comes; those that asked for the time are also read at the
+ * start of each shift: of what follows from time alone, a change may be seen up to a shift late.
  */
 export function wardLoad({ stays, policy, ward, from, to, tasks = careTasks }: Asked): WardLoad {
   const roster = rosterOf(ward, from, to)
@@ -70,10 +70,12 @@ export function wardLoad({ stays, policy, ward, from, to, tasks = careTasks }: A
     const steps = taskWalk(rule, span, found)
     asking.over.forget()
     for (let at = span.from; at < span.to; ) {
-      const { context, isOutside } = asking.at(at)
-      const clock = isOutside ? ({ state: 'none' } as const) : rule.clock(context)
+      const { context, isOutside, mayAge } = asking.at(at)
+      const watched = watchingTime(context)
+      const clock = isOutside ? ({ state: 'none' } as const) : rule.clock(watched.context)
       tally.noteRead()
-      const next = Math.min(asking.over.nextChange(at), roster.at(at).endsAt.getTime(), span.to)
+      const byTime = mayAge || watched.wasAsked() ? roster.at(at).endsAt.getTime() : Number.POSITIVE_INFINITY
+      const next = Math.min(asking.over.nextChange(at), byTime, span.to)
       steps.step(clock, context, next)
       at = next
     }
@@ -81,14 +83,30 @@ export function wardLoad({ stays, policy, ward, from, to, tasks = careTasks }: A
   }
 }
 
+/** A context that notes whether it is asked for the time: what does not ask cannot change with it. */
+function watchingTime(context: CareContext) {
+  let asked = false
+  const { record, values, ward, now } = context
+  const watching: CareContext = {
+    ...{ record, values, ward },
+    get now() {
+      asked = true
+      return now
+    },
+  }
+  return { context: watching, wasAsked: () => asked }
+}
+
 interface Asker {
   readonly over: RecordOverTime
-  at(ms: number): { readonly context: CareContext; readonly isOutside: boolean }
+  at(ms: number): Judged & { readonly context: CareContext }
 }
 
 interface Judged {
   readonly values: CareContext['values']
   readonly isOutside: boolean
+  /** Whether other numbers may count for this person with age; those for adults do for good. */
+  readonly mayAge: boolean
 }
 
 /** Contexts of one patient at any moment. Own values and age change with the care plan and with time, so those are kept by plan and shift. */
@@ -102,8 +120,8 @@ function askerOf(
     at(ms) {
       const now = new Date(ms)
       const record = over.at(now)
-      const { values, isOutside } = known(roster.at(ms), record, now)
-      return { context: { record, values, ward, now }, isOutside }
+      const judged = known(roster.at(ms), record, now)
+      return { ...judged, context: { record, values: judged.values, ward, now } }
     },
   }
 
@@ -117,7 +135,9 @@ function askerOf(
 
   function judge(record: PatientRecord, now: Date): Judged {
     const context = careContext({ record, policy, ward, now })
-    return { values: context.values, isOutside: isTooYoung(context) }
+    const { values } = context
+    const isOutside = isTooYoung(context)
+    return { values, isOutside, mayAge: isOutside || values.policy.ruleSet === 'children' }
   }
 }
 

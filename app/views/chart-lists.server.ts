@@ -17,9 +17,9 @@ export function personalSettings(context: CareContext | null) {
   return {
     label: Object.fromEntries(
       personal.map(setting => {
-        const { name, label, unit, min, max } = setting
+        const { label, unit, min, max } = context?.values.judged(setting) ?? setting
         const now = context ? `, now ${showValue(context.values.shown(setting), unit)}` : ''
-        return [name, `${label}: ${min} to ${max} ${unit}${now}`]
+        return [setting.name, `${label}: ${min} to ${max} ${unit}${now}`]
       }),
     ),
     units: Object.fromEntries(personal.map(({ name, unit }) => [name, unit])),

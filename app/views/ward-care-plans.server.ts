@@ -1,9 +1,12 @@
 import { personalValues } from '#app/care/care-plan/personal-values.ts'
+import { reviewNotice } from '#app/care/care-plan/settings.ts'
 import { careSettings } from '#app/care/kinds.ts'
+import { policyInForce, valuesFor } from '#app/care/policy.ts'
 import { env } from '#app/env.server.ts'
 import { showValue } from '#app/rules/why.ts'
 import { showDateTime, showDay } from '#app/time/display.ts'
 import { daysBetween, localDay } from '#app/time/zone.ts'
+import { policies } from '#database/policies.server.ts'
 import { wardRecords } from '#database/records.server.ts'
 import { recordOf } from './care-of.server.ts'
 
@@ -21,6 +24,8 @@ export interface PlanLine {
   readonly reviewOn: string
   /** Days until its review; negative once that day has passed. */
   readonly daysLeft: number
+  /** Whether its review is near enough to be planned, by the ward's policy. */
+  readonly isSoon: boolean
 }
 
 /** The own values of a ward's present patients, those to be looked at soonest first. */
@@ -28,9 +33,12 @@ export async function wardCarePlans(wardId: string, now: Date): Promise<readonly
   const { stays } = await wardRecords(wardId)
   const zone = env.hospitalTimeZone
   const today = localDay(now, zone)
+  const policy = policyInForce(await policies(), wardId, now)
+  const notice = policy ? valuesFor(policy).of(reviewNotice) : reviewNotice.default
   return stays
     .flatMap(stay =>
       personalValues(recordOf(stay)).map(({ setting, value, reason, reviewOn, by, since }) => {
+        const daysLeft = daysBetween(today, reviewOn)
         const known = careSettings.find(({ name }) => name === setting)
         return {
           key: `${stay.stay.id} ${setting}`,
@@ -43,7 +51,8 @@ export async function wardCarePlans(wardId: string, now: Date): Promise<readonly
           reason,
           by: `${by}, ${showDateTime(since, zone)}`,
           reviewOn: showDay(reviewOn),
-          daysLeft: daysBetween(today, reviewOn),
+          daysLeft,
+          isSoon: daysLeft <= notice,
         }
       }),
     )

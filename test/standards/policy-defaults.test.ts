@@ -119,6 +119,8 @@ const rows: readonly Row[] = [
   ['no-blind-reinsertion-before', 7, 'V', 'Bontempo and Manning'],
   ['repeat-tube-out-window', 7, 'P', 'No published number'],
   ['after-removal-watch', 48, 'P', 'Stelfox 2008'],
+  // Care plan (10)
+  ['care-plan-review-notice', 2, 'P', 'No published number'],
   // When care is late (3.0): no guideline gives grace minutes; ISMP 2011 adopted
   ['lateness-short-tolerance', 25, 'P', 'ISMP 2011'],
   ['lateness-short-soon', 25, 'P', 'ISMP 2011'],

@@ -1,7 +1,7 @@
 import { expect, test } from 'vitest'
 import type { KnownNames } from '../form-problem.ts'
 import { aContext, anEntry } from '../make.ts'
-import { numberSetting, switchSetting } from '../policy.ts'
+import { numberSetting, switchSetting, valuesFor } from '../policy.ts'
 import { carePlan } from './kind.ts'
 import { type CarePlanData, carePlans } from './schema.ts'
 
@@ -115,6 +115,29 @@ test.each<[string, CarePlanData, readonly CarePlanData[], readonly string[]]>([
   expect(found?.map(({ field, message }) => `${field}: ${message}`)).toEqual(expected)
 })
 
+const ofAge: KnownNames = {
+  settings: [
+    numberSetting({
+      ...{ ...about, name: 'cannula-days', label: 'Longest use', min: 7, max: 90, default: 28, personal: true },
+      children: { byAge: { neonate: 7, infant: 7, child: 14, adolescent: 28 }, min: 3, max: 30, source },
+    }),
+  ],
+  tasks: [],
+}
+
+test.each<[string, number, readonly string[]]>([
+  ['adults', 5, ['value: Longest use: from 7 to 90 h']],
+  ['adults', 60, []],
+  ['children', 5, []],
+  ['children', 60, ['value: Longest use, from 1 to 11 years: from 3 to 30 h']],
+])('a value for %s of %i is held against the range for them', (ruleSet, value, expected) => {
+  const { values, ...rest } = aContext([], '12:00')
+  const children = valuesFor({ ...values.policy, ruleSet: 'children' }, [], 'child')
+  const context = { ...rest, values: ruleSet === 'children' ? children : values }
+  const found = carePlan.problems?.({ ...own, setting: 'cannula-days', value }, context, ofAge)
+  expect(found?.map(({ field, message }) => `${field}: ${message}`)).toEqual(expected)
+})
+
 test.each(['ward-interval', 'strict', 'not-a-setting'])('%s cannot be set for one patient', setting => {
   expect(problemsOf({ ...own, setting })).toEqual(['setting: Choose a setting that may be set for one patient'])
 })
@@ -133,10 +156,19 @@ const standingOn = (now: string, ...plans: readonly CarePlanData[]) =>
   )
 
 test.each([
-  ['2026-03-12 23:59', 0],
-  ['2026-03-13 00:00', 1],
-])('a plan to be reviewed by 12-Mar-2026 warns at %s: %i', (now, count) => {
-  expect(standingOn(now, own)).toHaveLength(count)
+  ['2026-03-09 23:59', 2, []],
+  ['2026-03-10 00:00', 2, ['blue']],
+  ['2026-03-12 23:59', 2, ['blue']],
+  ['2026-03-13 00:00', 2, ['amber']],
+  ['2026-03-11 23:59', 0, []],
+  ['2026-03-12 00:00', 0, ['blue']],
+  ['2026-03-13 00:00', 0, ['amber']],
+  ['2026-03-05 00:00', 7, ['blue']],
+])('a plan to be reviewed by 12-Mar-2026, at %s with a notice of %i days: %j', (now, notice, levels) => {
+  const context = aContext([anEntry(carePlans, '2026-03-02 09:00', own)], now, {
+    policy: { 'care-plan-review-notice': notice },
+  })
+  expect(carePlan.standing?.(context).map(({ level }) => level)).toEqual(levels)
 })
 
 test('a passed review says whose value it is and what to do', () => {

@@ -1,12 +1,13 @@
 import { showDay } from '../../time/display.ts'
-import { localDay } from '../../time/zone.ts'
+import { addDays, localDay } from '../../time/zone.ts'
 import type { FormProblem, KnownNames } from '../form-problem.ts'
 import { type CareContext, careKind, wordsOf } from '../kind.ts'
-import type { AnySetting, SettingValue } from '../policy.ts'
+import type { AnySetting, PersonalValue, SettingValue } from '../policy.ts'
 import { sentence } from '../sentence.ts'
 import type { Warning } from '../warning.ts'
 import { personalValues } from './personal-values.ts'
 import { type CarePlanData, carePlans } from './schema.ts'
+import { reviewNotice } from './settings.ts'
 
 /** A patient's own number in place of the ward's, with its reason and review date; or the way back. */
 export const carePlan = careKind({
@@ -28,7 +29,8 @@ export const carePlan = careKind({
   ],
   summary: carePlanSentence,
   problems: planProblems,
-  standing: reviewsPassed,
+  settings: [reviewNotice],
+  standing: reviewsDue,
 })
 
 function carePlanSentence({ setting, step, value, reviewOn, reason }: CarePlanData): string {
@@ -44,7 +46,7 @@ function planProblems(data: CarePlanData, context: CareContext, known: KnownName
   if (!setting) return [{ field: 'setting', message: 'Choose a setting that may be set for one patient' }]
   if (data.step === 'set own value') {
     return [
-      ...rangeProblem(setting, data),
+      ...rangeProblem(context.values.judged(setting), data),
       ...bandProblem({ setting, value: data.value, field: 'value' }, context, known),
       ...reviewProblem(data, context),
     ]
@@ -52,7 +54,8 @@ function planProblems(data: CarePlanData, context: CareContext, known: KnownName
   if (!personalValues(context.record).some(value => value.setting === setting.name)) {
     return [{ field: 'step', message: `This patient has no own value for ${wordsOf(setting.name).toLowerCase()}` }]
   }
-  const value = context.values.policy.values[setting.name] ?? setting.default
+  const ward = context.values.judged(setting)
+  const value = context.values.policy.values[ward.name] ?? ward.default
   return bandProblem({ setting, value, field: 'step' }, context, known)
 }
 
@@ -84,16 +87,31 @@ function reviewProblem({ reviewOn }: CarePlanData, { now, ward }: CareContext): 
   return [{ field: 'reviewOn', message: 'Review date must not be in the past' }]
 }
 
-/** An own value whose review day has passed stays in force, and says so until someone looks at it again. */
-function reviewsPassed({ record, now, ward }: CareContext): readonly Warning[] {
+/** An own value to be looked at soon says so ahead; one whose review day has passed stays in force, and warns until someone looks at it. */
+function reviewsDue({ record, values, now, ward }: CareContext): readonly Warning[] {
   const today = localDay(now, ward.zone)
+  const from = addDays(today, values.of(reviewNotice))
   return personalValues(record)
-    .filter(({ reviewOn }) => reviewOn < today)
-    .map(({ setting, value, by, reviewOn }) => ({
-      name: `care-plan-review-${setting}`,
-      level: 'amber',
-      action: 'Review the care plan today: confirm the own value, or go back to ward policy.',
-      cause: `${wordsOf(setting)}: own value ${value}, set by ${by}, was to be reviewed by ${showDay(reviewOn)}.`,
-      source: 'Product proposal: an own value needs a review date',
-    }))
+    .filter(({ reviewOn }) => reviewOn <= from)
+    .map(value => reviewWarning(value, value.reviewOn < today))
+}
+
+function reviewWarning({ setting, value, by, reviewOn }: PersonalValue, isPast: boolean): Warning {
+  const whose = `${wordsOf(setting)}: own value ${value}, set by ${by},`
+  const source = 'Product proposal: an own value needs a review date'
+  return isPast
+    ? {
+        name: `care-plan-review-${setting}`,
+        level: 'amber',
+        action: 'Review the care plan today: confirm the own value, or go back to ward policy.',
+        cause: `${whose} was to be reviewed by ${showDay(reviewOn)}.`,
+        source,
+      }
+    : {
+        name: `care-plan-review-soon-${setting}`,
+        level: 'blue',
+        action: `Plan the review of the care plan by ${showDay(reviewOn)}.`,
+        cause: `${whose} stays in force until someone confirms it or goes back to ward policy.`,
+        source,
+      }
 }
