@@ -185,3 +185,8 @@ export function valuesFor(policy: Policy, personal: readonly PersonalValue[] = [
     personal: personalOf,
   }
 }
+
+/** What a ward's policy says of a setting, apart from any patient; the product's default where no policy is in force. */
+export function valueUnder<Value extends SettingValue>(policy: Policy | undefined, setting: Setting<Value>): Value {
+  return policy ? valuesFor(policy).of(setting) : setting.default
+}

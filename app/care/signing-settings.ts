@@ -42,8 +42,19 @@ export const competenceNotice = numberSetting({
   default: 30,
   min: 7,
   max: 120,
-  affects: 'Staff competence: the list of what runs out soon.',
+  affects: 'Staff competence: the list of what runs out soon, and the reminder to whom it concerns.',
   source: { says: 'Time to arrange an assessment; no published number found', standing: 'product proposal' },
 })
 
-export const signingSettings = [freshSignIn, secondPersonSigns, competenceMonths, competenceNotice]
+export const competenceShiftDays = numberSetting({
+  name: 'competence-shift-days',
+  label: 'Shifts without somebody in date are counted over the last',
+  unit: 'days',
+  default: 7,
+  min: 3,
+  max: 28,
+  affects: 'Staff competence: gaps by shift, from who charted.',
+  source: { says: 'No published number', standing: 'product proposal' },
+})
+
+export const signingSettings = [freshSignIn, secondPersonSigns, competenceMonths, competenceNotice, competenceShiftDays]

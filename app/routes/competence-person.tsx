@@ -6,6 +6,7 @@ import { traceOf } from '#app/auth/trace.server.ts'
 import { levels, type Skill, skills, standingWords } from '#app/care/skills.ts'
 import { LinkButton } from '#app/components/button.tsx'
 import { Card } from '#app/components/card.tsx'
+import { CompetenceReminders } from '#app/components/competence-reminders.tsx'
 import { DataList } from '#app/components/data-list.tsx'
 import { SignOffForm } from '#app/components/sign-off-form.tsx'
 import { SignOffHistory } from '#app/components/sign-off-history.tsx'
@@ -14,6 +15,7 @@ import { skillsAskedFor, standingIn } from '#app/rules/competence.ts'
 import { sentForm } from '#app/sent-form.server.ts'
 import { showDateTime, showDay } from '#app/time/display.ts'
 import { openedCompetence } from '#app/views/competence.server.ts'
+import { remindersOf } from '#app/views/competence-reminders.server.ts'
 import { signedOff } from '#app/views/sign-off.server.ts'
 import type { Route } from './+types/competence-person.ts'
 
@@ -23,10 +25,12 @@ export const meta: Route.MetaFunction = ({ loaderData }) => [
 
 export async function loader({ params: { userId }, context, url }: Route.LoaderArgs) {
   const user = signedIn(context)
-  const opened = await openedCompetence(user, userId, new Date())
+  const now = new Date()
+  const opened = await openedCompetence(user, userId, now)
   if (!opened) throw data('There is no such person.', 404)
   const { person, signOffs, assessable, today } = opened
   return {
+    reminders: await remindersOf(person, signOffs, person.wards[0]?.id, now),
     ...{ id: uuidv7(), name: person.name, role: person.role, email: user.email, today },
     isSigned: url.searchParams.has('signed'),
     mayList: can(user, 'see competence gaps'),
@@ -73,6 +77,7 @@ export default function PersonCompetence({ loaderData: view, actionData }: Route
       <div role="status" className="empty:-mb-4">
         {view.isSigned && !actionData && <p className="font-semibold text-brand">Signed.</p>}
       </div>
+      <CompetenceReminders reminders={view.reminders} />
       <Card title="Skills that an act asks for">
         <DataList items={view.asked} />
       </Card>

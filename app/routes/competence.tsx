@@ -4,7 +4,7 @@ import { can } from '#app/auth/permissions.ts'
 import { signedIn } from '#app/auth/signed-in.server.ts'
 import { Card } from '#app/components/card.tsx'
 import { Table } from '#app/components/table.tsx'
-import { type GapLine, wardGaps } from '#app/views/competence.server.ts'
+import { type GapLine, type WardGaps, wardGaps } from '#app/views/competence.server.ts'
 import type { Route } from './+types/competence.ts'
 
 export const meta: Route.MetaFunction = () => [{ title: 'Staff competence | Cannulary' }]
@@ -26,8 +26,9 @@ export default function Competence({ loaderData: { wards, ownHref } }: Route.Com
         </Link>
       </header>
       <p className="max-w-prose text-ink2">
-        Registered staff who chart, and the skills that an act asks for. Listed by ward: who works which shift is not
-        kept here. Nobody is kept from charting by a gap; the entry says so.
+        Registered staff who chart, and the skills that an act asks for. Nobody is kept from charting by a gap; the
+        entry says so. No roster is kept here: a person counts for the shifts in which they charted, and a shift in
+        which nobody charted is left out.
       </p>
       {wards.map(ward => (
         <section key={ward.id} aria-label={ward.name} className="grid gap-4">
@@ -38,9 +39,33 @@ export default function Competence({ loaderData: { wards, ownHref } }: Route.Com
           <Card title={`Runs out within ${ward.noticeDays} days: ${ward.expiring.length}`} flush>
             <Lines caption={`Runs out soon on ${ward.name}`} lines={ward.expiring} none="Nothing runs out." />
           </Card>
+          <ShiftCard ward={ward.name} cover={ward.byShift} />
         </section>
       ))}
     </div>
+  )
+}
+
+interface ShiftCardProps {
+  readonly ward: string
+  readonly cover: WardGaps['byShift']
+}
+
+function ShiftCard({ ward, cover: { days, lines } }: ShiftCardProps) {
+  return (
+    <Card title={`Shifts without anybody in date, last ${days} days`} flush>
+      {lines.length === 0 ? (
+        <p className="p-4 text-ink2">In every shift somebody in date charted.</p>
+      ) : (
+        <Table
+          caption={`Gaps by shift on ${ward}`}
+          columns={['Shift', 'Skill', 'Nobody in date charted in', 'Such acts in those shifts'].map(label => ({
+            label,
+          }))}
+          rows={lines.map(({ key, shift, skill, without, acts }) => ({ key, cells: [shift, skill, without, acts] }))}
+        />
+      )}
+    </Card>
   )
 }
 

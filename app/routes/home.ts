@@ -8,7 +8,9 @@ export function loader({ context }: Route.LoaderArgs) {
   const user = signedIn(context)
   const [ward] = ownSession(context).wards
   if (can(user, 'manage people')) return redirect('/admin/people')
-  if (ward === undefined || !can(user, 'see ward', ward.id)) return redirect('/policy')
+  if (ward === undefined || !can(user, 'see ward', ward.id)) {
+    return redirect(can(user, 'sign off competence') ? '/competence' : '/policy')
+  }
   return redirect(
     can(user, 'chart care', ward.id) && !can(user, 'manage policy', ward.id) ? '/round' : `/wards/${ward.id}/board`,
   )

@@ -1,5 +1,13 @@
 import { expect, test } from 'vitest'
-import { assesses, competenceGaps, monthsLater, type SignOff, signOffIn, standingIn } from './competence.ts'
+import {
+  assesses,
+  competenceGaps,
+  competenceReminders,
+  monthsLater,
+  type SignOff,
+  signOffIn,
+  standingIn,
+} from './competence.ts'
 
 const skill = 'tube change, performing'
 const today = '2026-12-01'
@@ -81,4 +89,18 @@ test.each([
 
 test('there is no sign-off in a skill that nobody assessed', () => {
   expect(signOffIn([], skill)).toBeUndefined()
+})
+
+test.each<[string, readonly SignOff[], readonly string[]]>([
+  ['never signed off', [], []],
+  ['signed off for long', [signOff()], []],
+  ['running out on the last day of notice', [signOff({ expiresOn: '2026-12-31' })], ['held 2026-12-31']],
+  ['running out a day after that', [signOff({ expiresOn: '2027-01-01' })], []],
+  ['running out today', [signOff({ expiresOn: today })], ['held 2026-12-01']],
+  ['out of date', [signOff({ expiresOn: '2026-11-30' })], ['out of date 2026-11-30']],
+  ['renewed in time', [signOff({ expiresOn: today }), signOff({ id: '2', signedAt: later })], []],
+])('somebody %s is reminded of %j', (_, signOffs, expected) => {
+  const about = { today, noticeDays: 30, asked: [skill] } as const
+  const found = competenceReminders({ id: 'nurse' }, signOffs, about)
+  expect(found.map(({ standing, expiresOn }) => `${standing} ${expiresOn}`)).toEqual(expected)
 })

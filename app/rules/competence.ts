@@ -80,6 +80,16 @@ export function competenceGaps<Person extends { readonly id: string }>(
   }
 }
 
+/** What somebody held that is out of date, or soon will be: what they are reminded of. */
+export function competenceReminders<Person extends { readonly id: string }>(
+  person: Person,
+  signOffs: readonly SignOff[],
+  about: Parameters<typeof competenceGaps<Person>>[2],
+): readonly Gap<Person>[] {
+  const { gaps, expiring } = competenceGaps([person], signOffs, about)
+  return [...gaps.filter(({ standing }) => standing === 'out of date'), ...expiring]
+}
+
 /** The same day so many months later, or the last day of a shorter month: `2026-08-31` and 6 give `2027-02-28`. */
 export function monthsLater(day: LocalDay, months: number): LocalDay {
   const [year = 0, month = 0, date = 0] = day.split('-').map(Number)

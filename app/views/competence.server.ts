@@ -1,5 +1,5 @@
 import { type CurrentUser, can } from '#app/auth/permissions.ts'
-import { policyInForce, type Values, valuesFor } from '#app/care/policy.ts'
+import { policyInForce, valueUnder } from '#app/care/policy.ts'
 import { competenceMonths, competenceNotice } from '#app/care/signing-settings.ts'
 import { type Skill, skills, standingWords } from '#app/care/skills.ts'
 import { env } from '#app/env.server.ts'
@@ -10,6 +10,7 @@ import { type Staff, signOffsOf, staffOf } from '#database/competences.server.ts
 import { policies } from '#database/policies.server.ts'
 import { type Person, person } from '#database/users.server.ts'
 import { allWards } from '#database/wards.server.ts'
+import { type ShiftCover, shiftCover, writingOf } from './shift-cover.server.ts'
 
 /** One line of the list of a ward. */
 export interface GapLine {
@@ -29,22 +30,27 @@ export interface WardGaps {
   readonly gaps: readonly GapLine[]
   readonly expiring: readonly GapLine[]
   readonly noticeDays: number
+  readonly byShift: ShiftCover
 }
 
-/** The gaps of every ward that this person keeps an eye on; two queries for all of them. */
+/** The gaps of every ward that this person keeps an eye on; four queries for all of them. */
 export async function wardGaps(user: CurrentUser, now: Date): Promise<readonly WardGaps[]> {
   const wards = (await allWards()).filter(({ id, retired }) => !retired && can(user, 'see competence gaps', id))
-  const staff = await staffOf(wards.map(({ id }) => id))
-  const signOffs = await signOffsOf([...new Set(staff.map(({ id }) => id))])
-  const today = localDay(now, env.hospitalTimeZone)
   const known = await policies()
-  return wards.map(({ id, name }) => {
+  const written = await writingOf(wards, known, now)
+  const staff = await staffOf(wards.map(({ id }) => id))
+  const signOffs = await signOffsOf([
+    ...new Set([...staff.map(({ id }) => id), ...written.map(({ userId }) => userId)]),
+  ])
+  const today = localDay(now, env.hospitalTimeZone)
+  return wards.map(ward => {
+    const { id, name } = ward
     const people = staff.filter(one => one.wardId === id && can({ role: one.role, wardIds: [id] }, 'chart care', id))
-    const policy = policyInForce(known, id, now)
-    const noticeDays = policy ? valuesFor(policy).of(competenceNotice) : competenceNotice.default
+    const noticeDays = valueUnder(policyInForce(known, id, now), competenceNotice)
     const { gaps, expiring } = competenceGaps(people, signOffs, { today, noticeDays, asked: skillsAskedFor() })
     const lines = (found: readonly Gap<Staff>[]) => found.map(gapLine)
-    return { id, name, people: people.length, gaps: lines(gaps), expiring: lines(expiring), noticeDays }
+    const byShift = shiftCover(ward, { written, signOffs, policy: policyInForce(known, id, now), now })
+    return { id, name, people: people.length, gaps: lines(gaps), expiring: lines(expiring), noticeDays, byShift }
   })
 }
 
@@ -92,6 +98,5 @@ async function assessableBy(user: CurrentUser, wardIds: readonly string[], today
 export async function lastDay(person: Person, assessedOn: LocalDay, now: Date): Promise<LocalDay> {
   const [ward] = person.wards
   const policy = ward && policyInForce(await policies(), ward.id, now)
-  const values: Values | undefined = policy && valuesFor(policy)
-  return monthsLater(assessedOn, values?.of(competenceMonths) ?? competenceMonths.default)
+  return monthsLater(assessedOn, valueUnder(policy, competenceMonths))
 }

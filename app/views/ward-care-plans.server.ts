@@ -1,7 +1,7 @@
 import { personalValues } from '#app/care/care-plan/personal-values.ts'
 import { reviewNotice } from '#app/care/care-plan/settings.ts'
 import { careSettings } from '#app/care/kinds.ts'
-import { policyInForce, valuesFor } from '#app/care/policy.ts'
+import { policyInForce, valueUnder } from '#app/care/policy.ts'
 import { env } from '#app/env.server.ts'
 import { showValue } from '#app/rules/why.ts'
 import { showDateTime, showDay } from '#app/time/display.ts'
@@ -33,8 +33,7 @@ export async function wardCarePlans(wardId: string, now: Date): Promise<readonly
   const { stays } = await wardRecords(wardId)
   const zone = env.hospitalTimeZone
   const today = localDay(now, zone)
-  const policy = policyInForce(await policies(), wardId, now)
-  const notice = policy ? valuesFor(policy).of(reviewNotice) : reviewNotice.default
+  const notice = valueUnder(policyInForce(await policies(), wardId, now), reviewNotice)
   return stays
     .flatMap(stay =>
       personalValues(recordOf(stay)).map(({ setting, value, reason, reviewOn, by, since }) => {

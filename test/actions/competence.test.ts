@@ -2,10 +2,13 @@ import { QueryTypes } from 'sequelize'
 import { v7 as uuidv7 } from 'uuid'
 import { beforeEach, expect, test } from 'vitest'
 import type { CurrentUser } from '#app/auth/permissions.ts'
+import type { AnyCareKind } from '#app/care/kind.ts'
+import { careKinds } from '#app/care/kinds.ts'
 import { aTube } from '#app/care/make.ts'
 import { tubeChange } from '#app/care/tube-change/kind.ts'
 import { loader as list } from '#app/routes/competence.tsx'
 import { action, loader } from '#app/routes/competence-person.tsx'
+import { loader as round } from '#app/routes/round.tsx'
 import { sequelize } from '#database/sequelize.server.ts'
 import { aCharting, chart, openedForm, wholeForm } from '#test/charting.ts'
 import { cleared, owner } from '#test/database.ts'
@@ -41,6 +44,12 @@ function listed(user: CurrentUser) {
   const request = new Request(`${site}/competence`)
   const args = { request, url: new URL(request.url), context: contextOf(user), params: {} }
   return answerOf(() => list({ ...args, pattern: '/competence' }))
+}
+
+async function roundOf(user: CurrentUser) {
+  const request = new Request(`${site}/round`)
+  const args = { request, url: new URL(request.url), context: contextOf(user), params: {} }
+  return answerOf(() => round({ ...args, pattern: '/round' }))
 }
 
 const stored = () =>
@@ -110,11 +119,28 @@ test('what is withdrawn counts no more and stays readable', async () => {
   expect(asked).toContainEqual({ label: 'Tube change, performing', value: 'no sign-off' })
 })
 
-test('an act without its competence warns, is charted, and the entry says so', async () => {
-  expect((await openedForm(given.nurse, given.patientId, tubeChange.slug)).signing?.lacks).toMatch(/no sign-off/)
-  const form = wholeForm(tubeChange, given.nurse, aTube())
-  expect(await chart(given.nurse, given.patientId, tubeChange.slug, form)).toMatchObject({ status: 302 })
-  expect(await competenceThen()).toBe('missing')
+const asking = careKinds.filter((kind: AnyCareKind) => kind.needsCompetence !== undefined)
+
+test('a tube change, a removal and a trial with valve or cap ask for a skill', () => {
+  expect(asking.map(({ title }) => title)).toEqual(['Tube change', 'Weaning trial', 'Tube removal for good'])
+})
+
+test.each(asking.map((kind): [string, AnyCareKind] => [kind.title, kind]))(
+  '%s without its competence warns, is charted, and the entry says so',
+  async (_, kind) => {
+    expect((await openedForm(given.nurse, given.patientId, kind.slug)).signing?.lacks).toMatch(/no sign-off/)
+    const form = wholeForm(kind, given.nurse)
+    expect(await chart(given.nurse, given.patientId, kind.slug, form)).toMatchObject({ status: 302 })
+    expect(await competenceThen()).toBe('missing')
+  },
+)
+
+test('a sign-off that ran out reminds the person on their own page and on their round', async () => {
+  expect(await opened(given.nurse, given.nurse.id)).toMatchObject({ reminders: [] })
+  await send(educator, given.nurse.id, { assessedOn: '2024-02-29' })
+  const says = ['Tube change, performing: the sign-off ran out on 28-Feb-2025.']
+  expect(await opened(given.nurse, given.nurse.id)).toMatchObject({ reminders: says })
+  expect(await roundOf(given.nurse)).toMatchObject({ reminders: { lines: says } })
 })
 
 test('an act with its competence does not', async () => {

@@ -142,6 +142,7 @@ const rows: readonly Row[] = [
   // Staff competence (7.4)
   ['competence-months', 12, 'P', 'no published number'],
   ['competence-notice', 30, 'P', 'no published number'],
+  ['competence-shift-days', 7, 'P', 'No published number'],
   // Supplies (7.2)
   ['supply-wastage', 20, 'P', 'no published share'],
   ['supply-lead-days', 3, 'P', 'those of the own store'],
