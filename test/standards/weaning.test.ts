@@ -1,4 +1,6 @@
 import { expect, test } from 'vitest'
+import { mlPerHour } from '#app/care/above-cuff-suction/rate.ts'
+import { aboveCuffSuctions } from '#app/care/above-cuff-suction/schema.ts'
 import { coughChecks } from '#app/care/cough-strength/schema.ts'
 import { coughVerdict } from '#app/care/cough-strength/verdict.ts'
 import { cuffPressure } from '#app/care/cuff-pressure/kind.ts'
@@ -11,12 +13,14 @@ import { observationSets } from '#app/care/observations/schema.ts'
 import { observationWarnings } from '#app/care/observations/warnings.ts'
 import { type Graded, secretionScore } from '#app/care/secretion-grade/score.ts'
 import { tubeChanges } from '#app/care/tube-change/schema.ts'
+import { criteriaOf, unmetCriteria } from '#app/care/weaning-plan/criteria.ts'
 import { weaningPlan } from '#app/care/weaning-plan/kind.ts'
 import { valveEnd, valveStart } from '#app/care/weaning-trial/examples.ts'
 import { weaningTrial } from '#app/care/weaning-trial/kind.ts'
 import { type TrialName, weaningTrials } from '#app/care/weaning-trial/schema.ts'
 import { trialsOf } from '#app/care/weaning-trial/trials.ts'
 import { trialVerdict } from '#app/care/weaning-trial/verdict.ts'
+import { hours } from '#app/time/duration.ts'
 
 /* Weaning, cough, secretions and removal against published values and the check rows of the clinical reference (9). */
 
@@ -69,6 +73,19 @@ test.each([
 ] as const)('C-43 cough flow at %s of %i L/min is %s', (route, peakFlow, verdict) => {
   const data = coughChecks.schema.parse({ route, peakFlow, assisted: 'no' })
   expect(coughVerdict(data, values)?.verdict).toBe(verdict)
+})
+
+// Pryor 2016: at most 1 mL an hour above the cuff speaks for letting it down.
+test.each([
+  [6, 1.0, 'met', []],
+  [9, 1.5, 'not met', ['1.5 mL an hour above the cuff']],
+])('C-44 above the cuff %d mL in 6 h is %d mL an hour: %s', (volumeMl, rate, state, unmet) => {
+  const drawn = (when: string, ml: number) =>
+    anEntry(aboveCuffSuctions, when, { volumeMl: ml, port: 'open', blood: 'none' })
+  const context = aContext([tube, drawn('04:00', 3), drawn('10:00', volumeMl)], '12:00')
+  expect(mlPerHour(volumeMl, hours(6))).toBe(rate)
+  expect(criteriaOf('cuff', context).find(({ name }) => name === 'above cuff')).toMatchObject({ state })
+  expect(unmetCriteria('cuff', context)).toEqual(unmet)
 })
 
 // Airway Care Score, Critical Care 2008, table 1: rows are grades 0 to 3.

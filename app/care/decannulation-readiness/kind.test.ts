@@ -21,12 +21,12 @@ test('each criterion stands by its latest answer, with its time and reason', () 
     'yes',
     'no',
   ])
-  expect(criteria[6]).toEqual({
+  expect(criteria[6]).toMatchObject({
     name: 'swallow',
     label: 'Effective swallow',
     isCore: true,
     answer: 'not assessed',
-    at: at('10:00'),
+    entry: { performedAt: at('10:00') },
     reason: 'Scope booked for Thursday',
   })
 })
@@ -34,7 +34,7 @@ test('each criterion stands by its latest answer, with its time and reason', () 
 test('what was never asked is not assessed, and has no time', () => {
   const criteria = readinessOf(aContext([], '12:00').record)
   expect(criteria).toHaveLength(14)
-  expect(new Set(criteria.map(({ answer, at: when }) => `${answer} ${String(when)}`))).toEqual(
+  expect(new Set(criteria.map(({ answer, entry }) => `${answer} ${String(entry)}`))).toEqual(
     new Set(['not assessed undefined']),
   )
 })

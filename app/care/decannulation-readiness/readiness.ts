@@ -1,4 +1,4 @@
-import type { PatientRecord } from '../kind.ts'
+import type { Entry, PatientRecord } from '../kind.ts'
 import { coreCriteria, furtherCriteria, type ReadinessData, readinessChecks } from './schema.ts'
 
 export type CriterionName = keyof typeof coreCriteria | keyof typeof furtherCriteria
@@ -10,8 +10,8 @@ export interface Criterion {
   /** One of the ten of the core set, as against what Ceriana adds. */
   readonly isCore: boolean
   readonly answer: 'yes' | 'no' | 'not assessed'
-  /** When that was answered; absent when nobody has yet. */
-  readonly at?: Date
+  /** The checklist that has this answer; absent when nobody has answered yet. */
+  readonly entry?: Entry<ReadinessData>
   /** Why it was not assessed, where that is the answer. */
   readonly reason?: string
 }
@@ -32,7 +32,7 @@ function listed<Name extends CriterionName>(
     const answer = entry?.data[name]
     if (!entry || answer === undefined) return { ...about, answer: 'not assessed' }
     const reason = reasonOf(name, entry.data)
-    return { ...about, answer, at: entry.performedAt, ...(reason === undefined ? {} : { reason }) }
+    return { ...about, answer, entry, ...(reason === undefined ? {} : { reason }) }
   })
 }
 

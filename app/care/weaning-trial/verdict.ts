@@ -11,6 +11,11 @@ const targets: Readonly<Record<TrialName, Setting<number>>> = {
   cap: capTrialTarget,
 }
 
+/** The number that a trial is held against. */
+export function trialSetting(name: TrialName): Setting<number> {
+  return targets[name]
+}
+
 /** How long a trial has to be borne to be passed, by policy or care plan. */
 export function targetOf(name: TrialName, values: Values): Duration {
   return hours(values.of(targets[name]))
