@@ -24,6 +24,7 @@ export async function staysOf(patientId: string): Promise<readonly Stay[]> {
 
 /** A patient came to a bed. The first of a stay is the admission. */
 export type BedMove = {
+  readonly wardId: string
   readonly wardName: string
   readonly bedLabel: string
   readonly movedAt: Date
@@ -34,7 +35,7 @@ export type BedMove = {
 /** The beds of a stay, the latest first. */
 export async function bedMovesOf(stayId: string): Promise<readonly BedMove[]> {
   return select<BedMove>(
-    `SELECT w.name AS wardName, b.label AS bedLabel, m.moved_at AS movedAt, m.recorded_at AS recordedAt,
+    `SELECT m.ward_id AS wardId, w.name AS wardName, b.label AS bedLabel, m.moved_at AS movedAt, m.recorded_at AS recordedAt,
        u.name AS recordedByName
      FROM bed_moves m JOIN wards w ON w.id = m.ward_id JOIN beds b ON b.id = m.bed_id JOIN users u ON u.id = m.recorded_by
      WHERE m.stay_id = :stayId ORDER BY m.moved_at DESC, m.recorded_at DESC`,

@@ -11,6 +11,7 @@ import type { PolicyCheck } from './policy-check.ts'
 import type { RunningAct } from './running-act.ts'
 import type { SigningNeeds } from './signing-needs.ts'
 import type { PlannedUse, Used } from './supply.ts'
+import type { Trend } from './trend.ts'
 import type { Warning } from './warning.ts'
 
 export type { BedMove, PatientFacts, WardFacts } from './facts.ts'
@@ -133,6 +134,8 @@ export interface CareKind<Slug extends string, Schema extends z.ZodObject>
    */
   notOffered?(context: CareContext): Readonly<Record<string, readonly string[]>>
   gauges?(context: CareContext): readonly Gauge[]
+  /** What the page of trends shows of these acts. */
+  readonly trends?: readonly Trend<z.output<Schema>>[]
   /** Warnings about this act; `context.record` does not hold it yet, `context.now` is when it was done. */
   warnings?(data: z.output<Schema>, context: CareContext): readonly Warning[]
   /** Warnings that stand for as long as the record says so. */

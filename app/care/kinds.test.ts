@@ -126,6 +126,31 @@ describe.each(kinds.map(kind => [kind.slug, kind] as const))('%s', (slug, kind) 
     }
   })
 
+  test.each(examples)('shows numbers, rows and words of an example in its trends: %j', example => {
+    const before = aContext([], '12:00')
+    for (const trend of kind.trends ?? []) {
+      if (trend.shape === 'measure') {
+        const { measure } = trend
+        const { from, to } = measure.range(before.ward)
+        expect(from).toBeLessThan(to)
+        expect(measure.unit(before.ward)).not.toBe('')
+        for (const { mark, value } of trend.reading(example, before)?.values ?? []) {
+          expect(Object.keys(measure.marks)).toContain(mark)
+          expect(measure.show(value, before.ward)).toMatch(/^\d/)
+        }
+      } else if (trend.shape === 'findings') {
+        for (const { row, words } of trend.seen(example)) {
+          expect(Object.keys(trend.rows)).toContain(row)
+          expect(words).toMatch(/^[A-Z]/)
+        }
+      } else {
+        const record = aContext([anEntry(kind, '11:00', example)], '12:00')
+        const lengths = trend.lengths({ record: record.record, now: record.now, at: () => record })
+        for (const { group } of lengths) expect(Object.keys(trend.groups)).toContain(group)
+      }
+    }
+  })
+
   test.each(examples)('warns with an action, a cause and a source, and red with the local plan: %j', example => {
     const before = aContext([], '12:00')
     const after = aContext([anEntry(kind, '11:00', example)], '12:00')

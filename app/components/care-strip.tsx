@@ -58,15 +58,16 @@ function kindLanes(care: CareView, now: number, zone: Zone): readonly StripLane[
 }
 
 interface SpanChoiceProps {
+  readonly label?: string
   readonly names: readonly string[]
   readonly current: string
   readonly href: (name: string) => string
 }
 
 /** The spans to choose from, as links: they work without scripts and can be kept. */
-export function SpanChoice({ names, current, href }: SpanChoiceProps) {
+export function SpanChoice({ label = 'Span of the strip', names, current, href }: SpanChoiceProps) {
   return (
-    <nav aria-label="Span of the strip" className="flex gap-2 print:hidden">
+    <nav aria-label={label} className="flex flex-wrap gap-2 print:hidden">
       {names.map(name => (
         <Link
           key={name}

@@ -9,7 +9,7 @@ interface StretchedProps {
 }
 
 /** A space 1000 wide that is stretched to the strip. Lines in it keep their thickness, so a line of no length is a round dot. */
-function Stretched({ height, children }: StretchedProps) {
+export function Stretched({ height, children }: StretchedProps) {
   return (
     <svg aria-hidden="true" viewBox={`0 0 1000 ${height}`} width="100%" height={height} preserveAspectRatio="none">
       {children}

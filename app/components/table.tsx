@@ -16,22 +16,26 @@ export interface TableProps {
   readonly captionShown?: boolean
   readonly columns: readonly Column[]
   readonly rows: readonly Row[]
+  /** Many rows beside something else: it scrolls downwards within itself, under its headings. */
+  readonly isTall?: boolean
 }
 
 /** Rows of the same facts. Wider than the screen, it scrolls within itself. */
-export function Table({ caption, captionShown = false, columns, rows }: TableProps) {
+export function Table({ caption, captionShown = false, columns, rows, isTall = false }: TableProps) {
+  const pad = isTall ? 'px-2 py-0.5 sm:px-3' : 'px-4 py-2.5'
+  const room = isTall ? 'max-h-104 overflow-auto print:max-h-none' : 'overflow-x-auto'
   return (
     // biome-ignore lint/a11y/noNoninteractiveTabindex: a region that scrolls must be reachable by keyboard
-    <section tabIndex={0} aria-label={caption} className="overflow-x-auto print:overflow-visible">
+    <section tabIndex={0} aria-label={caption} className={`${room} print:overflow-visible`}>
       <table className="w-full border-collapse text-left">
         <caption className={captionShown ? 'px-4 py-2 text-left font-semibold' : 'sr-only'}>{caption}</caption>
-        <thead>
+        <thead className={isTall ? 'sticky top-0 bg-surface print:static' : ''}>
           <tr className="border-b border-line text-sm text-ink2">
             {columns.map(column => (
               <th
                 key={column.label}
                 scope="col"
-                className={`px-4 py-2 font-semibold ${column.numeric ? 'whitespace-nowrap' : ''} ${aligned(column)}`}
+                className={`${isTall ? 'px-2 sm:px-3' : 'px-4'} py-2 font-semibold ${column.numeric ? 'whitespace-nowrap' : ''} ${aligned(column)}`}
               >
                 {column.label}
               </th>
@@ -43,11 +47,11 @@ export function Table({ caption, captionShown = false, columns, rows }: TablePro
             <tr key={row.key} className={`border-b border-hair last:border-0 ${row.className ?? ''}`}>
               {columns.map((column, index) =>
                 index === 0 ? (
-                  <th key={column.label} scope="row" className={`px-4 py-2.5 font-semibold ${aligned(column)}`}>
+                  <th key={column.label} scope="row" className={`${pad} font-semibold ${aligned(column)}`}>
                     {row.cells[index]}
                   </th>
                 ) : (
-                  <td key={column.label} className={`px-4 py-2.5 ${aligned(column)}`}>
+                  <td key={column.label} className={`${pad} ${aligned(column)}`}>
                     {row.cells[index]}
                   </td>
                 ),

@@ -4,6 +4,7 @@ import { sentence } from '../sentence.ts'
 import { type AfterRemovalData, afterRemovals, voices } from './schema.ts'
 import { afterRemovalSettings } from './settings.ts'
 import { afterRemovalTasks } from './tasks.ts'
+import { afterRemovalTrends } from './trends.ts'
 import { afterRemovalWarnings, standingAfterRemoval } from './warnings.ts'
 
 const well: AfterRemovalData = {
@@ -33,6 +34,7 @@ export const afterRemoval = careKind({
   summary: afterRemovalSentence,
   settings: afterRemovalSettings,
   tasks: afterRemovalTasks,
+  trends: afterRemovalTrends,
   warnings: afterRemovalWarnings,
   standing: standingAfterRemoval,
   outOfRange: (data, context) => afterRemovalWarnings(data, context).length > 0,

@@ -5,6 +5,7 @@ import { cuffChecks } from './schema.ts'
 import { cuffSentence } from './sentence.ts'
 import { cuffLower, cuffSettings, cuffUpper } from './settings.ts'
 import { cuffTasks } from './tasks.ts'
+import { cuffTrends } from './trends.ts'
 import { cuffWarnings, standingCuffWarnings } from './warnings.ts'
 
 /** The pressure in the cuff, and the cuff let down or inflated. */
@@ -35,6 +36,7 @@ export const cuffPressure = careKind({
     const [lower, upper] = [values.of(cuffLower), values.of(cuffUpper)]
     return ['found', 'leftAt'].map(field => ({ field, unitField: 'unit', lower, upper, max: 50, unit: 'cmH2O' }))
   },
+  trends: cuffTrends,
   warnings: cuffWarnings,
   standing: standingCuffWarnings,
   outOfRange: (data, context) => {

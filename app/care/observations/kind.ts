@@ -5,6 +5,7 @@ import { observationSets } from './schema.ts'
 import { observationSentence } from './sentence.ts'
 import { observationSettings } from './settings.ts'
 import { observationTasks } from './tasks.ts'
+import { observationTrends } from './trends.ts'
 import { observationWarnings, standingObservationWarnings } from './warnings.ts'
 
 /** Breathing, oxygen, heart and consciousness. There is no usual answer: everything in it is measured. */
@@ -20,6 +21,7 @@ export const observations = careKind({
   settings: observationSettings,
   checks: observationChecks,
   tasks: observationTasks,
+  trends: observationTrends,
   warnings: observationWarnings,
   standing: standingObservationWarnings,
   outOfRange: (data, context) => observationWarnings(data, context).length > 0,

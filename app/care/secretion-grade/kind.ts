@@ -3,6 +3,7 @@ import { sentence } from '../sentence.ts'
 import { bleedWindowFrom, bleedWindowTo, streaksAreRed } from '../suction/bleeding-settings.ts'
 import { colourFlags, type SecretionGradeData, scoreColumns, secretionGrades } from './schema.ts'
 import { secretionScore } from './score.ts'
+import { secretionTrends } from './trends.ts'
 import { secretionGradeWarnings, standingSecretionWarnings } from './warnings.ts'
 
 /** Secretions by published grades with their sum, so that days can be compared. */
@@ -35,6 +36,7 @@ export const secretionGrade = careKind({
   ],
   summary: gradeSentence,
   settings: [bleedWindowFrom, bleedWindowTo, streaksAreRed],
+  trends: secretionTrends,
   warnings: secretionGradeWarnings,
   standing: standingSecretionWarnings,
   outOfRange: (data, context) => secretionGradeWarnings(data, context).some(({ level }) => level !== 'blue'),

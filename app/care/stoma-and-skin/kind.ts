@@ -7,6 +7,7 @@ import { stomaSentence } from './sentence.ts'
 import { stomaSettings } from './settings.ts'
 import { plannedDressings, stomaUse } from './supplies.ts'
 import { stomaTasks } from './tasks.ts'
+import { stomaTrends } from './trends.ts'
 import { isOutOfRange, standingStomaWarnings, stomaWarnings } from './warnings.ts'
 
 /** That there are no sutures is a fact where a tube is charted; where none is, nobody has said so. */
@@ -34,6 +35,7 @@ export const stomaAndSkin = careKind({
     },
   uses: stomaUse,
   plannedUse: plannedDressings,
+  trends: stomaTrends,
   warnings: stomaWarnings,
   standing: standingStomaWarnings,
   outOfRange: isOutOfRange,

@@ -70,7 +70,8 @@ export function skinWords({ skin: finding, stage, findingSite, sizeMm }: StomaDa
   ].join(', ')
 }
 
-function stageWords(stage: NonNullable<StomaData['stage']>): string {
+/** `Stage 2 pressure injury`, `Deep tissue injury`. */
+export function stageWords(stage: NonNullable<StomaData['stage']>): string {
   return stage === 'deep-tissue' ? stageTitles[stage] : `${stageTitles[stage]} pressure injury`
 }
 

@@ -8,6 +8,7 @@ import { weaningTrialExamples } from './examples.ts'
 import { weaningTrials } from './schema.ts'
 import { weaningTrialSentence } from './sentence.ts'
 import { weaningTrialSettings } from './settings.ts'
+import { trialTrends } from './trends.ts'
 import { onTheHub, runningTrials } from './trials.ts'
 import { targetOf } from './verdict.ts'
 import { standingTrialWarnings, weaningTrialWarnings } from './warnings.ts'
@@ -29,6 +30,7 @@ export const weaningTrial = careKind({
   settings: weaningTrialSettings,
   tasks: [plannedTrial],
   running: runningActs,
+  trends: trialTrends,
   warnings: weaningTrialWarnings,
   standing: standingTrialWarnings,
   outOfRange: (data, context) => weaningTrialWarnings(data, context).some(({ level }) => level !== 'blue'),

@@ -30,5 +30,6 @@ function preparedWords({ airflow, suctionFirst, supervised }: WeaningTrialData):
     .join(', ')
 }
 
-/** SpO2 keeps its capitals. */
-const lower = (label: string): string => (label === 'SpO2' ? label : label.charAt(0).toLowerCase() + label.slice(1))
+/** A label inside a sentence; SpO2 keeps its capitals. */
+export const lower = (label: string): string =>
+  label === 'SpO2' ? label : label.charAt(0).toLowerCase() + label.slice(1)
