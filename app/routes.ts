@@ -32,6 +32,8 @@ export default [
       route('emergency', 'routes/emergency.tsx'),
       route('sign', 'routes/sign.tsx'),
       route('photographs', 'routes/patient-photographs.tsx'),
+      route('trends', 'routes/patient-trends.tsx'),
+      route('weaning', 'routes/patient-weaning.tsx'),
       route('act-now/:entryId', 'routes/act-now.tsx'),
       route('chart/:kind', 'routes/chart.tsx'),
       route('details', 'routes/patient-details.tsx'),

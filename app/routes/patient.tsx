@@ -32,6 +32,8 @@ export default function Patient({
         isTitle={isTitle}
         actions={
           <>
+            <LinkButton href={`/patients/${patientId}/trends`}>Trends</LinkButton>
+            <LinkButton href={`/patients/${patientId}/weaning`}>Weaning</LinkButton>
             {isPhotographed && <LinkButton href={`/patients/${patientId}/photographs`}>Photographs</LinkButton>}
             <LinkButton href={`/patients/${patientId}/sign`}>Bed-head sign</LinkButton>
             <LinkButton variant="danger" href={`/patients/${patientId}/emergency`}>

@@ -1,9 +1,11 @@
+import { gradedOver } from './chart-weaning.ts'
 import {
   blockCleared,
   changePlanned,
   cuffLeftHigh,
   digitsSwapped,
   heavyCoating,
+  lowSaturation,
   noted,
   ownValue,
   pairInCleaning,
@@ -26,6 +28,14 @@ export const alderStories: readonly BedStory[] = [
     tube: { name: 'corvane 8', inserted: { daysAgo: 12, stomaDaysAgo: 26 }, technique: 'percutaneous' },
     secretions: 'thin',
     stands: { inner: -5.4, cuff: -3.1, suction: -1.9, dressing: -15, stoma: 'done' },
+    extra: [
+      ownValue(50.5, {
+        setting: 'cuff-pressure-lower-limit',
+        value: 18,
+        reason: 'Seals at 18 by scope; the wall of the windpipe is sore',
+        reviewInDays: 4,
+      }),
+    ],
   },
   {
     bed: 'A2',
@@ -165,6 +175,23 @@ export const alderStories: readonly BedStory[] = [
         sizeMm: 8,
       },
     },
-    extra: [heavyCoating(1.2), blockCleared(52.4), photographed(28.6, 2), photographed(3.7, 2, { sizeMm: 6 })],
+    extra: [
+      heavyCoating(1.2),
+      blockCleared(52.4),
+      lowSaturation([
+        [52.3, 77],
+        [52.1, 91],
+        [51.8, 95],
+      ]),
+      gradedOver([
+        [98.4, { cough: 'weak', passes: 'three', colour: 'green', viscosity: 'tenacious', interval: 'one to two' }],
+        [74.2, { cough: 'weak', passes: 'three', colour: 'green', viscosity: 'thick', interval: 'one to two' }],
+        [50.9, { cough: 'moderate', passes: 'three', colour: 'yellow', viscosity: 'thick', interval: 'one to two' }],
+        [27.3, { cough: 'moderate', passes: 'two', colour: 'yellow', viscosity: 'thick', interval: 'two to three' }],
+        [5.6, { cough: 'moderate', passes: 'two', colour: 'tan', viscosity: 'thick', interval: 'two to three' }],
+      ]),
+      photographed(28.6, 2),
+      photographed(3.7, 2, { sizeMm: 6 }),
+    ],
   },
 ]

@@ -1,4 +1,12 @@
-import { cuffLetDown, graded, transferred, trialPlanned, valveRunning } from './chart-weaning.ts'
+import {
+  cuffLetDown,
+  graded,
+  gradedOver,
+  transferred,
+  trialBorne,
+  trialPlanned,
+  valveRunning,
+} from './chart-weaning.ts'
 import { copiousSecretions, digitsSwapped, hardBreathing, streaksOfBlood, writtenLate } from './happenings.ts'
 import { patient } from './patient.ts'
 import type { BedStory } from './story.ts'
@@ -82,8 +90,14 @@ export const birchStories: readonly BedStory[] = [
     secretions: 'thin',
     stands: { inner: -6.9, cuff: -2, suction: -0.5, dressing: -11, stoma: 'done', observations: -2.2 },
     extra: [
+      trialBorne('cuff', [18.6, 16.9], { cuff: ['down', 'up'], reasons: ['wet voice'] }),
       cuffLetDown(4.6),
       valveRunning(1.2, [0.95, 0.7, 0.45, 0.2]),
+      gradedOver([
+        [100.2, { cough: 'moderate', passes: 'three', colour: 'yellow', viscosity: 'thick', interval: 'one to two' }],
+        [76.7, { cough: 'moderate', passes: 'two', colour: 'yellow', viscosity: 'thick', interval: 'two to three' }],
+        [52.1, { passes: 'two', colour: 'tan', interval: 'two to three' }],
+      ]),
       graded(28.5, { passes: 'two', colour: 'tan', interval: 'two to three' }),
       graded(5.1, {}, 118),
     ],

@@ -1,4 +1,4 @@
-import { capPassed, graded, readyInPart } from './chart-weaning.ts'
+import { graded, gradedOver, readyInPart, trialBorne, trialPlanned } from './chart-weaning.ts'
 import { closingOpening, kitIncomplete, noted, withoutSpare } from './happenings.ts'
 import { patient } from './patient.ts'
 import type { BedStory } from './story.ts'
@@ -33,6 +33,7 @@ export const cedarStories: readonly BedStory[] = [
     secretions: 'thin',
     stands: { inner: -3, innerRenewal: -9, suction: -2, dressing: -8, stoma: 'done' },
     extra: [
+      trialBorne('valve', [74.6, 61.8]),
       closingOpening(11.7, 'Dry, about half closed.'),
       closingOpening(3.2, 'Dry. Voice clear with a finger on it.'),
     ],
@@ -52,7 +53,20 @@ export const cedarStories: readonly BedStory[] = [
     tube: { name: 'halden 6', inserted: { daysAgo: 19, stomaDaysAgo: 40 }, technique: 'percutaneous' },
     secretions: 'thin',
     stands: { inner: -5, innerRenewal: -2.5, suction: 0.3, dressing: -13, stoma: 'done' },
-    extra: [capPassed(40.3, 14.6), readyInPart(4.8), graded(10.2, { colour: 'tan' }, 132)],
+    extra: [
+      trialBorne('valve', [82.4, 81.6], { reasons: ['tired', 'asked'] }),
+      trialBorne('valve', [78.1, 72.3]),
+      trialBorne('valve', [68.7, 55.9]),
+      trialBorne('cap', [52.2, 49.4], { reasons: ['distress'] }),
+      trialBorne('cap', [40.3, 14.6]),
+      readyInPart(4.8),
+      gradedOver([
+        [83.5, { cough: 'moderate', passes: 'two', colour: 'yellow', viscosity: 'thick', interval: 'two to three' }],
+        [59.3, { cough: 'moderate', passes: 'two', colour: 'tan', viscosity: 'frothy', interval: 'two to three' }],
+        [34.8, { passes: 'one', colour: 'tan' }],
+      ]),
+      graded(10.2, { colour: 'tan' }, 132),
+    ],
   },
   {
     bed: 'C6',
@@ -83,6 +97,7 @@ export const cedarStories: readonly BedStory[] = [
     tube: { name: 'linnet', inserted: { daysAgo: 13, stomaDaysAgo: 36 }, technique: 'percutaneous' },
     secretions: 'thin',
     stands: { cuff: -0.4, suction: -2.9, dressing: 3.1, stoma: 'done', observations: 1.8 },
+    extra: [trialPlanned(6.3, 'cuff', 1)],
   },
   {
     bed: 'C9',

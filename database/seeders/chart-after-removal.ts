@@ -3,7 +3,7 @@ import { afterRemovalInterval, afterRemovalPeriod, afterRemovalSchedule } from '
 import { readinessChecks } from '#app/care/decannulation-readiness/schema.ts'
 import { hours, later, minutes } from '#app/time/duration.ts'
 import { type Bedside, hoursBefore } from './bedside.ts'
-import { capTrial } from './chart-weaning.ts'
+import { trialFrom } from './chart-weaning.ts'
 import { type Draft, draft } from './draft.ts'
 
 /** What goes before and after a removal for good: a cap borne for a day, readiness, and close observation afterwards. */
@@ -11,7 +11,7 @@ export function removalCare(bedside: Bedside): readonly Draft[] {
   const { story, until } = bedside
   if (story.removedHoursAgo === undefined) return []
   return [
-    ...capTrial(hoursBefore(until, 26), hoursBefore(until, 1.2)),
+    ...trialFrom('cap', [hoursBefore(until, 26), hoursBefore(until, 1.2)]),
     draft(readinessChecks, hoursBefore(until, 0.9), allReady, { by: 'tracheostomy specialist' }),
     ...setsAfter(bedside),
   ]

@@ -6,7 +6,7 @@ import { type SecretionGradeData, secretionGrades } from '#app/care/secretion-gr
 import { suctions } from '#app/care/suction/schema.ts'
 import { transfers } from '#app/care/transfer-checklist/schema.ts'
 import { weaningPlans } from '#app/care/weaning-plan/schema.ts'
-import { weaningTrials } from '#app/care/weaning-trial/schema.ts'
+import { type WeaningTrialData, weaningTrials } from '#app/care/weaning-trial/schema.ts'
 import { addDays, localDay } from '#app/time/zone.ts'
 import { hoursBefore, tubeAt } from './bedside.ts'
 import { calmSet } from './chart-observations.ts'
@@ -17,19 +17,31 @@ import type { Happening } from './story.ts'
 const therapist = { by: 'respiratory therapist' } as const
 const before = { respiratoryRate: 16, spo2: 96, heartRate: 80 } as const
 
-/** A cap borne from one moment to another, on a tube without a cuff. */
-export function capTrial(from: Date, to: Date): readonly Draft[] {
-  const cap = { trial: 'cap', cuffNow: 'none' } as const
+type Borne = Partial<Pick<WeaningTrialData, 'reasons' | 'afterwards'>> & {
+  /** The cuff during it, and as it is left. */
+  readonly cuff?: readonly [WeaningTrialData['cuffNow'], WeaningTrialData['cuffNow']]
+}
+
+/** A trial from one moment to another: as planned on a tube without a cuff, unless it is said otherwise. */
+export function trialFrom(
+  trial: WeaningTrialData['trial'],
+  [from, to]: readonly [Date, Date],
+  { cuff = ['none', 'none'], reasons = ['planned'], afterwards = 'settled' }: Borne = {},
+): readonly Draft[] {
   const ready = { airflow: 'yes', suctionFirst: 'yes', supervised: 'yes' } as const
   return [
-    draft(weaningTrials, from, { ...cap, step: 'start', ...ready, ...before }, therapist),
-    draft(weaningTrials, to, { ...cap, step: 'end', reasons: ['planned'], afterwards: 'settled' }, therapist),
+    draft(weaningTrials, from, { step: 'start', trial, cuffNow: cuff[0], ...ready, ...before }, therapist),
+    draft(weaningTrials, to, { step: 'end', trial, cuffNow: cuff[1], reasons, afterwards }, therapist),
   ]
 }
 
-/** A cap trial that was passed, counted back from the moment of seeding. */
-export function capPassed(fromHoursAgo: number, toHoursAgo: number): Happening {
-  return ({ now }) => capTrial(hoursBefore(now, fromHoursAgo), hoursBefore(now, toHoursAgo))
+/** A trial that was borne as long as it is said, counted back from the moment of seeding. */
+export function trialBorne(
+  trial: WeaningTrialData['trial'],
+  [fromHoursAgo, toHoursAgo]: readonly [number, number],
+  how: Borne = {},
+): Happening {
+  return ({ now }) => trialFrom(trial, [hoursBefore(now, fromHoursAgo), hoursBefore(now, toHoursAgo)], how)
 }
 
 /** The cuff let down for a trial, with suction first. */
@@ -101,6 +113,11 @@ export function trialPlanned(hoursAgo: number, step: 'cuff' | 'valve' | 'cap', i
     const data = { step, plannedOn, cuffThen: step === 'cuff' ? 'down' : 'none', agreedWith } as const
     return [draft(weaningPlans, hoursBefore(now, hoursAgo), data, { by: 'tracheostomy specialist' })]
   }
+}
+
+/** Secretions by grades at several moments, counted back from that of seeding. */
+export function gradedOver(seen: readonly (readonly [number, Partial<SecretionGradeData>])[]): Happening {
+  return bedside => seen.flatMap(([hoursAgo, grades]) => graded(hoursAgo, grades)(bedside))
 }
 
 /** Secretions by grades, and a cough that was measured through tube and valve. */

@@ -141,6 +141,14 @@ export function hardBreathing(hoursAgo: number): Happening {
   }
 }
 
+/** SpO2 as it fell and came back, counted back from the moment of seeding. */
+export function lowSaturation(seen: readonly (readonly [hoursAgo: number, spo2: number])[]): Happening {
+  return bedside =>
+    seen.map(([hoursAgo, spo2]) =>
+      draft(observationSets, hoursBefore(bedside.now, hoursAgo), { ...calmSet(bedside), spo2 }, { writtenAfter: 12 }),
+    )
+}
+
 /** Two digits swapped at charting, and put right a quarter of an hour later by the same nurse. */
 export function digitsSwapped(hoursAgo: number): Happening {
   return bedside => {

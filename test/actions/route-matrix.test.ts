@@ -63,6 +63,8 @@ GET  /patients/:patientId/sign         200 200 200 200 404 404 200   why why why
 POST /patients/:patientId/sign         400 400 400 400 404 404 403   why why why why 404 404 404   400 400   own  in
 GET  /patients/:patientId/sign.pdf     go  go  go  go  404 404 go    why why why why 404 404 404   go  go    own  in
 GET  /patients/:patientId/photographs  200 200 200 200 404 404 200   why why why why 404 404 404   200 200   own  in
+GET  /patients/:patientId/trends       200 200 200 200 404 404 200   why why why why 404 404 404   200 200   own  in
+GET  /patients/:patientId/weaning      200 200 200 200 404 404 200   why why why why 404 404 404   200 200   own  in
 GET  /photographs/:photographId        200 200 200 200 404 404 200   404 404 404 404 404 404 404   200 200   own  in
 GET  /patients/:patientId/act-now/:entryId 200 200 200 200 404 404 200 why why why why 404 404 404 200 200 own in
 GET  /entries/:entryId                 200 200 200 200 404 404 200   why why why why 404 404 404   200 200   own  in

@@ -34,6 +34,9 @@ async function knownIn(on: StartedApp): Promise<Known> {
     on,
     `SELECT w.id AS ward, s.patient_id AS patient, e.id AS entry, u.id AS person,
        (SELECT l.lot FROM entries l WHERE l.stay_id = s.id AND l.lot IS NOT NULL LIMIT 1) AS lot,
+       (SELECT t.patient_id FROM entries x JOIN stays t ON t.id = x.stay_id
+        WHERE x.kind = 'weaning-trial' AND t.discharged_at IS NULL
+        GROUP BY t.patient_id ORDER BY COUNT(*) DESC LIMIT 1) AS weaning,
        (SELECT p.id FROM policies p WHERE p.ward_id = w.id AND p.starts_at > UTC_TIMESTAMP() LIMIT 1) AS policy
      FROM wards w JOIN stays s ON s.ward_id = w.id JOIN entries e ON e.stay_id = s.id JOIN users u ON u.id = e.recorded_by
      WHERE w.name = 'Alder ward' AND s.discharged_at IS NULL AND e.kind = 'inner-cannula' AND e.status = 'final'
@@ -59,6 +62,7 @@ test('every route is a page that is looked at here, or says why it is none', () 
 const named = {
   ward: ':ward',
   patient: ':patient',
+  weaning: ':weaning',
   entry: ':entry',
   elsewhere: ':elsewhere',
   person: ':person',

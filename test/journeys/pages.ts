@@ -13,6 +13,8 @@ export interface Known {
   readonly person: string
   /** A version of the policy of `ward` that has not started. */
   readonly policy: string
+  /** A patient with trials of which one was passed. */
+  readonly weaning: string
   /** A lot that patients had. */
   readonly lot: string
 }
@@ -92,6 +94,15 @@ export const pages: readonly PageEntry[] = [
     route: 'patients/:patientId/photographs',
     as: 'nurse.alder',
     path: ({ patient }) => `/patients/${patient}/photographs`,
+  },
+  ...(['patient', 'weaning'] as const).flatMap(who => [
+    { route: 'patients/:patientId/trends', as: specialist, path: (known: Known) => `/patients/${known[who]}/trends` },
+    { route: 'patients/:patientId/weaning', as: specialist, path: (known: Known) => `/patients/${known[who]}/weaning` },
+  ]),
+  {
+    route: 'patients/:patientId/trends',
+    as: 'nurse.alder',
+    path: ({ patient }) => `/patients/${patient}/trends?span=Whole+stay`,
   },
   {
     route: 'patients/:patientId/act-now/:entryId',
