@@ -13,7 +13,7 @@ import { MeasurePlot } from './measure-plot.tsx'
 import { PlotLegend } from './plot-shapes.tsx'
 import { findingsLegend, lengthsLegend, measureLegend } from './trend-legends.tsx'
 import { FindingsTable, LengthsTable, MeasureTable } from './trend-tables.tsx'
-import { WhyValues } from './why-values.tsx'
+import { WhyDetails } from './why.tsx'
 
 export interface Shown {
   readonly span: Span
@@ -121,17 +121,7 @@ function Targets({ view: { bands, why, title }, now, zone }: TargetsProps) {
           <li key={band.from}>{targetWords(band, now, zone)}</li>
         ))}
       </ul>
-      {why && (
-        <details>
-          <summary className="inline-flex min-h-11 min-w-11 items-center font-semibold underline underline-offset-3">
-            Why? <span className="sr-only">{title}</span>
-          </summary>
-          <div className="grid max-w-prose gap-1.5">
-            <WhyValues values={why.values} />
-            <p>{why.policy}</p>
-          </div>
-        </details>
-      )}
+      {why && <WhyDetails why={{ rule: [], ...why }} about={title} />}
     </div>
   )
 }

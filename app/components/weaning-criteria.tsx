@@ -5,7 +5,7 @@ import type { Zone } from '#app/time/zone.ts'
 import { LinkButton } from './button.tsx'
 import { Tag, type TagTone } from './tag.tsx'
 import { EntryLink } from './trend-tables.tsx'
-import { WhyValues } from './why-values.tsx'
+import { WhyDetails } from './why.tsx'
 
 export interface CriteriaProps {
   readonly criteria: readonly CriterionView[]
@@ -62,7 +62,9 @@ const signs: Readonly<Record<CriterionState, string>> = {
 type CriterionProps = Omit<CriteriaProps, 'criteria'> & { readonly criterion: CriterionView }
 
 function Criterion({ criterion, patientId, charts, policy, now, zone }: CriterionProps) {
-  const { label, state, value, entry, chart } = criterion
+  const { label, state, value, values, entry, chart } = criterion
+  // A number says its own source.
+  const sources = values.length === 0 ? [`${criterion.source}.`] : []
   const isChartable = state !== 'met' && chart !== null && charts.includes(chart.kind)
   return (
     <li className="grid grid-cols-[minmax(0,1fr)] items-start gap-x-4 gap-y-1 border-t border-hair px-4 py-2 sm:grid-cols-[minmax(0,1fr)_8.5rem_9.5rem]">
@@ -71,7 +73,7 @@ function Criterion({ criterion, patientId, charts, policy, now, zone }: Criterio
         <div className="-mb-1.5 flex flex-wrap items-center gap-x-4 text-ink2">
           {value && <span>{value}</span>}
           {entry && <EntryLink entryId={entry.id} words={momentWords(entry.at, now, zone)} />}
-          <Reasons criterion={criterion} policy={policy} />
+          <WhyDetails why={{ rule: [criterion.rule, ...sources], values, policy }} about={label} />
         </div>
       </div>
       <p className="sm:pt-0.5">
@@ -85,27 +87,5 @@ function Criterion({ criterion, patientId, charts, policy, now, zone }: Criterio
         </div>
       )}
     </li>
-  )
-}
-
-interface ReasonsProps {
-  readonly criterion: CriterionView
-  readonly policy: string
-}
-
-/** "Why?": the rule, its numbers with their origin, the policy and the source. */
-function Reasons({ criterion: { label, rule, values, source }, policy }: ReasonsProps) {
-  return (
-    <details className="text-sm open:basis-full">
-      <summary className="inline-flex min-h-11 min-w-11 items-center font-semibold text-ink2 underline underline-offset-3">
-        Why? <span className="sr-only">{label}</span>
-      </summary>
-      <div className="grid max-w-prose gap-1.5 pb-2">
-        <p>{rule}</p>
-        <WhyValues values={values} />
-        {values.length === 0 && <p>{source}.</p>}
-        <p>{policy}</p>
-      </div>
-    </details>
   )
 }

@@ -65,5 +65,5 @@ export function chartedHere(
 ): readonly string[] {
   if (discharged !== null) return []
   const may = (act: ChartingAct) => (opened.via === 'ward' ? can(user, act, opened.wardId) : canByGrant(user, act))
-  return chartableKinds(may).map(({ slug }) => slug)
+  return chartableKinds(may).flatMap(({ kinds }) => kinds.map(({ slug }) => slug))
 }
