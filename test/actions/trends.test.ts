@@ -17,6 +17,8 @@ import { cleared } from '#test/database.ts'
 import { aPerson, contextOf, site, traceOfTest } from '#test/people.ts'
 import { aStay, aWardOf } from '#test/stays.ts'
 
+const app = await application()
+
 beforeEach(cleared)
 
 type Charting = Awaited<ReturnType<typeof aCharting>>
@@ -139,7 +141,6 @@ test('weaning shows the next step with its criteria, and offers to chart what th
 
 test('looks at both pages are logged', async () => {
   const { nurse, patientId } = await aCharting()
-  const app = await application()
   const [cookie = ''] = (await signIn(new Request(site), nurse, traceOfTest(nurse))).split(';')
   const paths = ['trends', 'weaning'].map(page => `/patients/${patientId}/${page}`)
   for (const path of paths) expect((await app.answer(browserRequest('GET', path, cookie))).status).toBe(200)
