@@ -17,9 +17,9 @@ export interface Measure {
   readonly title: string
   /** What is drawn and what it is held against, in a sentence or two. */
   readonly says: string
-  unit(ward: WardFacts): string
+  readonly unit: (ward: WardFacts) => string
   /** What the plot reaches over at least; a value beyond it is drawn at the edge and said. */
-  range(ward: WardFacts): { readonly from: number; readonly to: number }
+  readonly range: (ward: WardFacts) => { readonly from: number; readonly to: number }
   /** The sorts of value in one reading: the first is drawn hollow, the second full. */
   readonly marks: Readonly<Record<string, string>>
   /** Whether one reading is joined with the next. */
@@ -27,10 +27,10 @@ export interface Measure {
   /** The numbers of the target, where it is by rule; without any it is a fact of the patient. */
   readonly settings: readonly AnySetting[]
   /** The target in force at the moment of `context`. */
-  band?(context: CareContext): TrendBand | undefined
+  readonly band?: (context: CareContext) => TrendBand | undefined
   /** Said of the target, where it is not by rule: `as prescribed now`. */
   readonly bandSays?: string
-  show(value: number, ward: WardFacts): string
+  readonly show: (value: number, ward: WardFacts) => string
 }
 
 export interface ReadingValue {
@@ -51,7 +51,7 @@ export interface MeasureTrend<Data> {
   readonly shape: 'measure'
   readonly measure: Measure
   /** What an act measured; `before` is the moment before it, under the policy and the own values of that moment. */
-  reading(data: Data, before: CareContext): Reading | undefined
+  readonly reading: (data: Data, before: CareContext) => Reading | undefined
 }
 
 /** Something seen at a look, from 1 (little, or simply there) to 3 (most). */
@@ -69,7 +69,7 @@ export interface FindingsTrend<Data> {
   readonly says: string
   /** Short names of what is looked for, in their order. */
   readonly rows: Readonly<Record<string, string>>
-  seen(data: Data): readonly SeenFinding[]
+  readonly seen: (data: Data) => readonly SeenFinding[]
 }
 
 /** How something that lasts came to its end, which decides how it is drawn. */
@@ -95,7 +95,7 @@ export interface TrendLength {
 export interface RecordInTime {
   readonly record: PatientRecord
   readonly now: Date
-  at(moment: Date): CareContext
+  readonly at: (moment: Date) => CareContext
 }
 
 /** How long something lasted each time, by sort. */
@@ -105,7 +105,7 @@ export interface LengthsTrend {
   readonly title: string
   readonly says: string
   readonly groups: Readonly<Record<string, string>>
-  lengths(given: RecordInTime): readonly TrendLength[]
+  readonly lengths: (given: RecordInTime) => readonly TrendLength[]
 }
 
 /** What a kind shows of its acts over time. */

@@ -13,7 +13,7 @@ export interface TrendsAsked {
   readonly now: Date
   readonly from: Date
   readonly to: Date
-  policyAt(moment: Date): Policy
+  readonly policyAt: (moment: Date) => Policy
   /** When another version came into force, or the patient to a ward with another policy. */
   readonly policyChangesAt: readonly Date[]
 }
