@@ -1,5 +1,5 @@
 import { Form } from 'react-router'
-import { Button } from './button.tsx'
+import { Button, LinkButton } from './button.tsx'
 import { TextField } from './text-field.tsx'
 
 interface FindItemProps {
@@ -24,6 +24,7 @@ export function FindItem({ find, found, longest }: FindItemProps) {
       />
       <div className="flex flex-wrap items-center gap-x-4 gap-y-2">
         <Button>Find</Button>
+        <LinkButton href="/scan">Scan one that came</LinkButton>
         {found !== null && <p role="status">{foundWords(found)}</p>}
       </div>
     </Form>

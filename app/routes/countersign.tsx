@@ -18,12 +18,12 @@ export async function loader({ context, request, url }: Route.LoaderArgs) {
   const user = signedIn(context)
   if (!can(user, 'countersign')) throw data('Countersigning is for registered colleagues at the bedside.', 403)
   const named = url.searchParams.get('show') === 'mine'
-  const entries = await countersignList(user, named, env.hospitalTimeZone)
+  const list = await countersignList(user, named, env.hospitalTimeZone)
   const by = traceOf({ request, url, context })
   for (const wardId of countersigningWards(user)) {
     await logLook({ action: 'saw entries to countersign', purpose: 'TREAT', by, wardId })
   }
-  return { named, entries }
+  return { named, ...list }
 }
 
 export async function action({ context, request }: Route.ActionArgs) {
@@ -34,7 +34,7 @@ export async function action({ context, request }: Route.ActionArgs) {
 }
 
 /** What students and assistants charted on one's own wards, to be read and countersigned, several at once. */
-export default function Countersign({ loaderData: { named, entries }, actionData }: Route.ComponentProps) {
+export default function Countersign({ loaderData: { named, entries, isWhole }, actionData }: Route.ComponentProps) {
   const problem = actionData?.ok === false ? actionData : undefined
   return (
     <div className="mx-auto grid max-w-5xl gap-4 px-4 py-5 md:px-6">
@@ -55,6 +55,11 @@ export default function Countersign({ loaderData: { named, entries }, actionData
       ) : (
         <Form method="post" className="grid gap-4">
           {problem && <ErrorSummary title="Not countersigned yet. Please check:" errors={[problem]} />}
+          {!isWhole && (
+            <p className="font-semibold">
+              {`The oldest ${entries.length} are shown. More wait: they come up as these are countersigned.`}
+            </p>
+          )}
           <CountersignList entries={entries} chosen={problem?.chosen ?? []} />
           <label className="flex min-h-11 items-start gap-3">
             <input id="supervised" type="checkbox" name="supervised" value="yes" className="mt-0.5 size-5 flex-none" />

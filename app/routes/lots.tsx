@@ -63,7 +63,10 @@ export default function Lots({ loaderData, actionData }: Route.ComponentProps) {
           autoComplete="off"
           short
         />
-        <Button className="justify-self-start">Find</Button>
+        <div className="flex flex-wrap gap-2">
+          <Button>Find</Button>
+          <LinkButton href="/scan">Scan a pack</LinkButton>
+        </div>
       </Form>
       {!trace && <RecalledLots recalled={recalled} />}
       {trace && (

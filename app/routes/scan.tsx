@@ -1,6 +1,6 @@
 import { data, Form, Link, useNavigation, useSubmit } from 'react-router'
 import { scannerOf } from '#app/auth/scanner.server.ts'
-import { signedIn } from '#app/auth/signed-in.server.ts'
+import { ownSession, signedIn } from '#app/auth/signed-in.server.ts'
 import { traceOf } from '#app/auth/trace.server.ts'
 import { Button, LinkButton } from '#app/components/button.tsx'
 import { Card } from '#app/components/card.tsx'
@@ -30,7 +30,8 @@ export async function action({ context, request, url }: Route.ActionArgs) {
   const form = await sentForm(request)
   const target = await scanTarget(form.get('for'), asking)
   const { isTrusted } = await scannerOf(request)
-  const view = await scanResult(scanForm(form), { ...asking, isTrusted, form: target })
+  const { wards } = ownSession(context)
+  const view = await scanResult(scanForm(form), { ...asking, wards, isTrusted, form: target })
   return view.error === null ? view : data(view, 400)
 }
 

@@ -2,17 +2,17 @@ import { authorOf, type CurrentUser, can } from '#app/auth/permissions.ts'
 import { entryWords } from '#app/rules/entry-words.ts'
 import { showDateTime } from '#app/time/display.ts'
 import type { Zone } from '#app/time/zone.ts'
-import { countersign, toCountersign } from '#database/countersignatures.server.ts'
+import { countersign, MOST_TO_COUNTERSIGN, toCountersign } from '#database/countersignatures.server.ts'
 
 /** The wards on which somebody may countersign. */
 export function countersigningWards(user: CurrentUser): readonly string[] {
   return user.wardIds.filter(wardId => can(user, 'countersign', wardId))
 }
 
-/** Entries to countersign, as they are read before they are. */
+/** Entries to countersign, as they are read before they are; oldest first, and not all when there are very many. */
 export async function countersignList(user: CurrentUser, named: boolean, zone: Zone) {
   const found = await toCountersign(user.id, countersigningWards(user), named)
-  return found.map(({ entry, patientId, familyName, bed, wardId, wardName }) => ({
+  const entries = found.map(({ entry, patientId, familyName, bed, wardId, wardName }) => ({
     id: entry.id,
     wardId,
     patient: { href: `/patients/${patientId}`, says: `${wardName}, bed ${bed}, ${familyName}` },
@@ -21,6 +21,7 @@ export async function countersignList(user: CurrentUser, named: boolean, zone: Z
     done: showDateTime(entry.performedAt, zone),
     second: entry.witnessName,
   }))
+  return { entries, isWhole: found.length < MOST_TO_COUNTERSIGN }
 }
 
 /** What came of the form: what was wrong with it, or how many entries it countersigned and how many it could not. */

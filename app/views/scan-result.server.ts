@@ -18,6 +18,7 @@ import { type Believed, readBackChoices, readBackOf } from '#app/scanning/read-b
 import { carriedReading, gs1Scan, MOST_CODES, type Reading, readCode, type ScanForm } from '#app/scanning/scan-form.ts'
 import { NO_SCAN, type ScanView } from '#app/scanning/scan-view.ts'
 import { wantedBy } from '#app/scanning/wanted.ts'
+import { STORE } from '#app/supplies/act-form.ts'
 import { localDay } from '#app/time/zone.ts'
 import { innerCannulaByGtin, innerCannulasFitting, tubeByGtin, tubesFitting } from '#database/catalogue.server.ts'
 import { recalls } from '#database/lot-recalls.server.ts'
@@ -28,6 +29,8 @@ export interface Scanning {
   readonly user: CurrentUser
   readonly now: Date
   readonly isTrusted: boolean
+  /** The wards of whoever scans. */
+  readonly wards: readonly { readonly id: string; readonly name: string }[]
   readonly form: Pick<ScanTarget, 'kind' | 'context' | 'usedAt'> | null
 }
 
@@ -80,7 +83,11 @@ async function itemView(
 }
 
 /** Where to read on about an item that is scanned to know it, and not for a form. */
-function linksOf(known: KnownItem | null, believed: Believed | undefined, { form, user }: Scanning): ScanView['links'] {
+function linksOf(
+  known: KnownItem | null,
+  believed: Believed | undefined,
+  { form, user, wards }: Scanning,
+): ScanView['links'] {
   if (form) return []
   const lot = believed?.lot && can(user, 'trace lots') ? believed.lot : null
   const list = known?.of === 'tube' ? 'tubes' : 'inner-cannulas'
@@ -89,6 +96,10 @@ function linksOf(known: KnownItem | null, believed: Believed | undefined, { form
     ...(known?.of === 'tube'
       ? [{ href: `/catalogue/compare?tube=${known.item.id}`, words: 'Compare with other tubes' }]
       : []),
+    ...(known ? wards.filter(({ id }) => can(user, 'keep supplies', id)) : []).map(({ id, name }) => ({
+      href: `/wards/${id}/supplies/receive?${new URLSearchParams({ item: known?.item.id ?? '', to: STORE })}`,
+      words: `Receive for ${name}`,
+    })),
     ...(lot ? [{ href: `/lots?${new URLSearchParams({ lot })}`, words: `Who had lot ${lot}` }] : []),
   ]
 }

@@ -121,7 +121,14 @@ test('an item scanned for no form leads on to its pages', async () => {
   const item = await catalogued('Alder')
   expect(await scanned(`(01)${GTIN}(10)7B`, given.nurse, '')).toMatchObject({
     fill: null,
-    links: [{ href: `/catalogue/inner-cannulas/${item}` }, { href: '/lots?lot=7B', words: 'Who had lot 7B' }],
+    links: [
+      { href: `/catalogue/inner-cannulas/${item}` },
+      {
+        href: `/wards/${given.ward.id}/supplies/receive?item=${item}&to=store`,
+        words: expect.stringMatching(/^Receive for /),
+      },
+      { href: '/lots?lot=7B', words: 'Who had lot 7B' },
+    ],
   })
   const observer = await aPerson({ name: 'Ole Berg', role: 'observer' })
   expect((await scanned(`(01)${GTIN}(10)7B`, observer, '')).links).toHaveLength(1)

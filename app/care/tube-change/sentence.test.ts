@@ -7,7 +7,7 @@ import { tubeSentence } from './sentence.ts'
 test('the sentence says why, which tube, and how it went', () => {
   expect(tubeExamples.map(tubeSentence)).toEqual([
     'First tube put in, percutaneous: Corvane Dual 8.0 ISO 5366, air cuff, dual cannula (disposable inner cannula), ID 8 in 9, OD 11.3, length 78 mm. Went easily, position confirmed by capnography. Operator Dr N. Abara, helper R. Osei. Flange sutures in place.',
-    'Changed to a smaller tube: Halden 6 Jackson, no cuff, dual cannula (reusable inner cannula), ID 6.4 in 8.1, OD 10.8, length 76 mm, 15 mm connector on the inner cannula, fenestrated, lot H26-0417, expires 31-May-2028. Some difficulty, position confirmed by airflow. Operator E. Solberg. Bleeding: spotting. Lowest SpO2 93%. Coughed well through the change.',
+    'Changed to a smaller tube: Halden 6 Jackson, no cuff, dual cannula (reusable inner cannula), ID 6.4 in 8.1, OD 10.8, length 76 mm, 15 mm connector on the inner cannula, fenestrated, lot H26-0417, expires 31-May-2028. Some difficulty, position confirmed by airflow. Operator E. Solberg, no helper named. Bleeding: spotting. Lowest SpO2 93%. Coughed well through the change.',
     'Tube in place on arrival since 12-Nov-2026, surgical: Marrow Long 7.5 ISO 5366, water cuff, single cannula, ID 7.5, OD 10.4, length 110 mm, mark 9.5 cm at the flange. How it went is not known, position not confirmed. Operator Not known.',
   ])
 })

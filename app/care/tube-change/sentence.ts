@@ -46,9 +46,15 @@ export function tubeSentence(data: TubeData): string {
   return [
     `${why[data.reason]}${day}${made}: ${tubeParts(data).join(', ')}.`,
     `${went[data.difficulty]}, ${confirmed[data.position]}.`,
-    `Operator ${data.operator}${data.helper ? `, helper ${data.helper}` : ''}.`,
+    `Operator ${data.operator}${helperWords(data)}.`,
     ...findings(data),
   ].join(' ')
+}
+
+/** A change is done by two people: that nobody was named is said. Of a tube that came with the patient it may not be known. */
+function helperWords({ helper, reason }: TubeData): string {
+  if (helper) return `, helper ${helper}`
+  return reason === 'on arrival' ? '' : ', no helper named'
 }
 
 function tubeParts(data: TubeData): readonly string[] {
