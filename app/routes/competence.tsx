@@ -75,26 +75,37 @@ interface LinesProps {
   readonly none: string
 }
 
+function personsOf(lines: readonly GapLine[]) {
+  const ids = [...new Set(lines.map(({ userId }) => userId))]
+  return ids.map(userId => ({ userId, own: lines.filter(line => line.userId === userId) }))
+}
+
+/** A row for each person: what they lack stands together. */
 function Lines({ caption, lines, none }: LinesProps) {
   if (lines.length === 0) return <p className="p-4 text-ink2">{none}</p>
   return (
     <Table
       caption={caption}
-      columns={[{ label: 'Name and role' }, { label: 'Skill' }, { label: 'Standing' }]}
-      rows={lines.map(line => ({
-        key: line.key,
+      columns={[{ label: 'Name and role' }, { label: 'Skills, and how they stand' }]}
+      rows={personsOf(lines).map(({ userId, own }) => ({
+        key: userId,
         cells: [
           <Fragment key="name">
             <Link
-              to={`/competence/${line.userId}`}
+              to={`/competence/${userId}`}
               className="inline-flex min-h-11 items-center underline underline-offset-3"
             >
-              {line.name}
+              {own[0]?.name}
             </Link>
-            <span className="block text-sm font-normal text-ink2">{line.role}</span>
+            <span className="block text-sm font-normal text-ink2">{own[0]?.role}</span>
           </Fragment>,
-          line.skill,
-          line.stands,
+          <ul key="skills">
+            {own.map(({ key, skill, stands }) => (
+              <li key={key}>
+                {skill}: <b className="font-semibold">{stands}</b>
+              </li>
+            ))}
+          </ul>,
         ],
       }))}
     />
