@@ -49,8 +49,8 @@ export type NameLists = Readonly<Record<NameMeta['control'], Readonly<Record<str
 export interface ItemMeta extends Shared {
   readonly control: 'item'
   readonly of: ItemKind
-  /** Fields of the same form that hold what is printed on the item: they have to say what the catalogue says of it. */
-  readonly prints: { readonly line: string; readonly size: string }
+  /** Fields of the same form that hold what is printed on the item, apart or both in one: they have to say what the catalogue says of it. */
+  readonly prints: { readonly line: string; readonly size: string } | { readonly both: string }
 }
 /** Codes as they were scanned, carried by the form. */
 export interface CodesMeta extends Shared {

@@ -24,12 +24,29 @@ export function itemProblems(
   if (item?.id !== named) {
     return [{ field: `care.${field.name}`, message: 'The scanned item is not in the catalogue. Scan it again.' }]
   }
+  const { prints } = field.meta
+  if ('both' in prints) return nameProblems(prints.both, care, item)
   return (['line', 'size'] as const).flatMap(what => {
-    const name = field.meta.prints[what]
+    const name = prints[what]
     const typed = care[name]
-    const printed = what === 'line' ? [item.line, ...item.formerLines] : [item.size]
+    const printed = what === 'line' ? linesOf(item) : [item.size]
     if (typeof typed === 'string' && printed.some(words => isPrintedAlike(typed, words))) return []
     const message = `The scanned item has the ${what} ${item[what]}. Scan the other one, or take the scan out.`
     return [{ field: `care.${name}`, message }]
   })
+}
+
+const linesOf = ({ line, formerLines }: CataloguedItem): readonly string[] => [line, ...formerLines]
+
+/** Line and size in one field: each has to stand in it. */
+function nameProblems(
+  name: string,
+  care: Readonly<Record<string, unknown>>,
+  item: CataloguedItem,
+): readonly FormProblem[] {
+  const typed = care[name]
+  const has = (words: string) => typeof typed === 'string' && typed.toLowerCase().includes(words.toLowerCase())
+  if (linesOf(item).some(has) && has(item.size)) return []
+  const message = `The scanned item is ${item.line} ${item.size}. Scan the other one, or take the scan out.`
+  return [{ field: `care.${name}`, message }]
 }

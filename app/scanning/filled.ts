@@ -9,6 +9,8 @@ export interface ScannedItem {
   readonly of: ItemKind
   /** The item as the catalogue has it: what it calls as the form does is filled in. */
   readonly item: object & { readonly id: string }
+  /** Line, size and what else tells it from others. */
+  readonly name: string
   readonly lot: string | null
   readonly expiresOn: string | null
   /** As `codesText` writes them. */
@@ -27,6 +29,7 @@ export function filledFrom(kind: AnyCareKind, scanned: ScannedItem): Typed | nul
     lot: scanned.lot,
     expiresOn: scanned.expiresOn,
     [field.name]: scanned.item.id,
+    ...('both' in field.meta.prints ? { [field.meta.prints.both]: scanned.name } : {}),
   }
   const answers = fieldsOf(kind.schema).flatMap(({ name, meta }) => {
     if (meta.control === 'codes') return [[`care.${name}`, [scanned.codes]] as const]

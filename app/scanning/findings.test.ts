@@ -2,6 +2,7 @@ import { expect, test } from 'vitest'
 import { innerCannula } from '#app/care/inner-cannula/kind.ts'
 import { aContext, anEntry, aTube, at } from '#app/care/make.ts'
 import { tubeChange } from '#app/care/tube-change/kind.ts'
+import { tubeChangePlan } from '#app/care/tube-change-plan/kind.ts'
 import { filledFrom } from './filled.ts'
 import { type InHand, scanFindings, stops } from './findings.ts'
 import { wantedBy } from './wanted.ts'
@@ -82,7 +83,8 @@ test('a tube is not held against the one in place', () => {
 
 test('a form gets what it asks about, and what the item does not have is emptied', () => {
   const catalogued = { id: item.id, line: 'Alder', size: '8.0', gtin: '09521234543213', idWithInner: null, lineId: 'x' }
-  const scan = { item: catalogued, lot: '7B', expiresOn: null, codes: 'manual (01)09521234543213' }
+  const name = 'Alder 8.0 ISO 5366, dual'
+  const scan = { item: catalogued, name, lot: '7B', expiresOn: null, codes: 'manual (01)09521234543213' }
   expect(filledFrom(innerCannula, { ...scan, of: 'inner cannula' })).toEqual({
     'care.line': ['Alder'],
     'care.size': ['8.0'],
@@ -93,4 +95,8 @@ test('a form gets what it asks about, and what the item does not have is emptied
   })
   expect(filledFrom(tubeChange, { ...scan, of: 'tube' })).toMatchObject({ 'care.idWithInner': [''] })
   expect(filledFrom(tubeChange, { ...scan, of: 'inner cannula' })).toBeNull()
+  expect(filledFrom(tubeChangePlan, { ...scan, of: 'tube' })).toEqual({
+    'care.newTube': [name],
+    'care.newItem': [item.id],
+  })
 })

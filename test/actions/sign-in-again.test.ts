@@ -170,7 +170,7 @@ test('the start leads each role to the page they want first', async () => {
   expect(await starts('charge nurse', [ward])).toBe(`/wards/${ward}/board`)
   expect(await starts('observer', [ward])).toBe(`/wards/${ward}/board`)
   expect(await starts('administrator', [])).toBe('/admin/people')
-  expect(await starts('educator', [])).toBe('/policy')
+  expect(await starts('educator', [])).toBe('/competence')
   expect(await starts('nurse', [])).toBe('/policy')
 })
 

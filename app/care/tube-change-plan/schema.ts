@@ -1,4 +1,5 @@
 import type { z } from 'zod'
+import { itemOf } from '../carried-field.ts'
 import { careFields, choice, choices, date, note, text, yesNo } from '../field.ts'
 import { charted } from '../kind.ts'
 
@@ -54,9 +55,10 @@ const fields = careFields({
   }).optional(),
   newTube: text({
     label: 'Tube to go in',
-    hint: 'Line and size as printed; "same" for the same again',
+    hint: 'Line and size as printed, or scanned; "same" for the same again',
     ...neededPlan,
   }).optional(),
+  newItem: itemOf({ label: 'Scanned tube', of: 'tube', prints: { both: 'newTube' }, ...planned }).optional(),
   tract: text({
     label: 'Opening and tube now',
     hint: 'From the record: hold it against what you see',
