@@ -1,4 +1,4 @@
-import { Fragment, type ReactNode, useRef } from 'react'
+import { type FormEvent, Fragment, type ReactNode, useRef, useState } from 'react'
 import { isShown } from '#app/care/field.ts'
 import { type FieldMeta, isCarried, type NameLists } from '#app/care/field-meta.ts'
 import type { ExplainedGauge } from '#app/rules/why-warnings.ts'
@@ -63,9 +63,11 @@ export function CareFields({ fields, gauges = [], lists = {}, units = {}, notice
 
 /** Filled in by a scan. The item can be taken out again; what the catalogue decides is not sent at all. */
 function CarriedAnswer({ field: { id, meta, fullName, answers, errors } }: { readonly field: DrawnField }) {
+  // Held here: what a scan writes into the page alone, the next drawing of the form would take back.
+  const [held, setHeld] = useState(answers[0] ?? '')
+  const hold = (event: FormEvent<HTMLInputElement>) => setHeld(event.currentTarget.value)
   if (meta.control === 'decided') return null
-  if (meta.control === 'codes') return <input type="hidden" id={id} name={fullName} defaultValue={answers[0]} />
-  const [item = ''] = answers
+  if (meta.control === 'codes') return <input type="hidden" id={id} name={fullName} value={held} onInput={hold} />
   return (
     <div className="grid gap-1.5 has-[input:not(:checked)]:hidden has-[p]:grid">
       <label className="inline-flex min-h-12 items-center gap-3">
@@ -73,8 +75,9 @@ function CarriedAnswer({ field: { id, meta, fullName, answers, errors } }: { rea
           type="checkbox"
           id={id}
           name={fullName}
-          value={item}
-          defaultChecked={item !== ''}
+          value={held}
+          defaultChecked={held !== ''}
+          onInput={hold}
           data-carried=""
           className="size-6 accent-brand"
         />

@@ -62,6 +62,15 @@ const aboutTheAct = {
   position: 'capnography',
 }
 
+/** The latest act of a kind that was charted on a scan, as it is stored. */
+async function keptOf(kind: string): Promise<Readonly<Record<string, unknown>>> {
+  const [row] = await rowsOf<{ data: string | object }>(
+    app,
+    `SELECT data FROM entries WHERE kind = '${kind}' AND JSON_VALUE(data, '$.scanned') IS NOT NULL ORDER BY recorded_at DESC LIMIT 1`,
+  )
+  return typeof row?.data === 'string' ? JSON.parse(row.data) : { ...row?.data }
+}
+
 test('from the scan of a tube to the search for a lot', async () => {
   const { line, tube, right, wrong } = await itemsOfDemo()
   const { page, problems } = await signedIn(browser, app, 'specialist', tablet)
@@ -94,6 +103,11 @@ test('from the scan of a tube to the search for a lot', async () => {
   await page.getByRole('button', { name: 'Chart cannula' }).tap()
   await page.waitForURL(/\?charted=/)
   expect(taps).toEqual({ all: 3, digits: 0 })
+  // What was scanned is kept with both acts, and the catalogue says that one is made for the other.
+  expect(await keptOf('tube-change')).toMatchObject({ lot: 'T77', scanned: `barcode ]d201${tube}1729123110T77` })
+  const kept = await keptOf('inner-cannula')
+  expect(kept).toMatchObject({ lot: 'R34', scanned: `barcode ]d201${right}1729123110R34` })
+  expect(kept.madeFor).toBe((await keptOf('tube-change')).item)
 
   // The sign for the new tube is printed, and its file says the same.
   await page.goto(`${patient}/sign`)
