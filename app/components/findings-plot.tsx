@@ -2,6 +2,7 @@ import type { FindingsView } from '#app/rules/trend-findings.ts'
 import { findingsWords } from '#app/rules/trend-words.ts'
 import { showDay } from '#app/time/display.ts'
 import { TimeLabels } from './plot-frame.tsx'
+import { Drawing } from './plot-shapes.tsx'
 import { Stretched } from './strip-shapes.tsx'
 
 const ROW_PX = 28
@@ -31,21 +32,14 @@ export function FindingsPlot({ view }: { readonly view: FindingsView }) {
         ))}
       </div>
       <div className="@container min-w-0 flex-1">
-        <svg
-          role="img"
-          aria-labelledby={`${id}-title ${id}-desc`}
-          className="block w-full overflow-visible"
-          height={height}
-        >
-          <title id={`${id}-title`}>{title}</title>
-          <desc id={`${id}-desc`}>{findingsWords(view)}</desc>
+        <Drawing id={id} title={title} desc={findingsWords(view)} height={height}>
           <Stretched height={height}>
             {rows.map(({ name: row, levels }, index) => (
               <DayBars key={row} levels={levels} foot={(index + 1) * ROW_PX - 3} middle={middle} column={column} />
             ))}
           </Stretched>
           <TimeLabels ticks={ticks} y={height - 8} />
-        </svg>
+        </Drawing>
       </div>
     </div>
   )

@@ -5,6 +5,7 @@ import { showDate, showDuration } from '#app/time/display.ts'
 import type { Zone } from '#app/time/zone.ts'
 import { percent } from './hour-ticks.ts'
 import { TimeLabels } from './plot-frame.tsx'
+import { Drawing } from './plot-shapes.tsx'
 import { HATCH } from './strip-patterns.tsx'
 import { Stretched } from './strip-shapes.tsx'
 
@@ -49,14 +50,7 @@ export function LengthsPlot({ view, zone }: LengthsPlotProps) {
         ))}
       </div>
       <div className="@container min-w-0 flex-1 pr-2">
-        <svg
-          role="img"
-          aria-labelledby={`${id}-title ${id}-desc`}
-          className="block w-full overflow-visible"
-          height={height}
-        >
-          <title id={`${id}-title`}>{view.title}</title>
-          <desc id={`${id}-desc`}>{lengthsWords(view)}</desc>
+        <Drawing id={id} title={view.title} desc={lengthsWords(view)} height={height}>
           <Stretched height={height}>
             <path
               d={ticks.map(({ x }) => `M${x} 0V${height - AXIS_PX}`).join('')}
@@ -66,7 +60,7 @@ export function LengthsPlot({ view, zone }: LengthsPlotProps) {
           </Stretched>
           {rows.map(({ key, one }, index) => one && <Bar key={key} one={one} y={index * ROW_PX} at={at} />)}
           <TimeLabels ticks={ticks} y={height - 8} />
-        </svg>
+        </Drawing>
       </div>
     </div>
   )

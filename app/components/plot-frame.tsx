@@ -1,6 +1,7 @@
 import type { ReactNode } from 'react'
 import type { Zone } from '#app/time/zone.ts'
 import { gridTicks, labelled, percent, type Span, type Tick } from './hour-ticks.ts'
+import { Drawing } from './plot-shapes.tsx'
 import { Stretched } from './strip-shapes.tsx'
 
 /** Px of a plot. */
@@ -37,14 +38,7 @@ export function PlotFrame({ id, title, desc, axis, span, zone, children }: PlotF
         ))}
       </svg>
       <div className="@container min-w-0 flex-1 pr-2">
-        <svg
-          role="img"
-          aria-labelledby={`${id}-title ${id}-desc`}
-          className="block w-full overflow-visible"
-          height={height}
-        >
-          <title id={`${id}-title`}>{title}</title>
-          <desc id={`${id}-desc`}>{desc}</desc>
+        <Drawing id={id} title={title} desc={desc} height={height}>
           <Stretched height={height}>
             <path
               d={[
@@ -57,7 +51,7 @@ export function PlotFrame({ id, title, desc, axis, span, zone, children }: PlotF
           </Stretched>
           {children}
           <TimeLabels ticks={ticks} y={bottom + 18} />
-        </svg>
+        </Drawing>
       </div>
     </div>
   )

@@ -50,3 +50,29 @@ export function PlotLegend({ items }: { readonly items: readonly LegendItem[] })
     </ul>
   )
 }
+
+interface DrawingProps {
+  /** Of this page alone: the title and the words for those who hear it are named after it. */
+  readonly id: string
+  readonly title: string
+  readonly desc: string
+  /** Px. */
+  readonly height: number
+  readonly children: ReactNode
+}
+
+/** The picture of a plot, as wide as its room, with its title and what it shows in words. */
+export function Drawing({ id, title, desc, height, children }: DrawingProps) {
+  return (
+    <svg
+      role="img"
+      aria-labelledby={`${id}-title ${id}-desc`}
+      className="block w-full overflow-visible"
+      height={height}
+    >
+      <title id={`${id}-title`}>{title}</title>
+      <desc id={`${id}-desc`}>{desc}</desc>
+      {children}
+    </svg>
+  )
+}
