@@ -25,8 +25,8 @@ const event = (overrides: Partial<AdverseEventData>): AdverseEventData => ({ ...
 
 test('events read as short sentences', () => {
   expect(adverseEventExamples.map(adverseEventSentence)).toEqual([
-    'Adverse event: tube blocked. Help called, Inner cannula taken out, Suctioned. Recovered. Told: charge nurse, doctor.',
-    'Adverse event: tube came out. Tube out now. Help called, Oxygen given. Not settled yet. Told: emergency team. Turned in bed; ties had come loose.',
+    'Adverse event: tube blocked. Help called, inner cannula taken out, suctioned. Recovered. Told: charge nurse, doctor.',
+    'Adverse event: tube came out. Tube out now. Help called, oxygen given. Not settled yet. Told: emergency team. Turned in bed; ties had come loose.',
     'Adverse event: tube displaced. Tube in place now. Tube put back or replaced. Moved to higher care. Told: doctor, family.',
     'Adverse event: bleeding. Help called. Not settled yet. Told: doctor, tracheostomy team.',
     'Adverse event: valve or cap on with the cuff up. Valve or cap taken off. Recovered. Told: charge nurse.',

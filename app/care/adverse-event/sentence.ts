@@ -1,3 +1,4 @@
+import { inSentence } from '../field-meta.ts'
 import { sentence } from '../sentence.ts'
 import { type AdverseEventData, events, measures, outcomes, toldPeople } from './schema.ts'
 
@@ -5,13 +6,15 @@ import { type AdverseEventData, events, measures, outcomes, toldPeople } from '.
 export function adverseEventSentence(data: AdverseEventData): string {
   const { event, what, tubeNow, done, outcome, told, note } = data
   return [
-    sentence(`Adverse event: ${event === 'other' && what !== undefined ? what : lower(events[event])}`),
+    sentence(`Adverse event: ${event === 'other' && what !== undefined ? what : inSentence(events[event])}`),
     ...(tubeNow ? [`Tube ${tubeNow === 'in' ? 'in place' : 'out'} now.`] : []),
-    `${done.map(measure => measures[measure]).join(', ')}.`,
+    `${measuresWords(done)}.`,
     `${outcomes[outcome]}.`,
-    `Told: ${told.map(person => lower(toldPeople[person])).join(', ')}.`,
+    `Told: ${told.map(person => inSentence(toldPeople[person])).join(', ')}.`,
     ...(note ? [sentence(note)] : []),
   ].join(' ')
 }
 
-const lower = (words: string): string => words.charAt(0).toLowerCase() + words.slice(1)
+function measuresWords([first, ...others]: AdverseEventData['done']): string {
+  return [...(first ? [measures[first]] : []), ...others.map(other => inSentence(measures[other]))].join(', ')
+}
